@@ -1,0 +1,9 @@
+//! Telescope optics readouts for firmware.
+#![no_std]
+#![deny(unsafe_code)]
+#![warn(missing_docs)]
+
+pub mod status;
+pub mod units;
+
+pub use status::{Cause, Error};

@@ -1,0 +1,49 @@
+//! The quantities of the fixed forms, each an integer with its unit in its name.
+//!
+//! In C the same integer is a plain `stdint.h` type whose name carries the suffix given here.
+
+macro_rules! quantity {
+    ($($(#[$doc:meta])* $name:ident($integer:ty)),* $(,)?) => {$(
+        $(#[$doc])*
+        #[derive(Clone, Copy, Debug, Default, PartialEq, Eq, PartialOrd, Ord, Hash)]
+        #[repr(transparent)]
+        pub struct $name(pub $integer);
+    )*};
+}
+
+quantity! {
+    /// Apertures, focal lengths, field stops, pupils. C suffix `_um`; the float form is in millimetres, `_mm`.
+    Micrometres(u32),
+    /// A length that may be negative. C suffix `_um`; the float form is in millimetres, `_mm`.
+    SignedMicrometres(i32),
+    /// Pixel pitch, wavelength, lengths at the focus. C suffix `_nm`; the float form is in micrometres, `_um`, but
+    /// for wavelengths and rms wavefront, which stay in nanometres, `_nm`.
+    Nanometres(u32),
+    /// Fields of view and separations. C suffix `_mas`; the float form is in arcseconds, `_arcsec`.
+    Milliarcseconds(u32),
+    /// An angle that may be negative. C suffix `_mas`.
+    SignedMilliarcseconds(i32),
+    /// Resolution, pixel scale, seeing. C suffix `_uas`; the float form is in arcseconds, `_arcsec`.
+    Microarcseconds(u32),
+    /// Plate scale. C suffix `_mas_per_mm`; the float form is in arcseconds per millimetre.
+    MilliarcsecondsPerMillimetre(u32),
+    /// Ratios, magnifications, focal ratios: unsigned Q16.16. C suffix `_q16`; the float form is a plain number.
+    Q16(u32),
+    /// Thousandths of a plain number. C suffix `_milli`.
+    Milli(u32),
+    /// Brightness on the magnitude scale. C suffix `_mmag`; the float form is in magnitudes, `_mag`.
+    Millimagnitudes(i32),
+    /// Extinction, never negative. C suffix `_mmag`; the float form is in magnitudes, `_mag`.
+    MillimagnitudesPerAirmass(u32),
+    /// A binary angle that wraps: 2^32 is one turn. C suffix `_bam`; the float form is in degrees, `_deg`.
+    Bam(u32),
+    /// A binary angle either side of zero: 2^32 is one turn. C suffix `_bam`; the float form is in degrees, `_deg`.
+    SignedBam(i32),
+    /// Milliseconds of a circle of 24 hours. C suffix `_day_ms`.
+    DayMilliseconds(u32),
+}
+
+impl Q16 {
+    /// 1.0
+    pub const ONE: Q16 = Q16(1 << 16);
+}
