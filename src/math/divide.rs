@@ -146,9 +146,9 @@ pub(crate) const fn by_64(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
     if d >> 32 == 0 {
         return with_fraction(n, 0, d as u32); // top < d, so upper is 0
     }
-    let (d1, shift) = normalise((d >> 32) as u32);
+    let (_, shift) = normalise((d >> 32) as u32);
     let d = shift_up(d, shift);
-    let d0 = d as u32;
+    let (d1, d0) = ((d >> 32) as u32, d as u32);
     let n0 = (n as u32) << shift;
     let top = shift_up(top, shift) | ((n as u32 >> 1) >> (31 - shift)) as u64;
     let (mut quotient, mut rest) = if (top >> 32) as u32 >= d1 {
@@ -157,8 +157,7 @@ pub(crate) const fn by_64(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
         let (quotient, rest) = divide_normalised(top, d1);
         (quotient, rest as u64)
     };
-    let product = wide(quotient, d0);
-    let mut excess = product;
+    let mut excess = wide(quotient, d0);
     // At most twice; once the rest has 33 bits the quotient is right.
     while rest >> 32 == 0 && excess > (rest << 32 | n0 as u64) {
         quotient -= 1;
