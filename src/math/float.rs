@@ -23,10 +23,17 @@ pub trait Real:
     + Neg<Output = Self>
     + sealed::Sealed
 {
+    /// 2^s + 1 where s is half of the digits, rounded up: it cuts a number in two for an exact product.
+    #[doc(hidden)]
+    const SPLIT: Self;
     /// The nearest value of this type.
     fn of(value: f64) -> Self;
     #[doc(hidden)]
     fn is_finite(self) -> bool;
+    #[doc(hidden)]
+    fn to_i64(self) -> i64;
+    #[doc(hidden)]
+    fn floor(self) -> Self;
     #[doc(hidden)]
     fn sqrt(self) -> Self;
     #[doc(hidden)]
@@ -54,9 +61,10 @@ pub trait Real:
 }
 
 macro_rules! real {
-    ($t:ty, $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
+    ($t:ty, $split:literal, $floor:ident $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
      $log10:ident $exp:ident $pow:ident $hypot:ident) => {
         impl Real for $t {
+            const SPLIT: Self = $split;
             #[inline(always)]
             fn of(value: f64) -> Self {
                 value as $t
@@ -64,6 +72,12 @@ macro_rules! real {
             #[inline(always)]
             fn is_finite(self) -> bool {
                 <$t>::is_finite(self)
+            }
+            fn to_i64(self) -> i64 {
+                self as i64
+            }
+            fn floor(self) -> Self {
+                libm::$floor(self)
             }
             fn sqrt(self) -> Self {
                 libm::$sqrt(self)
@@ -105,8 +119,8 @@ macro_rules! real {
     };
 }
 
-real!(f32, sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
-real!(f64, sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
+real!(f32, 4097.0, floorf sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
+real!(f64, 134217729.0, floor sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
 
 const LEAST: f64 = 1.0 / (1u64 << 40) as f64;
 const MOST: f64 = (1u64 << 40) as f64;
