@@ -47,7 +47,10 @@ mod header {
         let mut config = cbindgen::Config::from_file("cbindgen.toml").unwrap();
         let mut builder = cbindgen::Builder::new();
         for (path, text) in &sources {
-            builder = builder.with_src(path);
+            // It finds the other files of src/capi from there.
+            if path.ends_with("capi/mod.rs") || !path.starts_with("src/capi") {
+                builder = builder.with_src(path);
+            }
             for (name, c_name) in structs(text) {
                 config.export.rename.insert(name, c_name);
             }
@@ -161,18 +164,50 @@ mod header {
         let mut body = String::new();
         for section in sections {
             let mut here = String::new();
+            let mut constants = false;
             for item in items.iter().filter(|item| section.names.iter().any(|name| name == declared(item))) {
-                let item = item.trim_matches('\n').replace("defined(FIELDSTOP_FLOAT)", "!defined(FIELDSTOP_NO_FLOAT)");
-                here.push_str(&format!("{item}\n\n"));
+                if constants && !item.contains("#define ") && !here.ends_with("\n\n") {
+                    here.push('\n');
+                }
+                constants = item.contains("#define ");
+                here.push_str(&plainer(item));
                 placed += 1;
             }
             if !here.is_empty() {
+                let here = here.trim_end();
                 let rule = "-".repeat(98);
-                body.push_str(&format!("/* {rule}\n{} */\n\n{here}", wrapped(&section.title)));
+                body.push_str(&format!("/* {rule}\n{} */\n\n{here}\n\n", wrapped(&section.title)));
             }
         }
         assert_eq!(placed, items.len(), "an item of cbindgen's that no file of src/capi declares");
         body
+    }
+
+    /// Without Rust's marks for links, and short where a comment is.
+    fn plainer(item: &str) -> String {
+        let item =
+            item.trim_matches('\n').replace("defined(FIELDSTOP_FLOAT)", "!defined(FIELDSTOP_NO_FLOAT)");
+        let item = item.replace("[`", "`").replace("`]", "`");
+        let lines: Vec<&str> = item.lines().collect();
+        let mut plain = String::new();
+        let mut at = 0;
+        while at < lines.len() {
+            let indent = &lines[at][..lines[at].len() - lines[at].trim_start().len()];
+            if lines[at].trim() == "/**" && lines.get(at + 2).is_some_and(|line| line.trim() == "*/") {
+                let text = lines[at + 1].trim_start().trim_start_matches("* ");
+                plain.push_str(&format!("{indent}/** {text} */\n"));
+                at += 3;
+            } else {
+                plain.push_str(lines[at]);
+                plain.push('\n');
+                at += 1;
+            }
+        }
+        // Constants with their one line stand close together.
+        if lines.len() > 4 || !item.contains("#define ") {
+            plain.push('\n');
+        }
+        plain
     }
 
     fn wrapped(text: &str) -> String {

@@ -11,8 +11,8 @@
  *     fieldstop_<name>_fx     integers, for a part without FPU
  *     fieldstop_<name>_f32    float, computed in float throughout
  *     fieldstop_<name>_f64    double
- * The comment of the _f32 form holds for the _f64 form where that adds nothing. Define
- * FIELDSTOP_NO_FLOAT to leave out the prototypes of both; those of _f64 are absent on AVR.
+ * Define FIELDSTOP_NO_FLOAT to leave out the prototypes of the last two; those of _f64 are absent on AVR
+ * in any case.
  *
  * Units. A name ends in its unit:
  *     _um      micrometres          _mm        millimetres
@@ -83,8 +83,7 @@ __asm__(".pushsection .fieldstop_abi,\"\"\n\t.long fieldstop_abi_1\n\t.popsectio
 extern "C" {
 #endif
 
-@BODY@
-#ifdef __cplusplus
+@BODY@#ifdef __cplusplus
 } /* extern "C" */
 #endif
 
