@@ -72,11 +72,12 @@
 #endif
 
 /*
- * A library of another ABI does not link: a word that takes no room on the part asks for this one's.
- * Define FIELDSTOP_NO_ABI_CHECK where a linker script refuses the section.
+ * A library of another ABI does not link: a word among the debugging data, which takes no room on
+ * the part, asks for this one's. Define FIELDSTOP_NO_ABI_CHECK where a linker script refuses
+ * that section.
  */
 #if defined(__GNUC__) && defined(__ELF__) && !defined(FIELDSTOP_NO_ABI_CHECK)
-__asm__(".pushsection .fieldstop_abi,\"\"\n\t.long fieldstop_abi_1\n\t.popsection");
+__asm__(".pushsection .debug_fieldstop_abi,\"\"\n\t.long fieldstop_abi_1\n\t.popsection");
 #endif
 
 #ifdef __cplusplus
