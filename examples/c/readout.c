@@ -44,11 +44,17 @@ static int is_there(const char *label, fieldstop_status status)
     return 0;
 }
 
-/* value / scale with two decimals; the value of every readout here is far below 2^32 / 100 scales. */
+/* value / scale with two decimals; scale is at most 1000000. */
 static void print_value(const char *label, uint32_t value, uint32_t scale, const char *unit)
 {
-    uint64_t hundredths = ((uint64_t)value * 100 + scale / 2) / scale;
-    printf("  %-14s %7" PRIu64 ".%02u%s\n", label, hundredths / 100, (unsigned)(hundredths % 100), unit);
+    uint32_t whole = value / scale;
+    uint32_t hundredths = (value % scale * 100 + scale / 2) / scale;
+
+    if (hundredths == 100) {
+        whole++;
+        hundredths = 0;
+    }
+    printf("  %-14s %7" PRIu32 ".%02" PRIu32 "%s\n", label, whole, hundredths, unit);
 }
 
 /* The readouts that need no eyepiece. */
