@@ -7,6 +7,7 @@
 pub mod field;
 pub mod light;
 pub mod status;
+pub mod units;
 
 use crate::status::{Cause, Error};
 

@@ -321,13 +321,14 @@ pub fn true_field_rectilinear_fx(
     present(focal_length.0, 2)?;
     present(eyepiece.0, 3)?;
     // tan(A / 2) = 8 A / adjacent up to 90 degrees; above, the reciprocal of that of the rest to 180 degrees.
-    let (n, d) = if apparent_field.0 <= HALF_TURN_MAS / 2 {
-        (wide(eyepiece.0, 8 * apparent_field.0), wide(focal_length.0, arc::adjacent(apparent_field.0)))
+    let rest = HALF_TURN_MAS - apparent_field.0;
+    let angle = if apparent_field.0 <= rest {
+        let adjacent = arc::adjacent(apparent_field.0);
+        arc::angle_of_products(eyepiece.0, 8 * apparent_field.0, focal_length.0, adjacent)
     } else {
-        let rest = HALF_TURN_MAS - apparent_field.0;
-        (wide(eyepiece.0, arc::adjacent(rest)), wide(focal_length.0, 8 * rest))
+        arc::angle_of_products(eyepiece.0, arc::adjacent(rest), focal_length.0, 8 * rest)
     };
-    Ok(Milliarcseconds(arc::angle_of_ratio(n, d)))
+    Ok(Milliarcseconds(angle))
 }
 
 /// Float form of [`true_field_rectilinear_fx`].
@@ -407,7 +408,7 @@ pub fn frame_field_fx(
     present(pixel.0, 1)?;
     present(pixel_count, 2)?;
     present(focal_length.0, 3)?;
-    Ok(Milliarcseconds(arc::angle_of_ratio(wide(pixel.0, pixel_count), wide(focal_length.0, 2000))))
+    Ok(Milliarcseconds(arc::angle_of_products(pixel.0, pixel_count, focal_length.0, 2000)))
 }
 
 /// Float form of [`frame_field_fx`].
