@@ -1,0 +1,3 @@
+//! The formulas against published values, their source beside each.
+
+mod light;
