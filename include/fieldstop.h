@@ -143,7 +143,7 @@ fieldstop_status fieldstop_focal_ratio_fx(uint32_t focal_length_um,
  * Gives the focal ratio (the N of f/N), a plain number.
  *
  * N = f / D.
- * Ranges: focal_length_mm 2^-40 to 2^40; aperture_mm 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -158,7 +158,7 @@ fieldstop_status fieldstop_focal_ratio_f32(float focal_length_mm,
  * Gives the focal ratio (the N of f/N), a plain number.
  *
  * N = f / D.
- * Ranges: focal_length_mm 2^-40 to 2^40; aperture_mm 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -186,7 +186,7 @@ fieldstop_status fieldstop_amplified_focal_length_fx(uint32_t focal_length_um,
  * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
  *
  * f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
- * Ranges: focal_length_mm 2^-40 to 2^40; amplification 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -201,7 +201,7 @@ fieldstop_status fieldstop_amplified_focal_length_f32(float focal_length_mm,
  * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
  *
  * f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
- * Ranges: focal_length_mm 2^-40 to 2^40; amplification 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -229,7 +229,7 @@ fieldstop_status fieldstop_amplification_fx(int32_t element_focal_length_um,
  * Gives how much a lens before the focus lengthens the focal length, a plain number.
  *
  * k = 1 - s' / f, a thin lens of focal length f with the image s' behind it.
- * Ranges: element_focal_length_mm 2^-40 to 2^40, or -2^40 to -2^-40; image_distance_mm 0 to 2^40, and under
+ * Ranges: element_focal_length_mm 2^-32 to 2^32, or -2^32 to -2^-32; image_distance_mm 0 to 2^32, and under
  * f where f is positive.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
@@ -245,7 +245,7 @@ fieldstop_status fieldstop_amplification_f32(float element_focal_length_mm,
  * Gives how much a lens before the focus lengthens the focal length, a plain number.
  *
  * k = 1 - s' / f, a thin lens of focal length f with the image s' behind it.
- * Ranges: element_focal_length_mm 2^-40 to 2^40, or -2^40 to -2^-40; image_distance_mm 0 to 2^40, and under
+ * Ranges: element_focal_length_mm 2^-32 to 2^32, or -2^32 to -2^-32; image_distance_mm 0 to 2^32, and under
  * f where f is positive.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
@@ -274,7 +274,7 @@ fieldstop_status fieldstop_magnification_fx(uint32_t focal_length_um,
  * Gives the magnification of a telescope with an eyepiece, a plain number.
  *
  * M = f / fe.
- * Ranges: focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -289,7 +289,7 @@ fieldstop_status fieldstop_magnification_f32(float focal_length_mm,
  * Gives the magnification of a telescope with an eyepiece, a plain number.
  *
  * M = f / fe.
- * Ranges: focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -318,7 +318,7 @@ fieldstop_status fieldstop_exit_pupil_fx(uint32_t aperture_um,
  * Gives the diameter of the beam that leaves the eyepiece, in mm.
  *
  * D fe / f.
- * Ranges: aperture_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+ * Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -334,7 +334,7 @@ fieldstop_status fieldstop_exit_pupil_f32(float aperture_mm,
  * Gives the diameter of the beam that leaves the eyepiece, in mm.
  *
  * D fe / f.
- * Ranges: aperture_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+ * Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -364,7 +364,7 @@ fieldstop_status fieldstop_eyepiece_for_exit_pupil_fx(uint32_t exit_pupil_um,
  * Gives the eyepiece focal length that gives an exit pupil, in mm.
  *
  * p f / D.
- * Ranges: exit_pupil_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; aperture_mm 2^-40 to 2^40.
+ * Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -380,7 +380,7 @@ fieldstop_status fieldstop_eyepiece_for_exit_pupil_f32(float exit_pupil_mm,
  * Gives the eyepiece focal length that gives an exit pupil, in mm.
  *
  * p f / D.
- * Ranges: exit_pupil_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; aperture_mm 2^-40 to 2^40.
+ * Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -409,7 +409,7 @@ fieldstop_status fieldstop_eyepiece_for_magnification_fx(uint32_t focal_length_u
  * Gives the eyepiece focal length that gives a magnification, in mm.
  *
  * f / M.
- * Ranges: focal_length_mm 2^-40 to 2^40; magnification 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -424,7 +424,7 @@ fieldstop_status fieldstop_eyepiece_for_magnification_f32(float focal_length_mm,
  * Gives the eyepiece focal length that gives a magnification, in mm.
  *
  * f / M.
- * Ranges: focal_length_mm 2^-40 to 2^40; magnification 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -452,7 +452,7 @@ fieldstop_status fieldstop_true_field_from_stop_fx(uint32_t field_stop_um,
  * Gives the angle of sky inside the eyepiece's field stop, in arcsec.
  *
  * 2 atan(s / 2f).
- * Ranges: field_stop_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40.
+ * Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
  * Error: at most 3 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -467,7 +467,7 @@ fieldstop_status fieldstop_true_field_from_stop_f32(float field_stop_mm,
  * Gives the angle of sky inside the eyepiece's field stop, in arcsec.
  *
  * 2 atan(s / 2f).
- * Ranges: field_stop_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40.
+ * Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
  * Error: at most 3 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -497,8 +497,8 @@ fieldstop_status fieldstop_true_field_rectilinear_fx(uint32_t apparent_field_mas
  * Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
  *
  * 2 atan(tan(A/2) fe / f).
- * Ranges: apparent_field_arcsec 2^-40 to under 648000; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to
- * 2^40.
+ * Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
+ * 2^32.
  * Error: at most 3 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -514,8 +514,8 @@ fieldstop_status fieldstop_true_field_rectilinear_f32(float apparent_field_arcse
  * Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
  *
  * 2 atan(tan(A/2) fe / f).
- * Ranges: apparent_field_arcsec 2^-40 to under 648000; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to
- * 2^40.
+ * Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
+ * 2^32.
  * Error: at most 3 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -545,7 +545,7 @@ fieldstop_status fieldstop_true_field_equidistant_fx(uint32_t apparent_field_mas
  * Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
  *
  * A fe / f.
- * Ranges: apparent_field_arcsec 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+ * Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -561,7 +561,7 @@ fieldstop_status fieldstop_true_field_equidistant_f32(float apparent_field_arcse
  * Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
  *
  * A fe / f.
- * Ranges: apparent_field_arcsec 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+ * Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -591,7 +591,7 @@ fieldstop_status fieldstop_frame_field_fx(uint32_t pixel_nm,
  * Gives the angle of sky along one side of a sensor, in arcsec.
  *
  * 2 atan(p n / 2f).
- * Ranges: pixel_um 2^-40 to 2^40; pixel_count not 0, an integer; focal_length_mm 2^-40 to 2^40.
+ * Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
  * Error: at most 3 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -607,7 +607,7 @@ fieldstop_status fieldstop_frame_field_f32(float pixel_um,
  * Gives the angle of sky along one side of a sensor, in arcsec.
  *
  * 2 atan(p n / 2f).
- * Ranges: pixel_um 2^-40 to 2^40; pixel_count not 0, an integer; focal_length_mm 2^-40 to 2^40.
+ * Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
  * Error: at most 3 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -635,7 +635,7 @@ fieldstop_status fieldstop_plate_scale_fx(uint32_t focal_length_um,
  * Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
  *
  * (1 rad) / f.
- * Ranges: focal_length_mm 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -649,7 +649,7 @@ fieldstop_status fieldstop_plate_scale_f32(float focal_length_mm,
  * Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
  *
  * (1 rad) / f.
- * Ranges: focal_length_mm 2^-40 to 2^40.
+ * Ranges: focal_length_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -676,7 +676,7 @@ fieldstop_status fieldstop_pixel_scale_fx(uint32_t pixel_nm,
  * Gives the angle of sky to a pixel, in arcsec.
  *
  * (1 rad) p / f.
- * Ranges: pixel_um 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40.
+ * Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -691,7 +691,7 @@ fieldstop_status fieldstop_pixel_scale_f32(float pixel_um,
  * Gives the angle of sky to a pixel, in arcsec.
  *
  * (1 rad) p / f.
- * Ranges: pixel_um 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40.
+ * Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
  * Error: at most 2 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -719,7 +719,7 @@ fieldstop_status fieldstop_focal_length_for_field_fx(uint32_t extent_um,
  * Gives the focal length that spreads a field over a width at the focus, in mm.
  *
  * x / (2 tan(t/2)).
- * Ranges: extent_mm 2^-40 to 2^40; field_arcsec 2^-40 to under 648000.
+ * Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
  * Error: at most 3 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -734,7 +734,7 @@ fieldstop_status fieldstop_focal_length_for_field_f32(float extent_mm,
  * Gives the focal length that spreads a field over a width at the focus, in mm.
  *
  * x / (2 tan(t/2)).
- * Ranges: extent_mm 2^-40 to 2^40; field_arcsec 2^-40 to under 648000.
+ * Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
  * Error: at most 3 ulp.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -763,7 +763,7 @@ fieldstop_status fieldstop_tiles_fx(uint32_t target_mas,
  * Gives how many frames in a row cover a target.
  *
  * the smallest n with n frame - (n - 1) overlap >= target, at least 1.
- * Ranges: target_arcsec 2^-40 to 2^40; frame_arcsec 2^-40 to 2^40; overlap_arcsec 0 to under the frame.
+ * Ranges: target_arcsec 2^-32 to 2^32; frame_arcsec 2^-32 to 2^32; overlap_arcsec 0 to under the frame.
  * Error: at most 0, it is exact.
  * Statuses: null pointer, zero, out of range, not finite.
  */
@@ -779,7 +779,7 @@ fieldstop_status fieldstop_tiles_f32(float target_arcsec,
  * Gives how many frames in a row cover a target.
  *
  * the smallest n with n frame - (n - 1) overlap >= target, at least 1.
- * Ranges: target_arcsec 2^-40 to 2^40; frame_arcsec 2^-40 to 2^40; overlap_arcsec 0 to under the frame.
+ * Ranges: target_arcsec 2^-32 to 2^32; frame_arcsec 2^-32 to 2^32; overlap_arcsec 0 to under the frame.
  * Error: at most 0, it is exact.
  * Statuses: null pointer, zero, out of range, not finite.
  */
