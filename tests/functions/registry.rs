@@ -5,6 +5,7 @@ use super::big::{Big, big};
 use fieldstop::Error;
 
 mod field;
+mod units;
 
 /// A unit of the contract: how many of the fixed form's steps make one of the float form's unit.
 #[derive(Clone, Copy, PartialEq, Debug)]
@@ -123,6 +124,8 @@ pub struct Row {
     pub refuses: fn(usize, &[Big]) -> bool,
     /// The largest term that the definition adds, where the error is counted in its last place.
     pub largest: Option<fn(&[Big]) -> Big>,
+    /// Steps of the result to a whole turn, where it lies on a circle: a result a turn away is the same.
+    pub circle: Option<f64>,
     pub fixed: Fixed,
     pub c_fixed: CFixed,
     pub floats: Option<Floats>,
@@ -145,6 +148,7 @@ impl Row {
 
 pub fn rows() -> Vec<Row> {
     let mut rows = Vec::new();
+    rows.extend(units::rows());
     rows.extend(field::rows());
     // FIELDSTOP_ONLY names the functions of a long run.
     if let Ok(only) = std::env::var("FIELDSTOP_ONLY") {
@@ -245,6 +249,11 @@ macro_rules! row {
     };
     (fixed only $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr, $ulp:expr,
      $exact:expr, $fx:ident $c_fx:ident) => {
+        row!(fixed only (fieldstop::optics::$subject) $subject::$stem [$($i $argument),*] -> $result, $owed, $ulp,
+            $exact, $fx $c_fx)
+    };
+    (fixed only ($($module:tt)*) $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr,
+     $ulp:expr, $exact:expr, $fx:ident $c_fx:ident) => {
         $crate::registry::Row {
             subject: stringify!($subject),
             stem: stringify!($stem),
@@ -256,8 +265,9 @@ macro_rules! row {
             exact: $exact,
             refuses: |_, _| false,
             largest: None,
+            circle: None,
             fixed: |a| {
-                fieldstop::optics::$subject::$fx($($crate::registry::Raw::of(a[$i])),*).map($crate::registry::Raw::raw)
+                $($module)*::$fx($($crate::registry::Raw::of(a[$i])),*).map($crate::registry::Raw::raw)
             },
             c_fixed: |a, held| {
                 let mut out = $crate::registry::Raw::of(held.unwrap_or(0));
