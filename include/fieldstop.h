@@ -123,6 +123,93 @@ uint32_t fieldstop_version(void);
 void fieldstop_abi_1(void);
 
 /* --------------------------------------------------------------------------------------------------
+   The quantities of the fixed forms, each an integer with its unit in its name. */
+
+/**
+ * Gives the binary angle of milliarcseconds, whole turns dropped.
+ *
+ * 2^32 a / 1296000000.
+ * Ranges: angle_mas any value.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_bam_from_mas_fx(int32_t angle_mas,
+                                           uint32_t *angle_bam);
+
+/**
+ * Gives the milliarcseconds of a binary angle, under 1296000000.
+ *
+ * 1296000000 b / 2^32; what rounds to a whole turn is 0.
+ * Ranges: angle_bam any value.
+ * Error: at most 0.5 LSB, on the circle.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_mas_from_bam_fx(uint32_t angle_bam,
+                                           uint32_t *angle_mas);
+
+/**
+ * Gives the milliarcseconds of a binary angle either side of zero.
+ *
+ * 1296000000 b / 2^32.
+ * Ranges: angle_bam any value.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_signed_mas_from_bam_fx(int32_t angle_bam,
+                                                  int32_t *angle_mas);
+
+/**
+ * Gives the binary angle of milliseconds on a circle of 24 hours.
+ *
+ * 2^32 t / 86400000.
+ * Ranges: time_day_ms under 86400000.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_bam_from_day_ms_fx(uint32_t time_day_ms,
+                                              uint32_t *angle_bam);
+
+/**
+ * Gives the milliseconds on a circle of 24 hours of a binary angle, under 86400000.
+ *
+ * 86400000 b / 2^32; what rounds to a whole day is 0.
+ * Ranges: angle_bam any value.
+ * Error: at most 0.5 LSB, on the circle.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_day_ms_from_bam_fx(uint32_t angle_bam,
+                                              uint32_t *time_day_ms);
+
+/**
+ * Gives the thousandths of a Q16.16 number.
+ *
+ * 1000 x.
+ * Ranges: number_q16 any value.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_milli_from_q16_fx(uint32_t number_q16,
+                                             uint32_t *number_milli);
+
+/**
+ * Gives the Q16.16 number of thousandths.
+ *
+ * m / 1000.
+ * Ranges: number_milli any value.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, overflow (65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_q16_from_milli_fx(uint32_t number_milli,
+                                             uint32_t *number_q16);
+
+/* --------------------------------------------------------------------------------------------------
    Field of view: what the focal lengths, the eyepiece and the sensor show of the sky. */
 
 /**
