@@ -202,9 +202,9 @@ mod tests {
             for j in 0..n {
                 if j != i {
                     let factor = rows[j][i] / rows[i][i];
-                    for k in i..=n {
-                        let x = rows[i][k];
-                        rows[j][k] -= factor * x;
+                    let pivot = rows[i].clone();
+                    for (x, y) in rows[j][i..].iter_mut().zip(&pivot[i..]) {
+                        *x -= factor * y;
                     }
                 }
             }
