@@ -6,6 +6,7 @@ use fieldstop::Error;
 
 mod field;
 mod units;
+mod light;
 
 /// A unit of the contract: how many of the fixed form's steps make one of the float form's unit.
 #[derive(Clone, Copy, PartialEq, Debug)]
@@ -150,6 +151,7 @@ pub fn rows() -> Vec<Row> {
     let mut rows = Vec::new();
     rows.extend(units::rows());
     rows.extend(field::rows());
+    rows.extend(light::rows());
     // FIELDSTOP_ONLY names the functions of a long run.
     if let Ok(only) = std::env::var("FIELDSTOP_ONLY") {
         rows.retain(|row| only.split(',').any(|stem| stem == row.stem));
