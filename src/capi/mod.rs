@@ -5,6 +5,7 @@
 #![allow(unsafe_code, non_camel_case_types, clippy::missing_safety_doc)]
 
 pub mod field;
+pub mod resolution;
 pub mod status;
 
 use crate::status::{Cause, Error};

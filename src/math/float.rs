@@ -23,6 +23,9 @@ pub trait Real:
     + Neg<Output = Self>
     + sealed::Sealed
 {
+    /// 2^h + 1, with h half the digits of the mantissa, rounded up.
+    #[doc(hidden)]
+    const SPLITTER: f64;
     /// The nearest value of this type.
     fn of(value: f64) -> Self;
     #[doc(hidden)]
@@ -54,9 +57,10 @@ pub trait Real:
 }
 
 macro_rules! real {
-    ($t:ty, $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
+    ($t:ty, $half:literal, $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
      $log10:ident $exp:ident $pow:ident $hypot:ident) => {
         impl Real for $t {
+            const SPLITTER: f64 = ((1u64 << $half) + 1) as f64;
             #[inline(always)]
             fn of(value: f64) -> Self {
                 value as $t
@@ -105,8 +109,8 @@ macro_rules! real {
     };
 }
 
-real!(f32, sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
-real!(f64, sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
+real!(f32, 12, sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
+real!(f64, 27, sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
 
 const LEAST: f64 = 1.0 / (1u64 << 40) as f64;
 const MOST: f64 = (1u64 << 40) as f64;
@@ -140,4 +144,25 @@ pub(crate) fn from_zero_to<F: Real>(most: f64, x: F, argument: u8) -> Result<(),
 /// Refuses what is not in 0 to 2^40.
 pub(crate) fn not_negative<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     from_zero_to(MOST, x, argument)
+}
+
+/// `a` b as a sum of two: the rounded product and what it lost. (Dekker, *Numerische Mathematik* 18, 224 (1971).)
+pub(crate) fn two_product<F: Real>(a: F, b: F) -> (F, F) {
+    let product = a * b;
+    let ((a1, a0), (b1, b0)) = (halves(a), halves(b));
+    (product, ((a1 * b1 - product) + a1 * b0 + a0 * b1) + a0 * b0)
+}
+
+/// `x` as a sum of two of half the digits each. (Veltkamp.)
+fn halves<F: Real>(x: F) -> (F, F) {
+    let scaled = x * F::of(F::SPLITTER);
+    let upper = scaled - (scaled - x);
+    (upper, x - upper)
+}
+
+/// a b / (c d) within 1.6 ulp.
+pub(crate) fn product_ratio<F: Real>(a: F, b: F, c: F, d: F) -> F {
+    let (n, n_lost) = two_product(a, b);
+    let (d, d_lost) = two_product(c, d);
+    (n + (n_lost - n * (d_lost / d))) / d
 }

@@ -5,6 +5,7 @@ use super::big::{Big, big};
 use fieldstop::Error;
 
 mod field;
+mod resolution;
 
 /// A unit of the contract: how many of the fixed form's steps make one of the float form's unit.
 #[derive(Clone, Copy, PartialEq, Debug)]
@@ -67,6 +68,7 @@ impl Argument {
 
 pub const APERTURE: Argument = positive("aperture_um", UM, (50_000, 500_000));
 pub const FOCAL_LENGTH: Argument = positive("focal_length_um", UM, (200_000, 5_000_000));
+pub const WAVELENGTH: Argument = positive("wavelength_nm", NM_AS_NM, (400, 900));
 pub const EYEPIECE: Argument = positive("eyepiece_um", UM, (3_000, 55_000));
 
 /// The error owed by the fixed form.
@@ -137,6 +139,7 @@ impl Row {
 pub fn rows() -> Vec<Row> {
     let mut rows = Vec::new();
     rows.extend(field::rows());
+    rows.extend(resolution::rows());
     rows
 }
 

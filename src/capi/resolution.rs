@@ -1,0 +1,415 @@
+//! C exports of `optics::resolution`.
+
+use super::{fieldstop_status, give};
+use crate::optics::resolution;
+use crate::units::{Microarcseconds, Micrometres, Nanometres};
+
+/// Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in microarcseconds.
+///
+/// (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+/// Ranges: aperture_um, wavelength_nm not 0.
+/// Error: at most 0.51 LSB.
+/// Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_rayleigh_limit_fx(
+    aperture_um: u32,
+    wavelength_nm: u32,
+    limit_uas: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(limit_uas, 3, || {
+            resolution::rayleigh_limit_fx(Micrometres(aperture_um), Nanometres(wavelength_nm))
+        })
+    }
+}
+
+/// Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in arcseconds.
+///
+/// (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_rayleigh_limit_f32(
+    aperture_mm: f32,
+    wavelength_nm: f32,
+    limit_arcsec: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(limit_arcsec, 3, || resolution::rayleigh_limit(aperture_mm, wavelength_nm)) }
+}
+
+/// Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in arcseconds, in
+/// double.
+///
+/// (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_rayleigh_limit_f64(
+    aperture_mm: f64,
+    wavelength_nm: f64,
+    limit_arcsec: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(limit_arcsec, 3, || resolution::rayleigh_limit(aperture_mm, wavelength_nm)) }
+}
+
+/// Gives Dawes's limit: the separation at which two equal stars are just seen apart, in microarcseconds.
+///
+/// 116 arcsec mm / D (common practice after Dawes, 1867).
+/// Ranges: aperture_um not 0.
+/// Error: at most 0.5 LSB.
+/// Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_dawes_limit_fx(aperture_um: u32, limit_uas: *mut u32) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(limit_uas, 2, || resolution::dawes_limit_fx(Micrometres(aperture_um))) }
+}
+
+/// Gives Dawes's limit: the separation at which two equal stars are just seen apart, in arcseconds.
+///
+/// 116 arcsec mm / D (common practice after Dawes, 1867).
+/// Ranges: aperture_mm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_dawes_limit_f32(
+    aperture_mm: f32,
+    limit_arcsec: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(limit_arcsec, 2, || resolution::dawes_limit(aperture_mm)) }
+}
+
+/// Gives Dawes's limit: the separation at which two equal stars are just seen apart, in arcseconds, in double.
+///
+/// 116 arcsec mm / D (common practice after Dawes, 1867).
+/// Ranges: aperture_mm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_dawes_limit_f64(
+    aperture_mm: f64,
+    limit_arcsec: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(limit_arcsec, 2, || resolution::dawes_limit(aperture_mm)) }
+}
+
+/// Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in microarcseconds.
+///
+/// 0.9471553 lambda / D (Sparrow 1916).
+/// Ranges: aperture_um, wavelength_nm not 0.
+/// Error: at most 0.51 LSB.
+/// Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_sparrow_limit_fx(
+    aperture_um: u32,
+    wavelength_nm: u32,
+    limit_uas: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(limit_uas, 3, || {
+            resolution::sparrow_limit_fx(Micrometres(aperture_um), Nanometres(wavelength_nm))
+        })
+    }
+}
+
+/// Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in arcseconds.
+///
+/// 0.9471553 lambda / D (Sparrow 1916).
+/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_sparrow_limit_f32(
+    aperture_mm: f32,
+    wavelength_nm: f32,
+    limit_arcsec: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(limit_arcsec, 3, || resolution::sparrow_limit(aperture_mm, wavelength_nm)) }
+}
+
+/// Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in arcseconds, in
+/// double.
+///
+/// 0.9471553 lambda / D (Sparrow 1916).
+/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_sparrow_limit_f64(
+    aperture_mm: f64,
+    wavelength_nm: f64,
+    limit_arcsec: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(limit_arcsec, 3, || resolution::sparrow_limit(aperture_mm, wavelength_nm)) }
+}
+
+/// Gives the full width at half maximum of a star's image in perfect optics and still air, in microarcseconds.
+///
+/// 1.0289940 lambda / D (Airy 1835).
+/// Ranges: aperture_um, wavelength_nm not 0.
+/// Error: at most 0.51 LSB.
+/// Statuses: null pointer, zero, overflow (the width is over 4294 arcseconds).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_airy_fwhm_fx(
+    aperture_um: u32,
+    wavelength_nm: u32,
+    fwhm_uas: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(fwhm_uas, 3, || resolution::airy_fwhm_fx(Micrometres(aperture_um), Nanometres(wavelength_nm)))
+    }
+}
+
+/// Gives the full width at half maximum of a star's image in perfect optics and still air, in arcseconds.
+///
+/// 1.0289940 lambda / D (Airy 1835).
+/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_airy_fwhm_f32(
+    aperture_mm: f32,
+    wavelength_nm: f32,
+    fwhm_arcsec: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(fwhm_arcsec, 3, || resolution::airy_fwhm(aperture_mm, wavelength_nm)) }
+}
+
+/// Gives the full width at half maximum of a star's image in perfect optics and still air, in arcseconds, in
+/// double.
+///
+/// 1.0289940 lambda / D (Airy 1835).
+/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_airy_fwhm_f64(
+    aperture_mm: f64,
+    wavelength_nm: f64,
+    fwhm_arcsec: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(fwhm_arcsec, 3, || resolution::airy_fwhm(aperture_mm, wavelength_nm)) }
+}
+
+/// Gives the radius of the Airy disc at the focus, centre to first dark ring, in nanometres.
+///
+/// (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+/// Ranges: focal_length_um, aperture_um, wavelength_nm not 0.
+/// Error: at most 0.51 LSB.
+/// Statuses: null pointer, zero, overflow (the radius is over 4.29 m).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_airy_radius_fx(
+    focal_length_um: u32,
+    aperture_um: u32,
+    wavelength_nm: u32,
+    radius_nm: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(radius_nm, 4, || {
+            resolution::airy_radius_fx(
+                Micrometres(focal_length_um),
+                Micrometres(aperture_um),
+                Nanometres(wavelength_nm),
+            )
+        })
+    }
+}
+
+/// Gives the radius of the Airy disc at the focus, centre to first dark ring, in micrometres.
+///
+/// (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_airy_radius_f32(
+    focal_length_mm: f32,
+    aperture_mm: f32,
+    wavelength_nm: f32,
+    radius_um: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(radius_um, 4, || resolution::airy_radius(focal_length_mm, aperture_mm, wavelength_nm)) }
+}
+
+/// Gives the radius of the Airy disc at the focus, centre to first dark ring, in micrometres, in double.
+///
+/// (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_airy_radius_f64(
+    focal_length_mm: f64,
+    aperture_mm: f64,
+    wavelength_nm: f64,
+    radius_um: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(radius_um, 4, || resolution::airy_radius(focal_length_mm, aperture_mm, wavelength_nm)) }
+}
+
+/// Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre,
+/// Q16.16.
+///
+/// D / (lambda f) (Goodman).
+/// Ranges: focal_length_um, aperture_um, wavelength_nm not 0.
+/// Error: at most 0.5 LSB.
+/// Statuses: null pointer, zero, overflow (the frequency is 65536 or more).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_cutoff_frequency_fx(
+    focal_length_um: u32,
+    aperture_um: u32,
+    wavelength_nm: u32,
+    frequency_q16: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(frequency_q16, 4, || {
+            resolution::cutoff_frequency_fx(
+                Micrometres(focal_length_um),
+                Micrometres(aperture_um),
+                Nanometres(wavelength_nm),
+            )
+        })
+    }
+}
+
+/// Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre.
+///
+/// D / (lambda f) (Goodman).
+/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_cutoff_frequency_f32(
+    focal_length_mm: f32,
+    aperture_mm: f32,
+    wavelength_nm: f32,
+    frequency: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(frequency, 4, || resolution::cutoff_frequency(focal_length_mm, aperture_mm, wavelength_nm))
+    }
+}
+
+/// Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre, in
+/// double.
+///
+/// D / (lambda f) (Goodman).
+/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_cutoff_frequency_f64(
+    focal_length_mm: f64,
+    aperture_mm: f64,
+    wavelength_nm: f64,
+    frequency: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(frequency, 4, || resolution::cutoff_frequency(focal_length_mm, aperture_mm, wavelength_nm))
+    }
+}
+
+/// Gives Fried's parameter, the aperture that the air leaves, in micrometres.
+///
+/// 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+/// Ranges: seeing_uas, wavelength_nm not 0.
+/// Error: at most 0.51 LSB.
+/// Statuses: null pointer, zero, overflow (the parameter is over 4.29 km).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_fried_parameter_fx(
+    seeing_uas: u32,
+    wavelength_nm: u32,
+    parameter_um: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(parameter_um, 3, || {
+            resolution::fried_parameter_fx(Microarcseconds(seeing_uas), Nanometres(wavelength_nm))
+        })
+    }
+}
+
+/// Gives Fried's parameter, the aperture that the air leaves, in millimetres.
+///
+/// 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+/// Ranges: seeing_arcsec, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_fried_parameter_f32(
+    seeing_arcsec: f32,
+    wavelength_nm: f32,
+    parameter_mm: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(parameter_mm, 3, || resolution::fried_parameter(seeing_arcsec, wavelength_nm)) }
+}
+
+/// Gives Fried's parameter, the aperture that the air leaves, in millimetres, in double.
+///
+/// 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+/// Ranges: seeing_arcsec, wavelength_nm 2^-40 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_fried_parameter_f64(
+    seeing_arcsec: f64,
+    wavelength_nm: f64,
+    parameter_mm: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(parameter_mm, 3, || resolution::fried_parameter(seeing_arcsec, wavelength_nm)) }
+}

@@ -1,0 +1,271 @@
+//! Resolution: how fine a telescope shows, and how far the air, the obstruction and the wavefront let it.
+
+use crate::math::divide::{self, Constant};
+#[cfg(feature = "float")]
+use crate::math::float::{Real, positive, product_ratio};
+use crate::math::multiply::{high, wide};
+use crate::status::Error;
+use crate::units::{Microarcseconds, Micrometres, Nanometres, Q16};
+
+use super::present;
+
+// The constants are those of a circular aperture, in wavelengths over the diameter, times the 206264806.2470964
+// microarcseconds that 1 nm over 1 um makes; the tests find them again from the Bessel functions.
+
+/// j11 / pi = 1.2196698912665044549, j11 = 3.8317059702075123 the first positive zero of J1.
+const RAYLEIGH: Constant = Constant { whole: 251_574_973, fraction: 3_468_197_346 };
+/// 2 v / pi = 0.9471552527091855445, v = 1.4877879918608007 where the second derivative of (J1(v) / v)^2 is zero.
+const SPARROW: Constant = Constant { whole: 195_364_794, fraction: 2_946_260_555 };
+/// 2 v / pi = 1.0289939699621880515, v = 1.6163399483107032 where (2 J1(v) / v)^2 is 1/2.
+const AIRY_FWHM: Constant = Constant { whole: 212_245_241, fraction: 3_623_583_185 };
+/// 0.98: the diameter and the width change places.
+const FRIED: Constant = Constant { whole: 202_139_510, fraction: 524_649_274 };
+/// The fraction of j11 / pi in steps of 2^-64.
+const AIRY_RADIUS: u64 = 943_474_998 << 32 | 3_889_147_235;
+
+/// Rayleigh's limit: the separation of two equal stars, one at the other's first dark ring.
+///
+/// (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1. Source: Born and Wolf, *Principles
+/// of Optics*, 8.5.2 and 8.6.2.
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | aperture | um | mm | not 0 |
+/// | wavelength | nm | nm | not 0 |
+///
+/// Result: uas, float arcsec.
+/// Error: at most 0.51 LSB; float 2 ulp.
+pub fn rayleigh_limit_fx(aperture: Micrometres, wavelength: Nanometres) -> Result<Microarcseconds, Error> {
+    present(aperture.0, 1)?;
+    present(wavelength.0, 2)?;
+    divide::constant(wavelength.0, RAYLEIGH, aperture.0).map(Microarcseconds)
+}
+
+/// Float form of [`rayleigh_limit_fx`].
+#[cfg(feature = "float")]
+pub fn rayleigh_limit<F: Real>(aperture_mm: F, wavelength_nm: F) -> Result<F, Error> {
+    positive(aperture_mm, 1)?;
+    positive(wavelength_nm, 2)?;
+    // The inverse is the one that both types round well.
+    Ok(wavelength_nm / (aperture_mm * F::of(3.974958179922813)))
+}
+
+/// Dawes's limit: the separation at which two equal stars of the sixth magnitude are just seen apart.
+///
+/// 116 arcsec mm / D. Source: common practice after Dawes, *Memoirs of the Royal Astronomical Society* 35, 137 (1867).
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | aperture | um | mm | not 0 |
+///
+/// Result: uas, float arcsec.
+/// Error: at most 0.5 LSB; float 2 ulp.
+pub fn dawes_limit_fx(aperture: Micrometres) -> Result<Microarcseconds, Error> {
+    present(aperture.0, 1)?;
+    divide::rounded(116_000_000_000, aperture.0).map(Microarcseconds)
+}
+
+/// Float form of [`dawes_limit_fx`].
+#[cfg(feature = "float")]
+pub fn dawes_limit<F: Real>(aperture_mm: F) -> Result<F, Error> {
+    positive(aperture_mm, 1)?;
+    Ok(F::of(116.0) / aperture_mm)
+}
+
+/// Sparrow's limit: the separation of two equal stars at which the dip between them is gone.
+///
+/// 0.9471553 lambda / D: two equal incoherent Airy patterns whose curvature vanishes midway. Source: Sparrow,
+/// *Astrophysical Journal* 44, 76 (1916).
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | aperture | um | mm | not 0 |
+/// | wavelength | nm | nm | not 0 |
+///
+/// Result: uas, float arcsec.
+/// Error: at most 0.51 LSB; float 2 ulp.
+pub fn sparrow_limit_fx(aperture: Micrometres, wavelength: Nanometres) -> Result<Microarcseconds, Error> {
+    present(aperture.0, 1)?;
+    present(wavelength.0, 2)?;
+    divide::constant(wavelength.0, SPARROW, aperture.0).map(Microarcseconds)
+}
+
+/// Float form of [`sparrow_limit_fx`].
+#[cfg(feature = "float")]
+pub fn sparrow_limit<F: Real>(aperture_mm: F, wavelength_nm: F) -> Result<F, Error> {
+    positive(aperture_mm, 1)?;
+    positive(wavelength_nm, 2)?;
+    Ok(wavelength_nm / (aperture_mm * F::of(5.11862949313541)))
+}
+
+/// Full width at half maximum of a star's image in perfect optics and still air.
+///
+/// 1.0289940 lambda / D, the width of the Airy pattern. Source: Airy, *Transactions of the Cambridge Philosophical
+/// Society* 5, 283 (1835); Born and Wolf, *Principles of Optics*, 8.5.2.
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | aperture | um | mm | not 0 |
+/// | wavelength | nm | nm | not 0 |
+///
+/// Result: uas, float arcsec.
+/// Error: at most 0.51 LSB; float 2 ulp.
+pub fn airy_fwhm_fx(aperture: Micrometres, wavelength: Nanometres) -> Result<Microarcseconds, Error> {
+    present(aperture.0, 1)?;
+    present(wavelength.0, 2)?;
+    divide::constant(wavelength.0, AIRY_FWHM, aperture.0).map(Microarcseconds)
+}
+
+/// Float form of [`airy_fwhm_fx`].
+#[cfg(feature = "float")]
+pub fn airy_fwhm<F: Real>(aperture_mm: F, wavelength_nm: F) -> Result<F, Error> {
+    positive(aperture_mm, 1)?;
+    positive(wavelength_nm, 2)?;
+    Ok(wavelength_nm * F::of(0.2122452418436812) / aperture_mm)
+}
+
+/// Radius of the Airy disc at the focus: centre to first dark ring.
+///
+/// (j11 / pi) lambda f / D = 1.2196699 lambda f / D. Source: Born and Wolf, *Principles of Optics*, 8.5.2.
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | focal length | um | mm | not 0 |
+/// | aperture | um | mm | not 0 |
+/// | wavelength | nm | nm | not 0 |
+///
+/// Result: nm, float um.
+/// Error: at most 0.51 LSB; float 2 ulp.
+pub fn airy_radius_fx(
+    focal_length: Micrometres,
+    aperture: Micrometres,
+    wavelength: Nanometres,
+) -> Result<Nanometres, Error> {
+    present(focal_length.0, 1)?;
+    present(aperture.0, 2)?;
+    present(wavelength.0, 3)?;
+    let product = wide(focal_length.0, wavelength.0);
+    let (upper, lower) = ((product >> 32) as u32, product as u32);
+    let (first, second) = ((AIRY_RADIUS >> 32) as u32, AIRY_RADIUS as u32);
+    let mut whole = wide(upper, first);
+    // In steps of 2^-32; below 2^62, for `first` is below 2^30.
+    let mut below = wide(lower, first);
+    // A result below 2^24 would see the second half of the constant in its 2^-8 at most.
+    if product >> 24 >= aperture.0 as u64 {
+        let second_part = wide(upper, second) + high(lower, second) as u64;
+        whole += second_part >> 32;
+        below += second_part & 0xffff_ffff;
+    }
+    let (n, over) = product.overflowing_add(whole + (below >> 32));
+    if over {
+        return Err(Error::OVERFLOW);
+    }
+    divide::with_fraction(n, below as u32, aperture.0).map(Nanometres)
+}
+
+/// Float form of [`airy_radius_fx`].
+#[cfg(feature = "float")]
+pub fn airy_radius<F: Real>(focal_length_mm: F, aperture_mm: F, wavelength_nm: F) -> Result<F, Error> {
+    positive(focal_length_mm, 1)?;
+    positive(aperture_mm, 2)?;
+    positive(wavelength_nm, 3)?;
+    Ok(product_ratio(focal_length_mm, wavelength_nm, aperture_mm, F::of(819.8939788220898)))
+}
+
+/// Cutoff frequency at the focus: finer detail has no contrast at all.
+///
+/// D / (lambda f). Source: Goodman, *Introduction to Fourier Optics*, incoherent imaging.
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | focal length | um | mm | not 0 |
+/// | aperture | um | mm | not 0 |
+/// | wavelength | nm | nm | not 0 |
+///
+/// Result: cycles per mm in Q16.16, float plain.
+/// Error: at most 0.5 LSB; float 2 ulp.
+pub fn cutoff_frequency_fx(
+    focal_length: Micrometres,
+    aperture: Micrometres,
+    wavelength: Nanometres,
+) -> Result<Q16, Error> {
+    present(focal_length.0, 1)?;
+    present(aperture.0, 2)?;
+    present(wavelength.0, 3)?;
+    // 10^6 nm in a millimetre, 2^16 steps in one: 15625 2^22.
+    let n = wide(aperture.0, 15_625);
+    divide::by_64((n >> 42) as u32, n << 22, wide(focal_length.0, wavelength.0)).map(Q16)
+}
+
+/// Float form of [`cutoff_frequency_fx`].
+#[cfg(feature = "float")]
+pub fn cutoff_frequency<F: Real>(focal_length_mm: F, aperture_mm: F, wavelength_nm: F) -> Result<F, Error> {
+    positive(focal_length_mm, 1)?;
+    positive(aperture_mm, 2)?;
+    positive(wavelength_nm, 3)?;
+    Ok(product_ratio(aperture_mm, F::of(1e6), focal_length_mm, wavelength_nm))
+}
+
+/// Fried's parameter: the aperture that the air leaves, from the width of the star images.
+///
+/// r0 = 0.98 lambda / FWHM, at the same wavelength. Source: Fried, *Journal of the Optical Society of America* 56, 1372
+/// (1966); Dierickx, *Journal of Modern Optics* 39, 569 (1992).
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | seeing, full width at half maximum | uas | arcsec | not 0 |
+/// | wavelength | nm | nm | not 0 |
+///
+/// Result: um, float mm.
+/// Error: at most 0.51 LSB; float 2 ulp.
+pub fn fried_parameter_fx(seeing: Microarcseconds, wavelength: Nanometres) -> Result<Micrometres, Error> {
+    present(seeing.0, 1)?;
+    present(wavelength.0, 2)?;
+    divide::constant(wavelength.0, FRIED, seeing.0).map(Micrometres)
+}
+
+/// Float form of [`fried_parameter_fx`].
+#[cfg(feature = "float")]
+pub fn fried_parameter<F: Real>(seeing_arcsec: F, wavelength_nm: F) -> Result<F, Error> {
+    positive(seeing_arcsec, 1)?;
+    positive(wavelength_nm, 2)?;
+    Ok(wavelength_nm * F::of(0.20213951012215442) / seeing_arcsec)
+}
+
+#[cfg(all(test, feature = "float"))]
+mod tests {
+    use super::*;
+    use libm::{j1, jn};
+
+    /// A sign change of `f` between `a` and `b`.
+    fn root(f: impl Fn(f64) -> f64, mut a: f64, mut b: f64) -> f64 {
+        for _ in 0..60 {
+            let middle = (a + b) / 2.0;
+            if (f(middle) > 0.0) == (f(a) > 0.0) {
+                a = middle;
+            } else {
+                b = middle;
+            }
+        }
+        a
+    }
+
+    fn is(constant: Constant, wavelengths: f64) {
+        let value = constant.whole as f64 + constant.fraction as f64 / 4294967296.0;
+        let per_radian = 648_000_000.0 / core::f64::consts::PI;
+        assert!((value / per_radian - wavelengths).abs() < 2e-15, "{value} / {per_radian}, {wavelengths}");
+    }
+
+    #[test]
+    fn constants_are_those_of_the_airy_pattern() {
+        use core::f64::consts::PI;
+        let dark = root(j1, 3.0, 4.0) / PI;
+        is(RAYLEIGH, dark);
+        assert!((AIRY_RADIUS as f64 / 18446744073709551616.0 + 1.0 - dark).abs() < 2e-15);
+        is(AIRY_FWHM, 2.0 * root(|v| 2.0 * j1(v) / v - 0.5f64.sqrt(), 1.0, 2.0) / PI);
+        // (g^2)'' = 2 (g'^2 + g g''), g = J1(v) / v, g' = -J2(v) / v, g'' = -(J1(v) - 3 J2(v) / v) / v.
+        let curvature = |v| jn(2, v) * jn(2, v) - j1(v) * (j1(v) - 3.0 * jn(2, v) / v);
+        is(SPARROW, 2.0 * root(curvature, 1.0, 2.0) / PI);
+        is(FRIED, 0.98);
+    }
+}
