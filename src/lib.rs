@@ -21,7 +21,7 @@
 #![warn(missing_docs)]
 
 // A C library for a desktop takes its panic handler from std.
-#[cfg(all(feature = "capi", not(target_os = "none")))]
+#[cfg(any(test, all(feature = "capi", not(target_os = "none"))))]
 extern crate std;
 
 #[cfg(feature = "capi")]

@@ -23,13 +23,17 @@ pub trait Real:
     + Neg<Output = Self>
     + sealed::Sealed
 {
-    /// 2^h + 1, with h half the digits of the mantissa, rounded up.
+    /// 2^s + 1 where s is half of the digits, rounded up: it cuts a number in two for an exact product.
     #[doc(hidden)]
-    const SPLITTER: f64;
+    const SPLIT: Self;
     /// The nearest value of this type.
     fn of(value: f64) -> Self;
     #[doc(hidden)]
     fn is_finite(self) -> bool;
+    #[doc(hidden)]
+    fn to_i64(self) -> i64;
+    #[doc(hidden)]
+    fn floor(self) -> Self;
     #[doc(hidden)]
     fn sqrt(self) -> Self;
     #[doc(hidden)]
@@ -57,10 +61,10 @@ pub trait Real:
 }
 
 macro_rules! real {
-    ($t:ty, $half:literal, $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
+    ($t:ty, $split:literal, $floor:ident $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
      $log10:ident $exp:ident $pow:ident $hypot:ident) => {
         impl Real for $t {
-            const SPLITTER: f64 = ((1u64 << $half) + 1) as f64;
+            const SPLIT: Self = $split;
             #[inline(always)]
             fn of(value: f64) -> Self {
                 value as $t
@@ -68,6 +72,12 @@ macro_rules! real {
             #[inline(always)]
             fn is_finite(self) -> bool {
                 <$t>::is_finite(self)
+            }
+            fn to_i64(self) -> i64 {
+                self as i64
+            }
+            fn floor(self) -> Self {
+                libm::$floor(self)
             }
             fn sqrt(self) -> Self {
                 libm::$sqrt(self)
@@ -109,8 +119,8 @@ macro_rules! real {
     };
 }
 
-real!(f32, 12, sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
-real!(f64, 27, sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
+real!(f32, 4097.0, floorf sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
+real!(f64, 134217729.0, floor sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
 
 const LEAST: f64 = 1.0 / (1u64 << 40) as f64;
 const MOST: f64 = (1u64 << 40) as f64;
@@ -144,25 +154,4 @@ pub(crate) fn from_zero_to<F: Real>(most: f64, x: F, argument: u8) -> Result<(),
 /// Refuses what is not in 0 to 2^40.
 pub(crate) fn not_negative<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     from_zero_to(MOST, x, argument)
-}
-
-/// `a` b as a sum of two: the rounded product and what it lost. (Dekker, *Numerische Mathematik* 18, 224 (1971).)
-pub(crate) fn two_product<F: Real>(a: F, b: F) -> (F, F) {
-    let product = a * b;
-    let ((a1, a0), (b1, b0)) = (halves(a), halves(b));
-    (product, ((a1 * b1 - product) + a1 * b0 + a0 * b1) + a0 * b0)
-}
-
-/// `x` as a sum of two of half the digits each. (Veltkamp.)
-fn halves<F: Real>(x: F) -> (F, F) {
-    let scaled = x * F::of(F::SPLITTER);
-    let upper = scaled - (scaled - x);
-    (upper, x - upper)
-}
-
-/// a b / (c d) within 1.6 ulp.
-pub(crate) fn product_ratio<F: Real>(a: F, b: F, c: F, d: F) -> F {
-    let (n, n_lost) = two_product(a, b);
-    let (d, d_lost) = two_product(c, d);
-    (n + (n_lost - n * (d_lost / d))) / d
 }

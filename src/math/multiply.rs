@@ -20,3 +20,9 @@ pub(crate) const fn wide(a: u32, b: u32) -> u64 {
 pub(crate) const fn high(a: u32, b: u32) -> u32 {
     (wide(a, b) >> 32) as u32
 }
+
+/// The upper half of a signed by unsigned product.
+#[inline(always)]
+pub(crate) const fn high_signed(a: i32, b: u32) -> i32 {
+    high(a as u32, b).wrapping_sub((a >> 31) as u32 & b) as i32
+}

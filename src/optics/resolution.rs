@@ -2,7 +2,9 @@
 
 use crate::math::divide::{self, Constant};
 #[cfg(feature = "float")]
-use crate::math::float::{Real, positive, product_ratio};
+use crate::math::double::product_ratio;
+#[cfg(feature = "float")]
+use crate::math::float::{Real, positive};
 use crate::math::multiply::{high, wide};
 use crate::status::Error;
 use crate::units::{Microarcseconds, Micrometres, Nanometres, Q16};
