@@ -62,6 +62,78 @@ pub unsafe extern "C" fn fieldstop_rayleigh_limit_f64(
     unsafe { give(limit_arcsec, 3, || resolution::rayleigh_limit(aperture_mm, wavelength_nm)) }
 }
 
+/// Gives Rayleigh's limit with a central obstruction, in microarcseconds.
+///
+/// (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+/// Ranges: aperture_um, wavelength_nm not 0; obstruction_um under aperture_um.
+/// Error: at most 1 LSB or 2 parts in 10^6, the larger.
+/// Statuses: null pointer, zero, out of range, overflow (the limit is over 4294 arcseconds).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_rayleigh_limit_obstructed_fx(
+    aperture_um: u32,
+    obstruction_um: u32,
+    wavelength_nm: u32,
+    limit_uas: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(limit_uas, 4, || {
+            resolution::rayleigh_limit_obstructed_fx(
+                Micrometres(aperture_um),
+                Micrometres(obstruction_um),
+                Nanometres(wavelength_nm),
+            )
+        })
+    }
+}
+
+/// Gives Rayleigh's limit with a central obstruction, in arcseconds.
+///
+/// (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40; obstruction_mm 0 to under aperture_mm.
+/// Error: at most 2 parts in 10^6.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_rayleigh_limit_obstructed_f32(
+    aperture_mm: f32,
+    obstruction_mm: f32,
+    wavelength_nm: f32,
+    limit_arcsec: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(limit_arcsec, 4, || {
+            resolution::rayleigh_limit_obstructed(aperture_mm, obstruction_mm, wavelength_nm)
+        })
+    }
+}
+
+/// Gives Rayleigh's limit with a central obstruction, in arcseconds, in double.
+///
+/// (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40; obstruction_mm 0 to under aperture_mm.
+/// Error: at most 2 parts in 10^6.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_rayleigh_limit_obstructed_f64(
+    aperture_mm: f64,
+    obstruction_mm: f64,
+    wavelength_nm: f64,
+    limit_arcsec: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(limit_arcsec, 4, || {
+            resolution::rayleigh_limit_obstructed(aperture_mm, obstruction_mm, wavelength_nm)
+        })
+    }
+}
+
 /// Gives Dawes's limit: the separation at which two equal stars are just seen apart, in microarcseconds.
 ///
 /// 116 arcsec mm / D (common practice after Dawes, 1867).

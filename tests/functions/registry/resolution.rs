@@ -18,12 +18,55 @@ fn half_width() -> Big {
     decimal("1.02899396996218805148057131876754548886300971")
 }
 
+/// J0 and J1 by their series, for arguments up to 4.
+fn bessel(x: &Big) -> (Big, Big) {
+    let quarter = -(x * x) / big(4.0);
+    let (mut j0, mut j1) = (big(1.0), big(1.0));
+    let (mut term0, mut term1) = (big(1.0), big(1.0));
+    for k in 1..32 {
+        let k = k as f64;
+        term0 = term0 * &quarter / big(k * k);
+        term1 = term1 * &quarter / big(k * (k + 1.0));
+        j0 = j0 + &term0;
+        j1 = j1 + &term1;
+    }
+    (j0, j1 * x / big(2.0))
+}
+
+/// The first positive root of J1(x) = e J1(e x) by Newton's method.
+fn dark_ring(e: &Big) -> Big {
+    let m = (big(1.0) - e) / (big(1.0) + e);
+    // Within 0.01 of the root; four steps make that 10^-32.
+    let mut x = (big(2.405) - big(0.489) * &m * &m) * (big(1.0) + &m);
+    for _ in 0..4 {
+        let inner = e * &x;
+        let ((j0, j1), (i0, i1)) = (bessel(&x), bessel(&inner));
+        // J1'(x) = J0(x) - J1(x) / x; the second term of d/dx (e J1(e x)) is e J1(e x) / x.
+        let value = &j1 - e * &i1;
+        let slope = j0 - e * e * i0 - &value / &x;
+        x = x - value / slope;
+    }
+    x
+}
+
+const OBSTRUCTION: Argument = ordinary("obstruction_um", UM, (10_000, 200_000));
+
 pub fn rows() -> Vec<Row> {
     vec![
         row!(resolution::rayleigh_limit [0 APERTURE, 1 WAVELENGTH] -> UAS, IRRATIONAL, 2.0,
             |a| angle(j11() / pi(), &a[1], &a[0]),
             rayleigh_limit_fx fieldstop_rayleigh_limit_fx fieldstop_rayleigh_limit_f32
             fieldstop_rayleigh_limit_f64),
+        Row {
+            owed: Owed { lsb: 1.0, part: 2e-6 },
+            single_owed: FloatOwed::Part(2e-6),
+            double_owed: FloatOwed::Part(2e-6),
+            refuses: |i, a| i == 1 && a[1] >= a[0],
+            ..row!(resolution::rayleigh_limit_obstructed [0 APERTURE, 1 OBSTRUCTION, 2 WAVELENGTH] -> UAS, RATIONAL,
+                0.0, |a| angle(dark_ring(&(&a[1] / &a[0])) / pi(), &a[2], &a[0]),
+                rayleigh_limit_obstructed_fx fieldstop_rayleigh_limit_obstructed_fx
+                fieldstop_rayleigh_limit_obstructed_f32 fieldstop_rayleigh_limit_obstructed_f64)
+        },
         row!(resolution::dawes_limit [0 APERTURE] -> UAS, RATIONAL, 2.0,
             |a| big(116.0) / &a[0],
             dawes_limit_fx fieldstop_dawes_limit_fx fieldstop_dawes_limit_f32 fieldstop_dawes_limit_f64),
