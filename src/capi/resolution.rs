@@ -2,7 +2,7 @@
 
 use super::{fieldstop_status, give};
 use crate::optics::resolution;
-use crate::units::{Microarcseconds, Micrometres, Nanometres};
+use crate::units::{Microarcseconds, Micrometres, Nanometres, Q16};
 
 /// Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in microarcseconds.
 ///
@@ -391,7 +391,7 @@ pub unsafe extern "C" fn fieldstop_cutoff_frequency_fx(
 /// D / (lambda f) (Goodman).
 /// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
 /// Error: at most 2 ulp.
-/// Statuses: null pointer, zero, out of range, not finite.
+/// Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
@@ -427,6 +427,64 @@ pub unsafe extern "C" fn fieldstop_cutoff_frequency_f64(
     unsafe {
         give(frequency, 4, || resolution::cutoff_frequency(focal_length_mm, aperture_mm, wavelength_nm))
     }
+}
+
+/// Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in
+/// Q16.16.
+///
+/// exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+/// Ranges: wavelength_nm not 0.
+/// Error: at most 1 LSB.
+/// Statuses: null pointer, zero.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_strehl_ratio_fx(
+    rms_nm: u32,
+    wavelength_nm: u32,
+    ratio_q16: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(ratio_q16, 3, || resolution::strehl_ratio_fx(Nanometres(rms_nm), Nanometres(wavelength_nm)))
+    }
+}
+
+/// Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in a
+/// plain number.
+///
+/// exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+/// Ranges: rms_nm 0 to 2^40; wavelength_nm 2^-40 to 2^40.
+/// Error: at most 3 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_strehl_ratio_f32(
+    rms_nm: f32,
+    wavelength_nm: f32,
+    ratio: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(ratio, 3, || resolution::strehl_ratio(rms_nm, wavelength_nm)) }
+}
+
+/// Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in a
+/// plain number, in double.
+///
+/// exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+/// Ranges: rms_nm 0 to 2^40; wavelength_nm 2^-40 to 2^40.
+/// Error: at most 3 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_strehl_ratio_f64(
+    rms_nm: f64,
+    wavelength_nm: f64,
+    ratio: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(ratio, 3, || resolution::strehl_ratio(rms_nm, wavelength_nm)) }
 }
 
 /// Gives Fried's parameter, the aperture that the air leaves, in micrometres.
@@ -484,4 +542,123 @@ pub unsafe extern "C" fn fieldstop_fried_parameter_f64(
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(parameter_mm, 3, || resolution::fried_parameter(seeing_arcsec, wavelength_nm)) }
+}
+
+/// Gives the seeing at an airmass, from that at the zenith, in microarcseconds.
+///
+/// FWHM X^0.6 (Fried 1966).
+/// Ranges: seeing_uas not 0; airmass_q16 1 to 40.
+/// Error: at most 1 LSB or 1 part in 10^6, the larger.
+/// Statuses: null pointer, zero, out of range, overflow (the width is over 4294 arcseconds).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_seeing_at_airmass_fx(
+    seeing_uas: u32,
+    airmass_q16: u32,
+    fwhm_uas: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(fwhm_uas, 3, || resolution::seeing_at_airmass_fx(Microarcseconds(seeing_uas), Q16(airmass_q16)))
+    }
+}
+
+/// Gives the seeing at an airmass, from that at the zenith, in arcseconds.
+///
+/// FWHM X^0.6 (Fried 1966).
+/// Ranges: seeing_arcsec 2^-40 to 2^40; airmass 1 to 40.
+/// Error: at most 3 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_seeing_at_airmass_f32(
+    seeing_arcsec: f32,
+    airmass: f32,
+    fwhm_arcsec: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(fwhm_arcsec, 3, || resolution::seeing_at_airmass(seeing_arcsec, airmass)) }
+}
+
+/// Gives the seeing at an airmass, from that at the zenith, in arcseconds, in double.
+///
+/// FWHM X^0.6 (Fried 1966).
+/// Ranges: seeing_arcsec 2^-40 to 2^40; airmass 1 to 40.
+/// Error: at most 3 ulp.
+/// Statuses: null pointer, zero, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_seeing_at_airmass_f64(
+    seeing_arcsec: f64,
+    airmass: f64,
+    fwhm_arcsec: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(fwhm_arcsec, 3, || resolution::seeing_at_airmass(seeing_arcsec, airmass)) }
+}
+
+/// Gives the width of a star image that three causes blur, in microarcseconds.
+///
+/// sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+/// Ranges: a_uas, b_uas, c_uas may be anything.
+/// Error: at most 0.5 LSB.
+/// Statuses: null pointer, overflow (the width is over 4294 arcseconds).
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_combined_fwhm_fx(
+    a_uas: u32,
+    b_uas: u32,
+    c_uas: u32,
+    fwhm_uas: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(fwhm_uas, 4, || {
+            resolution::combined_fwhm_fx(
+                Microarcseconds(a_uas),
+                Microarcseconds(b_uas),
+                Microarcseconds(c_uas),
+            )
+        })
+    }
+}
+
+/// Gives the width of a star image that three causes blur, in arcseconds.
+///
+/// sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+/// Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_combined_fwhm_f32(
+    a_arcsec: f32,
+    b_arcsec: f32,
+    c_arcsec: f32,
+    fwhm_arcsec: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(fwhm_arcsec, 4, || resolution::combined_fwhm(a_arcsec, b_arcsec, c_arcsec)) }
+}
+
+/// Gives the width of a star image that three causes blur, in arcseconds, in double.
+///
+/// sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+/// Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^40.
+/// Error: at most 2 ulp.
+/// Statuses: null pointer, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_combined_fwhm_f64(
+    a_arcsec: f64,
+    b_arcsec: f64,
+    c_arcsec: f64,
+    fwhm_arcsec: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(fwhm_arcsec, 4, || resolution::combined_fwhm(a_arcsec, b_arcsec, c_arcsec)) }
 }

@@ -155,3 +155,8 @@ pub(crate) fn from_zero_to<F: Real>(most: f64, x: F, argument: u8) -> Result<(),
 pub(crate) fn not_negative<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     from_zero_to(MOST, x, argument)
 }
+
+/// Refuses a result that does not fit.
+pub(crate) fn fits<F: Real>(x: F) -> Result<F, Error> {
+    if x.is_finite() { Ok(x) } else { Err(Error::OVERFLOW) }
+}

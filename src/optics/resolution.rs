@@ -2,10 +2,11 @@
 
 use crate::math::divide::{self, Constant};
 #[cfg(feature = "float")]
-use crate::math::double::product_ratio;
+use crate::math::double::{Double, product_ratio};
 #[cfg(feature = "float")]
-use crate::math::float::{Real, not_negative, positive};
+use crate::math::float::{Real, fits, from_zero_to, not_negative, positive};
 use crate::math::multiply::{high, high_signed, wide};
+use crate::math::{logarithm, root};
 use crate::status::Error;
 use crate::units::{Microarcseconds, Micrometres, Nanometres, Q16};
 
@@ -279,7 +280,60 @@ pub fn cutoff_frequency<F: Real>(focal_length_mm: F, aperture_mm: F, wavelength_
     positive(focal_length_mm, 1)?;
     positive(aperture_mm, 2)?;
     positive(wavelength_nm, 3)?;
-    Ok(product_ratio(aperture_mm, F::of(1e6), focal_length_mm, wavelength_nm))
+    fits(product_ratio(aperture_mm, F::of(1e6), focal_length_mm, wavelength_nm))
+}
+
+/// (2 pi)^2 in two parts, the first exact in both types.
+#[cfg(feature = "float")]
+const FOUR_PI_SQUARED: [f64; 2] = [39.478416442871094, 1.161486340725338e-6];
+
+/// Strehl ratio of a wavefront that is not quite right: the brightness of the star image's centre against the perfect one.
+///
+/// exp(-(2 pi s / lambda)^2), s the root mean square wavefront error; good where the ratio is over about 0.1. Source:
+/// Mahajan, *Journal of the Optical Society of America* 73, 860 (1983), after Marechal.
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | rms wavefront error | nm | nm | |
+/// | wavelength | nm | nm | not 0 |
+///
+/// Result: Q16.16, float plain; at most 1.
+/// Error: at most 1 LSB; float 3 ulp.
+pub fn strehl_ratio_fx(rms: Nanometres, wavelength: Nanometres) -> Result<Q16, Error> {
+    present(wavelength.0, 2)?;
+    if rms.0 >= wavelength.0 {
+        return Ok(Q16(0)); // exp(-39)
+    }
+    let (waves, _) = divide::divide((rms.0 as u64) << 32, wavelength.0);
+    // (2 pi)^2 / ln 2 = 56.955 halvings at one wave, in steps of 2^-26.
+    let halvings = high(high(waves, waves), 3_822_206_643);
+    if halvings >> 31 != 0 {
+        return Ok(Q16(0)); // under 2^-32
+    }
+    let ratio = logarithm::exp2_negative(halvings << 1);
+    Ok(Q16((ratio + (1 << 14)) >> 15))
+}
+
+/// Float form of [`strehl_ratio_fx`].
+#[cfg(feature = "float")]
+pub fn strehl_ratio<F: Real>(rms_nm: F, wavelength_nm: F) -> Result<F, Error> {
+    not_negative(rms_nm, 1)?;
+    positive(wavelength_nm, 2)?;
+    let waves = rms_nm / wavelength_nm;
+    if waves > F::of(5.0) {
+        return Ok(F::of(0.0)); // exp(-987), below the least number of either type
+    }
+    // The exponent needs more digits than the result.
+    let back = Double::product(waves, wavelength_nm);
+    let waves_lost = ((rms_nm - back.upper) - back.lower) / wavelength_nm;
+    let square = Double::product(waves, waves);
+    let square_lost = square.lower + F::of(2.0) * waves * waves_lost;
+    let exponent = Double::product(square.upper, F::of(FOUR_PI_SQUARED[0]));
+    let exponent_lost =
+        exponent.lower + square_lost * F::of(FOUR_PI_SQUARED[0]) + square.upper * F::of(FOUR_PI_SQUARED[1]);
+    let exponent = Double::sum(exponent.upper, exponent_lost);
+    let ratio = (-exponent.upper).exp();
+    Ok(ratio - ratio * exponent.lower)
 }
 
 /// Fried's parameter: the aperture that the air leaves, from the width of the star images.
@@ -306,6 +360,78 @@ pub fn fried_parameter<F: Real>(seeing_arcsec: F, wavelength_nm: F) -> Result<F,
     positive(seeing_arcsec, 1)?;
     positive(wavelength_nm, 2)?;
     Ok(wavelength_nm * F::of(0.20213951012215442) / seeing_arcsec)
+}
+
+/// Seeing at an airmass, from that at the zenith: the full width at half maximum of the star images.
+///
+/// FWHM X^0.6. Source: Fried, *Journal of the Optical Society of America* 56, 1372 (1966), for Kolmogorov turbulence;
+/// Roddier, *Progress in Optics* 19, 281 (1981).
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | seeing at the zenith | uas | arcsec | not 0 |
+/// | airmass | Q16.16 | plain | 1 to 40 |
+///
+/// Result: uas, float arcsec.
+/// Error: at most 1 LSB or 1 part in 10^6, the larger; float 3 ulp.
+pub fn seeing_at_airmass_fx(seeing: Microarcseconds, airmass: Q16) -> Result<Microarcseconds, Error> {
+    present(seeing.0, 1)?;
+    allowed(airmass.0 >= Q16::ONE.0 && airmass.0 <= MOST_AIRMASS << 16, 2)?;
+    let doublings = high(logarithm::log2(airmass.0) - 16 * logarithm::ONE, 2_576_980_378);
+    // Under 3.2 doublings; 2^-27.
+    let growth = logarithm::exp2_negative(4 * logarithm::ONE - doublings);
+    let width = wide(seeing.0, growth) + (1 << 26) >> 27;
+    if width >> 32 != 0 {
+        return Err(Error::OVERFLOW);
+    }
+    Ok(Microarcseconds(width as u32))
+}
+
+const MOST_AIRMASS: u32 = 40;
+
+/// Float form of [`seeing_at_airmass_fx`].
+#[cfg(feature = "float")]
+pub fn seeing_at_airmass<F: Real>(seeing_arcsec: F, airmass: F) -> Result<F, Error> {
+    positive(seeing_arcsec, 1)?;
+    from_zero_to(MOST_AIRMASS as f64, airmass, 2)?;
+    allowed(airmass >= F::of(1.0), 2)?;
+    Ok(seeing_arcsec * airmass.powf(F::of(0.6)))
+}
+
+/// Width of a star image that three causes blur: such as the seeing, the telescope and the tracking.
+///
+/// sqrt(a^2 + b^2 + c^2), each a full width at half maximum, 0 for none. Source: exact for Gaussian images, whose
+/// variances add; common practice for others.
+///
+/// | argument | fixed | float | range |
+/// |---|---|---|---|
+/// | three widths | uas | arcsec | |
+///
+/// Result: uas, float arcsec.
+/// Error: at most 0.5 LSB; float 2 ulp.
+pub fn combined_fwhm_fx(
+    a: Microarcseconds,
+    b: Microarcseconds,
+    c: Microarcseconds,
+) -> Result<Microarcseconds, Error> {
+    let sum = wide(a.0, a.0).checked_add(wide(b.0, b.0)).and_then(|sum| sum.checked_add(wide(c.0, c.0)));
+    // A sum of 2^64 or more has a root of 2^32 or more.
+    root::rounded(sum.ok_or(Error::OVERFLOW)?).map(Microarcseconds)
+}
+
+/// Float form of [`combined_fwhm_fx`].
+#[cfg(feature = "float")]
+pub fn combined_fwhm<F: Real>(a_arcsec: F, b_arcsec: F, c_arcsec: F) -> Result<F, Error> {
+    not_negative(a_arcsec, 1)?;
+    not_negative(b_arcsec, 2)?;
+    not_negative(c_arcsec, 3)?;
+    let sum = a_arcsec * a_arcsec + b_arcsec * b_arcsec + c_arcsec * c_arcsec;
+    // Squares of less would lose bits at the bottom of f32.
+    if sum > F::of(1.0 / (1u64 << 60) as f64) {
+        Ok(sum.sqrt())
+    } else {
+        Ok(a_arcsec.hypot(b_arcsec).hypot(c_arcsec))
+    }
 }
 
 #[cfg(all(test, feature = "float"))]

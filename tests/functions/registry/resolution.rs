@@ -49,6 +49,9 @@ fn dark_ring(e: &Big) -> Big {
     x
 }
 
+const RMS: Argument = ordinary("rms_nm", NM_AS_NM, (5, 200));
+const AIRMASS: Argument = ordinary("airmass_q16", Q16, (65_536, 400_000)).within(65_536, 40 << 16);
+const WIDTH: Argument = ordinary("width_uas", UAS, (300_000, 10_000_000));
 const OBSTRUCTION: Argument = ordinary("obstruction_um", UM, (10_000, 200_000));
 
 pub fn rows() -> Vec<Row> {
@@ -87,5 +90,23 @@ pub fn rows() -> Vec<Row> {
             |a| decimal("0.98") * &a[1] / &a[0] * radian() / big(1e6),
             fried_parameter_fx fieldstop_fried_parameter_fx fieldstop_fried_parameter_f32
             fieldstop_fried_parameter_f64),
+        row!(resolution::strehl_ratio [0 RMS, 1 WAVELENGTH] -> Q16, TRANSCENDENTAL, 3.0,
+            |a| {
+                let phase = big(2.0) * pi() * &a[0] / &a[1];
+                let square = &phase * &phase;
+                // Beyond, the exponential is below the least f64.
+                if square > big(800.0) { big(0.0) } else { (-square).exp() }
+            },
+            strehl_ratio_fx fieldstop_strehl_ratio_fx fieldstop_strehl_ratio_f32 fieldstop_strehl_ratio_f64),
+        Row {
+            owed: Owed { lsb: 1.0, part: 1e-6 },
+            ..row!(resolution::seeing_at_airmass [0 SEEING, 1 AIRMASS] -> UAS, RATIONAL, 3.0,
+                |a| &a[0] * a[1].pow(&decimal("0.6")),
+                seeing_at_airmass_fx fieldstop_seeing_at_airmass_fx fieldstop_seeing_at_airmass_f32
+                fieldstop_seeing_at_airmass_f64)
+        },
+        row!(resolution::combined_fwhm [0 WIDTH, 1 WIDTH, 2 WIDTH] -> UAS, RATIONAL, 2.0,
+            |a| (&a[0] * &a[0] + &a[1] * &a[1] + &a[2] * &a[2]).sqrt(),
+            combined_fwhm_fx fieldstop_combined_fwhm_fx fieldstop_combined_fwhm_f32 fieldstop_combined_fwhm_f64),
     ]
 }
