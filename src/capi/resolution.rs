@@ -345,7 +345,7 @@ pub unsafe extern "C" fn fieldstop_airy_radius_f32(
 /// (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
 /// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
 /// Error: at most 2 ulp.
-/// Statuses: null pointer, zero, out of range, not finite.
+/// Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
@@ -427,6 +427,62 @@ pub unsafe extern "C" fn fieldstop_cutoff_frequency_f64(
     unsafe {
         give(frequency, 4, || resolution::cutoff_frequency(focal_length_mm, aperture_mm, wavelength_nm))
     }
+}
+
+/// Gives the contrast that the optics keep at a frequency, with a central obstruction, in Q16.16.
+///
+/// The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+/// (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+/// Ranges: frequency_q16 (of the cutoff frequency) at most 1; obstruction_q16 (of the aperture's diameter) under 1.
+/// Error: at most 1 LSB.
+/// Statuses: null pointer, out of range.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_contrast_fx(
+    frequency_q16: u32,
+    obstruction_q16: u32,
+    contrast_q16: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(contrast_q16, 3, || resolution::contrast_fx(Q16(frequency_q16), Q16(obstruction_q16))) }
+}
+
+/// Gives the contrast that the optics keep at a frequency, with a central obstruction, a plain number.
+///
+/// The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+/// (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+/// Ranges: frequency (of the cutoff frequency) 0 to 1; obstruction (of the aperture's diameter) 0 to under 1.
+/// Error: at most 4e-6.
+/// Statuses: null pointer, out of range, not finite.
+#[cfg(feature = "float")]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_contrast_f32(
+    frequency: f32,
+    obstruction: f32,
+    contrast: *mut f32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(contrast, 3, || resolution::contrast(frequency, obstruction)) }
+}
+
+/// Gives the contrast that the optics keep at a frequency, with a central obstruction, a plain number, in double.
+///
+/// The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+/// (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+/// Ranges: frequency (of the cutoff frequency) 0 to 1; obstruction (of the aperture's diameter) 0 to under 1.
+/// Error: at most 1e-14 / (1 - obstruction).
+/// Statuses: null pointer, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_contrast_f64(
+    frequency: f64,
+    obstruction: f64,
+    contrast: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(contrast, 3, || resolution::contrast(frequency, obstruction)) }
 }
 
 /// Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in

@@ -1,7 +1,7 @@
 //! Angles from ratios and back: twice the arc tangent, and the cotangent of half an angle.
 
 use super::divide::{divide, normalise, shift_up};
-use super::multiply::{high, high_signed, wide};
+use super::multiply::{high, high_64, high_signed, wide};
 
 /// 180 degrees.
 const HALF_TURN_MAS: u32 = 648_000_000;
@@ -118,14 +118,6 @@ pub(crate) const fn adjacent(t_mas: u32) -> u32 {
     let square = high((squared(t_mas) >> 32) as u32, (SQUARE >> 32) as u32);
     let missing = high(square, THIRD + (high(square, cotangent_tail(square)) >> 5));
     AT_ZERO - high(AT_ZERO, missing)
-}
-
-/// The upper 64 bits of the product, at most 2 too low.
-#[inline(never)]
-const fn high_64(a: u64, b: u64) -> u64 {
-    let (a1, a0) = ((a >> 32) as u32, a as u32);
-    let (b1, b0) = ((b >> 32) as u32, b as u32);
-    wide(a1, b1) + (wide(a1, b0) >> 32) + (wide(a0, b1) >> 32)
 }
 
 /// R (a cot a) for a = t / 2 in steps of 2^-32 of a milliarcsecond, so that tan(t / 2) = t / 2 adjacent; within

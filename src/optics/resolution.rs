@@ -12,6 +12,11 @@ use crate::units::{Microarcseconds, Micrometres, Nanometres, Q16};
 
 use super::{allowed, present};
 
+mod transfer;
+#[cfg(feature = "float")]
+pub use transfer::contrast;
+pub use transfer::contrast_fx;
+
 // The constants are those of a circular aperture, in wavelengths over the diameter, times the 206264806.2470964
 // microarcseconds that 1 nm over 1 um makes; the tests find them again from the Bessel functions.
 

@@ -49,6 +49,32 @@ fn dark_ring(e: &Big) -> Big {
     x
 }
 
+const FREQUENCY: Argument = ordinary("frequency_q16", Q16, (3_000, 65_536)).within(0, 65_536);
+const OBSTRUCTION_RATIO: Argument = ordinary("obstruction_q16", Q16, (6_000, 30_000));
+/// Twice the area of a circle's segment that is 2 t wide, over the square of its radius.
+fn segment(cosine: &Big) -> Big {
+    let t = cosine.acos();
+    &t - t.sin() * t.cos()
+}
+
+/// The overlap of two annuli: the outer discs', less each outer disc's with the other inner one, plus the inner ones'.
+pub fn contrast(v: &Big, e: &Big) -> Big {
+    let (one, two) = (big(1.0), big(2.0));
+    let (s, square) = (&two * v, e * e);
+    let mut area = &two * segment(v);
+    if v < e {
+        area = area + &two * &square * segment(&(v / e));
+    }
+    if s <= &one - e {
+        area = area - &two * pi() * &square;
+    } else if s < &one + e {
+        let a = (&s * &s + &one - &square) / (&two * &s);
+        let b = (&s * &s + &square - &one) / (&two * &s * e);
+        area = area - &two * (segment(&a) + &square * segment(&b));
+    }
+    area / (pi() * (one - square))
+}
+
 const RMS: Argument = ordinary("rms_nm", NM_AS_NM, (5, 200));
 const AIRMASS: Argument = ordinary("airmass_q16", Q16, (65_536, 400_000)).within(65_536, 40 << 16);
 const WIDTH: Argument = ordinary("width_uas", UAS, (300_000, 10_000_000));
@@ -90,6 +116,14 @@ pub fn rows() -> Vec<Row> {
             |a| decimal("0.98") * &a[1] / &a[0] * radian() / big(1e6),
             fried_parameter_fx fieldstop_fried_parameter_fx fieldstop_fried_parameter_f32
             fieldstop_fried_parameter_f64),
+        Row {
+            single_owed: FloatOwed::Absolute(|_| 4e-6),
+            double_owed: FloatOwed::Absolute(|a| 1e-14 / (big(1.0) - &a[1]).to_f64()),
+            refuses: |i, a| i == 1 && a[1] >= big(1.0),
+            ..row!(resolution::contrast [0 FREQUENCY, 1 OBSTRUCTION_RATIO] -> Q16, TRANSCENDENTAL, 0.0,
+                |a| contrast(&a[0], &a[1]),
+                contrast_fx fieldstop_contrast_fx fieldstop_contrast_f32 fieldstop_contrast_f64)
+        },
         row!(resolution::strehl_ratio [0 RMS, 1 WAVELENGTH] -> Q16, TRANSCENDENTAL, 3.0,
             |a| {
                 let phase = big(2.0) * pi() * &a[0] / &a[1];
