@@ -6,6 +6,7 @@
 //! |---|---|
 //! | `capi` | the C interface (feature `capi`) |
 //! | [`optics`] | the formulas |
+//! | [`convert`] | conversions between the fixed units |
 //! | `math` | integer and float kernels |
 //! | [`units`] | the quantities of the fixed forms |
 //! | [`status`] | what can go wrong |
@@ -31,6 +32,7 @@ pub mod optics;
 pub mod status;
 pub mod units;
 
+pub use math::convert;
 #[cfg(feature = "float")]
 pub use math::float::Real;
 pub use status::{Cause, Error};

@@ -28,7 +28,7 @@ pub unsafe extern "C" fn fieldstop_rayleigh_limit_fx(
 /// Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in arcseconds.
 ///
 /// (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
-/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -47,7 +47,7 @@ pub unsafe extern "C" fn fieldstop_rayleigh_limit_f32(
 /// double.
 ///
 /// (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
-/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -91,7 +91,7 @@ pub unsafe extern "C" fn fieldstop_rayleigh_limit_obstructed_fx(
 /// Gives Rayleigh's limit with a central obstruction, in arcseconds.
 ///
 /// (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
-/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40; obstruction_mm 0 to under aperture_mm.
+/// Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32; obstruction_mm 0 to under aperture_mm.
 /// Error: at most 2 parts in 10^6.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -114,7 +114,7 @@ pub unsafe extern "C" fn fieldstop_rayleigh_limit_obstructed_f32(
 /// Gives Rayleigh's limit with a central obstruction, in arcseconds, in double.
 ///
 /// (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
-/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40; obstruction_mm 0 to under aperture_mm.
+/// Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32; obstruction_mm 0 to under aperture_mm.
 /// Error: at most 2 parts in 10^6.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -150,7 +150,7 @@ pub unsafe extern "C" fn fieldstop_dawes_limit_fx(aperture_um: u32, limit_uas: *
 /// Gives Dawes's limit: the separation at which two equal stars are just seen apart, in arcseconds.
 ///
 /// 116 arcsec mm / D (common practice after Dawes, 1867).
-/// Ranges: aperture_mm 2^-40 to 2^40.
+/// Ranges: aperture_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -167,7 +167,7 @@ pub unsafe extern "C" fn fieldstop_dawes_limit_f32(
 /// Gives Dawes's limit: the separation at which two equal stars are just seen apart, in arcseconds, in double.
 ///
 /// 116 arcsec mm / D (common practice after Dawes, 1867).
-/// Ranges: aperture_mm 2^-40 to 2^40.
+/// Ranges: aperture_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -205,7 +205,7 @@ pub unsafe extern "C" fn fieldstop_sparrow_limit_fx(
 /// Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in arcseconds.
 ///
 /// 0.9471553 lambda / D (Sparrow 1916).
-/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -224,7 +224,7 @@ pub unsafe extern "C" fn fieldstop_sparrow_limit_f32(
 /// double.
 ///
 /// 0.9471553 lambda / D (Sparrow 1916).
-/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -261,7 +261,7 @@ pub unsafe extern "C" fn fieldstop_airy_fwhm_fx(
 /// Gives the full width at half maximum of a star's image in perfect optics and still air, in arcseconds.
 ///
 /// 1.0289940 lambda / D (Airy 1835).
-/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -280,7 +280,7 @@ pub unsafe extern "C" fn fieldstop_airy_fwhm_f32(
 /// double.
 ///
 /// 1.0289940 lambda / D (Airy 1835).
-/// Ranges: aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -324,7 +324,7 @@ pub unsafe extern "C" fn fieldstop_airy_radius_fx(
 /// Gives the radius of the Airy disc at the focus, centre to first dark ring, in micrometres.
 ///
 /// (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
-/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -343,9 +343,9 @@ pub unsafe extern "C" fn fieldstop_airy_radius_f32(
 /// Gives the radius of the Airy disc at the focus, centre to first dark ring, in micrometres, in double.
 ///
 /// (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
-/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
-/// Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
+/// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
@@ -389,9 +389,9 @@ pub unsafe extern "C" fn fieldstop_cutoff_frequency_fx(
 /// Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre.
 ///
 /// D / (lambda f) (Goodman).
-/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
-/// Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
+/// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
@@ -411,7 +411,7 @@ pub unsafe extern "C" fn fieldstop_cutoff_frequency_f32(
 /// double.
 ///
 /// D / (lambda f) (Goodman).
-/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-40 to 2^40.
+/// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -509,7 +509,7 @@ pub unsafe extern "C" fn fieldstop_strehl_ratio_fx(
 /// plain number.
 ///
 /// exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
-/// Ranges: rms_nm 0 to 2^40; wavelength_nm 2^-40 to 2^40.
+/// Ranges: rms_nm 0 to 2^32; wavelength_nm 2^-32 to 2^32.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -528,7 +528,7 @@ pub unsafe extern "C" fn fieldstop_strehl_ratio_f32(
 /// plain number, in double.
 ///
 /// exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
-/// Ranges: rms_nm 0 to 2^40; wavelength_nm 2^-40 to 2^40.
+/// Ranges: rms_nm 0 to 2^32; wavelength_nm 2^-32 to 2^32.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -567,7 +567,7 @@ pub unsafe extern "C" fn fieldstop_fried_parameter_fx(
 /// Gives Fried's parameter, the aperture that the air leaves, in millimetres.
 ///
 /// 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
-/// Ranges: seeing_arcsec, wavelength_nm 2^-40 to 2^40.
+/// Ranges: seeing_arcsec, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -585,7 +585,7 @@ pub unsafe extern "C" fn fieldstop_fried_parameter_f32(
 /// Gives Fried's parameter, the aperture that the air leaves, in millimetres, in double.
 ///
 /// 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
-/// Ranges: seeing_arcsec, wavelength_nm 2^-40 to 2^40.
+/// Ranges: seeing_arcsec, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -622,7 +622,7 @@ pub unsafe extern "C" fn fieldstop_seeing_at_airmass_fx(
 /// Gives the seeing at an airmass, from that at the zenith, in arcseconds.
 ///
 /// FWHM X^0.6 (Fried 1966).
-/// Ranges: seeing_arcsec 2^-40 to 2^40; airmass 1 to 40.
+/// Ranges: seeing_arcsec 2^-32 to 2^32; airmass 1 to 40.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -640,7 +640,7 @@ pub unsafe extern "C" fn fieldstop_seeing_at_airmass_f32(
 /// Gives the seeing at an airmass, from that at the zenith, in arcseconds, in double.
 ///
 /// FWHM X^0.6 (Fried 1966).
-/// Ranges: seeing_arcsec 2^-40 to 2^40; airmass 1 to 40.
+/// Ranges: seeing_arcsec 2^-32 to 2^32; airmass 1 to 40.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -684,7 +684,7 @@ pub unsafe extern "C" fn fieldstop_combined_fwhm_fx(
 /// Gives the width of a star image that three causes blur, in arcseconds.
 ///
 /// sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
-/// Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^40.
+/// Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, out of range, not finite.
 #[cfg(feature = "float")]
@@ -703,7 +703,7 @@ pub unsafe extern "C" fn fieldstop_combined_fwhm_f32(
 /// Gives the width of a star image that three causes blur, in arcseconds, in double.
 ///
 /// sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
-/// Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^40.
+/// Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]

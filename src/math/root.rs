@@ -31,7 +31,7 @@ const fn near(n: u64) -> u32 {
     let y = (y << 5) + ((y * f) >> 16); // 2^-13
     // One step of Newton: the rest, whose upper bits are 0, over twice the root.
     let rest = ((n >> 24) as u32).wrapping_sub(root.wrapping_mul(root)) as i32; // 2^-40
-    (root << 12).wrapping_add((((rest >> 6) * y + (3 << 13)) >> 16) as u32)
+    (root << 12).wrapping_add((((rest >> 6) * y + (5 << 12)) >> 16) as u32)
 }
 
 /// The square root of `n` to the nearest integer.

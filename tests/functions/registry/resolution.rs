@@ -50,7 +50,7 @@ fn dark_ring(e: &Big) -> Big {
 }
 
 const FREQUENCY: Argument = ordinary("frequency_q16", Q16, (3_000, 65_536)).within(0, 65_536);
-const OBSTRUCTION_RATIO: Argument = ordinary("obstruction_q16", Q16, (6_000, 30_000));
+const OBSTRUCTION_RATIO: Argument = ordinary("obstruction_q16", Q16, (6_000, 30_000)).under(65_536);
 /// Twice the area of a circle's segment that is 2 t wide, over the square of its radius.
 fn segment(cosine: &Big) -> Big {
     let t = cosine.acos();
@@ -77,7 +77,9 @@ pub fn contrast(v: &Big, e: &Big) -> Big {
 
 const RMS: Argument = ordinary("rms_nm", NM_AS_NM, (5, 200));
 const AIRMASS: Argument = ordinary("airmass_q16", Q16, (65_536, 400_000)).within(65_536, 40 << 16);
-const WIDTH: Argument = ordinary("width_uas", UAS, (300_000, 10_000_000));
+const fn width(name: &'static str) -> Argument {
+    ordinary(name, UAS, (300_000, 10_000_000))
+}
 const OBSTRUCTION: Argument = ordinary("obstruction_um", UM, (10_000, 200_000));
 
 pub fn rows() -> Vec<Row> {
@@ -119,7 +121,6 @@ pub fn rows() -> Vec<Row> {
         Row {
             single_owed: FloatOwed::Absolute(|_| 4e-6),
             double_owed: FloatOwed::Absolute(|a| 1e-14 / (big(1.0) - &a[1]).to_f64()),
-            refuses: |i, a| i == 1 && a[1] >= big(1.0),
             ..row!(resolution::contrast [0 FREQUENCY, 1 OBSTRUCTION_RATIO] -> Q16, TRANSCENDENTAL, 0.0,
                 |a| contrast(&a[0], &a[1]),
                 contrast_fx fieldstop_contrast_fx fieldstop_contrast_f32 fieldstop_contrast_f64)
@@ -139,7 +140,7 @@ pub fn rows() -> Vec<Row> {
                 seeing_at_airmass_fx fieldstop_seeing_at_airmass_fx fieldstop_seeing_at_airmass_f32
                 fieldstop_seeing_at_airmass_f64)
         },
-        row!(resolution::combined_fwhm [0 WIDTH, 1 WIDTH, 2 WIDTH] -> UAS, RATIONAL, 2.0,
+        row!(resolution::combined_fwhm [0 width("a_uas"), 1 width("b_uas"), 2 width("c_uas")] -> UAS, RATIONAL, 2.0,
             |a| (&a[0] * &a[0] + &a[1] * &a[1] + &a[2] * &a[2]).sqrt(),
             combined_fwhm_fx fieldstop_combined_fwhm_fx fieldstop_combined_fwhm_f32 fieldstop_combined_fwhm_f64),
     ]
