@@ -385,7 +385,7 @@ pub fn seeing_at_airmass_fx(seeing: Microarcseconds, airmass: Q16) -> Result<Mic
     let doublings = high(logarithm::log2(airmass.0) - 16 * logarithm::ONE, 2_576_980_378);
     // Under 3.2 doublings; 2^-27.
     let growth = logarithm::exp2_negative(4 * logarithm::ONE - doublings);
-    let width = wide(seeing.0, growth) + (1 << 26) >> 27;
+    let width = (wide(seeing.0, growth) + (1 << 26)) >> 27;
     if width >> 32 != 0 {
         return Err(Error::OVERFLOW);
     }
