@@ -877,6 +877,458 @@ fieldstop_status fieldstop_tiles_f64(double target_arcsec,
                                      uint32_t *count);
 #endif
 
+/* --------------------------------------------------------------------------------------------------
+   Light: what the mirrors, the glass and the hole in the middle leave of it, and the
+   magnitudes that follow. */
+
+/**
+ * Gives the share of the light that mirrors and glass surfaces let through, in Q16.16.
+ *
+ * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
+ * Ranges: reflectance_q16, transmittance_q16 at most 1.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_throughput_fx(uint8_t mirrors,
+                                         uint32_t reflectance_q16,
+                                         uint8_t surfaces,
+                                         uint32_t transmittance_q16,
+                                         uint32_t *throughput_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the share of the light that mirrors and glass surfaces let through, a plain number.
+ *
+ * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
+ * Ranges: reflectance, transmittance 0 to 1.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_throughput_f32(uint8_t mirrors,
+                                          float reflectance,
+                                          uint8_t surfaces,
+                                          float transmittance,
+                                          float *throughput);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the share of the light that mirrors and glass surfaces let through, a plain number, in double.
+ *
+ * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
+ * Ranges: reflectance, transmittance 0 to 1.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_throughput_f64(uint8_t mirrors,
+                                          double reflectance,
+                                          uint8_t surfaces,
+                                          double transmittance,
+                                          double *throughput);
+#endif
+
+/**
+ * Gives the share of the aperture's area that the central obstruction leaves, in Q16.16.
+ *
+ * 1 - (d / D)^2 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_um not 0; obstruction_um under the aperture.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_clear_fraction_fx(uint32_t aperture_um,
+                                             uint32_t obstruction_um,
+                                             uint32_t *fraction_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the share of the aperture's area that the central obstruction leaves, a plain number.
+ *
+ * 1 - (d / D)^2 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_clear_fraction_f32(float aperture_mm,
+                                              float obstruction_mm,
+                                              float *fraction);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the share of the aperture's area that the central obstruction leaves, a plain number, in double.
+ *
+ * 1 - (d / D)^2 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_clear_fraction_f64(double aperture_mm,
+                                              double obstruction_mm,
+                                              double *fraction);
+#endif
+
+/**
+ * Gives the clear, lossless aperture that would gather as much light, in micrometres.
+ *
+ * D sqrt((1 - (d / D)^2) T) (Schroeder, Astronomical Optics).
+ * Ranges: aperture_um not 0; obstruction_um under the aperture; throughput_q16 at most 1.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_effective_aperture_fx(uint32_t aperture_um,
+                                                 uint32_t obstruction_um,
+                                                 uint32_t throughput_q16,
+                                                 uint32_t *effective_aperture_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the clear, lossless aperture that would gather as much light, in millimetres.
+ *
+ * D sqrt((1 - (d / D)^2) T) (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture; throughput 0 to 1.
+ * Error: at most 2 ulp where the throughput is 0 or at least 2^-38.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_effective_aperture_f32(float aperture_mm,
+                                                  float obstruction_mm,
+                                                  float throughput,
+                                                  float *effective_aperture_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the clear, lossless aperture that would gather as much light, in millimetres, in double.
+ *
+ * D sqrt((1 - (d / D)^2) T) (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture; throughput 0 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_effective_aperture_f64(double aperture_mm,
+                                                  double obstruction_mm,
+                                                  double throughput,
+                                                  double *effective_aperture_mm);
+#endif
+
+/**
+ * Gives how many magnitudes fainter a telescope shows a star than the bare eye, in millimagnitudes.
+ *
+ * 5 log10(D / p); negative where the pupil is the wider (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: effective_aperture_um, eye_pupil_um not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_gain_fx(uint32_t effective_aperture_um,
+                                             uint32_t eye_pupil_um,
+                                             int32_t *gain_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many magnitudes fainter a telescope shows a star than the bare eye, in magnitudes.
+ *
+ * 5 log10(D / p); negative where the pupil is the wider (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: effective_aperture_mm, eye_pupil_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_gain_f32(float effective_aperture_mm,
+                                              float eye_pupil_mm,
+                                              float *gain_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many magnitudes fainter a telescope shows a star than the bare eye, in magnitudes, in double.
+ *
+ * 5 log10(D / p); negative where the pupil is the wider (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: effective_aperture_mm, eye_pupil_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_gain_f64(double effective_aperture_mm,
+                                              double eye_pupil_mm,
+                                              double *gain_mag);
+#endif
+
+/**
+ * Gives the faintest star that a telescope shows to an eye whose own limit is known, in millimagnitudes.
+ *
+ * m0 + 5 log10(D / p) (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: effective_aperture_um, eye_pupil_um not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero, overflow (beyond 32 bits).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_limiting_magnitude_fx(int32_t naked_eye_mmag,
+                                                 uint32_t effective_aperture_um,
+                                                 uint32_t eye_pupil_um,
+                                                 int32_t *limit_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the faintest star that a telescope shows to an eye whose own limit is known, in magnitudes.
+ *
+ * m0 + 5 log10(D / p) (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: naked_eye_mag -2^32 to 2^32; effective_aperture_mm, eye_pupil_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp of the larger term.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_limiting_magnitude_f32(float naked_eye_mag,
+                                                  float effective_aperture_mm,
+                                                  float eye_pupil_mm,
+                                                  float *limit_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the faintest star that a telescope shows to an eye whose own limit is known, in magnitudes, in
+ * double.
+ *
+ * m0 + 5 log10(D / p) (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: naked_eye_mag -2^32 to 2^32; effective_aperture_mm, eye_pupil_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp of the larger term.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_limiting_magnitude_f64(double naked_eye_mag,
+                                                  double effective_aperture_mm,
+                                                  double eye_pupil_mm,
+                                                  double *limit_mag);
+#endif
+
+/**
+ * Gives how bright an extended object looks in the eyepiece, against the bare eye, in Q16.16.
+ *
+ * T min(1, (x / p)^2) (Born and Wolf, Principles of Optics).
+ * Ranges: exit_pupil_um, eye_pupil_um not 0; throughput_q16 at most 1.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_surface_brightness_fx(uint32_t exit_pupil_um,
+                                                 uint32_t eye_pupil_um,
+                                                 uint32_t throughput_q16,
+                                                 uint32_t *brightness_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how bright an extended object looks in the eyepiece, against the bare eye, a plain number.
+ *
+ * T min(1, (x / p)^2) (Born and Wolf, Principles of Optics).
+ * Ranges: exit_pupil_mm, eye_pupil_mm 2^-32 to 2^32; throughput 0 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_surface_brightness_f32(float exit_pupil_mm,
+                                                  float eye_pupil_mm,
+                                                  float throughput,
+                                                  float *brightness);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how bright an extended object looks in the eyepiece, against the bare eye, a plain number, in
+ * double.
+ *
+ * T min(1, (x / p)^2) (Born and Wolf, Principles of Optics).
+ * Ranges: exit_pupil_mm, eye_pupil_mm 2^-32 to 2^32; throughput 0 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_surface_brightness_f64(double exit_pupil_mm,
+                                                  double eye_pupil_mm,
+                                                  double throughput,
+                                                  double *brightness);
+#endif
+
+/**
+ * Gives how many magnitudes fainter the first of two lights is than the second, in millimagnitudes.
+ *
+ * -2.5 log10(a / b); both fluxes in any one unit (Pogson 1856).
+ * Ranges: flux_a, flux_b not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_difference_fx(uint32_t flux_a,
+                                                   uint32_t flux_b,
+                                                   int32_t *difference_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many magnitudes fainter the first of two lights is than the second, in magnitudes.
+ *
+ * -2.5 log10(a / b); both fluxes in any one unit (Pogson 1856).
+ * Ranges: flux_a, flux_b 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_difference_f32(float flux_a,
+                                                    float flux_b,
+                                                    float *difference_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many magnitudes fainter the first of two lights is than the second, in magnitudes, in double.
+ *
+ * -2.5 log10(a / b); both fluxes in any one unit (Pogson 1856).
+ * Ranges: flux_a, flux_b 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_difference_f64(double flux_a,
+                                                    double flux_b,
+                                                    double *difference_mag);
+#endif
+
+/**
+ * Gives how many magnitudes a light loses from a near to a distant place, in millimagnitudes.
+ *
+ * 5 log10(distant / near); both distances in any one unit (the inverse-square law).
+ * Ranges: near_distance, distant_distance not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_distance_dimming_fx(uint32_t near_distance,
+                                               uint32_t distant_distance,
+                                               int32_t *dimming_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many magnitudes a light loses from a near to a distant place, in magnitudes.
+ *
+ * 5 log10(distant / near); both distances in any one unit (the inverse-square law).
+ * Ranges: near_distance, distant_distance 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_distance_dimming_f32(float near_distance,
+                                                float distant_distance,
+                                                float *dimming_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many magnitudes a light loses from a near to a distant place, in magnitudes, in double.
+ *
+ * 5 log10(distant / near); both distances in any one unit (the inverse-square law).
+ * Ranges: near_distance, distant_distance 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_distance_dimming_f64(double near_distance,
+                                                double distant_distance,
+                                                double *dimming_mag);
+#endif
+
+/**
+ * Gives how many magnitudes the air takes from a star, in millimagnitudes.
+ *
+ * k X, of the loss in one airmass (Bouguer 1729).
+ * Ranges: any.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, overflow (2147483648 mmag or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_extinction_fx(uint32_t coefficient_mmag,
+                                         uint32_t airmass_q16,
+                                         int32_t *extinction_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many magnitudes the air takes from a star, in magnitudes.
+ *
+ * k X, of the loss in one airmass (Bouguer 1729).
+ * Ranges: coefficient_mag, airmass 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_extinction_f32(float coefficient_mag,
+                                          float airmass,
+                                          float *extinction_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many magnitudes the air takes from a star, in magnitudes, in double.
+ *
+ * k X, of the loss in one airmass (Bouguer 1729).
+ * Ranges: coefficient_mag, airmass 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_extinction_f64(double coefficient_mag,
+                                          double airmass,
+                                          double *extinction_mag);
+#endif
+
+/**
+ * Gives the focal ratio of the lossless telescope that would expose a sensor as fast, in Q16.16.
+ *
+ * N / sqrt(T) (Smith, Modern Optical Engineering).
+ * Ranges: focal_ratio_q16 not 0; throughput_q16 not 0, at most 1.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, out of range, overflow (65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_t_number_fx(uint32_t focal_ratio_q16,
+                                       uint32_t throughput_q16,
+                                       uint32_t *t_number_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the focal ratio of the lossless telescope that would expose a sensor as fast, a plain number.
+ *
+ * N / sqrt(T) (Smith, Modern Optical Engineering).
+ * Ranges: focal_ratio 2^-32 to 2^32; throughput 2^-32 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_t_number_f32(float focal_ratio,
+                                        float throughput,
+                                        float *t_number);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the focal ratio of the lossless telescope that would expose a sensor as fast, a plain number, in
+ * double.
+ *
+ * N / sqrt(T) (Smith, Modern Optical Engineering).
+ * Ranges: focal_ratio 2^-32 to 2^32; throughput 2^-32 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_t_number_f64(double focal_ratio,
+                                        double throughput,
+                                        double *t_number);
+#endif
+
 #ifdef __cplusplus
 } /* extern "C" */
 #endif
