@@ -878,6 +878,546 @@ fieldstop_status fieldstop_tiles_f64(double target_arcsec,
 #endif
 
 /* --------------------------------------------------------------------------------------------------
+   Resolution: how fine a telescope shows, and how far the air, the obstruction and the
+   wavefront let it. */
+
+/**
+ * Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in microarcseconds.
+ *
+ * (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+ * Ranges: aperture_um, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_fx(uint32_t aperture_um,
+                                             uint32_t wavelength_nm,
+                                             uint32_t *limit_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in arcseconds.
+ *
+ * (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_f32(float aperture_mm,
+                                              float wavelength_nm,
+                                              float *limit_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in arcseconds, in
+ * double.
+ *
+ * (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_f64(double aperture_mm,
+                                              double wavelength_nm,
+                                              double *limit_arcsec);
+#endif
+
+/**
+ * Gives Rayleigh's limit with a central obstruction, in microarcseconds.
+ *
+ * (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+ * Ranges: aperture_um, wavelength_nm not 0; obstruction_um under aperture_um.
+ * Error: at most 1 LSB or 2 parts in 10^6, the larger.
+ * Statuses: null pointer, zero, out of range, overflow (the limit is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_obstructed_fx(uint32_t aperture_um,
+                                                        uint32_t obstruction_um,
+                                                        uint32_t wavelength_nm,
+                                                        uint32_t *limit_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Rayleigh's limit with a central obstruction, in arcseconds.
+ *
+ * (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32; obstruction_mm 0 to under aperture_mm.
+ * Error: at most 2 parts in 10^6.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_obstructed_f32(float aperture_mm,
+                                                         float obstruction_mm,
+                                                         float wavelength_nm,
+                                                         float *limit_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Rayleigh's limit with a central obstruction, in arcseconds, in double.
+ *
+ * (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32; obstruction_mm 0 to under aperture_mm.
+ * Error: at most 2 parts in 10^6.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_obstructed_f64(double aperture_mm,
+                                                         double obstruction_mm,
+                                                         double wavelength_nm,
+                                                         double *limit_arcsec);
+#endif
+
+/**
+ * Gives Dawes's limit: the separation at which two equal stars are just seen apart, in microarcseconds.
+ *
+ * 116 arcsec mm / D (common practice after Dawes, 1867).
+ * Ranges: aperture_um not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_dawes_limit_fx(uint32_t aperture_um,
+                                          uint32_t *limit_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Dawes's limit: the separation at which two equal stars are just seen apart, in arcseconds.
+ *
+ * 116 arcsec mm / D (common practice after Dawes, 1867).
+ * Ranges: aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_dawes_limit_f32(float aperture_mm,
+                                           float *limit_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Dawes's limit: the separation at which two equal stars are just seen apart, in arcseconds, in double.
+ *
+ * 116 arcsec mm / D (common practice after Dawes, 1867).
+ * Ranges: aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_dawes_limit_f64(double aperture_mm,
+                                           double *limit_arcsec);
+#endif
+
+/**
+ * Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in microarcseconds.
+ *
+ * 0.9471553 lambda / D (Sparrow 1916).
+ * Ranges: aperture_um, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sparrow_limit_fx(uint32_t aperture_um,
+                                            uint32_t wavelength_nm,
+                                            uint32_t *limit_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in arcseconds.
+ *
+ * 0.9471553 lambda / D (Sparrow 1916).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sparrow_limit_f32(float aperture_mm,
+                                             float wavelength_nm,
+                                             float *limit_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in arcseconds, in
+ * double.
+ *
+ * 0.9471553 lambda / D (Sparrow 1916).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sparrow_limit_f64(double aperture_mm,
+                                             double wavelength_nm,
+                                             double *limit_arcsec);
+#endif
+
+/**
+ * Gives the full width at half maximum of a star's image in perfect optics and still air, in microarcseconds.
+ *
+ * 1.0289940 lambda / D (Airy 1835).
+ * Ranges: aperture_um, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the width is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_fwhm_fx(uint32_t aperture_um,
+                                        uint32_t wavelength_nm,
+                                        uint32_t *fwhm_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the full width at half maximum of a star's image in perfect optics and still air, in arcseconds.
+ *
+ * 1.0289940 lambda / D (Airy 1835).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_fwhm_f32(float aperture_mm,
+                                         float wavelength_nm,
+                                         float *fwhm_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the full width at half maximum of a star's image in perfect optics and still air, in arcseconds, in
+ * double.
+ *
+ * 1.0289940 lambda / D (Airy 1835).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_fwhm_f64(double aperture_mm,
+                                         double wavelength_nm,
+                                         double *fwhm_arcsec);
+#endif
+
+/**
+ * Gives the radius of the Airy disc at the focus, centre to first dark ring, in nanometres.
+ *
+ * (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+ * Ranges: focal_length_um, aperture_um, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the radius is over 4.29 m).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_radius_fx(uint32_t focal_length_um,
+                                          uint32_t aperture_um,
+                                          uint32_t wavelength_nm,
+                                          uint32_t *radius_nm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the radius of the Airy disc at the focus, centre to first dark ring, in micrometres.
+ *
+ * (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_radius_f32(float focal_length_mm,
+                                           float aperture_mm,
+                                           float wavelength_nm,
+                                           float *radius_um);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the radius of the Airy disc at the focus, centre to first dark ring, in micrometres, in double.
+ *
+ * (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_radius_f64(double focal_length_mm,
+                                           double aperture_mm,
+                                           double wavelength_nm,
+                                           double *radius_um);
+#endif
+
+/**
+ * Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre,
+ * Q16.16.
+ *
+ * D / (lambda f) (Goodman).
+ * Ranges: focal_length_um, aperture_um, wavelength_nm not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (the frequency is 65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_cutoff_frequency_fx(uint32_t focal_length_um,
+                                               uint32_t aperture_um,
+                                               uint32_t wavelength_nm,
+                                               uint32_t *frequency_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre.
+ *
+ * D / (lambda f) (Goodman).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_cutoff_frequency_f32(float focal_length_mm,
+                                                float aperture_mm,
+                                                float wavelength_nm,
+                                                float *frequency);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre, in
+ * double.
+ *
+ * D / (lambda f) (Goodman).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_cutoff_frequency_f64(double focal_length_mm,
+                                                double aperture_mm,
+                                                double wavelength_nm,
+                                                double *frequency);
+#endif
+
+/**
+ * Gives the contrast that the optics keep at a frequency, with a central obstruction, in Q16.16.
+ *
+ * The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+ * (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+ * Ranges: frequency_q16 (of the cutoff frequency) at most 1; obstruction_q16 (of the aperture's diameter) under 1.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_contrast_fx(uint32_t frequency_q16,
+                                       uint32_t obstruction_q16,
+                                       uint32_t *contrast_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the contrast that the optics keep at a frequency, with a central obstruction, a plain number.
+ *
+ * The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+ * (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+ * Ranges: frequency (of the cutoff frequency) 0 to 1; obstruction (of the aperture's diameter) 0 to under 1.
+ * Error: at most 4e-6.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_contrast_f32(float frequency,
+                                        float obstruction,
+                                        float *contrast);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the contrast that the optics keep at a frequency, with a central obstruction, a plain number, in double.
+ *
+ * The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+ * (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+ * Ranges: frequency (of the cutoff frequency) 0 to 1; obstruction (of the aperture's diameter) 0 to under 1.
+ * Error: at most 1e-14 / (1 - obstruction).
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_contrast_f64(double frequency,
+                                        double obstruction,
+                                        double *contrast);
+#endif
+
+/**
+ * Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in
+ * Q16.16.
+ *
+ * exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+ * Ranges: wavelength_nm not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_strehl_ratio_fx(uint32_t rms_nm,
+                                           uint32_t wavelength_nm,
+                                           uint32_t *ratio_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in a
+ * plain number.
+ *
+ * exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+ * Ranges: rms_nm 0 to 2^32; wavelength_nm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_strehl_ratio_f32(float rms_nm,
+                                            float wavelength_nm,
+                                            float *ratio);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in a
+ * plain number, in double.
+ *
+ * exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+ * Ranges: rms_nm 0 to 2^32; wavelength_nm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_strehl_ratio_f64(double rms_nm,
+                                            double wavelength_nm,
+                                            double *ratio);
+#endif
+
+/**
+ * Gives Fried's parameter, the aperture that the air leaves, in micrometres.
+ *
+ * 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+ * Ranges: seeing_uas, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the parameter is over 4.29 km).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_fried_parameter_fx(uint32_t seeing_uas,
+                                              uint32_t wavelength_nm,
+                                              uint32_t *parameter_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Fried's parameter, the aperture that the air leaves, in millimetres.
+ *
+ * 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+ * Ranges: seeing_arcsec, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_fried_parameter_f32(float seeing_arcsec,
+                                               float wavelength_nm,
+                                               float *parameter_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Fried's parameter, the aperture that the air leaves, in millimetres, in double.
+ *
+ * 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+ * Ranges: seeing_arcsec, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_fried_parameter_f64(double seeing_arcsec,
+                                               double wavelength_nm,
+                                               double *parameter_mm);
+#endif
+
+/**
+ * Gives the seeing at an airmass, from that at the zenith, in microarcseconds.
+ *
+ * FWHM X^0.6 (Fried 1966).
+ * Ranges: seeing_uas not 0; airmass_q16 1 to 40.
+ * Error: at most 1 LSB or 1 part in 10^6, the larger.
+ * Statuses: null pointer, zero, out of range, overflow (the width is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_seeing_at_airmass_fx(uint32_t seeing_uas,
+                                                uint32_t airmass_q16,
+                                                uint32_t *fwhm_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the seeing at an airmass, from that at the zenith, in arcseconds.
+ *
+ * FWHM X^0.6 (Fried 1966).
+ * Ranges: seeing_arcsec 2^-32 to 2^32; airmass 1 to 40.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_seeing_at_airmass_f32(float seeing_arcsec,
+                                                 float airmass,
+                                                 float *fwhm_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the seeing at an airmass, from that at the zenith, in arcseconds, in double.
+ *
+ * FWHM X^0.6 (Fried 1966).
+ * Ranges: seeing_arcsec 2^-32 to 2^32; airmass 1 to 40.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_seeing_at_airmass_f64(double seeing_arcsec,
+                                                 double airmass,
+                                                 double *fwhm_arcsec);
+#endif
+
+/**
+ * Gives the width of a star image that three causes blur, in microarcseconds.
+ *
+ * sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+ * Ranges: a_uas, b_uas, c_uas may be anything.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, overflow (the width is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_combined_fwhm_fx(uint32_t a_uas,
+                                            uint32_t b_uas,
+                                            uint32_t c_uas,
+                                            uint32_t *fwhm_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the width of a star image that three causes blur, in arcseconds.
+ *
+ * sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+ * Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_combined_fwhm_f32(float a_arcsec,
+                                             float b_arcsec,
+                                             float c_arcsec,
+                                             float *fwhm_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the width of a star image that three causes blur, in arcseconds, in double.
+ *
+ * sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+ * Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_combined_fwhm_f64(double a_arcsec,
+                                             double b_arcsec,
+                                             double c_arcsec,
+                                             double *fwhm_arcsec);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
    Light: what the mirrors, the glass and the hole in the middle leave of it, and the
    magnitudes that follow. */
 

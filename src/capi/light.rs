@@ -12,9 +12,19 @@ use crate::units::{Micrometres, Millimagnitudes, MillimagnitudesPerAirmass, Q16}
 /// Statuses: null pointer, out of range.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_throughput_fx(mirrors: u8, reflectance_q16: u32, surfaces: u8, transmittance_q16: u32, throughput_q16: *mut u32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_throughput_fx(
+    mirrors: u8,
+    reflectance_q16: u32,
+    surfaces: u8,
+    transmittance_q16: u32,
+    throughput_q16: *mut u32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(throughput_q16, 5, || light::throughput_fx(mirrors, Q16(reflectance_q16), surfaces, Q16(transmittance_q16))) }
+    unsafe {
+        give(throughput_q16, 5, || {
+            light::throughput_fx(mirrors, Q16(reflectance_q16), surfaces, Q16(transmittance_q16))
+        })
+    }
 }
 
 /// Gives the share of the light that mirrors and glass surfaces let through, a plain number.
@@ -26,7 +36,13 @@ pub unsafe extern "C" fn fieldstop_throughput_fx(mirrors: u8, reflectance_q16: u
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_throughput_f32(mirrors: u8, reflectance: f32, surfaces: u8, transmittance: f32, throughput: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_throughput_f32(
+    mirrors: u8,
+    reflectance: f32,
+    surfaces: u8,
+    transmittance: f32,
+    throughput: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(throughput, 5, || light::throughput(mirrors, reflectance, surfaces, transmittance)) }
 }
@@ -40,7 +56,13 @@ pub unsafe extern "C" fn fieldstop_throughput_f32(mirrors: u8, reflectance: f32,
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_throughput_f64(mirrors: u8, reflectance: f64, surfaces: u8, transmittance: f64, throughput: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_throughput_f64(
+    mirrors: u8,
+    reflectance: f64,
+    surfaces: u8,
+    transmittance: f64,
+    throughput: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(throughput, 5, || light::throughput(mirrors, reflectance, surfaces, transmittance)) }
 }
@@ -53,9 +75,17 @@ pub unsafe extern "C" fn fieldstop_throughput_f64(mirrors: u8, reflectance: f64,
 /// Statuses: null pointer, zero, out of range.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_clear_fraction_fx(aperture_um: u32, obstruction_um: u32, fraction_q16: *mut u32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_clear_fraction_fx(
+    aperture_um: u32,
+    obstruction_um: u32,
+    fraction_q16: *mut u32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(fraction_q16, 3, || light::clear_fraction_fx(Micrometres(aperture_um), Micrometres(obstruction_um))) }
+    unsafe {
+        give(fraction_q16, 3, || {
+            light::clear_fraction_fx(Micrometres(aperture_um), Micrometres(obstruction_um))
+        })
+    }
 }
 
 /// Gives the share of the aperture's area that the central obstruction leaves, a plain number.
@@ -67,7 +97,11 @@ pub unsafe extern "C" fn fieldstop_clear_fraction_fx(aperture_um: u32, obstructi
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_clear_fraction_f32(aperture_mm: f32, obstruction_mm: f32, fraction: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_clear_fraction_f32(
+    aperture_mm: f32,
+    obstruction_mm: f32,
+    fraction: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(fraction, 3, || light::clear_fraction(aperture_mm, obstruction_mm)) }
 }
@@ -81,7 +115,11 @@ pub unsafe extern "C" fn fieldstop_clear_fraction_f32(aperture_mm: f32, obstruct
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_clear_fraction_f64(aperture_mm: f64, obstruction_mm: f64, fraction: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_clear_fraction_f64(
+    aperture_mm: f64,
+    obstruction_mm: f64,
+    fraction: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(fraction, 3, || light::clear_fraction(aperture_mm, obstruction_mm)) }
 }
@@ -94,9 +132,22 @@ pub unsafe extern "C" fn fieldstop_clear_fraction_f64(aperture_mm: f64, obstruct
 /// Statuses: null pointer, zero, out of range.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_effective_aperture_fx(aperture_um: u32, obstruction_um: u32, throughput_q16: u32, effective_aperture_um: *mut u32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_effective_aperture_fx(
+    aperture_um: u32,
+    obstruction_um: u32,
+    throughput_q16: u32,
+    effective_aperture_um: *mut u32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(effective_aperture_um, 4, || light::effective_aperture_fx(Micrometres(aperture_um), Micrometres(obstruction_um), Q16(throughput_q16))) }
+    unsafe {
+        give(effective_aperture_um, 4, || {
+            light::effective_aperture_fx(
+                Micrometres(aperture_um),
+                Micrometres(obstruction_um),
+                Q16(throughput_q16),
+            )
+        })
+    }
 }
 
 /// Gives the clear, lossless aperture that would gather as much light, in millimetres.
@@ -108,9 +159,16 @@ pub unsafe extern "C" fn fieldstop_effective_aperture_fx(aperture_um: u32, obstr
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_effective_aperture_f32(aperture_mm: f32, obstruction_mm: f32, throughput: f32, effective_aperture_mm: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_effective_aperture_f32(
+    aperture_mm: f32,
+    obstruction_mm: f32,
+    throughput: f32,
+    effective_aperture_mm: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(effective_aperture_mm, 4, || light::effective_aperture(aperture_mm, obstruction_mm, throughput)) }
+    unsafe {
+        give(effective_aperture_mm, 4, || light::effective_aperture(aperture_mm, obstruction_mm, throughput))
+    }
 }
 
 /// Gives the clear, lossless aperture that would gather as much light, in millimetres, in double.
@@ -122,9 +180,16 @@ pub unsafe extern "C" fn fieldstop_effective_aperture_f32(aperture_mm: f32, obst
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_effective_aperture_f64(aperture_mm: f64, obstruction_mm: f64, throughput: f64, effective_aperture_mm: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_effective_aperture_f64(
+    aperture_mm: f64,
+    obstruction_mm: f64,
+    throughput: f64,
+    effective_aperture_mm: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(effective_aperture_mm, 4, || light::effective_aperture(aperture_mm, obstruction_mm, throughput)) }
+    unsafe {
+        give(effective_aperture_mm, 4, || light::effective_aperture(aperture_mm, obstruction_mm, throughput))
+    }
 }
 
 /// Gives how many magnitudes fainter a telescope shows a star than the bare eye, in millimagnitudes.
@@ -135,9 +200,17 @@ pub unsafe extern "C" fn fieldstop_effective_aperture_f64(aperture_mm: f64, obst
 /// Statuses: null pointer, zero.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_magnitude_gain_fx(effective_aperture_um: u32, eye_pupil_um: u32, gain_mmag: *mut i32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_magnitude_gain_fx(
+    effective_aperture_um: u32,
+    eye_pupil_um: u32,
+    gain_mmag: *mut i32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(gain_mmag, 3, || light::magnitude_gain_fx(Micrometres(effective_aperture_um), Micrometres(eye_pupil_um))) }
+    unsafe {
+        give(gain_mmag, 3, || {
+            light::magnitude_gain_fx(Micrometres(effective_aperture_um), Micrometres(eye_pupil_um))
+        })
+    }
 }
 
 /// Gives how many magnitudes fainter a telescope shows a star than the bare eye, in magnitudes.
@@ -149,7 +222,11 @@ pub unsafe extern "C" fn fieldstop_magnitude_gain_fx(effective_aperture_um: u32,
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_magnitude_gain_f32(effective_aperture_mm: f32, eye_pupil_mm: f32, gain_mag: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_magnitude_gain_f32(
+    effective_aperture_mm: f32,
+    eye_pupil_mm: f32,
+    gain_mag: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(gain_mag, 3, || light::magnitude_gain(effective_aperture_mm, eye_pupil_mm)) }
 }
@@ -163,7 +240,11 @@ pub unsafe extern "C" fn fieldstop_magnitude_gain_f32(effective_aperture_mm: f32
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_magnitude_gain_f64(effective_aperture_mm: f64, eye_pupil_mm: f64, gain_mag: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_magnitude_gain_f64(
+    effective_aperture_mm: f64,
+    eye_pupil_mm: f64,
+    gain_mag: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(gain_mag, 3, || light::magnitude_gain(effective_aperture_mm, eye_pupil_mm)) }
 }
@@ -176,9 +257,22 @@ pub unsafe extern "C" fn fieldstop_magnitude_gain_f64(effective_aperture_mm: f64
 /// Statuses: null pointer, zero, overflow (beyond 32 bits).
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_limiting_magnitude_fx(naked_eye_mmag: i32, effective_aperture_um: u32, eye_pupil_um: u32, limit_mmag: *mut i32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_limiting_magnitude_fx(
+    naked_eye_mmag: i32,
+    effective_aperture_um: u32,
+    eye_pupil_um: u32,
+    limit_mmag: *mut i32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(limit_mmag, 4, || light::limiting_magnitude_fx(Millimagnitudes(naked_eye_mmag), Micrometres(effective_aperture_um), Micrometres(eye_pupil_um))) }
+    unsafe {
+        give(limit_mmag, 4, || {
+            light::limiting_magnitude_fx(
+                Millimagnitudes(naked_eye_mmag),
+                Micrometres(effective_aperture_um),
+                Micrometres(eye_pupil_um),
+            )
+        })
+    }
 }
 
 /// Gives the faintest star that a telescope shows to an eye whose own limit is known, in magnitudes.
@@ -190,9 +284,16 @@ pub unsafe extern "C" fn fieldstop_limiting_magnitude_fx(naked_eye_mmag: i32, ef
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_limiting_magnitude_f32(naked_eye_mag: f32, effective_aperture_mm: f32, eye_pupil_mm: f32, limit_mag: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_limiting_magnitude_f32(
+    naked_eye_mag: f32,
+    effective_aperture_mm: f32,
+    eye_pupil_mm: f32,
+    limit_mag: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(limit_mag, 4, || light::limiting_magnitude(naked_eye_mag, effective_aperture_mm, eye_pupil_mm)) }
+    unsafe {
+        give(limit_mag, 4, || light::limiting_magnitude(naked_eye_mag, effective_aperture_mm, eye_pupil_mm))
+    }
 }
 
 /// Gives the faintest star that a telescope shows to an eye whose own limit is known, in magnitudes, in
@@ -205,9 +306,16 @@ pub unsafe extern "C" fn fieldstop_limiting_magnitude_f32(naked_eye_mag: f32, ef
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_limiting_magnitude_f64(naked_eye_mag: f64, effective_aperture_mm: f64, eye_pupil_mm: f64, limit_mag: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_limiting_magnitude_f64(
+    naked_eye_mag: f64,
+    effective_aperture_mm: f64,
+    eye_pupil_mm: f64,
+    limit_mag: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(limit_mag, 4, || light::limiting_magnitude(naked_eye_mag, effective_aperture_mm, eye_pupil_mm)) }
+    unsafe {
+        give(limit_mag, 4, || light::limiting_magnitude(naked_eye_mag, effective_aperture_mm, eye_pupil_mm))
+    }
 }
 
 /// Gives how bright an extended object looks in the eyepiece, against the bare eye, in Q16.16.
@@ -218,9 +326,22 @@ pub unsafe extern "C" fn fieldstop_limiting_magnitude_f64(naked_eye_mag: f64, ef
 /// Statuses: null pointer, zero, out of range.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_surface_brightness_fx(exit_pupil_um: u32, eye_pupil_um: u32, throughput_q16: u32, brightness_q16: *mut u32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_surface_brightness_fx(
+    exit_pupil_um: u32,
+    eye_pupil_um: u32,
+    throughput_q16: u32,
+    brightness_q16: *mut u32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(brightness_q16, 4, || light::surface_brightness_fx(Micrometres(exit_pupil_um), Micrometres(eye_pupil_um), Q16(throughput_q16))) }
+    unsafe {
+        give(brightness_q16, 4, || {
+            light::surface_brightness_fx(
+                Micrometres(exit_pupil_um),
+                Micrometres(eye_pupil_um),
+                Q16(throughput_q16),
+            )
+        })
+    }
 }
 
 /// Gives how bright an extended object looks in the eyepiece, against the bare eye, a plain number.
@@ -232,7 +353,12 @@ pub unsafe extern "C" fn fieldstop_surface_brightness_fx(exit_pupil_um: u32, eye
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_surface_brightness_f32(exit_pupil_mm: f32, eye_pupil_mm: f32, throughput: f32, brightness: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_surface_brightness_f32(
+    exit_pupil_mm: f32,
+    eye_pupil_mm: f32,
+    throughput: f32,
+    brightness: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(brightness, 4, || light::surface_brightness(exit_pupil_mm, eye_pupil_mm, throughput)) }
 }
@@ -247,7 +373,12 @@ pub unsafe extern "C" fn fieldstop_surface_brightness_f32(exit_pupil_mm: f32, ey
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_surface_brightness_f64(exit_pupil_mm: f64, eye_pupil_mm: f64, throughput: f64, brightness: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_surface_brightness_f64(
+    exit_pupil_mm: f64,
+    eye_pupil_mm: f64,
+    throughput: f64,
+    brightness: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(brightness, 4, || light::surface_brightness(exit_pupil_mm, eye_pupil_mm, throughput)) }
 }
@@ -260,7 +391,11 @@ pub unsafe extern "C" fn fieldstop_surface_brightness_f64(exit_pupil_mm: f64, ey
 /// Statuses: null pointer, zero.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_magnitude_difference_fx(flux_a: u32, flux_b: u32, difference_mmag: *mut i32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_magnitude_difference_fx(
+    flux_a: u32,
+    flux_b: u32,
+    difference_mmag: *mut i32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(difference_mmag, 3, || light::magnitude_difference_fx(flux_a, flux_b)) }
 }
@@ -274,7 +409,11 @@ pub unsafe extern "C" fn fieldstop_magnitude_difference_fx(flux_a: u32, flux_b: 
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_magnitude_difference_f32(flux_a: f32, flux_b: f32, difference_mag: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_magnitude_difference_f32(
+    flux_a: f32,
+    flux_b: f32,
+    difference_mag: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(difference_mag, 3, || light::magnitude_difference(flux_a, flux_b)) }
 }
@@ -288,7 +427,11 @@ pub unsafe extern "C" fn fieldstop_magnitude_difference_f32(flux_a: f32, flux_b:
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_magnitude_difference_f64(flux_a: f64, flux_b: f64, difference_mag: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_magnitude_difference_f64(
+    flux_a: f64,
+    flux_b: f64,
+    difference_mag: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(difference_mag, 3, || light::magnitude_difference(flux_a, flux_b)) }
 }
@@ -301,7 +444,11 @@ pub unsafe extern "C" fn fieldstop_magnitude_difference_f64(flux_a: f64, flux_b:
 /// Statuses: null pointer, zero.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_distance_dimming_fx(near_distance: u32, distant_distance: u32, dimming_mmag: *mut i32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_distance_dimming_fx(
+    near_distance: u32,
+    distant_distance: u32,
+    dimming_mmag: *mut i32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(dimming_mmag, 3, || light::distance_dimming_fx(near_distance, distant_distance)) }
 }
@@ -315,7 +462,11 @@ pub unsafe extern "C" fn fieldstop_distance_dimming_fx(near_distance: u32, dista
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_distance_dimming_f32(near_distance: f32, distant_distance: f32, dimming_mag: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_distance_dimming_f32(
+    near_distance: f32,
+    distant_distance: f32,
+    dimming_mag: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(dimming_mag, 3, || light::distance_dimming(near_distance, distant_distance)) }
 }
@@ -329,7 +480,11 @@ pub unsafe extern "C" fn fieldstop_distance_dimming_f32(near_distance: f32, dist
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_distance_dimming_f64(near_distance: f64, distant_distance: f64, dimming_mag: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_distance_dimming_f64(
+    near_distance: f64,
+    distant_distance: f64,
+    dimming_mag: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(dimming_mag, 3, || light::distance_dimming(near_distance, distant_distance)) }
 }
@@ -342,9 +497,17 @@ pub unsafe extern "C" fn fieldstop_distance_dimming_f64(near_distance: f64, dist
 /// Statuses: null pointer, overflow (2147483648 mmag or more).
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_extinction_fx(coefficient_mmag: u32, airmass_q16: u32, extinction_mmag: *mut i32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_extinction_fx(
+    coefficient_mmag: u32,
+    airmass_q16: u32,
+    extinction_mmag: *mut i32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(extinction_mmag, 3, || light::extinction_fx(MillimagnitudesPerAirmass(coefficient_mmag), Q16(airmass_q16))) }
+    unsafe {
+        give(extinction_mmag, 3, || {
+            light::extinction_fx(MillimagnitudesPerAirmass(coefficient_mmag), Q16(airmass_q16))
+        })
+    }
 }
 
 /// Gives how many magnitudes the air takes from a star, in magnitudes.
@@ -356,7 +519,11 @@ pub unsafe extern "C" fn fieldstop_extinction_fx(coefficient_mmag: u32, airmass_
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_extinction_f32(coefficient_mag: f32, airmass: f32, extinction_mag: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_extinction_f32(
+    coefficient_mag: f32,
+    airmass: f32,
+    extinction_mag: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(extinction_mag, 3, || light::extinction(coefficient_mag, airmass)) }
 }
@@ -370,7 +537,11 @@ pub unsafe extern "C" fn fieldstop_extinction_f32(coefficient_mag: f32, airmass:
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_extinction_f64(coefficient_mag: f64, airmass: f64, extinction_mag: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_extinction_f64(
+    coefficient_mag: f64,
+    airmass: f64,
+    extinction_mag: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(extinction_mag, 3, || light::extinction(coefficient_mag, airmass)) }
 }
@@ -383,7 +554,11 @@ pub unsafe extern "C" fn fieldstop_extinction_f64(coefficient_mag: f64, airmass:
 /// Statuses: null pointer, zero, out of range, overflow (65536 or more).
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_t_number_fx(focal_ratio_q16: u32, throughput_q16: u32, t_number_q16: *mut u32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_t_number_fx(
+    focal_ratio_q16: u32,
+    throughput_q16: u32,
+    t_number_q16: *mut u32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(t_number_q16, 3, || light::t_number_fx(Q16(focal_ratio_q16), Q16(throughput_q16))) }
 }
@@ -397,7 +572,11 @@ pub unsafe extern "C" fn fieldstop_t_number_fx(focal_ratio_q16: u32, throughput_
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_t_number_f32(focal_ratio: f32, throughput: f32, t_number: *mut f32) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_t_number_f32(
+    focal_ratio: f32,
+    throughput: f32,
+    t_number: *mut f32,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(t_number, 3, || light::t_number(focal_ratio, throughput)) }
 }
@@ -412,7 +591,11 @@ pub unsafe extern "C" fn fieldstop_t_number_f32(focal_ratio: f32, throughput: f3
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_t_number_f64(focal_ratio: f64, throughput: f64, t_number: *mut f64) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_t_number_f64(
+    focal_ratio: f64,
+    throughput: f64,
+    t_number: *mut f64,
+) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(t_number, 3, || light::t_number(focal_ratio, throughput)) }
 }

@@ -6,6 +6,7 @@
 
 pub mod field;
 pub mod light;
+pub mod resolution;
 pub mod status;
 pub mod units;
 

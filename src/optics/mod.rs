@@ -14,6 +14,7 @@
 
 pub mod field;
 pub mod light;
+pub mod resolution;
 
 use crate::status::{Cause, Error};
 
