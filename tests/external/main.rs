@@ -3,6 +3,7 @@
 
 mod field;
 mod light;
+mod resolution;
 
 /// Fails unless `got` is within `tolerance` of what is published.
 #[track_caller]
