@@ -4,6 +4,7 @@
 #![warn(missing_docs)]
 
 pub mod status;
+pub mod text;
 pub mod units;
 
 pub use status::{Cause, Error};
