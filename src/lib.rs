@@ -3,6 +3,7 @@
 #![deny(unsafe_code)]
 #![warn(missing_docs)]
 
+pub mod setup;
 pub mod status;
 pub mod text;
 pub mod units;
