@@ -1,7 +1,7 @@
 //! Values as characters, against an independent reference: 128-bit integers and strings of the standard library.
 
 use fieldstop::Cause;
-use fieldstop::text::{AngleForm, TextStyle, Unit, Value};
+use fieldstop::text::{AngleForm, TextStyle, Unit, Value, text};
 use fieldstop::units::*;
 use proptest::prelude::*;
 
@@ -193,7 +193,7 @@ const STYLES: [TextStyle; 5] = [
     TextStyle::UTF8,
     TextStyle::HD44780_A00,
     TextStyle::HD44780_A02,
-    TextStyle { decimal_mark: b',', dash: b'~', ..TextStyle::UTF8 },
+    TextStyle { decimal_mark: b',', dash: text(b"~"), ..TextStyle::UTF8 },
 ];
 
 #[test]
@@ -303,13 +303,14 @@ proptest! {
 
     /// Any bytes at all as a style: no panic, and the width still holds.
     #[test]
-    fn any_style(value in any_value(), bytes in any::<[u8; 172]>(), width in any::<u8>()) {
+    fn any_style(value in any_value(), bytes in any::<[u8; 195]>(), width in any::<u8>()) {
         let mut units = [[0; 8]; 21];
         for (place, &byte) in units.as_flattened_mut().iter_mut().zip(&bytes) {
             *place = byte;
         }
-        let [.., decimal_mark, dash, fact_mark, utf8] = bytes;
-        let style = TextStyle { units, decimal_mark, dash, fact_mark, utf8: utf8 & 1 };
+        let (dash, yes, no) = (units[3], units[4], units[5]);
+        let [.., decimal_mark, fact_mark, utf8] = bytes;
+        let style = TextStyle { units, dash, yes, no, decimal_mark, fact_mark, utf8: utf8 & 1 };
         let mut out = [0; 300];
         if let Ok(length) = value.write(&style, width, &mut out) && width > 0 && utf8 & 1 == 0 {
             prop_assert_eq!(length, usize::from(width));

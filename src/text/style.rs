@@ -53,19 +53,60 @@ pub enum Unit {
     Watt = 21,
 }
 
+impl Unit {
+    /// The unit with this number, if there is one.
+    pub const fn from_number(number: u8) -> Option<Unit> {
+        Some(match number {
+            0 => Unit::None,
+            1 => Unit::Degree,
+            2 => Unit::Minute,
+            3 => Unit::Second,
+            4 => Unit::DecimalDegree,
+            5 => Unit::Metre,
+            6 => Unit::Millimetre,
+            7 => Unit::Micrometre,
+            8 => Unit::Nanometre,
+            9 => Unit::Times,
+            10 => Unit::Percent,
+            11 => Unit::Magnitude,
+            12 => Unit::FocalRatio,
+            13 => Unit::Pixel,
+            14 => Unit::SecondPerPixel,
+            15 => Unit::SecondPerMillimetre,
+            16 => Unit::SecondPerTime,
+            17 => Unit::PerMillimetre,
+            18 => Unit::Time,
+            19 => Unit::Step,
+            20 => Unit::Kelvin,
+            21 => Unit::Watt,
+            _ => return None,
+        })
+    }
+}
+
+/// Numbers of the texts that stand in place of a number, behind those of the units.
+pub(super) const DASH: u8 = 22;
+pub(super) const YES: u8 = 23;
+pub(super) const NO: u8 = 24;
+
 /// The look of all text. It is plain data that the caller owns: take one of the ready ones and change what you like,
 /// `TextStyle { decimal_mark: b',', ..TextStyle::UTF8 }`.
+///
+/// A text is up to 8 bytes of the display's character set, filled up with zeros; [`text`] makes one.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
 #[repr(C)]
 pub struct TextStyle {
-    /// The text of each [`Unit`], with the blank before it where one is wanted, as bytes of the display's character
-    /// set, filled up with zeros.
+    /// The text of each [`Unit`] from 1 on, with the blank before it where one is wanted.
     pub units: [[u8; 8]; 21],
+    /// Stands where a value is not available.
+    pub dash: [u8; 8],
+    /// Answers whether a fact holds.
+    pub yes: [u8; 8],
+    /// Answers whether a fact holds.
+    pub no: [u8; 8],
     /// Point or comma, one byte.
     pub decimal_mark: u8,
-    /// Stands where a value is not available, one byte.
-    pub dash: u8,
-    /// Stands before a value that some fact of the readout belongs to, one byte.
+    /// Stands before a value that a fact of the readout concerns, one byte.
     pub fact_mark: u8,
     /// 1: texts are UTF-8 and a character may take several bytes. 0: every byte is a character.
     pub utf8: u8,
@@ -97,8 +138,10 @@ impl TextStyle {
             text(b" K"),
             text(b" W"),
         ],
+        dash: text(b"-"),
+        yes: text(b"yes"),
+        no: text(b"no"),
         decimal_mark: b'.',
-        dash: b'-',
         fact_mark: b'!',
         utf8: 0,
     };
@@ -155,15 +198,21 @@ impl TextStyle {
 
     /// The text of a unit, without the zeros that fill it up; empty for [`Unit::None`].
     pub fn unit(&self, unit: Unit) -> &[u8] {
-        self.unit_numbered(unit as u8)
+        self.text(unit as u8)
     }
 
-    /// The same for the number of the unit.
-    pub(super) fn unit_numbered(&self, number: u8) -> &[u8] {
-        match self.units.get(usize::from(number).wrapping_sub(1)) {
-            Some(text) => text.split(|&byte| byte == 0).next().unwrap_or(&[]),
-            None => &[],
-        }
+    /// The text with a number: of a unit, or one of those behind.
+    pub(super) fn text(&self, number: u8) -> &[u8] {
+        let text = match number {
+            DASH => &self.dash,
+            YES => &self.yes,
+            NO => &self.no,
+            _ => match self.units.get(usize::from(number).wrapping_sub(1)) {
+                Some(text) => text,
+                None => return &[],
+            },
+        };
+        text.split(|&byte| byte == 0).next().unwrap_or(&[])
     }
 
     /// Whether this byte begins a character, so that counting these counts characters.

@@ -1,7 +1,7 @@
 //! A quantity together with the form in which it is shown.
 
 use super::digits::scale_down;
-use super::style::Unit;
+use super::style::{DASH, NO, Unit, YES};
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
 
 /// How an angle is shown. The numbers are frozen.
@@ -33,7 +33,8 @@ pub struct Value {
     pub(super) number: u32,
     pub(super) negative: bool,
     pub(super) decimals: u8,
-    pub(super) unit: Unit,
+    /// Of a unit, or of the text that stands for the number.
+    pub(super) text: u8,
     pub(super) shape: Shape,
 }
 
@@ -45,8 +46,8 @@ pub(super) enum Shape {
     Plain,
     /// Groups of two digits, counting to sixty.
     Sexagesimal,
-    /// A dash.
-    NotAvailable,
+    /// None: the text alone.
+    Word,
     /// Too many decimals, at this position of the constructor's arguments.
     Refused2,
     Refused3,
@@ -54,7 +55,12 @@ pub(super) enum Shape {
 
 impl Value {
     /// A value that is not known: shown as the dash of the style.
-    pub const NOT_AVAILABLE: Value = Value::plain(0, 0, Unit::None, Shape::NotAvailable);
+    pub const NOT_AVAILABLE: Value = Value::word(DASH);
+
+    /// The answer whether a fact holds: shown as the style's word for it.
+    pub const fn answer(holds: bool) -> Value {
+        Value::word(if holds { YES } else { NO })
+    }
 
     /// An integer.
     pub const fn count(count: u32, unit: Unit) -> Value {
@@ -105,7 +111,7 @@ impl Value {
     pub fn angle(angle: Milliarcseconds, form: AngleForm, decimals: u8) -> Value {
         let most = if let AngleForm::DecimalDegrees = form { 4 } else { 3 };
         if decimals > most {
-            return Value::plain(0, 0, Unit::None, Shape::Refused3);
+            return Value::REFUSED_3;
         }
         let (form, decimals) = match form {
             AngleForm::BySize if angle.0 >= 3_599_500 => (AngleForm::DegreesMinutes, 0),
@@ -127,7 +133,7 @@ impl Value {
     pub fn decimal(number: u32, places: u8, decimals: u8, unit: Unit) -> Value {
         match places.checked_sub(decimals) {
             Some(dropped) => Value::plain(scale_down(number, dropped, 0), decimals, unit, Shape::Plain),
-            None => Value::plain(0, 0, Unit::None, Shape::Refused2),
+            None => Value::REFUSED_2,
         }
     }
 
@@ -139,27 +145,34 @@ impl Value {
 
     /// The unit that stands by the number, where it can stand alone: a sexagesimal angle has its signs inside.
     pub const fn unit(&self) -> Unit {
-        match self.shape {
-            Shape::Sexagesimal => Unit::None,
-            _ => self.unit,
+        match (&self.shape, Unit::from_number(self.text)) {
+            (Shape::Plain, Some(unit)) => unit,
+            _ => Unit::None,
         }
     }
 
     /// The number alone, for a display that sets the unit elsewhere.
     pub const fn without_unit(self) -> Value {
         match self.shape {
-            Shape::Sexagesimal => self,
-            _ => Value { unit: Unit::None, ..self },
+            Shape::Plain => Value { text: Unit::None as u8, ..self },
+            _ => self,
         }
     }
 
+    pub(crate) const REFUSED_2: Value = Value::plain(0, 0, Unit::None, Shape::Refused2);
+    const REFUSED_3: Value = Value::plain(0, 0, Unit::None, Shape::Refused3);
+
     const fn plain(number: u32, decimals: u8, unit: Unit, shape: Shape) -> Value {
-        Value { number, negative: false, decimals, unit, shape }
+        Value { number, negative: false, decimals, text: unit as u8, shape }
     }
 
-    fn from_q16(ratio: Q16, shift: u8, decimals: u8, unit: Unit) -> Value {
+    const fn word(text: u8) -> Value {
+        Value { number: 0, negative: false, decimals: 0, text, shape: Shape::Word }
+    }
+
+    pub(super) fn from_q16(ratio: Q16, shift: u8, decimals: u8, unit: Unit) -> Value {
         if decimals > 4 - shift {
-            return Value::plain(0, 0, Unit::None, Shape::Refused2);
+            return Value::REFUSED_2;
         }
         let mut power = 1; // at most 10^4
         for _ in 0..shift + decimals {

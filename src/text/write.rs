@@ -8,14 +8,13 @@ use crate::status::{Cause, Error};
 /// The longest: 1193°02'47.295".
 const LONGEST: usize = 16;
 
-// Codes that the style turns into characters; both are under the digits.
+/// The code that the style's decimal mark replaces.
 const MARK: u8 = b'.';
-const DASH: u8 = b'/';
 
 /// A value worked out and measured, nothing written yet.
 pub(super) struct Composed<'a> {
     style: &'a TextStyle,
-    /// Written from the right. Under a blank: the number of a unit.
+    /// Filled from the right. Under a blank: the number of a text of the style.
     codes: [u8; LONGEST],
     first: usize,
     pub(super) characters: usize,
@@ -37,7 +36,7 @@ impl<'a> Composed<'a> {
     pub(super) fn new(value: &Value, style: &'a TextStyle) -> Result<Composed<'a>, Error> {
         let mut text = Composed { style, codes: [0; LONGEST], first: LONGEST, characters: 0, bytes: 0 };
         match value.shape {
-            Shape::NotAvailable => text.push(DASH),
+            Shape::Word => text.push_text(value.text),
             Shape::Refused2 => return Err(Error::new(Cause::OutOfRange, 2)),
             Shape::Refused3 => return Err(Error::new(Cause::OutOfRange, 3)),
             Shape::Plain | Shape::Sexagesimal => text.push_number(value),
@@ -47,10 +46,10 @@ impl<'a> Composed<'a> {
 
     fn push_number(&mut self, value: &Value) {
         let mut number = value.number;
-        let mut unit = value.unit as u8;
+        let mut unit = value.text;
         let in_front = unit == Unit::FocalRatio as u8;
         if !in_front {
-            self.push_unit(unit);
+            self.push_text(unit);
         }
         if value.decimals > 0 {
             for _ in 0..value.decimals {
@@ -64,7 +63,7 @@ impl<'a> Composed<'a> {
                 number = self.push_digit(number, Radix::Ten);
                 number = self.push_digit(number, Radix::Six);
                 unit -= 1;
-                self.push_unit(unit);
+                self.push_text(unit);
                 if unit <= Unit::Degree as u8 || number < 60 {
                     break;
                 }
@@ -80,7 +79,7 @@ impl<'a> Composed<'a> {
             self.push(b'-');
         }
         if in_front {
-            self.push_unit(unit);
+            self.push_text(unit);
         }
     }
 
@@ -103,10 +102,10 @@ impl<'a> Composed<'a> {
         }
     }
 
-    fn push_unit(&mut self, unit: u8) {
-        if unit != 0 {
-            self.push_code(unit);
-            for &byte in self.style.unit_numbered(unit) {
+    fn push_text(&mut self, number: u8) {
+        if number != 0 {
+            self.push_code(number);
+            for &byte in self.style.text(number) {
                 self.characters += self.style.begins_character(byte) as usize;
                 self.bytes += 1;
             }
@@ -135,9 +134,8 @@ impl<'a> Composed<'a> {
             match code {
                 b'0'.. => put(code),
                 MARK => put(self.style.decimal_mark),
-                DASH => put(self.style.dash),
                 b'-' => put(code),
-                unit => self.style.unit_numbered(unit).iter().for_each(|&byte| put(byte)),
+                number => self.style.text(number).iter().for_each(|&byte| put(byte)),
             }
         }
         Ok(length)
