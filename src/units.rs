@@ -8,6 +8,12 @@ macro_rules! quantity {
         #[derive(Clone, Copy, Debug, Default, PartialEq, Eq, PartialOrd, Ord, Hash)]
         #[repr(transparent)]
         pub struct $name(pub $integer);
+
+        impl From<$name> for $integer {
+            fn from(quantity: $name) -> $integer {
+                quantity.0
+            }
+        }
     )*};
 }
 

@@ -1,0 +1,143 @@
+//! What the float forms need of f32 and f64, over libm, and the checks of their arguments.
+
+use crate::status::{Cause, Error};
+use core::ops::{Add, Div, Mul, Neg, Sub};
+
+mod sealed {
+    pub trait Sealed {}
+    impl Sealed for f32 {}
+    impl Sealed for f64 {}
+}
+
+/// `f32` or `f64`. An f32 is computed in f32 throughout.
+///
+/// A float argument is finite and at most 2^40 (1.0995e12) in magnitude; one that must not be zero is at least 2^-40
+/// (9.1e-13). So no product on the way to a result can overflow, or lose bits at the bottom, in either type.
+pub trait Real:
+    Copy
+    + PartialOrd
+    + Add<Output = Self>
+    + Sub<Output = Self>
+    + Mul<Output = Self>
+    + Div<Output = Self>
+    + Neg<Output = Self>
+    + sealed::Sealed
+{
+    /// The nearest value of this type.
+    fn of(value: f64) -> Self;
+    #[doc(hidden)]
+    fn is_finite(self) -> bool;
+    #[doc(hidden)]
+    fn sqrt(self) -> Self;
+    #[doc(hidden)]
+    fn atan(self) -> Self;
+    #[doc(hidden)]
+    fn atan2(self, x: Self) -> Self;
+    #[doc(hidden)]
+    fn tan(self) -> Self;
+    #[doc(hidden)]
+    fn asin(self) -> Self;
+    #[doc(hidden)]
+    fn sin(self) -> Self;
+    #[doc(hidden)]
+    fn cos(self) -> Self;
+    #[doc(hidden)]
+    fn ln_1p(self) -> Self;
+    #[doc(hidden)]
+    fn log10(self) -> Self;
+    #[doc(hidden)]
+    fn exp(self) -> Self;
+    #[doc(hidden)]
+    fn powf(self, exponent: Self) -> Self;
+    #[doc(hidden)]
+    fn hypot(self, other: Self) -> Self;
+}
+
+macro_rules! real {
+    ($t:ty, $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
+     $log10:ident $exp:ident $pow:ident $hypot:ident) => {
+        impl Real for $t {
+            #[inline(always)]
+            fn of(value: f64) -> Self {
+                value as $t
+            }
+            #[inline(always)]
+            fn is_finite(self) -> bool {
+                <$t>::is_finite(self)
+            }
+            fn sqrt(self) -> Self {
+                libm::$sqrt(self)
+            }
+            fn atan(self) -> Self {
+                libm::$atan(self)
+            }
+            fn atan2(self, x: Self) -> Self {
+                libm::$atan2(self, x)
+            }
+            fn tan(self) -> Self {
+                libm::$tan(self)
+            }
+            fn asin(self) -> Self {
+                libm::$asin(self)
+            }
+            fn sin(self) -> Self {
+                libm::$sin(self)
+            }
+            fn cos(self) -> Self {
+                libm::$cos(self)
+            }
+            fn ln_1p(self) -> Self {
+                libm::$ln_1p(self)
+            }
+            fn log10(self) -> Self {
+                libm::$log10(self)
+            }
+            fn exp(self) -> Self {
+                libm::$exp(self)
+            }
+            fn powf(self, exponent: Self) -> Self {
+                libm::$pow(self, exponent)
+            }
+            fn hypot(self, other: Self) -> Self {
+                libm::$hypot(self, other)
+            }
+        }
+    };
+}
+
+real!(f32, sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
+real!(f64, sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
+
+const LEAST: f64 = 1.0 / (1u64 << 40) as f64;
+const MOST: f64 = (1u64 << 40) as f64;
+
+/// Refuses what is not in 2^-40 to 2^40.
+pub(crate) fn positive<F: Real>(x: F, argument: u8) -> Result<(), Error> {
+    let cause = if !x.is_finite() {
+        Cause::NotFinite
+    } else if x == F::of(0.0) {
+        Cause::Zero
+    } else if x < F::of(LEAST) || x > F::of(MOST) {
+        Cause::OutOfRange
+    } else {
+        return Ok(());
+    };
+    Err(Error::new(cause, argument))
+}
+
+/// Refuses what is not in 0 to `most`, which is at most 2^40.
+pub(crate) fn from_zero_to<F: Real>(most: f64, x: F, argument: u8) -> Result<(), Error> {
+    let cause = if !x.is_finite() {
+        Cause::NotFinite
+    } else if x < F::of(0.0) || x > F::of(most) {
+        Cause::OutOfRange
+    } else {
+        return Ok(());
+    };
+    Err(Error::new(cause, argument))
+}
+
+/// Refuses what is not in 0 to 2^40.
+pub(crate) fn not_negative<F: Real>(x: F, argument: u8) -> Result<(), Error> {
+    from_zero_to(MOST, x, argument)
+}

@@ -1,0 +1,10 @@
+//! Every formula of the library against high-precision arithmetic, against its own other forms, at the edges of its
+//! arguments, and through C. One registry drives them all; FIELDSTOP_CASES sets the number of cases a function and form.
+
+mod big;
+mod cases;
+mod coverage;
+mod edges;
+mod oracle;
+mod registry;
+mod twin;

@@ -1,0 +1,151 @@
+//! Each form against the exact value: within the error owed, and refused just where it should be.
+
+use super::big::{Big, big};
+use super::cases;
+use super::registry::{Argument, FloatOwed, Row, rows};
+use fieldstop::{Cause, Error};
+
+/// What the checks of the arguments say, in their fixed order.
+fn refusal(row: &Row, values: &[Big], own: impl Fn(usize, &Argument) -> Option<Cause>) -> Option<Error> {
+    row.arguments.iter().enumerate().find_map(|(i, a)| {
+        let cause = own(i, a).or_else(|| (row.refuses)(i, values).then_some(Cause::OutOfRange))?;
+        Some(Error::new(cause, i as u8 + 1))
+    })
+}
+
+pub fn fixed_refusal(row: &Row, case: &[i64]) -> Option<Error> {
+    refusal(row, &row.in_float_units(case), |i, a| {
+        let x = case[i];
+        if x == 0 && a.zero_refused {
+            Some(Cause::Zero)
+        } else if x < a.range.0 || x > a.range.1 {
+            Some(Cause::OutOfRange)
+        } else {
+            None
+        }
+    })
+}
+
+pub fn float_refusal(row: &Row, case: &[f64]) -> Option<Error> {
+    if let Some(i) = case.iter().position(|x| !x.is_finite()) {
+        // The exact value of what stands before it can still be refused first.
+        let before = Row { arguments: &row.arguments[..i], ..*row };
+        return float_refusal(&before, &case[..i]).or(Some(Error::new(Cause::NotFinite, i as u8 + 1)));
+    }
+    let values: Vec<Big> = case.iter().map(|&x| big(x)).collect();
+    refusal(row, &values, |i, a| {
+        let x = case[i];
+        let limit = |steps: i64, whole: i64, otherwise: f64| {
+            if steps == whole { otherwise } else { steps as f64 / a.unit.steps }
+        };
+        let most = limit(a.range.1, a.unit.most, 2f64.powi(40));
+        let least = limit(a.range.0, a.unit.least, if a.unit.least < 0 { -most } else { 0.0 });
+        if a.unit.count {
+            (x == 0.0 && a.zero_refused).then_some(Cause::Zero)
+        } else if x == 0.0 && a.zero_refused {
+            Some(Cause::Zero)
+        } else if x < least || x > most || (a.zero_refused && x.abs() < 2f64.powi(-40)) {
+            Some(Cause::OutOfRange)
+        } else {
+            None
+        }
+    })
+}
+
+#[test]
+fn fixed_forms_are_within_the_error_owed() {
+    for row in rows() {
+        let mut worst = 0.0f64;
+        for case in cases::fixed(&row, cases::count()) {
+            let got = (row.fixed)(&case);
+            if let Some(error) = fixed_refusal(&row, &case) {
+                assert_eq!(got, Err(error), "{}_fx{case:?}", row.stem);
+                continue;
+            }
+            let exact = (row.exact)(&row.in_float_units(&case)) * big(row.result.steps);
+            let owed = row.owed.lsb.max(row.owed.part * exact.to_f64().abs());
+            match got {
+                Ok(value) => {
+                    let error = (big(value as f64) - &exact).abs().to_f64();
+                    assert!(
+                        error <= owed,
+                        "{}_fx{case:?} = {value}, exactly {}: error {error} LSB, owed {owed}",
+                        row.stem,
+                        exact.to_f64()
+                    );
+                    if row.owed.part == 0.0 || error > row.owed.lsb {
+                        worst = worst.max(if row.owed.part == 0.0 {
+                            error
+                        } else {
+                            error / exact.to_f64().abs()
+                        });
+                    }
+                }
+                Err(error) => {
+                    assert_eq!(error, Error::OVERFLOW, "{}_fx{case:?}", row.stem);
+                    let (least, most) = (big(row.result.least as f64), big(row.result.most as f64));
+                    assert!(
+                        exact.clone() + big(owed) > most || exact.clone() - big(owed) < least,
+                        "{}_fx{case:?} refused, but {} fits",
+                        row.stem,
+                        exact.to_f64()
+                    );
+                }
+            }
+        }
+        println!("{:26} fx  {worst:.4}", row.stem);
+    }
+}
+
+fn check_floats(single: bool) {
+    for row in rows() {
+        let Some(floats) = &row.floats else { continue };
+        let (compute, owed) =
+            if single { (floats.single, row.single_owed) } else { (floats.double, row.double_owed) };
+        let mut worst = 0.0f64;
+        for case in cases::float(&row, cases::count(), single) {
+            let got = compute(&case);
+            if let Some(error) = float_refusal(&row, &case) {
+                assert_eq!(got, Err(error), "{}{case:?}", row.stem);
+                continue;
+            }
+            let value = got.unwrap_or_else(|e| panic!("{}{case:?} refused: {e}", row.stem));
+            let values: Vec<Big> = case.iter().map(|&x| big(x)).collect();
+            let exact = (row.exact)(&values);
+            let distance = (big(value) - &exact).abs().to_f64();
+            let (error, limit) = match owed {
+                FloatOwed::Ulp(ulps) => {
+                    let largest = row.largest.map_or(exact.abs(), |f| f(&values).abs().max(exact.abs()));
+                    (distance / ulp(largest.to_f64(), single), ulps)
+                }
+                FloatOwed::Part(part) => (distance / exact.to_f64().abs().max(1e-300), part),
+                FloatOwed::Absolute(limit) => (distance / limit(&values), 1.0),
+            };
+            assert!(
+                error <= limit,
+                "{}{case:?} = {value:e}, exactly {:e}: error {error}, owed {limit}",
+                row.stem,
+                exact.to_f64()
+            );
+            worst = worst.max(error);
+        }
+        println!("{:26} {} {worst:.3e}", row.stem, if single { "f32" } else { "f64" });
+    }
+}
+
+/// The unit in the last place of the binade that holds `x`.
+fn ulp(x: f64, single: bool) -> f64 {
+    let (digits, lowest) = if single { (23, -149) } else { (52, -1074) };
+    let exponent = if x == 0.0 { -1074 } else { ((x.to_bits() >> 52) as i32 - 1023).max(-1022) };
+    2f64.powi((exponent - digits).max(lowest))
+}
+
+#[test]
+fn f32_forms_are_within_the_error_owed() {
+    check_floats(true);
+}
+
+#[test]
+fn f64_forms_are_within_the_error_owed() {
+    check_floats(false);
+}
