@@ -22,6 +22,20 @@ pub enum AngleForm {
     DecimalSeconds = 4,
 }
 
+impl AngleForm {
+    /// The form with this number, if there is one.
+    pub const fn from_number(number: u8) -> Option<AngleForm> {
+        Some(match number {
+            0 => AngleForm::BySize,
+            1 => AngleForm::DecimalDegrees,
+            2 => AngleForm::DegreesMinutes,
+            3 => AngleForm::MinutesSeconds,
+            4 => AngleForm::DecimalSeconds,
+            _ => return None,
+        })
+    }
+}
+
 /// A quantity and the form in which it is shown: the unit, and the decimals to which it is rounded.
 ///
 /// Rounding is to nearest, halves away from zero, and exact over the whole range of each quantity. A negative number
