@@ -203,23 +203,35 @@ impl TextStyle {
 
     /// The text with a number: of a unit, or one of those behind.
     pub(super) fn text(&self, number: u8) -> &[u8] {
-        let text = match number {
-            DASH => &self.dash,
-            YES => &self.yes,
-            NO => &self.no,
-            _ => match self.units.get(usize::from(number).wrapping_sub(1)) {
-                Some(text) => text,
-                None => return &[],
+        let text = match self.units.get(usize::from(number).wrapping_sub(1)) {
+            Some(text) => text,
+            None => match number {
+                DASH => &self.dash,
+                YES => &self.yes,
+                NO => &self.no,
+                _ => return &[],
             },
         };
-        text.split(|&byte| byte == 0).next().unwrap_or(&[])
+        let mut length = 0;
+        while length < 8 && text[length] != 0 {
+            length += 1;
+        }
+        &text[..length]
     }
 
-    /// Whether this byte begins a character, so that counting these counts characters.
-    #[inline]
-    pub(super) fn begins_character(&self, byte: u8) -> bool {
-        self.utf8 == 0 || byte & 0xc0 != 0x80
+    /// How many characters these bytes are.
+    pub(super) fn characters(&self, text: &[u8]) -> usize {
+        if self.utf8 == 0 {
+            return text.len();
+        }
+        text.iter().filter(|&&byte| begins_character(byte)).count()
     }
+}
+
+/// Whether this byte of UTF-8 begins a character, so that counting these counts characters.
+#[inline]
+pub(super) fn begins_character(byte: u8) -> bool {
+    byte & 0xc0 != 0x80
 }
 
 /// A unit's text for [`TextStyle::units`]: filled up with zeros; what is longer than 8 bytes is cut.

@@ -12,7 +12,7 @@ pub enum AngleForm {
     /// seconds, from one degree on `DegreesMinutes` in whole minutes. The decimals belong to the first of these.
     #[default]
     BySize = 0,
-    /// 1.21°, with at most 4 decimals.
+    /// 1.21°, with at most 3 decimals.
     DecimalDegrees = 1,
     /// 1°12', with at most 3 decimals of a minute.
     DegreesMinutes = 2,
@@ -121,10 +121,9 @@ impl Value {
         Value::signed_decimal(magnitude.0, 3, decimals, Unit::Magnitude)
     }
 
-    /// An angle, in a form given or picked by size; 0 to 3 decimals, for decimal degrees 0 to 4.
+    /// An angle with 0 to 3 decimals, in a form given or picked by size.
     pub fn angle(angle: Milliarcseconds, form: AngleForm, decimals: u8) -> Value {
-        let most = if let AngleForm::DecimalDegrees = form { 4 } else { 3 };
-        if decimals > most {
+        if decimals > 3 {
             return Value::REFUSED_3;
         }
         let (form, decimals) = match form {
@@ -134,13 +133,13 @@ impl Value {
             }
             form => (form, decimals),
         };
-        let (tens, sixes, unit, shape) = match form {
-            AngleForm::DecimalDegrees => (5, 2, Unit::DecimalDegree, Shape::Plain),
-            AngleForm::DegreesMinutes => (4, 1, Unit::Minute, Shape::Sexagesimal),
-            AngleForm::MinutesSeconds => (3, 0, Unit::Second, Shape::Sexagesimal),
-            AngleForm::DecimalSeconds | AngleForm::BySize => (3, 0, Unit::Second, Shape::Plain),
+        let (sixties, unit, shape) = match form {
+            AngleForm::DecimalDegrees => (2, Unit::DecimalDegree, Shape::Plain),
+            AngleForm::DegreesMinutes => (1, Unit::Minute, Shape::Sexagesimal),
+            AngleForm::MinutesSeconds => (0, Unit::Second, Shape::Sexagesimal),
+            AngleForm::DecimalSeconds | AngleForm::BySize => (0, Unit::Second, Shape::Plain),
         };
-        Value::plain(scale_down(angle.0, tens - decimals, sixes), decimals, unit, shape)
+        Value::plain(scale_down(angle.0, 3 - decimals, sixties), decimals, unit, shape)
     }
 
     /// Any other decimal number: `number` in units of 10^-`places`, shown with at most as many decimals.

@@ -1,22 +1,15 @@
-//! A value as characters: first the digits from the right, then everything into the buffer from the left.
+//! A value as characters: measured first, then written from the right.
 
-use super::digits::{Radix, split};
+use super::digits::{split_sixty, split_ten};
 use super::style::{TextStyle, Unit};
 use super::value::{Shape, Value};
 use crate::status::{Cause, Error};
 
-/// The longest: 1193°02'47.295".
-const LONGEST: usize = 16;
+pub(super) const NO_ROOM: Error = Error::new(Cause::NoRoom, 0);
 
-/// The code that the style's decimal mark replaces.
-const MARK: u8 = b'.';
-
-/// A value worked out and measured, nothing written yet.
-pub(super) struct Composed<'a> {
-    style: &'a TextStyle,
-    /// Filled from the right. Under a blank: the number of a text of the style.
-    codes: [u8; LONGEST],
-    first: usize,
+/// What a value is going to take.
+#[derive(Clone, Copy)]
+pub(super) struct Size {
     pub(super) characters: usize,
     pub(super) bytes: usize,
 }
@@ -28,116 +21,123 @@ impl Value {
     /// What is longer than `width` or `out` is refused with [`Cause::NoRoom`], too many decimals with
     /// [`Cause::OutOfRange`]; `out` is then as it was, and so it always is behind the length told.
     pub fn write(&self, style: &TextStyle, width: u8, out: &mut [u8]) -> Result<usize, Error> {
-        Composed::new(self, style)?.write(width, out)
+        let size = self.measure(style)?;
+        let width = usize::from(width);
+        let blanks = if width == 0 { 0 } else { width.wrapping_sub(size.characters) };
+        match out.get_mut(..blanks.wrapping_add(size.bytes)) {
+            Some(out) if blanks <= width => {
+                self.fill(style, out);
+                Ok(out.len())
+            }
+            _ => Err(NO_ROOM),
+        }
     }
-}
 
-impl<'a> Composed<'a> {
-    pub(super) fn new(value: &Value, style: &'a TextStyle) -> Result<Composed<'a>, Error> {
-        let mut text = Composed { style, codes: [0; LONGEST], first: LONGEST, characters: 0, bytes: 0 };
-        match value.shape {
-            Shape::Word => text.push_text(value.text),
+    pub(super) fn measure(&self, style: &TextStyle) -> Result<Size, Error> {
+        let mut size = Size { characters: 0, bytes: 0 };
+        let mut add = |number| {
+            let text = style.text(number);
+            size.bytes += text.len();
+            size.characters += style.characters(text);
+        };
+        add(self.text);
+        let digits = match self.shape {
+            Shape::Word => 0,
+            Shape::Plain => count_digits(self.number, 1).max(usize::from(self.decimals) + 1),
+            Shape::Sexagesimal => {
+                let (groups, least) = self.groups();
+                add(self.text - 1);
+                if groups == 2 {
+                    add(self.text - 2);
+                }
+                count_digits(self.number, least) + 2 * groups + usize::from(self.decimals)
+            }
             Shape::Refused2 => return Err(Error::new(Cause::OutOfRange, 2)),
             Shape::Refused3 => return Err(Error::new(Cause::OutOfRange, 3)),
-            Shape::Plain | Shape::Sexagesimal => text.push_number(value),
-        }
-        Ok(text)
-    }
-
-    fn push_number(&mut self, value: &Value) {
-        let mut number = value.number;
-        let mut unit = value.text;
-        let in_front = unit == Unit::FocalRatio as u8;
-        if !in_front {
-            self.push_text(unit);
-        }
-        if value.decimals > 0 {
-            for _ in 0..value.decimals {
-                number = self.push_digit(number, Radix::Ten);
-            }
-            self.push(MARK);
-        }
-        if value.shape == Shape::Sexagesimal {
-            // Degree, minute and second are 1, 2 and 3.
-            loop {
-                number = self.push_digit(number, Radix::Ten);
-                number = self.push_digit(number, Radix::Six);
-                unit -= 1;
-                self.push_text(unit);
-                if unit <= Unit::Degree as u8 || number < 60 {
-                    break;
-                }
-            }
-        }
-        loop {
-            number = self.push_digit(number, Radix::Ten);
-            if number == 0 {
-                break;
-            }
-        }
-        if value.negative {
-            self.push(b'-');
-        }
-        if in_front {
-            self.push_text(unit);
-        }
-    }
-
-    fn push_digit(&mut self, number: u32, radix: Radix) -> u32 {
-        let (rest, digit) = split(number, radix);
-        self.push(b'0' + digit);
-        rest
-    }
-
-    fn push(&mut self, code: u8) {
-        self.push_code(code);
-        self.characters += 1;
-        self.bytes += 1;
-    }
-
-    fn push_code(&mut self, code: u8) {
-        self.first = self.first.wrapping_sub(1);
-        if let Some(place) = self.codes.get_mut(self.first) {
-            *place = code;
-        }
-    }
-
-    fn push_text(&mut self, number: u8) {
-        if number != 0 {
-            self.push_code(number);
-            for &byte in self.style.text(number) {
-                self.characters += self.style.begins_character(byte) as usize;
-                self.bytes += 1;
-            }
-        }
-    }
-
-    pub(super) fn write(&self, width: u8, out: &mut [u8]) -> Result<usize, Error> {
-        let blanks = match width {
-            0 => Some(0),
-            _ => usize::from(width).checked_sub(self.characters),
         };
-        let Some((blanks, out)) = blanks.and_then(|n| Some((n, out.get_mut(..n + self.bytes)?))) else {
-            return Err(Error::new(Cause::NoRoom, 0));
-        };
-        let length = out.len();
-        let mut out = out.iter_mut();
+        let single = digits + usize::from(self.decimals > 0) + usize::from(self.negative);
+        size.characters += single;
+        size.bytes += single;
+        Ok(size)
+    }
+
+    /// The groups of two digits behind the first number of a sexagesimal angle, and what one of that number is worth.
+    fn groups(&self) -> (usize, u32) {
+        let mut one = 60; // at most 3600 * 10^3
+        for _ in 0..self.decimals {
+            one *= 10;
+        }
+        // Degree, minute and second are 1, 2 and 3.
+        if self.text == Unit::Second as u8 && self.number >= 60 * one { (2, 60 * one) } else { (1, one) }
+    }
+
+    /// Writes the value to the end of `out`, and blanks before it.
+    pub(super) fn fill(&self, style: &TextStyle, out: &mut [u8]) {
+        let mut places = out.iter_mut();
+        // There always is one: the value was measured.
         let mut put = |byte| {
-            if let Some(place) = out.next() {
+            if let Some(place) = places.next_back() {
                 *place = byte;
             }
         };
-        for _ in 0..blanks {
-            put(b' ');
+        let mut number = self.number;
+        let mut text = self.text;
+        let in_front = text == Unit::FocalRatio as u8;
+        if !in_front {
+            style.text(text).iter().rev().for_each(|&byte| put(byte));
         }
-        for &code in self.codes.get(self.first..).unwrap_or(&[]) {
-            match code {
-                b'0'.. => put(code),
-                MARK => put(self.style.decimal_mark),
-                b'-' => put(code),
-                number => self.style.text(number).iter().for_each(|&byte| put(byte)),
+        if self.shape != Shape::Word {
+            if self.decimals > 0 {
+                for _ in 0..self.decimals {
+                    let (rest, digit) = split_ten(number);
+                    put(b'0' + digit);
+                    number = rest;
+                }
+                put(style.decimal_mark);
+            }
+            if self.shape == Shape::Sexagesimal {
+                loop {
+                    let (rest, group) = split_sixty(number);
+                    number = rest;
+                    let tens = (group as u32 * 205 >> 11) as u8; // a tenth
+                    put(b'0' + group - 10 * tens);
+                    put(b'0' + tens);
+                    text -= 1;
+                    style.text(text).iter().rev().for_each(|&byte| put(byte));
+                    if text <= Unit::Degree as u8 || number < 60 {
+                        break;
+                    }
+                }
+            }
+            loop {
+                let (rest, digit) = split_ten(number);
+                put(b'0' + digit);
+                number = rest;
+                if number == 0 {
+                    break;
+                }
+            }
+            if self.negative {
+                put(b'-');
             }
         }
-        Ok(length)
+        if in_front {
+            style.text(text).iter().rev().for_each(|&byte| put(byte));
+        }
+        places.for_each(|place| *place = b' ');
     }
+}
+
+/// Digits of `number` in units of `one`, at least one. `one` is at most 3600 * 10^3.
+fn count_digits(number: u32, one: u32) -> usize {
+    let mut digits = 1;
+    let mut next = one * 10;
+    while number >= next {
+        digits += 1;
+        if next > u32::MAX / 10 {
+            break;
+        }
+        next *= 10;
+    }
+    digits
 }
