@@ -1,10 +1,15 @@
 //! C exports of `text`.
 
 use super::fieldstop_status;
+use crate::setup::{CameraReadout, VisualReadout};
 use crate::status::{Cause, Error};
-use crate::text::{AngleForm, TextStyle, Unit, Value};
+use crate::text::{
+    AngleForm, CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, CameraRow, Span, TextStyle, Unit,
+    VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C, Value, VisualRow, camera_row, changed, row_of,
+    visual_row, write_line,
+};
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
-use core::ffi::c_char;
+use core::ffi::{CStr, c_char};
 use core::slice;
 
 /// Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on.
@@ -62,6 +67,66 @@ pub const FIELDSTOP_UNIT_STEP: u8 = 19;
 pub const FIELDSTOP_UNIT_KELVIN: u8 = 20;
 /// Unit: watts.
 pub const FIELDSTOP_UNIT_WATT: u8 = 21;
+
+/// Rows of the visual pages, and labels that they need.
+pub const FIELDSTOP_VISUAL_ROWS: u8 = 16;
+/// Visual row: magnification.
+pub const FIELDSTOP_VISUAL_ROW_MAGNIFICATION: u8 = 0;
+/// Visual row: true field.
+pub const FIELDSTOP_VISUAL_ROW_TRUE_FIELD: u8 = 1;
+/// Visual row: exit pupil.
+pub const FIELDSTOP_VISUAL_ROW_EXIT_PUPIL: u8 = 2;
+/// Visual row: resolution.
+pub const FIELDSTOP_VISUAL_ROW_RESOLUTION: u8 = 3;
+/// Visual row: faintest star.
+pub const FIELDSTOP_VISUAL_ROW_FAINTEST_STAR: u8 = 4;
+/// Visual row: surface brightness.
+pub const FIELDSTOP_VISUAL_ROW_SURFACE_BRIGHTNESS: u8 = 5;
+/// Visual row: focal ratio.
+pub const FIELDSTOP_VISUAL_ROW_FOCAL_RATIO: u8 = 6;
+/// Visual row: focal length.
+pub const FIELDSTOP_VISUAL_ROW_FOCAL_LENGTH: u8 = 7;
+/// Visual row: lowest magnification.
+pub const FIELDSTOP_VISUAL_ROW_LOWEST_MAGNIFICATION: u8 = 8;
+/// Visual row: resolving magnification.
+pub const FIELDSTOP_VISUAL_ROW_RESOLVING_MAGNIFICATION: u8 = 9;
+/// Visual row: dawes limit.
+pub const FIELDSTOP_VISUAL_ROW_DAWES_LIMIT: u8 = 10;
+/// Visual row: effective aperture.
+pub const FIELDSTOP_VISUAL_ROW_EFFECTIVE_APERTURE: u8 = 11;
+/// Visual row: wide exit pupil.
+pub const FIELDSTOP_VISUAL_ROW_WIDE_EXIT_PUPIL: u8 = 12;
+/// Visual row: empty magnification.
+pub const FIELDSTOP_VISUAL_ROW_EMPTY_MAGNIFICATION: u8 = 13;
+/// Visual row: field from apparent.
+pub const FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT: u8 = 14;
+/// Visual row: seeing limited.
+pub const FIELDSTOP_VISUAL_ROW_SEEING_LIMITED: u8 = 15;
+
+/// Rows of the camera pages, and labels that they need.
+pub const FIELDSTOP_CAMERA_ROWS: u8 = 11;
+/// Camera row: frame width.
+pub const FIELDSTOP_CAMERA_ROW_FRAME_WIDTH: u8 = 0;
+/// Camera row: frame height.
+pub const FIELDSTOP_CAMERA_ROW_FRAME_HEIGHT: u8 = 1;
+/// Camera row: pixel scale.
+pub const FIELDSTOP_CAMERA_ROW_PIXEL_SCALE: u8 = 2;
+/// Camera row: star width.
+pub const FIELDSTOP_CAMERA_ROW_STAR_WIDTH: u8 = 3;
+/// Camera row: star pixels.
+pub const FIELDSTOP_CAMERA_ROW_STAR_PIXELS: u8 = 4;
+/// Camera row: focal ratio.
+pub const FIELDSTOP_CAMERA_ROW_FOCAL_RATIO: u8 = 5;
+/// Camera row: t-number.
+pub const FIELDSTOP_CAMERA_ROW_T_NUMBER: u8 = 6;
+/// Camera row: focal length.
+pub const FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH: u8 = 7;
+/// Camera row: plate scale.
+pub const FIELDSTOP_CAMERA_ROW_PLATE_SCALE: u8 = 8;
+/// Camera row: coarse sampling.
+pub const FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING: u8 = 9;
+/// Camera row: fine sampling.
+pub const FIELDSTOP_CAMERA_ROW_FINE_SAMPLING: u8 = 10;
 
 /// Gives the style of plain ASCII; never null.
 ///
@@ -312,7 +377,396 @@ pub unsafe extern "C" fn fieldstop_text_angle(
     unsafe { write(&value, style, 4, width, text, capacity, length) }
 }
 
-/// The common end of these functions: width, text, capacity and length follow the style in the arguments.
+/// Writes the text of a unit and gives its length in bytes.
+///
+/// Ranges: unit one of FIELDSTOP_UNIT_...
+/// Statuses: null pointer, out of range (unit), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_unit(
+    unit: u8,
+    style: *const TextStyle,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointers.
+    unsafe {
+        fill(style, [2, 3, 5], text, capacity, length, |style, out| {
+            let unit = Unit::from_number(unit).ok_or(Error::new(Cause::OutOfRange, 1))?;
+            put(style.unit(unit), out)
+        })
+    }
+}
+
+/// Gives the English labels of the visual pages for 20 columns and more, an array of FIELDSTOP_VISUAL_ROWS; never null.
+#[unsafe(no_mangle)]
+pub extern "C" fn fieldstop_text_visual_labels() -> *const *const c_char {
+    static LABELS: Labels<16> = Labels::new(VISUAL_LABELS_FOR_C);
+    LABELS.0.as_ptr()
+}
+
+/// Gives the English labels of the visual pages for 8 and 16 columns, an array of FIELDSTOP_VISUAL_ROWS; never null.
+#[unsafe(no_mangle)]
+pub extern "C" fn fieldstop_text_visual_labels_short() -> *const *const c_char {
+    static LABELS: Labels<16> = Labels::new(VISUAL_LABELS_SHORT_FOR_C);
+    LABELS.0.as_ptr()
+}
+
+/// Writes one line of the visual pages and gives its length in bytes; it is always `columns` characters long.
+///
+/// `line` counts over all pages: line r of page p is p rows + r. From 16 columns on a line has the label, cut where it
+/// must be, a mark where a fact concerns the value, and the value in its field at the right end; below 16 columns the
+/// label and the value have a line each. A line behind the last row is blank.
+/// Ranges: columns 8 to 255; labels an array of FIELDSTOP_VISUAL_ROWS.
+/// Statuses: null pointer, out of range (columns), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_visual_line(
+    readout: *const VisualReadout,
+    labels: *const *const c_char,
+    style: *const TextStyle,
+    columns: u8,
+    line: u8,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    if readout.is_null() {
+        return null(1);
+    }
+    if labels.is_null() {
+        return null(2);
+    }
+    // SAFETY: not null, and the caller's promise about the pointers.
+    unsafe {
+        fill(style, [3, 6, 8], text, capacity, length, |style, out| {
+            let number = row_of(line, columns);
+            let row = VisualRow::from_number(number);
+            let label = match row {
+                Some(_) => Label(*labels.add(number.into())),
+                None => Label(c"".as_ptr()),
+            };
+            let row = row.map(|row| visual_row(&*readout, row));
+            write_line(row.as_ref(), label, style, columns, line, out)
+        })
+    }
+}
+
+/// Writes a value of the visual pages with its unit and gives its length in bytes.
+///
+/// In the form that the pages show; a dash where it is not available.
+/// Ranges: row one of FIELDSTOP_VISUAL_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+/// Statuses: null pointer, out of range (row), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_visual_value(
+    readout: *const VisualReadout,
+    row: u8,
+    style: *const TextStyle,
+    width: u8,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    if readout.is_null() {
+        return null(1);
+    }
+    // SAFETY: not null, and the caller's promise about the pointers.
+    unsafe {
+        fill(style, [3, 5, 7], text, capacity, length, |style, out| {
+            let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
+            let row = visual_row(&*readout, row);
+            row.value.write(style, width, out)
+        })
+    }
+}
+
+/// Writes a value of the visual pages without its unit and gives its length in bytes.
+///
+/// In the form that the pages show; a dash where it is not available.
+/// Ranges: row one of FIELDSTOP_VISUAL_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+/// Statuses: null pointer, out of range (row), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_visual_number(
+    readout: *const VisualReadout,
+    row: u8,
+    style: *const TextStyle,
+    width: u8,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    if readout.is_null() {
+        return null(1);
+    }
+    // SAFETY: not null, and the caller's promise about the pointers.
+    unsafe {
+        fill(style, [3, 5, 7], text, capacity, length, |style, out| {
+            let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
+            let row = visual_row(&*readout, row);
+            row.value.without_unit().write(style, width, out)
+        })
+    }
+}
+
+/// Writes the unit of a value of the visual pages and gives its length in bytes, which may be 0.
+///
+/// It belongs to the number that fieldstop_text_visual_number writes.
+/// Ranges: row one of FIELDSTOP_VISUAL_ROW_...
+/// Statuses: null pointer, out of range (row), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_visual_unit(
+    readout: *const VisualReadout,
+    row: u8,
+    style: *const TextStyle,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    if readout.is_null() {
+        return null(1);
+    }
+    // SAFETY: not null, and the caller's promise about the pointers.
+    unsafe {
+        fill(style, [3, 4, 6], text, capacity, length, |style, out| {
+            let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
+            put(style.unit(visual_row(&*readout, row).value.unit()), out)
+        })
+    }
+}
+
+/// Gives the English labels of the camera pages for 20 columns and more, an array of FIELDSTOP_CAMERA_ROWS; never null.
+#[unsafe(no_mangle)]
+pub extern "C" fn fieldstop_text_camera_labels() -> *const *const c_char {
+    static LABELS: Labels<11> = Labels::new(CAMERA_LABELS_FOR_C);
+    LABELS.0.as_ptr()
+}
+
+/// Gives the English labels of the camera pages for 8 and 16 columns, an array of FIELDSTOP_CAMERA_ROWS; never null.
+#[unsafe(no_mangle)]
+pub extern "C" fn fieldstop_text_camera_labels_short() -> *const *const c_char {
+    static LABELS: Labels<11> = Labels::new(CAMERA_LABELS_SHORT_FOR_C);
+    LABELS.0.as_ptr()
+}
+
+/// Writes one line of the camera pages and gives its length in bytes; it is always `columns` characters long.
+///
+/// `line` counts over all pages: line r of page p is p rows + r. From 16 columns on a line has the label, cut where it
+/// must be, a mark where a fact concerns the value, and the value in its field at the right end; below 16 columns the
+/// label and the value have a line each. A line behind the last row is blank.
+/// Ranges: columns 8 to 255; labels an array of FIELDSTOP_CAMERA_ROWS.
+/// Statuses: null pointer, out of range (columns), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_camera_line(
+    readout: *const CameraReadout,
+    labels: *const *const c_char,
+    style: *const TextStyle,
+    columns: u8,
+    line: u8,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    if readout.is_null() {
+        return null(1);
+    }
+    if labels.is_null() {
+        return null(2);
+    }
+    // SAFETY: not null, and the caller's promise about the pointers.
+    unsafe {
+        fill(style, [3, 6, 8], text, capacity, length, |style, out| {
+            let number = row_of(line, columns);
+            let row = CameraRow::from_number(number);
+            let label = match row {
+                Some(_) => Label(*labels.add(number.into())),
+                None => Label(c"".as_ptr()),
+            };
+            let row = row.map(|row| camera_row(&*readout, row));
+            write_line(row.as_ref(), label, style, columns, line, out)
+        })
+    }
+}
+
+/// Writes a value of the camera pages with its unit and gives its length in bytes.
+///
+/// In the form that the pages show; a dash where it is not available.
+/// Ranges: row one of FIELDSTOP_CAMERA_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+/// Statuses: null pointer, out of range (row), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_camera_value(
+    readout: *const CameraReadout,
+    row: u8,
+    style: *const TextStyle,
+    width: u8,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    if readout.is_null() {
+        return null(1);
+    }
+    // SAFETY: not null, and the caller's promise about the pointers.
+    unsafe {
+        fill(style, [3, 5, 7], text, capacity, length, |style, out| {
+            let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
+            let row = camera_row(&*readout, row);
+            row.value.write(style, width, out)
+        })
+    }
+}
+
+/// Writes a value of the camera pages without its unit and gives its length in bytes.
+///
+/// In the form that the pages show; a dash where it is not available.
+/// Ranges: row one of FIELDSTOP_CAMERA_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+/// Statuses: null pointer, out of range (row), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_camera_number(
+    readout: *const CameraReadout,
+    row: u8,
+    style: *const TextStyle,
+    width: u8,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    if readout.is_null() {
+        return null(1);
+    }
+    // SAFETY: not null, and the caller's promise about the pointers.
+    unsafe {
+        fill(style, [3, 5, 7], text, capacity, length, |style, out| {
+            let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
+            let row = camera_row(&*readout, row);
+            row.value.without_unit().write(style, width, out)
+        })
+    }
+}
+
+/// Writes the unit of a value of the camera pages and gives its length in bytes, which may be 0.
+///
+/// It belongs to the number that fieldstop_text_camera_number writes.
+/// Ranges: row one of FIELDSTOP_CAMERA_ROW_...
+/// Statuses: null pointer, out of range (row), no room.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_camera_unit(
+    readout: *const CameraReadout,
+    row: u8,
+    style: *const TextStyle,
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+) -> fieldstop_status {
+    if readout.is_null() {
+        return null(1);
+    }
+    // SAFETY: not null, and the caller's promise about the pointers.
+    unsafe {
+        fill(style, [3, 4, 6], text, capacity, length, |style, out| {
+            let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
+            put(style.unit(camera_row(&*readout, row).value.unit()), out)
+        })
+    }
+}
+
+/// Gives the part of a line that is different from what is shown, in characters.
+///
+/// span.count is 0 where nothing is. Where the two have different numbers of characters it reaches to the end of the line.
+/// Ranges: lengths in bytes.
+/// Statuses: null pointer.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_text_changed(
+    shown: *const c_char,
+    shown_length: u16,
+    line: *const c_char,
+    line_length: u16,
+    style: *const TextStyle,
+    span: *mut Span,
+) -> fieldstop_status {
+    if shown.is_null() {
+        return null(1);
+    }
+    if line.is_null() {
+        return null(3);
+    }
+    if style.is_null() {
+        return null(5);
+    }
+    if span.is_null() {
+        return null(6);
+    }
+    // SAFETY: none is null; the caller promises texts of these lengths, a style and a place for the span.
+    unsafe {
+        let shown = slice::from_raw_parts(shown.cast(), shown_length.into());
+        let line = slice::from_raw_parts(line.cast(), line_length.into());
+        span.write(changed(shown, line, &*style));
+    }
+    0
+}
+
+/// The labels of a readout, each with a zero byte at its end.
+#[repr(transparent)]
+struct Labels<const N: usize>([*const c_char; N]);
+
+// SAFETY: the pointers go to constants.
+unsafe impl<const N: usize> Sync for Labels<N> {}
+
+impl<const N: usize> Labels<N> {
+    const fn new(texts: [&CStr; N]) -> Labels<N> {
+        let mut labels = [c"".as_ptr(); N];
+        let mut at = 0;
+        while at < N {
+            labels[at] = texts[at].as_ptr();
+            at += 1;
+        }
+        Labels(labels)
+    }
+}
+
+/// The bytes of a label up to its zero byte; none for a null pointer.
+#[derive(Clone)]
+struct Label(*const c_char);
+
+impl Iterator for Label {
+    type Item = u8;
+
+    fn next(&mut self) -> Option<u8> {
+        if self.0.is_null() {
+            return None;
+        }
+        // SAFETY: the caller promises a zero byte at the end, and it is not passed.
+        let byte = unsafe { *self.0 } as u8;
+        if byte == 0 {
+            return None;
+        }
+        self.0 = self.0.wrapping_add(1);
+        Some(byte)
+    }
+}
+
+const fn null(position: u8) -> fieldstop_status {
+    Error::new(Cause::NullPointer, position).status()
+}
+
+/// Copies a text into `out` and tells its length.
+fn put(text: &[u8], out: &mut [u8]) -> Result<usize, Error> {
+    let out = out.get_mut(..text.len()).ok_or(Error::new(Cause::NoRoom, 0))?;
+    for (place, byte) in out.iter_mut().zip(text) {
+        *place = *byte;
+    }
+    Ok(text.len())
+}
+
+/// The end of the functions that write one value: width, text, capacity and length follow the style.
 ///
 /// # Safety
 /// Each pointer is null or as its function promises.
@@ -325,23 +779,41 @@ unsafe fn write(
     capacity: u16,
     length: *mut u16,
 ) -> fieldstop_status {
-    let null = if style.is_null() {
-        0
-    } else if text.is_null() {
-        2
-    } else if length.is_null() {
-        4
-    } else {
-        // SAFETY: none is null; the caller promises a style, `capacity` bytes and a place for the length.
-        let (style, text) = unsafe { (&*style, slice::from_raw_parts_mut(text.cast(), capacity.into())) };
-        return match value.write(style, width, text) {
-            Ok(bytes) => {
-                // SAFETY: not null, and the caller's promise.
-                unsafe { length.write(bytes as u16) };
-                0
-            }
-            Err(error) => error.status(),
-        };
-    };
-    Error::new(Cause::NullPointer, style_position + null).status()
+    let positions = [style_position, style_position + 2, style_position + 4];
+    // SAFETY: the caller's promise about the pointers.
+    unsafe { fill(style, positions, text, capacity, length, |style, out| value.write(style, width, out)) }
+}
+
+/// Checks the pointers, has the text written and gives its length.
+///
+/// # Safety
+/// Each pointer is null or goes to a style, to `capacity` bytes, to a place for the length.
+#[inline(always)]
+unsafe fn fill(
+    style: *const TextStyle,
+    [style_position, text_position, length_position]: [u8; 3],
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+    write: impl FnOnce(&TextStyle, &mut [u8]) -> Result<usize, Error>,
+) -> fieldstop_status {
+    if style.is_null() {
+        return null(style_position);
+    }
+    if text.is_null() {
+        return null(text_position);
+    }
+    if length.is_null() {
+        return null(length_position);
+    }
+    // SAFETY: none is null, and the caller's promise.
+    let (style, out) = unsafe { (&*style, slice::from_raw_parts_mut(text.cast(), capacity.into())) };
+    match write(style, out) {
+        Ok(bytes) => {
+            // SAFETY: not null, and the caller's promise.
+            unsafe { length.write(bytes as u16) };
+            0
+        }
+        Err(error) => error.status(),
+    }
 }
