@@ -31,6 +31,7 @@ mod math;
 pub mod optics;
 pub mod setup;
 pub mod status;
+pub mod text;
 pub mod units;
 
 #[cfg(feature = "float")]

@@ -6,6 +6,7 @@
 
 pub mod field;
 pub mod status;
+pub mod text;
 
 use crate::status::{Cause, Error};
 
