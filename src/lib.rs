@@ -7,6 +7,7 @@
 //! | `capi` | the C interface (feature `capi`) |
 //! | [`setup`] | telescope, eyepiece, camera, observer: all readouts of one screen |
 //! | [`optics`] | the formulas |
+//! | [`convert`] | conversions between the fixed units |
 //! | `math` | integer and float kernels |
 //! | [`units`] | the quantities of the fixed forms |
 //! | [`status`] | what can go wrong |
@@ -34,6 +35,7 @@ pub mod status;
 pub mod text;
 pub mod units;
 
+pub use math::convert;
 #[cfg(feature = "float")]
 pub use math::float::Real;
 pub use status::{Cause, Error};

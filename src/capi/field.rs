@@ -28,7 +28,7 @@ pub unsafe extern "C" fn fieldstop_focal_ratio_fx(
 /// Gives the focal ratio (the N of f/N), a plain number.
 ///
 /// N = f / D.
-/// Ranges: focal_length_mm 2^-40 to 2^40; aperture_mm 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -46,7 +46,7 @@ pub unsafe extern "C" fn fieldstop_focal_ratio_f32(
 /// Gives the focal ratio (the N of f/N), a plain number.
 ///
 /// N = f / D.
-/// Ranges: focal_length_mm 2^-40 to 2^40; aperture_mm 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -85,7 +85,7 @@ pub unsafe extern "C" fn fieldstop_amplified_focal_length_fx(
 /// Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
 ///
 /// f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
-/// Ranges: focal_length_mm 2^-40 to 2^40; amplification 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -103,7 +103,7 @@ pub unsafe extern "C" fn fieldstop_amplified_focal_length_f32(
 /// Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
 ///
 /// f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
-/// Ranges: focal_length_mm 2^-40 to 2^40; amplification 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -145,7 +145,7 @@ pub unsafe extern "C" fn fieldstop_amplification_fx(
 /// Gives how much a lens before the focus lengthens the focal length, a plain number.
 ///
 /// k = 1 - s' / f, a thin lens of focal length f with the image s' behind it.
-/// Ranges: element_focal_length_mm 2^-40 to 2^40, or -2^40 to -2^-40; image_distance_mm 0 to 2^40, and under
+/// Ranges: element_focal_length_mm 2^-32 to 2^32, or -2^32 to -2^-32; image_distance_mm 0 to 2^32, and under
 /// f where f is positive.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
@@ -164,7 +164,7 @@ pub unsafe extern "C" fn fieldstop_amplification_f32(
 /// Gives how much a lens before the focus lengthens the focal length, a plain number.
 ///
 /// k = 1 - s' / f, a thin lens of focal length f with the image s' behind it.
-/// Ranges: element_focal_length_mm 2^-40 to 2^40, or -2^40 to -2^-40; image_distance_mm 0 to 2^40, and under
+/// Ranges: element_focal_length_mm 2^-32 to 2^32, or -2^32 to -2^-32; image_distance_mm 0 to 2^32, and under
 /// f where f is positive.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
@@ -204,7 +204,7 @@ pub unsafe extern "C" fn fieldstop_magnification_fx(
 /// Gives the magnification of a telescope with an eyepiece, a plain number.
 ///
 /// M = f / fe.
-/// Ranges: focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -222,7 +222,7 @@ pub unsafe extern "C" fn fieldstop_magnification_f32(
 /// Gives the magnification of a telescope with an eyepiece, a plain number.
 ///
 /// M = f / fe.
-/// Ranges: focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -266,7 +266,7 @@ pub unsafe extern "C" fn fieldstop_exit_pupil_fx(
 /// Gives the diameter of the beam that leaves the eyepiece, in mm.
 ///
 /// D fe / f.
-/// Ranges: aperture_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+/// Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -285,7 +285,7 @@ pub unsafe extern "C" fn fieldstop_exit_pupil_f32(
 /// Gives the diameter of the beam that leaves the eyepiece, in mm.
 ///
 /// D fe / f.
-/// Ranges: aperture_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+/// Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -330,7 +330,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_exit_pupil_fx(
 /// Gives the eyepiece focal length that gives an exit pupil, in mm.
 ///
 /// p f / D.
-/// Ranges: exit_pupil_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; aperture_mm 2^-40 to 2^40.
+/// Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -351,7 +351,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_exit_pupil_f32(
 /// Gives the eyepiece focal length that gives an exit pupil, in mm.
 ///
 /// p f / D.
-/// Ranges: exit_pupil_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; aperture_mm 2^-40 to 2^40.
+/// Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -393,7 +393,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_magnification_fx(
 /// Gives the eyepiece focal length that gives a magnification, in mm.
 ///
 /// f / M.
-/// Ranges: focal_length_mm 2^-40 to 2^40; magnification 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -411,7 +411,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_magnification_f32(
 /// Gives the eyepiece focal length that gives a magnification, in mm.
 ///
 /// f / M.
-/// Ranges: focal_length_mm 2^-40 to 2^40; magnification 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -450,7 +450,7 @@ pub unsafe extern "C" fn fieldstop_true_field_from_stop_fx(
 /// Gives the angle of sky inside the eyepiece's field stop, in arcsec.
 ///
 /// 2 atan(s / 2f).
-/// Ranges: field_stop_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40.
+/// Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -468,7 +468,7 @@ pub unsafe extern "C" fn fieldstop_true_field_from_stop_f32(
 /// Gives the angle of sky inside the eyepiece's field stop, in arcsec.
 ///
 /// 2 atan(s / 2f).
-/// Ranges: field_stop_mm 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40.
+/// Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -513,8 +513,8 @@ pub unsafe extern "C" fn fieldstop_true_field_rectilinear_fx(
 /// Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
 ///
 /// 2 atan(tan(A/2) fe / f).
-/// Ranges: apparent_field_arcsec 2^-40 to under 648000; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to
-/// 2^40.
+/// Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
+/// 2^32.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -537,8 +537,8 @@ pub unsafe extern "C" fn fieldstop_true_field_rectilinear_f32(
 /// Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
 ///
 /// 2 atan(tan(A/2) fe / f).
-/// Ranges: apparent_field_arcsec 2^-40 to under 648000; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to
-/// 2^40.
+/// Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
+/// 2^32.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -587,7 +587,7 @@ pub unsafe extern "C" fn fieldstop_true_field_equidistant_fx(
 /// Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
 ///
 /// A fe / f.
-/// Ranges: apparent_field_arcsec 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+/// Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -610,7 +610,7 @@ pub unsafe extern "C" fn fieldstop_true_field_equidistant_f32(
 /// Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
 ///
 /// A fe / f.
-/// Ranges: apparent_field_arcsec 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40; eyepiece_mm 2^-40 to 2^40.
+/// Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -655,7 +655,7 @@ pub unsafe extern "C" fn fieldstop_frame_field_fx(
 /// Gives the angle of sky along one side of a sensor, in arcsec.
 ///
 /// 2 atan(p n / 2f).
-/// Ranges: pixel_um 2^-40 to 2^40; pixel_count not 0, an integer; focal_length_mm 2^-40 to 2^40.
+/// Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -674,7 +674,7 @@ pub unsafe extern "C" fn fieldstop_frame_field_f32(
 /// Gives the angle of sky along one side of a sensor, in arcsec.
 ///
 /// 2 atan(p n / 2f).
-/// Ranges: pixel_um 2^-40 to 2^40; pixel_count not 0, an integer; focal_length_mm 2^-40 to 2^40.
+/// Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -709,7 +709,7 @@ pub unsafe extern "C" fn fieldstop_plate_scale_fx(
 /// Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
 ///
 /// (1 rad) / f.
-/// Ranges: focal_length_mm 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -726,7 +726,7 @@ pub unsafe extern "C" fn fieldstop_plate_scale_f32(
 /// Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
 ///
 /// (1 rad) / f.
-/// Ranges: focal_length_mm 2^-40 to 2^40.
+/// Ranges: focal_length_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -762,7 +762,7 @@ pub unsafe extern "C" fn fieldstop_pixel_scale_fx(
 /// Gives the angle of sky to a pixel, in arcsec.
 ///
 /// (1 rad) p / f.
-/// Ranges: pixel_um 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40.
+/// Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -780,7 +780,7 @@ pub unsafe extern "C" fn fieldstop_pixel_scale_f32(
 /// Gives the angle of sky to a pixel, in arcsec.
 ///
 /// (1 rad) p / f.
-/// Ranges: pixel_um 2^-40 to 2^40; focal_length_mm 2^-40 to 2^40.
+/// Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -819,7 +819,7 @@ pub unsafe extern "C" fn fieldstop_focal_length_for_field_fx(
 /// Gives the focal length that spreads a field over a width at the focus, in mm.
 ///
 /// x / (2 tan(t/2)).
-/// Ranges: extent_mm 2^-40 to 2^40; field_arcsec 2^-40 to under 648000.
+/// Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -837,7 +837,7 @@ pub unsafe extern "C" fn fieldstop_focal_length_for_field_f32(
 /// Gives the focal length that spreads a field over a width at the focus, in mm.
 ///
 /// x / (2 tan(t/2)).
-/// Ranges: extent_mm 2^-40 to 2^40; field_arcsec 2^-40 to under 648000.
+/// Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -881,7 +881,7 @@ pub unsafe extern "C" fn fieldstop_tiles_fx(
 /// Gives how many frames in a row cover a target.
 ///
 /// the smallest n with n frame - (n - 1) overlap >= target, at least 1.
-/// Ranges: target_arcsec 2^-40 to 2^40; frame_arcsec 2^-40 to 2^40; overlap_arcsec 0 to under the frame.
+/// Ranges: target_arcsec 2^-32 to 2^32; frame_arcsec 2^-32 to 2^32; overlap_arcsec 0 to under the frame.
 /// Error: at most 0, it is exact.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
@@ -900,7 +900,7 @@ pub unsafe extern "C" fn fieldstop_tiles_f32(
 /// Gives how many frames in a row cover a target.
 ///
 /// the smallest n with n frame - (n - 1) overlap >= target, at least 1.
-/// Ranges: target_arcsec 2^-40 to 2^40; frame_arcsec 2^-40 to 2^40; overlap_arcsec 0 to under the frame.
+/// Ranges: target_arcsec 2^-32 to 2^32; frame_arcsec 2^-32 to 2^32; overlap_arcsec 0 to under the frame.
 /// Error: at most 0, it is exact.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]

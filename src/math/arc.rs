@@ -7,7 +7,7 @@ use super::multiply::{high, wide};
 const HALF_TURN_MAS: u32 = 648_000_000;
 
 /// For each of 16 intervals of the ratio, twice the arc tangent in eighths of a milliarcsecond as a polynomial in the
-/// distance from the middle, one interval long: c0, 2^4 c1, -2^8 c2, and c3 / 8 (18 bits) with c4 / 8 (14 bits).
+/// distance from the middle, counted in intervals: c0, 2^4 c1, -2^8 c2, and c3 / 8 (18 bits) with c4 / 8 (14 bits).
 static ARC: [[u32; 4]; 16] = [
     [103098851, 3297016963, 102931237, 3748544708],
     [308495522, 3271483454, 304029371, 3773661748],
@@ -33,18 +33,23 @@ const fn high_signed(a: i32, b: u32) -> i32 {
     high(a as u32, b).wrapping_sub((a >> 31) as u32 & b) as i32
 }
 
-/// Twice the arc tangent of `ratio` / 2^32 in milliarcseconds, at most 0.9 from the exact value.
-#[inline(always)]
-const fn twice_arctangent(ratio: u32) -> u32 {
-    let [c0, c1, c2, c34] = ARC[(ratio >> 28) as usize];
-    let u = ((ratio << 4) ^ (1 << 31)) as i32;
+/// The value of a table's row at `u` / 2^32 from its middle.
+#[inline(never)]
+const fn quartic(row: &[u32; 4], u: i32) -> u32 {
+    let [c0, c1, c2, c34] = *row;
     // Sixteen bits of u do for the two small terms; the half of the last one is kept by t / 2.
     let w = u >> 16;
     let (c3, c4) = ((c34 as i32) >> 14, ((c34 << 18) as i32) >> 18);
     let t = c3 + ((c4 * w) >> 16);
     let t = c2.wrapping_sub(((t * w + (t >> 1)) >> 5) as u32);
     let t = c1.wrapping_sub((high_signed(u, t) >> 4) as u32);
-    let eighths = c0.wrapping_add(((high_signed(u, t) + 8) >> 4) as u32);
+    c0.wrapping_add(((high_signed(u, t) + 8) >> 4) as u32)
+}
+
+/// Twice the arc tangent of `ratio` / 2^32 in milliarcseconds, at most 0.9 from the exact value.
+#[inline(always)]
+const fn twice_arctangent(ratio: u32) -> u32 {
+    let eighths = quartic(&ARC[(ratio >> 28) as usize], ((ratio << 4) ^ (1 << 31)) as i32);
     (eighths + 4) >> 3
 }
 
@@ -72,9 +77,29 @@ const fn leading(x: u64) -> (u32, i32) {
     }
 }
 
+/// 2 atan(a b / (c d)) in milliarcseconds, at most 1 from the exact value. None is 0.
+#[inline(never)]
+pub(crate) const fn angle_of_products(a: u32, b: u32, c: u32, d: u32) -> u32 {
+    let (above, (c1, c_shift), (d1, d_shift)) = (wide(a, b), normalise(c), normalise(d));
+    let below = high(c1, d1);
+    // The usual telescope: a ratio under 1, and nothing lost above when it is shifted up.
+    let (upper, lower, shift) = match c_shift + d_shift {
+        shift if shift < 32 => ((above >> 32) as u32, above as u32, shift),
+        shift if above >> 32 == 0 => (above as u32, 0, shift - 32),
+        _ => (u32::MAX, 0, 31),
+    };
+    if (upper >> 1) >> (31 - shift) == 0 {
+        let shifted = shift_up((upper as u64) << 32 | lower as u64, shift);
+        if ((shifted >> 32) as u32) < below {
+            return twice_arctangent(divide(shifted, below).0);
+        }
+    }
+    angle_of_ratio(above, wide(c, d))
+}
+
 /// 2 atan(n / d) in milliarcseconds, at most 1 from the exact value. Neither is 0.
 #[inline(never)]
-pub(crate) const fn angle_of_ratio(n: u64, d: u64) -> u32 {
+const fn angle_of_ratio(n: u64, d: u64) -> u32 {
     let ((n, n_below), (d, d_below)) = (leading(n), leading(d));
     let down = d_below - n_below;
     // n / d as they stand here is from 1/2 to 2, to be shifted down by `down`.
@@ -115,15 +140,25 @@ const fn squared(t_mas: u32) -> u64 {
     wide(13 * t_mas, 13 * t_mas)
 }
 
-/// The side that goes with 8 t in tan(t / 2) = 8 t / adjacent, 16 R (a cot a) for a = t / 2: at most 3 from the exact
-/// value. `t_mas` is at most 90 degrees.
+/// For each of 8 intervals of 90 degrees - t, the side that goes with 8 t in tan(t / 2) = 8 t / adjacent, which is
+/// 16 R (a cot a) for a = t / 2; stored as `ARC` is.
+static ADJACENT: [[u32; 4]; 8] = [
+    [2681091841, 2743990495, 3387379563, 545503570],
+    [2839612282, 2332506141, 3202821257, 442153553],
+    [2973087384, 1941793214, 3054120601, 353483540],
+    [3082681997, 1567684210, 2936462453, 275970984],
+    [3169317684, 1206536943, 2846212237, 206797844],
+    [3233701265, 855101992, 2780688600, 143670369],
+    [3276345869, 510414151, 2738003478, 84638865],
+    [3297585755, 169700519, 2716953677, 27966633],
+];
+
+/// The side that goes with 8 t: from 2^31 to 2^32, at most 3 from the exact value. `t_mas` is at most 90 degrees.
 #[inline(always)]
 pub(crate) const fn adjacent(t_mas: u32) -> u32 {
-    const AT_ZERO: u32 = 3_300_236_900; // 16 R
-    const THIRD: u32 = 1_431_655_765; // 2^32 / 3
-    let square = high((squared(t_mas) >> 32) as u32, (SQUARE >> 32) as u32);
-    let missing = high(square, THIRD + (high(square, cotangent_tail(square)) >> 5));
-    AT_ZERO - high(AT_ZERO, missing)
+    // 2^63 / (13 times 90 degrees), cut, so that the place is below 2^31.
+    let place = high(13 * (HALF_TURN_MAS / 2 - t_mas), 2189784434);
+    quartic(&ADJACENT[(place >> 28 & 7) as usize], ((place << 4) ^ (1 << 31)) as i32)
 }
 
 /// The upper 64 bits of the product, at most 2 too low.
@@ -135,7 +170,7 @@ const fn high_64(a: u64, b: u64) -> u64 {
 }
 
 /// R (a cot a) for a = t / 2 in steps of 2^-32 of a milliarcsecond, so that tan(t / 2) = t / 2 adjacent; within
-/// 3 parts in 10^11. `t_mas` is at most 90 degrees.
+/// 4 parts in 10^11. `t_mas` is at most 90 degrees.
 #[inline(never)]
 pub(crate) const fn adjacent_fine(t_mas: u32) -> u64 {
     const AT_ZERO: u64 = 885_900_597_147_055_340; // R
@@ -179,8 +214,20 @@ mod tests {
 
     #[test]
     fn arc_table_is_the_interpolation() {
-        for (i, row) in ARC.iter().enumerate() {
-            let c = interpolate(4, |u| 16.0 * R * ((i as f64 + 0.5 + u) / 16.0).atan());
+        compare_table(&ARC, |place| 16.0 * R * place.atan());
+    }
+
+    #[test]
+    fn adjacent_table_is_the_interpolation() {
+        compare_table(&ADJACENT, |place| {
+            let a = PI / 4.0 * (1.0 - place);
+            16.0 * R * a / a.tan()
+        });
+    }
+
+    fn compare_table(table: &[[u32; 4]], f: impl Fn(f64) -> f64) {
+        for (i, row) in table.iter().enumerate() {
+            let c = interpolate(4, |u| f((i as f64 + 0.5 + u) / table.len() as f64));
             let [c0, c1, c2, c34] = *row;
             let got = [
                 c0 as f64,
@@ -259,7 +306,7 @@ mod tests {
             let exact = t as f64 / (2.0 * a.tan());
             let fine = adjacent_fine(t) as f64 / 2f64.powi(32);
             assert!((adjacent(t) as f64 - 16.0 * exact).abs() < 3.0, "{t}");
-            assert!((fine / exact - 1.0).abs() < 3e-11, "{t}: {}", fine / exact - 1.0);
+            assert!((fine / exact - 1.0).abs() < 4e-11, "{t}: {}", fine / exact - 1.0);
         }
     }
 }

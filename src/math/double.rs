@@ -1,7 +1,7 @@
 //! Numbers of twice the digits: an unevaluated sum of two floats (Dekker, Numerische Mathematik 18, 1971).
 
 use super::float::Real;
-use core::ops::{Mul, Sub};
+use core::ops::{Div, Mul, Sub};
 
 #[derive(Clone, Copy)]
 pub(crate) struct Double<F> {
@@ -10,6 +10,12 @@ pub(crate) struct Double<F> {
 }
 
 impl<F: Real> Double<F> {
+    /// A constant.
+    pub fn of(value: f64) -> Double<F> {
+        let upper = F::of(value);
+        Double { upper, lower: F::of_difference(value, upper) }
+    }
+
     /// a + b, exactly.
     pub fn sum(a: F, b: F) -> Double<F> {
         let upper = a + b;
@@ -46,5 +52,20 @@ impl<F: Real> Sub for Double<F> {
     fn sub(self, other: Double<F>) -> Double<F> {
         let Double { upper, lower } = Double::sum(self.upper, -other.upper);
         Double::sum(upper, lower + (self.lower - other.lower))
+    }
+}
+
+impl<F: Real> Div for Double<F> {
+    type Output = Double<F>;
+    fn div(self, d: Double<F>) -> Double<F> {
+        let quotient = self.upper / d.upper;
+        let rest = self - d * quotient;
+        Double::sum(quotient, rest.upper / d.upper)
+    }
+}
+
+impl<F: Real> From<F> for Double<F> {
+    fn from(x: F) -> Double<F> {
+        Double { upper: x, lower: F::of(0.0) }
     }
 }

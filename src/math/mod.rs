@@ -4,6 +4,7 @@
 //! zeros. Each kernel states its error; `tests/kernels.rs` finds the worst one.
 
 pub(crate) mod arc;
+pub mod convert;
 pub(crate) mod divide;
 #[cfg(feature = "float")]
 pub(crate) mod double;

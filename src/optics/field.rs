@@ -29,16 +29,26 @@ const HALF_TURN_ARCSEC: f64 = 648_000.0;
 #[cfg(feature = "float")]
 const RADIAN_ARCSEC: f64 = 206_264.806_247_096_36;
 
-/// tan(angle / 2), for an angle up to 90 degrees.
+/// A thousandth of a radian in arcseconds, and what the last digit of that leaves out.
 #[cfg(feature = "float")]
-fn half_tangent<F: Real>(angle_arcsec: F) -> F {
-    (angle_arcsec * F::of(0.5 / RADIAN_ARCSEC)).tan()
+const RADIAN_ARCSEC_PER_THOUSAND: (f64, f64) = (206.264_806_247_096_35, 9.896_767_216_834_942e-15);
+
+/// tan(angle / 2) in twice the digits but for the error of `tan` itself, for an angle up to 90 degrees.
+#[cfg(feature = "float")]
+fn half_tangent<F: Real>(angle_arcsec: F) -> Double<F> {
+    const TO_HALF: f64 = 0.5 / RADIAN_ARCSEC;
+    let half = Double::of(TO_HALF) * angle_arcsec;
+    let tangent = half.upper.tan();
+    Double::sum(tangent, half.lower * (F::of(1.0) + tangent * tangent))
 }
 
 /// 2 atan(tangent) in arcseconds.
 #[cfg(feature = "float")]
-fn angle_of_tangent<F: Real>(tangent: F) -> F {
-    F::of(2.0 * RADIAN_ARCSEC) * tangent.atan()
+fn angle_of_tangent<F: Real>(tangent: Double<F>) -> F {
+    let x = tangent.upper;
+    let (angle, more) = (x.atan(), tangent.lower / (F::of(1.0) + x * x));
+    let Double { upper, lower } = Double::of(2.0 * RADIAN_ARCSEC) * angle;
+    upper + (lower + F::of(2.0 * RADIAN_ARCSEC) * more)
 }
 
 /// The focal ratio (the N of f/N).
@@ -286,7 +296,7 @@ pub fn true_field_from_stop_fx(
 pub fn true_field_from_stop<F: Real>(field_stop_mm: F, focal_length_mm: F) -> Result<F, Error> {
     positive(field_stop_mm, 1)?;
     positive(focal_length_mm, 2)?;
-    Ok(angle_of_tangent(field_stop_mm / (F::of(2.0) * focal_length_mm)))
+    Ok(F::of(2.0 * RADIAN_ARCSEC) * (field_stop_mm / (F::of(2.0) * focal_length_mm)).atan())
 }
 
 /// The angle of sky in an eyepiece that keeps straight lines straight.
@@ -311,13 +321,14 @@ pub fn true_field_rectilinear_fx(
     present(focal_length.0, 2)?;
     present(eyepiece.0, 3)?;
     // tan(A / 2) = 8 A / adjacent up to 90 degrees; above, the reciprocal of that of the rest to 180 degrees.
-    let (n, d) = if apparent_field.0 <= HALF_TURN_MAS / 2 {
-        (wide(eyepiece.0, 8 * apparent_field.0), wide(focal_length.0, arc::adjacent(apparent_field.0)))
+    let rest = HALF_TURN_MAS - apparent_field.0;
+    let angle = if apparent_field.0 <= rest {
+        let adjacent = arc::adjacent(apparent_field.0);
+        arc::angle_of_products(eyepiece.0, 8 * apparent_field.0, focal_length.0, adjacent)
     } else {
-        let rest = HALF_TURN_MAS - apparent_field.0;
-        (wide(eyepiece.0, arc::adjacent(rest)), wide(focal_length.0, 8 * rest))
+        arc::angle_of_products(eyepiece.0, arc::adjacent(rest), focal_length.0, 8 * rest)
     };
-    Ok(Milliarcseconds(arc::angle_of_ratio(n, d)))
+    Ok(Milliarcseconds(angle))
 }
 
 /// Float form of [`true_field_rectilinear_fx`].
@@ -335,9 +346,9 @@ pub fn true_field_rectilinear<F: Real>(
     positive(eyepiece_mm, 3)?;
     let rest = F::of(HALF_TURN_ARCSEC) - apparent_field_arcsec;
     Ok(angle_of_tangent(if apparent_field_arcsec <= rest {
-        half_tangent(apparent_field_arcsec) * eyepiece_mm / focal_length_mm
+        half_tangent(apparent_field_arcsec) * eyepiece_mm / Double::from(focal_length_mm)
     } else {
-        eyepiece_mm / (focal_length_mm * half_tangent(rest))
+        Double::from(eyepiece_mm) / (half_tangent(rest) * focal_length_mm)
     }))
 }
 
@@ -397,7 +408,7 @@ pub fn frame_field_fx(
     present(pixel.0, 1)?;
     present(pixel_count, 2)?;
     present(focal_length.0, 3)?;
-    Ok(Milliarcseconds(arc::angle_of_ratio(wide(pixel.0, pixel_count), wide(focal_length.0, 2000))))
+    Ok(Milliarcseconds(arc::angle_of_products(pixel.0, pixel_count, focal_length.0, 2000)))
 }
 
 /// Float form of [`frame_field_fx`].
@@ -406,7 +417,9 @@ pub fn frame_field<F: Real>(pixel_um: F, pixel_count: u32, focal_length_mm: F) -
     positive(pixel_um, 1)?;
     present(pixel_count, 2)?;
     positive(focal_length_mm, 3)?;
-    Ok(angle_of_tangent(pixel_um * F::of(pixel_count as f64) / (F::of(2000.0) * focal_length_mm)))
+    Ok(angle_of_tangent(
+        Double::product(pixel_um, F::of_count(pixel_count)) / Double::product(focal_length_mm, F::of(2000.0)),
+    ))
 }
 
 /// The angle of sky to a millimetre at the focus.
@@ -453,7 +466,7 @@ pub fn pixel_scale_fx(pixel: Nanometres, focal_length: Micrometres) -> Result<Mi
 pub fn pixel_scale<F: Real>(pixel_um: F, focal_length_mm: F) -> Result<F, Error> {
     positive(pixel_um, 1)?;
     positive(focal_length_mm, 2)?;
-    Ok(F::of(RADIAN_ARCSEC / 1000.0) * pixel_um / focal_length_mm)
+    Ok(pixel_um.times(RADIAN_ARCSEC_PER_THOUSAND) / focal_length_mm)
 }
 
 /// The focal length that spreads a field over a width at the focus.
@@ -493,9 +506,9 @@ pub fn focal_length_for_field<F: Real>(extent_mm: F, field_arcsec: F) -> Result<
     let rest = F::of(HALF_TURN_ARCSEC) - field_arcsec;
     Ok(F::of(0.5)
         * if field_arcsec <= rest {
-            extent_mm / half_tangent(field_arcsec)
+            extent_mm / half_tangent(field_arcsec).upper
         } else {
-            extent_mm * half_tangent(rest)
+            extent_mm * half_tangent(rest).upper
         })
 }
 
