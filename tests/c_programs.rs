@@ -5,11 +5,13 @@
 //! must give nothing but success, but for those named in `NOT_PROGRAMS`.
 #![cfg(unix)]
 
+mod support;
+
 use std::fs;
-use std::io::Write;
 use std::path::{Path, PathBuf};
 use std::process::Command;
 use std::sync::OnceLock;
+use support::skipped;
 
 const WARNINGS: [&str; 6] =
     ["-Wall", "-Wextra", "-Wpedantic", "-Wconversion", "-Wsign-conversion", "-Werror"];
@@ -32,8 +34,7 @@ fn libraries() -> Option<&'static Path> {
     FOLDER
         .get_or_init(|| {
             if Command::new("cc").arg("--version").output().is_err() {
-                // Past the test harness, which keeps back what is printed.
-                writeln!(std::io::stderr(), "skipped: the C programs, which need a C compiler `cc`").unwrap();
+                skipped("the C programs, which need a C compiler `cc`");
                 return None;
             }
             let target = scratch().join("target");
@@ -69,8 +70,7 @@ fn speaks(language: &str, standard: &str) -> bool {
     compiler.arg("-c").arg(&source).arg("-o").arg(scratch().join(format!("empty-{standard}.o")));
     let speaks = compiler.output().unwrap().status.success();
     if !speaks {
-        writeln!(std::io::stderr(), "skipped: the C programs as {standard}, which `cc` does not know")
-            .unwrap();
+        skipped(&format!("the C programs as {standard}, which `cc` does not know"));
     }
     speaks
 }

@@ -3,9 +3,10 @@
 //! The last needs cbindgen: `cargo test --features header --test header`. To renew the header:
 //! `FIELDSTOP_RENEW=1 cargo test --features header --test header`.
 
+mod support;
+
 use std::collections::{BTreeMap, BTreeSet};
 use std::fs;
-use std::io::Write;
 use std::path::PathBuf;
 use std::sync::OnceLock;
 
@@ -205,9 +206,7 @@ fn version_is_that_of_the_crate() {
 #[test]
 fn committed_header_is_what_the_build_script_makes() {
     let Some(made) = MADE else {
-        let line = "skipped: the header line by line, which needs cbindgen: cargo test --features header --test header";
-        // Past the test harness, which keeps back what is printed.
-        writeln!(std::io::stderr(), "{line}").unwrap();
+        support::skipped("the header line by line: cargo test --features header --test header");
         return;
     };
     let committed = header();

@@ -28,7 +28,7 @@
  * stay in nanometres), arcseconds for _mas and _uas, plain numbers for _q16, magnitudes for _mmag.
  *
  * Ranges. A fixed argument may be anything that its type holds, but for what the function's comment
- * says. A float argument is finite and at most 2^40 in magnitude, and at least 2^-40 where zero is
+ * says. A float argument is finite and at most 2^32 in magnitude, and at least 2^-32 where zero is
  * refused, but for what the comment says.
  *
  * Errors. A fixed argument is read as exact and the result is the exact value of the formula, rounded

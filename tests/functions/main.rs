@@ -7,5 +7,6 @@ mod coverage;
 mod documented;
 mod edges;
 mod oracle;
+mod properties;
 mod registry;
 mod twin;
