@@ -7,6 +7,7 @@
 pub mod field;
 pub mod light;
 pub mod resolution;
+pub mod setup;
 pub mod status;
 pub mod text;
 pub mod units;

@@ -10,8 +10,8 @@ pub struct Camera {
     pub columns: u16,
     /// Member 3. Single pixels across the frame's height; not 0.
     pub rows: u16,
-    /// Member 4. Pixels read out as one, along each side; 1 where they are read singly; not 0, not over the columns or
-    /// the rows.
+    /// Member 4. Pixels read out as one, along each side; 1 where they are read singly; not 0, not over the
+    /// columns or the rows.
     pub binning: u8,
     /// Ignored.
     pub padding: [u8; 3],
@@ -22,8 +22,8 @@ impl Camera {
     ///
     /// # Errors
     ///
-    /// [`Cause::Zero`]: pixel pitch (1), columns (2), rows (3), binning (4). [`Cause::OutOfRange`]: a binning (4) over the
-    /// columns or the rows.
+    /// [`Cause::Zero`]: pixel pitch (1), columns (2), rows (3), binning (4). [`Cause::OutOfRange`]: a binning
+    /// (4) over the columns or the rows.
     pub const fn check(&self) -> Result<(), Error> {
         if self.pixel_nm == 0 {
             return Err(Error::new(Cause::Zero, 1));
