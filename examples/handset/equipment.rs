@@ -21,8 +21,8 @@ pub struct Equipment {
     pub camera: Named<Camera>,
 }
 
-/// A field of the file for each member of a library struct, in the order in which the library counts them, and what its
-/// check asks of it.
+/// A field of the file for each member of a library struct, in the order in which the library counts them, and
+/// what its check asks of it.
 type Members = [(&'static str, &'static str)];
 
 const TELESCOPE: &Members = &[

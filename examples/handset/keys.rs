@@ -6,6 +6,8 @@ pub enum Key {
     Telescope(Step),
     Eyepiece(Step),
     Page(Step),
+    /// No key: the window changed.
+    Redraw,
     Quit,
 }
 
@@ -28,10 +30,11 @@ impl Step {
 pub const HELP: &str = "t telescope   e eyepiece   p page   (capital letters: back)   q quit";
 
 pub fn key(event: &Event) -> Option<Key> {
-    let Event::Key(event) = event else { return None };
-    if event.kind == KeyEventKind::Release {
-        return None;
-    }
+    let event = match event {
+        Event::Key(event) if event.kind != KeyEventKind::Release => event,
+        Event::Resize(..) => return Some(Key::Redraw),
+        _ => return None,
+    };
     match event.code {
         KeyCode::Char('c' | 'd') if event.modifiers.contains(KeyModifiers::CONTROL) => Some(Key::Quit),
         KeyCode::Char('t') => Some(Key::Telescope(Step::Next)),
