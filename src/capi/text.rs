@@ -448,7 +448,7 @@ pub unsafe extern "C" fn fieldstop_text_visual_line(
                 None => Label(c"".as_ptr()),
             };
             let row = row.map(|row| visual_row(&*readout, row));
-            write_line(row.as_ref(), label, style, columns, line, out)
+            write_line(row, label, style, columns, line, out)
         })
     }
 }
@@ -587,7 +587,7 @@ pub unsafe extern "C" fn fieldstop_text_camera_line(
                 None => Label(c"".as_ptr()),
             };
             let row = row.map(|row| camera_row(&*readout, row));
-            write_line(row.as_ref(), label, style, columns, line, out)
+            write_line(row, label, style, columns, line, out)
         })
     }
 }

@@ -2,7 +2,7 @@
 
 use super::style::{TextStyle, begins_character};
 use super::value::Value;
-use super::write::NO_ROOM;
+use super::write::{Layout, write};
 use crate::status::{Cause, Error};
 
 /// A value with its place on a page.
@@ -36,7 +36,7 @@ pub(crate) const fn row_of(line: u8, columns: u8) -> u8 {
 /// label and the mark, or, for an odd `line`, the value. A value longer than its field takes room from the label; one
 /// longer than the line loses its unit; one that is still too long is refused.
 pub(crate) fn write_line(
-    row: Option<&Row>,
+    row: Option<Row>,
     label: impl Iterator<Item = u8> + Clone,
     style: &TextStyle,
     columns: u8,
@@ -46,55 +46,20 @@ pub(crate) fn write_line(
     if columns < NARROWEST {
         return Err(Error::new(Cause::OutOfRange, 4));
     }
-    let narrow = columns < ONE_LINE;
-    let alone = narrow && line % 2 == 1; // the value has the line for itself: no label, no mark
-    let mut room = usize::from(columns) - usize::from(!alone);
-    let mut value = None;
-    if let Some(row) = row.filter(|_| alone || !narrow) {
-        let mut shown = row.value;
-        let mut size = shown.measure(style)?;
-        if size.characters > room {
-            shown = shown.without_unit();
-            size = shown.measure(style)?;
+    let mut layout = Layout { columns, field: 0, mark: b' ', may_lose_unit: true };
+    let mut value = Value::BLANK;
+    if let Some(row) = row {
+        if row.fact {
+            layout.mark = style.fact_mark;
         }
-        let field = if alone { room } else { size.characters.max(row.field.into()) };
-        let blanks = field.checked_sub(size.characters).ok_or(NO_ROOM)?;
-        room = room.checked_sub(field).ok_or(NO_ROOM)?;
-        value = Some((shown, blanks + size.bytes));
-    }
-
-    let (label_bytes, head) = if style.utf8 == 0 { (room, room) } else { cut(label.clone(), room) };
-    let out =
-        out.get_mut(..head + usize::from(!alone) + value.map_or(0, |(_, bytes)| bytes)).ok_or(NO_ROOM)?;
-    let length = out.len();
-    let (head, mut tail) = out.split_at_mut_checked(head).ok_or(NO_ROOM)?;
-    let mut label = label.take(label_bytes);
-    for place in head {
-        *place = label.next().unwrap_or(b' ');
-    }
-    if !alone && let Some(mark) = tail.split_off_first_mut() {
-        *mark = if row.is_some_and(|row| row.fact) { style.fact_mark } else { b' ' };
-    }
-    if let Some((value, _)) = value {
-        value.fill(style, tail);
-    }
-    Ok(length)
-}
-
-/// Bytes of a UTF-8 label as far as it has room, and the bytes that fill this room.
-fn cut(label: impl Iterator<Item = u8>, room: usize) -> (usize, usize) {
-    let mut bytes = 0;
-    let mut left = room;
-    for byte in label {
-        if begins_character(byte) {
-            if left == 0 {
-                break;
-            }
-            left -= 1;
+        if columns >= ONE_LINE {
+            (value, layout.field) = (row.value, row.field);
+        } else if line % 2 == 1 {
+            // The value has the line for itself: no label, no mark.
+            (value, layout.field, layout.mark) = (row.value, columns, 0);
         }
-        bytes += 1;
     }
-    (bytes, bytes + left)
+    write(value, label, layout, style, out)
 }
 
 /// A part of a line, in characters.
@@ -119,14 +84,15 @@ pub fn changed(shown: &[u8], line: &[u8], style: &TextStyle) -> Span {
         start -= 1;
     }
     let (shown_rest, rest) = (shown.get(start..).unwrap_or(&[]), line.get(start..).unwrap_or(&[]));
+    let characters = |text: &[u8]| text.len() - style.continued(text);
     let mut end = rest.len();
-    if style.characters(shown_rest) == style.characters(rest) {
+    if characters(shown_rest) == characters(rest) {
         let alike = shown_rest.iter().rev().zip(rest.iter().rev()).take_while(|(a, b)| a == b).count();
         end = end.saturating_sub(alike);
         while end < rest.len() && !begins(rest, end) {
             end += 1;
         }
     }
-    let count = |text: Option<&[u8]>| style.characters(text.unwrap_or(&[])) as u16;
+    let count = |text: Option<&[u8]>| characters(text.unwrap_or(&[])) as u16;
     Span { first: count(line.get(..start)), count: count(rest.get(..end)) }
 }

@@ -228,7 +228,7 @@ pub fn visual_line(
 ) -> Result<usize, Error> {
     let number = row_of(line, columns);
     let row = VisualRow::from_number(number).map(|row| visual_row(readout, row));
-    write_line(row.as_ref(), label(labels, number), style, columns, line, out)
+    write_line(row, label(labels, number), style, columns, line, out)
 }
 
 /// Writes a line of the camera pages, as [`visual_line`] does.
@@ -246,7 +246,7 @@ pub fn camera_line(
 ) -> Result<usize, Error> {
     let number = row_of(line, columns);
     let row = CameraRow::from_number(number).map(|row| camera_row(readout, row));
-    write_line(row.as_ref(), label(labels, number), style, columns, line, out)
+    write_line(row, label(labels, number), style, columns, line, out)
 }
 
 fn label<'a>(labels: &'a [&str], number: u8) -> impl Iterator<Item = u8> + Clone + use<'a> {

@@ -219,12 +219,12 @@ impl TextStyle {
         &text[..length]
     }
 
-    /// How many characters these bytes are.
-    pub(super) fn characters(&self, text: &[u8]) -> usize {
+    /// How many of these bytes do not begin a character.
+    pub(super) fn continued(&self, text: &[u8]) -> usize {
         if self.utf8 == 0 {
-            return text.len();
+            return 0;
         }
-        text.iter().filter(|&&byte| begins_character(byte)).count()
+        text.iter().filter(|&&byte| !begins_character(byte)).count()
     }
 }
 
