@@ -40,16 +40,80 @@ const NO_ROOM: Error = Error::new(Cause::NoRoom, 0);
 
 /// Writes a label as far as it has room, a mark, and the value.
 pub(crate) fn write(
-    value: Value,
+    mut value: Value,
     label: impl Iterator<Item = u8> + Clone,
     layout: Layout,
     style: &TextStyle,
     out: &mut [u8],
 ) -> Result<usize, Error> {
-    let mut text = style.text(value.text);
-    let mut continued = style.continued(text);
-    let mut characters = text.len();
+    let mut size = measure(value, style)?;
+    let columns = if layout.columns == 0 { usize::from(size.characters) } else { layout.columns.into() };
+    let most = columns - usize::from(layout.mark != 0);
+    if usize::from(size.characters) > most && layout.may_lose_unit {
+        value = value.without_unit();
+        size = measure(value, style)?;
+    }
+    let field = usize::from(size.characters.max(layout.field));
+    let Some(mut head) = most.checked_sub(field) else { return Err(NO_ROOM) };
+    let mut label_bytes = head;
+    if style.utf8 != 0 {
+        let cut = cut(label.clone(), head);
+        label_bytes = cut.bytes;
+        head += cut.continued;
+    }
+    let length = head + (columns - most) + field + usize::from(size.continued);
+    let Some(out) = out.get_mut(..length) else { return Err(NO_ROOM) };
+    let Some((head, mut tail)) = out.split_at_mut_checked(head) else { return Err(NO_ROOM) };
+    put_label(label.take(label_bytes), head);
+    if layout.mark != 0
+        && let Some(mark) = tail.split_off_first_mut()
+    {
+        *mark = layout.mark;
+    }
+    put_value(value, size.digits, style, tail);
+    Ok(length)
+}
+
+/// Writes a label and blanks behind it.
+#[inline(never)]
+fn put_label(mut label: impl Iterator<Item = u8>, out: &mut [u8]) {
+    let mut places = out.iter_mut();
+    while let Some(byte) = label.next()
+        && let Some(place) = places.next()
+    {
+        *place = byte;
+    }
+    blank(places);
+}
+
+fn blank<'a>(places: impl Iterator<Item = &'a mut u8>) {
+    for place in places {
+        *place = b' ';
+        // Keeps this loop from becoming a call of memset, which costs more than so few blanks.
+        compiler_fence(Ordering::SeqCst);
+    }
+}
+
+#[derive(Clone, Copy)]
+struct Size {
+    digits: u8,
+    characters: u8,
+    /// Bytes that do not begin a character.
+    continued: u8,
+}
+
+#[inline(never)]
+fn measure(value: Value, style: &TextStyle) -> Result<Size, Error> {
+    let mut bytes = 0;
+    let mut continued = 0;
     let mut digits = 0;
+    for back in 0..=value.groups {
+        let text = style.text(value.text.wrapping_sub(back));
+        bytes += text.len();
+        if style.utf8 != 0 {
+            continued += style.continued(text);
+        }
+    }
     match value.kind {
         Kind::Refused2 => return Err(Error::new(Cause::OutOfRange, 2)),
         Kind::Refused3 => return Err(Error::new(Cause::OutOfRange, 3)),
@@ -57,87 +121,68 @@ pub(crate) fn write(
         Kind::Positive | Kind::Negative => {
             let whole_from = usize::from(value.decimals) + 2 * usize::from(value.groups);
             digits = count(value.number).max(whole_from + 1);
-            characters += digits;
-            characters += usize::from(value.decimals > 0);
-            characters += usize::from(value.kind == Kind::Negative);
-            for before in 1..=value.groups {
-                let sign = style.text(value.text.wrapping_sub(before));
-                characters += sign.len();
-                continued += style.continued(sign);
-            }
+            bytes += digits;
+            bytes += usize::from(value.decimals > 0);
+            bytes += usize::from(value.kind == Kind::Negative);
         }
     }
-    characters -= continued;
+    Ok(Size { digits: digits as u8, characters: (bytes - continued) as u8, continued: continued as u8 })
+}
 
-    let columns = if layout.columns == 0 { characters } else { layout.columns.into() };
-    let most = columns - usize::from(layout.mark != 0);
-    if characters > most && layout.may_lose_unit && value.groups == 0 {
-        let lost = style.continued(text);
-        characters -= text.len() - lost;
-        continued -= lost;
-        text = &[];
-    }
-    let field = characters.max(layout.field.into());
-    let Some(room) = most.checked_sub(field) else { return Err(NO_ROOM) };
-    let mut label_bytes = room;
-    if style.utf8 != 0 {
-        let cut = cut(label.clone(), room);
-        label_bytes = cut.bytes;
-        continued += cut.continued;
-    }
-    let Some(out) = out.get_mut(..columns + continued) else { return Err(NO_ROOM) };
-    let length = out.len();
-
-    let mut places = out.iter_mut();
-    for byte in label.take(label_bytes) {
-        if let Some(place) = places.next() {
-            *place = byte;
-        }
-    }
-    // There always is a place: all was measured.
-    let mut put = |byte| {
-        if let Some(place) = places.next_back() {
-            *place = byte;
-        }
-    };
-    let in_front = value.text == Unit::FocalRatio as u8;
+/// Writes the value at the end of `out`, and blanks before it.
+#[inline(never)]
+fn put_value(value: Value, digits: u8, style: &TextStyle, mut out: &mut [u8]) {
+    let mut text = value.text;
+    let in_front = text == Unit::FocalRatio as u8;
     if !in_front {
-        text.iter().rev().for_each(|&byte| put(byte));
+        put_text(style.text(text), &mut out);
     }
-    let mut number = value.number;
-    let mut sign = value.text;
-    let mut next_sign = if value.groups > 0 { usize::from(value.decimals) + 2 } else { 0 };
-    for at in 0..digits {
-        if at == usize::from(value.decimals) && at > 0 {
-            put(style.decimal_mark);
+    if digits > 0 {
+        let mut number = value.number;
+        let mut whole = digits;
+        if value.decimals > 0 {
+            number = put_digits(number, value.decimals, &mut out);
+            put_text(&[style.decimal_mark], &mut out);
+            whole = whole.wrapping_sub(value.decimals);
         }
-        if at == next_sign && at > 0 {
-            sign = sign.wrapping_sub(1);
-            next_sign = if value.text.wrapping_sub(sign) < value.groups { at + 2 } else { 0 };
-            style.text(sign).iter().rev().for_each(|&byte| put(byte));
+        for _ in 0..value.groups {
+            number = put_digits(number, 2, &mut out);
+            text = text.wrapping_sub(1);
+            put_text(style.text(text), &mut out);
+            whole = whole.wrapping_sub(2);
         }
-        let (rest, digit) = split_ten(number);
-        put(b'0' + digit);
-        number = rest;
-    }
-    if value.kind == Kind::Negative {
-        put(b'-');
-    }
-    if in_front {
-        text.iter().rev().for_each(|&byte| put(byte));
-    }
-    if layout.mark != 0 {
-        for _ in characters..field {
-            put(b' ');
+        put_digits(number, whole, &mut out);
+        if value.kind == Kind::Negative {
+            put_text(b"-", &mut out);
         }
-        put(layout.mark);
+        if in_front {
+            put_text(style.text(text), &mut out);
+        }
     }
-    for place in places {
-        *place = b' ';
-        // Keeps this loop from becoming a call of memset, which costs more than so few blanks.
+    blank(out.iter_mut());
+}
+
+/// The last places, taken off. They always are there, since all was measured.
+#[inline(always)]
+fn last<'a>(out: &mut &'a mut [u8], count: usize) -> &'a mut [u8] {
+    out.split_off_mut(out.len().wrapping_sub(count)..).unwrap_or(&mut [])
+}
+
+fn put_text(text: &[u8], out: &mut &mut [u8]) {
+    for (place, byte) in last(out, text.len()).iter_mut().zip(text) {
+        *place = *byte;
         compiler_fence(Ordering::SeqCst);
     }
-    Ok(length)
+}
+
+/// Writes so many of the number's last digits and gives what is left of it.
+fn put_digits(mut number: u32, count: u8, out: &mut &mut [u8]) -> u32 {
+    for place in last(out, count.into()).iter_mut().rev() {
+        let (rest, digit) = split_ten(number);
+        *place = b'0' + digit;
+        number = rest;
+    }
+    number
 }
 
 /// A part of a UTF-8 text.
