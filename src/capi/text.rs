@@ -444,7 +444,7 @@ pub unsafe extern "C" fn fieldstop_text_visual_line(
             let number = row_of(line, columns);
             let row = VisualRow::from_number(number);
             let label = match row {
-                Some(_) => Label(*labels.add(number.into())),
+                Some(_) => Label::new(labels, number),
                 None => Label(c"".as_ptr()),
             };
             let row = row.map(|row| visual_row(&*readout, row));
@@ -583,7 +583,7 @@ pub unsafe extern "C" fn fieldstop_text_camera_line(
             let number = row_of(line, columns);
             let row = CameraRow::from_number(number);
             let label = match row {
-                Some(_) => Label(*labels.add(number.into())),
+                Some(_) => Label::new(labels, number),
                 None => Label(c"".as_ptr()),
             };
             let row = row.map(|row| camera_row(&*readout, row));
@@ -732,17 +732,26 @@ impl<const N: usize> Labels<N> {
     }
 }
 
-/// The bytes of a label up to its zero byte; none for a null pointer.
+/// The bytes of a label up to its zero byte.
 #[derive(Clone)]
 struct Label(*const c_char);
+
+impl Label {
+    /// The label with this number; none for a null pointer.
+    ///
+    /// # Safety
+    /// `labels` has one with this number, with a zero byte at its end, or a null pointer.
+    unsafe fn new(labels: *const *const c_char, number: u8) -> Label {
+        // SAFETY: the caller's promise.
+        let label = unsafe { *labels.add(number.into()) };
+        Label(if label.is_null() { c"".as_ptr() } else { label })
+    }
+}
 
 impl Iterator for Label {
     type Item = u8;
 
     fn next(&mut self) -> Option<u8> {
-        if self.0.is_null() {
-            return None;
-        }
         // SAFETY: the caller promises a zero byte at the end, and it is not passed.
         let byte = unsafe { *self.0 } as u8;
         if byte == 0 {

@@ -45,24 +45,52 @@ impl AngleForm {
 pub struct Value {
     /// All digits that are shown, as one number.
     pub(super) number: u32,
-    pub(super) decimals: u8,
-    /// Groups of two digits before the decimals, minutes and seconds of arc.
-    pub(super) groups: u8,
-    /// Number of the text that stands with the digits.
-    pub(super) text: u8,
-    pub(super) kind: Kind,
+    pub(super) form: Form,
 }
 
+/// What stands around the digits, in one word, so that a value fits in two registers: from the lowest byte the number
+/// of a text of the style, the decimals, the groups of two digits before these (minutes and seconds of arc), the kind.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
-#[repr(u8)]
-pub(super) enum Kind {
-    Positive,
-    Negative,
-    /// The text alone.
-    Word,
-    /// Too many decimals, at this position of the constructor's arguments.
-    Refused2,
-    Refused3,
+pub(super) struct Form(u32);
+
+// Kinds. 2 and 3: too many decimals, at this position of the constructor's arguments.
+const POSITIVE: u32 = 0;
+const NEGATIVE: u32 = 1;
+/// The text alone.
+const WORD: u32 = 4;
+
+impl Form {
+    const fn new(text: u8, decimals: u8, groups: u8, kind: u32) -> Form {
+        Form(text as u32 | (decimals as u32) << 8 | (groups as u32) << 16 | kind << 24)
+    }
+
+    pub(super) const fn text(self) -> u8 {
+        self.0 as u8
+    }
+
+    pub(super) const fn decimals(self) -> usize {
+        (self.0 >> 8) as u8 as usize
+    }
+
+    pub(super) const fn groups(self) -> usize {
+        (self.0 >> 16) as u8 as usize
+    }
+
+    pub(super) const fn is_word(self) -> bool {
+        self.0 >> 24 == WORD
+    }
+
+    pub(super) const fn is_negative(self) -> bool {
+        self.0 >> 24 == NEGATIVE
+    }
+
+    /// The position of the argument that was refused.
+    pub(super) const fn refused(self) -> Option<u8> {
+        match self.0 >> 24 {
+            position @ 2..=3 => Some(position as u8),
+            _ => None,
+        }
+    }
 }
 
 impl Value {
@@ -172,30 +200,30 @@ impl Value {
             }
         }
         // At most 1193°02'47.30", ten digits under 2^32.
-        Value { groups, ..Value::number(number + all * power, decimals, unit) }
+        Value { number: number + all * power, form: Form::new(unit as u8, decimals, groups, POSITIVE) }
     }
 
-    /// Any other decimal number: `number` in units of 10^-`places`, shown with at most as many decimals.
+    /// Any other decimal number: `number` in units of 10^-`places`, shown with at most as many decimals and at most 9.
     pub fn decimal(number: u32, places: u8, decimals: u8, unit: Unit) -> Value {
-        match places.checked_sub(decimals) {
-            Some(dropped) => Value::number(scale_down(number, dropped, 0), decimals, unit),
-            None => Value::REFUSED_2,
+        if decimals > places || decimals > 9 {
+            return Value::REFUSED_2;
         }
+        Value::number(scale_down(number, places - decimals, 0), decimals, unit)
     }
 
     /// The same with a sign.
     pub fn signed_decimal(number: i32, places: u8, decimals: u8, unit: Unit) -> Value {
         let mut value = Value::decimal(number.unsigned_abs(), places, decimals, unit);
         if number < 0 && value.number > 0 {
-            value.kind = Kind::Negative;
+            value.form = Form(value.form.0 | NEGATIVE << 24);
         }
         value
     }
 
     /// The unit that stands by the number, where it can stand alone: a sexagesimal angle has its signs inside.
-    pub const fn unit(&self) -> Unit {
-        match Unit::from_number(self.text) {
-            Some(unit) if self.groups == 0 => unit,
+    pub const fn unit(self) -> Unit {
+        match Unit::from_number(self.form.text()) {
+            Some(unit) if self.form.groups() == 0 => unit,
             _ => Unit::None,
         }
     }
@@ -204,21 +232,21 @@ impl Value {
     pub const fn without_unit(self) -> Value {
         match self.unit() {
             Unit::None => self,
-            _ => Value { text: Unit::None as u8, ..self },
+            _ => Value { form: Form(self.form.0 & !0xff), ..self },
         }
     }
 
-    pub(crate) const REFUSED_2: Value = Value { kind: Kind::Refused2, ..Value::BLANK };
-    const REFUSED_3: Value = Value { kind: Kind::Refused3, ..Value::BLANK };
+    pub(crate) const REFUSED_2: Value = Value { number: 0, form: Form::new(0, 0, 0, 2) };
+    const REFUSED_3: Value = Value { number: 0, form: Form::new(0, 0, 0, 3) };
     /// Nothing at all.
     pub(super) const BLANK: Value = Value::word(0);
 
     const fn number(number: u32, decimals: u8, unit: Unit) -> Value {
-        Value { number, decimals, groups: 0, text: unit as u8, kind: Kind::Positive }
+        Value { number, form: Form::new(unit as u8, decimals, 0, POSITIVE) }
     }
 
     const fn word(text: u8) -> Value {
-        Value { number: 0, decimals: 0, groups: 0, text, kind: Kind::Word }
+        Value { number: 0, form: Form::new(text, 0, 0, WORD) }
     }
 
     pub(super) fn from_q16(ratio: Q16, shift: u8, decimals: u8, unit: Unit) -> Value {

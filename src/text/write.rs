@@ -2,7 +2,7 @@
 
 use super::digits::{count, split_ten};
 use super::style::{TextStyle, Unit, begins_character};
-use super::value::{Kind, Value};
+use super::value::Value;
 use crate::status::{Cause, Error};
 use core::sync::atomic::{Ordering, compiler_fence};
 
@@ -47,24 +47,24 @@ pub(crate) fn write(
     out: &mut [u8],
 ) -> Result<usize, Error> {
     let mut size = measure(value, style)?;
-    let columns = if layout.columns == 0 { usize::from(size.characters) } else { layout.columns.into() };
+    let columns = if layout.columns == 0 { size.characters } else { layout.columns.into() };
     let most = columns - usize::from(layout.mark != 0);
-    if usize::from(size.characters) > most && layout.may_lose_unit {
+    if size.characters > most && layout.may_lose_unit {
         value = value.without_unit();
         size = measure(value, style)?;
     }
-    let field = usize::from(size.characters.max(layout.field));
-    let Some(mut head) = most.checked_sub(field) else { return Err(NO_ROOM) };
-    let mut label_bytes = head;
+    let field = size.characters.max(layout.field.into());
+    let Some(room) = most.checked_sub(field) else { return Err(NO_ROOM) };
+    let (mut head, mut label_bytes) = (room, room);
     if style.utf8 != 0 {
-        let cut = cut(label.clone(), head);
+        let cut = cut(label.clone(), room);
         label_bytes = cut.bytes;
         head += cut.continued;
     }
-    let length = head + (columns - most) + field + usize::from(size.continued);
+    let length = head + (columns - most) + field + size.continued;
     let Some(out) = out.get_mut(..length) else { return Err(NO_ROOM) };
     let Some((head, mut tail)) = out.split_at_mut_checked(head) else { return Err(NO_ROOM) };
-    put_label(label.take(label_bytes), head);
+    put_label(label, label_bytes, head);
     if layout.mark != 0
         && let Some(mark) = tail.split_off_first_mut()
     {
@@ -74,16 +74,20 @@ pub(crate) fn write(
     Ok(length)
 }
 
-/// Writes a label and blanks behind it.
+/// Writes so many bytes of a label, and blanks behind it.
 #[inline(never)]
-fn put_label(mut label: impl Iterator<Item = u8>, out: &mut [u8]) {
-    let mut places = out.iter_mut();
-    while let Some(byte) = label.next()
-        && let Some(place) = places.next()
-    {
+fn put_label(mut label: impl Iterator<Item = u8>, bytes: usize, out: &mut [u8]) {
+    let Some((head, tail)) = out.split_at_mut_checked(bytes) else { return };
+    let mut places = head.iter_mut();
+    for place in places.by_ref() {
+        let Some(byte) = label.next() else {
+            *place = b' ';
+            break;
+        };
         *place = byte;
     }
     blank(places);
+    blank(tail.iter_mut());
 }
 
 fn blank<'a>(places: impl Iterator<Item = &'a mut u8>) {
@@ -94,45 +98,43 @@ fn blank<'a>(places: impl Iterator<Item = &'a mut u8>) {
     }
 }
 
-#[derive(Clone, Copy)]
 struct Size {
-    digits: u8,
-    characters: u8,
+    digits: usize,
+    characters: usize,
     /// Bytes that do not begin a character.
-    continued: u8,
+    continued: usize,
 }
 
-#[inline(never)]
+#[inline]
 fn measure(value: Value, style: &TextStyle) -> Result<Size, Error> {
-    let mut bytes = 0;
-    let mut continued = 0;
+    let form = value.form;
+    if let Some(position) = form.refused() {
+        return Err(Error::new(Cause::OutOfRange, position));
+    }
+    let text = style.text(form.text());
+    let mut continued = style.continued(text);
+    let mut bytes = text.len();
     let mut digits = 0;
-    for back in 0..=value.groups {
-        let text = style.text(value.text.wrapping_sub(back));
-        bytes += text.len();
-        if style.utf8 != 0 {
-            continued += style.continued(text);
+    if !form.is_word() {
+        let whole_from = form.decimals() + 2 * form.groups();
+        digits = count(value.number).max(whole_from + 1);
+        bytes += digits;
+        bytes += usize::from(form.decimals() > 0);
+        bytes += usize::from(form.is_negative());
+        for back in 0..form.groups() {
+            let sign = style.text(form.text().wrapping_sub(1 + back as u8));
+            bytes += sign.len();
+            continued += style.continued(sign);
         }
     }
-    match value.kind {
-        Kind::Refused2 => return Err(Error::new(Cause::OutOfRange, 2)),
-        Kind::Refused3 => return Err(Error::new(Cause::OutOfRange, 3)),
-        Kind::Word => {}
-        Kind::Positive | Kind::Negative => {
-            let whole_from = usize::from(value.decimals) + 2 * usize::from(value.groups);
-            digits = count(value.number).max(whole_from + 1);
-            bytes += digits;
-            bytes += usize::from(value.decimals > 0);
-            bytes += usize::from(value.kind == Kind::Negative);
-        }
-    }
-    Ok(Size { digits: digits as u8, characters: (bytes - continued) as u8, continued: continued as u8 })
+    Ok(Size { digits, characters: bytes - continued, continued })
 }
 
 /// Writes the value at the end of `out`, and blanks before it.
 #[inline(never)]
-fn put_value(value: Value, digits: u8, style: &TextStyle, mut out: &mut [u8]) {
-    let mut text = value.text;
+fn put_value(value: Value, digits: usize, style: &TextStyle, mut out: &mut [u8]) {
+    let form = value.form;
+    let mut text = form.text();
     let in_front = text == Unit::FocalRatio as u8;
     if !in_front {
         put_text(style.text(text), &mut out);
@@ -140,19 +142,19 @@ fn put_value(value: Value, digits: u8, style: &TextStyle, mut out: &mut [u8]) {
     if digits > 0 {
         let mut number = value.number;
         let mut whole = digits;
-        if value.decimals > 0 {
-            number = put_digits(number, value.decimals, &mut out);
+        if form.decimals() > 0 {
+            number = put_digits(number, form.decimals(), &mut out);
             put_text(&[style.decimal_mark], &mut out);
-            whole = whole.wrapping_sub(value.decimals);
+            whole = whole.wrapping_sub(form.decimals());
         }
-        for _ in 0..value.groups {
+        for _ in 0..form.groups() {
             number = put_digits(number, 2, &mut out);
             text = text.wrapping_sub(1);
             put_text(style.text(text), &mut out);
             whole = whole.wrapping_sub(2);
         }
         put_digits(number, whole, &mut out);
-        if value.kind == Kind::Negative {
+        if form.is_negative() {
             put_text(b"-", &mut out);
         }
         if in_front {
@@ -176,8 +178,8 @@ fn put_text(text: &[u8], out: &mut &mut [u8]) {
 }
 
 /// Writes so many of the number's last digits and gives what is left of it.
-fn put_digits(mut number: u32, count: u8, out: &mut &mut [u8]) -> u32 {
-    for place in last(out, count.into()).iter_mut().rev() {
+fn put_digits(mut number: u32, count: usize, out: &mut &mut [u8]) -> u32 {
+    for place in last(out, count).iter_mut().rev() {
         let (rest, digit) = split_ten(number);
         *place = b'0' + digit;
         number = rest;
