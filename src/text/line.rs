@@ -2,7 +2,7 @@
 
 use super::style::{TextStyle, begins_character};
 use super::value::Value;
-use super::write::{Layout, write};
+use super::write::{LONGEST, NO_ROOM, blank};
 use crate::status::{Cause, Error};
 
 /// A value with its place on a page.
@@ -46,20 +46,131 @@ pub(crate) fn write_line(
     if columns < NARROWEST {
         return Err(Error::new(Cause::OutOfRange, 4));
     }
-    let mut layout = Layout { columns, field: 0, mark: b' ', may_lose_unit: true };
-    let mut value = Value::BLANK;
+    let mut plan = Plan { columns: columns.into(), value: Value::BLANK, field: 0, mark: Some(b' ') };
     if let Some(row) = row {
         if row.fact {
-            layout.mark = style.fact_mark;
+            plan.mark = Some(style.fact_mark);
         }
         if columns >= ONE_LINE {
-            (value, layout.field) = (row.value, row.field);
+            (plan.value, plan.field) = (row.value, row.field.into());
         } else if line % 2 == 1 {
-            // The value has the line for itself: no label, no mark.
-            (value, layout.field, layout.mark) = (row.value, columns, 0);
+            // The value has the line for itself.
+            (plan.value, plan.field, plan.mark) = (row.value, columns.into(), None);
         }
     }
-    write(value, label, layout, style, out)
+    if style.utf8 == 0 { plan.write(label, style, out) } else { plan.write_utf8(label, style, out) }
+}
+
+struct Plan {
+    columns: usize,
+    value: Value,
+    field: usize,
+    /// The character before the field, if it has a place.
+    mark: Option<u8>,
+}
+
+impl Plan {
+    #[inline]
+    fn write(
+        self,
+        label: impl Iterator<Item = u8>,
+        style: &TextStyle,
+        out: &mut [u8],
+    ) -> Result<usize, Error> {
+        let out = out.get_mut(..self.columns).ok_or(NO_ROOM)?;
+        let before = usize::from(self.mark.is_some());
+        let most = self.columns - before;
+        let mut value = self.value;
+        let mut written = value.write_right(style, most, out.get_mut(before..).unwrap_or(&mut []));
+        if written.is_err() {
+            value = value.without_unit();
+            written = value.write_right(style, most, out.get_mut(before..).unwrap_or(&mut []));
+        }
+        let (blanks, _) = written?;
+        // What the value leaves of the line, and at most what its field leaves.
+        let room = blanks.min(most.saturating_sub(self.field));
+        let mut places = out.iter_mut().take(blanks + before);
+        put_label(label, room, &mut places);
+        if let Some(mark) = self.mark
+            && let Some(place) = places.next()
+        {
+            *place = mark;
+        }
+        blank(places);
+        Ok(self.columns)
+    }
+
+    #[inline(never)]
+    fn write_utf8(
+        self,
+        label: impl Iterator<Item = u8> + Clone,
+        style: &TextStyle,
+        out: &mut [u8],
+    ) -> Result<usize, Error> {
+        let most = self.columns - usize::from(self.mark.is_some());
+        let mut text = [0; LONGEST];
+        let mut compose = |value: Value| {
+            let length = value.write(style, 0, &mut text)?;
+            let bytes = text.get(..length).unwrap_or(&[]);
+            Ok((length, bytes.len() - style.continued(bytes)))
+        };
+        let (mut length, mut characters) = compose(self.value)?;
+        if characters > most {
+            (length, characters) = compose(self.value.without_unit())?;
+        }
+        let field = self.field.max(characters);
+        let room = most.checked_sub(field).ok_or(NO_ROOM)?;
+        let label_bytes = cut(label.clone(), room);
+        let label_end = label_bytes.0 + (room - label_bytes.1);
+        let whole = label_end + (self.columns - most) + (field - characters) + length;
+        let out = out.get_mut(..whole).ok_or(NO_ROOM)?;
+        let mut places = out.iter_mut();
+        put_label(label.take(label_bytes.0), label_end, &mut places);
+        if let Some(mark) = self.mark
+            && let Some(place) = places.next()
+        {
+            *place = mark;
+        }
+        blank(places.by_ref().take(field - characters));
+        for (place, byte) in places.zip(text) {
+            *place = byte;
+        }
+        Ok(whole)
+    }
+}
+
+/// Writes a label in so many places, with blanks behind it.
+#[inline]
+fn put_label<'a>(
+    mut label: impl Iterator<Item = u8>,
+    room: usize,
+    places: &mut impl Iterator<Item = &'a mut u8>,
+) {
+    let mut places = places.take(room);
+    while let Some(place) = places.next() {
+        let Some(byte) = label.next() else {
+            *place = b' ';
+            break;
+        };
+        *place = byte;
+    }
+    blank(places);
+}
+
+/// Bytes and characters of a UTF-8 label as far as it has room.
+fn cut(label: impl Iterator<Item = u8>, room: usize) -> (usize, usize) {
+    let mut bytes = 0;
+    let mut characters = 0;
+    for byte in label {
+        if begins_character(byte) {
+            if characters == room {
+                break;
+            }
+            characters += 1;
+        }
+        bytes += 1;
+    }
+    (bytes, characters)
 }
 
 /// A part of a line, in characters.
