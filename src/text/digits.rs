@@ -5,6 +5,10 @@
 /// `n` divided by ten, and the digit that is left.
 #[inline(always)]
 pub(super) fn split_ten(n: u32) -> (u32, u8) {
+    if n < 1 << 16 {
+        let quotient = (n * 52_429) >> 19;
+        return (quotient, (n - quotient * 10) as u8);
+    }
     // The high half gives most of the quotient, never too much: 65535 / 10 for each 65536.
     let most = ((n >> 16) * 52_428) >> 3;
     // What is left is under 2^17 + 6. Its half times 2^18 / 5, rounded up, is exact.

@@ -89,14 +89,8 @@ impl Plan {
         let (blanks, _) = written?;
         // What the value leaves of the line, and at most what its field leaves.
         let room = blanks.min(most.saturating_sub(self.field));
-        let mut places = out.iter_mut().take(blanks + before);
-        put_label(label, room, &mut places);
-        if let Some(mark) = self.mark
-            && let Some(place) = places.next()
-        {
-            *place = mark;
-        }
-        blank(places);
+        let Some(head) = out.get_mut(..blanks + before) else { return Err(NO_ROOM) };
+        put_head(label, room, self.mark, head);
         Ok(self.columns)
     }
 
@@ -122,31 +116,22 @@ impl Plan {
         let room = most.checked_sub(field).ok_or(NO_ROOM)?;
         let label_bytes = cut(label.clone(), room);
         let label_end = label_bytes.0 + (room - label_bytes.1);
-        let whole = label_end + (self.columns - most) + (field - characters) + length;
-        let out = out.get_mut(..whole).ok_or(NO_ROOM)?;
-        let mut places = out.iter_mut();
-        put_label(label.take(label_bytes.0), label_end, &mut places);
-        if let Some(mark) = self.mark
-            && let Some(place) = places.next()
-        {
-            *place = mark;
-        }
-        blank(places.by_ref().take(field - characters));
-        for (place, byte) in places.zip(text) {
+        let head = label_end + (self.columns - most) + (field - characters);
+        let out = out.get_mut(..head + length).ok_or(NO_ROOM)?;
+        let Some((head, tail)) = out.split_at_mut_checked(head) else { return Err(NO_ROOM) };
+        put_head(label.take(label_bytes.0), label_end, self.mark, head);
+        for (place, byte) in tail.iter_mut().zip(text) {
             *place = byte;
         }
-        Ok(whole)
+        Ok(head.len() + length)
     }
 }
 
-/// Writes a label in so many places, with blanks behind it.
+/// Writes what stands before a value: a label in so many places, with blanks behind it, the mark, blanks.
 #[inline]
-fn put_label<'a>(
-    mut label: impl Iterator<Item = u8>,
-    room: usize,
-    places: &mut impl Iterator<Item = &'a mut u8>,
-) {
-    let mut places = places.take(room);
+fn put_head(mut label: impl Iterator<Item = u8>, room: usize, mark: Option<u8>, head: &mut [u8]) {
+    let Some((places, rest)) = head.split_at_mut_checked(room) else { return };
+    let mut places = places.iter_mut();
     while let Some(place) = places.next() {
         let Some(byte) = label.next() else {
             *place = b' ';
@@ -155,6 +140,13 @@ fn put_label<'a>(
         *place = byte;
     }
     blank(places);
+    let mut rest = rest.iter_mut();
+    if let Some(mark) = mark
+        && let Some(place) = rest.next()
+    {
+        *place = mark;
+    }
+    blank(rest);
 }
 
 /// Bytes and characters of a UTF-8 label as far as it has room.
