@@ -6,6 +6,7 @@
 //! |---|---|
 //! | `capi` | the C interface (feature `capi`) |
 //! | [`optics`] | the formulas |
+//! | [`convert`] | conversions between the fixed units |
 //! | `math` | integer and float kernels |
 //! | [`units`] | the quantities of the fixed forms |
 //! | [`status`] | what can go wrong |
@@ -21,7 +22,7 @@
 #![warn(missing_docs)]
 
 // A C library for a desktop takes its panic handler from std.
-#[cfg(all(feature = "capi", not(target_os = "none")))]
+#[cfg(any(test, all(feature = "capi", not(target_os = "none"))))]
 extern crate std;
 
 #[cfg(feature = "capi")]
@@ -33,6 +34,7 @@ pub mod status;
 pub mod text;
 pub mod units;
 
+pub use math::convert;
 #[cfg(feature = "float")]
 pub use math::float::Real;
 pub use status::{Cause, Error};

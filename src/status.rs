@@ -73,6 +73,7 @@ impl Error {
     /// The result does not fit its type.
     pub const OVERFLOW: Error = Error::new(Cause::Overflow, 0);
 
+    /// Why the call was refused.
     pub const fn cause(self) -> Cause {
         match Cause::from_number(self.0.get() as u8) {
             Some(cause) => cause,

@@ -7,6 +7,7 @@
 pub mod field;
 pub mod status;
 pub mod text;
+pub mod units;
 
 use crate::status::{Cause, Error};
 

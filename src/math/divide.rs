@@ -45,7 +45,7 @@ pub(crate) const fn normalise(x: u32) -> (u32, u32) {
 
 /// `n` shifted up by 0 to 31 places.
 #[inline(always)]
-const fn shift_up(n: u64, shift: u32) -> u64 {
+pub(crate) const fn shift_up(n: u64, shift: u32) -> u64 {
     let (upper, lower) = ((n >> 32) as u32, n as u32);
     let upper = upper << shift | (lower >> 1) >> (31 - shift);
     (upper as u64) << 32 | (lower << shift) as u64

@@ -1,5 +1,6 @@
 //! What the float forms need of f32 and f64, over libm, and the checks of their arguments.
 
+use super::double::Double;
 use crate::status::{Cause, Error};
 use core::ops::{Add, Div, Mul, Neg, Sub};
 
@@ -11,8 +12,8 @@ mod sealed {
 
 /// `f32` or `f64`. An f32 is computed in f32 throughout.
 ///
-/// A float argument is finite and at most 2^40 (1.0995e12) in magnitude; one that must not be zero is at least 2^-40
-/// (9.1e-13). So no product on the way to a result can overflow, or lose bits at the bottom, in either type.
+/// A float argument is finite and at most 2^32 (4.29e9) in magnitude; one that must not be zero is at least 2^-32
+/// (2.3e-10). So no product on the way to a result can overflow, or lose bits at the bottom, in either type.
 pub trait Real:
     Copy
     + PartialOrd
@@ -23,10 +24,26 @@ pub trait Real:
     + Neg<Output = Self>
     + sealed::Sealed
 {
+    /// 2^s + 1 where s is half of the digits, rounded up: it cuts a number in two for an exact product.
+    #[doc(hidden)]
+    const SPLIT: Self;
     /// The nearest value of this type.
     fn of(value: f64) -> Self;
+    /// The product with a constant given as its nearest f64 and the rest: in f64 correctly rounded, in f32 the plain
+    /// product, whose constants here happen to round well.
+    #[doc(hidden)]
+    fn times(self, constant: (f64, f64)) -> Self;
+    #[doc(hidden)]
+    fn of_count(count: u32) -> Self;
+    /// What `of` lost of a constant: nothing that an f64 can tell for f64.
+    #[doc(hidden)]
+    fn of_difference(value: f64, rounded: Self) -> Self;
     #[doc(hidden)]
     fn is_finite(self) -> bool;
+    #[doc(hidden)]
+    fn to_i64(self) -> i64;
+    #[doc(hidden)]
+    fn floor(self) -> Self;
     #[doc(hidden)]
     fn sqrt(self) -> Self;
     #[doc(hidden)]
@@ -54,16 +71,36 @@ pub trait Real:
 }
 
 macro_rules! real {
-    ($t:ty, $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
+    ($t:ty, $split:literal, $times:expr, $floor:ident $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
      $log10:ident $exp:ident $pow:ident $hypot:ident) => {
         impl Real for $t {
+            const SPLIT: Self = $split;
             #[inline(always)]
             fn of(value: f64) -> Self {
                 value as $t
             }
             #[inline(always)]
+            fn times(self, constant: (f64, f64)) -> Self {
+                let times: fn($t, (f64, f64)) -> $t = $times;
+                times(self, constant)
+            }
+            #[inline(always)]
+            fn of_count(count: u32) -> Self {
+                count as $t
+            }
+            #[inline(always)]
+            fn of_difference(value: f64, rounded: Self) -> Self {
+                (value - rounded as f64) as $t
+            }
+            #[inline(always)]
             fn is_finite(self) -> bool {
                 <$t>::is_finite(self)
+            }
+            fn to_i64(self) -> i64 {
+                self as i64
+            }
+            fn floor(self) -> Self {
+                libm::$floor(self)
             }
             fn sqrt(self) -> Self {
                 libm::$sqrt(self)
@@ -105,13 +142,13 @@ macro_rules! real {
     };
 }
 
-real!(f32, sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
-real!(f64, sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
+real!(f32, 4097.0, |x, (upper, _)| x * upper as f32, floorf sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
+real!(f64, 134217729.0, |x, (upper, lower)| (Double { upper, lower } * x).upper, floor sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
 
-const LEAST: f64 = 1.0 / (1u64 << 40) as f64;
-const MOST: f64 = (1u64 << 40) as f64;
+const LEAST: f64 = 1.0 / (1u64 << 32) as f64;
+const MOST: f64 = (1u64 << 32) as f64;
 
-/// Refuses what is not in 2^-40 to 2^40.
+/// Refuses what is not in 2^-32 to 2^32.
 pub(crate) fn positive<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     let cause = if !x.is_finite() {
         Cause::NotFinite
@@ -125,7 +162,7 @@ pub(crate) fn positive<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     Err(Error::new(cause, argument))
 }
 
-/// Refuses what is not in 0 to `most`, which is at most 2^40.
+/// Refuses what is not in 0 to `most`, which is at most 2^32.
 pub(crate) fn from_zero_to<F: Real>(most: f64, x: F, argument: u8) -> Result<(), Error> {
     let cause = if !x.is_finite() {
         Cause::NotFinite
@@ -137,7 +174,7 @@ pub(crate) fn from_zero_to<F: Real>(most: f64, x: F, argument: u8) -> Result<(),
     Err(Error::new(cause, argument))
 }
 
-/// Refuses what is not in 0 to 2^40.
+/// Refuses what is not in 0 to 2^32.
 pub(crate) fn not_negative<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     from_zero_to(MOST, x, argument)
 }

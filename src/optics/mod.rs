@@ -6,8 +6,8 @@
 //! - Fixed arguments are read as exact; the result is the exact value of the formula rounded to nearest. "Error" is
 //!   the greatest distance from that exact value, in units of the result's last place (LSB) for the fixed form and in
 //!   units in the last place (ulp) for the float forms.
-//! - A fixed argument may be anything that its type holds and a float argument anything finite up to 2^40, unless its
-//!   range is given; where zero is refused a float must be at least 2^-40.
+//! - A fixed argument may be anything that its type holds and a float argument anything finite up to 2^32, unless its
+//!   range is given; where zero is refused a float must be at least 2^-32.
 //! - Refusals are checked from the first argument to the last, then the result: [`Zero`](crate::Cause::Zero) where the
 //!   quantity must exist, [`OutOfRange`](crate::Cause::OutOfRange), [`NotFinite`](crate::Cause::NotFinite) for floats,
 //!   [`Overflow`](crate::Cause::Overflow) where the result does not fit. Nothing wraps or saturates.

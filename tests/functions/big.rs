@@ -86,6 +86,9 @@ impl Big {
     pub fn min(self, other: Big) -> Big {
         if self < other { self } else { other }
     }
+    pub fn floor(&self) -> Big {
+        Big(self.0.floor())
+    }
     pub fn ceil(&self) -> Big {
         Big(self.0.ceil())
     }

@@ -101,7 +101,7 @@ pub fn fixed(row: &Row, n: usize) -> Vec<Vec<i64>> {
 }
 
 /// Float arguments, each exact in f32 if `single`: the fixed cases in float units, not on their grid, and as far as
-/// 2^-40 and 2^40.
+/// 2^-32 and 2^32.
 pub fn float(row: &Row, n: usize, single: bool) -> Vec<Vec<f64>> {
     let mut r = Random::new(row.stem);
     let cut = |x: f64| if single { x as f32 as f64 } else { x };
@@ -118,7 +118,7 @@ pub fn float(row: &Row, n: usize, single: bool) -> Vec<Vec<f64>> {
                     }
                     let limit = a.range.1 as f64 / a.unit.steps;
                     if wild && a.range == (a.unit.least, a.unit.most) {
-                        return cut(2f64.powf(80.0 * r.unit() - 40.0));
+                        return cut(2f64.powf(64.0 * r.unit() - 32.0));
                     }
                     let jitter = if x == 0 || r.below(16) == 0 { 0.0 } else { r.unit() - 0.5 };
                     let value = cut((x as f64 + jitter) / a.unit.steps);

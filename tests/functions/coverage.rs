@@ -34,11 +34,9 @@ fn names_after<'a>(text: &'a str, before: &str) -> Vec<&'a str> {
 fn every_public_function_has_its_row() {
     let rows: BTreeSet<String> = rows().iter().map(|r| r.stem.to_string()).collect();
     let mut public = BTreeSet::new();
-    for folder in ["src/optics"] {
-        for (_, text) in sources(folder) {
-            for name in names_after(&text, "\npub fn ") {
-                public.insert(name.strip_suffix("_fx").unwrap_or(name).to_string());
-            }
+    for (_, text) in sources("src/optics").into_iter().chain(sources("src/math")) {
+        for name in names_after(&text, "\npub fn ") {
+            public.insert(name.strip_suffix("_fx").unwrap_or(name).to_string());
         }
     }
     assert_eq!(public, rows);

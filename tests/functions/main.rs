@@ -4,6 +4,7 @@
 mod big;
 mod cases;
 mod coverage;
+mod documented;
 mod edges;
 mod oracle;
 mod registry;

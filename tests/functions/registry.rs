@@ -5,6 +5,7 @@ use super::big::{Big, big};
 use fieldstop::Error;
 
 mod field;
+mod units;
 
 /// A unit of the contract: how many of the fixed form's steps make one of the float form's unit.
 #[derive(Clone, Copy, PartialEq, Debug)]
@@ -27,6 +28,7 @@ pub const NM: Unit = unit(1000.0, 0, U32);
 /// Nanometres in the float form too: wavelengths and rms wavefront.
 pub const NM_AS_NM: Unit = unit(1.0, 0, U32);
 pub const MAS: Unit = unit(1000.0, 0, U32);
+pub const MAS_PER_MM: Unit = unit(1000.0, 0, U32);
 pub const UAS: Unit = unit(1e6, 0, U32);
 pub const Q16: Unit = unit(65536.0, 0, U32);
 pub const MMAG: Unit = unit(1000.0, i32::MIN as i64, i32::MAX as i64);
@@ -47,11 +49,13 @@ pub struct Argument {
     pub zero_refused: bool,
     /// The range, in steps, where it is narrower than the type.
     pub range: (i64, i64),
+    /// The upper end itself, one step above `range`, is refused in the float forms too.
+    pub under: bool,
 }
 
 /// An argument that must not be zero.
 pub const fn positive(name: &'static str, unit: Unit, usual: (i64, i64)) -> Argument {
-    Argument { name, unit, usual, zero_refused: true, range: (unit.least, unit.most) }
+    Argument { name, unit, usual, zero_refused: true, range: (unit.least, unit.most), under: false }
 }
 
 /// An argument that may be zero.
@@ -60,6 +64,11 @@ pub const fn ordinary(name: &'static str, unit: Unit, usual: (i64, i64)) -> Argu
 }
 
 impl Argument {
+    /// Below `limit`.
+    pub const fn under(self, limit: i64) -> Argument {
+        Argument { range: (self.unit.least, limit - 1), under: true, ..self }
+    }
+    /// From `least` to `most`.
     pub const fn within(self, least: i64, most: i64) -> Argument {
         Argument { range: (least, most), ..self }
     }
@@ -77,6 +86,7 @@ pub struct Owed {
     pub part: f64,
 }
 
+pub const EXACT: Owed = Owed { lsb: 0.0, part: 0.0 };
 /// Class A without and with an irrational constant or a root, class T.
 pub const RATIONAL: Owed = Owed { lsb: 0.5, part: 0.0 };
 pub const IRRATIONAL: Owed = Owed { lsb: 0.51, part: 0.0 };
@@ -114,6 +124,8 @@ pub struct Row {
     pub refuses: fn(usize, &[Big]) -> bool,
     /// The largest term that the definition adds, where the error is counted in its last place.
     pub largest: Option<fn(&[Big]) -> Big>,
+    /// Steps of the result to a whole turn, where it lies on a circle: a result a turn away is the same.
+    pub circle: Option<f64>,
     pub fixed: Fixed,
     pub c_fixed: CFixed,
     pub floats: Option<Floats>,
@@ -136,7 +148,12 @@ impl Row {
 
 pub fn rows() -> Vec<Row> {
     let mut rows = Vec::new();
+    rows.extend(units::rows());
     rows.extend(field::rows());
+    // FIELDSTOP_ONLY names the functions of a long run.
+    if let Ok(only) = std::env::var("FIELDSTOP_ONLY") {
+        rows.retain(|row| only.split(',').any(|stem| stem == row.stem));
+    }
     rows
 }
 
@@ -193,6 +210,17 @@ impl Real for f64 {
 macro_rules! row {
     ($subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr, $ulp:expr,
      $exact:expr, $fx:ident $c_fx:ident $c_f32:ident $c_f64:ident) => {
+        row!(f32 f64, $subject::$stem [$($i $argument),*] -> $result, $owed, $ulp, $exact,
+            $fx $c_fx $c_f32 $c_f64)
+    };
+    // The float forms give a count.
+    (count $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr, $ulp:expr,
+     $exact:expr, $fx:ident $c_fx:ident $c_f32:ident $c_f64:ident) => {
+        row!(u32 u32, $subject::$stem [$($i $argument),*] -> $result, $owed, $ulp, $exact,
+            $fx $c_fx $c_f32 $c_f64)
+    };
+    ($single:ident $double:ident, $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr,
+     $owed:expr, $ulp:expr, $exact:expr, $fx:ident $c_fx:ident $c_f32:ident $c_f64:ident) => {
         $crate::registry::Row {
             floats: Some($crate::registry::Floats {
                 single: |a| {
@@ -202,14 +230,14 @@ macro_rules! row {
                     fieldstop::optics::$subject::$stem::<f64>($($crate::registry::Real::of(a[$i])),*).map($crate::registry::Real::value)
                 },
                 c_single: |a, held| {
-                    let mut out = held.unwrap_or(0.0) as f32;
+                    let mut out = held.unwrap_or(0.0) as $single;
                     let pointer = if held.is_some() { &raw mut out } else { core::ptr::null_mut() };
                     // SAFETY: null or a live local.
                     let status = unsafe { fieldstop::capi::$subject::$c_f32($($crate::registry::Real::of(a[$i]),)* pointer) };
                     (status, $crate::registry::Real::value(out))
                 },
                 c_double: |a, held| {
-                    let mut out = held.unwrap_or(0.0);
+                    let mut out = held.unwrap_or(0.0) as $double;
                     let pointer = if held.is_some() { &raw mut out } else { core::ptr::null_mut() };
                     // SAFETY: null or a live local.
                     let status = unsafe { fieldstop::capi::$subject::$c_f64($($crate::registry::Real::of(a[$i]),)* pointer) };
@@ -221,10 +249,15 @@ macro_rules! row {
     };
     (fixed only $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr, $ulp:expr,
      $exact:expr, $fx:ident $c_fx:ident) => {
+        row!(fixed only (fieldstop::optics::$subject) $subject::$stem [$($i $argument),*] -> $result, $owed, $ulp,
+            $exact, $fx $c_fx)
+    };
+    (fixed only ($($module:tt)*) $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr,
+     $ulp:expr, $exact:expr, $fx:ident $c_fx:ident) => {
         $crate::registry::Row {
             subject: stringify!($subject),
             stem: stringify!($stem),
-            arguments: &[$($argument),*],
+            arguments: const { &[$($argument),*] },
             result: $result,
             owed: $owed,
             single_owed: $crate::registry::FloatOwed::Ulp($ulp),
@@ -232,8 +265,9 @@ macro_rules! row {
             exact: $exact,
             refuses: |_, _| false,
             largest: None,
+            circle: None,
             fixed: |a| {
-                fieldstop::optics::$subject::$fx($($crate::registry::Raw::of(a[$i])),*).map($crate::registry::Raw::raw)
+                $($module)*::$fx($($crate::registry::Raw::of(a[$i])),*).map($crate::registry::Raw::raw)
             },
             c_fixed: |a, held| {
                 let mut out = $crate::registry::Raw::of(held.unwrap_or(0));

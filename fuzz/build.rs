@@ -1,0 +1,58 @@
+//! Writes a call of every C function, out of src/capi, so that a new function is fuzzed from its first day.
+
+use std::fmt::Write;
+use std::path::Path;
+use std::{env, fs};
+
+fn main() {
+    println!("cargo::rerun-if-changed=../src/capi");
+    let mut files: Vec<_> = fs::read_dir("../src/capi").unwrap().map(|entry| entry.unwrap().path()).collect();
+    files.retain(|file| file.extension().is_some_and(|e| e == "rs") && file.file_stem().unwrap() != "mod");
+    files.sort();
+    let mut calls = String::new();
+    for file in files {
+        let subject = file.file_stem().unwrap().to_str().unwrap();
+        let text = fs::read_to_string(&file).unwrap();
+        for function in text.split("extern \"C\" fn ").skip(1) {
+            calls.push_str(&call(subject, function));
+        }
+    }
+    let path = Path::new(&env::var("OUT_DIR").unwrap()).join("calls.rs");
+    fs::write(path, format!("#[allow(unused_variables)]\nconst CALLS: &[fn(&mut Input)] = &[\n{calls}];\n"))
+        .unwrap();
+}
+
+/// `function` begins with the name, `fieldstop_tiles_fx(target_mas: u32, …) -> …`.
+fn call(subject: &str, function: &str) -> String {
+    let (name, rest) = function.split_once('(').unwrap();
+    let (arguments, rest) = rest.split_once(')').unwrap();
+    let gives_status = rest.trim_start().starts_with("-> fieldstop_status");
+    let arguments: Vec<(&str, &str)> = arguments
+        .split(',')
+        .filter(|argument| !argument.trim().is_empty())
+        .map(|argument| argument.split_once(':').unwrap())
+        .map(|(name, kind)| (name.trim(), kind.trim()))
+        .collect();
+    let mut code = format!("    |input| {{ // {name}\n");
+    // From the last: the capacity of a buffer stands behind it.
+    let mut capacity = None;
+    for (name, kind) in arguments.iter().rev() {
+        let value = match capacity.take() {
+            Some(capacity) if kind.starts_with('*') => format!("input.take({capacity} as usize)"),
+            _ => "input.take(1)".to_string(),
+        };
+        // All other types follow from the call.
+        let kind = if name.ends_with("capacity") { kind } else { "_" };
+        writeln!(code, "        let {name}: {kind} = {value};").unwrap();
+        capacity = name.ends_with("capacity").then_some(*name);
+    }
+    let names: Vec<&str> = arguments.iter().map(|(name, _)| *name).collect();
+    let call = format!("fieldstop::capi::{subject}::{name}({})", names.join(", "));
+    writeln!(code, "        #[allow(unused_unsafe)]").unwrap();
+    if gives_status {
+        writeln!(code, "        let status = unsafe {{ {call} }};\n        input.check(status);").unwrap();
+    } else {
+        writeln!(code, "        let _ = unsafe {{ {call} }};").unwrap();
+    }
+    code + "    },\n"
+}

@@ -1,0 +1,884 @@
+/*
+ * fieldstop 0.1.0: telescope optics readouts for firmware, in fixed point and in float.
+ *
+ * Made from src/capi of the crate `fieldstop`: do not edit.
+ *
+ * CAUTION. Never look at or near the Sun through a telescope without a full-aperture filter made for
+ * it; nothing that this library computes says that it is safe. Moving mounts and high eyepieces can
+ * hurt too. The makers' instructions and local rules come first.
+ *
+ * Forms. Each readout comes in up to three forms:
+ *     fieldstop_<name>_fx     integers, for a part without FPU
+ *     fieldstop_<name>_f32    float, computed in float throughout
+ *     fieldstop_<name>_f64    double
+ * Define FIELDSTOP_NO_FLOAT to leave out the prototypes of the last two; those of _f64 are absent on AVR
+ * in any case.
+ *
+ * Units. A name ends in its unit:
+ *     _um      micrometres          _mm        millimetres
+ *     _nm      nanometres           _mas       milliarcseconds
+ *     _uas     microarcseconds      _arcsec    arcseconds
+ *     _q16     unsigned Q16.16: 65536 is 1     _milli     thousandths of a plain number
+ *     _mmag    millimagnitudes      _mag       magnitudes
+ *     _ms _us  milli-, microseconds _s         seconds
+ *     _day_ms  milliseconds of a circle of 24 hours
+ *     _bam     binary angle: 2^32 is one turn  _deg       degrees
+ *     _per_mm, _per_s and the like divide the unit before them.
+ * The float forms take millimetres for _um, micrometres for _nm (but wavelengths and rms wavefronts
+ * stay in nanometres), arcseconds for _mas and _uas, plain numbers for _q16, magnitudes for _mmag.
+ *
+ * Ranges. A fixed argument may be anything that its type holds, but for what the function's comment
+ * says. A float argument is finite and at most 2^32 in magnitude, and at least 2^-32 where zero is
+ * refused, but for what the comment says.
+ *
+ * Errors. A fixed argument is read as exact and the result is the exact value of the formula, rounded
+ * to nearest. "Error" is the greatest distance from that exact value over the whole range: in units of
+ * the last place of a fixed result (LSB), in units in the last place of a float result (ulp), or as
+ * said. A fixed result is the same on every machine, bit for bit.
+ *
+ * Status. Each readout returns a fieldstop_status: 0 is success. Otherwise FIELDSTOP_CAUSE gives the
+ * cause and FIELDSTOP_ARGUMENT the position of the offending argument, counted from 1, a pointer as
+ * one; 0 where no single argument is to blame. On any status but 0 nothing is written. The order of
+ * checks is fixed: null pointers, then the arguments from left to right, then the result. No result
+ * is wrapped or saturated. Numbers of causes never change; treat one that you do not know as an error.
+ *
+ * Reentrancy. No function keeps state, allocates, locks, loops without a bound or reads past what it
+ * was given: all may be called from an interrupt and from several threads.
+ */
+#ifndef FIELDSTOP_H
+#define FIELDSTOP_H
+
+#include <stddef.h>
+#include <stdint.h>
+
+/* The version of this header; fieldstop_version tells that of the library. */
+#define FIELDSTOP_VERSION_MAJOR 0
+#define FIELDSTOP_VERSION_MINOR 1
+#define FIELDSTOP_VERSION_PATCH 0
+#define FIELDSTOP_VERSION                                                                          \
+    (FIELDSTOP_VERSION_MAJOR * 65536L + FIELDSTOP_VERSION_MINOR * 256L + FIELDSTOP_VERSION_PATCH)
+
+/* The cause in a status, one of the causes below, and the position of the offending argument. */
+#define FIELDSTOP_CAUSE(status) ((uint8_t)((status)&0xFFu))
+#define FIELDSTOP_ARGUMENT(status) ((uint8_t)((status) >> 8))
+
+/* Compilers that can do so warn where a status is ignored. */
+#if defined(__cplusplus) && __cplusplus >= 201703L
+#define FIELDSTOP_CHECKED [[nodiscard]]
+#elif defined(__GNUC__)
+#define FIELDSTOP_CHECKED __attribute__((warn_unused_result))
+#else
+#define FIELDSTOP_CHECKED
+#endif
+
+/*
+ * A library of another ABI does not link: a word among the debugging data, which takes no room on
+ * the part, asks for this one's. Define FIELDSTOP_NO_ABI_CHECK where a linker script refuses
+ * that section.
+ */
+#if defined(__GNUC__) && defined(__ELF__) && !defined(FIELDSTOP_NO_ABI_CHECK)
+__asm__(".pushsection .debug_fieldstop_abi,\"\"\n\t.long fieldstop_abi_1\n\t.popsection");
+#endif
+
+#ifdef __cplusplus
+extern "C" {
+#endif
+
+/* --------------------------------------------------------------------------------------------------
+   What can go wrong. The numbers are frozen: they are the `fieldstop_status` of the C
+   interface. */
+
+/** Cause: a pointer is null. */
+#define FIELDSTOP_NULL_POINTER 1
+/** Cause: zero where the quantity must exist. */
+#define FIELDSTOP_ZERO 2
+/** Cause: outside the documented range. */
+#define FIELDSTOP_OUT_OF_RANGE 3
+/** Cause: a float argument is infinite or not a number. */
+#define FIELDSTOP_NOT_FINITE 4
+/** Cause: the result does not fit its type. */
+#define FIELDSTOP_OVERFLOW 5
+/** Cause: the text does not fit its width or buffer. */
+#define FIELDSTOP_NO_ROOM 6
+/** Cause: not defined or not known here. */
+#define FIELDSTOP_UNDEFINED 7
+
+/**
+ * 0 on success; otherwise the cause in the low byte, and in the high byte the position of the offending argument
+ * counted from 1, or 0 where no single argument is to blame.
+ */
+typedef uint16_t fieldstop_status;
+
+/**
+ * Gives a static English sentence for the cause in a status; never null.
+ *
+ * Success and causes that this version does not know have a sentence too.
+ */
+const char *fieldstop_cause_text(fieldstop_status status);
+
+/** Gives the version of the library: major times 65536 plus minor times 256 plus patch. */
+uint32_t fieldstop_version(void);
+
+/** Does nothing; that it is there says that the library has ABI 1, so that a header of another ABI does not link. */
+void fieldstop_abi_1(void);
+
+/* --------------------------------------------------------------------------------------------------
+   The quantities of the fixed forms, each an integer with its unit in its name. */
+
+/**
+ * Gives the binary angle of milliarcseconds, whole turns dropped.
+ *
+ * 2^32 a / 1296000000.
+ * Ranges: angle_mas any value.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_bam_from_mas_fx(int32_t angle_mas,
+                                           uint32_t *angle_bam);
+
+/**
+ * Gives the milliarcseconds of a binary angle, under 1296000000.
+ *
+ * 1296000000 b / 2^32; what rounds to a whole turn is 0.
+ * Ranges: angle_bam any value.
+ * Error: at most 0.5 LSB, on the circle.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_mas_from_bam_fx(uint32_t angle_bam,
+                                           uint32_t *angle_mas);
+
+/**
+ * Gives the milliarcseconds of a binary angle either side of zero.
+ *
+ * 1296000000 b / 2^32.
+ * Ranges: angle_bam any value.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_signed_mas_from_bam_fx(int32_t angle_bam,
+                                                  int32_t *angle_mas);
+
+/**
+ * Gives the binary angle of milliseconds on a circle of 24 hours.
+ *
+ * 2^32 t / 86400000.
+ * Ranges: time_day_ms under 86400000.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_bam_from_day_ms_fx(uint32_t time_day_ms,
+                                              uint32_t *angle_bam);
+
+/**
+ * Gives the milliseconds on a circle of 24 hours of a binary angle, under 86400000.
+ *
+ * 86400000 b / 2^32; what rounds to a whole day is 0.
+ * Ranges: angle_bam any value.
+ * Error: at most 0.5 LSB, on the circle.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_day_ms_from_bam_fx(uint32_t angle_bam,
+                                              uint32_t *time_day_ms);
+
+/**
+ * Gives the thousandths of a Q16.16 number.
+ *
+ * 1000 x.
+ * Ranges: number_q16 any value.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_milli_from_q16_fx(uint32_t number_q16,
+                                             uint32_t *number_milli);
+
+/**
+ * Gives the Q16.16 number of thousandths.
+ *
+ * m / 1000.
+ * Ranges: number_milli any value.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, overflow (65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_q16_from_milli_fx(uint32_t number_milli,
+                                             uint32_t *number_q16);
+
+/* --------------------------------------------------------------------------------------------------
+   Field of view: what the focal lengths, the eyepiece and the sensor show of the sky. */
+
+/**
+ * Gives the focal ratio (the N of f/N), in Q16.16.
+ *
+ * N = f / D.
+ * Ranges: focal_length_um not 0; aperture_um not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_ratio_fx(uint32_t focal_length_um,
+                                          uint32_t aperture_um,
+                                          uint32_t *focal_ratio_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the focal ratio (the N of f/N), a plain number.
+ *
+ * N = f / D.
+ * Ranges: focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_ratio_f32(float focal_length_mm,
+                                           float aperture_mm,
+                                           float *focal_ratio);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the focal ratio (the N of f/N), a plain number.
+ *
+ * N = f / D.
+ * Ranges: focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_ratio_f64(double focal_length_mm,
+                                           double aperture_mm,
+                                           double *focal_ratio);
+#endif
+
+/**
+ * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in um.
+ *
+ * f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
+ * Ranges: focal_length_um not 0; amplification_q16 not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (4294967296 um or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_amplified_focal_length_fx(uint32_t focal_length_um,
+                                                     uint32_t amplification_q16,
+                                                     uint32_t *amplified_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
+ *
+ * f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
+ * Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_amplified_focal_length_f32(float focal_length_mm,
+                                                      float amplification,
+                                                      float *amplified_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
+ *
+ * f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
+ * Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_amplified_focal_length_f64(double focal_length_mm,
+                                                      double amplification,
+                                                      double *amplified_mm);
+#endif
+
+/**
+ * Gives how much a lens before the focus lengthens the focal length, in Q16.16.
+ *
+ * k = 1 - s' / f, a thin lens of focal length f with the image s' behind it.
+ * Ranges: element_focal_length_um not 0; image_distance_um under f where f is positive.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range, overflow (65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_amplification_fx(int32_t element_focal_length_um,
+                                            uint32_t image_distance_um,
+                                            uint32_t *amplification_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how much a lens before the focus lengthens the focal length, a plain number.
+ *
+ * k = 1 - s' / f, a thin lens of focal length f with the image s' behind it.
+ * Ranges: element_focal_length_mm 2^-32 to 2^32, or -2^32 to -2^-32; image_distance_mm 0 to 2^32, and under
+ * f where f is positive.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_amplification_f32(float element_focal_length_mm,
+                                             float image_distance_mm,
+                                             float *amplification);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how much a lens before the focus lengthens the focal length, a plain number.
+ *
+ * k = 1 - s' / f, a thin lens of focal length f with the image s' behind it.
+ * Ranges: element_focal_length_mm 2^-32 to 2^32, or -2^32 to -2^-32; image_distance_mm 0 to 2^32, and under
+ * f where f is positive.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_amplification_f64(double element_focal_length_mm,
+                                             double image_distance_mm,
+                                             double *amplification);
+#endif
+
+/**
+ * Gives the magnification of a telescope with an eyepiece, in Q16.16.
+ *
+ * M = f / fe.
+ * Ranges: focal_length_um not 0; eyepiece_um not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnification_fx(uint32_t focal_length_um,
+                                            uint32_t eyepiece_um,
+                                            uint32_t *magnification_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the magnification of a telescope with an eyepiece, a plain number.
+ *
+ * M = f / fe.
+ * Ranges: focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnification_f32(float focal_length_mm,
+                                             float eyepiece_mm,
+                                             float *magnification);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the magnification of a telescope with an eyepiece, a plain number.
+ *
+ * M = f / fe.
+ * Ranges: focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnification_f64(double focal_length_mm,
+                                             double eyepiece_mm,
+                                             double *magnification);
+#endif
+
+/**
+ * Gives the diameter of the beam that leaves the eyepiece, in um.
+ *
+ * D fe / f.
+ * Ranges: aperture_um not 0; focal_length_um not 0; eyepiece_um not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (4294967296 um or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_exit_pupil_fx(uint32_t aperture_um,
+                                         uint32_t focal_length_um,
+                                         uint32_t eyepiece_um,
+                                         uint32_t *exit_pupil_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the diameter of the beam that leaves the eyepiece, in mm.
+ *
+ * D fe / f.
+ * Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_exit_pupil_f32(float aperture_mm,
+                                          float focal_length_mm,
+                                          float eyepiece_mm,
+                                          float *exit_pupil_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the diameter of the beam that leaves the eyepiece, in mm.
+ *
+ * D fe / f.
+ * Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_exit_pupil_f64(double aperture_mm,
+                                          double focal_length_mm,
+                                          double eyepiece_mm,
+                                          double *exit_pupil_mm);
+#endif
+
+/**
+ * Gives the eyepiece focal length that gives an exit pupil, in um.
+ *
+ * p f / D.
+ * Ranges: exit_pupil_um not 0; focal_length_um not 0; aperture_um not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (4294967296 um or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_for_exit_pupil_fx(uint32_t exit_pupil_um,
+                                                      uint32_t focal_length_um,
+                                                      uint32_t aperture_um,
+                                                      uint32_t *eyepiece_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the eyepiece focal length that gives an exit pupil, in mm.
+ *
+ * p f / D.
+ * Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_for_exit_pupil_f32(float exit_pupil_mm,
+                                                       float focal_length_mm,
+                                                       float aperture_mm,
+                                                       float *eyepiece_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the eyepiece focal length that gives an exit pupil, in mm.
+ *
+ * p f / D.
+ * Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_for_exit_pupil_f64(double exit_pupil_mm,
+                                                       double focal_length_mm,
+                                                       double aperture_mm,
+                                                       double *eyepiece_mm);
+#endif
+
+/**
+ * Gives the eyepiece focal length that gives a magnification, in um.
+ *
+ * f / M.
+ * Ranges: focal_length_um not 0; magnification_q16 not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (4294967296 um or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_for_magnification_fx(uint32_t focal_length_um,
+                                                         uint32_t magnification_q16,
+                                                         uint32_t *eyepiece_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the eyepiece focal length that gives a magnification, in mm.
+ *
+ * f / M.
+ * Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_for_magnification_f32(float focal_length_mm,
+                                                          float magnification,
+                                                          float *eyepiece_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the eyepiece focal length that gives a magnification, in mm.
+ *
+ * f / M.
+ * Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_for_magnification_f64(double focal_length_mm,
+                                                          double magnification,
+                                                          double *eyepiece_mm);
+#endif
+
+/**
+ * Gives the angle of sky inside the eyepiece's field stop, in mas.
+ *
+ * 2 atan(s / 2f).
+ * Ranges: field_stop_um not 0; focal_length_um not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_from_stop_fx(uint32_t field_stop_um,
+                                                   uint32_t focal_length_um,
+                                                   uint32_t *true_field_mas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the angle of sky inside the eyepiece's field stop, in arcsec.
+ *
+ * 2 atan(s / 2f).
+ * Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_from_stop_f32(float field_stop_mm,
+                                                    float focal_length_mm,
+                                                    float *true_field_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle of sky inside the eyepiece's field stop, in arcsec.
+ *
+ * 2 atan(s / 2f).
+ * Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_from_stop_f64(double field_stop_mm,
+                                                    double focal_length_mm,
+                                                    double *true_field_arcsec);
+#endif
+
+/**
+ * Gives the angle of sky in an eyepiece that keeps straight lines straight, in mas.
+ *
+ * 2 atan(tan(A/2) fe / f).
+ * Ranges: apparent_field_mas not 0, under 648000000 (180 degrees); focal_length_um not 0; eyepiece_um not
+ * 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_rectilinear_fx(uint32_t apparent_field_mas,
+                                                     uint32_t focal_length_um,
+                                                     uint32_t eyepiece_um,
+                                                     uint32_t *true_field_mas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
+ *
+ * 2 atan(tan(A/2) fe / f).
+ * Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
+ * 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_rectilinear_f32(float apparent_field_arcsec,
+                                                      float focal_length_mm,
+                                                      float eyepiece_mm,
+                                                      float *true_field_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
+ *
+ * 2 atan(tan(A/2) fe / f).
+ * Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
+ * 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_rectilinear_f64(double apparent_field_arcsec,
+                                                      double focal_length_mm,
+                                                      double eyepiece_mm,
+                                                      double *true_field_arcsec);
+#endif
+
+/**
+ * Gives the angle of sky in an eyepiece that keeps equal angles equal, in mas.
+ *
+ * A fe / f.
+ * Ranges: apparent_field_mas not 0; focal_length_um not 0; eyepiece_um not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (4294967296 mas or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_equidistant_fx(uint32_t apparent_field_mas,
+                                                     uint32_t focal_length_um,
+                                                     uint32_t eyepiece_um,
+                                                     uint32_t *true_field_mas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
+ *
+ * A fe / f.
+ * Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_equidistant_f32(float apparent_field_arcsec,
+                                                      float focal_length_mm,
+                                                      float eyepiece_mm,
+                                                      float *true_field_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
+ *
+ * A fe / f.
+ * Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_equidistant_f64(double apparent_field_arcsec,
+                                                      double focal_length_mm,
+                                                      double eyepiece_mm,
+                                                      double *true_field_arcsec);
+#endif
+
+/**
+ * Gives the angle of sky along one side of a sensor, in mas.
+ *
+ * 2 atan(p n / 2f).
+ * Ranges: pixel_nm not 0; pixel_count not 0; focal_length_um not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_frame_field_fx(uint32_t pixel_nm,
+                                          uint32_t pixel_count,
+                                          uint32_t focal_length_um,
+                                          uint32_t *frame_mas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the angle of sky along one side of a sensor, in arcsec.
+ *
+ * 2 atan(p n / 2f).
+ * Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_frame_field_f32(float pixel_um,
+                                           uint32_t pixel_count,
+                                           float focal_length_mm,
+                                           float *frame_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle of sky along one side of a sensor, in arcsec.
+ *
+ * 2 atan(p n / 2f).
+ * Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_frame_field_f64(double pixel_um,
+                                           uint32_t pixel_count,
+                                           double focal_length_mm,
+                                           double *frame_arcsec);
+#endif
+
+/**
+ * Gives the angle of sky to a millimetre at the focus, in mas per mm.
+ *
+ * (1 rad) / f.
+ * Ranges: focal_length_um not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (4294967296 mas per mm or more, f under 49 um).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_plate_scale_fx(uint32_t focal_length_um,
+                                          uint32_t *plate_scale_mas_per_mm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
+ *
+ * (1 rad) / f.
+ * Ranges: focal_length_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_plate_scale_f32(float focal_length_mm,
+                                           float *plate_scale_arcsec_per_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
+ *
+ * (1 rad) / f.
+ * Ranges: focal_length_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_plate_scale_f64(double focal_length_mm,
+                                           double *plate_scale_arcsec_per_mm);
+#endif
+
+/**
+ * Gives the angle of sky to a pixel, in uas.
+ *
+ * (1 rad) p / f.
+ * Ranges: pixel_nm not 0; focal_length_um not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (4294967296 uas or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_pixel_scale_fx(uint32_t pixel_nm,
+                                          uint32_t focal_length_um,
+                                          uint32_t *pixel_scale_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the angle of sky to a pixel, in arcsec.
+ *
+ * (1 rad) p / f.
+ * Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_pixel_scale_f32(float pixel_um,
+                                           float focal_length_mm,
+                                           float *pixel_scale_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle of sky to a pixel, in arcsec.
+ *
+ * (1 rad) p / f.
+ * Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_pixel_scale_f64(double pixel_um,
+                                           double focal_length_mm,
+                                           double *pixel_scale_arcsec);
+#endif
+
+/**
+ * Gives the focal length that spreads a field over a width at the focus, in um.
+ *
+ * x / (2 tan(t/2)).
+ * Ranges: extent_um not 0; field_mas not 0, under 648000000 (180 degrees).
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero, out of range, overflow (4294967296 um or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_length_for_field_fx(uint32_t extent_um,
+                                                     uint32_t field_mas,
+                                                     uint32_t *focal_length_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the focal length that spreads a field over a width at the focus, in mm.
+ *
+ * x / (2 tan(t/2)).
+ * Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_length_for_field_f32(float extent_mm,
+                                                      float field_arcsec,
+                                                      float *focal_length_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the focal length that spreads a field over a width at the focus, in mm.
+ *
+ * x / (2 tan(t/2)).
+ * Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_length_for_field_f64(double extent_mm,
+                                                      double field_arcsec,
+                                                      double *focal_length_mm);
+#endif
+
+/**
+ * Gives how many frames in a row cover a target.
+ *
+ * the smallest n with n frame - (n - 1) overlap >= target, at least 1.
+ * Ranges: target_mas not 0; frame_mas not 0; overlap_mas under the frame.
+ * Error: at most 0, it is exact.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_tiles_fx(uint32_t target_mas,
+                                    uint32_t frame_mas,
+                                    uint32_t overlap_mas,
+                                    uint32_t *count);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many frames in a row cover a target.
+ *
+ * the smallest n with n frame - (n - 1) overlap >= target, at least 1.
+ * Ranges: target_arcsec 2^-32 to 2^32; frame_arcsec 2^-32 to 2^32; overlap_arcsec 0 to under the frame.
+ * Error: at most 0, it is exact.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_tiles_f32(float target_arcsec,
+                                     float frame_arcsec,
+                                     float overlap_arcsec,
+                                     uint32_t *count);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many frames in a row cover a target.
+ *
+ * the smallest n with n frame - (n - 1) overlap >= target, at least 1.
+ * Ranges: target_arcsec 2^-32 to 2^32; frame_arcsec 2^-32 to 2^32; overlap_arcsec 0 to under the frame.
+ * Error: at most 0, it is exact.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_tiles_f64(double target_arcsec,
+                                     double frame_arcsec,
+                                     double overlap_arcsec,
+                                     uint32_t *count);
+#endif
+
+#ifdef __cplusplus
+} /* extern "C" */
+#endif
+
+#endif /* FIELDSTOP_H */
