@@ -5,6 +5,7 @@
 //! | module | what it holds |
 //! |---|---|
 //! | `capi` | the C interface (feature `capi`) |
+//! | [`setup`] | telescope, eyepiece, camera, observer: all readouts of one screen |
 //! | [`optics`] | the formulas |
 //! | [`convert`] | conversions between the fixed units |
 //! | `math` | integer and float kernels |
