@@ -354,7 +354,7 @@ pub unsafe extern "C" fn fieldstop_text_magnitude(
 /// angle_mas / 1000 seconds of arc, to nearest in the last place shown, halves up, carried through: 59'59.6" in whole
 /// seconds is one degree. By size is decided by the rounded angle; the decimals then are those of an angle under one
 /// minute, larger ones have none.
-/// Ranges: form one of FIELDSTOP_ANGLE_...; decimals 0 to 3, 0 to 4 for decimal degrees; width 0 (as long as it is) or
+/// Ranges: form one of FIELDSTOP_ANGLE_...; decimals 0 to 3, with minutes 0 to 2; width 0 (as long as it is) or
 /// the characters to fill, right-aligned.
 /// Statuses: null pointer, out of range (form, decimals), no room.
 #[must_use]
