@@ -12,7 +12,7 @@ pub(super) fn split_ten(n: u32) -> (u32, u8) {
     // The high half gives most of the quotient, never too much: 65535 / 10 for each 65536.
     let most = ((n >> 16) * 52_428) >> 3;
     // What is left is under 2^17 + 6. Its half times 2^18 / 5, rounded up, is exact.
-    let quotient = most + (((n - most * 10) >> 1) * 52_429 >> 18);
+    let quotient = most + ((((n - most * 10) >> 1) * 52_429) >> 18);
     (quotient, (n - quotient * 10) as u8)
 }
 
@@ -21,7 +21,7 @@ pub(super) fn split_ten(n: u32) -> (u32, u8) {
 pub(super) fn split_sixty(n: u32) -> (u32, u32) {
     // The same: 65535 / 60 for each 65536, then a quarter times 2^19 / 15.
     let most = ((n >> 16) * 8738) >> 3;
-    let quotient = most + (((n - most * 60) >> 2) * 34_953 >> 19);
+    let quotient = most + ((((n - most * 60) >> 2) * 34_953) >> 19);
     (quotient, n - quotient * 60)
 }
 

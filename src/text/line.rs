@@ -132,7 +132,7 @@ impl Plan {
 fn put_head(mut label: impl Iterator<Item = u8>, room: usize, mark: Option<u8>, head: &mut [u8]) {
     let Some((places, rest)) = head.split_at_mut_checked(room) else { return };
     let mut places = places.iter_mut();
-    while let Some(place) = places.next() {
+    for place in places.by_ref() {
         let Some(byte) = label.next() else {
             *place = b' ';
             break;
