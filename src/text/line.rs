@@ -81,12 +81,13 @@ impl Plan {
         let before = usize::from(self.mark.is_some());
         let most = self.columns - before;
         let mut value = self.value;
-        let mut written = value.write_right(style, most, out.get_mut(before..).unwrap_or(&mut []));
+        let width = most as u8; // not more than columns
+        let mut written = value.write_right(style, width, out.get_mut(before..).unwrap_or(&mut []));
         if written.is_err() {
             value = value.without_unit();
-            written = value.write_right(style, most, out.get_mut(before..).unwrap_or(&mut []));
+            written = value.write_right(style, width, out.get_mut(before..).unwrap_or(&mut []));
         }
-        let (blanks, _) = written?;
+        let blanks = usize::from(written?.blanks);
         // What the value leaves of the line, and at most what its field leaves.
         let room = blanks.min(most.saturating_sub(self.field));
         let Some(head) = out.get_mut(..blanks + before) else { return Err(NO_ROOM) };

@@ -11,6 +11,13 @@ pub(super) const NO_ROOM: Error = Error::new(Cause::NoRoom, 0);
 /// The longest value in bytes: ten digits, mark, sign, three texts.
 pub(super) const LONGEST: usize = 36;
 
+/// Places left for blanks, and bytes of the value behind them.
+#[derive(Clone, Copy)]
+pub(super) struct Written {
+    pub(super) blanks: u8,
+    bytes: u8,
+}
+
 impl Value {
     /// Writes the value into `out`, right-aligned to `width` characters (0: as long as it is), and tells its length
     /// in bytes.
@@ -19,20 +26,16 @@ impl Value {
     ///
     /// What is longer than `width` or `out` is refused with [`Cause::NoRoom`], too many decimals with
     /// [`Cause::OutOfRange`]; `out` is then as it was, and so it always is behind the length told.
+    #[inline]
     pub fn write(self, style: &TextStyle, width: u8, out: &mut [u8]) -> Result<usize, Error> {
-        let (blanks, length) = self.write_right(style, width.into(), out)?;
-        blank(out.iter_mut().take(blanks));
-        Ok(length)
+        let written = self.write_right(style, width, out)?;
+        blank(out.iter_mut().take(written.blanks.into()));
+        Ok(usize::from(written.blanks) + usize::from(written.bytes))
     }
 
-    /// The same without the blanks; tells how many these are, and the length with them.
+    /// The same without the blanks.
     #[inline(never)]
-    pub(super) fn write_right(
-        self,
-        style: &TextStyle,
-        width: usize,
-        out: &mut [u8],
-    ) -> Result<(usize, usize), Error> {
+    pub(super) fn write_right(self, style: &TextStyle, width: u8, out: &mut [u8]) -> Result<Written, Error> {
         let form = self.form;
         if let Some(position) = form.refused() {
             return Err(Error::new(Cause::OutOfRange, position));
@@ -49,10 +52,9 @@ impl Value {
         }
         let continued = if style.utf8 == 0 { 0 } else { self.continued(style) };
         let characters = bytes - continued;
-        let width = if width == 0 { characters } else { width };
+        let width = if width == 0 { characters } else { width.into() };
         let Some(blanks) = width.checked_sub(characters) else { return Err(NO_ROOM) };
         let Some(out) = out.get_mut(..blanks + bytes) else { return Err(NO_ROOM) };
-        let length = out.len();
 
         let mut places = out.iter_mut();
         // There always is a place: all was measured.
@@ -96,7 +98,7 @@ impl Value {
         if in_front {
             text.iter().rev().for_each(|&byte| put(byte));
         }
-        Ok((blanks, length))
+        Ok(Written { blanks: blanks as u8, bytes: bytes as u8 })
     }
 }
 
