@@ -6,6 +6,7 @@
 //! |---|---|
 //! | `capi` | the C interface (feature `capi`) |
 //! | [`setup`] | telescope, eyepiece, camera, observer: all readouts of one screen |
+//! | [`text`] | a quantity as display characters |
 //! | [`optics`] | the formulas |
 //! | [`convert`] | conversions between the fixed units |
 //! | `math` | integer and float kernels |

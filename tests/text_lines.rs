@@ -209,10 +209,12 @@ fn figures_by_size() {
     assert_eq!(line(VisualReadout { magnification_q16: 6_550_323, ..base }, 0), "Magnification  99.9x");
     assert_eq!(line(VisualReadout { magnification_q16: 6_550_324, ..base }, 0), "Magnification   100x");
     assert_eq!(line(VisualReadout { magnification_q16: u32::MAX, ..base }, 0), "Magnification 65536x");
-    assert_eq!(line(VisualReadout { exit_pupil_um: 994, ..base }, 2), "Exit pupil   0.99 mm");
-    assert_eq!(line(VisualReadout { exit_pupil_um: 995, ..base }, 2), "Exit pupil    1.0 mm");
+    assert_eq!(line(VisualReadout { exit_pupil_um: 949, ..base }, 2), "Exit pupil    0.9 mm");
+    assert_eq!(line(VisualReadout { exit_pupil_um: 950, ..base }, 2), "Exit pupil    1.0 mm");
     // Longer than its field: the label gives way, never the value.
-    assert_eq!(line(VisualReadout { exit_pupil_um: u32::MAX, ..base }, 2), "Exit pu 4294967.3 mm");
+    assert_eq!(line(VisualReadout { exit_pupil_um: 99_949, ..base }, 2), "Exit pupil   99.9 mm");
+    assert_eq!(line(VisualReadout { exit_pupil_um: 99_950, ..base }, 2), "Exit pupil    100 mm");
+    assert_eq!(line(VisualReadout { exit_pupil_um: u32::MAX, ..base }, 2), "Exit pupi 4294967 mm");
     assert_eq!(line(VisualReadout { true_field_mas: u32::MAX, ..base }, 1), "True field  1193d03'");
     let cut = VisualReadout { limiting_magnitude_mmag: i32::MIN, ..base };
     assert_eq!(line(cut, 4), "Stars -2147483.6 mag");
@@ -222,10 +224,16 @@ fn figures_by_size() {
 fn a_value_longer_than_the_line_loses_its_unit_and_then_is_refused() {
     let readout = CameraReadout { pixel_scale_uas: 12_340_000, ..camera() };
     let page = camera_page(&readout, &CAMERA_LABELS_SHORT, &TextStyle::ASCII, 8);
-    assert_eq!(page[4..6], ["Scale  !", "   12.34"]);
-    let readout = VisualReadout { exit_pupil_um: u32::MAX, ..visual() };
+    assert_eq!(page[4..6], ["Scale  !", "12.3\"/px"]);
+    let readout = CameraReadout { pixel_scale_uas: u32::MAX, ..camera() };
+    let page = camera_page(&readout, &CAMERA_LABELS_SHORT, &TextStyle::ASCII, 8);
+    assert_eq!(page[4..6], ["Scale  !", "4295\"/px"]);
+    let readout = CameraReadout { plate_scale_mas_per_mm: u32::MAX, ..camera() };
+    let page = camera_page(&readout, &CAMERA_LABELS_SHORT, &TextStyle::ASCII, 8);
+    assert_eq!(page[16..18], ["Plate   ", " 4294967"]);
+    let readout = VisualReadout { limiting_magnitude_mmag: i32::MIN, ..visual() };
     let mut out = [0xaa; 8];
-    let error = visual_line(&readout, &VISUAL_LABELS_SHORT, &TextStyle::ASCII, 8, 5, &mut out).unwrap_err();
+    let error = visual_line(&readout, &VISUAL_LABELS_SHORT, &TextStyle::ASCII, 8, 9, &mut out).unwrap_err();
     assert_eq!((error.cause(), out), (Cause::NoRoom, [0xaa; 8]));
 }
 

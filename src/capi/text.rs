@@ -354,7 +354,7 @@ pub unsafe extern "C" fn fieldstop_text_magnitude(
 /// angle_mas / 1000 seconds of arc, to nearest in the last place shown, halves up, carried through: 59'59.6" in whole
 /// seconds is one degree. By size is decided by the rounded angle; the decimals then are those of an angle under one
 /// minute, larger ones have none.
-/// Ranges: form one of FIELDSTOP_ANGLE_...; decimals 0 to 3, 0 to 4 for decimal degrees; width 0 (as long as it is) or
+/// Ranges: form one of FIELDSTOP_ANGLE_...; decimals 0 to 3, with minutes 0 to 2; width 0 (as long as it is) or
 /// the characters to fill, right-aligned.
 /// Statuses: null pointer, out of range (form, decimals), no room.
 #[must_use]
@@ -444,11 +444,11 @@ pub unsafe extern "C" fn fieldstop_text_visual_line(
             let number = row_of(line, columns);
             let row = VisualRow::from_number(number);
             let label = match row {
-                Some(_) => Label(*labels.add(number.into())),
+                Some(_) => Label::new(labels, number),
                 None => Label(c"".as_ptr()),
             };
             let row = row.map(|row| visual_row(&*readout, row));
-            write_line(row.as_ref(), label, style, columns, line, out)
+            write_line(row, label, style, columns, line, out)
         })
     }
 }
@@ -583,11 +583,11 @@ pub unsafe extern "C" fn fieldstop_text_camera_line(
             let number = row_of(line, columns);
             let row = CameraRow::from_number(number);
             let label = match row {
-                Some(_) => Label(*labels.add(number.into())),
+                Some(_) => Label::new(labels, number),
                 None => Label(c"".as_ptr()),
             };
             let row = row.map(|row| camera_row(&*readout, row));
-            write_line(row.as_ref(), label, style, columns, line, out)
+            write_line(row, label, style, columns, line, out)
         })
     }
 }
@@ -732,17 +732,26 @@ impl<const N: usize> Labels<N> {
     }
 }
 
-/// The bytes of a label up to its zero byte; none for a null pointer.
+/// The bytes of a label up to its zero byte.
 #[derive(Clone)]
 struct Label(*const c_char);
+
+impl Label {
+    /// The label with this number; none for a null pointer.
+    ///
+    /// # Safety
+    /// `labels` has one with this number, with a zero byte at its end, or a null pointer.
+    unsafe fn new(labels: *const *const c_char, number: u8) -> Label {
+        // SAFETY: the caller's promise.
+        let label = unsafe { *labels.add(number.into()) };
+        Label(if label.is_null() { c"".as_ptr() } else { label })
+    }
+}
 
 impl Iterator for Label {
     type Item = u8;
 
     fn next(&mut self) -> Option<u8> {
-        if self.0.is_null() {
-            return None;
-        }
         // SAFETY: the caller promises a zero byte at the end, and it is not passed.
         let byte = unsafe { *self.0 } as u8;
         if byte == 0 {

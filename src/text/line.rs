@@ -2,7 +2,7 @@
 
 use super::style::{TextStyle, begins_character};
 use super::value::Value;
-use super::write::NO_ROOM;
+use super::write::{LONGEST, NO_ROOM, blank};
 use crate::status::{Cause, Error};
 
 /// A value with its place on a page.
@@ -36,7 +36,7 @@ pub(crate) const fn row_of(line: u8, columns: u8) -> u8 {
 /// label and the mark, or, for an odd `line`, the value. A value longer than its field takes room from the label; one
 /// longer than the line loses its unit; one that is still too long is refused.
 pub(crate) fn write_line(
-    row: Option<&Row>,
+    row: Option<Row>,
     label: impl Iterator<Item = u8> + Clone,
     style: &TextStyle,
     columns: u8,
@@ -46,55 +46,124 @@ pub(crate) fn write_line(
     if columns < NARROWEST {
         return Err(Error::new(Cause::OutOfRange, 4));
     }
-    let narrow = columns < ONE_LINE;
-    let alone = narrow && line % 2 == 1; // the value has the line for itself: no label, no mark
-    let mut room = usize::from(columns) - usize::from(!alone);
-    let mut value = None;
-    if let Some(row) = row.filter(|_| alone || !narrow) {
-        let mut shown = row.value;
-        let mut size = shown.measure(style)?;
-        if size.characters > room {
-            shown = shown.without_unit();
-            size = shown.measure(style)?;
+    let mut plan = Plan { columns: columns.into(), value: Value::BLANK, field: 0, mark: Some(b' ') };
+    if let Some(row) = row {
+        if row.fact {
+            plan.mark = Some(style.fact_mark);
         }
-        let field = if alone { room } else { size.characters.max(row.field.into()) };
-        let blanks = field.checked_sub(size.characters).ok_or(NO_ROOM)?;
-        room = room.checked_sub(field).ok_or(NO_ROOM)?;
-        value = Some((shown, blanks + size.bytes));
+        if columns >= ONE_LINE {
+            (plan.value, plan.field) = (row.value, row.field.into());
+        } else if line % 2 == 1 {
+            // The value has the line for itself.
+            (plan.value, plan.field, plan.mark) = (row.value, columns.into(), None);
+        }
     }
-
-    let (label_bytes, head) = if style.utf8 == 0 { (room, room) } else { cut(label.clone(), room) };
-    let out =
-        out.get_mut(..head + usize::from(!alone) + value.map_or(0, |(_, bytes)| bytes)).ok_or(NO_ROOM)?;
-    let length = out.len();
-    let (head, mut tail) = out.split_at_mut_checked(head).ok_or(NO_ROOM)?;
-    let mut label = label.take(label_bytes);
-    for place in head {
-        *place = label.next().unwrap_or(b' ');
-    }
-    if !alone && let Some(mark) = tail.split_off_first_mut() {
-        *mark = if row.is_some_and(|row| row.fact) { style.fact_mark } else { b' ' };
-    }
-    if let Some((value, _)) = value {
-        value.fill(style, tail);
-    }
-    Ok(length)
+    if style.utf8 == 0 { plan.write(label, style, out) } else { plan.write_utf8(label, style, out) }
 }
 
-/// Bytes of a UTF-8 label as far as it has room, and the bytes that fill this room.
+struct Plan {
+    columns: usize,
+    value: Value,
+    field: usize,
+    /// The character before the field, if it has a place.
+    mark: Option<u8>,
+}
+
+impl Plan {
+    #[inline]
+    fn write(
+        self,
+        label: impl Iterator<Item = u8>,
+        style: &TextStyle,
+        out: &mut [u8],
+    ) -> Result<usize, Error> {
+        let out = out.get_mut(..self.columns).ok_or(NO_ROOM)?;
+        let before = usize::from(self.mark.is_some());
+        let most = self.columns - before;
+        let mut value = self.value;
+        let width = most as u8; // not more than columns
+        let mut written = value.write_right(style, width, out.get_mut(before..).unwrap_or(&mut []));
+        if written.is_err() {
+            value = value.without_unit();
+            written = value.write_right(style, width, out.get_mut(before..).unwrap_or(&mut []));
+        }
+        let blanks = usize::from(written?.blanks);
+        // What the value leaves of the line, and at most what its field leaves.
+        let room = blanks.min(most.saturating_sub(self.field));
+        let Some(head) = out.get_mut(..blanks + before) else { return Err(NO_ROOM) };
+        put_head(label, room, self.mark, head);
+        Ok(self.columns)
+    }
+
+    #[inline(never)]
+    fn write_utf8(
+        self,
+        label: impl Iterator<Item = u8> + Clone,
+        style: &TextStyle,
+        out: &mut [u8],
+    ) -> Result<usize, Error> {
+        let most = self.columns - usize::from(self.mark.is_some());
+        let mut text = [0; LONGEST];
+        let mut compose = |value: Value| {
+            let length = value.write(style, 0, &mut text)?;
+            let bytes = text.get(..length).unwrap_or(&[]);
+            Ok((length, bytes.len() - style.continued(bytes)))
+        };
+        let (mut length, mut characters) = compose(self.value)?;
+        if characters > most {
+            (length, characters) = compose(self.value.without_unit())?;
+        }
+        let field = self.field.max(characters);
+        let room = most.checked_sub(field).ok_or(NO_ROOM)?;
+        let label_bytes = cut(label.clone(), room);
+        let label_end = label_bytes.0 + (room - label_bytes.1);
+        let head = label_end + (self.columns - most) + (field - characters);
+        let out = out.get_mut(..head + length).ok_or(NO_ROOM)?;
+        let Some((head, tail)) = out.split_at_mut_checked(head) else { return Err(NO_ROOM) };
+        put_head(label.take(label_bytes.0), label_end, self.mark, head);
+        for (place, byte) in tail.iter_mut().zip(text) {
+            *place = byte;
+        }
+        Ok(head.len() + length)
+    }
+}
+
+/// Writes what stands before a value: a label in so many places, with blanks behind it, the mark, blanks.
+#[inline]
+fn put_head(mut label: impl Iterator<Item = u8>, room: usize, mark: Option<u8>, head: &mut [u8]) {
+    let Some((places, rest)) = head.split_at_mut_checked(room) else { return };
+    let mut places = places.iter_mut();
+    for place in places.by_ref() {
+        let Some(byte) = label.next() else {
+            *place = b' ';
+            break;
+        };
+        *place = byte;
+    }
+    blank(places);
+    let mut rest = rest.iter_mut();
+    if let Some(mark) = mark
+        && let Some(place) = rest.next()
+    {
+        *place = mark;
+    }
+    blank(rest);
+}
+
+/// Bytes and characters of a UTF-8 label as far as it has room.
 fn cut(label: impl Iterator<Item = u8>, room: usize) -> (usize, usize) {
     let mut bytes = 0;
-    let mut left = room;
+    let mut characters = 0;
     for byte in label {
         if begins_character(byte) {
-            if left == 0 {
+            if characters == room {
                 break;
             }
-            left -= 1;
+            characters += 1;
         }
         bytes += 1;
     }
-    (bytes, bytes + left)
+    (bytes, characters)
 }
 
 /// A part of a line, in characters.
@@ -119,14 +188,15 @@ pub fn changed(shown: &[u8], line: &[u8], style: &TextStyle) -> Span {
         start -= 1;
     }
     let (shown_rest, rest) = (shown.get(start..).unwrap_or(&[]), line.get(start..).unwrap_or(&[]));
+    let characters = |text: &[u8]| text.len() - style.continued(text);
     let mut end = rest.len();
-    if style.characters(shown_rest) == style.characters(rest) {
+    if characters(shown_rest) == characters(rest) {
         let alike = shown_rest.iter().rev().zip(rest.iter().rev()).take_while(|(a, b)| a == b).count();
         end = end.saturating_sub(alike);
         while end < rest.len() && !begins(rest, end) {
             end += 1;
         }
     }
-    let count = |text: Option<&[u8]>| style.characters(text.unwrap_or(&[])) as u16;
+    let count = |text: Option<&[u8]>| characters(text.unwrap_or(&[])) as u16;
     Span { first: count(line.get(..start)), count: count(rest.get(..end)) }
 }

@@ -2,10 +2,10 @@
 
 use super::line::{Row, row_of, write_line};
 use super::style::{TextStyle, Unit};
-use super::value::{AngleForm, Value};
+use super::value::Value;
 use crate::setup::{CameraReadout, VisualReadout};
 use crate::status::Error;
-use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Q16};
+use crate::units::{Milliarcseconds, Millimagnitudes, Q16};
 
 macro_rules! rows {
     ($(#[$doc:meta])* $name:ident, $count:literal: $($(#[$row_doc:meta])* $row:ident = $number:literal,)*) => {
@@ -95,117 +95,141 @@ rows! {
     FineSampling = 10,
 }
 
+/// How a row is shown.
+#[derive(Clone, Copy)]
+struct Plan {
+    /// Number of the member, which is the bit in `available`; for a fact, of the one that it is judged by.
+    member: u8,
+    /// Decimal places of the member's unit, or one of the codes below.
+    scale: u8,
+    /// At most, while no more than three figures come of it; for a fact, the second member that it is judged by.
+    decimals: u8,
+    unit: Unit,
+    field: u8,
+    /// Bits of `facts` that concern it.
+    facts: u8,
+}
+
+const Q16_RATIO: u8 = 16;
+const Q16_PERCENT: u8 = Q16_RATIO + 2;
+const ANGLE: u8 = 32;
+const MAGNITUDE: u8 = 33;
+const FACT: u8 = 34;
+/// No member has this bit.
+const NEVER: u8 = 31;
+
+const fn plan(member: u8, scale: u8, decimals: u8, unit: Unit, field: u8, facts: u32) -> Plan {
+    Plan { member, scale, decimals, unit, field, facts: facts as u8 }
+}
+
+const fn fact(member: u8, second: u8, fact: u32) -> Plan {
+    plan(member, FACT, second, Unit::None, 3, fact)
+}
+
+static VISUAL: [Plan; VisualRow::ALL.len()] = [
+    plan(2, Q16_RATIO, 1, Unit::Times, 6, VisualReadout::FACT_EMPTY_MAGNIFICATION),
+    plan(4, ANGLE, 1, Unit::None, 7, VisualReadout::FACT_FIELD_FROM_APPARENT),
+    plan(3, 3, 1, Unit::Millimetre, 8, VisualReadout::FACT_WIDE_EXIT_PUPIL),
+    plan(5, 6, 2, Unit::Second, 8, VisualReadout::FACT_SEEING_LIMITED),
+    plan(10, MAGNITUDE, 1, Unit::Magnitude, 8, 0),
+    plan(11, Q16_PERCENT, 0, Unit::Percent, 5, 0),
+    plan(1, Q16_RATIO, 1, Unit::FocalRatio, 7, 0),
+    plan(0, 3, 0, Unit::Millimetre, 7, 0),
+    plan(7, Q16_RATIO, 1, Unit::Times, 6, 0),
+    plan(8, Q16_RATIO, 1, Unit::Times, 6, 0),
+    plan(6, 6, 2, Unit::Second, 8, 0),
+    plan(9, 3, 0, Unit::Millimetre, 6, 0),
+    fact(3, 7, VisualReadout::FACT_WIDE_EXIT_PUPIL),
+    fact(2, 8, VisualReadout::FACT_EMPTY_MAGNIFICATION),
+    fact(4, 4, VisualReadout::FACT_FIELD_FROM_APPARENT),
+    fact(NEVER, NEVER, VisualReadout::FACT_SEEING_LIMITED),
+];
+
+const SAMPLING: u32 = CameraReadout::FACT_COARSE_SAMPLING | CameraReadout::FACT_FINE_SAMPLING;
+
+static CAMERA: [Plan; CameraRow::ALL.len()] = [
+    plan(3, ANGLE, 1, Unit::None, 7, 0),
+    plan(4, ANGLE, 1, Unit::None, 7, 0),
+    plan(5, 6, 2, Unit::SecondPerPixel, 8, SAMPLING),
+    plan(7, 6, 2, Unit::Second, 8, 0),
+    plan(8, Q16_RATIO, 1, Unit::Pixel, 8, SAMPLING),
+    plan(1, Q16_RATIO, 1, Unit::FocalRatio, 7, 0),
+    plan(2, Q16_RATIO, 1, Unit::None, 7, 0),
+    plan(0, 3, 0, Unit::Millimetre, 7, 0),
+    plan(6, 3, 1, Unit::SecondPerMillimetre, 8, 0),
+    fact(8, 8, CameraReadout::FACT_COARSE_SAMPLING),
+    fact(8, 8, CameraReadout::FACT_FINE_SAMPLING),
+];
+
 /// A row of the visual pages.
 pub fn visual_row(readout: &VisualReadout, row: VisualRow) -> Row {
-    use VisualReadout as R;
-    let shown = |bit, value, field| shown(readout.available & bit != 0, value, field);
-    let fact = |bit, needs| fact(readout.facts & bit != 0, readout.available & needs == needs);
-    let marked = |row: Row, bit| Row { fact: readout.facts & bit != 0, ..row };
-    match row {
-        VisualRow::Magnification => marked(
-            shown(R::MAGNIFICATION, magnification(readout.magnification_q16), 6),
-            R::FACT_EMPTY_MAGNIFICATION,
-        ),
-        VisualRow::TrueField => marked(
-            shown(R::TRUE_FIELD, field_of_view(readout.true_field_mas), 7),
-            R::FACT_FIELD_FROM_APPARENT,
-        ),
-        VisualRow::ExitPupil => {
-            let decimals = if readout.exit_pupil_um < 995 { 2 } else { 1 };
-            let value = Value::millimetres(Micrometres(readout.exit_pupil_um), decimals);
-            marked(shown(R::EXIT_PUPIL, value, 8), R::FACT_WIDE_EXIT_PUPIL)
-        }
-        VisualRow::Resolution => {
-            marked(shown(R::RESOLUTION, small_angle(readout.resolution_uas), 8), R::FACT_SEEING_LIMITED)
-        }
-        VisualRow::FaintestStar => {
-            let value = Value::magnitude(Millimagnitudes(readout.limiting_magnitude_mmag), 1);
-            shown(R::LIMITING_MAGNITUDE, value, 8)
-        }
-        VisualRow::SurfaceBrightness => {
-            shown(R::SURFACE_BRIGHTNESS, Value::percent(Q16(readout.surface_brightness_q16), 0), 5)
-        }
-        VisualRow::FocalRatio => {
-            shown(R::FOCAL_RATIO, Value::focal_ratio(Q16(readout.focal_ratio_q16), 1), 7)
-        }
-        VisualRow::FocalLength => shown(R::FOCAL_LENGTH, whole_millimetres(readout.focal_length_um), 7),
-        VisualRow::LowestMagnification => {
-            shown(R::LOWEST_MAGNIFICATION, magnification(readout.lowest_magnification_q16), 6)
-        }
-        VisualRow::ResolvingMagnification => {
-            shown(R::RESOLVING_MAGNIFICATION, magnification(readout.resolving_magnification_q16), 6)
-        }
-        VisualRow::DawesLimit => shown(R::DAWES_LIMIT, small_angle(readout.dawes_limit_uas), 8),
-        VisualRow::EffectiveAperture => {
-            shown(R::EFFECTIVE_APERTURE, whole_millimetres(readout.effective_aperture_um), 6)
-        }
-        VisualRow::WideExitPupil => fact(R::FACT_WIDE_EXIT_PUPIL, R::EXIT_PUPIL | R::LOWEST_MAGNIFICATION),
-        VisualRow::EmptyMagnification => {
-            fact(R::FACT_EMPTY_MAGNIFICATION, R::MAGNIFICATION | R::RESOLVING_MAGNIFICATION)
-        }
-        VisualRow::FieldFromApparent => fact(R::FACT_FIELD_FROM_APPARENT, R::TRUE_FIELD),
-        VisualRow::SeeingLimited => fact(R::FACT_SEEING_LIMITED, u32::MAX),
-    }
+    let plan = &VISUAL[row as usize];
+    let member = match plan.member {
+        0 => readout.focal_length_um,
+        1 => readout.focal_ratio_q16,
+        2 => readout.magnification_q16,
+        3 => readout.exit_pupil_um,
+        4 => readout.true_field_mas,
+        5 => readout.resolution_uas,
+        6 => readout.dawes_limit_uas,
+        7 => readout.lowest_magnification_q16,
+        8 => readout.resolving_magnification_q16,
+        9 => readout.effective_aperture_um,
+        10 => readout.limiting_magnitude_mmag as u32,
+        _ => readout.surface_brightness_q16,
+    };
+    plan.row(readout.available, readout.facts, member)
 }
 
 /// A row of the camera pages.
 pub fn camera_row(readout: &CameraReadout, row: CameraRow) -> Row {
-    use CameraReadout as R;
-    let shown = |bit, value, field| shown(readout.available & bit != 0, value, field);
-    let fact = |bit, needs| fact(readout.facts & bit != 0, readout.available & needs == needs);
-    let sampling = readout.facts & (R::FACT_COARSE_SAMPLING | R::FACT_FINE_SAMPLING) != 0;
-    match row {
-        CameraRow::FrameWidth => shown(R::FRAME_WIDTH, field_of_view(readout.frame_width_mas), 7),
-        CameraRow::FrameHeight => shown(R::FRAME_HEIGHT, field_of_view(readout.frame_height_mas), 7),
-        CameraRow::PixelScale => {
-            let value = Value::decimal(readout.pixel_scale_uas, 6, 2, Unit::SecondPerPixel);
-            Row { fact: sampling, ..shown(R::PIXEL_SCALE, value, 8) }
-        }
-        CameraRow::StarWidth => shown(R::STAR_FWHM, small_angle(readout.star_fwhm_uas), 8),
-        CameraRow::StarPixels => {
-            let value = Value::from_q16(Q16(readout.pixels_per_fwhm_q16), 0, 1, Unit::Pixel);
-            Row { fact: sampling, ..shown(R::PIXELS_PER_FWHM, value, 8) }
-        }
-        CameraRow::FocalRatio => {
-            shown(R::FOCAL_RATIO, Value::focal_ratio(Q16(readout.focal_ratio_q16), 1), 7)
-        }
-        CameraRow::TNumber => shown(R::T_NUMBER, Value::ratio(Q16(readout.t_number_q16), 1), 7),
-        CameraRow::FocalLength => shown(R::FOCAL_LENGTH, whole_millimetres(readout.focal_length_um), 7),
-        CameraRow::PlateScale => {
-            let decimals = if readout.plate_scale_mas_per_mm < 99_950 { 1 } else { 0 };
-            let value =
-                Value::decimal(readout.plate_scale_mas_per_mm, 3, decimals, Unit::SecondPerMillimetre);
-            shown(R::PLATE_SCALE, value, 8)
-        }
-        CameraRow::CoarseSampling => fact(R::FACT_COARSE_SAMPLING, R::PIXELS_PER_FWHM),
-        CameraRow::FineSampling => fact(R::FACT_FINE_SAMPLING, R::PIXELS_PER_FWHM),
+    let plan = &CAMERA[row as usize];
+    let member = match plan.member {
+        0 => readout.focal_length_um,
+        1 => readout.focal_ratio_q16,
+        2 => readout.t_number_q16,
+        3 => readout.frame_width_mas,
+        4 => readout.frame_height_mas,
+        5 => readout.pixel_scale_uas,
+        6 => readout.plate_scale_mas_per_mm,
+        7 => readout.star_fwhm_uas,
+        _ => readout.pixels_per_fwhm_q16,
+    };
+    plan.row(readout.available, readout.facts, member)
+}
+
+impl Plan {
+    fn row(&self, available: u32, facts: u32, member: u32) -> Row {
+        let holds = facts & u32::from(self.facts) != 0;
+        let known = |member: u8| available >> (member & 31) & 1 != 0;
+        let (value, fact) = if self.scale == FACT {
+            let judged = holds || known(self.member) && known(self.decimals);
+            (if judged { Value::answer(holds) } else { Value::NOT_AVAILABLE }, false)
+        } else {
+            (if known(self.member) { self.value(member) } else { Value::NOT_AVAILABLE }, holds)
+        };
+        Row { value, field: self.field, fact }
     }
-}
 
-fn shown(available: bool, value: Value, field: u8) -> Row {
-    Row { value: if available { value } else { Value::NOT_AVAILABLE }, field, fact: false }
-}
-
-fn fact(holds: bool, judged: bool) -> Row {
-    shown(holds || judged, Value::answer(holds), 3)
-}
-
-/// Three figures at least, so no decimal from 100.
-fn magnification(q16: u32) -> Value {
-    // 99.95 * 65536 = 6550323.2
-    Value::magnification(Q16(q16), if q16 <= 6_550_323 { 1 } else { 0 })
-}
-
-fn field_of_view(mas: u32) -> Value {
-    Value::angle(Milliarcseconds(mas), AngleForm::BySize, 1)
-}
-
-fn small_angle(uas: u32) -> Value {
-    Value::arcseconds(Microarcseconds(uas), 2)
-}
-
-fn whole_millimetres(um: u32) -> Value {
-    Value::millimetres(Micrometres(um), 0)
+    fn value(&self, member: u32) -> Value {
+        if self.scale == ANGLE {
+            return Value::angle_by_size(Milliarcseconds(member), self.decimals);
+        }
+        if self.scale == MAGNITUDE {
+            return Value::magnitude(Millimagnitudes(member as i32), self.decimals);
+        }
+        let mut decimals = self.decimals;
+        loop {
+            let value = match self.scale.checked_sub(Q16_RATIO) {
+                Some(shift) => Value::from_q16(Q16(member), shift, decimals, self.unit),
+                None => Value::decimal(member, self.scale, decimals, self.unit),
+            };
+            if value.number < 1000 || decimals == 0 {
+                return value;
+            }
+            decimals -= 1;
+        }
+    }
 }
 
 /// Writes a line of the visual pages: `line` counts over all pages, so line `r` of page `p` is `p * rows + r` on a
@@ -228,7 +252,7 @@ pub fn visual_line(
 ) -> Result<usize, Error> {
     let number = row_of(line, columns);
     let row = VisualRow::from_number(number).map(|row| visual_row(readout, row));
-    write_line(row.as_ref(), label(labels, number), style, columns, line, out)
+    write_line(row, label(labels, number), style, columns, line, out)
 }
 
 /// Writes a line of the camera pages, as [`visual_line`] does.
@@ -246,7 +270,7 @@ pub fn camera_line(
 ) -> Result<usize, Error> {
     let number = row_of(line, columns);
     let row = CameraRow::from_number(number).map(|row| camera_row(readout, row));
-    write_line(row.as_ref(), label(labels, number), style, columns, line, out)
+    write_line(row, label(labels, number), style, columns, line, out)
 }
 
 fn label<'a>(labels: &'a [&str], number: u8) -> impl Iterator<Item = u8> + Clone + use<'a> {

@@ -89,14 +89,13 @@ pub(super) const DASH: u8 = 22;
 pub(super) const YES: u8 = 23;
 pub(super) const NO: u8 = 24;
 
-/// The look of all text. It is plain data that the caller owns: take one of the ready ones and change what you like,
-/// `TextStyle { decimal_mark: b',', ..TextStyle::UTF8 }`.
+/// The look of all text. Plain data that the caller owns: copy one of the ready ones and change what you like.
 ///
-/// A text is up to 8 bytes of the display's character set, filled up with zeros; [`text`] makes one.
+/// A text is up to 8 bytes of the display's character set, filled up with zeros.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
 #[repr(C)]
 pub struct TextStyle {
-    /// The text of each [`Unit`] from 1 on, with the blank before it where one is wanted.
+    /// The text of unit number n in place n - 1, with the blank before it where one is wanted.
     pub units: [[u8; 8]; 21],
     /// Stands where a value is not available.
     pub dash: [u8; 8],
@@ -108,10 +107,13 @@ pub struct TextStyle {
     pub decimal_mark: u8,
     /// Stands before a value that a fact of the readout concerns, one byte.
     pub fact_mark: u8,
-    /// 1: texts are UTF-8 and a character may take several bytes. 0: every byte is a character.
+    /// 1: texts are UTF-8, and a character may take several bytes. 0: every byte is a character.
     pub utf8: u8,
 }
 
+/// The ready styles.
+///
+/// cbindgen:ignore
 impl TextStyle {
     /// Letters and signs of ASCII only; `d` and `deg` stand for the degree sign, `u` for micro, `x` for times.
     pub const ASCII: TextStyle = TextStyle {
@@ -219,12 +221,12 @@ impl TextStyle {
         &text[..length]
     }
 
-    /// How many characters these bytes are.
-    pub(super) fn characters(&self, text: &[u8]) -> usize {
+    /// How many of these bytes do not begin a character.
+    pub(super) fn continued(&self, text: &[u8]) -> usize {
         if self.utf8 == 0 {
-            return text.len();
+            return 0;
         }
-        text.iter().filter(|&&byte| begins_character(byte)).count()
+        text.iter().filter(|&&byte| !begins_character(byte)).count()
     }
 }
 
