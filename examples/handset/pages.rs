@@ -200,8 +200,8 @@ fn visual_meaning(row: VisualRow) -> &'static str {
 
 fn camera_meaning(row: CameraRow) -> &'static str {
     match row {
-        CameraRow::FrameWidth => "sky across the long side of the picture",
-        CameraRow::FrameHeight => "sky across the short side of the picture",
+        CameraRow::FrameWidth => "sky across the width of the picture",
+        CameraRow::FrameHeight => "sky across the height of the picture",
         CameraRow::PixelScale => "sky to one pixel, binning included",
         CameraRow::StarWidth => "width of a star's image at half its brightness",
         CameraRow::StarPixels => "the same in pixels; two to three are good",
