@@ -345,7 +345,7 @@ pub unsafe extern "C" fn fieldstop_airy_radius_f32(
 /// (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
 /// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
-/// Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
+/// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
 #[must_use]
 #[unsafe(no_mangle)]
@@ -391,7 +391,7 @@ pub unsafe extern "C" fn fieldstop_cutoff_frequency_fx(
 /// D / (lambda f) (Goodman).
 /// Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
 /// Error: at most 2 ulp.
-/// Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
+/// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
 #[must_use]
 #[unsafe(no_mangle)]

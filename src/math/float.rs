@@ -183,8 +183,3 @@ pub(crate) fn not_negative<F: Real>(x: F, argument: u8) -> Result<(), Error> {
 pub(crate) fn either_sign<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     not_negative(if x < F::of(0.0) { -x } else { x }, argument)
 }
-
-/// Refuses a result that does not fit.
-pub(crate) fn fits<F: Real>(x: F) -> Result<F, Error> {
-    if x.is_finite() { Ok(x) } else { Err(Error::OVERFLOW) }
-}

@@ -4,7 +4,7 @@ use crate::math::divide::{self, Constant};
 #[cfg(feature = "float")]
 use crate::math::double::{Double, product_ratio};
 #[cfg(feature = "float")]
-use crate::math::float::{Real, fits, from_zero_to, not_negative, positive};
+use crate::math::float::{Real, from_zero_to, not_negative, positive};
 use crate::math::multiply::{high, high_signed, wide};
 use crate::math::{logarithm, root};
 use crate::status::Error;
@@ -285,7 +285,7 @@ pub fn cutoff_frequency<F: Real>(focal_length_mm: F, aperture_mm: F, wavelength_
     positive(focal_length_mm, 1)?;
     positive(aperture_mm, 2)?;
     positive(wavelength_nm, 3)?;
-    fits(product_ratio(aperture_mm, F::of(1e6), focal_length_mm, wavelength_nm))
+    Ok(product_ratio(aperture_mm, F::of(1e6), focal_length_mm, wavelength_nm))
 }
 
 /// (2 pi)^2 in two parts, the first exact in both types.
@@ -385,7 +385,7 @@ pub fn seeing_at_airmass_fx(seeing: Microarcseconds, airmass: Q16) -> Result<Mic
     let doublings = high(logarithm::log2(airmass.0) - 16 * logarithm::ONE, 2_576_980_378);
     // Under 3.2 doublings; 2^-27.
     let growth = logarithm::exp2_negative(4 * logarithm::ONE - doublings);
-    let width = wide(seeing.0, growth) + (1 << 26) >> 27;
+    let width = (wide(seeing.0, growth) + (1 << 26)) >> 27;
     if width >> 32 != 0 {
         return Err(Error::OVERFLOW);
     }

@@ -74,10 +74,11 @@ fn float_edges_and_c() {
                         let rust = compute(&case);
                         match float_refusal(&row, &case) {
                             Some(error) => assert_eq!(rust, Err(error), "{}{case:?}", row.stem),
-                            None => match rust {
-                                Ok(value) => assert!(value.is_finite(), "{}{case:?} = {value}", row.stem),
-                                Err(error) => assert_eq!(error, Error::OVERFLOW, "{}{case:?}", row.stem),
-                            },
+                            None if row.result.count && rust == Err(Error::OVERFLOW) => {}
+                            None => {
+                                let value = rust.unwrap_or_else(|e| panic!("{}{case:?}: {e}", row.stem));
+                                assert!(value.is_finite(), "{}{case:?} = {value}", row.stem);
+                            }
                         }
                         let held = 77.0;
                         let expected = match rust {

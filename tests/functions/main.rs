@@ -2,6 +2,7 @@
 //! arguments, and through C. One registry drives them all; FIELDSTOP_CASES sets the number of cases a function and form.
 
 mod big;
+mod borders;
 mod cases;
 mod coverage;
 mod documented;

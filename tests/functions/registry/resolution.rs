@@ -50,7 +50,7 @@ fn dark_ring(e: &Big) -> Big {
 }
 
 const FREQUENCY: Argument = ordinary("frequency_q16", Q16, (3_000, 65_536)).within(0, 65_536);
-const OBSTRUCTION_RATIO: Argument = ordinary("obstruction_q16", Q16, (6_000, 30_000));
+const OBSTRUCTION_RATIO: Argument = ordinary("obstruction_q16", Q16, (6_000, 30_000)).under(65_536);
 /// Twice the area of a circle's segment that is 2 t wide, over the square of its radius.
 fn segment(cosine: &Big) -> Big {
     let t = cosine.acos();
@@ -121,7 +121,6 @@ pub fn rows() -> Vec<Row> {
         Row {
             single_owed: FloatOwed::Absolute(|_| 4e-6),
             double_owed: FloatOwed::Absolute(|a| 1e-14 / (big(1.0) - &a[1]).to_f64()),
-            refuses: |i, a| i == 1 && a[1] >= big(1.0),
             ..row!(resolution::contrast [0 FREQUENCY, 1 OBSTRUCTION_RATIO] -> Q16, TRANSCENDENTAL, 0.0,
                 |a| contrast(&a[0], &a[1]),
                 contrast_fx fieldstop_contrast_fx fieldstop_contrast_f32 fieldstop_contrast_f64)
