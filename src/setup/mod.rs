@@ -2,7 +2,9 @@
 //!
 //! Fill a [`Telescope`], an [`Eyepiece`] or a [`Camera`], and an [`Observer`]; [`check`](Telescope::check)
 //! each when it is entered; then ask [`VisualReadout::compute`] or [`CameraReadout::compute`] for the values
-//! that a screen shows, as bits. Only those are computed, and what they share is computed once.
+//! that a screen shows, as bits. Only those are computed, and what they share is computed once: a value is what
+//! the functions of [`optics`](crate::optics) give one after the other, with each result in between rounded to its
+//! unit.
 //!
 //! In C the structs are `fieldstop_telescope` and so on, with the same members. Their layout never changes:
 //! more comes as a new struct under a new name. A member named `padding` is ignored.
