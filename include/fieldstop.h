@@ -878,6 +878,998 @@ fieldstop_status fieldstop_tiles_f64(double target_arcsec,
 #endif
 
 /* --------------------------------------------------------------------------------------------------
+   Resolution: how fine a telescope shows, and how far the air, the obstruction and the
+   wavefront let it. */
+
+/**
+ * Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in microarcseconds.
+ *
+ * (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+ * Ranges: aperture_um, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_fx(uint32_t aperture_um,
+                                             uint32_t wavelength_nm,
+                                             uint32_t *limit_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in arcseconds.
+ *
+ * (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_f32(float aperture_mm,
+                                              float wavelength_nm,
+                                              float *limit_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Rayleigh's limit: the separation of two stars, one at the other's first dark ring, in arcseconds, in
+ * double.
+ *
+ * (j11 / pi) lambda / D = 1.2196699 lambda / D, j11 the first positive zero of J1 (Born and Wolf).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_f64(double aperture_mm,
+                                              double wavelength_nm,
+                                              double *limit_arcsec);
+#endif
+
+/**
+ * Gives Rayleigh's limit with a central obstruction, in microarcseconds.
+ *
+ * (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+ * Ranges: aperture_um, wavelength_nm not 0; obstruction_um under aperture_um.
+ * Error: at most 1 LSB or 2 parts in 10^6, the larger.
+ * Statuses: null pointer, zero, out of range, overflow (the limit is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_obstructed_fx(uint32_t aperture_um,
+                                                        uint32_t obstruction_um,
+                                                        uint32_t wavelength_nm,
+                                                        uint32_t *limit_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Rayleigh's limit with a central obstruction, in arcseconds.
+ *
+ * (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32; obstruction_mm 0 to under aperture_mm.
+ * Error: at most 2 parts in 10^6.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_obstructed_f32(float aperture_mm,
+                                                         float obstruction_mm,
+                                                         float wavelength_nm,
+                                                         float *limit_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Rayleigh's limit with a central obstruction, in arcseconds, in double.
+ *
+ * (x / pi) lambda / D, x the first positive root of J1(x) = e J1(e x), e = d / D (Born and Wolf).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32; obstruction_mm 0 to under aperture_mm.
+ * Error: at most 2 parts in 10^6.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rayleigh_limit_obstructed_f64(double aperture_mm,
+                                                         double obstruction_mm,
+                                                         double wavelength_nm,
+                                                         double *limit_arcsec);
+#endif
+
+/**
+ * Gives Dawes's limit: the separation at which two equal stars are just seen apart, in microarcseconds.
+ *
+ * 116 arcsec mm / D (common practice after Dawes, 1867).
+ * Ranges: aperture_um not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_dawes_limit_fx(uint32_t aperture_um,
+                                          uint32_t *limit_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Dawes's limit: the separation at which two equal stars are just seen apart, in arcseconds.
+ *
+ * 116 arcsec mm / D (common practice after Dawes, 1867).
+ * Ranges: aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_dawes_limit_f32(float aperture_mm,
+                                           float *limit_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Dawes's limit: the separation at which two equal stars are just seen apart, in arcseconds, in double.
+ *
+ * 116 arcsec mm / D (common practice after Dawes, 1867).
+ * Ranges: aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_dawes_limit_f64(double aperture_mm,
+                                           double *limit_arcsec);
+#endif
+
+/**
+ * Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in microarcseconds.
+ *
+ * 0.9471553 lambda / D (Sparrow 1916).
+ * Ranges: aperture_um, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the limit is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sparrow_limit_fx(uint32_t aperture_um,
+                                            uint32_t wavelength_nm,
+                                            uint32_t *limit_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in arcseconds.
+ *
+ * 0.9471553 lambda / D (Sparrow 1916).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sparrow_limit_f32(float aperture_mm,
+                                             float wavelength_nm,
+                                             float *limit_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Sparrow's limit: the separation of two stars at which the dip between them is gone, in arcseconds, in
+ * double.
+ *
+ * 0.9471553 lambda / D (Sparrow 1916).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sparrow_limit_f64(double aperture_mm,
+                                             double wavelength_nm,
+                                             double *limit_arcsec);
+#endif
+
+/**
+ * Gives the full width at half maximum of a star's image in perfect optics and still air, in microarcseconds.
+ *
+ * 1.0289940 lambda / D (Airy 1835).
+ * Ranges: aperture_um, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the width is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_fwhm_fx(uint32_t aperture_um,
+                                        uint32_t wavelength_nm,
+                                        uint32_t *fwhm_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the full width at half maximum of a star's image in perfect optics and still air, in arcseconds.
+ *
+ * 1.0289940 lambda / D (Airy 1835).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_fwhm_f32(float aperture_mm,
+                                         float wavelength_nm,
+                                         float *fwhm_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the full width at half maximum of a star's image in perfect optics and still air, in arcseconds, in
+ * double.
+ *
+ * 1.0289940 lambda / D (Airy 1835).
+ * Ranges: aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_fwhm_f64(double aperture_mm,
+                                         double wavelength_nm,
+                                         double *fwhm_arcsec);
+#endif
+
+/**
+ * Gives the radius of the Airy disc at the focus, centre to first dark ring, in nanometres.
+ *
+ * (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+ * Ranges: focal_length_um, aperture_um, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the radius is over 4.29 m).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_radius_fx(uint32_t focal_length_um,
+                                          uint32_t aperture_um,
+                                          uint32_t wavelength_nm,
+                                          uint32_t *radius_nm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the radius of the Airy disc at the focus, centre to first dark ring, in micrometres.
+ *
+ * (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_radius_f32(float focal_length_mm,
+                                           float aperture_mm,
+                                           float wavelength_nm,
+                                           float *radius_um);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the radius of the Airy disc at the focus, centre to first dark ring, in micrometres, in double.
+ *
+ * (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_airy_radius_f64(double focal_length_mm,
+                                           double aperture_mm,
+                                           double wavelength_nm,
+                                           double *radius_um);
+#endif
+
+/**
+ * Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre,
+ * Q16.16.
+ *
+ * D / (lambda f) (Goodman).
+ * Ranges: focal_length_um, aperture_um, wavelength_nm not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow (the frequency is 65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_cutoff_frequency_fx(uint32_t focal_length_um,
+                                               uint32_t aperture_um,
+                                               uint32_t wavelength_nm,
+                                               uint32_t *frequency_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre.
+ *
+ * D / (lambda f) (Goodman).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_cutoff_frequency_f32(float focal_length_mm,
+                                                float aperture_mm,
+                                                float wavelength_nm,
+                                                float *frequency);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the cutoff frequency at the focus, beyond which detail has no contrast, in cycles per millimetre, in
+ * double.
+ *
+ * D / (lambda f) (Goodman).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_cutoff_frequency_f64(double focal_length_mm,
+                                                double aperture_mm,
+                                                double wavelength_nm,
+                                                double *frequency);
+#endif
+
+/**
+ * Gives the contrast that the optics keep at a frequency, with a central obstruction, in Q16.16.
+ *
+ * The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+ * (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+ * Ranges: frequency_q16 (of the cutoff frequency) at most 1; obstruction_q16 (of the aperture's diameter) under 1.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_contrast_fx(uint32_t frequency_q16,
+                                       uint32_t obstruction_q16,
+                                       uint32_t *contrast_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the contrast that the optics keep at a frequency, with a central obstruction, a plain number.
+ *
+ * The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+ * (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+ * Ranges: frequency (of the cutoff frequency) 0 to 1; obstruction (of the aperture's diameter) 0 to under 1.
+ * Error: at most 4e-6.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_contrast_f32(float frequency,
+                                        float obstruction,
+                                        float *contrast);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the contrast that the optics keep at a frequency, with a central obstruction, a plain number, in double.
+ *
+ * The area that two annuli share, their centres apart by the frequency times the outer diameter, over the area of one
+ * (O'Neill 1956); without an obstruction (2 / pi) (acos v - v sqrt(1 - v^2)).
+ * Ranges: frequency (of the cutoff frequency) 0 to 1; obstruction (of the aperture's diameter) 0 to under 1.
+ * Error: at most 1e-14 / (1 - obstruction).
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_contrast_f64(double frequency,
+                                        double obstruction,
+                                        double *contrast);
+#endif
+
+/**
+ * Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in
+ * Q16.16.
+ *
+ * exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+ * Ranges: wavelength_nm not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_strehl_ratio_fx(uint32_t rms_nm,
+                                           uint32_t wavelength_nm,
+                                           uint32_t *ratio_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in a
+ * plain number.
+ *
+ * exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+ * Ranges: rms_nm 0 to 2^32; wavelength_nm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_strehl_ratio_f32(float rms_nm,
+                                            float wavelength_nm,
+                                            float *ratio);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the Strehl ratio of a wavefront: the brightness of the star image's centre against the perfect one, in a
+ * plain number, in double.
+ *
+ * exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
+ * Ranges: rms_nm 0 to 2^32; wavelength_nm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_strehl_ratio_f64(double rms_nm,
+                                            double wavelength_nm,
+                                            double *ratio);
+#endif
+
+/**
+ * Gives Fried's parameter, the aperture that the air leaves, in micrometres.
+ *
+ * 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+ * Ranges: seeing_uas, wavelength_nm not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow (the parameter is over 4.29 km).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_fried_parameter_fx(uint32_t seeing_uas,
+                                              uint32_t wavelength_nm,
+                                              uint32_t *parameter_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives Fried's parameter, the aperture that the air leaves, in millimetres.
+ *
+ * 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+ * Ranges: seeing_arcsec, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_fried_parameter_f32(float seeing_arcsec,
+                                               float wavelength_nm,
+                                               float *parameter_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives Fried's parameter, the aperture that the air leaves, in millimetres, in double.
+ *
+ * 0.98 lambda / FWHM, at the same wavelength (Fried 1966).
+ * Ranges: seeing_arcsec, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_fried_parameter_f64(double seeing_arcsec,
+                                               double wavelength_nm,
+                                               double *parameter_mm);
+#endif
+
+/**
+ * Gives the seeing at an airmass, from that at the zenith, in microarcseconds.
+ *
+ * FWHM X^0.6 (Fried 1966).
+ * Ranges: seeing_uas not 0; airmass_q16 1 to 40.
+ * Error: at most 1 LSB or 1 part in 10^6, the larger.
+ * Statuses: null pointer, zero, out of range, overflow (the width is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_seeing_at_airmass_fx(uint32_t seeing_uas,
+                                                uint32_t airmass_q16,
+                                                uint32_t *fwhm_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the seeing at an airmass, from that at the zenith, in arcseconds.
+ *
+ * FWHM X^0.6 (Fried 1966).
+ * Ranges: seeing_arcsec 2^-32 to 2^32; airmass 1 to 40.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_seeing_at_airmass_f32(float seeing_arcsec,
+                                                 float airmass,
+                                                 float *fwhm_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the seeing at an airmass, from that at the zenith, in arcseconds, in double.
+ *
+ * FWHM X^0.6 (Fried 1966).
+ * Ranges: seeing_arcsec 2^-32 to 2^32; airmass 1 to 40.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_seeing_at_airmass_f64(double seeing_arcsec,
+                                                 double airmass,
+                                                 double *fwhm_arcsec);
+#endif
+
+/**
+ * Gives the width of a star image that three causes blur, in microarcseconds.
+ *
+ * sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+ * Ranges: a_uas, b_uas, c_uas may be anything.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, overflow (the width is over 4294 arcseconds).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_combined_fwhm_fx(uint32_t a_uas,
+                                            uint32_t b_uas,
+                                            uint32_t c_uas,
+                                            uint32_t *fwhm_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the width of a star image that three causes blur, in arcseconds.
+ *
+ * sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+ * Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_combined_fwhm_f32(float a_arcsec,
+                                             float b_arcsec,
+                                             float c_arcsec,
+                                             float *fwhm_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the width of a star image that three causes blur, in arcseconds, in double.
+ *
+ * sqrt(a^2 + b^2 + c^2), full widths at half maximum (exact for Gaussian images).
+ * Ranges: a_arcsec, b_arcsec, c_arcsec 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_combined_fwhm_f64(double a_arcsec,
+                                             double b_arcsec,
+                                             double c_arcsec,
+                                             double *fwhm_arcsec);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
+   Light: what the mirrors, the glass and the hole in the middle leave of it, and the
+   magnitudes that follow. */
+
+/**
+ * Gives the share of the light that mirrors and glass surfaces let through, in Q16.16.
+ *
+ * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
+ * Ranges: reflectance_q16, transmittance_q16 at most 1.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_throughput_fx(uint8_t mirrors,
+                                         uint32_t reflectance_q16,
+                                         uint8_t surfaces,
+                                         uint32_t transmittance_q16,
+                                         uint32_t *throughput_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the share of the light that mirrors and glass surfaces let through, a plain number.
+ *
+ * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
+ * Ranges: reflectance, transmittance 0 to 1.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_throughput_f32(uint8_t mirrors,
+                                          float reflectance,
+                                          uint8_t surfaces,
+                                          float transmittance,
+                                          float *throughput);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the share of the light that mirrors and glass surfaces let through, a plain number, in double.
+ *
+ * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
+ * Ranges: reflectance, transmittance 0 to 1.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_throughput_f64(uint8_t mirrors,
+                                          double reflectance,
+                                          uint8_t surfaces,
+                                          double transmittance,
+                                          double *throughput);
+#endif
+
+/**
+ * Gives the share of the aperture's area that the central obstruction leaves, in Q16.16.
+ *
+ * 1 - (d / D)^2 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_um not 0; obstruction_um under the aperture.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_clear_fraction_fx(uint32_t aperture_um,
+                                             uint32_t obstruction_um,
+                                             uint32_t *fraction_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the share of the aperture's area that the central obstruction leaves, a plain number.
+ *
+ * 1 - (d / D)^2 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_clear_fraction_f32(float aperture_mm,
+                                              float obstruction_mm,
+                                              float *fraction);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the share of the aperture's area that the central obstruction leaves, a plain number, in double.
+ *
+ * 1 - (d / D)^2 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_clear_fraction_f64(double aperture_mm,
+                                              double obstruction_mm,
+                                              double *fraction);
+#endif
+
+/**
+ * Gives the clear, lossless aperture that would gather as much light, in micrometres.
+ *
+ * D sqrt((1 - (d / D)^2) T) (Schroeder, Astronomical Optics).
+ * Ranges: aperture_um not 0; obstruction_um under the aperture; throughput_q16 at most 1.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_effective_aperture_fx(uint32_t aperture_um,
+                                                 uint32_t obstruction_um,
+                                                 uint32_t throughput_q16,
+                                                 uint32_t *effective_aperture_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the clear, lossless aperture that would gather as much light, in millimetres.
+ *
+ * D sqrt((1 - (d / D)^2) T) (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture; throughput 0 to 1.
+ * Error: at most 2 ulp where the throughput is 0 or at least 2^-38.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_effective_aperture_f32(float aperture_mm,
+                                                  float obstruction_mm,
+                                                  float throughput,
+                                                  float *effective_aperture_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the clear, lossless aperture that would gather as much light, in millimetres, in double.
+ *
+ * D sqrt((1 - (d / D)^2) T) (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture; throughput 0 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_effective_aperture_f64(double aperture_mm,
+                                                  double obstruction_mm,
+                                                  double throughput,
+                                                  double *effective_aperture_mm);
+#endif
+
+/**
+ * Gives how many magnitudes fainter a telescope shows a star than the bare eye, in millimagnitudes.
+ *
+ * 5 log10(D / p); negative where the pupil is the wider (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: effective_aperture_um, eye_pupil_um not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_gain_fx(uint32_t effective_aperture_um,
+                                             uint32_t eye_pupil_um,
+                                             int32_t *gain_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many magnitudes fainter a telescope shows a star than the bare eye, in magnitudes.
+ *
+ * 5 log10(D / p); negative where the pupil is the wider (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: effective_aperture_mm, eye_pupil_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_gain_f32(float effective_aperture_mm,
+                                              float eye_pupil_mm,
+                                              float *gain_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many magnitudes fainter a telescope shows a star than the bare eye, in magnitudes, in double.
+ *
+ * 5 log10(D / p); negative where the pupil is the wider (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: effective_aperture_mm, eye_pupil_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_gain_f64(double effective_aperture_mm,
+                                              double eye_pupil_mm,
+                                              double *gain_mag);
+#endif
+
+/**
+ * Gives the faintest star that a telescope shows to an eye whose own limit is known, in millimagnitudes.
+ *
+ * m0 + 5 log10(D / p) (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: effective_aperture_um, eye_pupil_um not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero, overflow (beyond 32 bits).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_limiting_magnitude_fx(int32_t naked_eye_mmag,
+                                                 uint32_t effective_aperture_um,
+                                                 uint32_t eye_pupil_um,
+                                                 int32_t *limit_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the faintest star that a telescope shows to an eye whose own limit is known, in magnitudes.
+ *
+ * m0 + 5 log10(D / p) (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: naked_eye_mag -2^32 to 2^32; effective_aperture_mm, eye_pupil_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp of the larger term.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_limiting_magnitude_f32(float naked_eye_mag,
+                                                  float effective_aperture_mm,
+                                                  float eye_pupil_mm,
+                                                  float *limit_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the faintest star that a telescope shows to an eye whose own limit is known, in magnitudes, in
+ * double.
+ *
+ * m0 + 5 log10(D / p) (Pogson 1856; Schroeder, Astronomical Optics).
+ * Ranges: naked_eye_mag -2^32 to 2^32; effective_aperture_mm, eye_pupil_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp of the larger term.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_limiting_magnitude_f64(double naked_eye_mag,
+                                                  double effective_aperture_mm,
+                                                  double eye_pupil_mm,
+                                                  double *limit_mag);
+#endif
+
+/**
+ * Gives how bright an extended object looks in the eyepiece, against the bare eye, in Q16.16.
+ *
+ * T min(1, (x / p)^2) (Born and Wolf, Principles of Optics).
+ * Ranges: exit_pupil_um, eye_pupil_um not 0; throughput_q16 at most 1.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_surface_brightness_fx(uint32_t exit_pupil_um,
+                                                 uint32_t eye_pupil_um,
+                                                 uint32_t throughput_q16,
+                                                 uint32_t *brightness_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how bright an extended object looks in the eyepiece, against the bare eye, a plain number.
+ *
+ * T min(1, (x / p)^2) (Born and Wolf, Principles of Optics).
+ * Ranges: exit_pupil_mm, eye_pupil_mm 2^-32 to 2^32; throughput 0 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_surface_brightness_f32(float exit_pupil_mm,
+                                                  float eye_pupil_mm,
+                                                  float throughput,
+                                                  float *brightness);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how bright an extended object looks in the eyepiece, against the bare eye, a plain number, in
+ * double.
+ *
+ * T min(1, (x / p)^2) (Born and Wolf, Principles of Optics).
+ * Ranges: exit_pupil_mm, eye_pupil_mm 2^-32 to 2^32; throughput 0 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_surface_brightness_f64(double exit_pupil_mm,
+                                                  double eye_pupil_mm,
+                                                  double throughput,
+                                                  double *brightness);
+#endif
+
+/**
+ * Gives how many magnitudes fainter the first of two lights is than the second, in millimagnitudes.
+ *
+ * -2.5 log10(a / b); both fluxes in any one unit (Pogson 1856).
+ * Ranges: flux_a, flux_b not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_difference_fx(uint32_t flux_a,
+                                                   uint32_t flux_b,
+                                                   int32_t *difference_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many magnitudes fainter the first of two lights is than the second, in magnitudes.
+ *
+ * -2.5 log10(a / b); both fluxes in any one unit (Pogson 1856).
+ * Ranges: flux_a, flux_b 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_difference_f32(float flux_a,
+                                                    float flux_b,
+                                                    float *difference_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many magnitudes fainter the first of two lights is than the second, in magnitudes, in double.
+ *
+ * -2.5 log10(a / b); both fluxes in any one unit (Pogson 1856).
+ * Ranges: flux_a, flux_b 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_magnitude_difference_f64(double flux_a,
+                                                    double flux_b,
+                                                    double *difference_mag);
+#endif
+
+/**
+ * Gives how many magnitudes a light loses from a near to a distant place, in millimagnitudes.
+ *
+ * 5 log10(distant / near); both distances in any one unit (the inverse-square law).
+ * Ranges: near_distance, distant_distance not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_distance_dimming_fx(uint32_t near_distance,
+                                               uint32_t distant_distance,
+                                               int32_t *dimming_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many magnitudes a light loses from a near to a distant place, in magnitudes.
+ *
+ * 5 log10(distant / near); both distances in any one unit (the inverse-square law).
+ * Ranges: near_distance, distant_distance 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_distance_dimming_f32(float near_distance,
+                                                float distant_distance,
+                                                float *dimming_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many magnitudes a light loses from a near to a distant place, in magnitudes, in double.
+ *
+ * 5 log10(distant / near); both distances in any one unit (the inverse-square law).
+ * Ranges: near_distance, distant_distance 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_distance_dimming_f64(double near_distance,
+                                                double distant_distance,
+                                                double *dimming_mag);
+#endif
+
+/**
+ * Gives how many magnitudes the air takes from a star, in millimagnitudes.
+ *
+ * k X, of the loss in one airmass (Bouguer 1729).
+ * Ranges: any.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, overflow (2147483648 mmag or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_extinction_fx(uint32_t coefficient_mmag,
+                                         uint32_t airmass_q16,
+                                         int32_t *extinction_mmag);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many magnitudes the air takes from a star, in magnitudes.
+ *
+ * k X, of the loss in one airmass (Bouguer 1729).
+ * Ranges: coefficient_mag, airmass 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_extinction_f32(float coefficient_mag,
+                                          float airmass,
+                                          float *extinction_mag);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many magnitudes the air takes from a star, in magnitudes, in double.
+ *
+ * k X, of the loss in one airmass (Bouguer 1729).
+ * Ranges: coefficient_mag, airmass 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_extinction_f64(double coefficient_mag,
+                                          double airmass,
+                                          double *extinction_mag);
+#endif
+
+/**
+ * Gives the focal ratio of the lossless telescope that would expose a sensor as fast, in Q16.16.
+ *
+ * N / sqrt(T) (Smith, Modern Optical Engineering).
+ * Ranges: focal_ratio_q16 not 0; throughput_q16 not 0, at most 1.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, out of range, overflow (65536 or more).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_t_number_fx(uint32_t focal_ratio_q16,
+                                       uint32_t throughput_q16,
+                                       uint32_t *t_number_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the focal ratio of the lossless telescope that would expose a sensor as fast, a plain number.
+ *
+ * N / sqrt(T) (Smith, Modern Optical Engineering).
+ * Ranges: focal_ratio 2^-32 to 2^32; throughput 2^-32 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_t_number_f32(float focal_ratio,
+                                        float throughput,
+                                        float *t_number);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the focal ratio of the lossless telescope that would expose a sensor as fast, a plain number, in
+ * double.
+ *
+ * N / sqrt(T) (Smith, Modern Optical Engineering).
+ * Ranges: focal_ratio 2^-32 to 2^32; throughput 2^-32 to 1.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_t_number_f64(double focal_ratio,
+                                        double throughput,
+                                        double *t_number);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
    Equipment as plain structs in fixed units, and all readouts of one screen in one call. */
 
 /** What the eye gets at the eyepiece. Members from `focal_length_um` on are 0 where their bit in `available` is clear. */

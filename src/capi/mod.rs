@@ -5,6 +5,8 @@
 #![allow(unsafe_code, non_camel_case_types, clippy::missing_safety_doc)]
 
 pub mod field;
+pub mod light;
+pub mod resolution;
 pub mod status;
 pub mod text;
 pub mod units;

@@ -1,7 +1,7 @@
 //! Angles from ratios and back: twice the arc tangent, and the cotangent of half an angle.
 
 use super::divide::{divide, normalise, shift_up};
-use super::multiply::{high, wide};
+use super::multiply::{high, high_64, high_signed, wide};
 
 /// 180 degrees.
 const HALF_TURN_MAS: u32 = 648_000_000;
@@ -26,12 +26,6 @@ static ARC: [[u32; 4]; 16] = [
     [2429823935, 1812033596, 901644606, 133202013],
     [2539619686, 1702489996, 850816167, 137019419],
 ];
-
-/// The upper half of a signed by unsigned product.
-#[inline(always)]
-const fn high_signed(a: i32, b: u32) -> i32 {
-    high(a as u32, b).wrapping_sub((a >> 31) as u32 & b) as i32
-}
 
 /// The value of a table's row at `u` / 2^32 from its middle.
 #[inline(never)]
@@ -161,14 +155,6 @@ pub(crate) const fn adjacent(t_mas: u32) -> u32 {
     quartic(&ADJACENT[(place >> 28 & 7) as usize], ((place << 4) ^ (1 << 31)) as i32)
 }
 
-/// The upper 64 bits of the product, at most 2 too low.
-#[inline(never)]
-const fn high_64(a: u64, b: u64) -> u64 {
-    let (a1, a0) = ((a >> 32) as u32, a as u32);
-    let (b1, b0) = ((b >> 32) as u32, b as u32);
-    wide(a1, b1) + (wide(a1, b0) >> 32) + (wide(a0, b1) >> 32)
-}
-
 /// R (a cot a) for a = t / 2 in steps of 2^-32 of a milliarcsecond, so that tan(t / 2) = t / 2 adjacent; within
 /// 4 parts in 10^11. `t_mas` is at most 90 degrees.
 #[inline(never)]
@@ -202,9 +188,9 @@ mod tests {
             for j in 0..n {
                 if j != i {
                     let factor = rows[j][i] / rows[i][i];
-                    for k in i..=n {
-                        let x = rows[i][k];
-                        rows[j][k] -= factor * x;
+                    let pivot = rows[i].clone();
+                    for (x, y) in rows[j][i..].iter_mut().zip(&pivot[i..]) {
+                        *x -= factor * y;
                     }
                 }
             }

@@ -14,6 +14,13 @@ static RECIPROCAL: [u8; 64] = [
 /// Shifts `x` up until its top bit is set; gives the shift too. `x` is not 0.
 #[inline(always)]
 pub(crate) const fn normalise(x: u32) -> (u32, u32) {
+    let (x, shift) = normalise_evenly(x);
+    if x < 1 << 31 { (x << 1, shift + 1) } else { (x, shift) }
+}
+
+/// Shifts `x` up by an even number of places until one of its top two bits is set; gives the shift too. `x` is not 0.
+#[inline(always)]
+pub(crate) const fn normalise_evenly(x: u32) -> (u32, u32) {
     if cfg!(all(target_arch = "arm", not(target_has_atomic = "32"))) {
         let (mut x, mut shift) = (x, 0);
         if x < 1 << 16 {
@@ -32,13 +39,9 @@ pub(crate) const fn normalise(x: u32) -> (u32, u32) {
             x <<= 2;
             shift += 2;
         }
-        if x < 1 << 31 {
-            x <<= 1;
-            shift += 1;
-        }
         (x, shift)
     } else {
-        let shift = x.leading_zeros() & 31;
+        let shift = x.leading_zeros() & 30;
         (x << shift, shift)
     }
 }

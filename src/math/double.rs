@@ -33,6 +33,12 @@ impl<F: Real> Double<F> {
     }
 }
 
+/// a b / (c d) within 1.6 ulp.
+pub(crate) fn product_ratio<F: Real>(a: F, b: F, c: F, d: F) -> F {
+    let (n, d) = (Double::product(a, b), Double::product(c, d));
+    (n.upper + (n.lower - n.upper * (d.lower / d.upper))) / d.upper
+}
+
 fn halves<F: Real>(x: F) -> (F, F) {
     let scaled = x * F::SPLIT;
     let upper = scaled - (scaled - x);

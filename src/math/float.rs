@@ -178,3 +178,8 @@ pub(crate) fn from_zero_to<F: Real>(most: f64, x: F, argument: u8) -> Result<(),
 pub(crate) fn not_negative<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     from_zero_to(MOST, x, argument)
 }
+
+/// Refuses what is not in -2^32 to 2^32.
+pub(crate) fn either_sign<F: Real>(x: F, argument: u8) -> Result<(), Error> {
+    not_negative(if x < F::of(0.0) { -x } else { x }, argument)
+}

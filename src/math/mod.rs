@@ -10,4 +10,6 @@ pub(crate) mod divide;
 pub(crate) mod double;
 #[cfg(feature = "float")]
 pub(crate) mod float;
+pub(crate) mod logarithm;
 pub(crate) mod multiply;
+pub(crate) mod root;

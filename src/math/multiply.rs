@@ -20,3 +20,17 @@ pub(crate) const fn wide(a: u32, b: u32) -> u64 {
 pub(crate) const fn high(a: u32, b: u32) -> u32 {
     (wide(a, b) >> 32) as u32
 }
+
+/// The upper half of a signed by unsigned product.
+#[inline(always)]
+pub(crate) const fn high_signed(a: i32, b: u32) -> i32 {
+    high(a as u32, b).wrapping_sub((a >> 31) as u32 & b) as i32
+}
+
+/// The upper 64 bits of the product, at most 2 too low.
+#[inline(never)]
+pub(crate) const fn high_64(a: u64, b: u64) -> u64 {
+    let (a1, a0) = ((a >> 32) as u32, a as u32);
+    let (b1, b0) = ((b >> 32) as u32, b as u32);
+    wide(a1, b1) + (wide(a1, b0) >> 32) + (wide(a0, b1) >> 32)
+}

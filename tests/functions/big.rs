@@ -18,6 +18,10 @@ fn with<T>(f: impl FnOnce(&mut Consts) -> T) -> T {
 pub struct Big(BigFloat);
 
 pub fn big(x: f64) -> Big {
+    if x.is_subnormal() {
+        // astro-float 0.9 reads these as half of what they are.
+        return big(x * 2f64.powi(100)) / big(2f64.powi(100));
+    }
     Big(BigFloat::from_f64(x, P))
 }
 

@@ -1,6 +1,7 @@
 //! The header's comment of each function quotes the error bound of its row.
 
-use super::registry::{FloatOwed, Owed, rows};
+use super::registry::{FloatOwed, Owed, all_rows};
+use std::collections::BTreeSet;
 use std::fs;
 use std::path::Path;
 
@@ -40,7 +41,7 @@ fn float(owed: FloatOwed) -> String {
 fn header_quotes_every_bound() {
     let path = Path::new(env!("CARGO_MANIFEST_DIR")).join("include/fieldstop.h");
     let header = fs::read_to_string(path).unwrap();
-    for row in rows() {
+    for row in all_rows() {
         let mut bounds = vec![("fx", fixed(row.owed))];
         if row.floats.is_some() {
             bounds.extend([("f32", float(row.single_owed)), ("f64", float(row.double_owed))]);
@@ -58,5 +59,27 @@ fn header_quotes_every_bound() {
                 bound.is_empty() || after.starts_with(['.', ',', ' ', ';']) && !after.starts_with(" or ");
             assert!(ends, "{name}: \"{quoted}{after}\" is another bound");
         }
+    }
+}
+
+#[test]
+fn header_has_the_arguments_of_every_row() {
+    let root = Path::new(env!("CARGO_MANIFEST_DIR"));
+    let header = fs::read_to_string(root.join("include/fieldstop.h")).unwrap();
+    let mut subjects = BTreeSet::new();
+    for row in all_rows() {
+        let prototype = format!("fieldstop_{}_fx(", row.stem);
+        let at = header.find(&prototype).unwrap_or_else(|| panic!("{} is not in the header", row.stem));
+        let rest = &header[at + prototype.len()..];
+        let arguments: Vec<&str> = rest[..rest.find(')').unwrap()]
+            .split(',')
+            .map(|a| a.rsplit([' ', '*']).next().unwrap())
+            .collect();
+        let named: Vec<&str> = row.arguments.iter().map(|argument| argument.name).collect();
+        assert_eq!(arguments[..arguments.len() - 1], named, "fieldstop_{}_fx", row.stem);
+        subjects.insert(row.subject);
+    }
+    for subject in subjects {
+        assert!(root.join(format!("src/capi/{subject}.rs")).exists(), "{subject}");
     }
 }

@@ -2,10 +2,12 @@
 //! arguments, and through C. One registry drives them all; FIELDSTOP_CASES sets the number of cases a function and form.
 
 mod big;
+mod borders;
 mod cases;
 mod coverage;
 mod documented;
 mod edges;
 mod oracle;
+mod properties;
 mod registry;
 mod twin;

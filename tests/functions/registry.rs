@@ -5,6 +5,8 @@ use super::big::{Big, big};
 use fieldstop::Error;
 
 mod field;
+mod light;
+mod resolution;
 mod units;
 
 /// A unit of the contract: how many of the fixed form's steps make one of the float form's unit.
@@ -76,6 +78,7 @@ impl Argument {
 
 pub const APERTURE: Argument = positive("aperture_um", UM, (50_000, 500_000));
 pub const FOCAL_LENGTH: Argument = positive("focal_length_um", UM, (200_000, 5_000_000));
+pub const WAVELENGTH: Argument = positive("wavelength_nm", NM_AS_NM, (400, 900));
 pub const EYEPIECE: Argument = positive("eyepiece_um", UM, (3_000, 55_000));
 
 /// The error owed by the fixed form.
@@ -146,11 +149,13 @@ impl Row {
     }
 }
 
+pub fn all_rows() -> Vec<Row> {
+    [units::rows(), field::rows(), resolution::rows(), light::rows()].concat()
+}
+
+/// Those that FIELDSTOP_ONLY names, for a long run, or all.
 pub fn rows() -> Vec<Row> {
-    let mut rows = Vec::new();
-    rows.extend(units::rows());
-    rows.extend(field::rows());
-    // FIELDSTOP_ONLY names the functions of a long run.
+    let mut rows = all_rows();
     if let Ok(only) = std::env::var("FIELDSTOP_ONLY") {
         rows.retain(|row| only.split(',').any(|stem| stem == row.stem));
     }
