@@ -1,6 +1,8 @@
 //! Values as characters, against an independent reference: 128-bit integers and strings of the standard library.
 
 use fieldstop::Cause;
+#[cfg(feature = "heapless")]
+use fieldstop::text::string;
 use fieldstop::text::{AngleForm, TextStyle, Unit, Value, text};
 use fieldstop::units::*;
 use proptest::prelude::*;
@@ -320,4 +322,17 @@ proptest! {
             prop_assert_eq!(length, usize::from(width));
         }
     }
+}
+
+#[cfg(feature = "heapless")]
+#[test]
+fn heapless_strings() {
+    let angle = Value::angle(Milliarcseconds(754_000), AngleForm::BySize, 0);
+    let text = string::<12>(|out| angle.write(&TextStyle::UTF8, 8, out)).unwrap();
+    assert_eq!(text, "  12′34″");
+    let error = string::<4>(|out| angle.write(&TextStyle::UTF8, 0, out)).unwrap_err();
+    assert_eq!(error.cause(), Cause::NoRoom);
+    let times = Value::micrometres(Nanometres(3_760), 2);
+    let error = string::<12>(|out| times.write(&TextStyle::HD44780_A00, 0, out)).unwrap_err();
+    assert_eq!(error.cause(), Cause::OutOfRange);
 }
