@@ -1,6 +1,8 @@
 //! Values as characters, against an independent reference: 128-bit integers and strings of the standard library.
 
 use fieldstop::Cause;
+#[cfg(feature = "heapless")]
+use fieldstop::text::string;
 use fieldstop::text::{AngleForm, TextStyle, Unit, Value, text};
 use fieldstop::units::*;
 use proptest::prelude::*;
@@ -115,7 +117,7 @@ fn every_edge() {
 
 #[test]
 fn dense_sweep() {
-    let cases = std::env::var("FIELDSTOP_CASES").ok().and_then(|n| n.parse().ok()).unwrap_or(20_000u32);
+    let cases = std::env::var("FIELDSTOP_CASES").ok().and_then(|n| n.parse().ok()).unwrap_or(8_000u32);
     // A stride that is odd covers the whole type in a scattered order; the shift makes half of the cases small.
     for i in 0..cases {
         let n = i.wrapping_mul(0x9e37_79b1) >> (i % 2 * (i / 2 % 32));
@@ -320,4 +322,17 @@ proptest! {
             prop_assert_eq!(length, usize::from(width));
         }
     }
+}
+
+#[cfg(feature = "heapless")]
+#[test]
+fn heapless_strings() {
+    let angle = Value::angle(Milliarcseconds(754_000), AngleForm::BySize, 0);
+    let text = string::<12>(|out| angle.write(&TextStyle::UTF8, 8, out)).unwrap();
+    assert_eq!(text, "  12′34″");
+    let error = string::<4>(|out| angle.write(&TextStyle::UTF8, 0, out)).unwrap_err();
+    assert_eq!(error.cause(), Cause::NoRoom);
+    let times = Value::micrometres(Nanometres(3_760), 2);
+    let error = string::<12>(|out| times.write(&TextStyle::HD44780_A00, 0, out)).unwrap_err();
+    assert_eq!(error.cause(), Cause::OutOfRange);
 }

@@ -2,7 +2,7 @@
 
 use super::style::{TextStyle, begins_character};
 use super::value::Value;
-use super::write::{LONGEST, NO_ROOM, blank};
+use super::write::{NO_ROOM, blank};
 use crate::status::{Cause, Error};
 
 /// A value with its place on a page.
@@ -103,28 +103,22 @@ impl Plan {
         out: &mut [u8],
     ) -> Result<usize, Error> {
         let most = self.columns - usize::from(self.mark.is_some());
-        let mut text = [0; LONGEST];
-        let mut compose = |value: Value| {
-            let length = value.write(style, 0, &mut text)?;
-            let bytes = text.get(..length).unwrap_or(&[]);
-            Ok((length, bytes.len() - style.continued(bytes)))
-        };
-        let (mut length, mut characters) = compose(self.value)?;
-        if characters > most {
-            (length, characters) = compose(self.value.without_unit())?;
+        let mut value = self.value;
+        let mut size = value.measure(style)?;
+        if size.characters > most {
+            value = value.without_unit();
+            size = value.measure(style)?;
         }
-        let field = self.field.max(characters);
+        let field = self.field.max(size.characters);
         let room = most.checked_sub(field).ok_or(NO_ROOM)?;
-        let label_bytes = cut(label.clone(), room);
-        let label_end = label_bytes.0 + (room - label_bytes.1);
-        let head = label_end + (self.columns - most) + (field - characters);
-        let out = out.get_mut(..head + length).ok_or(NO_ROOM)?;
+        let (label_bytes, label_characters) = cut(label.clone(), room);
+        let label_end = label_bytes + (room - label_characters);
+        let head = label_end + (self.columns - most) + (field - size.characters);
+        let out = out.get_mut(..head + size.bytes).ok_or(NO_ROOM)?;
         let Some((head, tail)) = out.split_at_mut_checked(head) else { return Err(NO_ROOM) };
-        put_head(label.take(label_bytes.0), label_end, self.mark, head);
-        for (place, byte) in tail.iter_mut().zip(text) {
-            *place = byte;
-        }
-        Ok(head.len() + length)
+        put_head(label.take(label_bytes), label_end, self.mark, head);
+        value.write_right(style, 0, tail)?;
+        Ok(head.len() + size.bytes)
     }
 }
 

@@ -8,9 +8,6 @@ use core::sync::atomic::{Ordering, compiler_fence};
 
 pub(super) const NO_ROOM: Error = Error::new(Cause::NoRoom, 0);
 
-/// The longest value in bytes: ten digits, mark, sign, three texts.
-pub(super) const LONGEST: usize = 36;
-
 /// Places left for blanks, and bytes of the value behind them.
 #[derive(Clone, Copy)]
 pub(super) struct Written {
@@ -37,21 +34,8 @@ impl Value {
     #[inline(never)]
     pub(super) fn write_right(self, style: &TextStyle, width: u8, out: &mut [u8]) -> Result<Written, Error> {
         let form = self.form;
-        if let Some(position) = form.refused() {
-            return Err(Error::new(Cause::OutOfRange, position));
-        }
         let text = style.text(form.text());
-        let mut bytes = text.len();
-        let mut digits = 0;
-        if !form.is_word() {
-            digits = count(self.number).max(form.decimals() + 2 * form.groups() + 1);
-            bytes += digits + usize::from(form.decimals() > 0) + usize::from(form.is_negative());
-            for back in 0..form.groups() {
-                bytes += style.text(form.text().wrapping_sub(1 + back as u8)).len();
-            }
-        }
-        let continued = if style.utf8 == 0 { 0 } else { self.continued(style) };
-        let characters = bytes - continued;
+        let Size { digits, bytes, characters } = self.measure_with(text, style)?;
         let width = if width == 0 { characters } else { width.into() };
         let Some(blanks) = width.checked_sub(characters) else { return Err(NO_ROOM) };
         let Some(out) = out.get_mut(..blanks + bytes) else { return Err(NO_ROOM) };
@@ -102,7 +86,38 @@ impl Value {
     }
 }
 
+/// What a value takes.
+pub(super) struct Size {
+    digits: usize,
+    pub(super) bytes: usize,
+    pub(super) characters: usize,
+}
+
 impl Value {
+    #[inline(never)]
+    pub(super) fn measure(self, style: &TextStyle) -> Result<Size, Error> {
+        self.measure_with(style.text(self.form.text()), style)
+    }
+
+    #[inline(always)]
+    fn measure_with(self, text: &[u8], style: &TextStyle) -> Result<Size, Error> {
+        let form = self.form;
+        if let Some(position) = form.refused() {
+            return Err(Error::new(Cause::OutOfRange, position));
+        }
+        let mut bytes = text.len();
+        let mut digits = 0;
+        if !form.is_word() {
+            digits = count(self.number).max(form.decimals() + 2 * form.groups() + 1);
+            bytes += digits + usize::from(form.decimals() > 0) + usize::from(form.is_negative());
+            for back in 0..form.groups() {
+                bytes += style.text(form.text().wrapping_sub(1 + back as u8)).len();
+            }
+        }
+        let continued = if style.utf8 == 0 { 0 } else { self.continued(style) };
+        Ok(Size { digits, bytes, characters: bytes - continued })
+    }
+
     /// Bytes that do not begin a character.
     #[inline(never)]
     fn continued(self, style: &TextStyle) -> usize {
