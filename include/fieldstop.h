@@ -1869,6 +1869,825 @@ fieldstop_status fieldstop_t_number_f64(double focal_ratio,
                                         double *t_number);
 #endif
 
+/* --------------------------------------------------------------------------------------------------
+   Equipment as plain structs in fixed units, and all readouts of one screen in one call. */
+
+/** Eyepiece mapping: true field = A fe / f, the apparent angle proportional to the true one. */
+#define FIELDSTOP_EQUIDISTANT 0
+/** Eyepiece mapping: true field = 2 atan(tan(A/2) fe / f), no distortion. */
+#define FIELDSTOP_RECTILINEAR 1
+/** Visual readout, wanted and available: focal_length_um. */
+#define FIELDSTOP_VISUAL_FOCAL_LENGTH 1
+/** Visual readout, wanted and available: focal_ratio_q16. */
+#define FIELDSTOP_VISUAL_FOCAL_RATIO 2
+/** Visual readout, wanted and available: magnification_q16. */
+#define FIELDSTOP_VISUAL_MAGNIFICATION 4
+/** Visual readout, wanted and available: exit_pupil_um. */
+#define FIELDSTOP_VISUAL_EXIT_PUPIL 8
+/** Visual readout, wanted and available: true_field_mas. */
+#define FIELDSTOP_VISUAL_TRUE_FIELD 16
+/** Visual readout, wanted and available: resolution_uas. */
+#define FIELDSTOP_VISUAL_RESOLUTION 32
+/** Visual readout, wanted and available: dawes_limit_uas. */
+#define FIELDSTOP_VISUAL_DAWES_LIMIT 64
+/** Visual readout, wanted and available: lowest_magnification_q16. */
+#define FIELDSTOP_VISUAL_LOWEST_MAGNIFICATION 128
+/** Visual readout, wanted and available: resolving_magnification_q16. */
+#define FIELDSTOP_VISUAL_RESOLVING_MAGNIFICATION 256
+/** Visual readout, wanted and available: effective_aperture_um. */
+#define FIELDSTOP_VISUAL_EFFECTIVE_APERTURE 512
+/** Visual readout, wanted and available: limiting_magnitude_mmag. */
+#define FIELDSTOP_VISUAL_LIMITING_MAGNITUDE 1024
+/** Visual readout, wanted and available: surface_brightness_q16. */
+#define FIELDSTOP_VISUAL_SURFACE_BRIGHTNESS 2048
+/** Visual readout, wanted: every member. */
+#define FIELDSTOP_VISUAL_ALL 4095
+/** Visual readout, fact: the exit pupil is wider than the eye's, and light falls on the iris (geometry). */
+#define FIELDSTOP_VISUAL_FACT_WIDE_EXIT_PUPIL 1
+/**
+ * Visual readout, fact: the magnification is over the resolving magnification (Rayleigh 1879, and the
+ * observer's eye).
+ */
+#define FIELDSTOP_VISUAL_FACT_EMPTY_MAGNIFICATION 2
+
+/** Visual readout, fact: the true field comes from the apparent field, as good as the mapping. */
+#define FIELDSTOP_VISUAL_FACT_FIELD_FROM_APPARENT 4
+/** Visual readout, fact: the seeing is wider than the resolution (common practice). */
+#define FIELDSTOP_VISUAL_FACT_SEEING_LIMITED 8
+/** Camera readout, wanted and available: focal_length_um. */
+#define FIELDSTOP_CAMERA_FOCAL_LENGTH 1
+/** Camera readout, wanted and available: focal_ratio_q16. */
+#define FIELDSTOP_CAMERA_FOCAL_RATIO 2
+/** Camera readout, wanted and available: t_number_q16. */
+#define FIELDSTOP_CAMERA_T_NUMBER 4
+/** Camera readout, wanted and available: frame_width_mas. */
+#define FIELDSTOP_CAMERA_FRAME_WIDTH 8
+/** Camera readout, wanted and available: frame_height_mas. */
+#define FIELDSTOP_CAMERA_FRAME_HEIGHT 16
+/** Camera readout, wanted and available: pixel_scale_uas. */
+#define FIELDSTOP_CAMERA_PIXEL_SCALE 32
+/** Camera readout, wanted and available: plate_scale_mas_per_mm. */
+#define FIELDSTOP_CAMERA_PLATE_SCALE 64
+/** Camera readout, wanted and available: star_fwhm_uas. */
+#define FIELDSTOP_CAMERA_STAR_FWHM 128
+/** Camera readout, wanted and available: pixels_per_fwhm_q16. */
+#define FIELDSTOP_CAMERA_PIXELS_PER_FWHM 256
+/** Camera readout, wanted: every member. */
+#define FIELDSTOP_CAMERA_ALL 511
+/** Camera readout, fact: under two pixels to the star image (common practice, after Shannon 1949). */
+#define FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING 1
+/** Camera readout, fact: over three pixels to the star image (common practice). */
+#define FIELDSTOP_CAMERA_FACT_FINE_SAMPLING 2
+
+/** A telescope: objective or primary mirror, with the Barlow or reducer that is in use. */
+typedef struct fieldstop_telescope {
+    /** Member 1. Diameter of the entrance pupil, micrometres; not 0. */
+    uint32_t aperture_um;
+    /** Member 2. Focal length without Barlow or reducer, micrometres; not 0. */
+    uint32_t focal_length_um;
+    /** Member 3. Diameter of the central obstruction, micrometres, under the aperture; 0: none. */
+    uint32_t obstruction_um;
+    /**
+     * Member 4. What a Barlow (over 1) or reducer (under 1) multiplies the focal length by, unsigned Q16.16;
+     * 65536 where there is none; not 0.
+     */
+    uint32_t amplification_q16;
+    /**
+     * Member 5. Share of the light that mirrors and glass pass on, without the obstruction's loss, unsigned
+     * Q16.16, at most 65536; 0: unknown.
+     */
+    uint32_t throughput_q16;
+} fieldstop_telescope;
+
+/** An eyepiece. The field stop gives the true field best; without it the apparent field serves. */
+typedef struct fieldstop_eyepiece {
+    /** Member 1. Focal length, micrometres; not 0. */
+    uint32_t focal_length_um;
+    /**
+     * Member 2. Diameter of the field stop as the telescope sees it (the effective one where lenses stand
+     * before it), micrometres; 0: unknown.
+     */
+    uint32_t field_stop_um;
+    /** Member 3. Apparent field, milliarcseconds, under 180 degrees (648,000,000); 0: unknown. */
+    uint32_t apparent_field_mas;
+    /**
+     * Member 4. How angles at the eye grow with the angle on the sky: 0 equidistant, 1 rectilinear (named
+     * constants). Matters only where the apparent field is used.
+     */
+    uint8_t mapping;
+    /** Ignored. */
+    uint8_t padding[3];
+} fieldstop_eyepiece;
+
+/** A camera at the focus. */
+typedef struct fieldstop_camera {
+    /** Member 1. Pitch of the single pixels, without binning, nanometres; not 0. */
+    uint32_t pixel_nm;
+    /** Member 2. Single pixels across the frame's width; not 0. */
+    uint16_t columns;
+    /** Member 3. Single pixels across the frame's height; not 0. */
+    uint16_t rows;
+    /**
+     * Member 4. Pixels read out as one, along each side; 1 where they are read singly; not 0, not over the
+     * columns or the rows.
+     */
+    uint8_t binning;
+    /** Ignored. */
+    uint8_t padding[3];
+} fieldstop_camera;
+
+/** An eye and the night that it observes in. A camera readout uses the seeing and the wavelength only. */
+typedef struct fieldstop_observer {
+    /**
+     * Member 1. Faintest star that the bare eye sees here tonight, millimagnitudes; any value, 0 is
+     * magnitude 0.
+     */
+    int32_t naked_eye_mmag;
+    /** Member 2. Diameter of the eye's pupil in the dark, micrometres; 0: unknown. */
+    uint32_t eye_pupil_um;
+    /**
+     * Member 3. Smallest angle that the eye parts, milliarcseconds; 0: unknown. 60,000 is acuity 1.0 on a
+     * bright chart (ISO 8596); 120,000 to 240,000 at the eyepiece is common practice.
+     */
+    uint32_t eye_resolution_mas;
+    /**
+     * Member 4. Full width at half maximum of a star in a long exposure, by the air alone, microarcseconds;
+     * 0: unknown.
+     */
+    uint32_t seeing_uas;
+    /**
+     * Member 5. Wavelength that resolution is stated for, nanometres; not 0. 550 is common practice for the
+     * eye.
+     */
+    uint32_t wavelength_nm;
+} fieldstop_observer;
+
+/**
+ * What the eye gets at the eyepiece. Members from `focal_length_um` on are 0 where their bit in `available`
+ * is clear.
+ */
+typedef struct fieldstop_visual_readout {
+    /** Bits of the members that were wanted and could be known. */
+    uint32_t available;
+    /** What is worth telling beside the values; named constants. */
+    uint32_t facts;
+    /** Focal length with the Barlow or reducer, micrometres: f k. */
+    uint32_t focal_length_um;
+    /** Focal ratio with the Barlow or reducer: N = f k / D. */
+    uint32_t focal_ratio_q16;
+    /** Magnification: M = f k / fe. */
+    uint32_t magnification_q16;
+    /** Exit pupil, micrometres: D fe / (f k). */
+    uint32_t exit_pupil_um;
+    /**
+     * Diameter of the sky in view, milliarcseconds: from the field stop where that is known, otherwise from
+     * the apparent field by the eyepiece's mapping.
+     */
+    uint32_t true_field_mas;
+    /** Rayleigh limit with the central obstruction, microarcseconds. */
+    uint32_t resolution_uas;
+    /** Dawes limit, microarcseconds: 116 arcsec mm / D. */
+    uint32_t dawes_limit_uas;
+    /** Magnification at which the exit pupil fills the eye's pupil: D / p. Below it light falls on the iris. */
+    uint32_t lowest_magnification_q16;
+    /**
+     * Magnification at which the resolution limit reaches the smallest angle that this eye parts: eye
+     * resolution / resolution. Above it no new detail shows.
+     */
+    uint32_t resolving_magnification_q16;
+    /**
+     * Unobstructed, loss-free aperture that gathers as much light, micrometres: Deff = D sqrt((1 - (d/D)^2)
+     * T).
+     */
+    uint32_t effective_aperture_um;
+    /**
+     * Faintest star through the eyepiece, millimagnitudes: m0 + 5 log10(Deff / p). Where the exit pupil is
+     * wider than the eye's, Deff is that of the part of the aperture which the eye takes in, p f k / fe
+     * across instead of D.
+     */
+    int32_t limiting_magnitude_mmag;
+    /**
+     * Brightness of an extended object against the bare eye's view of it: T (min(1, (x/p)^2) - min(1,
+     * (s/p)^2)), x the exit pupil and s the obstruction's shadow within it, d fe / (f k).
+     */
+    uint32_t surface_brightness_q16;
+} fieldstop_visual_readout;
+
+/**
+ * What a camera gets at the focus. Members from `focal_length_um` on are 0 where their bit in `available` is
+ * clear.
+ */
+typedef struct fieldstop_camera_readout {
+    /** Bits of the members that were wanted and could be known. */
+    uint32_t available;
+    /** What is worth telling beside the values; named constants. */
+    uint32_t facts;
+    /** Focal length with the Barlow or reducer, micrometres: f k. */
+    uint32_t focal_length_um;
+    /** Focal ratio with the Barlow or reducer: N = f k / D. */
+    uint32_t focal_ratio_q16;
+    /**
+     * Focal ratio of a loss-free, unobstructed telescope that exposes as long: f k / Deff = N / sqrt((1 -
+     * (d/D)^2) T).
+     */
+    uint32_t t_number_q16;
+    /** Sky across the frame's columns, milliarcseconds: 2 atan(p n / (2 f k)); binning does not change it. */
+    uint32_t frame_width_mas;
+    /** Sky across the frame's rows, milliarcseconds. */
+    uint32_t frame_height_mas;
+    /** Sky to one pixel as read out, with binning, microarcseconds: (1 rad) p b / (f k). */
+    uint32_t pixel_scale_uas;
+    /** Sky to one millimetre at the focus, milliarcseconds per millimetre: (1 rad) / (f k). */
+    uint32_t plate_scale_mas_per_mm;
+    /**
+     * Full width at half maximum of a star's image, microarcseconds: seeing and diffraction as the root of
+     * the sum of squares.
+     */
+    uint32_t star_fwhm_uas;
+    /** Pixels as read out across that width. */
+    uint32_t pixels_per_fwhm_q16;
+} fieldstop_camera_readout;
+
+/**
+ * Gives 0 for a telescope that can be used; otherwise the cause, with the number of the first bad member,
+ * counted from 1, in the place of the argument.
+ *
+ * Members: aperture_um not 0 (1), focal_length_um not 0 (2), obstruction_um under the aperture (3; 0: none),
+ * amplification_q16 not 0 (4; 65536: none), throughput_q16 at most 65536 (5; 0: unknown).
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_telescope_check(const struct fieldstop_telescope *telescope);
+
+/**
+ * Gives 0 for an eyepiece that can be used; otherwise the cause, with the number of the first bad member,
+ * counted from 1, in the place of the argument.
+ *
+ * Members: focal_length_um not 0 (1), field_stop_um (2; 0: unknown), apparent_field_mas under 648,000,000,
+ * half a turn (3; 0: unknown), mapping FIELDSTOP_EQUIDISTANT or FIELDSTOP_RECTILINEAR (4).
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_check(const struct fieldstop_eyepiece *eyepiece);
+
+/**
+ * Gives 0 for a camera that can be used; otherwise the cause, with the number of the first bad member,
+ * counted from 1, in the place of the argument.
+ *
+ * Members: pixel_nm not 0 (1), columns not 0 (2), rows not 0 (3), binning not 0, not over the columns or the
+ * rows (4).
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_camera_check(const struct fieldstop_camera *camera);
+
+/**
+ * Gives 0 for an observer that can be used; otherwise the cause, with the number of the first bad member,
+ * counted from 1, in the place of the argument.
+ *
+ * Members: naked_eye_mmag (1), eye_pupil_um (2; 0: unknown), eye_resolution_mas (3; 0: unknown), seeing_uas
+ * (4; 0: unknown), wavelength_nm not 0 (5).
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_observer_check(const struct fieldstop_observer *observer);
+
+/**
+ * Gives what the eye gets at the eyepiece: the wanted values, each in the unit of its name, and the facts
+ * about them.
+ *
+ * wanted: any of the FIELDSTOP_VISUAL_ bits; only those values are computed, and unknown bits are ignored.
+ * Formulas: beside each member of the readout; a value is exactly that of the fixed function of the formula.
+ * A value that rests on something unknown (eye pupil, eye resolution, field, throughput) or that does not
+ * fit its type is not available: its bit in `available` is clear and its member 0. The rest still comes.
+ * Caution: never point unfiltered optics at the Sun; follow the maker's instructions and local rules.
+ * Statuses: null pointer; zero or out of range, as the check of the first bad struct gives it, with the
+ * struct's position (telescope 1, eyepiece 2, observer 3): its check names the member.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_visual_readout_compute(const struct fieldstop_telescope *telescope,
+                                                  const struct fieldstop_eyepiece *eyepiece,
+                                                  const struct fieldstop_observer *observer,
+                                                  uint32_t wanted,
+                                                  struct fieldstop_visual_readout *readout);
+
+/**
+ * Gives what a camera gets at the focus: the wanted values, each in the unit of its name, and the facts
+ * about them.
+ *
+ * wanted: any of the FIELDSTOP_CAMERA_ bits; only those values are computed, and unknown bits are ignored.
+ * Formulas: beside each member of the readout; a value is exactly that of the fixed function of the formula.
+ * A value that rests on something unknown (seeing, throughput) or that does not fit its type is not
+ * available: its bit in `available` is clear and its member 0. The rest still comes.
+ * Caution: never point unfiltered optics at the Sun; follow the maker's instructions and local rules.
+ * Statuses: null pointer; zero or out of range, as the check of the first bad struct gives it, with the
+ * struct's position (telescope 1, camera 2, observer 3): its check names the member.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_camera_readout_compute(const struct fieldstop_telescope *telescope,
+                                                  const struct fieldstop_camera *camera,
+                                                  const struct fieldstop_observer *observer,
+                                                  uint32_t wanted,
+                                                  struct fieldstop_camera_readout *readout);
+
+/* --------------------------------------------------------------------------------------------------
+   Quantities as characters of a display: integers only, into a buffer of the caller's, without
+   `core::fmt`. */
+
+/** Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on. */
+#define FIELDSTOP_ANGLE_BY_SIZE 0
+/** Angle: degrees with decimals. */
+#define FIELDSTOP_ANGLE_DECIMAL_DEGREES 1
+/** Angle: degrees and minutes. */
+#define FIELDSTOP_ANGLE_DEGREES_MINUTES 2
+/** Angle: minutes and seconds, with degrees in front from sixty minutes on. */
+#define FIELDSTOP_ANGLE_MINUTES_SECONDS 3
+/** Angle: seconds, however many. */
+#define FIELDSTOP_ANGLE_DECIMAL_SECONDS 4
+/** Unit: a plain number. */
+#define FIELDSTOP_UNIT_NONE 0
+/** Unit: between degrees and minutes of arc. */
+#define FIELDSTOP_UNIT_DEGREE 1
+/** Unit: minutes of arc. */
+#define FIELDSTOP_UNIT_MINUTE 2
+/** Unit: seconds of arc. */
+#define FIELDSTOP_UNIT_SECOND 3
+/** Unit: degrees with decimals. */
+#define FIELDSTOP_UNIT_DECIMAL_DEGREE 4
+/** Unit: metres. */
+#define FIELDSTOP_UNIT_METRE 5
+/** Unit: millimetres. */
+#define FIELDSTOP_UNIT_MILLIMETRE 6
+/** Unit: micrometres. */
+#define FIELDSTOP_UNIT_MICROMETRE 7
+/** Unit: nanometres. */
+#define FIELDSTOP_UNIT_NANOMETRE 8
+/** Unit: magnification. */
+#define FIELDSTOP_UNIT_TIMES 9
+/** Unit: per hundred. */
+#define FIELDSTOP_UNIT_PERCENT 10
+/** Unit: magnitudes. */
+#define FIELDSTOP_UNIT_MAGNITUDE 11
+/** Unit: in front of a focal ratio. */
+#define FIELDSTOP_UNIT_FOCAL_RATIO 12
+/** Unit: pixels. */
+#define FIELDSTOP_UNIT_PIXEL 13
+/** Unit: seconds of arc to a pixel. */
+#define FIELDSTOP_UNIT_SECOND_PER_PIXEL 14
+/** Unit: seconds of arc to a millimetre. */
+#define FIELDSTOP_UNIT_SECOND_PER_MILLIMETRE 15
+/** Unit: seconds of arc in a second of time. */
+#define FIELDSTOP_UNIT_SECOND_PER_TIME 16
+/** Unit: cycles to a millimetre. */
+#define FIELDSTOP_UNIT_PER_MILLIMETRE 17
+/** Unit: seconds of time. */
+#define FIELDSTOP_UNIT_TIME 18
+/** Unit: steps of a motor. */
+#define FIELDSTOP_UNIT_STEP 19
+/** Unit: kelvin. */
+#define FIELDSTOP_UNIT_KELVIN 20
+/** Unit: watts. */
+#define FIELDSTOP_UNIT_WATT 21
+/** Rows of the visual pages, and labels that they need. */
+#define FIELDSTOP_VISUAL_ROWS 16
+/** Visual row: magnification. */
+#define FIELDSTOP_VISUAL_ROW_MAGNIFICATION 0
+/** Visual row: true field. */
+#define FIELDSTOP_VISUAL_ROW_TRUE_FIELD 1
+/** Visual row: exit pupil. */
+#define FIELDSTOP_VISUAL_ROW_EXIT_PUPIL 2
+/** Visual row: resolution. */
+#define FIELDSTOP_VISUAL_ROW_RESOLUTION 3
+/** Visual row: faintest star. */
+#define FIELDSTOP_VISUAL_ROW_FAINTEST_STAR 4
+/** Visual row: surface brightness. */
+#define FIELDSTOP_VISUAL_ROW_SURFACE_BRIGHTNESS 5
+/** Visual row: focal ratio. */
+#define FIELDSTOP_VISUAL_ROW_FOCAL_RATIO 6
+/** Visual row: focal length. */
+#define FIELDSTOP_VISUAL_ROW_FOCAL_LENGTH 7
+/** Visual row: lowest magnification. */
+#define FIELDSTOP_VISUAL_ROW_LOWEST_MAGNIFICATION 8
+/** Visual row: resolving magnification. */
+#define FIELDSTOP_VISUAL_ROW_RESOLVING_MAGNIFICATION 9
+/** Visual row: dawes limit. */
+#define FIELDSTOP_VISUAL_ROW_DAWES_LIMIT 10
+/** Visual row: effective aperture. */
+#define FIELDSTOP_VISUAL_ROW_EFFECTIVE_APERTURE 11
+/** Visual row: wide exit pupil. */
+#define FIELDSTOP_VISUAL_ROW_WIDE_EXIT_PUPIL 12
+/** Visual row: empty magnification. */
+#define FIELDSTOP_VISUAL_ROW_EMPTY_MAGNIFICATION 13
+/** Visual row: field from apparent. */
+#define FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT 14
+/** Visual row: seeing limited. */
+#define FIELDSTOP_VISUAL_ROW_SEEING_LIMITED 15
+/** Rows of the camera pages, and labels that they need. */
+#define FIELDSTOP_CAMERA_ROWS 11
+/** Camera row: frame width. */
+#define FIELDSTOP_CAMERA_ROW_FRAME_WIDTH 0
+/** Camera row: frame height. */
+#define FIELDSTOP_CAMERA_ROW_FRAME_HEIGHT 1
+/** Camera row: pixel scale. */
+#define FIELDSTOP_CAMERA_ROW_PIXEL_SCALE 2
+/** Camera row: star width. */
+#define FIELDSTOP_CAMERA_ROW_STAR_WIDTH 3
+/** Camera row: star pixels. */
+#define FIELDSTOP_CAMERA_ROW_STAR_PIXELS 4
+/** Camera row: focal ratio. */
+#define FIELDSTOP_CAMERA_ROW_FOCAL_RATIO 5
+/** Camera row: t-number. */
+#define FIELDSTOP_CAMERA_ROW_T_NUMBER 6
+/** Camera row: focal length. */
+#define FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH 7
+/** Camera row: plate scale. */
+#define FIELDSTOP_CAMERA_ROW_PLATE_SCALE 8
+/** Camera row: coarse sampling. */
+#define FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING 9
+/** Camera row: fine sampling. */
+#define FIELDSTOP_CAMERA_ROW_FINE_SAMPLING 10
+
+/**
+ * The look of all text. Plain data that the caller owns: copy one of the ready ones and change what you like.
+ *
+ * A text is up to 8 bytes of the display's character set, filled up with zeros.
+ */
+typedef struct fieldstop_text_style {
+    /** The text of unit number n in place n - 1, with the blank before it where one is wanted. */
+    uint8_t units[21][8];
+    /** Stands where a value is not available. */
+    uint8_t dash[8];
+    /** Answers whether a fact holds. */
+    uint8_t yes[8];
+    /** Answers whether a fact holds. */
+    uint8_t no[8];
+    /** Point or comma, one byte. */
+    uint8_t decimal_mark;
+    /** Stands before a value that a fact of the readout concerns, one byte. */
+    uint8_t fact_mark;
+    /** 1: texts are UTF-8, and a character may take several bytes. 0: every byte is a character. */
+    uint8_t utf8;
+} fieldstop_text_style;
+
+/** A part of a line, in characters. */
+typedef struct fieldstop_span {
+    /** The first character that is different, counted from 0. */
+    uint16_t first;
+    /** Characters from there to the last that is different; 0 where nothing is. */
+    uint16_t count;
+} fieldstop_span;
+
+/**
+ * Gives the style of plain ASCII; never null.
+ *
+ * `d` and `deg` stand for the degree sign, `u` for micro, `x` for times. Copy it to change the decimal mark or a text.
+ */
+const struct fieldstop_text_style *fieldstop_text_style_ascii(void);
+
+/** Gives the style of UTF-8, with the signs of degree, prime, double prime, micro and times; never null. */
+const struct fieldstop_text_style *fieldstop_text_style_utf8(void);
+
+/** Gives the style of character displays with ROM A00 (Japanese) of the HD44780U; never null. */
+const struct fieldstop_text_style *fieldstop_text_style_hd44780_a00(void);
+
+/** Gives the style of character displays with ROM A02 (European) of the HD44780U; never null. */
+const struct fieldstop_text_style *fieldstop_text_style_hd44780_a02(void);
+
+/**
+ * Writes an integer with its unit as text and gives its length in bytes.
+ *
+ * Ranges: unit one of FIELDSTOP_UNIT_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (unit), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_count(uint32_t count,
+                                      uint8_t unit,
+                                      const struct fieldstop_text_style *style,
+                                      uint8_t width,
+                                      char *text,
+                                      uint16_t capacity,
+                                      uint16_t *length);
+
+/**
+ * Writes a length in millimetres as text and gives its length in bytes.
+ *
+ * length_um / 1000, to nearest, halves away from zero.
+ * Ranges: decimals 0 to 3; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_length_mm(uint32_t length_um,
+                                          uint8_t decimals,
+                                          const struct fieldstop_text_style *style,
+                                          uint8_t width,
+                                          char *text,
+                                          uint16_t capacity,
+                                          uint16_t *length);
+
+/**
+ * Writes a length in micrometres as text and gives its length in bytes.
+ *
+ * length_nm / 1000, to nearest, halves away from zero.
+ * Ranges: decimals 0 to 3; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_length_um(uint32_t length_nm,
+                                          uint8_t decimals,
+                                          const struct fieldstop_text_style *style,
+                                          uint8_t width,
+                                          char *text,
+                                          uint16_t capacity,
+                                          uint16_t *length);
+
+/**
+ * Writes a plain ratio as text and gives its length in bytes.
+ *
+ * ratio_q16 / 65536, to nearest, halves away from zero.
+ * Ranges: decimals 0 to 4; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_ratio(uint32_t ratio_q16,
+                                      uint8_t decimals,
+                                      const struct fieldstop_text_style *style,
+                                      uint8_t width,
+                                      char *text,
+                                      uint16_t capacity,
+                                      uint16_t *length);
+
+/**
+ * Writes a magnification, as in 62.5x as text and gives its length in bytes.
+ *
+ * magnification_q16 / 65536, to nearest, halves away from zero.
+ * Ranges: decimals 0 to 4; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_magnification(uint32_t magnification_q16,
+                                              uint8_t decimals,
+                                              const struct fieldstop_text_style *style,
+                                              uint8_t width,
+                                              char *text,
+                                              uint16_t capacity,
+                                              uint16_t *length);
+
+/**
+ * Writes a focal ratio, as in f/6.0 as text and gives its length in bytes.
+ *
+ * focal_ratio_q16 / 65536, to nearest, halves away from zero.
+ * Ranges: decimals 0 to 4; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_focal_ratio(uint32_t focal_ratio_q16,
+                                            uint8_t decimals,
+                                            const struct fieldstop_text_style *style,
+                                            uint8_t width,
+                                            char *text,
+                                            uint16_t capacity,
+                                            uint16_t *length);
+
+/**
+ * Writes a ratio in per cent as text and gives its length in bytes.
+ *
+ * 100 ratio_q16 / 65536, to nearest, halves away from zero.
+ * Ranges: decimals 0 to 2; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_percent(uint32_t ratio_q16,
+                                        uint8_t decimals,
+                                        const struct fieldstop_text_style *style,
+                                        uint8_t width,
+                                        char *text,
+                                        uint16_t capacity,
+                                        uint16_t *length);
+
+/**
+ * Writes an angle in seconds of arc as text and gives its length in bytes.
+ *
+ * angle_uas / 1000000, to nearest, halves away from zero.
+ * Ranges: decimals 0 to 6; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_arcseconds(uint32_t angle_uas,
+                                           uint8_t decimals,
+                                           const struct fieldstop_text_style *style,
+                                           uint8_t width,
+                                           char *text,
+                                           uint16_t capacity,
+                                           uint16_t *length);
+
+/**
+ * Writes a magnitude as text and gives its length in bytes.
+ *
+ * magnitude_mmag / 1000, to nearest, halves away from zero.
+ * Ranges: decimals 0 to 3; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_magnitude(int32_t magnitude_mmag,
+                                          uint8_t decimals,
+                                          const struct fieldstop_text_style *style,
+                                          uint8_t width,
+                                          char *text,
+                                          uint16_t capacity,
+                                          uint16_t *length);
+
+/**
+ * Writes an angle in degrees, minutes and seconds as text and gives its length in bytes.
+ *
+ * angle_mas / 1000 seconds of arc, to nearest in the last place shown, halves up, carried through: 59'59.6" in whole
+ * seconds is one degree. By size is decided by the rounded angle; the decimals then are those of an angle under one
+ * minute, larger ones have none.
+ * Ranges: form one of FIELDSTOP_ANGLE_...; decimals 0 to 3, with minutes 0 to 2; width 0 (as long as it is) or
+ * the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (form, decimals), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_angle(uint32_t angle_mas,
+                                      uint8_t form,
+                                      uint8_t decimals,
+                                      const struct fieldstop_text_style *style,
+                                      uint8_t width,
+                                      char *text,
+                                      uint16_t capacity,
+                                      uint16_t *length);
+
+/**
+ * Writes the text of a unit and gives its length in bytes.
+ *
+ * Ranges: unit one of FIELDSTOP_UNIT_...
+ * Statuses: null pointer, out of range (unit), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_unit(uint8_t unit,
+                                     const struct fieldstop_text_style *style,
+                                     char *text,
+                                     uint16_t capacity,
+                                     uint16_t *length);
+
+/** Gives the English labels of the visual pages for 20 columns and more, an array of FIELDSTOP_VISUAL_ROWS; never null. */
+const char *const *fieldstop_text_visual_labels(void);
+
+/** Gives the English labels of the visual pages for 8 and 16 columns, an array of FIELDSTOP_VISUAL_ROWS; never null. */
+const char *const *fieldstop_text_visual_labels_short(void);
+
+/**
+ * Writes one line of the visual pages and gives its length in bytes; it is always `columns` characters long.
+ *
+ * `line` counts over all pages: line r of page p is p rows + r. From 16 columns on a line has the label, cut where it
+ * must be, a mark where a fact concerns the value, and the value in its field at the right end; below 16 columns the
+ * label and the value have a line each. A line behind the last row is blank.
+ * Ranges: columns 8 to 255; labels an array of FIELDSTOP_VISUAL_ROWS.
+ * Statuses: null pointer, out of range (columns), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_visual_line(const struct fieldstop_visual_readout *readout,
+                                            const char *const *labels,
+                                            const struct fieldstop_text_style *style,
+                                            uint8_t columns,
+                                            uint8_t line,
+                                            char *text,
+                                            uint16_t capacity,
+                                            uint16_t *length);
+
+/**
+ * Writes a value of the visual pages with its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_VISUAL_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_visual_value(const struct fieldstop_visual_readout *readout,
+                                             uint8_t row,
+                                             const struct fieldstop_text_style *style,
+                                             uint8_t width,
+                                             char *text,
+                                             uint16_t capacity,
+                                             uint16_t *length);
+
+/**
+ * Writes a value of the visual pages without its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_VISUAL_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_visual_number(const struct fieldstop_visual_readout *readout,
+                                              uint8_t row,
+                                              const struct fieldstop_text_style *style,
+                                              uint8_t width,
+                                              char *text,
+                                              uint16_t capacity,
+                                              uint16_t *length);
+
+/**
+ * Writes the unit of a value of the visual pages and gives its length in bytes, which may be 0.
+ *
+ * It belongs to the number that fieldstop_text_visual_number writes.
+ * Ranges: row one of FIELDSTOP_VISUAL_ROW_...
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_visual_unit(const struct fieldstop_visual_readout *readout,
+                                            uint8_t row,
+                                            const struct fieldstop_text_style *style,
+                                            char *text,
+                                            uint16_t capacity,
+                                            uint16_t *length);
+
+/** Gives the English labels of the camera pages for 20 columns and more, an array of FIELDSTOP_CAMERA_ROWS; never null. */
+const char *const *fieldstop_text_camera_labels(void);
+
+/** Gives the English labels of the camera pages for 8 and 16 columns, an array of FIELDSTOP_CAMERA_ROWS; never null. */
+const char *const *fieldstop_text_camera_labels_short(void);
+
+/**
+ * Writes one line of the camera pages and gives its length in bytes; it is always `columns` characters long.
+ *
+ * `line` counts over all pages: line r of page p is p rows + r. From 16 columns on a line has the label, cut where it
+ * must be, a mark where a fact concerns the value, and the value in its field at the right end; below 16 columns the
+ * label and the value have a line each. A line behind the last row is blank.
+ * Ranges: columns 8 to 255; labels an array of FIELDSTOP_CAMERA_ROWS.
+ * Statuses: null pointer, out of range (columns), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_camera_line(const struct fieldstop_camera_readout *readout,
+                                            const char *const *labels,
+                                            const struct fieldstop_text_style *style,
+                                            uint8_t columns,
+                                            uint8_t line,
+                                            char *text,
+                                            uint16_t capacity,
+                                            uint16_t *length);
+
+/**
+ * Writes a value of the camera pages with its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_CAMERA_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_camera_value(const struct fieldstop_camera_readout *readout,
+                                             uint8_t row,
+                                             const struct fieldstop_text_style *style,
+                                             uint8_t width,
+                                             char *text,
+                                             uint16_t capacity,
+                                             uint16_t *length);
+
+/**
+ * Writes a value of the camera pages without its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_CAMERA_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_camera_number(const struct fieldstop_camera_readout *readout,
+                                              uint8_t row,
+                                              const struct fieldstop_text_style *style,
+                                              uint8_t width,
+                                              char *text,
+                                              uint16_t capacity,
+                                              uint16_t *length);
+
+/**
+ * Writes the unit of a value of the camera pages and gives its length in bytes, which may be 0.
+ *
+ * It belongs to the number that fieldstop_text_camera_number writes.
+ * Ranges: row one of FIELDSTOP_CAMERA_ROW_...
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_camera_unit(const struct fieldstop_camera_readout *readout,
+                                            uint8_t row,
+                                            const struct fieldstop_text_style *style,
+                                            char *text,
+                                            uint16_t capacity,
+                                            uint16_t *length);
+
+/**
+ * Gives the part of a line that is different from what is shown, in characters.
+ *
+ * span.count is 0 where nothing is. Where the two have different numbers of characters it reaches to the end of the line.
+ * Ranges: lengths in bytes.
+ * Statuses: null pointer.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_changed(const char *shown,
+                                        uint16_t shown_length,
+                                        const char *line,
+                                        uint16_t line_length,
+                                        const struct fieldstop_text_style *style,
+                                        struct fieldstop_span *span);
+
 #ifdef __cplusplus
 } /* extern "C" */
 #endif

@@ -5,6 +5,8 @@
 //! | module | what it holds |
 //! |---|---|
 //! | `capi` | the C interface (feature `capi`) |
+//! | [`setup`] | telescope, eyepiece, camera, observer: all readouts of one screen |
+//! | [`text`] | a quantity as display characters |
 //! | [`optics`] | the formulas |
 //! | [`convert`] | conversions between the fixed units |
 //! | `math` | integer and float kernels |
@@ -29,7 +31,9 @@ extern crate std;
 pub mod capi;
 mod math;
 pub mod optics;
+pub mod setup;
 pub mod status;
+pub mod text;
 pub mod units;
 
 pub use math::convert;

@@ -7,7 +7,9 @@
 pub mod field;
 pub mod light;
 pub mod resolution;
+pub mod setup;
 pub mod status;
+pub mod text;
 pub mod units;
 
 use crate::status::{Cause, Error};

@@ -1,0 +1,96 @@
+//! Equipment as plain structs in fixed units, and all readouts of one screen in one call.
+//!
+//! Fill a [`Telescope`], an [`Eyepiece`] or a [`Camera`], and an [`Observer`]; [`check`](Telescope::check)
+//! each when it is entered; then ask [`VisualReadout::compute`] or [`CameraReadout::compute`] for the values
+//! that a screen shows, as bits. Only those are computed, and what they share is computed once: a value is what
+//! the functions of [`optics`](crate::optics) give one after the other, with each result in between rounded to its
+//! unit.
+//!
+//! In C the structs are `fieldstop_telescope` and so on, with the same members. Their layout never changes:
+//! more comes as a new struct under a new name. A member named `padding` is ignored.
+//!
+//! ```
+//! use fieldstop::setup::{Eyepiece, Observer, Telescope, VisualReadout};
+//!
+//! const TELESCOPE: Telescope = Telescope {
+//!     aperture_um: 187_500,
+//!     focal_length_um: 1_130_000,
+//!     obstruction_um: 47_000,
+//!     amplification_q16: 1 << 16,
+//!     throughput_q16: 0, // unknown
+//! };
+//! const _: () = assert!(TELESCOPE.check().is_ok()); // a check can run in the compiler
+//!
+//! let eyepiece = Eyepiece { focal_length_um: 37_000, field_stop_um: 43_200, ..Eyepiece::default() };
+//! let observer = Observer { wavelength_nm: 550, ..Observer::default() };
+//! let wanted = VisualReadout::MAGNIFICATION | VisualReadout::TRUE_FIELD | VisualReadout::LIMITING_MAGNITUDE;
+//! let readout = VisualReadout::compute(&TELESCOPE, &eyepiece, &observer, wanted)?;
+//! assert_eq!(readout.available, VisualReadout::MAGNIFICATION | VisualReadout::TRUE_FIELD);
+//! assert_eq!(readout.magnification_q16 >> 16, 30);
+//! assert_eq!(readout.true_field_mas / 60_000, 131); // minutes of arc
+//! # Ok::<(), fieldstop::Error>(())
+//! ```
+//!
+//! # Checks
+//!
+//! A check tells the first bad member, in the order of declaration, as the [`Error`](crate::Error)'s
+//! argument, counted from 1. Within a readout call the argument is the struct's own position in the call.
+//!
+//! # Unknown is zero
+//!
+//! Where a member's documentation says "0: unknown", what depends on it is not available and the rest still
+//! comes.
+//! A value that does not fit its type is not available either. What is not available has its bit in
+//! `available` clear and is 0.
+
+/// Stores a member whose bit is wanted and whose value is known, and says so.
+macro_rules! tell {
+    ($out:ident, $wanted:ident, $bit:ident, $member:ident, $value:expr) => {
+        if $wanted & Self::$bit != 0
+            && let Ok(value) = $value
+        {
+            $out.$member = value.0;
+            $out.available |= Self::$bit;
+        }
+    };
+}
+
+use crate::math::divide;
+use crate::status::{Cause, Error};
+use crate::units::Q16;
+
+mod camera;
+mod camera_readout;
+mod eyepiece;
+mod observer;
+mod telescope;
+mod visual_readout;
+
+pub use camera::Camera;
+pub use camera_readout::CameraReadout;
+pub use eyepiece::Eyepiece;
+pub use observer::Observer;
+pub use telescope::Telescope;
+pub use visual_readout::VisualReadout;
+
+/// a / b in Q16.16, for quantities that no formula of `optics` divides yet; a is below 2^47.
+fn ratio_q16(a: u64, b: u32) -> Result<Q16, Error> {
+    match b {
+        0 => Err(Error::new(Cause::Undefined, 0)),
+        b => divide::rounded(a << 16, b).map(Q16),
+    }
+}
+
+/// Half a turn in milliarcseconds: a field of view must be narrower.
+const HALF_TURN_MAS: u32 = 648_000_000;
+
+// C sees these layouts on 8, 16 and 32-bit targets alike: any other does not compile.
+const _: () = {
+    use core::mem::{offset_of, size_of};
+    assert!(size_of::<Telescope>() == 20);
+    assert!(size_of::<Eyepiece>() == 16 && offset_of!(Eyepiece, mapping) == 12);
+    assert!(size_of::<Camera>() == 12 && offset_of!(Camera, rows) == 6 && offset_of!(Camera, binning) == 8);
+    assert!(size_of::<Observer>() == 20);
+    assert!(size_of::<VisualReadout>() == 56 && offset_of!(VisualReadout, limiting_magnitude_mmag) == 48);
+    assert!(size_of::<CameraReadout>() == 44 && offset_of!(CameraReadout, pixels_per_fwhm_q16) == 40);
+};
