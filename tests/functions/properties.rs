@@ -37,11 +37,22 @@ const DIRECTIONS: &[(&str, &str)] = &[
     ("airy_fwhm", "-+"),
     ("airy_radius", "+-+"),
     ("cutoff_frequency", "-+-"),
+    // A thin ring's contrast rises again on the way.
     ("contrast", "."),
     ("strehl_ratio", "-+"),
     ("fried_parameter", "-+"),
     ("seeing_at_airmass", "++"),
     ("combined_fwhm", "+++"),
+    ("throughput", "-+-+"),
+    ("clear_fraction", "+-"),
+    ("effective_aperture", "+-+"),
+    ("magnitude_gain", "+-"),
+    ("limiting_magnitude", "++-"),
+    ("surface_brightness", "+-+"),
+    ("magnitude_difference", "-+"),
+    ("distance_dimming", "-+"),
+    ("extinction", "++"),
+    ("t_number", "+-"),
 ];
 
 fn directions(row: &Row) -> Vec<char> {

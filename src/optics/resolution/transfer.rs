@@ -193,3 +193,91 @@ fn segment_area<F: Real>(t: F) -> F {
     let tail = one - square * F::of(1.0 / 42.0) * (one - square * F::of(1.0 / 72.0) * tail);
     F::of(2.0 / 3.0) * t * t * t * (one - square * F::of(1.0 / 20.0) * tail)
 }
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+    use std::f64::consts::{FRAC_2_PI, PI};
+    use std::vec::Vec;
+
+    const STEP_48: f64 = 1.0 / (1u64 << 48) as f64;
+
+    /// (2 / pi) (t - sin t cos t), by its series where t is small.
+    fn exact(height: f64) -> f64 {
+        let t = 2.0 * (height / 2.0).sqrt().asin();
+        if t > 0.5 {
+            return FRAC_2_PI * (t - t.sin() * t.cos());
+        }
+        let mut term = 2.0 / 3.0 * t * t * t;
+        let mut sum = 0.0;
+        for k in 0..9 {
+            sum += term;
+            let k = 2.0 * k as f64;
+            term *= -4.0 * t * t / ((k + 4.0) * (k + 5.0));
+        }
+        FRAC_2_PI * sum
+    }
+
+    #[test]
+    fn segment_series_is_the_interpolation() {
+        let n = SEGMENT.len();
+        let angle = |k: usize| PI * (k as f64 + 0.5) / n as f64;
+        let at_node: Vec<f64> = (0..n)
+            .map(|k| {
+                let h = (1.0 + angle(k).cos()) / 2.0;
+                exact(h) / (h * h.sqrt())
+            })
+            .collect();
+        for (j, &got) in SEGMENT.iter().enumerate() {
+            let sum: f64 = (0..n).map(|k| at_node[k] * (j as f64 * angle(k)).cos()).sum();
+            let c = sum * if j == 0 { 1.0 } else { -2.0 } / n as f64;
+            let got = got as f64 / (1u64 << 62) as f64;
+            assert!((got - c).abs() < 1e-15, "{j}: {got:e}, {c:e}");
+        }
+    }
+
+    #[test]
+    fn segment_is_near() {
+        let one = 1u64 << 48;
+        let mut worst = 0.0f64;
+        let wide = (0..=100_000).map(|k| one / 100_000 * k).chain((0..1000).map(|k| one - k));
+        for height in wide.chain((0..48 * 64).map(|k| (one >> (k / 64)) / 64 * (64 - k % 64))) {
+            let got = segment(height) as f64 / (1u64 << 60) as f64;
+            worst = worst.max((got - exact(height as f64 * STEP_48)).abs());
+        }
+        assert!(worst < 2f64.powi(-40), "{:e}", worst);
+        std::println!("segment: 2^{:.2}", worst.log2());
+    }
+
+    #[test]
+    fn square_root_is_near() {
+        let mut x = 1u64;
+        for k in 0..100_000 {
+            x = x.wrapping_mul(0x5851f42d4c957f2d).wrapping_add(0x14057b7ef767814f);
+            let n = (x >> 16 >> (k % 48)).max(1);
+            let root = square_root(n) as f64 / (1u64 << 63) as f64;
+            let exact = (n as f64 * STEP_48).sqrt();
+            // At the bottom the nearest 2^-31 is a poor start, where the segment is nothing.
+            let owed = 3e-16 + 2f64.powi(-64) / exact;
+            assert!((root - exact).abs() <= owed, "{n}: {root}, {exact}");
+        }
+        assert_eq!(square_root(0), 0);
+        assert_eq!(square_root(1 << 48), 1 << 63);
+    }
+
+    #[test]
+    fn quotients_are_cut() {
+        let mut x = 1u64;
+        for _ in 0..100_000 {
+            x = x.wrapping_mul(0x5851f42d4c957f2d).wrapping_add(0x14057b7ef767814f);
+            let (d, n) = ((x >> 46) as u32 | 1, (x & 0xffff_ffff) << 14);
+            if n >> 32 < d as u64 {
+                assert_eq!(ratio(n, d) as u128, ((n as u128) << 32) / d as u128);
+            }
+            let d = (d & 0xffff) | 1;
+            if n >> 48 < d as u64 {
+                assert_eq!(over(n, d) as u128, ((n as u128) << 16) / d as u128);
+            }
+        }
+    }
+}
