@@ -34,17 +34,20 @@ fn call(subject: &str, function: &str) -> String {
         .map(|(name, kind)| (name.trim(), kind.trim()))
         .collect();
     let mut code = format!("    |input| {{ // {name}\n");
-    // From the last: the capacity of a buffer stands behind it.
-    let mut capacity = None;
+    // From the last: the size of a buffer stands behind it.
+    let mut size = None;
     for (name, kind) in arguments.iter().rev() {
-        let value = match capacity.take() {
-            Some(capacity) if kind.starts_with('*') => format!("input.take({capacity} as usize)"),
+        let is_pointer = kind.starts_with('*');
+        let value = match size.take() {
+            _ if *kind == "*const *const c_char" => "input.texts()".to_string(),
+            Some(size) if is_pointer => format!("input.take({size} as usize)"),
             _ => "input.take(1)".to_string(),
         };
+        let is_size = !is_pointer && (name.ends_with("capacity") || name.ends_with("length"));
         // All other types follow from the call.
-        let kind = if name.ends_with("capacity") { kind } else { "_" };
+        let kind = if is_size { kind } else { "_" };
         writeln!(code, "        let {name}: {kind} = {value};").unwrap();
-        capacity = name.ends_with("capacity").then_some(*name);
+        size = is_size.then_some(*name);
     }
     let names: Vec<&str> = arguments.iter().map(|(name, _)| *name).collect();
     let call = format!("fieldstop::capi::{subject}::{name}({})", names.join(", "));

@@ -16,7 +16,7 @@ use support::skipped;
 const WARNINGS: [&str; 6] =
     ["-Wall", "-Wextra", "-Wpedantic", "-Wconversion", "-Wsign-conversion", "-Werror"];
 const LANGUAGES: [(&str, &str); 3] = [("c", "c99"), ("c++", "c++11"), ("c++", "c++17")];
-const NOT_PROGRAMS: [&str; 2] = ["ignored_status", "bare_metal"];
+const NOT_PROGRAMS: [&str; 1] = ["ignored_status"];
 
 fn root() -> &'static Path {
     Path::new(env!("CARGO_MANIFEST_DIR"))

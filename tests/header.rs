@@ -188,6 +188,31 @@ fn names_are_short_and_clash_with_nothing() {
     }
 }
 
+/// avr-gcc passes 18 bytes in registers, each argument from an even one on; on the stack they arrive wrong in Rust there.
+#[test]
+fn arguments_fit_the_registers_of_avr() {
+    let code = code(header());
+    let mut seen = 0;
+    for prototype in code.split(';').filter(|prototype| prototype.contains("fieldstop_status fieldstop_")) {
+        let (before, arguments) =
+            prototype.rsplit_once("fieldstop_status ").unwrap().1.split_once('(').unwrap();
+        if before.ends_with("_f64") {
+            continue;
+        }
+        let sizes = arguments.split(',').map(|argument| match argument.split_whitespace().next().unwrap() {
+            _ if argument.contains('*') => 2,
+            "uint32_t" | "int32_t" | "float" => 4,
+            "uint16_t" | "int16_t" | "uint8_t" | "int8_t" => 2,
+            other => panic!(
+                "{before} has an argument of type {other}: only integers of a fixed width and pointers"
+            ),
+        });
+        assert!(sizes.sum::<u32>() <= 18, "{before}");
+        seen += 1;
+    }
+    assert!(seen > 20);
+}
+
 #[test]
 fn version_is_that_of_the_crate() {
     let header = header();

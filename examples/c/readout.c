@@ -13,10 +13,17 @@
 
 /* The reflector of a night school in an invented valley. */
 static const uint32_t aperture_um = 180000;
+static const uint32_t obstruction_um = 46000;
 static const uint32_t focal_length_um = 1130000;
 static const uint32_t pixel_nm = 3300;
 static const uint32_t columns = 4100;
 static const uint32_t rows = 2700;
+
+/* Two mirrors of 0.91 each, the eye under a suburban sky, green light. */
+static const uint32_t reflectance_q16 = 59638;
+static const uint32_t eye_pupil_um = 6500;
+static const int32_t naked_eye_mmag = 5400;
+static const uint32_t wavelength_nm = 550;
 
 struct eyepiece {
     const char *name;
@@ -61,6 +68,9 @@ static void print_value(const char *label, uint32_t value, uint32_t scale, const
 static void print_telescope(void)
 {
     uint32_t value = 0;
+    uint32_t throughput_q16 = 0;
+    uint32_t effective_um = 0;
+    int32_t faintest_mmag = 0;
 
     printf("Reflector, %" PRIu32 " mm\n", aperture_um / 1000);
     if (is_there("focal ratio", fieldstop_focal_ratio_fx(focal_length_um, aperture_um, &value))) {
@@ -68,6 +78,19 @@ static void print_telescope(void)
     }
     if (is_there("plate scale", fieldstop_plate_scale_fx(focal_length_um, &value))) {
         print_value("plate scale", value, 1000, " arcsec/mm");
+    }
+    if (is_there("resolution", fieldstop_rayleigh_limit_fx(aperture_um, wavelength_nm, &value))) {
+        print_value("resolution", value, 1000000, " arcsec");
+    }
+    if (is_there("throughput", fieldstop_throughput_fx(2, reflectance_q16, 0, 65536, &throughput_q16))
+        && is_there("light gathered", fieldstop_effective_aperture_fx(aperture_um, obstruction_um, throughput_q16,
+                                                                      &effective_um))) {
+        print_value("light gathered", effective_um, 1000, " mm of clear aperture");
+        if (is_there("faintest star",
+                     fieldstop_limiting_magnitude_fx(naked_eye_mmag, effective_um, eye_pupil_um, &faintest_mmag))
+            && faintest_mmag >= 0) {
+            print_value("faintest star", (uint32_t)faintest_mmag, 1000, " mag");
+        }
     }
 }
 

@@ -5,12 +5,14 @@
 use fieldstop::Cause;
 use libfuzzer_sys::fuzz_target;
 use std::alloc::{Layout, alloc, dealloc};
+use std::ffi::c_char;
 use std::slice;
 
 include!(concat!(env!("OUT_DIR"), "/calls.rs"));
 
 fuzz_target!(|bytes: &[u8]| {
-    let mut input = Input { bytes, blocks: Vec::new(), nulls: false };
+    let mut input =
+        Input { bytes, blocks: Vec::new(), texts: Vec::new(), pointers: Vec::new(), nulls: false };
     let choice: u16 = input.take(1);
     CALLS[choice as usize % CALLS.len()](&mut input);
 });
@@ -39,8 +41,14 @@ impl Drop for Block {
 struct Input<'a> {
     bytes: &'a [u8],
     blocks: Vec<Block>,
+    /// Each with the zero byte at its end.
+    texts: Vec<Vec<u8>>,
+    pointers: Vec<*const c_char>,
     nulls: bool,
 }
+
+/// As many as the longest table of labels has, or more.
+const TEXTS: usize = 32;
 
 impl Input<'_> {
     /// A number, or a pointer to `count` of what it points to.
@@ -61,11 +69,29 @@ impl Input<'_> {
         }
         let size = count * size_of::<T>();
         let layout = Layout::from_size_align(size.max(1), align_of::<T>()).unwrap();
-        let before: Vec<u8> = (0..size).map(|_| self.byte()).collect();
+        let (given, rest) = self.bytes.split_at(size.min(self.bytes.len()));
+        self.bytes = rest;
+        let mut before = given.to_vec();
+        before.resize(size, 0);
         let start = unsafe { alloc(layout) };
         unsafe { start.copy_from_nonoverlapping(before.as_ptr(), size) };
         self.blocks.push(Block { start, layout, before, constant });
         start.cast()
+    }
+
+    fn texts(&mut self) -> *const *const c_char {
+        if self.byte() % 16 == 15 {
+            self.nulls = true;
+            return std::ptr::null();
+        }
+        for _ in 0..TEXTS {
+            let length = self.byte() % 40;
+            let text: Vec<u8> =
+                (0..length).map(|_| self.byte()).filter(|byte| *byte != 0).chain([0]).collect();
+            self.texts.push(text);
+        }
+        self.pointers = self.texts.iter().map(|text| text.as_ptr().cast()).collect();
+        self.pointers.as_ptr()
     }
 
     fn check(&self, status: u16) {

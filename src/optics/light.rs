@@ -385,3 +385,27 @@ pub fn t_number<F: Real>(focal_ratio: F, throughput: F) -> Result<F, Error> {
     allowed(throughput <= F::of(1.0), 2)?;
     Ok(focal_ratio / throughput.sqrt())
 }
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    /// Where the errors of two logarithms count most: many surfaces, each nearly perfect.
+    #[test]
+    fn throughput_of_many_good_surfaces() {
+        let mut worst = 0.0f64;
+        for lost in 0..400 {
+            let share = WHOLE - lost;
+            for count in [1u8, 2, 3, 10, 60, 150, 255] {
+                for (mirrors, surfaces) in [(count, 0), (count, count), (count, 255 - count)] {
+                    let got = throughput_fx(mirrors, Q16(share), surfaces, Q16(share)).unwrap().0;
+                    let times = mirrors as i32 + surfaces as i32;
+                    let exact = 65536.0 * (share as f64 / 65536.0).powi(times);
+                    worst = worst.max((got as f64 - exact).abs());
+                    assert!(times != 1 || got == share);
+                }
+            }
+        }
+        assert!(worst < 0.7, "{worst}");
+    }
+}

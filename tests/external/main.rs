@@ -2,6 +2,7 @@
 //! where a value is quoted from memory.
 
 mod field;
+mod light;
 mod resolution;
 
 /// Fails unless `got` is within `tolerance` of what is published.

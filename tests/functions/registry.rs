@@ -149,13 +149,13 @@ impl Row {
     }
 }
 
+pub fn all_rows() -> Vec<Row> {
+    [units::rows(), field::rows(), resolution::rows(), light::rows()].concat()
+}
+
+/// Those that FIELDSTOP_ONLY names, for a long run, or all.
 pub fn rows() -> Vec<Row> {
-    let mut rows = Vec::new();
-    rows.extend(units::rows());
-    rows.extend(field::rows());
-    rows.extend(light::rows());
-    rows.extend(resolution::rows());
-    // FIELDSTOP_ONLY names the functions of a long run.
+    let mut rows = all_rows();
     if let Ok(only) = std::env::var("FIELDSTOP_ONLY") {
         rows.retain(|row| only.split(',').any(|stem| stem == row.stem));
     }
