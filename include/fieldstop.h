@@ -1136,7 +1136,7 @@ fieldstop_status fieldstop_airy_radius_f32(float focal_length_mm,
  * (j11 / pi) lambda f / D = 1.2196699 lambda f / D (Born and Wolf).
  * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
  * Error: at most 2 ulp.
- * Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
+ * Statuses: null pointer, zero, out of range, not finite.
  */
 FIELDSTOP_CHECKED
 fieldstop_status fieldstop_airy_radius_f64(double focal_length_mm,
@@ -1167,7 +1167,7 @@ fieldstop_status fieldstop_cutoff_frequency_fx(uint32_t focal_length_um,
  * D / (lambda f) (Goodman).
  * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
  * Error: at most 2 ulp.
- * Statuses: null pointer, zero, out of range, not finite, overflow (the frequency is 2^128 or more).
+ * Statuses: null pointer, zero, out of range, not finite.
  */
 FIELDSTOP_CHECKED
 fieldstop_status fieldstop_cutoff_frequency_f32(float focal_length_mm,

@@ -79,7 +79,7 @@ mod tests {
 
     /// `upper` is the part of n that `near` looks at.
     fn check_near(upper: u64) {
-        let (least, most) = (upper << 30, (upper + 1 << 30) - 1);
+        let (least, most) = (upper << 30, ((upper + 1) << 30) - 1);
         let root = near(least) as u128;
         assert!(root * root - root < least as u128, "{least}: {root} is too high");
         assert!((root + 2) * (root + 3) >= most as u128, "{most}: {root} is too low");

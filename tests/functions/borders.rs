@@ -64,7 +64,9 @@ fn check_float(single: bool, owed: impl Fn(f64) -> f64) {
         let small = 2f64.powf(-(digits as f64) * (k as f64 + r.unit()) / count as f64);
         for e in [0.0, small, 1.0 - small].into_iter().flat_map(|e| around(e, single)) {
             for border in [0.0, (1.0 - e) / 2.0, (1.0 + e) / 2.0, e, 1.0] {
-                around(border, single).map(|v| check(v, e));
+                for v in around(border, single) {
+                    check(v, e);
+                }
                 // Beside it at any scale.
                 for _ in 0..2 {
                     let aside = 2f64.powf(-(digits as f64) * r.unit());
