@@ -1,12 +1,12 @@
+use super::near;
 use fieldstop::optics::light::*;
 use fieldstop::units::{Micrometres, Millimagnitudes, MillimagnitudesPerAirmass, Q16};
 
 /// The fixed form within a step and the tolerance of the published value, the float form within the tolerance.
 #[track_caller]
 fn check(fixed: i64, steps: f64, float: f64, published: f64, tolerance: f64) {
-    assert!((float - published).abs() <= tolerance, "float {float}, published {published}");
-    let fixed = fixed as f64 / steps;
-    assert!((fixed - published).abs() <= tolerance + 1.0 / steps, "fixed {fixed}, published {published}");
+    near(float, published, tolerance);
+    near(fixed as f64 / steps, published, tolerance + 1.0 / steps);
 }
 
 fn q16(x: f64) -> Q16 {
