@@ -120,8 +120,8 @@ mod tests {
             assert_eq!(RECIPROCAL[i] as i64, steps(1.0 / middle, 8));
             assert_eq!(LOGARITHM[i] as i64, steps((256.0 / RECIPROCAL[i] as f64).log2(), 30));
         }
-        for i in 0..16 {
-            assert_eq!(SIXTEENTHS[i] as i64, steps((-(i as f64) / 16.0).exp2(), 31));
+        for (i, &entry) in SIXTEENTHS.iter().enumerate() {
+            assert_eq!(entry as i64, steps((-(i as f64) / 16.0).exp2(), 31));
         }
     }
 

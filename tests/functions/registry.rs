@@ -38,7 +38,6 @@ pub const UNSIGNED_MMAG: Unit = unit(1000.0, 0, U32);
 /// Any one unit, or none.
 pub const PLAIN: Unit = unit(1.0, 0, U32);
 pub const COUNT: Unit = Unit { steps: 1.0, least: 0, most: U32, count: true };
-pub const COUNT_16: Unit = Unit { steps: 1.0, least: 0, most: u16::MAX as i64, count: true };
 pub const COUNT_8: Unit = Unit { steps: 1.0, least: 0, most: u8::MAX as i64, count: true };
 
 #[derive(Clone, Copy)]
