@@ -33,7 +33,7 @@
 //!
 //! # Checks
 //!
-//! A check tells the first bad member, in the order of declaration, as the [`Error`](crate::Error)'s
+//! A check tells the first bad member, in the order of declaration, as the [`Error`]'s
 //! argument, counted from 1. Within a readout call the argument is the struct's own position in the call.
 //!
 //! # Unknown is zero
