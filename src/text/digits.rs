@@ -69,7 +69,9 @@ mod tests {
         (0..=200_000).for_each(check);
         for high in 0..1 << 16 {
             // Each high half, with the low halves where a quotient could go wrong.
-            [0, 1, 5, 29, 59, 0x7fff, 0xffc4, 0xfff0, 0xfffa, 0xffff].map(|low| check(high << 16 | low));
+            [0, 1, 5, 29, 59, 0x7fff, 0xffc4, 0xfff0, 0xfffa, 0xffff]
+                .into_iter()
+                .for_each(|low| check(high << 16 | low));
         }
     }
 
