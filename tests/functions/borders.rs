@@ -2,10 +2,10 @@
 
 use super::big::{Big, big};
 use super::cases::{self, Random};
-use super::registry::{Row, rows};
+use super::registry::{Row, all_rows};
 
 fn contrast() -> Row {
-    rows().into_iter().find(|row| row.stem == "contrast").unwrap()
+    all_rows().into_iter().find(|row| row.stem == "contrast").unwrap()
 }
 
 #[test]
@@ -85,4 +85,20 @@ fn contrast_at_its_borders_f32() {
 #[test]
 fn contrast_at_its_borders_f64() {
     check_float(false, |e| 1e-14 / (1.0 - e));
+}
+
+/// The product of a squared aperture and a tiny throughput keeps its bits in f32.
+#[test]
+fn effective_aperture_of_a_tiny_throughput() {
+    use fieldstop::optics::light::effective_aperture;
+    for throughput in [1e-9f32, 1e-12, 1e-30, 1e-38, 1e-42, f32::from_bits(1)] {
+        for aperture in [2f32.powi(-32), 0.1, 203.5, 2f32.powi(32)] {
+            let single = effective_aperture(aperture, 0.0, throughput).unwrap() as f64;
+            let double = effective_aperture(aperture as f64, 0.0, throughput as f64).unwrap();
+            assert!(
+                (single / double - 1.0).abs() < 2f64.powi(-23),
+                "{aperture} {throughput}: {single} {double}"
+            );
+        }
+    }
 }
