@@ -2321,9 +2321,9 @@ typedef struct fieldstop_text_style {
     uint8_t yes[8];
     /** Answers whether a fact holds. */
     uint8_t no[8];
-    /** Point or comma, one byte. */
+    /** Point or comma, one byte; in UTF-8 one of ASCII. */
     uint8_t decimal_mark;
-    /** Stands before a value that a fact of the readout concerns, one byte. */
+    /** Stands before a value that a fact of the readout concerns, one byte; in UTF-8 one of ASCII. */
     uint8_t fact_mark;
     /** 1: texts are UTF-8, and a character may take several bytes. 0: every byte is a character. */
     uint8_t utf8;
@@ -2347,10 +2347,18 @@ const struct fieldstop_text_style *fieldstop_text_style_ascii(void);
 /** Gives the style of UTF-8, with the signs of degree, prime, double prime, micro and times; never null. */
 const struct fieldstop_text_style *fieldstop_text_style_utf8(void);
 
-/** Gives the style of character displays with ROM A00 (Japanese) of the HD44780U; never null. */
+/**
+ * Gives the style of character displays with ROM A00 (Japanese) of the HD44780U; never null.
+ *
+ * The codes are from memory of the data sheet: try them on your display.
+ */
 const struct fieldstop_text_style *fieldstop_text_style_hd44780_a00(void);
 
-/** Gives the style of character displays with ROM A02 (European) of the HD44780U; never null. */
+/**
+ * Gives the style of character displays with ROM A02 (European) of the HD44780U; never null.
+ *
+ * The codes are from memory of the data sheet: try them on your display.
+ */
 const struct fieldstop_text_style *fieldstop_text_style_hd44780_a02(void);
 
 /**

@@ -38,6 +38,8 @@ static const struct eyepiece eyepieces[] = {
     {"close", 4500, 6300, 82u * 3600000u},
 };
 
+enum { SCREEN_COLUMNS = 20 };
+
 static int refused = 0;
 
 /* Whether there is a value; tells why where there is none. */
@@ -135,6 +137,42 @@ static void print_camera(void)
     }
 }
 
+/* The same telescope as structs: one call computes a whole page, one call writes each line of a 20x4 display. */
+static void print_screens(void)
+{
+    fieldstop_telescope telescope = {0, 0, 0, 65536, 0};
+    fieldstop_eyepiece eyepiece = {0, 0, 0, FIELDSTOP_EQUIDISTANT, {0, 0, 0}};
+    fieldstop_observer observer = {0, 0, 180000, 2600000, 0};
+    fieldstop_visual_readout readout;
+    char line[SCREEN_COLUMNS + 1];
+    uint16_t length = 0;
+    uint8_t row;
+
+    telescope.aperture_um = aperture_um;
+    telescope.focal_length_um = focal_length_um;
+    telescope.obstruction_um = obstruction_um;
+    eyepiece.focal_length_um = eyepieces[0].focal_length_um;
+    eyepiece.field_stop_um = eyepieces[0].field_stop_um;
+    observer.naked_eye_mmag = naked_eye_mmag;
+    observer.eye_pupil_um = eye_pupil_um;
+    observer.wavelength_nm = wavelength_nm;
+
+    if (!is_there("throughput",
+                  fieldstop_throughput_fx(2, reflectance_q16, 0, 65536, &telescope.throughput_q16))
+        || !is_there("readout", fieldstop_visual_readout_compute(&telescope, &eyepiece, &observer,
+                                                                 FIELDSTOP_VISUAL_ALL, &readout))) {
+        return;
+    }
+    for (row = 0; row < FIELDSTOP_VISUAL_ROWS; row++) {
+        if (is_there("line", fieldstop_text_visual_line(&readout, fieldstop_text_visual_labels(),
+                                                        fieldstop_text_style_ascii(), SCREEN_COLUMNS, row,
+                                                        line, sizeof line - 1, &length))) {
+            line[length] = '\0';
+            printf("%s|%s|\n", row % 4 == 0 ? "\n" : "", line);
+        }
+    }
+}
+
 int main(void)
 {
     size_t i;
@@ -144,6 +182,6 @@ int main(void)
         print_eyepiece(&eyepieces[i]);
     }
     print_camera();
-    /* A screen by the structs and the text of the library goes here. */
+    print_screens();
     return refused;
 }

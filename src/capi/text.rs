@@ -145,6 +145,8 @@ pub extern "C" fn fieldstop_text_style_utf8() -> *const TextStyle {
 }
 
 /// Gives the style of character displays with ROM A00 (Japanese) of the HD44780U; never null.
+///
+/// The codes are from memory of the data sheet: try them on your display.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_style_hd44780_a00() -> *const TextStyle {
     static STYLE: TextStyle = TextStyle::HD44780_A00;
@@ -152,6 +154,8 @@ pub extern "C" fn fieldstop_text_style_hd44780_a00() -> *const TextStyle {
 }
 
 /// Gives the style of character displays with ROM A02 (European) of the HD44780U; never null.
+///
+/// The codes are from memory of the data sheet: try them on your display.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_style_hd44780_a02() -> *const TextStyle {
     static STYLE: TextStyle = TextStyle::HD44780_A02;

@@ -103,9 +103,9 @@ pub struct TextStyle {
     pub yes: [u8; 8],
     /// Answers whether a fact holds.
     pub no: [u8; 8],
-    /// Point or comma, one byte.
+    /// Point or comma, one byte; in UTF-8 one of ASCII.
     pub decimal_mark: u8,
-    /// Stands before a value that a fact of the readout concerns, one byte.
+    /// Stands before a value that a fact of the readout concerns, one byte; in UTF-8 one of ASCII.
     pub fact_mark: u8,
     /// 1: texts are UTF-8, and a character may take several bytes. 0: every byte is a character.
     pub utf8: u8,
