@@ -170,33 +170,12 @@ pub(crate) const fn adjacent_fine(t_mas: u32) -> u64 {
 #[cfg(test)]
 mod tests {
     use super::*;
+    use crate::math::chebyshev::interpolate;
     use std::f64::consts::PI;
-    use std::{println, vec::Vec};
+    use std::println;
 
     /// Milliarcseconds to the radian.
     const R: f64 = 648e6 / PI;
-
-    /// The polynomial through the Chebyshev points of -1/2 to 1/2, low power first.
-    fn interpolate(degree: usize, f: impl Fn(f64) -> f64) -> Vec<f64> {
-        let n = degree + 1;
-        let node = |k: usize| 0.5 * (PI * (2 * k + 1) as f64 / (2 * n) as f64).cos();
-        let mut rows: Vec<Vec<f64>> =
-            (0..n).map(|k| (0..n).map(|j| node(k).powi(j as i32)).chain([f(node(k))]).collect()).collect();
-        for i in 0..n {
-            let best = (i..n).max_by(|&a, &b| rows[a][i].abs().total_cmp(&rows[b][i].abs())).unwrap();
-            rows.swap(i, best);
-            for j in 0..n {
-                if j != i {
-                    let factor = rows[j][i] / rows[i][i];
-                    let pivot = rows[i].clone();
-                    for (x, y) in rows[j][i..].iter_mut().zip(&pivot[i..]) {
-                        *x -= factor * y;
-                    }
-                }
-            }
-        }
-        (0..n).map(|i| rows[i][n] / rows[i][i]).collect()
-    }
 
     #[test]
     fn arc_table_is_the_interpolation() {
@@ -213,7 +192,7 @@ mod tests {
 
     fn compare_table(table: &[[u32; 4]], f: impl Fn(f64) -> f64) {
         for (i, row) in table.iter().enumerate() {
-            let c = interpolate(4, |u| f((i as f64 + 0.5 + u) / table.len() as f64));
+            let c = interpolate(|u| f((i as f64 + 0.5 + u) / table.len() as f64), -0.5, 0.5, 5);
             let [c0, c1, c2, c34] = *row;
             let got = [
                 c0 as f64,
@@ -251,7 +230,7 @@ mod tests {
             let more = [3617.0 / 162820783125.0, 87734.0 / 38979295480125.0, 349222.0 / 1531329465290625.0];
             terms.iter().chain(&more).rev().fold(0.0, |sum, t| sum * w + t)
         };
-        let c = interpolate(4, |u| tail((u + 0.5) * w_most));
+        let c = interpolate(|u| tail((u + 0.5) * w_most), -0.5, 0.5, 5);
         for k in 0..=4096 {
             let w = k as f64 / 4096.0 * w_most;
             let x = w / w_most - 0.5;

@@ -83,31 +83,9 @@ pub(crate) const fn exp2_negative(y: u32) -> u32 {
 #[cfg(test)]
 mod tests {
     use super::*;
+    use crate::math::chebyshev::interpolate;
     extern crate std;
-    use std::f64::consts::{LN_2, PI};
-    use std::vec::Vec;
-
-    /// The polynomial through `f` at the Chebyshev nodes of `from` to `to`, lowest power first.
-    fn chebyshev(f: impl Fn(f64) -> f64, from: f64, to: f64, count: usize) -> Vec<f64> {
-        let nodes: Vec<f64> = (0..count)
-            .map(|k| (from + to) / 2.0 + (to - from) / 2.0 * (PI * (k as f64 + 0.5) / count as f64).cos())
-            .collect();
-        // Newton's divided differences, then the products multiplied out.
-        let mut differences: Vec<f64> = nodes.iter().map(|&x| f(x)).collect();
-        for j in 1..count {
-            for i in (j..count).rev() {
-                differences[i] = (differences[i] - differences[i - 1]) / (nodes[i] - nodes[i - j]);
-            }
-        }
-        let mut powers = std::vec![0.0; count];
-        for i in (0..count).rev() {
-            for k in (0..count).rev() {
-                let lower = if k == 0 { differences[i] } else { powers[k - 1] };
-                powers[k] = lower - powers[k] * nodes[i];
-            }
-        }
-        powers
-    }
+    use std::f64::consts::LN_2;
 
     fn steps(value: f64, bits: i32) -> i64 {
         (value * 2f64.powi(bits)).round() as i64
@@ -127,10 +105,10 @@ mod tests {
 
     #[test]
     fn series_follow_their_rule() {
-        let c = chebyshev(|r| r.ln_1p() / LN_2 / r, -1.0 / 56.0, 1.0 / 56.0, 4);
+        let c = interpolate(|r| r.ln_1p() / LN_2 / r, -1.0 / 56.0, 1.0 / 56.0, 4);
         let expected = [steps(c[0] - 369.0 / 256.0, 22), steps(c[1], 16), steps(c[2], 16), steps(c[3], 16)];
         assert_eq!(LOGARITHM_SERIES.map(i64::from), expected);
-        let c = chebyshev(|g| -(-g * LN_2).exp_m1() / g, 0.0, 1.0 / 16.0, 3);
+        let c = interpolate(|g| -(-g * LN_2).exp_m1() / g, 0.0, 1.0 / 16.0, 3);
         let expected = [steps(355.0 / 512.0 - c[0], 22), steps(-c[1], 18), steps(c[2], 18)];
         assert_eq!(POWER_SERIES.map(i64::from), expected);
     }

@@ -1,9 +1,12 @@
 //! Integer and float kernels; they know nothing of optics.
 //!
 //! The machine to think of is a Cortex-M0: a 32 by 32 multiply that keeps the low word, no divide, no count of leading
-//! zeros. Each kernel states its error; `tests/kernels.rs` finds the worst one.
+//! zeros. Each kernel states its error, and the tests in its file find the worst one; those over
+//! every input are `cargo test --release --lib -- --ignored`.
 
 pub(crate) mod arc;
+#[cfg(test)]
+pub(crate) mod chebyshev;
 pub mod convert;
 pub(crate) mod divide;
 #[cfg(feature = "float")]

@@ -442,9 +442,9 @@ pub fn combined_fwhm<F: Real>(a_arcsec: F, b_arcsec: F, c_arcsec: F) -> Result<F
 #[cfg(all(test, feature = "float"))]
 mod tests {
     use super::*;
+    use crate::math::chebyshev::interpolate;
     use libm::{j1, jn};
     use std::f64::consts::PI;
-    use std::vec::Vec;
 
     /// A sign change of `f` between `a` and `b`.
     fn root(f: impl Fn(f64) -> f64, mut a: f64, mut b: f64) -> f64 {
@@ -465,25 +465,6 @@ mod tests {
         assert!((value / per_radian - wavelengths).abs() < 2e-15, "{value} / {per_radian}, {wavelengths}");
     }
 
-    /// The polynomial through `f` at the `count` Chebyshev points of 0 to 1, low power first.
-    fn interpolate(count: usize, f: impl Fn(f64) -> f64) -> Vec<f64> {
-        let node = |k: usize| 0.5 + 0.5 * (PI * (k as f64 + 0.5) / count as f64).cos();
-        let mut differences: Vec<f64> = (0..count).map(|k| f(node(k))).collect();
-        for j in 1..count {
-            for i in (j..count).rev() {
-                differences[i] = (differences[i] - differences[i - 1]) / (node(i) - node(i - j));
-            }
-        }
-        let mut powers = std::vec![0.0; count];
-        for i in (0..count).rev() {
-            for k in (0..count).rev() {
-                let lower = if k == 0 { differences[i] } else { powers[k - 1] };
-                powers[k] = lower - powers[k] * node(i);
-            }
-        }
-        powers
-    }
-
     #[test]
     fn dark_ring_is_the_interpolation() {
         let per_root = 8.0 * 648e6 / PI / PI;
@@ -492,7 +473,7 @@ mod tests {
             let e = (1.0 - m) / (1.0 + m);
             per_root * root(|x| j1(x) - e * j1(e * x), 2.4, 3.84) / (1.0 + m)
         };
-        for (got, exact) in DARK_RING.iter().zip(interpolate(9, scaled_root)) {
+        for (got, exact) in DARK_RING.iter().zip(interpolate(scaled_root, 0.0, 1.0, 9)) {
             assert!((*got as f64 - exact).abs() < 0.6, "{got}: {exact}");
         }
     }
