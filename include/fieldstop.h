@@ -44,6 +44,11 @@
  *
  * Reentrancy. No function keeps state, allocates, locks, loops without a bound or reads past what it
  * was given: all may be called from an interrupt and from several threads.
+ *
+ * AVR. The library takes no RAM. Its constants are in program memory, and every style and every table
+ * of labels is read from there: those that functions below give, and your own, which you declare with
+ * PROGMEM, the table of pointers as well as each text. The text of a cause is there too: print it with
+ * avr-libc's functions in _P. All else that a pointer goes to is in RAM as usual.
  */
 #ifndef FIELDSTOP_H
 #define FIELDSTOP_H
@@ -112,7 +117,7 @@ typedef uint16_t fieldstop_status;
 /**
  * Gives a static English sentence for the cause in a status; never null.
  *
- * Success and causes that this version does not know have a sentence too.
+ * Success and causes that this version does not know have a sentence too. On AVR it is in program memory (PGM_P).
  */
 const char *fieldstop_cause_text(fieldstop_status status);
 
@@ -2341,6 +2346,7 @@ typedef struct fieldstop_span {
  * Gives the style of plain ASCII; never null.
  *
  * `d` and `deg` stand for the degree sign, `u` for micro, `x` for times. Copy it to change the decimal mark or a text.
+ * On AVR this and all styles and labels are in program memory (PROGMEM).
  */
 const struct fieldstop_text_style *fieldstop_text_style_ascii(void);
 

@@ -47,6 +47,7 @@
 //! | `math` | integer and float kernels |
 //! | [`units`] | the quantities of the fixed forms |
 //! | [`status`] | what can go wrong |
+//! | `stored` | constants in program memory |
 //!
 //! # Caution
 //!
@@ -60,6 +61,8 @@
 //! - `header`: the build script makes the C header again (a desktop job).
 //! - `panic-handler`: one that stops, for a static library where there is no operating system.
 #![no_std]
+// The reader of program memory in src/stored.rs; other targets need nothing unstable.
+#![cfg_attr(target_arch = "avr", feature(asm_experimental_arch))]
 #![deny(unsafe_code)]
 #![warn(missing_docs)]
 
@@ -73,6 +76,7 @@ mod math;
 pub mod optics;
 pub mod setup;
 pub mod status;
+mod stored;
 pub mod text;
 pub mod units;
 

@@ -3,6 +3,9 @@
 use core::fmt;
 use core::num::NonZeroU16;
 
+#[cfg(feature = "capi")]
+use crate::stored::stored_text;
+
 macro_rules! causes {
     ($($(#[$doc:meta])* $name:ident = $number:literal, $text:literal;)*) => {
         /// Why a call was refused. New causes may be added; the numbers of these never change.
@@ -24,8 +27,8 @@ macro_rules! causes {
 
             /// The same sentence with the zero byte that C wants at its end.
             #[cfg(feature = "capi")]
-            pub(crate) const fn text_for_c(self) -> &'static str {
-                match self { $(Cause::$name => concat!($text, "\0"),)* }
+            pub(crate) fn text_for_c(self) -> *const core::ffi::c_char {
+                match self { $(Cause::$name => stored_text!(CAUSES, $text),)* }
             }
 
             /// The cause with this number, if it is one of ours.

@@ -5,7 +5,7 @@ use std::fs;
 use std::path::{Path, PathBuf};
 
 /// From the top. Modules of one layer do not use each other.
-const LAYERS: [&[&str]; 9] = [
+const LAYERS: [&[&str]; 10] = [
     &["lib"],
     &["capi"],
     &["text"],
@@ -15,6 +15,7 @@ const LAYERS: [&[&str]; 9] = [
     &["math"],
     &["units"],
     &["status"],
+    &["stored"],
 ];
 
 fn layer(module: &str) -> usize {
@@ -120,7 +121,8 @@ fn unsafe_stays_in_its_room() {
         for (number, line) in source.lines.iter().enumerate() {
             let place = format!("src/{}, line {}: {line}", source.module.join("/"), number + 1);
             let is_unsafe = code(line).match_indices("unsafe").any(|(at, p)| word(&line[at..]) == p);
-            if source.top() != "capi" {
+            // The reader of AVR's program memory is the other one.
+            if !["capi", "stored"].contains(&source.top()) {
                 assert!(!is_unsafe, "{place}");
             } else if code(line).contains("unsafe {") {
                 let above =

@@ -44,6 +44,11 @@
  *
  * Reentrancy. No function keeps state, allocates, locks, loops without a bound or reads past what it
  * was given: all may be called from an interrupt and from several threads.
+ *
+ * AVR. The library takes no RAM. Its constants are in program memory, and every style and every table
+ * of labels is read from there: those that functions below give, and your own, which you declare with
+ * PROGMEM, the table of pointers as well as each text. The text of a cause is there too: print it with
+ * avr-libc's functions in _P. All else that a pointer goes to is in RAM as usual.
  */
 #ifndef FIELDSTOP_H
 #define FIELDSTOP_H

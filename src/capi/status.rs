@@ -2,6 +2,7 @@
 
 use super::fieldstop_status;
 use crate::status::Cause;
+use crate::stored::stored_text;
 use core::ffi::c_char;
 
 /// Cause: a pointer is null.
@@ -21,15 +22,14 @@ pub const FIELDSTOP_UNDEFINED: u8 = 7;
 
 /// Gives a static English sentence for the cause in a status; never null.
 ///
-/// Success and causes that this version does not know have a sentence too.
+/// Success and causes that this version does not know have a sentence too. On AVR it is in program memory (PGM_P).
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_cause_text(status: fieldstop_status) -> *const c_char {
-    let text = match Cause::from_number(status as u8) {
+    match Cause::from_number(status as u8) {
         Some(cause) => cause.text_for_c(),
-        None if status == 0 => "success\0",
-        None => "an unknown cause\0",
-    };
-    text.as_ptr().cast()
+        None if status == 0 => stored_text!(OTHERS, "success"),
+        None => stored_text!(OTHERS, "an unknown cause"),
+    }
 }
 
 /// Gives the version of the library: major times 65536 plus minor times 256 plus patch.

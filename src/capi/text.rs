@@ -3,13 +3,14 @@
 use super::fieldstop_status;
 use crate::setup::{CameraReadout, VisualReadout};
 use crate::status::{Cause, Error};
+use crate::stored::{Stored, stored, stored_text};
 use crate::text::{
-    AngleForm, CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, CameraRow, Span, TextStyle, Unit,
-    VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C, Value, VisualRow, camera_row, changed, row_of,
+    AngleForm, CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, CameraRow, Look, Span, StyleOfC, TextStyle,
+    Unit, VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C, Value, VisualRow, camera_row, change, row_of,
     visual_row, write_line,
 };
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
-use core::ffi::{CStr, c_char};
+use core::ffi::c_char;
 use core::slice;
 
 /// Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on.
@@ -131,17 +132,22 @@ pub const FIELDSTOP_CAMERA_ROW_FINE_SAMPLING: u8 = 10;
 /// Gives the style of plain ASCII; never null.
 ///
 /// `d` and `deg` stand for the degree sign, `u` for micro, `x` for times. Copy it to change the decimal mark or a text.
+/// On AVR this and all styles and labels are in program memory (PROGMEM).
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_style_ascii() -> *const TextStyle {
-    static STYLE: TextStyle = TextStyle::ASCII;
-    &STYLE
+    stored! {
+        static ASCII: TextStyle = TextStyle::ASCII;
+    }
+    ASCII.address()
 }
 
 /// Gives the style of UTF-8, with the signs of degree, prime, double prime, micro and times; never null.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_style_utf8() -> *const TextStyle {
-    static STYLE: TextStyle = TextStyle::UTF8;
-    &STYLE
+    stored! {
+        static UTF8: TextStyle = TextStyle::UTF8;
+    }
+    UTF8.address()
 }
 
 /// Gives the style of character displays with ROM A00 (Japanese) of the HD44780U; never null.
@@ -149,8 +155,10 @@ pub extern "C" fn fieldstop_text_style_utf8() -> *const TextStyle {
 /// The codes are from memory of the data sheet: try them on your display.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_style_hd44780_a00() -> *const TextStyle {
-    static STYLE: TextStyle = TextStyle::HD44780_A00;
-    &STYLE
+    stored! {
+        static HD44780_A00: TextStyle = TextStyle::HD44780_A00;
+    }
+    HD44780_A00.address()
 }
 
 /// Gives the style of character displays with ROM A02 (European) of the HD44780U; never null.
@@ -158,8 +166,10 @@ pub extern "C" fn fieldstop_text_style_hd44780_a00() -> *const TextStyle {
 /// The codes are from memory of the data sheet: try them on your display.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_style_hd44780_a02() -> *const TextStyle {
-    static STYLE: TextStyle = TextStyle::HD44780_A02;
-    &STYLE
+    stored! {
+        static HD44780_A02: TextStyle = TextStyle::HD44780_A02;
+    }
+    HD44780_A02.address()
 }
 
 /// Writes an integer with its unit as text and gives its length in bytes.
@@ -398,7 +408,7 @@ pub unsafe extern "C" fn fieldstop_text_unit(
     unsafe {
         fill(style, [2, 3, 5], text, capacity, length, |style, out| {
             let unit = Unit::from_number(unit).ok_or(Error::new(Cause::OutOfRange, 1))?;
-            put(style.unit(unit), out)
+            put(&style.text(unit as u8), out)
         })
     }
 }
@@ -406,15 +416,13 @@ pub unsafe extern "C" fn fieldstop_text_unit(
 /// Gives the English labels of the visual pages for 20 columns and more, an array of FIELDSTOP_VISUAL_ROWS; never null.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_visual_labels() -> *const *const c_char {
-    static LABELS: Labels<16> = Labels::new(VISUAL_LABELS_FOR_C);
-    LABELS.0.as_ptr()
+    VISUAL_LABELS_FOR_C.address().cast()
 }
 
 /// Gives the English labels of the visual pages for 8 and 16 columns, an array of FIELDSTOP_VISUAL_ROWS; never null.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_visual_labels_short() -> *const *const c_char {
-    static LABELS: Labels<16> = Labels::new(VISUAL_LABELS_SHORT_FOR_C);
-    LABELS.0.as_ptr()
+    VISUAL_LABELS_SHORT_FOR_C.address().cast()
 }
 
 /// Writes one line of the visual pages and gives its length in bytes; it is always `columns` characters long.
@@ -449,7 +457,7 @@ pub unsafe extern "C" fn fieldstop_text_visual_line(
             let row = VisualRow::from_number(number);
             let label = match row {
                 Some(_) => Label::new(labels, number),
-                None => Label(c"".as_ptr()),
+                None => Label::empty(),
             };
             let row = row.map(|row| visual_row(&*readout, row));
             write_line(row, label, style, columns, line, out)
@@ -481,7 +489,7 @@ pub unsafe extern "C" fn fieldstop_text_visual_value(
         fill(style, [3, 5, 7], text, capacity, length, |style, out| {
             let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
             let row = visual_row(&*readout, row);
-            row.value.write(style, width, out)
+            row.value.write_as(style, width, out)
         })
     }
 }
@@ -510,7 +518,7 @@ pub unsafe extern "C" fn fieldstop_text_visual_number(
         fill(style, [3, 5, 7], text, capacity, length, |style, out| {
             let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
             let row = visual_row(&*readout, row);
-            row.value.without_unit().write(style, width, out)
+            row.value.without_unit().write_as(style, width, out)
         })
     }
 }
@@ -537,7 +545,7 @@ pub unsafe extern "C" fn fieldstop_text_visual_unit(
     unsafe {
         fill(style, [3, 4, 6], text, capacity, length, |style, out| {
             let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
-            put(style.unit(visual_row(&*readout, row).value.unit()), out)
+            put(&style.text(visual_row(&*readout, row).value.unit() as u8), out)
         })
     }
 }
@@ -545,15 +553,13 @@ pub unsafe extern "C" fn fieldstop_text_visual_unit(
 /// Gives the English labels of the camera pages for 20 columns and more, an array of FIELDSTOP_CAMERA_ROWS; never null.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_camera_labels() -> *const *const c_char {
-    static LABELS: Labels<11> = Labels::new(CAMERA_LABELS_FOR_C);
-    LABELS.0.as_ptr()
+    CAMERA_LABELS_FOR_C.address().cast()
 }
 
 /// Gives the English labels of the camera pages for 8 and 16 columns, an array of FIELDSTOP_CAMERA_ROWS; never null.
 #[unsafe(no_mangle)]
 pub extern "C" fn fieldstop_text_camera_labels_short() -> *const *const c_char {
-    static LABELS: Labels<11> = Labels::new(CAMERA_LABELS_SHORT_FOR_C);
-    LABELS.0.as_ptr()
+    CAMERA_LABELS_SHORT_FOR_C.address().cast()
 }
 
 /// Writes one line of the camera pages and gives its length in bytes; it is always `columns` characters long.
@@ -588,7 +594,7 @@ pub unsafe extern "C" fn fieldstop_text_camera_line(
             let row = CameraRow::from_number(number);
             let label = match row {
                 Some(_) => Label::new(labels, number),
-                None => Label(c"".as_ptr()),
+                None => Label::empty(),
             };
             let row = row.map(|row| camera_row(&*readout, row));
             write_line(row, label, style, columns, line, out)
@@ -620,7 +626,7 @@ pub unsafe extern "C" fn fieldstop_text_camera_value(
         fill(style, [3, 5, 7], text, capacity, length, |style, out| {
             let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
             let row = camera_row(&*readout, row);
-            row.value.write(style, width, out)
+            row.value.write_as(style, width, out)
         })
     }
 }
@@ -649,7 +655,7 @@ pub unsafe extern "C" fn fieldstop_text_camera_number(
         fill(style, [3, 5, 7], text, capacity, length, |style, out| {
             let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
             let row = camera_row(&*readout, row);
-            row.value.without_unit().write(style, width, out)
+            row.value.without_unit().write_as(style, width, out)
         })
     }
 }
@@ -676,7 +682,7 @@ pub unsafe extern "C" fn fieldstop_text_camera_unit(
     unsafe {
         fill(style, [3, 4, 6], text, capacity, length, |style, out| {
             let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
-            put(style.unit(camera_row(&*readout, row).value.unit()), out)
+            put(&style.text(camera_row(&*readout, row).value.unit() as u8), out)
         })
     }
 }
@@ -712,28 +718,9 @@ pub unsafe extern "C" fn fieldstop_text_changed(
     unsafe {
         let shown = slice::from_raw_parts(shown.cast(), shown_length.into());
         let line = slice::from_raw_parts(line.cast(), line_length.into());
-        span.write(changed(shown, line, &*style));
+        span.write(change(shown, line, &*style.cast::<StyleOfC>()));
     }
     0
-}
-
-/// The labels of a readout, each with a zero byte at its end.
-#[repr(transparent)]
-struct Labels<const N: usize>([*const c_char; N]);
-
-// SAFETY: the pointers go to constants.
-unsafe impl<const N: usize> Sync for Labels<N> {}
-
-impl<const N: usize> Labels<N> {
-    const fn new(texts: [&CStr; N]) -> Labels<N> {
-        let mut labels = [c"".as_ptr(); N];
-        let mut at = 0;
-        while at < N {
-            labels[at] = texts[at].as_ptr();
-            at += 1;
-        }
-        Labels(labels)
-    }
 }
 
 /// The bytes of a label up to its zero byte.
@@ -741,14 +728,18 @@ impl<const N: usize> Labels<N> {
 struct Label(*const c_char);
 
 impl Label {
+    fn empty() -> Label {
+        Label(stored_text!(EMPTY, ""))
+    }
+
     /// The label with this number; none for a null pointer.
     ///
     /// # Safety
     /// `labels` has one with this number, with a zero byte at its end, or a null pointer.
     unsafe fn new(labels: *const *const c_char, number: u8) -> Label {
         // SAFETY: the caller's promise.
-        let label = unsafe { *labels.add(number.into()) };
-        Label(if label.is_null() { c"".as_ptr() } else { label })
+        let label = unsafe { (*labels.add(number.into()).cast::<Stored<*const c_char>>()).get() };
+        if label.is_null() { Label::empty() } else { Label(label) }
     }
 }
 
@@ -757,7 +748,7 @@ impl Iterator for Label {
 
     fn next(&mut self) -> Option<u8> {
         // SAFETY: the caller promises a zero byte at the end, and it is not passed.
-        let byte = unsafe { *self.0 } as u8;
+        let byte = unsafe { (*self.0.cast::<Stored<u8>>()).get() };
         if byte == 0 {
             return None;
         }
@@ -794,7 +785,7 @@ unsafe fn write(
 ) -> fieldstop_status {
     let positions = [style_position, style_position + 2, style_position + 4];
     // SAFETY: the caller's promise about the pointers.
-    unsafe { fill(style, positions, text, capacity, length, |style, out| value.write(style, width, out)) }
+    unsafe { fill(style, positions, text, capacity, length, |style, out| value.write_as(style, width, out)) }
 }
 
 /// Checks the pointers, has the text written and gives its length.
@@ -808,7 +799,7 @@ unsafe fn fill(
     text: *mut c_char,
     capacity: u16,
     length: *mut u16,
-    write: impl FnOnce(&TextStyle, &mut [u8]) -> Result<usize, Error>,
+    write: impl FnOnce(&StyleOfC, &mut [u8]) -> Result<usize, Error>,
 ) -> fieldstop_status {
     if style.is_null() {
         return null(style_position);
@@ -819,8 +810,10 @@ unsafe fn fill(
     if length.is_null() {
         return null(length_position);
     }
-    // SAFETY: none is null, and the caller's promise.
-    let (style, out) = unsafe { (&*style, slice::from_raw_parts_mut(text.cast(), capacity.into())) };
+    // SAFETY: not null, and the caller's promise.
+    let style = unsafe { &*style.cast::<StyleOfC>() };
+    // SAFETY: not null, and the caller's promise.
+    let out = unsafe { slice::from_raw_parts_mut(text.cast(), capacity.into()) };
     match write(style, out) {
         Ok(bytes) => {
             // SAFETY: not null, and the caller's promise.

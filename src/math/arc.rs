@@ -2,35 +2,38 @@
 
 use super::divide::{divide, normalise, shift_up};
 use super::multiply::{high, high_64, high_signed, wide};
+use crate::stored::{Stored, stored};
 
 /// 180 degrees.
 const HALF_TURN_MAS: u32 = 648_000_000;
 
-/// For each of 16 intervals of the ratio, twice the arc tangent in eighths of a milliarcsecond as a polynomial in the
-/// distance from the middle, counted in intervals: c0, 2^4 c1, -2^8 c2, and c3 / 8 (18 bits) with c4 / 8 (14 bits).
-static ARC: [[u32; 4]; 16] = [
-    [103098851, 3297016963, 102931237, 3748544708],
-    [308495522, 3271483454, 304029371, 3773661748],
-    [511525967, 3221584792, 491376034, 3821077350],
-    [710731427, 3149527024, 657496668, 3885696062],
-    [904817539, 3058319050, 797100228, 3961177265],
-    [1092695490, 2951478253, 907353902, 4040967364],
-    [1273504225, 2832726439, 987773754, 4119250054],
-    [1446614489, 2705718713, 1039827777, 4191519760],
-    [1611617725, 2573832971, 1066386193, 4254794616],
-    [1768304019, 2440030830, 1071147077, 12632787],
-    [1916633548, 2306786826, 1058130186, 54690354],
-    [2056705425, 2176073853, 1031288053, 86557086],
-    [2188726989, 2049389134, 994245790, 109347101],
-    [2312985578, 1927805288, 950156176, 124420274],
-    [2429823935, 1812033596, 901644606, 133202013],
-    [2539619686, 1702489996, 850816167, 137019419],
-];
+stored! {
+    /// For each of 16 intervals of the ratio, twice the arc tangent in eighths of a milliarcsecond as a polynomial in the
+    /// distance from the middle, counted in intervals: c0, 2^4 c1, -2^8 c2, and c3 / 8 (18 bits) with c4 / 8 (14 bits).
+    static ARC: [[u32; 4]; 16] = [
+        [103098851, 3297016963, 102931237, 3748544708],
+        [308495522, 3271483454, 304029371, 3773661748],
+        [511525967, 3221584792, 491376034, 3821077350],
+        [710731427, 3149527024, 657496668, 3885696062],
+        [904817539, 3058319050, 797100228, 3961177265],
+        [1092695490, 2951478253, 907353902, 4040967364],
+        [1273504225, 2832726439, 987773754, 4119250054],
+        [1446614489, 2705718713, 1039827777, 4191519760],
+        [1611617725, 2573832971, 1066386193, 4254794616],
+        [1768304019, 2440030830, 1071147077, 12632787],
+        [1916633548, 2306786826, 1058130186, 54690354],
+        [2056705425, 2176073853, 1031288053, 86557086],
+        [2188726989, 2049389134, 994245790, 109347101],
+        [2312985578, 1927805288, 950156176, 124420274],
+        [2429823935, 1812033596, 901644606, 133202013],
+        [2539619686, 1702489996, 850816167, 137019419],
+    ];
+}
 
 /// The value of a table's row at `u` / 2^32 from its middle.
 #[inline(never)]
-const fn quartic(row: &[u32; 4], u: i32) -> u32 {
-    let [c0, c1, c2, c34] = *row;
+fn quartic(row: &Stored<[u32; 4]>, u: i32) -> u32 {
+    let [c0, c1, c2, c34] = [row.at(0), row.at(1), row.at(2), row.at(3)];
     // Sixteen bits of u do for the two small terms; the half of the last one is kept by t / 2.
     let w = u >> 16;
     let (c3, c4) = ((c34 as i32) >> 14, ((c34 << 18) as i32) >> 18);
@@ -42,14 +45,14 @@ const fn quartic(row: &[u32; 4], u: i32) -> u32 {
 
 /// Twice the arc tangent of `ratio` / 2^32 in milliarcseconds, at most 0.9 from the exact value.
 #[inline(always)]
-const fn twice_arctangent(ratio: u32) -> u32 {
-    let eighths = quartic(&ARC[(ratio >> 28) as usize], ((ratio << 4) ^ (1 << 31)) as i32);
+fn twice_arctangent(ratio: u32) -> u32 {
+    let eighths = quartic(ARC.entry((ratio >> 28) as usize), ((ratio << 4) ^ (1 << 31)) as i32);
     (eighths + 4) >> 3
 }
 
 /// 2 atan(n / 2 d) in milliarcseconds, at most 1 from the exact value. Neither is 0.
 #[inline(never)]
-pub(crate) const fn angle_across(n: u32, d: u32) -> u32 {
+pub(crate) fn angle_across(n: u32, d: u32) -> u32 {
     if n >> 1 < d {
         twice_arctangent(divide((n as u64) << 31, d).0)
     } else if n as u64 == (d as u64) << 1 {
@@ -61,7 +64,7 @@ pub(crate) const fn angle_across(n: u32, d: u32) -> u32 {
 
 /// The upper 32 bits of `x` from its first one on, cut, and how many bits stand below them (negative: zeros added).
 #[inline(always)]
-const fn leading(x: u64) -> (u32, i32) {
+fn leading(x: u64) -> (u32, i32) {
     if x >> 32 == 0 {
         let (x, shift) = normalise(x as u32);
         (x, -(shift as i32))
@@ -73,7 +76,7 @@ const fn leading(x: u64) -> (u32, i32) {
 
 /// 2 atan(a b / (c d)) in milliarcseconds, at most 1 from the exact value. None is 0.
 #[inline(never)]
-pub(crate) const fn angle_of_products(a: u32, b: u32, c: u32, d: u32) -> u32 {
+pub(crate) fn angle_of_products(a: u32, b: u32, c: u32, d: u32) -> u32 {
     let (above, (c1, c_shift), (d1, d_shift)) = (wide(a, b), normalise(c), normalise(d));
     let below = high(c1, d1);
     // The usual telescope: a ratio under 1, and nothing lost above when it is shifted up.
@@ -93,7 +96,7 @@ pub(crate) const fn angle_of_products(a: u32, b: u32, c: u32, d: u32) -> u32 {
 
 /// 2 atan(n / d) in milliarcseconds, at most 1 from the exact value. Neither is 0.
 #[inline(never)]
-const fn angle_of_ratio(n: u64, d: u64) -> u32 {
+fn angle_of_ratio(n: u64, d: u64) -> u32 {
     let ((n, n_below), (d, d_below)) = (leading(n), leading(d));
     let down = d_below - n_below;
     // n / d as they stand here is from 1/2 to 2, to be shifted down by `down`.
@@ -113,11 +116,11 @@ const fn angle_of_ratio(n: u64, d: u64) -> u32 {
 }
 
 /// (1 - a cot a) / a^2 - 1/3 in steps of 2^-37 as a polynomial in a^2, which is at most (pi / 4)^2; low power first.
-static COTANGENT: [u32; 5] = [3054198972, 290875593, 29094043, 2909358, 349094];
+const COTANGENT: [u32; 5] = [3054198972, 290875593, 29094043, 2909358, 349094];
 
 /// The same from a^2 in steps of 2^-32; within 3 steps.
 #[inline(always)]
-const fn cotangent_tail(square: u32) -> u32 {
+fn cotangent_tail(square: u32) -> u32 {
     let [c0, c1, c2, c3, c4] = COTANGENT;
     let mut sum = c3 + high(square, c4);
     sum = c2 + high(square, sum);
@@ -130,35 +133,37 @@ const SQUARE: u64 = 11831572865344701501;
 
 /// Thirteen times the angle, so that the square of 90 degrees fills 64 bits.
 #[inline(always)]
-const fn squared(t_mas: u32) -> u64 {
+fn squared(t_mas: u32) -> u64 {
     wide(13 * t_mas, 13 * t_mas)
 }
 
-/// For each of 8 intervals of 90 degrees - t, the side that goes with 8 t in tan(t / 2) = 8 t / adjacent, which is
-/// 16 R (a cot a) for a = t / 2; stored as `ARC` is.
-static ADJACENT: [[u32; 4]; 8] = [
-    [2681091841, 2743990495, 3387379563, 545503570],
-    [2839612282, 2332506141, 3202821257, 442153553],
-    [2973087384, 1941793214, 3054120601, 353483540],
-    [3082681997, 1567684210, 2936462453, 275970984],
-    [3169317684, 1206536943, 2846212237, 206797844],
-    [3233701265, 855101992, 2780688600, 143670369],
-    [3276345869, 510414151, 2738003478, 84638865],
-    [3297585755, 169700519, 2716953677, 27966633],
-];
+stored! {
+    /// For each of 8 intervals of 90 degrees - t, the side that goes with 8 t in tan(t / 2) = 8 t / adjacent, which is
+    /// 16 R (a cot a) for a = t / 2; stored as `ARC` is.
+    static ADJACENT: [[u32; 4]; 8] = [
+        [2681091841, 2743990495, 3387379563, 545503570],
+        [2839612282, 2332506141, 3202821257, 442153553],
+        [2973087384, 1941793214, 3054120601, 353483540],
+        [3082681997, 1567684210, 2936462453, 275970984],
+        [3169317684, 1206536943, 2846212237, 206797844],
+        [3233701265, 855101992, 2780688600, 143670369],
+        [3276345869, 510414151, 2738003478, 84638865],
+        [3297585755, 169700519, 2716953677, 27966633],
+    ];
+}
 
 /// The side that goes with 8 t: from 2^31 to 2^32, at most 3 from the exact value. `t_mas` is at most 90 degrees.
 #[inline(always)]
-pub(crate) const fn adjacent(t_mas: u32) -> u32 {
+pub(crate) fn adjacent(t_mas: u32) -> u32 {
     // 2^63 / (13 times 90 degrees), cut, so that the place is below 2^31.
     let place = high(13 * (HALF_TURN_MAS / 2 - t_mas), 2189784434);
-    quartic(&ADJACENT[(place >> 28 & 7) as usize], ((place << 4) ^ (1 << 31)) as i32)
+    quartic(ADJACENT.entry((place >> 28 & 7) as usize), ((place << 4) ^ (1 << 31)) as i32)
 }
 
 /// R (a cot a) for a = t / 2 in steps of 2^-32 of a milliarcsecond, so that tan(t / 2) = t / 2 adjacent; within
 /// 4 parts in 10^11. `t_mas` is at most 90 degrees.
 #[inline(never)]
-pub(crate) const fn adjacent_fine(t_mas: u32) -> u64 {
+pub(crate) fn adjacent_fine(t_mas: u32) -> u64 {
     const AT_ZERO: u64 = 885_900_597_147_055_340; // R
     const THIRD: u64 = 6_148_914_691_236_517_205; // 2^64 / 3
     let square = high_64(squared(t_mas), SQUARE);
@@ -190,10 +195,10 @@ mod tests {
         });
     }
 
-    fn compare_table(table: &[[u32; 4]], f: impl Fn(f64) -> f64) {
+    fn compare_table<const N: usize>(table: &Stored<[[u32; 4]; N]>, f: impl Fn(f64) -> f64) {
         for (i, row) in table.iter().enumerate() {
-            let c = interpolate(|u| f((i as f64 + 0.5 + u) / table.len() as f64), -0.5, 0.5, 5);
-            let [c0, c1, c2, c34] = *row;
+            let c = interpolate(|u| f((i as f64 + 0.5 + u) / N as f64), -0.5, 0.5, 5);
+            let [c0, c1, c2, c34] = row;
             let got = [
                 c0 as f64,
                 c1 as f64 / 16.0,

@@ -3,24 +3,27 @@
 
 use super::multiply::{high, wide};
 use crate::status::Error;
+use crate::stored::stored;
 
-/// 2^8 / D - 2^8 for the middle of each of 64 intervals of D = d / 2^32, from 1/2 to 1.
-static RECIPROCAL: [u8; 64] = [
-    252, 244, 237, 229, 222, 215, 209, 202, 196, 190, 184, 178, 172, 167, 161, 156, 151, 146, 141, 136, 132,
-    127, 123, 118, 114, 110, 106, 102, 98, 94, 91, 87, 84, 80, 77, 73, 70, 67, 64, 61, 58, 55, 52, 49, 46,
-    43, 41, 38, 35, 33, 30, 28, 25, 23, 21, 18, 16, 14, 11, 9, 7, 5, 3, 1,
-];
+stored! {
+    /// 2^8 / D - 2^8 for the middle of each of 64 intervals of D = d / 2^32, from 1/2 to 1.
+    static RECIPROCAL: [u8; 64] = [
+        252, 244, 237, 229, 222, 215, 209, 202, 196, 190, 184, 178, 172, 167, 161, 156, 151, 146, 141, 136, 132,
+        127, 123, 118, 114, 110, 106, 102, 98, 94, 91, 87, 84, 80, 77, 73, 70, 67, 64, 61, 58, 55, 52, 49, 46,
+        43, 41, 38, 35, 33, 30, 28, 25, 23, 21, 18, 16, 14, 11, 9, 7, 5, 3, 1,
+    ];
+}
 
 /// Shifts `x` up until its top bit is set; gives the shift too. `x` is not 0.
 #[inline(always)]
-pub(crate) const fn normalise(x: u32) -> (u32, u32) {
+pub(crate) fn normalise(x: u32) -> (u32, u32) {
     let (x, shift) = normalise_evenly(x);
     if x < 1 << 31 { (x << 1, shift + 1) } else { (x, shift) }
 }
 
 /// Shifts `x` up by an even number of places until one of its top two bits is set; gives the shift too. `x` is not 0.
 #[inline(always)]
-pub(crate) const fn normalise_evenly(x: u32) -> (u32, u32) {
+pub(crate) fn normalise_evenly(x: u32) -> (u32, u32) {
     if cfg!(all(target_arch = "arm", not(target_has_atomic = "32"))) {
         let (mut x, mut shift) = (x, 0);
         if x < 1 << 16 {
@@ -48,7 +51,7 @@ pub(crate) const fn normalise_evenly(x: u32) -> (u32, u32) {
 
 /// `n` shifted up by 0 to 31 places.
 #[inline(always)]
-pub(crate) const fn shift_up(n: u64, shift: u32) -> u64 {
+pub(crate) fn shift_up(n: u64, shift: u32) -> u64 {
     let (upper, lower) = ((n >> 32) as u32, n as u32);
     let upper = upper << shift | (lower >> 1) >> (31 - shift);
     (upper as u64) << 32 | (lower << shift) as u64
@@ -56,9 +59,9 @@ pub(crate) const fn shift_up(n: u64, shift: u32) -> u64 {
 
 /// 2^64 / d - 2^32, at most 11 too low and never too high: checked for every normalised `d`.
 #[inline(always)]
-const fn reciprocal(d: u32) -> u32 {
+fn reciprocal(d: u32) -> u32 {
     // Three steps from 6 to 17 to 30 bits: a table, x (1 + e + e^2), x (1 + e).
-    let x = 256 + RECIPROCAL[(d >> 25 & 63) as usize] as i32;
+    let x = 256 + i32::from(RECIPROCAL.at((d >> 25 & 63) as usize));
     let e = (1i32 << 31).wrapping_sub(x.wrapping_mul((d >> 9) as i32)) >> 9;
     let y = e + ((e * e) >> 22);
     let x = (x << 7) + ((x * y + (1 << 14)) >> 15);
@@ -69,7 +72,7 @@ const fn reciprocal(d: u32) -> u32 {
 
 /// Quotient and remainder by a normalised divisor. The upper half of `n` is below `d`.
 #[inline(always)]
-const fn divide_normalised(n: u64, d: u32) -> (u32, u32) {
+fn divide_normalised(n: u64, d: u32) -> (u32, u32) {
     let upper = (n >> 32) as u32;
     let mut quotient = upper + high(upper, reciprocal(d));
     let mut rest = n - wide(quotient, d);
@@ -83,7 +86,7 @@ const fn divide_normalised(n: u64, d: u32) -> (u32, u32) {
 
 /// Quotient and remainder. `d` is not 0 and above the upper half of `n`.
 #[inline(never)]
-pub(crate) const fn divide(n: u64, d: u32) -> (u32, u32) {
+pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
     let (d, shift) = normalise(d);
     let (quotient, rest) = divide_normalised(shift_up(n, shift), d);
     (quotient, rest >> shift)
@@ -91,7 +94,7 @@ pub(crate) const fn divide(n: u64, d: u32) -> (u32, u32) {
 
 /// n / d to the nearest integer, halves up. `d` is not 0; n + d / 2 is below 2^64.
 #[inline(always)]
-pub(crate) const fn rounded(n: u64, d: u32) -> Result<u32, Error> {
+pub(crate) fn rounded(n: u64, d: u32) -> Result<u32, Error> {
     let n = n + (d >> 1) as u64;
     if (n >> 32) as u32 >= d {
         return Err(Error::OVERFLOW);
@@ -101,13 +104,13 @@ pub(crate) const fn rounded(n: u64, d: u32) -> Result<u32, Error> {
 
 /// a b / d to the nearest integer, halves up. `d` is not 0.
 #[inline(always)]
-pub(crate) const fn scaled(a: u32, b: u32, d: u32) -> Result<u32, Error> {
+pub(crate) fn scaled(a: u32, b: u32, d: u32) -> Result<u32, Error> {
     rounded(wide(a, b), d)
 }
 
 /// (n + fraction / 2^32) / d to the nearest integer. `d` is not 0.
 #[inline(always)]
-pub(crate) const fn with_fraction(n: u64, fraction: u32, d: u32) -> Result<u32, Error> {
+pub(crate) fn with_fraction(n: u64, fraction: u32, d: u32) -> Result<u32, Error> {
     if (n >> 32) as u32 >= d {
         return Err(Error::OVERFLOW);
     }
@@ -125,14 +128,14 @@ pub(crate) struct Constant {
 
 /// a k / d to the nearest integer, k within 2^-33. `d` is not 0.
 #[inline(always)]
-pub(crate) const fn constant(a: u32, k: Constant, d: u32) -> Result<u32, Error> {
+pub(crate) fn constant(a: u32, k: Constant, d: u32) -> Result<u32, Error> {
     let low = wide(a, k.fraction);
     // Below 2^64: a (whole + 1) at most.
     with_fraction(wide(a, k.whole) + (low >> 32), low as u32, d)
 }
 
 #[inline(always)]
-const fn up_if(quotient: u32, up: bool) -> Result<u32, Error> {
+fn up_if(quotient: u32, up: bool) -> Result<u32, Error> {
     match quotient.checked_add(up as u32) {
         Some(rounded) => Ok(rounded),
         None => Err(Error::OVERFLOW),
@@ -141,7 +144,7 @@ const fn up_if(quotient: u32, up: bool) -> Result<u32, Error> {
 
 /// (upper 2^64 + n) / d to the nearest integer, halves up. `d` is not 0. (Knuth, The Art of Computer Programming 2,
 /// 4.3.1, algorithm D with one digit of quotient.)
-pub(crate) const fn by_64(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
+pub(crate) fn by_64(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
     let top = (upper as u64) << 32 | n >> 32;
     if top >= d {
         return Err(Error::OVERFLOW);

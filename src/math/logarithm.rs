@@ -2,20 +2,25 @@
 
 use super::divide::normalise;
 use super::multiply::high;
+use crate::stored::stored;
 
-/// 256 over the middle of each of 32 intervals of M, from 1 to 2.
-static RECIPROCAL: [u8; 32] = [
-    252, 245, 237, 231, 224, 218, 213, 207, 202, 197, 193, 188, 184, 180, 176, 172, 169, 165, 162, 159, 156,
-    153, 150, 148, 145, 142, 140, 138, 135, 133, 131, 129,
-];
+stored! {
+    /// 256 over the middle of each of 32 intervals of M, from 1 to 2.
+    static RECIPROCAL: [u8; 32] = [
+        252, 245, 237, 231, 224, 218, 213, 207, 202, 197, 193, 188, 184, 180, 176, 172, 169, 165, 162, 159, 156,
+        153, 150, 148, 145, 142, 140, 138, 135, 133, 131, 129,
+    ];
+}
 
-/// -log2 of that reciprocal, in steps of 2^-30.
-static LOGARITHM: [i32; 32] = [
-    24395496, 68034495, 119461027, 159183255, 206851077, 248910186, 284853376, 329115873, 366992626,
-    405818769, 437595924, 478256579, 511571454, 545618583, 580430880, 616043529, 643300807, 680406342,
-    708830662, 737786309, 767293525, 797373732, 828049626, 848842985, 880565910, 912952079, 934925242,
-    957214576, 991261705, 1014382761, 1037854149, 1061686650,
-];
+stored! {
+    /// -log2 of that reciprocal, in steps of 2^-30.
+    static LOGARITHM: [i32; 32] = [
+        24395496, 68034495, 119461027, 159183255, 206851077, 248910186, 284853376, 329115873, 366992626,
+        405818769, 437595924, 478256579, 511571454, 545618583, 580430880, 616043529, 643300807, 680406342,
+        708830662, 737786309, 767293525, 797373732, 828049626, 848842985, 880565910, 912952079, 934925242,
+        957214576, 991261705, 1014382761, 1037854149, 1061686650,
+    ];
+}
 
 /// log2(1 + r) / r for r within 1/56, by Chebyshev interpolation; the first less 369/256, and in steps of 2^-22, the
 /// others in steps of 2^-16.
@@ -25,19 +30,19 @@ const LOGARITHM_SERIES: [i32; 4] = [5406, -47274, 31522, -23642];
 pub(crate) const ONE: u32 = 1 << 27;
 
 #[inline(always)]
-const fn reciprocal(interval: usize) -> u32 {
-    RECIPROCAL[interval & 31] as u32
+fn reciprocal(interval: usize) -> u32 {
+    RECIPROCAL.at(interval & 31).into()
 }
 
 #[inline(always)]
-const fn logarithm(interval: usize) -> i32 {
-    LOGARITHM[interval & 31]
+fn logarithm(interval: usize) -> i32 {
+    LOGARITHM.at(interval & 31)
 }
 
 /// log2(x) in steps of 2^-27. `x` is not 0; of its bits only the upper 27 count, as more could not keep the result
 /// from falling where x rises. Error: at most 2.5 steps, 1.5 for x up to 2^16; 5.4 with what is cut from x over 2^27.
 #[inline(never)]
-pub(crate) const fn log2(x: u32) -> u32 {
+pub(crate) fn log2(x: u32) -> u32 {
     let (m, shift) = normalise(x);
     let interval = (m >> 26) as usize;
     // M times its reciprocal is 1 + r, and the 1 falls out at the top.
@@ -51,25 +56,27 @@ pub(crate) const fn log2(x: u32) -> u32 {
     ((31 - shift) << 27) + ((fraction + 4) >> 3) as u32
 }
 
-/// 2^(-i / 16) in steps of 2^-31.
-static SIXTEENTHS: [u32; 16] = [
-    2147483648, 2056437387, 1969251188, 1885761398, 1805811301, 1729250827, 1655936265, 1585730000,
-    1518500250, 1454120821, 1392470869, 1333434672, 1276901417, 1222764986, 1170923762, 1121280436,
-];
+stored! {
+    /// 2^(-i / 16) in steps of 2^-31.
+    static SIXTEENTHS: [u32; 16] = [
+        2147483648, 2056437387, 1969251188, 1885761398, 1805811301, 1729250827, 1655936265, 1585730000,
+        1518500250, 1454120821, 1392470869, 1333434672, 1276901417, 1222764986, 1170923762, 1121280436,
+    ];
+}
 
 /// (1 - 2^-g) / g for g up to 1/16, by Chebyshev interpolation: 355/512 less the first, in steps of 2^-22; then minus
 /// the second and the third, in steps of 2^-18.
 const POWER_SERIES: [u32; 3] = [890, 62968, 14316];
 
 #[inline(always)]
-const fn sixteenth(index: usize) -> u32 {
-    SIXTEENTHS[index & 15]
+fn sixteenth(index: usize) -> u32 {
+    SIXTEENTHS.at(index & 15)
 }
 
 /// 2^-y in steps of 2^-31, for y in steps of 2^-27; exact at each sixteenth.
 /// Error: at most 1 step and 4e-8 of the result.
 #[inline(never)]
-pub(crate) const fn exp2_negative(y: u32) -> u32 {
+pub(crate) fn exp2_negative(y: u32) -> u32 {
     let g = y & ((1 << 23) - 1); // 2^-27, under 1/16
     let s = (g + (1 << 6)) >> 7; // 2^-20
     let [c0, c1, c2] = POWER_SERIES;
@@ -95,10 +102,10 @@ mod tests {
     fn tables_follow_their_rule() {
         for i in 0..32 {
             let middle = 1.0 + (i as f64 + 0.5) / 32.0;
-            assert_eq!(RECIPROCAL[i] as i64, steps(1.0 / middle, 8));
-            assert_eq!(LOGARITHM[i] as i64, steps((256.0 / RECIPROCAL[i] as f64).log2(), 30));
+            assert_eq!(RECIPROCAL.at(i) as i64, steps(1.0 / middle, 8));
+            assert_eq!(LOGARITHM.at(i) as i64, steps((256.0 / RECIPROCAL.at(i) as f64).log2(), 30));
         }
-        for (i, &entry) in SIXTEENTHS.iter().enumerate() {
+        for (i, entry) in SIXTEENTHS.iter().enumerate() {
             assert_eq!(entry as i64, steps((-(i as f64) / 16.0).exp2(), 31));
         }
     }
@@ -160,7 +167,7 @@ mod tests {
         (0..u32::MAX).step_by(4999).for_each(check_exp2);
         check_exp2(u32::MAX);
         for i in 0..16 {
-            assert_eq!(exp2_negative(ONE / 16 * i), SIXTEENTHS[i as usize]);
+            assert_eq!(exp2_negative(ONE / 16 * i), SIXTEENTHS.at(i as usize));
         }
         assert_eq!(exp2_negative(31 * ONE), 1);
     }

@@ -3,24 +3,29 @@
 use super::divide::{normalise_evenly, shift_up};
 use super::multiply::wide;
 use crate::status::Error;
+use crate::stored::stored;
 
-/// 2^8 / sqrt(A) - 2^8 for the middle of each of 96 intervals of A = n / 2^64, from 1/4 to 1.
-static RECIPROCAL_ROOT: [u8; 96] = [
-    252, 244, 237, 230, 223, 217, 211, 205, 199, 194, 188, 183, 178, 173, 169, 164, 160, 156, 152, 148, 144,
-    140, 136, 133, 129, 126, 123, 119, 116, 113, 110, 107, 105, 102, 99, 97, 94, 91, 89, 87, 84, 82, 80, 77,
-    75, 73, 71, 69, 67, 65, 63, 61, 59, 57, 55, 54, 52, 50, 48, 47, 45, 44, 42, 40, 39, 37, 36, 34, 33, 31,
-    30, 29, 27, 26, 25, 23, 22, 21, 20, 18, 17, 16, 15, 13, 12, 11, 10, 9, 8, 7, 6, 5, 4, 3, 2, 1,
-];
+const INTERVALS: usize = 96;
+
+stored! {
+    /// 2^8 / sqrt(A) - 2^8 for the middle of each of 96 intervals of A = n / 2^64, from 1/4 to 1.
+    static RECIPROCAL_ROOT: [u8; INTERVALS] = [
+        252, 244, 237, 230, 223, 217, 211, 205, 199, 194, 188, 183, 178, 173, 169, 164, 160, 156, 152, 148, 144,
+        140, 136, 133, 129, 126, 123, 119, 116, 113, 110, 107, 105, 102, 99, 97, 94, 91, 89, 87, 84, 82, 80, 77,
+        75, 73, 71, 69, 67, 65, 63, 61, 59, 57, 55, 54, 52, 50, 48, 47, 45, 44, 42, 40, 39, 37, 36, 34, 33, 31,
+        30, 29, 27, 26, 25, 23, 22, 21, 20, 18, 17, 16, 15, 13, 12, 11, 10, 9, 8, 7, 6, 5, 4, 3, 2, 1,
+    ];
+}
 
 #[inline(always)]
-const fn reciprocal_root(index: usize) -> i32 {
-    if index < RECIPROCAL_ROOT.len() { 256 + RECIPROCAL_ROOT[index] as i32 } else { 256 }
+fn reciprocal_root(index: usize) -> i32 {
+    if index < INTERVALS { 256 + i32::from(RECIPROCAL_ROOT.at(index)) } else { 256 }
 }
 
 /// The root of `n`, whose upper two bits are not both 0: less than 2 too low and less than 0.5 too high. That holds for
 /// each of the 34 upper bits that it looks at.
 #[inline(always)]
-const fn near(n: u64) -> u32 {
+fn near(n: u64) -> u32 {
     let a = (n >> 32) as u32;
     if a == u32::MAX {
         return u32::MAX; // the steps below would wrap to 0
@@ -39,7 +44,7 @@ const fn near(n: u64) -> u32 {
 
 /// The square root of `n` to the nearest integer.
 #[inline(never)]
-pub(crate) const fn rounded(n: u64) -> Result<u32, Error> {
+pub(crate) fn rounded(n: u64) -> Result<u32, Error> {
     // (2^32 - 1/2)^2
     if n > (u32::MAX as u64) << 32 {
         return Err(Error::OVERFLOW);
@@ -57,7 +62,7 @@ pub(crate) const fn rounded(n: u64) -> Result<u32, Error> {
 }
 
 /// The square root of n + fraction / 2^32, within 0.50001.
-pub(crate) const fn with_fraction(n: u64, fraction: u32) -> Result<u32, Error> {
+pub(crate) fn with_fraction(n: u64, fraction: u32) -> Result<u32, Error> {
     if n >> 32 != 0 {
         return rounded(n); // the fraction moves the root by less than 2^-17
     }
@@ -77,7 +82,7 @@ mod tests {
     fn table_is_the_middle_of_each_interval() {
         let expected: Vec<u8> =
             (32..128).map(|i| (256.0 / ((i as f64 + 0.5) / 128.0).sqrt() - 256.0).round() as u8).collect();
-        assert_eq!(RECIPROCAL_ROOT[..], expected);
+        assert!(RECIPROCAL_ROOT.iter().eq(expected));
     }
 
     /// `upper` is the part of n that `near` looks at.

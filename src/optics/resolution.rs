@@ -8,6 +8,7 @@ use crate::math::float::{Real, from_zero_to, not_negative, positive};
 use crate::math::multiply::{high, high_signed, wide};
 use crate::math::{logarithm, root};
 use crate::status::Error;
+use crate::stored::stored;
 use crate::units::{Microarcseconds, Micrometres, Nanometres, Q16};
 
 use super::{allowed, present};
@@ -60,8 +61,12 @@ pub fn rayleigh_limit<F: Real>(aperture_mm: F, wavelength_nm: F) -> Result<F, Er
 
 /// x / (1 + m) as a polynomial in m^2, m = (D - d) / (D + d), times the eighths of a microarcsecond that 1 / pi nm over
 /// 1 um makes. A root of e is one of 1 / e times e, so it is even in m: nine terms hold it within 7 parts in 10^8.
-static DARK_RING: [i32; 9] =
+const DARK_RING: [i32; 9] =
     [1263132172, -210508089, -85045494, 10346600, 16056364, 68049468, -90048108, 40729469, -6412445];
+
+stored! {
+    static STORED_DARK_RING: [i32; 9] = DARK_RING;
+}
 
 /// The same in arcseconds that nanometres over millimetres make.
 #[cfg(feature = "float")]
@@ -103,7 +108,7 @@ pub fn rayleigh_limit_obstructed_fx(
     let (less, more) = (aperture.0 - obstruction.0, aperture.0 as u64 + obstruction.0 as u64);
     let m = divide::by_64(0, (less as u64) << 32, more)?;
     let square = high(m, m);
-    let y = DARK_RING.iter().rev().fold(0, |y, &term| high_signed(y, square) + term) as u32;
+    let y = STORED_DARK_RING.iter().rev().fold(0, |y, term| high_signed(y, square) + term) as u32;
     let eighths = wide(wavelength.0, y + high(y, m));
     divide::with_fraction(eighths >> 3, (eighths as u32) << 29, aperture.0).map(Microarcseconds)
 }

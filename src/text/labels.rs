@@ -1,20 +1,21 @@
 //! English labels, of the length that the lines leave room for. A translation is another table of the same kind.
 
 use super::page::{CameraRow, VisualRow};
+#[cfg(feature = "capi")]
+use crate::stored::{stored, stored_text};
+#[cfg(feature = "capi")]
+use core::ffi::c_char;
 
 macro_rules! labels {
     ($($(#[$doc:meta])* $name:ident, $for_c:ident: $count:expr, [$($text:literal),* $(,)?];)*) => {$(
         $(#[$doc])*
         pub const $name: [&str; $count] = [$($text),*];
 
-        /// The same with the zero byte that C wants at the end of each.
         #[cfg(feature = "capi")]
-        pub(crate) const $for_c: [&core::ffi::CStr; $count] = [$(
-            match core::ffi::CStr::from_bytes_with_nul(concat!($text, "\0").as_bytes()) {
-                Ok(text) => text,
-                Err(_) => panic!(),
-            }
-        ),*];
+        stored! {
+            /// The same for C.
+            pub(crate) static $for_c: [*const c_char; $count] = [$(stored_text!($for_c, $text)),*];
+        }
     )*};
 }
 

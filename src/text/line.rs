@@ -1,6 +1,6 @@
 //! One line of a character display: a label, a mark, a value; and what of it changed.
 
-use super::style::{TextStyle, begins_character};
+use super::style::{Look, TextStyle, begins_character};
 use super::value::Value;
 use super::write::{NO_ROOM, blank};
 use crate::status::{Cause, Error};
@@ -38,7 +38,7 @@ pub(crate) const fn row_of(line: u8, columns: u8) -> u8 {
 pub(crate) fn write_line(
     row: Option<Row>,
     label: impl Iterator<Item = u8> + Clone,
-    style: &TextStyle,
+    style: &impl Look,
     columns: u8,
     line: u8,
     out: &mut [u8],
@@ -49,7 +49,7 @@ pub(crate) fn write_line(
     let mut plan = Plan { columns: columns.into(), value: Value::BLANK, field: 0, mark: Some(b' ') };
     if let Some(row) = row {
         if row.fact {
-            plan.mark = Some(style.fact_mark);
+            plan.mark = Some(style.fact_mark());
         }
         if columns >= ONE_LINE {
             (plan.value, plan.field) = (row.value, row.field.into());
@@ -58,7 +58,7 @@ pub(crate) fn write_line(
             (plan.value, plan.field, plan.mark) = (row.value, columns.into(), None);
         }
     }
-    if style.utf8 == 0 { plan.write(label, style, out) } else { plan.write_utf8(label, style, out) }
+    if style.is_utf8() { plan.write_utf8(label, style, out) } else { plan.write(label, style, out) }
 }
 
 struct Plan {
@@ -74,7 +74,7 @@ impl Plan {
     fn write(
         self,
         label: impl Iterator<Item = u8>,
-        style: &TextStyle,
+        style: &impl Look,
         out: &mut [u8],
     ) -> Result<usize, Error> {
         let out = out.get_mut(..self.columns).ok_or(NO_ROOM)?;
@@ -99,7 +99,7 @@ impl Plan {
     fn write_utf8(
         self,
         label: impl Iterator<Item = u8> + Clone,
-        style: &TextStyle,
+        style: &impl Look,
         out: &mut [u8],
     ) -> Result<usize, Error> {
         let most = self.columns - usize::from(self.mark.is_some());
@@ -174,9 +174,13 @@ pub struct Span {
 ///
 /// Where the two have different numbers of characters it reaches to the end of `line`.
 pub fn changed(shown: &[u8], line: &[u8], style: &TextStyle) -> Span {
+    change(shown, line, style)
+}
+
+pub(crate) fn change(shown: &[u8], line: &[u8], style: &impl Look) -> Span {
     let same = shown.iter().zip(line).take_while(|(a, b)| a == b).count();
     let begins =
-        |text: &[u8], at: usize| style.utf8 == 0 || text.get(at).is_none_or(|&byte| begins_character(byte));
+        |text: &[u8], at: usize| !style.is_utf8() || text.get(at).is_none_or(|&byte| begins_character(byte));
     let mut start = same;
     while start > 0 && !(begins(shown, start) && begins(line, start)) {
         start -= 1;

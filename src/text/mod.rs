@@ -60,6 +60,8 @@
 //! The mark before a value, `!`, says that a fact concerns it; the last page tells each fact in words. What is not
 //! available is a dash.
 //!
+//! On AVR the C interface reads styles and labels from program memory; Rust code gives them as ordinary data.
+//!
 //! Labels come from a table of the caller's: [`VISUAL_LABELS`] and [`CAMERA_LABELS`] for 20 columns,
 //! [`VISUAL_LABELS_SHORT`] and [`CAMERA_LABELS_SHORT`] for less, or a translation, one text for each [`VisualRow`] or
 //! [`CameraRow`]. For a graphic display, take the parts: the label from the table, and the [`Row`] of [`visual_row`] or
@@ -88,7 +90,8 @@ pub(crate) use {
     labels::{
         CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C,
     },
-    line::{row_of, write_line},
+    line::{change, row_of, write_line},
+    style::{Look, StyleOfC},
 };
 
 // C sees these layouts on every target: any other does not compile.

@@ -5,6 +5,7 @@ use super::style::{TextStyle, Unit};
 use super::value::Value;
 use crate::setup::{CameraReadout, VisualReadout};
 use crate::status::Error;
+use crate::stored::stored;
 use crate::units::{Milliarcseconds, Millimagnitudes, Q16};
 
 macro_rules! rows {
@@ -126,44 +127,48 @@ const fn fact(member: u8, second: u8, fact: u32) -> Plan {
     plan(member, FACT, second, Unit::None, 3, fact)
 }
 
-static VISUAL: [Plan; VisualRow::ALL.len()] = [
-    plan(2, Q16_RATIO, 1, Unit::Times, 6, VisualReadout::FACT_EMPTY_MAGNIFICATION),
-    plan(4, ANGLE, 1, Unit::None, 7, VisualReadout::FACT_FIELD_FROM_APPARENT),
-    plan(3, 3, 1, Unit::Millimetre, 8, VisualReadout::FACT_WIDE_EXIT_PUPIL),
-    plan(5, 6, 2, Unit::Second, 8, VisualReadout::FACT_SEEING_LIMITED),
-    plan(10, MAGNITUDE, 1, Unit::Magnitude, 8, 0),
-    plan(11, Q16_PERCENT, 0, Unit::Percent, 5, 0),
-    plan(1, Q16_RATIO, 1, Unit::FocalRatio, 7, 0),
-    plan(0, 3, 0, Unit::Millimetre, 7, 0),
-    plan(7, Q16_RATIO, 1, Unit::Times, 6, 0),
-    plan(8, Q16_RATIO, 1, Unit::Times, 6, 0),
-    plan(6, 6, 2, Unit::Second, 8, 0),
-    plan(9, 3, 0, Unit::Millimetre, 6, 0),
-    fact(3, 7, VisualReadout::FACT_WIDE_EXIT_PUPIL),
-    fact(2, 8, VisualReadout::FACT_EMPTY_MAGNIFICATION),
-    fact(4, 4, VisualReadout::FACT_FIELD_FROM_APPARENT),
-    fact(NEVER, NEVER, VisualReadout::FACT_SEEING_LIMITED),
-];
+stored! {
+    static VISUAL: [Plan; VisualRow::ALL.len()] = [
+        plan(2, Q16_RATIO, 1, Unit::Times, 6, VisualReadout::FACT_EMPTY_MAGNIFICATION),
+        plan(4, ANGLE, 1, Unit::None, 7, VisualReadout::FACT_FIELD_FROM_APPARENT),
+        plan(3, 3, 1, Unit::Millimetre, 8, VisualReadout::FACT_WIDE_EXIT_PUPIL),
+        plan(5, 6, 2, Unit::Second, 8, VisualReadout::FACT_SEEING_LIMITED),
+        plan(10, MAGNITUDE, 1, Unit::Magnitude, 8, 0),
+        plan(11, Q16_PERCENT, 0, Unit::Percent, 5, 0),
+        plan(1, Q16_RATIO, 1, Unit::FocalRatio, 7, 0),
+        plan(0, 3, 0, Unit::Millimetre, 7, 0),
+        plan(7, Q16_RATIO, 1, Unit::Times, 6, 0),
+        plan(8, Q16_RATIO, 1, Unit::Times, 6, 0),
+        plan(6, 6, 2, Unit::Second, 8, 0),
+        plan(9, 3, 0, Unit::Millimetre, 6, 0),
+        fact(3, 7, VisualReadout::FACT_WIDE_EXIT_PUPIL),
+        fact(2, 8, VisualReadout::FACT_EMPTY_MAGNIFICATION),
+        fact(4, 4, VisualReadout::FACT_FIELD_FROM_APPARENT),
+        fact(NEVER, NEVER, VisualReadout::FACT_SEEING_LIMITED),
+    ];
+}
 
 const SAMPLING: u32 = CameraReadout::FACT_COARSE_SAMPLING | CameraReadout::FACT_FINE_SAMPLING;
 
-static CAMERA: [Plan; CameraRow::ALL.len()] = [
-    plan(3, ANGLE, 1, Unit::None, 7, 0),
-    plan(4, ANGLE, 1, Unit::None, 7, 0),
-    plan(5, 6, 2, Unit::SecondPerPixel, 8, SAMPLING),
-    plan(7, 6, 2, Unit::Second, 8, 0),
-    plan(8, Q16_RATIO, 1, Unit::Pixel, 8, SAMPLING),
-    plan(1, Q16_RATIO, 1, Unit::FocalRatio, 7, 0),
-    plan(2, Q16_RATIO, 1, Unit::None, 7, 0),
-    plan(0, 3, 0, Unit::Millimetre, 7, 0),
-    plan(6, 3, 1, Unit::SecondPerMillimetre, 8, 0),
-    fact(8, 8, CameraReadout::FACT_COARSE_SAMPLING),
-    fact(8, 8, CameraReadout::FACT_FINE_SAMPLING),
-];
+stored! {
+    static CAMERA: [Plan; CameraRow::ALL.len()] = [
+        plan(3, ANGLE, 1, Unit::None, 7, 0),
+        plan(4, ANGLE, 1, Unit::None, 7, 0),
+        plan(5, 6, 2, Unit::SecondPerPixel, 8, SAMPLING),
+        plan(7, 6, 2, Unit::Second, 8, 0),
+        plan(8, Q16_RATIO, 1, Unit::Pixel, 8, SAMPLING),
+        plan(1, Q16_RATIO, 1, Unit::FocalRatio, 7, 0),
+        plan(2, Q16_RATIO, 1, Unit::None, 7, 0),
+        plan(0, 3, 0, Unit::Millimetre, 7, 0),
+        plan(6, 3, 1, Unit::SecondPerMillimetre, 8, 0),
+        fact(8, 8, CameraReadout::FACT_COARSE_SAMPLING),
+        fact(8, 8, CameraReadout::FACT_FINE_SAMPLING),
+    ];
+}
 
 /// A row of the visual pages.
 pub fn visual_row(readout: &VisualReadout, row: VisualRow) -> Row {
-    let plan = &VISUAL[row as usize];
+    let plan = VISUAL.at(row as usize);
     let member = match plan.member {
         0 => readout.focal_length_um,
         1 => readout.focal_ratio_q16,
@@ -183,7 +188,7 @@ pub fn visual_row(readout: &VisualReadout, row: VisualRow) -> Row {
 
 /// A row of the camera pages.
 pub fn camera_row(readout: &CameraReadout, row: CameraRow) -> Row {
-    let plan = &CAMERA[row as usize];
+    let plan = CAMERA.at(row as usize);
     let member = match plan.member {
         0 => readout.focal_length_um,
         1 => readout.focal_ratio_q16,

@@ -1,5 +1,11 @@
 //! How numbers look: the characters of the display, the decimal mark and the unit texts.
 
+#[cfg(any(test, target_arch = "avr"))]
+use crate::stored::Stored;
+#[cfg(any(test, target_arch = "avr"))]
+use core::mem::{offset_of, size_of};
+use core::ops::Deref;
+
 /// What stands behind a number, or in front of it for [`Unit::FocalRatio`].
 ///
 /// The number of a unit is its place in [`TextStyle::units`], counted from 1; 0 is no unit. Numbers are frozen.
@@ -202,9 +208,33 @@ impl TextStyle {
     pub fn unit(&self, unit: Unit) -> &[u8] {
         self.text(unit as u8)
     }
+}
+
+/// What the writers ask of a style, wherever it is.
+pub(crate) trait Look {
+    type Text<'a>: Deref<Target = [u8]>
+    where
+        Self: 'a;
 
     /// The text with a number: of a unit, or one of those behind.
-    pub(super) fn text(&self, number: u8) -> &[u8] {
+    fn text(&self, number: u8) -> Self::Text<'_>;
+    fn decimal_mark(&self) -> u8;
+    fn fact_mark(&self) -> u8;
+    fn is_utf8(&self) -> bool;
+
+    /// How many of these bytes do not begin a character.
+    fn continued(&self, text: &[u8]) -> usize {
+        if !self.is_utf8() {
+            return 0;
+        }
+        text.iter().filter(|&&byte| !begins_character(byte)).count()
+    }
+}
+
+impl Look for TextStyle {
+    type Text<'a> = &'a [u8];
+
+    fn text(&self, number: u8) -> &[u8] {
         let text = match self.units.get(usize::from(number).wrapping_sub(1)) {
             Some(text) => text,
             None => match number {
@@ -221,12 +251,73 @@ impl TextStyle {
         &text[..length]
     }
 
-    /// How many of these bytes do not begin a character.
-    pub(super) fn continued(&self, text: &[u8]) -> usize {
-        if self.utf8 == 0 {
-            return 0;
+    fn decimal_mark(&self) -> u8 {
+        self.decimal_mark
+    }
+
+    fn fact_mark(&self) -> u8 {
+        self.fact_mark
+    }
+
+    fn is_utf8(&self) -> bool {
+        self.utf8 != 0
+    }
+}
+
+/// A style as the C interface gets it.
+#[cfg(all(feature = "capi", not(target_arch = "avr")))]
+pub(crate) type StyleOfC = TextStyle;
+#[cfg(all(feature = "capi", target_arch = "avr"))]
+pub(crate) type StyleOfC = StoredStyle;
+
+/// The bytes of a style in program memory.
+#[cfg(any(test, target_arch = "avr"))]
+pub(crate) type StoredStyle = Stored<[u8; size_of::<TextStyle>()]>;
+
+#[cfg(any(test, target_arch = "avr"))]
+impl Look for StoredStyle {
+    type Text<'a> = CopiedText;
+
+    fn text(&self, number: u8) -> CopiedText {
+        let mut copied = CopiedText { bytes: [0; 8], length: 0 };
+        if (1..=NO).contains(&number) {
+            let first = 8 * (usize::from(number) - 1);
+            for (place, byte) in copied.bytes.iter_mut().zip(self.iter().skip(first)) {
+                if byte == 0 {
+                    break;
+                }
+                *place = byte;
+                copied.length += 1;
+            }
         }
-        text.iter().filter(|&&byte| !begins_character(byte)).count()
+        copied
+    }
+
+    fn decimal_mark(&self) -> u8 {
+        self.at(offset_of!(TextStyle, decimal_mark))
+    }
+
+    fn fact_mark(&self) -> u8 {
+        self.at(offset_of!(TextStyle, fact_mark))
+    }
+
+    fn is_utf8(&self) -> bool {
+        self.at(offset_of!(TextStyle, utf8)) != 0
+    }
+}
+
+#[cfg(any(test, target_arch = "avr"))]
+pub(crate) struct CopiedText {
+    bytes: [u8; 8],
+    length: u8,
+}
+
+#[cfg(any(test, target_arch = "avr"))]
+impl Deref for CopiedText {
+    type Target = [u8];
+
+    fn deref(&self) -> &[u8] {
+        self.bytes.get(..self.length.into()).unwrap_or(&[])
     }
 }
 
@@ -255,4 +346,28 @@ const fn joined(mut first: &[u8], mut second: &[u8]) -> [u8; 8] {
         at += 1;
     }
     text
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    #[test]
+    fn a_stored_style_looks_the_same() {
+        let mut style = TextStyle::UTF8;
+        style.fact_mark = b'*';
+        style.units[3] = *b"12345678";
+        let mut bytes = [0; 195];
+        let texts = style.units.iter().chain([&style.dash, &style.yes, &style.no]).flatten();
+        let marks = [style.decimal_mark, style.fact_mark, style.utf8];
+        bytes.iter_mut().zip(texts.copied().chain(marks)).for_each(|(place, byte)| *place = byte);
+        let stored = StoredStyle::new(bytes);
+        for number in 0..=u8::MAX {
+            assert_eq!(*stored.text(number), *Look::text(&style, number), "{number}");
+        }
+        assert_eq!(
+            (stored.decimal_mark(), stored.fact_mark(), stored.is_utf8()),
+            (style.decimal_mark(), style.fact_mark(), style.is_utf8())
+        );
+    }
 }

@@ -1,7 +1,7 @@
 //! A value as characters: measured first, then written from the right.
 
 use super::digits::{count, split_ten};
-use super::style::{TextStyle, Unit};
+use super::style::{Look, TextStyle, Unit};
 use super::value::Value;
 use crate::status::{Cause, Error};
 use core::sync::atomic::{Ordering, compiler_fence};
@@ -25,6 +25,11 @@ impl Value {
     /// [`Cause::OutOfRange`]; `out` is then as it was, and so it always is behind the length told.
     #[inline]
     pub fn write(self, style: &TextStyle, width: u8, out: &mut [u8]) -> Result<usize, Error> {
+        self.write_as(style, width, out)
+    }
+
+    #[inline]
+    pub(crate) fn write_as(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<usize, Error> {
         let written = self.write_right(style, width, out)?;
         blank(out.iter_mut().take(written.blanks.into()));
         Ok(usize::from(written.blanks) + usize::from(written.bytes))
@@ -32,10 +37,10 @@ impl Value {
 
     /// The same without the blanks.
     #[inline(never)]
-    pub(super) fn write_right(self, style: &TextStyle, width: u8, out: &mut [u8]) -> Result<Written, Error> {
+    pub(super) fn write_right(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<Written, Error> {
         let form = self.form;
         let text = style.text(form.text());
-        let Size { digits, bytes, characters } = self.measure_with(text, style)?;
+        let Size { digits, bytes, characters } = self.measure_with(&text, style)?;
         let width = if width == 0 { characters } else { width.into() };
         let Some(blanks) = width.checked_sub(characters) else { return Err(NO_ROOM) };
         let Some(out) = out.get_mut(..blanks + bytes) else { return Err(NO_ROOM) };
@@ -66,7 +71,7 @@ impl Value {
             left -= run;
             if run > 0 && left > 0 {
                 if mark {
-                    put(style.decimal_mark);
+                    put(style.decimal_mark());
                     mark = false;
                 } else {
                     sign -= 1;
@@ -95,12 +100,12 @@ pub(super) struct Size {
 
 impl Value {
     #[inline(never)]
-    pub(super) fn measure(self, style: &TextStyle) -> Result<Size, Error> {
-        self.measure_with(style.text(self.form.text()), style)
+    pub(super) fn measure(self, style: &impl Look) -> Result<Size, Error> {
+        self.measure_with(&style.text(self.form.text()), style)
     }
 
     #[inline(always)]
-    fn measure_with(self, text: &[u8], style: &TextStyle) -> Result<Size, Error> {
+    fn measure_with(self, text: &[u8], style: &impl Look) -> Result<Size, Error> {
         let form = self.form;
         if let Some(position) = form.refused() {
             return Err(Error::new(Cause::OutOfRange, position));
@@ -114,15 +119,15 @@ impl Value {
                 bytes += style.text(form.text().wrapping_sub(1 + back as u8)).len();
             }
         }
-        let continued = if style.utf8 == 0 { 0 } else { self.continued(style) };
+        let continued = if style.is_utf8() { self.continued(style) } else { 0 };
         Ok(Size { digits, bytes, characters: bytes - continued })
     }
 
     /// Bytes that do not begin a character.
     #[inline(never)]
-    fn continued(self, style: &TextStyle) -> usize {
+    fn continued(self, style: &impl Look) -> usize {
         let last = self.form.text();
-        (0..=self.form.groups() as u8).map(|back| style.continued(style.text(last.wrapping_sub(back)))).sum()
+        (0..=self.form.groups() as u8).map(|back| style.continued(&style.text(last.wrapping_sub(back)))).sum()
     }
 }
 

@@ -7,6 +7,7 @@ use crate::math::multiply::{high_64, wide};
 use crate::math::root;
 use crate::optics::allowed;
 use crate::status::Error;
+use crate::stored::stored;
 use crate::units::Q16;
 
 /// Contrast that the optics keep at a frequency: the modulation transfer of an aperture with a central obstruction, in
@@ -89,23 +90,25 @@ fn square_root(x: u64) -> u64 {
 /// A whole disc in the units of [`segment`].
 const WHOLE_DISC: u64 = 2 << 60;
 
-/// (2 / pi) (t - sin t cos t) / h^(3/2), h = 1 - cos t from 0 to 1, by Chebyshev interpolation: the coefficients of
-/// T0, -T1, -T2 … in 2 h - 1, in steps of 2^-62. Within 2^-42.
-static SEGMENT: [u64; 13] = [
-    5087065888185110905,
-    461293935854986349,
-    13166517523058583,
-    839972618312605,
-    71459824060877,
-    7101049272933,
-    778564298153,
-    91380658479,
-    11276053083,
-    1445856921,
-    191106547,
-    25879310,
-    3507659,
-];
+stored! {
+    /// (2 / pi) (t - sin t cos t) / h^(3/2), h = 1 - cos t from 0 to 1, by Chebyshev interpolation: the coefficients of
+    /// T0, -T1, -T2 … in 2 h - 1, in steps of 2^-62. Within 2^-42.
+    static SEGMENT: [u64; 13] = [
+        5087065888185110905,
+        461293935854986349,
+        13166517523058583,
+        839972618312605,
+        71459824060877,
+        7101049272933,
+        778564298153,
+        91380658479,
+        11276053083,
+        1445856921,
+        191106547,
+        25879310,
+        3507659,
+    ];
+}
 
 /// (2 / pi) (t - sin t cos t), twice a segment's area in quarters of the unit circle, from its height h = 1 - cos t, 0
 /// to 1 in steps of 2^-48; in steps of 2^-60, within 2^-40.
@@ -114,11 +117,11 @@ fn segment(height: u64) -> u64 {
     let h = height << 15;
     // Clenshaw's sum from the last term; each is several times the next, so nothing falls below 0.
     let (mut sum, mut after) = (0u64, 0u64);
-    for &term in SEGMENT[1..].iter().rev() {
+    for term in SEGMENT.iter().skip(1).rev() {
         let next = term + (high_64(h, sum) << 3) - 2 * sum - after;
         (after, sum) = (sum, next);
     }
-    let series = SEGMENT[0] + sum + after - (high_64(h, sum) << 2);
+    let series = SEGMENT.at(0) + sum + after - (high_64(h, sum) << 2);
     high_64(high_64(h, square_root(height)), series)
 }
 
@@ -220,7 +223,7 @@ mod tests {
 
     #[test]
     fn segment_series_is_the_interpolation() {
-        let n = SEGMENT.len();
+        let n = SEGMENT.iter().count();
         let angle = |k: usize| PI * (k as f64 + 0.5) / n as f64;
         let at_node: Vec<f64> = (0..n)
             .map(|k| {
@@ -228,7 +231,7 @@ mod tests {
                 exact(h) / (h * h.sqrt())
             })
             .collect();
-        for (j, &got) in SEGMENT.iter().enumerate() {
+        for (j, got) in SEGMENT.iter().enumerate() {
             let sum: f64 = (0..n).map(|k| at_node[k] * (j as f64 * angle(k)).cos()).sum();
             let c = sum * if j == 0 { 1.0 } else { -2.0 } / n as f64;
             let got = got as f64 / (1u64 << 62) as f64;
