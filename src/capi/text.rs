@@ -11,6 +11,7 @@ use crate::text::{
 };
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
 use core::ffi::c_char;
+use core::ops::Deref;
 use core::slice;
 
 /// Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on.
@@ -408,7 +409,7 @@ pub unsafe extern "C" fn fieldstop_text_unit(
     unsafe {
         fill(style, [2, 3, 5], text, capacity, length, |style, out| {
             let unit = Unit::from_number(unit).ok_or(Error::new(Cause::OutOfRange, 1))?;
-            put(&style.text(unit as u8), out)
+            put(style.text(unit as u8), out)
         })
     }
 }
@@ -545,7 +546,7 @@ pub unsafe extern "C" fn fieldstop_text_visual_unit(
     unsafe {
         fill(style, [3, 4, 6], text, capacity, length, |style, out| {
             let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
-            put(&style.text(visual_row(&*readout, row).value.unit() as u8), out)
+            put(style.text(visual_row(&*readout, row).value.unit() as u8), out)
         })
     }
 }
@@ -682,7 +683,7 @@ pub unsafe extern "C" fn fieldstop_text_camera_unit(
     unsafe {
         fill(style, [3, 4, 6], text, capacity, length, |style, out| {
             let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
-            put(&style.text(camera_row(&*readout, row).value.unit() as u8), out)
+            put(style.text(camera_row(&*readout, row).value.unit() as u8), out)
         })
     }
 }
@@ -762,9 +763,9 @@ const fn null(position: u8) -> fieldstop_status {
 }
 
 /// Copies a text into `out` and tells its length.
-fn put(text: &[u8], out: &mut [u8]) -> Result<usize, Error> {
+fn put(text: impl Deref<Target = [u8]>, out: &mut [u8]) -> Result<usize, Error> {
     let out = out.get_mut(..text.len()).ok_or(Error::new(Cause::NoRoom, 0))?;
-    for (place, byte) in out.iter_mut().zip(text) {
+    for (place, byte) in out.iter_mut().zip(text.iter()) {
         *place = *byte;
     }
     Ok(text.len())

@@ -10,7 +10,7 @@ const DAY_MS: u32 = 86_400_000;
 
 /// a b / 2^32 to the nearest integer.
 #[inline(always)]
-const fn part_of_turn(a: u32, b: u32) -> u32 {
+fn part_of_turn(a: u32, b: u32) -> u32 {
     ((wide(a, b) + (1 << 31)) >> 32) as u32
 }
 

@@ -7,7 +7,7 @@ use crate::stored::stored;
 
 stored! {
     /// 2^8 / D - 2^8 for the middle of each of 64 intervals of D = d / 2^32, from 1/2 to 1.
-    static RECIPROCAL: [u8; 64] = [
+    pub(super) static RECIPROCAL: [u8; 64] = [
         252, 244, 237, 229, 222, 215, 209, 202, 196, 190, 184, 178, 172, 167, 161, 156, 151, 146, 141, 136, 132,
         127, 123, 118, 114, 110, 106, 102, 98, 94, 91, 87, 84, 80, 77, 73, 70, 67, 64, 61, 58, 55, 52, 49, 46,
         43, 41, 38, 35, 33, 30, 28, 25, 23, 21, 18, 16, 14, 11, 9, 7, 5, 3, 1,
@@ -24,7 +24,7 @@ pub(crate) fn normalise(x: u32) -> (u32, u32) {
 /// Shifts `x` up by an even number of places until one of its top two bits is set; gives the shift too. `x` is not 0.
 #[inline(always)]
 pub(crate) fn normalise_evenly(x: u32) -> (u32, u32) {
-    if cfg!(all(target_arch = "arm", not(target_has_atomic = "32"))) {
+    if cfg!(any(target_arch = "avr", all(target_arch = "arm", not(target_has_atomic = "32")))) {
         let (mut x, mut shift) = (x, 0);
         if x < 1 << 16 {
             x <<= 16;
@@ -49,7 +49,11 @@ pub(crate) fn normalise_evenly(x: u32) -> (u32, u32) {
     }
 }
 
+#[cfg(target_arch = "avr")]
+pub(crate) use super::avr::{divide, shift_up};
+
 /// `n` shifted up by 0 to 31 places.
+#[cfg(not(target_arch = "avr"))]
 #[inline(always)]
 pub(crate) fn shift_up(n: u64, shift: u32) -> u64 {
     let (upper, lower) = ((n >> 32) as u32, n as u32);
@@ -57,6 +61,7 @@ pub(crate) fn shift_up(n: u64, shift: u32) -> u64 {
     (upper as u64) << 32 | (lower << shift) as u64
 }
 
+#[cfg(not(target_arch = "avr"))]
 /// 2^64 / d - 2^32, at most 11 too low and never too high: checked for every normalised `d`.
 #[inline(always)]
 fn reciprocal(d: u32) -> u32 {
@@ -71,6 +76,7 @@ fn reciprocal(d: u32) -> u32 {
 }
 
 /// Quotient and remainder by a normalised divisor. The upper half of `n` is below `d`.
+#[cfg(not(target_arch = "avr"))]
 #[inline(always)]
 fn divide_normalised(n: u64, d: u32) -> (u32, u32) {
     let upper = (n >> 32) as u32;
@@ -84,7 +90,11 @@ fn divide_normalised(n: u64, d: u32) -> (u32, u32) {
     (quotient, rest as u32)
 }
 
+#[cfg(target_arch = "avr")]
+use divide as divide_normalised;
+
 /// Quotient and remainder. `d` is not 0 and above the upper half of `n`.
+#[cfg(not(target_arch = "avr"))]
 #[inline(never)]
 pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
     let (d, shift) = normalise(d);
@@ -113,6 +123,11 @@ pub(crate) fn scaled(a: u32, b: u32, d: u32) -> Result<u32, Error> {
 pub(crate) fn with_fraction(n: u64, fraction: u32, d: u32) -> Result<u32, Error> {
     if (n >> 32) as u32 >= d {
         return Err(Error::OVERFLOW);
+    }
+    if cfg!(target_arch = "avr") {
+        let (quotient, rest) = divide(n, d);
+        let half = if d >> 31 == 0 { fraction >> 31 } else { 0 };
+        return up_if(quotient, rest + half >= d - rest);
     }
     let (d, shift) = normalise(d);
     let n = shift_up(n, shift) | ((fraction >> 1) >> (31 - shift)) as u64;

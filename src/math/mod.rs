@@ -5,6 +5,8 @@
 //! every input are `cargo test --release --lib -- --ignored`.
 
 pub(crate) mod arc;
+#[cfg(target_arch = "avr")]
+mod avr;
 #[cfg(test)]
 pub(crate) mod chebyshev;
 pub mod convert;

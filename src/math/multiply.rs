@@ -1,10 +1,14 @@
 //! 32 by 32 to 64 bits.
 
+#[cfg(target_arch = "avr")]
+pub(crate) use super::avr::wide;
+
 /// The whole product.
 ///
 /// On Cortex-M0 the three-step sum below is 18 instructions; `a as u64 * b as u64` calls a routine of 50.
+#[cfg(not(target_arch = "avr"))]
 #[inline(always)]
-pub(crate) const fn wide(a: u32, b: u32) -> u64 {
+pub(crate) fn wide(a: u32, b: u32) -> u64 {
     if cfg!(all(target_arch = "arm", not(target_has_atomic = "32"))) {
         let (a1, a0) = (a >> 16, a & 0xffff);
         let (b1, b0) = (b >> 16, b & 0xffff);
@@ -17,19 +21,19 @@ pub(crate) const fn wide(a: u32, b: u32) -> u64 {
 
 /// The upper 32 bits of the product.
 #[inline(always)]
-pub(crate) const fn high(a: u32, b: u32) -> u32 {
+pub(crate) fn high(a: u32, b: u32) -> u32 {
     (wide(a, b) >> 32) as u32
 }
 
 /// The upper half of a signed by unsigned product.
 #[inline(always)]
-pub(crate) const fn high_signed(a: i32, b: u32) -> i32 {
+pub(crate) fn high_signed(a: i32, b: u32) -> i32 {
     high(a as u32, b).wrapping_sub((a >> 31) as u32 & b) as i32
 }
 
 /// The upper 64 bits of the product, at most 2 too low.
 #[inline(never)]
-pub(crate) const fn high_64(a: u64, b: u64) -> u64 {
+pub(crate) fn high_64(a: u64, b: u64) -> u64 {
     let (a1, a0) = ((a >> 32) as u32, a as u32);
     let (b1, b0) = ((b >> 32) as u32, b as u32);
     wide(a1, b1) + (wide(a1, b0) >> 32) + (wide(a0, b1) >> 32)

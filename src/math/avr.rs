@@ -1,0 +1,304 @@
+//! Kernels in AVR's own instructions: the compiler makes calls and loops of bits out of 32 and 64 bits.
+#![allow(unsafe_code)]
+
+use super::divide::RECIPROCAL;
+use core::arch::asm;
+
+#[inline(always)]
+fn halves(x: u32) -> (u16, u16) {
+    ((x >> 16) as u16, x as u16)
+}
+
+#[inline(always)]
+fn joined(upper: u16, lower: u16) -> u32 {
+    (upper as u32) << 16 | lower as u32
+}
+
+/// a b. Products that stand side by side are added in one go, for `mul` spoils the carry.
+#[inline(never)]
+pub(crate) fn wide(a: u32, b: u32) -> u64 {
+    let ((a2, a0), (b2, b0)) = (halves(a), halves(b));
+    let (p0, p2, p4, p6): (u16, u16, u16, u16);
+    // SAFETY: only the registers named change, and r1 is 0 again.
+    unsafe {
+        asm!(
+            "mul {a0:l}, {b0:l}",
+            "movw {p0}, r0",
+            "mul {a0:h}, {b0:h}",
+            "movw {p2}, r0",
+            "mul {a2:l}, {b2:l}",
+            "movw {p4}, r0",
+            "mul {a2:h}, {b2:h}",
+            "movw {p6}, r0",
+            "clr {zero}",
+            // One byte up: a0 b1, a1 b2, a2 b3, and with a and b exchanged.
+            "mul {a0:l}, {b0:h}",
+            "movw {t0}, r0",
+            "mul {a0:h}, {b2:l}",
+            "movw {t2}, r0",
+            "mul {a2:l}, {b2:h}",
+            "add {p0:h}, {t0:l}",
+            "adc {p2:l}, {t0:h}",
+            "adc {p2:h}, {t2:l}",
+            "adc {p4:l}, {t2:h}",
+            "adc {p4:h}, r0",
+            "adc {p6:l}, r1",
+            "adc {p6:h}, {zero}",
+            "mul {b0:l}, {a0:h}",
+            "movw {t0}, r0",
+            "mul {b0:h}, {a2:l}",
+            "movw {t2}, r0",
+            "mul {b2:l}, {a2:h}",
+            "add {p0:h}, {t0:l}",
+            "adc {p2:l}, {t0:h}",
+            "adc {p2:h}, {t2:l}",
+            "adc {p4:l}, {t2:h}",
+            "adc {p4:h}, r0",
+            "adc {p6:l}, r1",
+            "adc {p6:h}, {zero}",
+            // Two bytes up.
+            "mul {a0:l}, {b2:l}",
+            "movw {t0}, r0",
+            "mul {a0:h}, {b2:h}",
+            "add {p2:l}, {t0:l}",
+            "adc {p2:h}, {t0:h}",
+            "adc {p4:l}, r0",
+            "adc {p4:h}, r1",
+            "adc {p6:l}, {zero}",
+            "adc {p6:h}, {zero}",
+            "mul {b0:l}, {a2:l}",
+            "movw {t0}, r0",
+            "mul {b0:h}, {a2:h}",
+            "add {p2:l}, {t0:l}",
+            "adc {p2:h}, {t0:h}",
+            "adc {p4:l}, r0",
+            "adc {p4:h}, r1",
+            "adc {p6:l}, {zero}",
+            "adc {p6:h}, {zero}",
+            // Three bytes up.
+            "mul {a0:l}, {b2:h}",
+            "add {p2:h}, r0",
+            "adc {p4:l}, r1",
+            "adc {p4:h}, {zero}",
+            "adc {p6:l}, {zero}",
+            "adc {p6:h}, {zero}",
+            "mul {b0:l}, {a2:h}",
+            "add {p2:h}, r0",
+            "adc {p4:l}, r1",
+            "adc {p4:h}, {zero}",
+            "adc {p6:l}, {zero}",
+            "adc {p6:h}, {zero}",
+            "clr r1",
+            a0 = in(reg_pair) a0,
+            a2 = in(reg_pair) a2,
+            b0 = in(reg_pair) b0,
+            b2 = in(reg_pair) b2,
+            p0 = out(reg_pair) p0,
+            p2 = out(reg_pair) p2,
+            p4 = out(reg_pair) p4,
+            p6 = out(reg_pair) p6,
+            t0 = out(reg_pair) _,
+            t2 = out(reg_pair) _,
+            zero = out(reg) _,
+            options(pure, nomem, nostack)
+        );
+    }
+    (joined(p6, p4) as u64) << 32 | joined(p2, p0) as u64
+}
+
+/// Quotient and remainder. `d` is not 0 and above the upper half of `n`.
+#[inline(never)]
+pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
+    let ((n6, n4), (n2, n0)) = (halves((n >> 32) as u32), halves(n as u32));
+    let (d2, d0) = halves(d);
+    let (mut n6, mut n4, mut n2, mut n0, mut d2, mut d0) = (n6, n4, n2, n0, d2, d0);
+    let mut shift: u8;
+    // SAFETY: only the registers named change.
+    unsafe {
+        // Both are shifted up until the top bit of d is set.
+        asm!(
+            "clr {shift}",
+            "2: tst {d2:h}",
+            "brne 3f",
+            "mov {d2:h}, {d2:l}",
+            "mov {d2:l}, {d0:h}",
+            "mov {d0:h}, {d0:l}",
+            "clr {d0:l}",
+            "mov {n6:h}, {n6:l}",
+            "mov {n6:l}, {n4:h}",
+            "mov {n4:h}, {n4:l}",
+            "mov {n4:l}, {n2:h}",
+            "mov {n2:h}, {n2:l}",
+            "mov {n2:l}, {n0:h}",
+            "mov {n0:h}, {n0:l}",
+            "clr {n0:l}",
+            "subi {shift}, -8",
+            "rjmp 2b",
+            "3: brmi 5f",
+            "4: inc {shift}",
+            "lsl {n0:l}",
+            "rol {n0:h}",
+            "rol {n2:l}",
+            "rol {n2:h}",
+            "rol {n4:l}",
+            "rol {n4:h}",
+            "rol {n6:l}",
+            "rol {n6:h}",
+            "lsl {d0:l}",
+            "rol {d0:h}",
+            "rol {d2:l}",
+            "rol {d2:h}",
+            "brpl 4b",
+            "5:",
+            shift = out(reg_upper) shift,
+            d0 = inout(reg_pair) d0,
+            d2 = inout(reg_pair) d2,
+            n0 = inout(reg_pair) n0,
+            n2 = inout(reg_pair) n2,
+            n4 = inout(reg_pair) n4,
+            n6 = inout(reg_pair) n6,
+            options(pure, nomem, nostack)
+        );
+    }
+    let reciprocal = RECIPROCAL.at(usize::from((d2 >> 9) as u8 & 63));
+    // SAFETY: only the registers named change, and r1 is 0 again.
+    unsafe {
+        // A byte of the quotient each time: the rest is in n7 to n4, and the quotient follows the lower half of n.
+        asm!(
+            "clr {zero}",
+            "ldi {count}, 4",
+            "2: mul {n6:l}, {reciprocal}",
+            "mov {q}, r1",
+            "mul {n6:h}, {reciprocal}",
+            "add r0, {q}",
+            "adc r1, {zero}",
+            "add r0, {n6:l}",
+            "adc r1, {n6:h}",
+            "mov {q}, r1",
+            "brcc 3f",
+            "ldi {q}, 255",
+            "3: mul {q}, {d0:l}",
+            "movw {t0}, r0",
+            "mul {q}, {d2:l}",
+            "sub {n2:h}, {t0:l}",
+            "sbc {n4:l}, {t0:h}",
+            "sbc {n4:h}, r0",
+            "sbc {n6:l}, r1",
+            "sbc {n6:h}, {zero}",
+            "mul {q}, {d0:h}",
+            "sub {n4:l}, r0",
+            "sbc {n4:h}, r1",
+            "sbc {n6:l}, {zero}",
+            "sbc {n6:h}, {zero}",
+            "mul {q}, {d2:h}",
+            "sub {n6:l}, r0",
+            "sbc {n6:h}, r1",
+            "brmi 6f",
+            "4: tst {n6:h}",
+            "brne 5f",
+            "cp {n2:h}, {d0:l}",
+            "cpc {n4:l}, {d0:h}",
+            "cpc {n4:h}, {d2:l}",
+            "cpc {n6:l}, {d2:h}",
+            "brlo 7f",
+            "5: inc {q}",
+            "sub {n2:h}, {d0:l}",
+            "sbc {n4:l}, {d0:h}",
+            "sbc {n4:h}, {d2:l}",
+            "sbc {n6:l}, {d2:h}",
+            "sbc {n6:h}, {zero}",
+            "rjmp 4b",
+            "6: dec {q}",
+            "add {n2:h}, {d0:l}",
+            "adc {n4:l}, {d0:h}",
+            "adc {n4:h}, {d2:l}",
+            "adc {n6:l}, {d2:h}",
+            "adc {n6:h}, {zero}",
+            "brmi 6b",
+            "7: mov {n6:h}, {n6:l}",
+            "mov {n6:l}, {n4:h}",
+            "mov {n4:h}, {n4:l}",
+            "mov {n4:l}, {n2:h}",
+            "mov {n2:h}, {n2:l}",
+            "mov {n2:l}, {n0:h}",
+            "mov {n0:h}, {n0:l}",
+            "mov {n0:l}, {q}",
+            "dec {count}",
+            "brne 2b",
+            "clr r1",
+            // The rest goes back down.
+            "rjmp 9f",
+            "8: mov {n4:l}, {n4:h}",
+            "mov {n4:h}, {n6:l}",
+            "mov {n6:l}, {n6:h}",
+            "clr {n6:h}",
+            "9: subi {shift}, 8",
+            "brsh 8b",
+            "subi {shift}, -8",
+            "breq 4f",
+            "2: lsr {n6:h}",
+            "ror {n6:l}",
+            "ror {n4:h}",
+            "ror {n4:l}",
+            "dec {shift}",
+            "brne 2b",
+            "4:",
+            reciprocal = in(reg) reciprocal,
+            d0 = in(reg_pair) d0,
+            d2 = in(reg_pair) d2,
+            n0 = inout(reg_pair) n0,
+            n2 = inout(reg_pair) n2,
+            n4 = inout(reg_pair) n4,
+            n6 = inout(reg_pair) n6,
+            t0 = out(reg_pair) _,
+            q = out(reg_upper) _,
+            count = out(reg_upper) _,
+            zero = out(reg) _,
+            shift = inout(reg_upper) shift => _,
+            options(pure, nomem, nostack)
+        );
+    }
+    (joined(n2, n0), joined(n6, n4))
+}
+
+/// `n` shifted up by 0 to 31 places.
+#[inline(never)]
+pub(crate) fn shift_up(n: u64, shift: u32) -> u64 {
+    let ((mut n6, mut n4), (mut n2, mut n0)) = (halves((n >> 32) as u32), halves(n as u32));
+    // SAFETY: only the registers named change.
+    unsafe {
+        asm!(
+            "rjmp 3f",
+            "2: mov {n6:h}, {n6:l}",
+            "mov {n6:l}, {n4:h}",
+            "mov {n4:h}, {n4:l}",
+            "mov {n4:l}, {n2:h}",
+            "mov {n2:h}, {n2:l}",
+            "mov {n2:l}, {n0:h}",
+            "mov {n0:h}, {n0:l}",
+            "clr {n0:l}",
+            "3: subi {shift}, 8",
+            "brsh 2b",
+            "subi {shift}, -8",
+            "breq 5f",
+            "4: lsl {n0:l}",
+            "rol {n0:h}",
+            "rol {n2:l}",
+            "rol {n2:h}",
+            "rol {n4:l}",
+            "rol {n4:h}",
+            "rol {n6:l}",
+            "rol {n6:h}",
+            "dec {shift}",
+            "brne 4b",
+            "5:",
+            shift = inout(reg_upper) shift as u8 => _,
+            n0 = inout(reg_pair) n0,
+            n2 = inout(reg_pair) n2,
+            n4 = inout(reg_pair) n4,
+            n6 = inout(reg_pair) n6,
+            options(pure, nomem, nostack)
+        );
+    }
+    (joined(n6, n4) as u64) << 32 | joined(n2, n0) as u64
+}
