@@ -50,7 +50,7 @@ impl<T: Copy> Stored<T> {
     }
 
     /// A copy.
-    #[cfg(feature = "capi")]
+    #[cfg(any(test, feature = "capi"))]
     #[inline(always)]
     pub(crate) fn get(&self) -> T {
         copy(&self.0)

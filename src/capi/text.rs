@@ -11,7 +11,6 @@ use crate::text::{
 };
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
 use core::ffi::c_char;
-use core::ops::Deref;
 use core::slice;
 
 /// Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on.
@@ -763,12 +762,13 @@ const fn null(position: u8) -> fieldstop_status {
 }
 
 /// Copies a text into `out` and tells its length.
-fn put(text: impl Deref<Target = [u8]>, out: &mut [u8]) -> Result<usize, Error> {
-    let out = out.get_mut(..text.len()).ok_or(Error::new(Cause::NoRoom, 0))?;
-    for (place, byte) in out.iter_mut().zip(text.iter()) {
-        *place = *byte;
+fn put(text: impl ExactSizeIterator<Item = u8>, out: &mut [u8]) -> Result<usize, Error> {
+    let length = text.len();
+    let out = out.get_mut(..length).ok_or(Error::new(Cause::NoRoom, 0))?;
+    for (place, byte) in out.iter_mut().zip(text) {
+        *place = byte;
     }
-    Ok(text.len())
+    Ok(length)
 }
 
 /// The end of the functions that write one value: width, text, capacity and length follow the style.

@@ -302,3 +302,65 @@ pub(crate) fn shift_up(n: u64, shift: u32) -> u64 {
     }
     (joined(n6, n4) as u64) << 32 | joined(n2, n0) as u64
 }
+
+/// `x` times the fraction whose 32 bits are four times `byte`, over 8: at most 1 too low.
+#[inline(never)]
+pub(crate) fn times_repeated(x: u32, byte: u8) -> u32 {
+    let (x2, x0) = halves(x);
+    let (s0, s2): (u16, u16);
+    // SAFETY: only the registers named change, and r1 is 0 again.
+    unsafe {
+        // The product with one byte, then the sum of what its four shifts have above 32 bits.
+        asm!(
+            "clr {zero}",
+            "clr {p4}",
+            "mul {x0:l}, {byte}",
+            "mov {p1}, r1",
+            "mul {x2:l}, {byte}",
+            "movw {p2}, r0",
+            "mul {x0:h}, {byte}",
+            "add {p1}, r0",
+            "adc {p2:l}, r1",
+            "adc {p2:h}, {zero}",
+            "mul {x2:h}, {byte}",
+            "add {p2:h}, r0",
+            "adc {p4}, r1",
+            "mov {s0:l}, {p1}",
+            "mov {s0:h}, {p2:l}",
+            "mov {s2:l}, {p2:h}",
+            "mov {s2:h}, {p4}",
+            "add {s0:l}, {p2:l}",
+            "adc {s0:h}, {p2:h}",
+            "adc {s2:l}, {p4}",
+            "adc {s2:h}, {zero}",
+            "add {s0:l}, {p2:h}",
+            "adc {s0:h}, {p4}",
+            "adc {s2:l}, {zero}",
+            "adc {s2:h}, {zero}",
+            "add {s0:l}, {p4}",
+            "adc {s0:h}, {zero}",
+            "adc {s2:l}, {zero}",
+            "adc {s2:h}, {zero}",
+            "ldi {count}, 3",
+            "2: lsr {s2:h}",
+            "ror {s2:l}",
+            "ror {s0:h}",
+            "ror {s0:l}",
+            "dec {count}",
+            "brne 2b",
+            "clr r1",
+            x0 = in(reg_pair) x0,
+            x2 = in(reg_pair) x2,
+            byte = in(reg) byte,
+            s0 = out(reg_pair) s0,
+            s2 = out(reg_pair) s2,
+            p1 = out(reg) _,
+            p2 = out(reg_pair) _,
+            p4 = out(reg) _,
+            zero = out(reg) _,
+            count = out(reg_upper) _,
+            options(pure, nomem, nostack)
+        );
+    }
+    joined(s2, s0)
+}

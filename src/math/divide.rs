@@ -1,7 +1,9 @@
 //! The one division that a readout cannot avoid: 64 by 32 bits to a 32-bit quotient with its exact remainder, and the
 //! wider ones built on it.
 
-use super::multiply::{high, wide};
+#[cfg(not(target_arch = "avr"))]
+use super::multiply::high;
+use super::multiply::wide;
 use crate::status::Error;
 use crate::stored::stored;
 

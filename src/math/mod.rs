@@ -6,7 +6,7 @@
 
 pub(crate) mod arc;
 #[cfg(target_arch = "avr")]
-mod avr;
+pub(crate) mod avr;
 #[cfg(test)]
 pub(crate) mod chebyshev;
 pub mod convert;

@@ -2,7 +2,26 @@
 //!
 //! A Cortex-M0 has no division, and neither rustc nor gcc uses a reciprocal there.
 
+#[cfg(target_arch = "avr")]
+use crate::math::avr::times_repeated;
+use crate::stored::stored;
+
+#[cfg(target_arch = "avr")]
+pub(super) fn split_ten(n: u32) -> (u32, u8) {
+    let quotient = times_repeated(n, 0xcc);
+    let rest = (n as u8).wrapping_sub((quotient as u8).wrapping_mul(10));
+    if rest < 10 { (quotient, rest) } else { (quotient + 1, rest - 10) }
+}
+
+#[cfg(target_arch = "avr")]
+pub(super) fn split_sixty(n: u32) -> (u32, u32) {
+    let quotient = times_repeated(n >> 2, 0x88);
+    let rest = (n as u8).wrapping_sub((quotient as u8).wrapping_mul(60));
+    if rest < 60 { (quotient, rest.into()) } else { (quotient + 1, (rest - 60).into()) }
+}
+
 /// `n` divided by ten, and the digit that is left.
+#[cfg(not(target_arch = "avr"))]
 #[inline(always)]
 pub(super) fn split_ten(n: u32) -> (u32, u8) {
     if n < 1 << 16 {
@@ -17,6 +36,7 @@ pub(super) fn split_ten(n: u32) -> (u32, u8) {
 }
 
 /// `n` divided by sixty, and what is left.
+#[cfg(not(target_arch = "avr"))]
 #[inline(always)]
 pub(super) fn split_sixty(n: u32) -> (u32, u32) {
     // The same: 65535 / 60 for each 65536, then a quarter times 2^19 / 15.
@@ -40,19 +60,15 @@ pub(super) fn scale_down(mut n: u32, tens: u8, sixties: u8) -> u32 {
     n + up as u32
 }
 
+stored! {
+    static POWERS: [u32; 9] =
+        [10, 100, 1_000, 10_000, 100_000, 1_000_000, 10_000_000, 100_000_000, 1_000_000_000];
+}
+
 /// Digits of `number`, at least one.
 #[inline(always)]
 pub(super) fn count(number: u32) -> usize {
-    let mut digits = 1;
-    let mut next = 10;
-    while number >= next {
-        digits += 1;
-        if digits == 10 {
-            break;
-        }
-        next *= 10;
-    }
-    digits
+    POWERS.iter().take_while(|&power| number >= power).count() + 1
 }
 
 #[cfg(test)]

@@ -186,7 +186,7 @@ pub(crate) fn change(shown: &[u8], line: &[u8], style: &impl Look) -> Span {
         start -= 1;
     }
     let (shown_rest, rest) = (shown.get(start..).unwrap_or(&[]), line.get(start..).unwrap_or(&[]));
-    let characters = |text: &[u8]| text.len() - style.continued(text);
+    let characters = |text: &[u8]| text.len() - style.continued(text.iter().copied());
     let mut end = rest.len();
     if characters(shown_rest) == characters(rest) {
         let alike = shown_rest.iter().rev().zip(rest.iter().rev()).take_while(|(a, b)| a == b).count();

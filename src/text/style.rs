@@ -2,9 +2,8 @@
 
 #[cfg(any(test, target_arch = "avr"))]
 use crate::stored::Stored;
-#[cfg(any(test, target_arch = "avr"))]
-use core::mem::{offset_of, size_of};
-use core::ops::Deref;
+use core::iter::Copied;
+use core::slice::Iter;
 
 /// What stands behind a number, or in front of it for [`Unit::FocalRatio`].
 ///
@@ -206,35 +205,10 @@ impl TextStyle {
 
     /// The text of a unit, without the zeros that fill it up; empty for [`Unit::None`].
     pub fn unit(&self, unit: Unit) -> &[u8] {
-        self.text(unit as u8)
+        self.slice(unit as u8)
     }
-}
 
-/// What the writers ask of a style, wherever it is.
-pub(crate) trait Look {
-    type Text<'a>: Deref<Target = [u8]>
-    where
-        Self: 'a;
-
-    /// The text with a number: of a unit, or one of those behind.
-    fn text(&self, number: u8) -> Self::Text<'_>;
-    fn decimal_mark(&self) -> u8;
-    fn fact_mark(&self) -> u8;
-    fn is_utf8(&self) -> bool;
-
-    /// How many of these bytes do not begin a character.
-    fn continued(&self, text: &[u8]) -> usize {
-        if !self.is_utf8() {
-            return 0;
-        }
-        text.iter().filter(|&&byte| !begins_character(byte)).count()
-    }
-}
-
-impl Look for TextStyle {
-    type Text<'a> = &'a [u8];
-
-    fn text(&self, number: u8) -> &[u8] {
+    fn slice(&self, number: u8) -> &[u8] {
         let text = match self.units.get(usize::from(number).wrapping_sub(1)) {
             Some(text) => text,
             None => match number {
@@ -249,6 +223,35 @@ impl Look for TextStyle {
             length += 1;
         }
         &text[..length]
+    }
+}
+
+/// What the writers ask of a style, wherever it is.
+pub(crate) trait Look {
+    type Text<'a>: DoubleEndedIterator<Item = u8> + ExactSizeIterator + Clone
+    where
+        Self: 'a;
+
+    /// The text with a number: of a unit, or one of those behind.
+    fn text(&self, number: u8) -> Self::Text<'_>;
+    fn decimal_mark(&self) -> u8;
+    fn fact_mark(&self) -> u8;
+    fn is_utf8(&self) -> bool;
+
+    /// How many of these bytes do not begin a character.
+    fn continued(&self, text: impl Iterator<Item = u8>) -> usize {
+        if !self.is_utf8() {
+            return 0;
+        }
+        text.filter(|&byte| !begins_character(byte)).count()
+    }
+}
+
+impl Look for TextStyle {
+    type Text<'a> = Copied<Iter<'a, u8>>;
+
+    fn text(&self, number: u8) -> Copied<Iter<'_, u8>> {
+        self.slice(number).iter().copied()
     }
 
     fn decimal_mark(&self) -> u8 {
@@ -270,56 +273,84 @@ pub(crate) type StyleOfC = TextStyle;
 #[cfg(all(feature = "capi", target_arch = "avr"))]
 pub(crate) type StyleOfC = StoredStyle;
 
-/// The bytes of a style in program memory.
+/// A style in program memory: laid out as [`TextStyle`] is.
 #[cfg(any(test, target_arch = "avr"))]
-pub(crate) type StoredStyle = Stored<[u8; size_of::<TextStyle>()]>;
+#[repr(C)]
+pub(crate) struct StoredStyle {
+    texts: Stored<[[u8; 8]; NO as usize]>,
+    decimal_mark: Stored<u8>,
+    fact_mark: Stored<u8>,
+    utf8: Stored<u8>,
+}
 
 #[cfg(any(test, target_arch = "avr"))]
 impl Look for StoredStyle {
-    type Text<'a> = CopiedText;
+    type Text<'a> = StoredText<'a>;
 
-    fn text(&self, number: u8) -> CopiedText {
-        let mut copied = CopiedText { bytes: [0; 8], length: 0 };
-        if (1..=NO).contains(&number) {
-            let first = 8 * (usize::from(number) - 1);
-            for (place, byte) in copied.bytes.iter_mut().zip(self.iter().skip(first)) {
-                if byte == 0 {
-                    break;
-                }
-                *place = byte;
-                copied.length += 1;
-            }
+    fn text(&self, number: u8) -> StoredText<'_> {
+        let index = number.wrapping_sub(1);
+        let known = index < NO;
+        let text = self.texts.entry(if known { index.into() } else { 0 });
+        let mut end = 0;
+        while known && end < 8 && text.at(end.into()) != 0 {
+            end += 1;
         }
-        copied
+        StoredText { text, at: 0, end }
     }
 
     fn decimal_mark(&self) -> u8 {
-        self.at(offset_of!(TextStyle, decimal_mark))
+        self.decimal_mark.get()
     }
 
     fn fact_mark(&self) -> u8 {
-        self.at(offset_of!(TextStyle, fact_mark))
+        self.fact_mark.get()
     }
 
     fn is_utf8(&self) -> bool {
-        self.at(offset_of!(TextStyle, utf8)) != 0
+        self.utf8.get() != 0
+    }
+}
+
+/// The bytes of a text that are left.
+#[cfg(any(test, target_arch = "avr"))]
+#[derive(Clone)]
+pub(crate) struct StoredText<'a> {
+    text: &'a Stored<[u8; 8]>,
+    at: u8,
+    end: u8,
+}
+
+#[cfg(any(test, target_arch = "avr"))]
+impl Iterator for StoredText<'_> {
+    type Item = u8;
+
+    fn next(&mut self) -> Option<u8> {
+        if self.at == self.end {
+            return None;
+        }
+        self.at += 1;
+        Some(self.text.at(usize::from(self.at - 1 & 7)))
+    }
+
+    fn size_hint(&self) -> (usize, Option<usize>) {
+        let left = usize::from(self.end - self.at);
+        (left, Some(left))
     }
 }
 
 #[cfg(any(test, target_arch = "avr"))]
-pub(crate) struct CopiedText {
-    bytes: [u8; 8],
-    length: u8,
+impl DoubleEndedIterator for StoredText<'_> {
+    fn next_back(&mut self) -> Option<u8> {
+        if self.at == self.end {
+            return None;
+        }
+        self.end -= 1;
+        Some(self.text.at(usize::from(self.end & 7)))
+    }
 }
 
 #[cfg(any(test, target_arch = "avr"))]
-impl Deref for CopiedText {
-    type Target = [u8];
-
-    fn deref(&self) -> &[u8] {
-        self.bytes.get(..self.length.into()).unwrap_or(&[])
-    }
-}
+impl ExactSizeIterator for StoredText<'_> {}
 
 /// Whether this byte of UTF-8 begins a character, so that counting these counts characters.
 #[inline]
@@ -357,13 +388,19 @@ mod tests {
         let mut style = TextStyle::UTF8;
         style.fact_mark = b'*';
         style.units[3] = *b"12345678";
-        let mut bytes = [0; 195];
-        let texts = style.units.iter().chain([&style.dash, &style.yes, &style.no]).flatten();
-        let marks = [style.decimal_mark, style.fact_mark, style.utf8];
-        bytes.iter_mut().zip(texts.copied().chain(marks)).for_each(|(place, byte)| *place = byte);
-        let stored = StoredStyle::new(bytes);
+        let mut texts = [[0; 8]; NO as usize];
+        let all = style.units.iter().chain([&style.dash, &style.yes, &style.no]);
+        texts.iter_mut().zip(all).for_each(|(place, text)| *place = *text);
+        let stored = StoredStyle {
+            texts: Stored::new(texts),
+            decimal_mark: Stored::new(style.decimal_mark),
+            fact_mark: Stored::new(style.fact_mark),
+            utf8: Stored::new(style.utf8),
+        };
         for number in 0..=u8::MAX {
-            assert_eq!(*stored.text(number), *Look::text(&style, number), "{number}");
+            assert!(stored.text(number).eq(style.text(number)), "{number}");
+            assert!(stored.text(number).rev().eq(style.text(number).rev()), "{number}");
+            assert_eq!(stored.text(number).len(), style.text(number).len(), "{number}");
         }
         assert_eq!(
             (stored.decimal_mark(), stored.fact_mark(), stored.is_utf8()),

@@ -40,7 +40,7 @@ impl Value {
     pub(super) fn write_right(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<Written, Error> {
         let form = self.form;
         let text = style.text(form.text());
-        let Size { digits, bytes, characters } = self.measure_with(&text, style)?;
+        let Size { digits, bytes, characters } = self.measure_with(text.len(), style)?;
         let width = if width == 0 { characters } else { width.into() };
         let Some(blanks) = width.checked_sub(characters) else { return Err(NO_ROOM) };
         let Some(out) = out.get_mut(..blanks + bytes) else { return Err(NO_ROOM) };
@@ -54,7 +54,7 @@ impl Value {
         };
         let in_front = form.text() == Unit::FocalRatio as u8;
         if !in_front {
-            text.iter().rev().for_each(|&byte| put(byte));
+            text.clone().rev().for_each(&mut put);
         }
         let mut number = self.number;
         let mut left = digits;
@@ -76,7 +76,7 @@ impl Value {
                 } else {
                     sign -= 1;
                     groups -= 1;
-                    style.text(sign).iter().rev().for_each(|&byte| put(byte));
+                    style.text(sign).rev().for_each(&mut put);
                 }
             }
             run = if groups > 0 { 2 } else { left };
@@ -85,7 +85,7 @@ impl Value {
             put(b'-');
         }
         if in_front {
-            text.iter().rev().for_each(|&byte| put(byte));
+            text.rev().for_each(&mut put);
         }
         Ok(Written { blanks: blanks as u8, bytes: bytes as u8 })
     }
@@ -101,16 +101,16 @@ pub(super) struct Size {
 impl Value {
     #[inline(never)]
     pub(super) fn measure(self, style: &impl Look) -> Result<Size, Error> {
-        self.measure_with(&style.text(self.form.text()), style)
+        self.measure_with(style.text(self.form.text()).len(), style)
     }
 
     #[inline(always)]
-    fn measure_with(self, text: &[u8], style: &impl Look) -> Result<Size, Error> {
+    fn measure_with(self, length: usize, style: &impl Look) -> Result<Size, Error> {
         let form = self.form;
         if let Some(position) = form.refused() {
             return Err(Error::new(Cause::OutOfRange, position));
         }
-        let mut bytes = text.len();
+        let mut bytes = length;
         let mut digits = 0;
         if !form.is_word() {
             digits = count(self.number).max(form.decimals() + 2 * form.groups() + 1);
@@ -127,7 +127,7 @@ impl Value {
     #[inline(never)]
     fn continued(self, style: &impl Look) -> usize {
         let last = self.form.text();
-        (0..=self.form.groups() as u8).map(|back| style.continued(&style.text(last.wrapping_sub(back)))).sum()
+        (0..=self.form.groups() as u8).map(|back| style.continued(style.text(last.wrapping_sub(back)))).sum()
     }
 }
 
