@@ -107,17 +107,20 @@ pub(crate) fn wide(a: u32, b: u32) -> u64 {
 }
 
 /// Quotient and remainder. `d` is not 0 and above the upper half of `n`.
-#[inline(never)]
+#[inline(always)]
 pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
-    let ((n6, n4), (n2, n0)) = (halves((n >> 32) as u32), halves(n as u32));
-    let (d2, d0) = halves(d);
-    let (mut n6, mut n4, mut n2, mut n0, mut d2, mut d0) = (n6, n4, n2, n0, d2, d0);
-    let mut shift: u8;
+    let quotient = quotient(n, d);
+    (quotient, (n as u32).wrapping_sub(quotient.wrapping_mul(d)))
+}
+
+#[inline(never)]
+fn quotient(n: u64, d: u32) -> u32 {
+    let ((mut n6, mut n4), (mut n2, mut n0)) = (halves((n >> 32) as u32), halves(n as u32));
+    let (mut d2, mut d0) = halves(d);
     // SAFETY: only the registers named change.
     unsafe {
         // Both are shifted up until the top bit of d is set.
         asm!(
-            "clr {shift}",
             "2: tst {d2:h}",
             "brne 3f",
             "mov {d2:h}, {d2:l}",
@@ -132,11 +135,9 @@ pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
             "mov {n2:l}, {n0:h}",
             "mov {n0:h}, {n0:l}",
             "clr {n0:l}",
-            "subi {shift}, -8",
             "rjmp 2b",
             "3: brmi 5f",
-            "4: inc {shift}",
-            "lsl {n0:l}",
+            "4: lsl {n0:l}",
             "rol {n0:h}",
             "rol {n2:l}",
             "rol {n2:h}",
@@ -150,7 +151,6 @@ pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
             "rol {d2:h}",
             "brpl 4b",
             "5:",
-            shift = out(reg_upper) shift,
             d0 = inout(reg_pair) d0,
             d2 = inout(reg_pair) d2,
             n0 = inout(reg_pair) n0,
@@ -163,11 +163,17 @@ pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
     let reciprocal = RECIPROCAL.at(usize::from((d2 >> 9) as u8 & 63));
     // SAFETY: only the registers named change, and r1 is 0 again.
     unsafe {
-        // A byte of the quotient each time: the rest is in n7 to n4, and the quotient follows the lower half of n.
+        // A byte of the quotient each time: the rest is in n7 to n4, and the quotient follows the lower half of n. The
+        // reciprocal tells the byte within 3; a rest under 2^23 gives 0.
         asm!(
             "clr {zero}",
             "ldi {count}, 4",
-            "2: mul {n6:l}, {reciprocal}",
+            "2: clr {q}",
+            "tst {n6:h}",
+            "brne 3f",
+            "tst {n6:l}",
+            "brpl 8f",
+            "3: mul {n6:l}, {reciprocal}",
             "mov {q}, r1",
             "mul {n6:h}, {reciprocal}",
             "add r0, {q}",
@@ -175,47 +181,49 @@ pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
             "add r0, {n6:l}",
             "adc r1, {n6:h}",
             "mov {q}, r1",
-            "brcc 3f",
+            "brcc 4f",
             "ldi {q}, 255",
-            "3: mul {q}, {d0:l}",
-            "movw {t0}, r0",
-            "mul {q}, {d2:l}",
-            "sub {n2:h}, {t0:l}",
-            "sbc {n4:l}, {t0:h}",
-            "sbc {n4:h}, r0",
-            "sbc {n6:l}, r1",
+            "4: mul {q}, {d0:l}",
+            "sub {n2:h}, r0",
+            "sbc {n4:l}, r1",
+            "sbc {n4:h}, {zero}",
+            "sbc {n6:l}, {zero}",
             "sbc {n6:h}, {zero}",
             "mul {q}, {d0:h}",
             "sub {n4:l}, r0",
             "sbc {n4:h}, r1",
             "sbc {n6:l}, {zero}",
             "sbc {n6:h}, {zero}",
+            "mul {q}, {d2:l}",
+            "sub {n4:h}, r0",
+            "sbc {n6:l}, r1",
+            "sbc {n6:h}, {zero}",
             "mul {q}, {d2:h}",
             "sub {n6:l}, r0",
             "sbc {n6:h}, r1",
-            "brmi 6f",
-            "4: tst {n6:h}",
-            "brne 5f",
+            "brmi 7f",
+            "5: tst {n6:h}",
+            "brne 6f",
             "cp {n2:h}, {d0:l}",
             "cpc {n4:l}, {d0:h}",
             "cpc {n4:h}, {d2:l}",
             "cpc {n6:l}, {d2:h}",
-            "brlo 7f",
-            "5: inc {q}",
+            "brlo 8f",
+            "6: inc {q}",
             "sub {n2:h}, {d0:l}",
             "sbc {n4:l}, {d0:h}",
             "sbc {n4:h}, {d2:l}",
             "sbc {n6:l}, {d2:h}",
             "sbc {n6:h}, {zero}",
-            "rjmp 4b",
-            "6: dec {q}",
+            "rjmp 5b",
+            "7: dec {q}",
             "add {n2:h}, {d0:l}",
             "adc {n4:l}, {d0:h}",
             "adc {n4:h}, {d2:l}",
             "adc {n6:l}, {d2:h}",
             "adc {n6:h}, {zero}",
-            "brmi 6b",
-            "7: mov {n6:h}, {n6:l}",
+            "brmi 7b",
+            "8: mov {n6:h}, {n6:l}",
             "mov {n6:l}, {n4:h}",
             "mov {n4:h}, {n4:l}",
             "mov {n4:l}, {n2:h}",
@@ -224,41 +232,23 @@ pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
             "mov {n0:h}, {n0:l}",
             "mov {n0:l}, {q}",
             "dec {count}",
-            "brne 2b",
-            "clr r1",
-            // The rest goes back down.
-            "rjmp 9f",
-            "8: mov {n4:l}, {n4:h}",
-            "mov {n4:h}, {n6:l}",
-            "mov {n6:l}, {n6:h}",
-            "clr {n6:h}",
-            "9: subi {shift}, 8",
-            "brsh 8b",
-            "subi {shift}, -8",
-            "breq 4f",
-            "2: lsr {n6:h}",
-            "ror {n6:l}",
-            "ror {n4:h}",
-            "ror {n4:l}",
-            "dec {shift}",
-            "brne 2b",
-            "4:",
+            "breq 9f",
+            "rjmp 2b",
+            "9: clr r1",
             reciprocal = in(reg) reciprocal,
             d0 = in(reg_pair) d0,
             d2 = in(reg_pair) d2,
             n0 = inout(reg_pair) n0,
             n2 = inout(reg_pair) n2,
-            n4 = inout(reg_pair) n4,
-            n6 = inout(reg_pair) n6,
-            t0 = out(reg_pair) _,
+            n4 = inout(reg_pair) n4 => _,
+            n6 = inout(reg_pair) n6 => _,
             q = out(reg_upper) _,
             count = out(reg_upper) _,
             zero = out(reg) _,
-            shift = inout(reg_upper) shift => _,
             options(pure, nomem, nostack)
         );
     }
-    (joined(n2, n0), joined(n6, n4))
+    joined(n2, n0)
 }
 
 /// `n` shifted up by 0 to 31 places.

@@ -107,7 +107,12 @@ pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
 /// n / d to the nearest integer, halves up. `d` is not 0; n + d / 2 is below 2^64.
 #[inline(always)]
 pub(crate) fn rounded(n: u64, d: u32) -> Result<u32, Error> {
-    let n = n + (d >> 1) as u64;
+    rounded_up(n, d >> 1, d)
+}
+
+#[inline(always)]
+fn rounded_up(n: u64, more: u32, d: u32) -> Result<u32, Error> {
+    let n = n + more as u64;
     if (n >> 32) as u32 >= d {
         return Err(Error::OVERFLOW);
     }
@@ -127,9 +132,9 @@ pub(crate) fn with_fraction(n: u64, fraction: u32, d: u32) -> Result<u32, Error>
         return Err(Error::OVERFLOW);
     }
     if cfg!(target_arch = "avr") {
-        let (quotient, rest) = divide(n, d);
+        // The same without a rest: its first bit below the point decides where `d` is odd.
         let half = if d >> 31 == 0 { fraction >> 31 } else { 0 };
-        return up_if(quotient, rest + half >= d - rest);
+        return rounded_up(n, (d + half) >> 1, d);
     }
     let (d, shift) = normalise(d);
     let n = shift_up(n, shift) | ((fraction >> 1) >> (31 - shift)) as u64;
