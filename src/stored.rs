@@ -102,20 +102,18 @@ fn copy<T: Copy>(from: &T) -> T {
     // SAFETY: only `stored!` and the C interface make a `Stored`, and both in program memory: so many bytes are there.
     unsafe {
         if size_of::<T>() == 4 {
-            let (a, b, c, d): (u8, u8, u8, u8);
+            let (lower, upper): (u16, u16);
             asm!(
-                "lpm {a}, Z+",
-                "lpm {b}, Z+",
-                "lpm {c}, Z+",
-                "lpm {d}, Z",
-                a = out(reg) a,
-                b = out(reg) b,
-                c = out(reg) c,
-                d = lateout(reg) d,
+                "lpm {lower:l}, Z+",
+                "lpm {lower:h}, Z+",
+                "lpm {upper:l}, Z+",
+                "lpm {upper:h}, Z",
+                lower = out(reg_pair) lower,
+                upper = out(reg_pair) upper,
                 inout("Z") from => _,
                 options(pure, nomem, nostack, preserves_flags)
             );
-            return transmute_copy(&u32::from_le_bytes([a, b, c, d]));
+            return transmute_copy(&(u32::from(upper) << 16 | u32::from(lower)));
         }
         let mut copy = MaybeUninit::<T>::uninit();
         let to: *mut u8 = copy.as_mut_ptr().cast();
