@@ -296,61 +296,112 @@ pub(crate) fn shift_up(n: u64, shift: u32) -> u64 {
 /// `x` times the fraction whose 32 bits are four times `byte`, over 8: at most 1 too low.
 #[inline(never)]
 pub(crate) fn times_repeated(x: u32, byte: u8) -> u32 {
-    let (x2, x0) = halves(x);
-    let (s0, s2): (u16, u16);
+    let (mut x2, mut x0) = halves(x);
     // SAFETY: only the registers named change, and r1 is 0 again.
     unsafe {
         // The product with one byte, then the sum of what its four shifts have above 32 bits.
         asm!(
             "clr {zero}",
-            "clr {p4}",
             "mul {x0:l}, {byte}",
             "mov {p1}, r1",
-            "mul {x2:l}, {byte}",
-            "movw {p2}, r0",
             "mul {x0:h}, {byte}",
             "add {p1}, r0",
-            "adc {p2:l}, r1",
-            "adc {p2:h}, {zero}",
+            "adc r1, {zero}",
+            "mov {p2:l}, r1",
+            "cp {x2:l}, {zero}",
+            "cpc {x2:h}, {zero}",
+            "brne 2f",
+            // Under 2^16 two shifts are enough.
+            "mov {x0:h}, {p2:l}",
+            "mov {x0:l}, {p1}",
+            "add {x0:l}, {p2:l}",
+            "adc {x0:h}, {zero}",
+            "rjmp 3f",
+            "2: clr {p4}",
+            "mov {p2:h}, {zero}",
+            "mul {x2:l}, {byte}",
+            "add {p2:l}, r0",
+            "adc {p2:h}, r1",
             "mul {x2:h}, {byte}",
             "add {p2:h}, r0",
             "adc {p4}, r1",
-            "mov {s0:l}, {p1}",
-            "mov {s0:h}, {p2:l}",
-            "mov {s2:l}, {p2:h}",
-            "mov {s2:h}, {p4}",
-            "add {s0:l}, {p2:l}",
-            "adc {s0:h}, {p2:h}",
-            "adc {s2:l}, {p4}",
-            "adc {s2:h}, {zero}",
-            "add {s0:l}, {p2:h}",
-            "adc {s0:h}, {p4}",
-            "adc {s2:l}, {zero}",
-            "adc {s2:h}, {zero}",
-            "add {s0:l}, {p4}",
-            "adc {s0:h}, {zero}",
-            "adc {s2:l}, {zero}",
-            "adc {s2:h}, {zero}",
-            "ldi {count}, 3",
-            "2: lsr {s2:h}",
-            "ror {s2:l}",
-            "ror {s0:h}",
-            "ror {s0:l}",
-            "dec {count}",
-            "brne 2b",
-            "clr r1",
-            x0 = in(reg_pair) x0,
-            x2 = in(reg_pair) x2,
+            "mov {x0:l}, {p1}",
+            "mov {x0:h}, {p2:l}",
+            "mov {x2:l}, {p2:h}",
+            "mov {x2:h}, {p4}",
+            "add {x0:l}, {p2:l}",
+            "adc {x0:h}, {p2:h}",
+            "adc {x2:l}, {p4}",
+            "adc {x2:h}, {zero}",
+            "add {x0:l}, {p2:h}",
+            "adc {x0:h}, {p4}",
+            "adc {x2:l}, {zero}",
+            "adc {x2:h}, {zero}",
+            "add {x0:l}, {p4}",
+            "adc {x0:h}, {zero}",
+            "adc {x2:l}, {zero}",
+            "adc {x2:h}, {zero}",
+            "lsr {x2:h}",
+            "ror {x2:l}",
+            "ror {x0:h}",
+            "ror {x0:l}",
+            "lsr {x2:h}",
+            "ror {x2:l}",
+            "ror {x0:h}",
+            "ror {x0:l}",
+            "lsr {x2:h}",
+            "ror {x2:l}",
+            "ror {x0:h}",
+            "ror {x0:l}",
+            "rjmp 4f",
+            "3: lsr {x0:h}",
+            "ror {x0:l}",
+            "lsr {x0:h}",
+            "ror {x0:l}",
+            "lsr {x0:h}",
+            "ror {x0:l}",
+            "4: clr r1",
+            x0 = inout(reg_pair) x0,
+            x2 = inout(reg_pair) x2,
             byte = in(reg) byte,
-            s0 = out(reg_pair) s0,
-            s2 = out(reg_pair) s2,
             p1 = out(reg) _,
             p2 = out(reg_pair) _,
             p4 = out(reg) _,
             zero = out(reg) _,
-            count = out(reg_upper) _,
             options(pure, nomem, nostack)
         );
     }
-    joined(s2, s0)
+    joined(x2, x0)
+}
+
+/// The product of the lower halves.
+#[inline(always)]
+pub(crate) fn of_lower_halves(a: u32, b: u32) -> u32 {
+    let (p0, p2): (u16, u16);
+    // SAFETY: only the registers named change, and r1 is 0 again.
+    unsafe {
+        asm!(
+            "clr {zero}",
+            "mul {a:l}, {b:l}",
+            "movw {p0}, r0",
+            "mul {a:h}, {b:h}",
+            "movw {p2}, r0",
+            "mul {a:l}, {b:h}",
+            "add {p0:h}, r0",
+            "adc {p2:l}, r1",
+            "adc {p2:h}, {zero}",
+            "mul {a:h}, {b:l}",
+            "add {p0:h}, r0",
+            "adc {p2:l}, r1",
+            "adc {p2:h}, {zero}",
+            "clr r1",
+            a = in(reg_pair) a as u16,
+            b = in(reg_pair) b as u16,
+            p0 = out(reg_pair) p0,
+            p2 = out(reg_pair) p2,
+            zero = out(reg) _,
+            options(pure, nomem, nostack)
+        );
+    }
+    joined(p2, p0)
 }

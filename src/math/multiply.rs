@@ -19,6 +19,16 @@ pub(crate) fn wide(a: u32, b: u32) -> u64 {
     }
 }
 
+#[cfg(target_arch = "avr")]
+pub(crate) use super::avr::of_lower_halves;
+
+/// The product of two numbers below 2^16.
+#[cfg(not(target_arch = "avr"))]
+#[inline(always)]
+pub(crate) fn of_lower_halves(a: u32, b: u32) -> u32 {
+    a * b
+}
+
 /// The upper 32 bits of the product.
 #[inline(always)]
 pub(crate) fn high(a: u32, b: u32) -> u32 {

@@ -2,6 +2,7 @@
 
 use super::digits::{scale_down, split_sixty, split_ten};
 use super::style::{DASH, NO, Unit, YES};
+use crate::math::multiply::of_lower_halves;
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
 
 /// How an angle is shown. The numbers are frozen.
@@ -255,10 +256,11 @@ impl Value {
         }
         let mut power = 1; // at most 10^4
         for _ in 0..shift + decimals {
-            power *= 10;
+            power = of_lower_halves(power, 10);
         }
         // Whole and broken part on their own: each product stays under 2^16 * 10^4.
-        let number = (ratio.0 >> 16) * power + (((ratio.0 & 0xffff) * power + 0x8000) >> 16);
+        let number = of_lower_halves(ratio.0 >> 16, power)
+            + ((of_lower_halves(ratio.0 & 0xffff, power) + 0x8000) >> 16);
         Value::number(number, decimals, unit)
     }
 }
