@@ -192,7 +192,7 @@ pub unsafe extern "C" fn fieldstop_text_count(
         None => Value::REFUSED_2,
     };
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes a length in millimetres as text and gives its length in bytes.
@@ -213,7 +213,7 @@ pub unsafe extern "C" fn fieldstop_text_length_mm(
 ) -> fieldstop_status {
     let value = Value::millimetres(Micrometres(length_um), decimals);
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes a length in micrometres as text and gives its length in bytes.
@@ -234,7 +234,7 @@ pub unsafe extern "C" fn fieldstop_text_length_um(
 ) -> fieldstop_status {
     let value = Value::micrometres(Nanometres(length_nm), decimals);
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes a plain ratio as text and gives its length in bytes.
@@ -255,7 +255,7 @@ pub unsafe extern "C" fn fieldstop_text_ratio(
 ) -> fieldstop_status {
     let value = Value::ratio(Q16(ratio_q16), decimals);
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes a magnification, as in 62.5x as text and gives its length in bytes.
@@ -276,7 +276,7 @@ pub unsafe extern "C" fn fieldstop_text_magnification(
 ) -> fieldstop_status {
     let value = Value::magnification(Q16(magnification_q16), decimals);
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes a focal ratio, as in f/6.0 as text and gives its length in bytes.
@@ -297,7 +297,7 @@ pub unsafe extern "C" fn fieldstop_text_focal_ratio(
 ) -> fieldstop_status {
     let value = Value::focal_ratio(Q16(focal_ratio_q16), decimals);
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes a ratio in per cent as text and gives its length in bytes.
@@ -318,7 +318,7 @@ pub unsafe extern "C" fn fieldstop_text_percent(
 ) -> fieldstop_status {
     let value = Value::percent(Q16(ratio_q16), decimals);
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes an angle in seconds of arc as text and gives its length in bytes.
@@ -339,7 +339,7 @@ pub unsafe extern "C" fn fieldstop_text_arcseconds(
 ) -> fieldstop_status {
     let value = Value::arcseconds(Microarcseconds(angle_uas), decimals);
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes a magnitude as text and gives its length in bytes.
@@ -360,7 +360,7 @@ pub unsafe extern "C" fn fieldstop_text_magnitude(
 ) -> fieldstop_status {
     let value = Value::magnitude(Millimagnitudes(magnitude_mmag), decimals);
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 3, width, text, capacity, length) }
+    unsafe { write(&value, style, [3, width], text, capacity, length) }
 }
 
 /// Writes an angle in degrees, minutes and seconds as text and gives its length in bytes.
@@ -388,7 +388,7 @@ pub unsafe extern "C" fn fieldstop_text_angle(
         None => Value::REFUSED_2,
     };
     // SAFETY: the caller's promise about the pointers.
-    unsafe { write(&value, style, 4, width, text, capacity, length) }
+    unsafe { write(&value, style, [4, width], text, capacity, length) }
 }
 
 /// Writes the text of a unit and gives its length in bytes.
@@ -778,8 +778,8 @@ fn put(text: impl ExactSizeIterator<Item = u8>, out: &mut [u8]) -> Result<usize,
 unsafe fn write(
     value: &Value,
     style: *const TextStyle,
-    style_position: u8,
-    width: u8,
+    // As one argument, so that all go in registers on AVR.
+    [style_position, width]: [u8; 2],
     text: *mut c_char,
     capacity: u16,
     length: *mut u16,

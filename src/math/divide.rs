@@ -164,9 +164,25 @@ fn up_if(quotient: u32, up: bool) -> Result<u32, Error> {
     }
 }
 
+#[cfg(not(target_arch = "avr"))]
+pub(crate) use by_64_of as by_64;
+
+/// As below, from memory: arguments of more than 18 bytes arrive wrong on a part with more than 128 KB of flash, in
+/// rustc 1.96; five are too many for the compiler to bring them back into registers.
+#[cfg(target_arch = "avr")]
+#[inline(always)]
+pub(crate) fn by_64(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
+    #[inline(never)]
+    fn of_words([upper, n1, n0, d1, d0]: &[u32; 5]) -> Result<u32, Error> {
+        by_64_of(*upper, (*n1 as u64) << 32 | *n0 as u64, (*d1 as u64) << 32 | *d0 as u64)
+    }
+    of_words(&[upper, (n >> 32) as u32, n as u32, (d >> 32) as u32, d as u32])
+}
+
 /// (upper 2^64 + n) / d to the nearest integer, halves up. `d` is not 0. (Knuth, The Art of Computer Programming 2,
 /// 4.3.1, algorithm D with one digit of quotient.)
-pub(crate) fn by_64(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
+#[cfg_attr(target_arch = "avr", inline(always))]
+pub(crate) fn by_64_of(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
     let top = (upper as u64) << 32 | n >> 32;
     if top >= d {
         return Err(Error::OVERFLOW);

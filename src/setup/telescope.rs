@@ -62,6 +62,8 @@ impl Telescope {
     }
 
     /// Brightness of an extended object: the beam's, less that of the obstruction's shadow in it.
+    // Not a call on AVR, where the compiler would give it more arguments than arrive (see `divide::by_64`).
+    #[cfg_attr(target_arch = "avr", inline(always))]
     pub(super) fn surface_brightness(
         &self,
         focal_length: Micrometres,

@@ -329,7 +329,7 @@ impl Iterator for StoredText<'_> {
             return None;
         }
         self.at += 1;
-        Some(self.text.at(usize::from(self.at - 1 & 7)))
+        Some(self.text.at(usize::from((self.at - 1) & 7)))
     }
 
     fn size_hint(&self) -> (usize, Option<usize>) {
