@@ -14,9 +14,10 @@ fn joined(upper: u16, lower: u16) -> u32 {
     (upper as u32) << 16 | lower as u32
 }
 
-/// a b. Products that stand side by side are added in one go, for `mul` spoils the carry.
+/// a b. Products that stand side by side are added in one go, for `mul` spoils the carry. (Rust's own convention would
+/// give the result by way of memory.)
 #[inline(never)]
-pub(crate) fn wide(a: u32, b: u32) -> u64 {
+pub(crate) extern "C" fn wide(a: u32, b: u32) -> u64 {
     let ((a2, a0), (b2, b0)) = (halves(a), halves(b));
     let (p0, p2, p4, p6): (u16, u16, u16, u16);
     // SAFETY: only the registers named change, and r1 is 0 again.
@@ -253,7 +254,7 @@ fn quotient(n: u64, d: u32) -> u32 {
 
 /// `n` shifted up by 0 to 31 places.
 #[inline(never)]
-pub(crate) fn shift_up(n: u64, shift: u32) -> u64 {
+pub(crate) extern "C" fn shift_up(n: u64, shift: u32) -> u64 {
     let ((mut n6, mut n4), (mut n2, mut n0)) = (halves((n >> 32) as u32), halves(n as u32));
     // SAFETY: only the registers named change.
     unsafe {

@@ -133,7 +133,7 @@ pub(crate) fn with_fraction(n: u64, fraction: u32, d: u32) -> Result<u32, Error>
     }
     if cfg!(target_arch = "avr") {
         // The same without a rest: its first bit below the point decides where `d` is odd.
-        let half = if d >> 31 == 0 { fraction >> 31 } else { 0 };
+        let half = (fraction & !d) >> 31;
         return rounded_up(n, (d + half) >> 1, d);
     }
     let (d, shift) = normalise(d);

@@ -30,7 +30,12 @@ impl Value {
 
     #[inline]
     pub(crate) fn write_as(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<usize, Error> {
-        let written = self.write_right(style, width, out)?;
+        let written = if cfg!(target_arch = "avr") {
+            self.write_right_here(style, width, out) // a call costs a hundred cycles there
+        } else {
+            self.write_right(style, width, out)
+        };
+        let written = written?;
         blank(out.iter_mut().take(written.blanks.into()));
         Ok(usize::from(written.blanks) + usize::from(written.bytes))
     }
@@ -38,6 +43,11 @@ impl Value {
     /// The same without the blanks.
     #[inline(never)]
     pub(super) fn write_right(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<Written, Error> {
+        self.write_right_here(style, width, out)
+    }
+
+    #[inline(always)]
+    fn write_right_here(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<Written, Error> {
         let form = self.form;
         let text = style.text(form.text());
         let Size { digits, bytes, characters } = self.measure_with(text.len(), style)?;
