@@ -1,8 +1,7 @@
 //! Constants that stay where the program is. On AVR program memory has addresses of its own and what is not marked is
 //! copied into RAM at the start; everywhere else this is an ordinary constant.
 
-/// A constant that can only be copied out.
-#[derive(Clone, Copy)]
+/// A constant that can only be copied out. On AVR its own bytes must not be read as data, so it cannot be moved either.
 #[repr(transparent)]
 pub(crate) struct Stored<T>(T);
 

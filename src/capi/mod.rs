@@ -1,5 +1,5 @@
-//! The C interface: plain functions, written out, one file a subject. The only room with `unsafe` but for
-//! src/stored.rs.
+//! The C interface: plain functions, written out, one file a subject. With src/stored.rs
+//! and src/math/avr.rs the only room with `unsafe`.
 //!
 //! Each function checks its pointers first, then calls the Rust function of the same stem; it writes its result only on
 //! success.

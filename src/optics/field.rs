@@ -62,6 +62,7 @@ fn angle_of_tangent<F: Real>(tangent: Double<F>) -> F {
 ///
 /// Result: Q16.16; float a plain number. Overflow: 65536 or more.
 /// Error: at most 0.5 LSB; float 2 ulp.
+#[cfg_attr(target_arch = "avr", inline(always))]
 pub fn focal_ratio_fx(focal_length: Micrometres, aperture: Micrometres) -> Result<Q16, Error> {
     present(focal_length.0, 1)?;
     present(aperture.0, 2)?;
@@ -161,6 +162,7 @@ pub fn amplification<F: Real>(element_focal_length_mm: F, image_distance_mm: F) 
 ///
 /// Result: Q16.16; float a plain number. Overflow: 65536 or more.
 /// Error: at most 0.5 LSB; float 2 ulp.
+#[cfg_attr(target_arch = "avr", inline(always))]
 pub fn magnification_fx(focal_length: Micrometres, eyepiece: Micrometres) -> Result<Q16, Error> {
     present(focal_length.0, 1)?;
     present(eyepiece.0, 2)?;
@@ -187,6 +189,7 @@ pub fn magnification<F: Real>(focal_length_mm: F, eyepiece_mm: F) -> Result<F, E
 ///
 /// Result: um; float mm. Overflow: 4294967296 um or more.
 /// Error: at most 0.5 LSB; float 2 ulp.
+#[cfg_attr(target_arch = "avr", inline(always))]
 pub fn exit_pupil_fx(
     aperture: Micrometres,
     focal_length: Micrometres,
@@ -282,6 +285,7 @@ pub fn eyepiece_for_magnification<F: Real>(focal_length_mm: F, magnification: F)
 ///
 /// Result: mas; float arcsec. It always fits.
 /// Error: at most 1 LSB; float 3 ulp.
+#[cfg_attr(target_arch = "avr", inline(always))]
 pub fn true_field_from_stop_fx(
     field_stop: Micrometres,
     focal_length: Micrometres,
@@ -364,6 +368,7 @@ pub fn true_field_rectilinear<F: Real>(
 ///
 /// Result: mas; float arcsec. Overflow: 4294967296 mas or more.
 /// Error: at most 0.5 LSB; float 2 ulp.
+#[cfg_attr(target_arch = "avr", inline(always))]
 pub fn true_field_equidistant_fx(
     apparent_field: Milliarcseconds,
     focal_length: Micrometres,
@@ -455,6 +460,7 @@ pub fn plate_scale<F: Real>(focal_length_mm: F) -> Result<F, Error> {
 ///
 /// Result: uas; float arcsec. Overflow: 4294967296 uas or more.
 /// Error: at most 0.51 LSB; float 2 ulp.
+#[cfg_attr(target_arch = "avr", inline(always))]
 pub fn pixel_scale_fx(pixel: Nanometres, focal_length: Micrometres) -> Result<Microarcseconds, Error> {
     present(pixel.0, 1)?;
     present(focal_length.0, 2)?;

@@ -44,6 +44,7 @@ const AIRY_RADIUS: u64 = 943_474_998 << 32 | 3_889_147_235;
 ///
 /// Result: uas, float arcsec.
 /// Error: at most 0.51 LSB; float 2 ulp.
+#[cfg_attr(target_arch = "avr", inline(always))]
 pub fn rayleigh_limit_fx(aperture: Micrometres, wavelength: Nanometres) -> Result<Microarcseconds, Error> {
     present(aperture.0, 1)?;
     present(wavelength.0, 2)?;
@@ -147,6 +148,7 @@ pub fn rayleigh_limit_obstructed<F: Real>(
 ///
 /// Result: uas, float arcsec.
 /// Error: at most 0.5 LSB; float 2 ulp.
+#[cfg_attr(target_arch = "avr", inline(always))]
 pub fn dawes_limit_fx(aperture: Micrometres) -> Result<Microarcseconds, Error> {
     present(aperture.0, 1)?;
     divide::rounded(116_000_000_000, aperture.0).map(Microarcseconds)
