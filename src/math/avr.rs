@@ -14,97 +14,58 @@ fn joined(upper: u16, lower: u16) -> u32 {
     (upper as u32) << 16 | lower as u32
 }
 
-/// a b. Products that stand side by side are added in one go, for `mul` spoils the carry. (Rust's own convention would
-/// give the result by way of memory.)
+/// Adds a byte of a times b to four bytes of the product; the byte's place takes the fifth.
+macro_rules! row {
+    ($a:literal, $p0:literal, $p1:literal, $p2:literal, $p3:literal) => {
+        concat!(
+            concat!("mul ", $a, ", {b0:l}\nmovw {t0}, r0\n"),
+            concat!("mul ", $a, ", {b2:l}\nmovw {t2}, r0\n"),
+            concat!("mul ", $a, ", {b0:h}\nadd {t0:h}, r0\nadc {t2:l}, r1\nadc {t2:h}, {zero}\n"),
+            concat!("mul ", $a, ", {b2:h}\nadd {t2:h}, r0\nmov ", $a, ", r1\nadc ", $a, ", {zero}\n"),
+            concat!("add ", $p0, ", {t0:l}\nadc ", $p1, ", {t0:h}\n"),
+            concat!("adc ", $p2, ", {t2:l}\nadc ", $p3, ", {t2:h}\nadc ", $a, ", {zero}"),
+        )
+    };
+}
+
+/// a b. (Rust's own convention would give the result by way of memory.)
 #[inline(never)]
 pub(crate) extern "C" fn wide(a: u32, b: u32) -> u64 {
-    let ((a2, a0), (b2, b0)) = (halves(a), halves(b));
-    let (p0, p2, p4, p6): (u16, u16, u16, u16);
+    let ((mut a2, mut a0), (b2, b0)) = (halves(a), halves(b));
+    let (p0, p2): (u16, u16);
     // SAFETY: only the registers named change, and r1 is 0 again.
     unsafe {
         asm!(
+            "clr {zero}",
             "mul {a0:l}, {b0:l}",
             "movw {p0}, r0",
-            "mul {a0:h}, {b0:h}",
-            "movw {p2}, r0",
-            "mul {a2:l}, {b2:l}",
-            "movw {p4}, r0",
-            "mul {a2:h}, {b2:h}",
-            "movw {p6}, r0",
-            "clr {zero}",
-            // One byte up: a0 b1, a1 b2, a2 b3, and with a and b exchanged.
-            "mul {a0:l}, {b0:h}",
-            "movw {t0}, r0",
-            "mul {a0:h}, {b2:l}",
-            "movw {t2}, r0",
-            "mul {a2:l}, {b2:h}",
-            "add {p0:h}, {t0:l}",
-            "adc {p2:l}, {t0:h}",
-            "adc {p2:h}, {t2:l}",
-            "adc {p4:l}, {t2:h}",
-            "adc {p4:h}, r0",
-            "adc {p6:l}, r1",
-            "adc {p6:h}, {zero}",
-            "mul {b0:l}, {a0:h}",
-            "movw {t0}, r0",
-            "mul {b0:h}, {a2:l}",
-            "movw {t2}, r0",
-            "mul {b2:l}, {a2:h}",
-            "add {p0:h}, {t0:l}",
-            "adc {p2:l}, {t0:h}",
-            "adc {p2:h}, {t2:l}",
-            "adc {p4:l}, {t2:h}",
-            "adc {p4:h}, r0",
-            "adc {p6:l}, r1",
-            "adc {p6:h}, {zero}",
-            // Two bytes up.
             "mul {a0:l}, {b2:l}",
-            "movw {t0}, r0",
-            "mul {a0:h}, {b2:h}",
-            "add {p2:l}, {t0:l}",
-            "adc {p2:h}, {t0:h}",
-            "adc {p4:l}, r0",
-            "adc {p4:h}, r1",
-            "adc {p6:l}, {zero}",
-            "adc {p6:h}, {zero}",
-            "mul {b0:l}, {a2:l}",
-            "movw {t0}, r0",
-            "mul {b0:h}, {a2:h}",
-            "add {p2:l}, {t0:l}",
-            "adc {p2:h}, {t0:h}",
-            "adc {p4:l}, r0",
-            "adc {p4:h}, r1",
-            "adc {p6:l}, {zero}",
-            "adc {p6:h}, {zero}",
-            // Three bytes up.
+            "movw {p2}, r0",
+            "mul {a0:l}, {b0:h}",
+            "add {p0:h}, r0",
+            "adc {p2:l}, r1",
+            "adc {p2:h}, {zero}",
             "mul {a0:l}, {b2:h}",
             "add {p2:h}, r0",
-            "adc {p4:l}, r1",
-            "adc {p4:h}, {zero}",
-            "adc {p6:l}, {zero}",
-            "adc {p6:h}, {zero}",
-            "mul {b0:l}, {a2:h}",
-            "add {p2:h}, r0",
-            "adc {p4:l}, r1",
-            "adc {p4:h}, {zero}",
-            "adc {p6:l}, {zero}",
-            "adc {p6:h}, {zero}",
+            "mov {a0:l}, r1",
+            "adc {a0:l}, {zero}",
+            row!("{a0:h}", "{p0:h}", "{p2:l}", "{p2:h}", "{a0:l}"),
+            row!("{a2:l}", "{p2:l}", "{p2:h}", "{a0:l}", "{a0:h}"),
+            row!("{a2:h}", "{p2:h}", "{a0:l}", "{a0:h}", "{a2:l}"),
             "clr r1",
-            a0 = in(reg_pair) a0,
-            a2 = in(reg_pair) a2,
+            a0 = inout(reg_pair) a0,
+            a2 = inout(reg_pair) a2,
             b0 = in(reg_pair) b0,
             b2 = in(reg_pair) b2,
             p0 = out(reg_pair) p0,
             p2 = out(reg_pair) p2,
-            p4 = out(reg_pair) p4,
-            p6 = out(reg_pair) p6,
             t0 = out(reg_pair) _,
             t2 = out(reg_pair) _,
             zero = out(reg) _,
             options(pure, nomem, nostack)
         );
     }
-    (joined(p6, p4) as u64) << 32 | joined(p2, p0) as u64
+    (joined(a2, a0) as u64) << 32 | joined(p2, p0) as u64
 }
 
 /// Quotient and remainder. `d` is not 0 and above the upper half of `n`.
