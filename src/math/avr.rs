@@ -68,6 +68,32 @@ pub(crate) extern "C" fn wide(a: u32, b: u32) -> u64 {
     (joined(a2, a0) as u64) << 32 | joined(p2, p0) as u64
 }
 
+/// A byte of the quotient from four bytes of rest, below `d`, and the next of `n`. The byte takes the place of the first.
+/// The reciprocal tells it within 3; it is 0 where the rest is under 2^23.
+macro_rules! digit {
+    ($n4:literal, $n3:literal, $n2:literal, $n1:literal, $n0:literal) => {
+        concat!(
+            concat!("tst ", $n4, "\nbrne 3f\ntst ", $n3, "\nbrpl 8f\n"),
+            concat!("3: mul ", $n3, ", {reciprocal}\nmov {q}, r1\n"),
+            concat!("mul ", $n4, ", {reciprocal}\nadd r0, {q}\nadc r1, {zero}\n"),
+            concat!("add r0, ", $n3, "\nadc r1, ", $n4, "\nmov {q}, r1\nbrcc 4f\nldi {q}, 255\n"),
+            concat!("4: mul {q}, {d0:l}\nsub ", $n0, ", r0\nsbc ", $n1, ", r1\n"),
+            concat!("sbc ", $n2, ", {zero}\nsbc ", $n3, ", {zero}\nsbc ", $n4, ", {zero}\n"),
+            concat!("mul {q}, {d0:h}\nsub ", $n1, ", r0\nsbc ", $n2, ", r1\n"),
+            concat!("sbc ", $n3, ", {zero}\nsbc ", $n4, ", {zero}\n"),
+            concat!("mul {q}, {d2:l}\nsub ", $n2, ", r0\nsbc ", $n3, ", r1\nsbc ", $n4, ", {zero}\n"),
+            concat!("mul {q}, {d2:h}\nsub ", $n3, ", r0\nsbc ", $n4, ", r1\nbrmi 7f\n"),
+            concat!("5: tst ", $n4, "\nbrne 6f\ncp ", $n0, ", {d0:l}\ncpc ", $n1, ", {d0:h}\n"),
+            concat!("cpc ", $n2, ", {d2:l}\ncpc ", $n3, ", {d2:h}\nbrlo 9f\n"),
+            concat!("6: inc {q}\nsub ", $n0, ", {d0:l}\nsbc ", $n1, ", {d0:h}\n"),
+            concat!("sbc ", $n2, ", {d2:l}\nsbc ", $n3, ", {d2:h}\nsbc ", $n4, ", {zero}\nrjmp 5b\n"),
+            concat!("7: dec {q}\nadd ", $n0, ", {d0:l}\nadc ", $n1, ", {d0:h}\n"),
+            concat!("adc ", $n2, ", {d2:l}\nadc ", $n3, ", {d2:h}\nadc ", $n4, ", {zero}\nbrmi 7b\n"),
+            concat!("9: mov ", $n4, ", {q}\n8:"),
+        )
+    };
+}
+
 /// Quotient and remainder. `d` is not 0 and above the upper half of `n`.
 #[inline(always)]
 pub(crate) fn divide(n: u64, d: u32) -> (u32, u32) {
@@ -125,92 +151,26 @@ fn quotient(n: u64, d: u32) -> u32 {
     let reciprocal = RECIPROCAL.at(usize::from((d2 >> 9) as u8 & 63));
     // SAFETY: only the registers named change, and r1 is 0 again.
     unsafe {
-        // A byte of the quotient each time: the rest is in n7 to n4, and the quotient follows the lower half of n. The
-        // reciprocal tells the byte within 3; a rest under 2^23 gives 0.
         asm!(
             "clr {zero}",
-            "ldi {count}, 4",
-            "2: clr {q}",
-            "tst {n6:h}",
-            "brne 3f",
-            "tst {n6:l}",
-            "brpl 8f",
-            "3: mul {n6:l}, {reciprocal}",
-            "mov {q}, r1",
-            "mul {n6:h}, {reciprocal}",
-            "add r0, {q}",
-            "adc r1, {zero}",
-            "add r0, {n6:l}",
-            "adc r1, {n6:h}",
-            "mov {q}, r1",
-            "brcc 4f",
-            "ldi {q}, 255",
-            "4: mul {q}, {d0:l}",
-            "sub {n2:h}, r0",
-            "sbc {n4:l}, r1",
-            "sbc {n4:h}, {zero}",
-            "sbc {n6:l}, {zero}",
-            "sbc {n6:h}, {zero}",
-            "mul {q}, {d0:h}",
-            "sub {n4:l}, r0",
-            "sbc {n4:h}, r1",
-            "sbc {n6:l}, {zero}",
-            "sbc {n6:h}, {zero}",
-            "mul {q}, {d2:l}",
-            "sub {n4:h}, r0",
-            "sbc {n6:l}, r1",
-            "sbc {n6:h}, {zero}",
-            "mul {q}, {d2:h}",
-            "sub {n6:l}, r0",
-            "sbc {n6:h}, r1",
-            "brmi 7f",
-            "5: tst {n6:h}",
-            "brne 6f",
-            "cp {n2:h}, {d0:l}",
-            "cpc {n4:l}, {d0:h}",
-            "cpc {n4:h}, {d2:l}",
-            "cpc {n6:l}, {d2:h}",
-            "brlo 8f",
-            "6: inc {q}",
-            "sub {n2:h}, {d0:l}",
-            "sbc {n4:l}, {d0:h}",
-            "sbc {n4:h}, {d2:l}",
-            "sbc {n6:l}, {d2:h}",
-            "sbc {n6:h}, {zero}",
-            "rjmp 5b",
-            "7: dec {q}",
-            "add {n2:h}, {d0:l}",
-            "adc {n4:l}, {d0:h}",
-            "adc {n4:h}, {d2:l}",
-            "adc {n6:l}, {d2:h}",
-            "adc {n6:h}, {zero}",
-            "brmi 7b",
-            "8: mov {n6:h}, {n6:l}",
-            "mov {n6:l}, {n4:h}",
-            "mov {n4:h}, {n4:l}",
-            "mov {n4:l}, {n2:h}",
-            "mov {n2:h}, {n2:l}",
-            "mov {n2:l}, {n0:h}",
-            "mov {n0:h}, {n0:l}",
-            "mov {n0:l}, {q}",
-            "dec {count}",
-            "breq 9f",
-            "rjmp 2b",
-            "9: clr r1",
+            digit!("{n6:h}", "{n6:l}", "{n4:h}", "{n4:l}", "{n2:h}"),
+            digit!("{n6:l}", "{n4:h}", "{n4:l}", "{n2:h}", "{n2:l}"),
+            digit!("{n4:h}", "{n4:l}", "{n2:h}", "{n2:l}", "{n0:h}"),
+            digit!("{n4:l}", "{n2:h}", "{n2:l}", "{n0:h}", "{n0:l}"),
+            "clr r1",
             reciprocal = in(reg) reciprocal,
             d0 = in(reg_pair) d0,
             d2 = in(reg_pair) d2,
-            n0 = inout(reg_pair) n0,
-            n2 = inout(reg_pair) n2,
-            n4 = inout(reg_pair) n4 => _,
-            n6 = inout(reg_pair) n6 => _,
+            n0 = inout(reg_pair) n0 => _,
+            n2 = inout(reg_pair) n2 => _,
+            n4 = inout(reg_pair) n4,
+            n6 = inout(reg_pair) n6,
             q = out(reg_upper) _,
-            count = out(reg_upper) _,
             zero = out(reg) _,
             options(pure, nomem, nostack)
         );
     }
-    joined(n2, n0)
+    joined(n6, n4)
 }
 
 /// `n` shifted up by 0 to 31 places.
