@@ -79,9 +79,9 @@ impl<T: Copy, const N: usize> Stored<[T; N]> {
     }
 }
 
-// SAFETY: it is never written.
+// SAFETY: it is never written, and what is Copy has no inside that could be.
 #[allow(unsafe_code)]
-unsafe impl<T> Sync for Stored<T> {}
+unsafe impl<T: Copy> Sync for Stored<T> {}
 
 #[cfg(not(target_arch = "avr"))]
 #[inline(always)]

@@ -1,4 +1,5 @@
-//! Kernels in AVR's own instructions: the compiler makes calls and loops of bits out of 32 and 64 bits.
+//! Kernels in the instructions of an AVR with a multiplier: the compiler makes calls and loops of single bits out of 32 and
+//! 64 bits. Each gives the bits of the form for other parts, and `r1` back as 0, as the compiler wants it.
 #![allow(unsafe_code)]
 
 use super::divide::RECIPROCAL;
