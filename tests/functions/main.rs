@@ -10,4 +10,5 @@ mod edges;
 mod oracle;
 mod properties;
 mod registry;
+mod target;
 mod twin;

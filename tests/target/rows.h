@@ -1,0 +1,134 @@
+/* Made from the registry of tests/functions: do not edit. Each row draws its arguments and calls. */
+#if HAS_ROW(0)
+ROW(bam_from_mas, DRAW(1u, 648000000u, 2147483648u, 2147483647u), fieldstop_bam_from_mas_fx((int32_t)a[0], &result))
+#endif
+#if HAS_ROW(1)
+ROW(mas_from_bam, DRAW(1048576u, 4294967295u, 0u, 4294967295u), fieldstop_mas_from_bam_fx(a[0], &result))
+#endif
+#if HAS_ROW(2)
+ROW(signed_mas_from_bam, DRAW(1u, 2147483647u, 2147483648u, 2147483647u), fieldstop_signed_mas_from_bam_fx((int32_t)a[0], (int32_t *)&result))
+#endif
+#if HAS_ROW(3)
+ROW(bam_from_day_ms, DRAW(1u, 86399999u, 0u, 86399999u), fieldstop_bam_from_day_ms_fx(a[0], &result))
+#endif
+#if HAS_ROW(4)
+ROW(day_ms_from_bam, DRAW(1048576u, 4294967295u, 0u, 4294967295u), fieldstop_day_ms_from_bam_fx(a[0], &result))
+#endif
+#if HAS_ROW(5)
+ROW(milli_from_q16, DRAW(6554u, 30000000u, 0u, 4294967295u), fieldstop_milli_from_q16_fx(a[0], &result))
+#endif
+#if HAS_ROW(6)
+ROW(q16_from_milli, DRAW(100u, 500000u, 0u, 4294967295u), fieldstop_q16_from_milli_fx(a[0], &result))
+#endif
+#if HAS_ROW(7)
+ROW(focal_ratio, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_focal_ratio_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(8)
+ROW(amplified_focal_length, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(26000u, 330000u, 0u, 4294967295u), fieldstop_amplified_focal_length_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(9)
+ROW(amplification, DRAW(20000u, 200000u, 2147483648u, 2147483647u) DRAW(10000u, 150000u, 0u, 4294967295u), fieldstop_amplification_fx((int32_t)a[0], a[1], &result))
+#endif
+#if HAS_ROW(10)
+ROW(magnification, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(3000u, 55000u, 0u, 4294967295u), fieldstop_magnification_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(11)
+ROW(exit_pupil, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(3000u, 55000u, 0u, 4294967295u), fieldstop_exit_pupil_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(12)
+ROW(eyepiece_for_exit_pupil, DRAW(500u, 8000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_eyepiece_for_exit_pupil_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(13)
+ROW(eyepiece_for_magnification, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(655360u, 32768000u, 0u, 4294967295u), fieldstop_eyepiece_for_magnification_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(14)
+ROW(true_field_from_stop, DRAW(2000u, 47000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u), fieldstop_true_field_from_stop_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(15)
+ROW(true_field_rectilinear, DRAW(108000000u, 432000000u, 0u, 647999999u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(3000u, 55000u, 0u, 4294967295u), fieldstop_true_field_rectilinear_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(16)
+ROW(true_field_equidistant, DRAW(108000000u, 432000000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(3000u, 55000u, 0u, 4294967295u), fieldstop_true_field_equidistant_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(17)
+ROW(frame_field, DRAW(1000u, 15000u, 0u, 4294967295u) DRAW(500u, 10000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u), fieldstop_frame_field_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(18)
+ROW(plate_scale, DRAW(200000u, 5000000u, 0u, 4294967295u), fieldstop_plate_scale_fx(a[0], &result))
+#endif
+#if HAS_ROW(19)
+ROW(pixel_scale, DRAW(1000u, 15000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u), fieldstop_pixel_scale_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(20)
+ROW(focal_length_for_field, DRAW(2000u, 50000u, 0u, 4294967295u) DRAW(600000u, 40000000u, 0u, 647999999u), fieldstop_focal_length_for_field_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(21)
+ROW(tiles, DRAW(100000u, 40000000u, 0u, 4294967295u) DRAW(100000u, 40000000u, 0u, 4294967295u) DRAW(1000u, 100000u, 0u, 4294967295u), fieldstop_tiles_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(22)
+ROW(rayleigh_limit, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_rayleigh_limit_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(23)
+ROW(rayleigh_limit_obstructed, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(10000u, 200000u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_rayleigh_limit_obstructed_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(24)
+ROW(dawes_limit, DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_dawes_limit_fx(a[0], &result))
+#endif
+#if HAS_ROW(25)
+ROW(sparrow_limit, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_sparrow_limit_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(26)
+ROW(airy_fwhm, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_airy_fwhm_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(27)
+ROW(airy_radius, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_airy_radius_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(28)
+ROW(cutoff_frequency, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_cutoff_frequency_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(29)
+ROW(fried_parameter, DRAW(300000u, 10000000u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_fried_parameter_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(30)
+ROW(contrast, DRAW(3000u, 65536u, 0u, 65536u) DRAW(6000u, 30000u, 0u, 65535u), fieldstop_contrast_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(31)
+ROW(strehl_ratio, DRAW(5u, 200u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_strehl_ratio_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(32)
+ROW(seeing_at_airmass, DRAW(300000u, 10000000u, 0u, 4294967295u) DRAW(65536u, 400000u, 65536u, 2621440u), fieldstop_seeing_at_airmass_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(33)
+ROW(combined_fwhm, DRAW(300000u, 10000000u, 0u, 4294967295u) DRAW(300000u, 10000000u, 0u, 4294967295u) DRAW(300000u, 10000000u, 0u, 4294967295u), fieldstop_combined_fwhm_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(34)
+ROW(throughput, DRAW(0u, 5u, 0u, 255u) DRAW(45000u, 65536u, 0u, 65536u) DRAW(0u, 12u, 0u, 255u) DRAW(45000u, 65536u, 0u, 65536u), fieldstop_throughput_fx((uint8_t)a[0], a[1], (uint8_t)a[2], a[3], &result))
+#endif
+#if HAS_ROW(35)
+ROW(clear_fraction, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(10000u, 200000u, 0u, 4294967295u), fieldstop_clear_fraction_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(36)
+ROW(effective_aperture, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(10000u, 200000u, 0u, 4294967295u) DRAW(45000u, 65536u, 0u, 65536u), fieldstop_effective_aperture_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(37)
+ROW(magnitude_gain, DRAW(40000u, 500000u, 0u, 4294967295u) DRAW(2000u, 8000u, 0u, 4294967295u), fieldstop_magnitude_gain_fx(a[0], a[1], (int32_t *)&result))
+#endif
+#if HAS_ROW(38)
+ROW(limiting_magnitude, DRAW(3000u, 7000u, 2147483648u, 2147483647u) DRAW(40000u, 500000u, 0u, 4294967295u) DRAW(2000u, 8000u, 0u, 4294967295u), fieldstop_limiting_magnitude_fx((int32_t)a[0], a[1], a[2], (int32_t *)&result))
+#endif
+#if HAS_ROW(39)
+ROW(surface_brightness, DRAW(500u, 8000u, 0u, 4294967295u) DRAW(2000u, 8000u, 0u, 4294967295u) DRAW(45000u, 65536u, 0u, 65536u), fieldstop_surface_brightness_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(40)
+ROW(magnitude_difference, DRAW(1u, 10000000u, 0u, 4294967295u) DRAW(1u, 10000000u, 0u, 4294967295u), fieldstop_magnitude_difference_fx(a[0], a[1], (int32_t *)&result))
+#endif
+#if HAS_ROW(41)
+ROW(distance_dimming, DRAW(1u, 10000u, 0u, 4294967295u) DRAW(1u, 1000000u, 0u, 4294967295u), fieldstop_distance_dimming_fx(a[0], a[1], (int32_t *)&result))
+#endif
+#if HAS_ROW(42)
+ROW(extinction, DRAW(100u, 600u, 0u, 4294967295u) DRAW(65536u, 400000u, 0u, 4294967295u), fieldstop_extinction_fx(a[0], a[1], (int32_t *)&result))
+#endif
+#if HAS_ROW(43)
+ROW(t_number, DRAW(196608u, 1048576u, 0u, 4294967295u) DRAW(30000u, 65536u, 0u, 65536u), fieldstop_t_number_fx(a[0], a[1], &result))
+#endif
+#define ROWS 44
