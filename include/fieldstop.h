@@ -2196,8 +2196,7 @@ fieldstop_status fieldstop_camera_readout_compute(const struct fieldstop_telesco
                                                   struct fieldstop_camera_readout *readout);
 
 /* --------------------------------------------------------------------------------------------------
-   Quantities as characters of a display: integers only, into a buffer of the caller's, without
-   `core::fmt`. */
+   Quantities as characters of a display: integers only, into a buffer of the caller's. */
 
 /** Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on. */
 #define FIELDSTOP_ANGLE_BY_SIZE 0

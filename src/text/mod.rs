@@ -1,4 +1,4 @@
-//! Quantities as characters of a display: integers only, into a buffer of the caller's, without `core::fmt`.
+//! Quantities as characters of a display: integers only, into a buffer of the caller's.
 //!
 //! # One value
 //!
