@@ -45,6 +45,7 @@ const AIRY_RADIUS: u64 = 943_474_998 << 32 | 3_889_147_235;
 /// Result: uas, float arcsec.
 /// Error: at most 0.51 LSB; float 2 ulp.
 #[cfg_attr(target_arch = "avr", inline(always))]
+#[inline(always)]
 pub fn rayleigh_limit_fx(aperture: Micrometres, wavelength: Nanometres) -> Result<Microarcseconds, Error> {
     present(aperture.0, 1)?;
     present(wavelength.0, 2)?;
@@ -199,6 +200,7 @@ pub fn sparrow_limit<F: Real>(aperture_mm: F, wavelength_nm: F) -> Result<F, Err
 ///
 /// Result: uas, float arcsec.
 /// Error: at most 0.51 LSB; float 2 ulp.
+#[inline(always)]
 pub fn airy_fwhm_fx(aperture: Micrometres, wavelength: Nanometres) -> Result<Microarcseconds, Error> {
     present(aperture.0, 1)?;
     present(wavelength.0, 2)?;

@@ -9,6 +9,7 @@
 
 #define FIELDSTOP_NO_FLOAT
 #include "fieldstop.h"
+#include "draw.h"
 #include "part.h"
 
 #ifndef FIRST
@@ -17,34 +18,7 @@
 #endif
 #define HAS_ROW(i) ((i) >= FIRST && (i) < LAST)
 
-static uint32_t state, sum;
-
-static uint32_t next(void)
-{
-    state ^= state << 13;
-    state ^= state >> 17;
-    state ^= state << 5;
-    return state;
-}
-
-/* Half from the usual telescope, half over the whole type by size, with the edges. */
-static uint32_t draw(uint16_t i, uint32_t lowest, uint32_t highest, uint32_t least, uint32_t most)
-{
-    uint32_t x = next();
-
-    if ((i & 1u) == 0u) {
-        return lowest + x % (highest - lowest + 1u);
-    }
-    switch (x & 15u) {
-    case 0: return least;
-    case 1: return most;
-    case 2: return most + 1u;
-    case 3: return 0u;
-    case 4: return 1u;
-    case 5: return most - (next() >> (next() & 31u));
-    default: return next() >> (next() & 31u);
-    }
-}
+static uint32_t sum;
 
 static void fold(uint32_t x)
 {
@@ -76,7 +50,6 @@ static void end(void)
     part_put('\n');
 }
 
-#define DRAW(lowest, highest, least, most) a[n++] = draw(i, lowest, highest, least, most);
 #define ROW(name, draws, call)              \
     static void run_##name(void)            \
     {                                       \
