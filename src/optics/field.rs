@@ -189,7 +189,6 @@ pub fn magnification<F: Real>(focal_length_mm: F, eyepiece_mm: F) -> Result<F, E
 ///
 /// Result: um; float mm. Overflow: 4294967296 um or more.
 /// Error: at most 0.5 LSB; float 2 ulp.
-#[cfg_attr(target_arch = "avr", inline(always))]
 #[inline(always)]
 pub fn exit_pupil_fx(
     aperture: Micrometres,
@@ -370,7 +369,6 @@ pub fn true_field_rectilinear<F: Real>(
 ///
 /// Result: mas; float arcsec. Overflow: 4294967296 mas or more.
 /// Error: at most 0.5 LSB; float 2 ulp.
-#[cfg_attr(target_arch = "avr", inline(always))]
 #[inline(always)]
 pub fn true_field_equidistant_fx(
     apparent_field: Milliarcseconds,
@@ -463,7 +461,6 @@ pub fn plate_scale<F: Real>(focal_length_mm: F) -> Result<F, Error> {
 ///
 /// Result: uas; float arcsec. Overflow: 4294967296 uas or more.
 /// Error: at most 0.51 LSB; float 2 ulp.
-#[cfg_attr(target_arch = "avr", inline(always))]
 #[inline(always)]
 pub fn pixel_scale_fx(pixel: Nanometres, focal_length: Micrometres) -> Result<Microarcseconds, Error> {
     present(pixel.0, 1)?;

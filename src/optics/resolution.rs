@@ -44,7 +44,6 @@ const AIRY_RADIUS: u64 = 943_474_998 << 32 | 3_889_147_235;
 ///
 /// Result: uas, float arcsec.
 /// Error: at most 0.51 LSB; float 2 ulp.
-#[cfg_attr(target_arch = "avr", inline(always))]
 #[inline(always)]
 pub fn rayleigh_limit_fx(aperture: Micrometres, wavelength: Nanometres) -> Result<Microarcseconds, Error> {
     present(aperture.0, 1)?;
