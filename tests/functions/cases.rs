@@ -85,6 +85,25 @@ fn hard(row: &Row) -> impl Iterator<Item = Vec<i64>> {
         .map(|words| words[1..].iter().map(|x| x.parse().unwrap()).collect())
 }
 
+fn usual_value(a: &Argument, r: &mut Random) -> i64 {
+    r.log_uniform(a.usual.0.max(1) as f64, a.usual.1 as f64 + 1.0) as i64
+}
+
+/// `n` sets of usual values for the arguments.
+pub fn usual_arguments(name: &str, arguments: &[Argument], n: usize) -> Vec<Vec<i64>> {
+    let mut r = Random::new(name);
+    (0..n).map(|_| arguments.iter().map(|a| usual_value(a, &mut r)).collect()).collect()
+}
+
+pub fn usual(row: &Row, n: usize) -> Vec<Vec<i64>> {
+    usual_arguments(row.stem, row.arguments, n)
+}
+
+pub fn whole_types(row: &Row, n: usize) -> Vec<Vec<i64>> {
+    let mut r = Random::new(row.stem);
+    (0..n).map(|_| row.arguments.iter().map(|a| whole(a, &mut r)).collect()).collect()
+}
+
 pub fn fixed(row: &Row, n: usize) -> Vec<Vec<i64>> {
     let mut r = Random::new(row.stem);
     let drawn = (0..n)
@@ -92,13 +111,7 @@ pub fn fixed(row: &Row, n: usize) -> Vec<Vec<i64>> {
             let mut case: Vec<i64> = row
                 .arguments
                 .iter()
-                .map(|a| {
-                    if k % 2 == 0 {
-                        r.log_uniform(a.usual.0.max(1) as f64, a.usual.1 as f64 + 1.0) as i64
-                    } else {
-                        whole(a, &mut r)
-                    }
-                })
+                .map(|a| if k % 2 == 0 { usual_value(a, &mut r) } else { whole(a, &mut r) })
                 .collect();
             if k % 8 == 1 {
                 pull_together(row, &mut case, &mut r);

@@ -4,6 +4,7 @@
 mod big;
 mod borders;
 mod cases;
+mod cost_cases;
 mod coverage;
 mod documented;
 mod edges;
