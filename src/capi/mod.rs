@@ -9,6 +9,7 @@ pub mod field;
 pub mod light;
 pub mod resolution;
 pub mod setup;
+mod short;
 pub mod status;
 pub mod text;
 pub mod units;
