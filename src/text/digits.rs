@@ -87,21 +87,17 @@ pub(crate) fn has_at_most(number: u32, digits: usize) -> bool {
     POWERS.checked(digits).is_none_or(|power| number < power)
 }
 
-/// `n` divided by ten so many times; `rounded` to nearest, halves up, or down.
+/// `n` divided by ten so many times, to nearest, halves up.
 #[inline(never)]
-pub(super) fn without_tens(n: u32, tens: u8, rounded: bool) -> u32 {
-    let Some(fifths) = FIFTHS.checked(tens.into()) else { return 0 };
+pub(super) fn without_tens(n: u32, tens: u32) -> u32 {
+    let Some(fifths) = FIFTHS.checked(tens as usize) else { return 0 };
     if tens == 0 {
         return n;
     }
-    let mut halved = n >> (tens - 1);
-    if rounded {
-        // An odd number of halves, which does not overflow when the shift has made room for it.
-        halved = (halved >> 1) + (halved & 1) + (ten_to_the(tens) >> tens >> 1);
-    } else {
-        halved >>= 1;
-    }
-    high(halved, fifths) >> (2 * tens)
+    // The half of the divisor is an odd number of the bits that are shifted out last: no sum overflows.
+    let halves = n >> (tens - 1);
+    let most = (halves >> 1) + (halves & 1) + (POWERS.at(tens as usize) >> tens >> 1);
+    high(most, fifths) >> (2 * tens)
 }
 
 /// `n` divided by sixty to nearest, halves up.
@@ -133,13 +129,8 @@ mod tests {
 
     fn check_tens(n: u32) {
         for tens in 0..=12 {
-            let power = 10u64.pow(tens.into());
-            assert_eq!(u64::from(without_tens(n, tens, false)), u64::from(n) / power, "{n} {tens}");
-            assert_eq!(
-                u64::from(without_tens(n, tens, true)),
-                (u64::from(n) + power / 2) / power,
-                "{n} {tens}"
-            );
+            let power = 10u64.pow(tens);
+            assert_eq!(u64::from(without_tens(n, tens)), (u64::from(n) + power / 2) / power, "{n} {tens}");
         }
     }
 

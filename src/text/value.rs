@@ -1,6 +1,6 @@
 //! A quantity together with the form in which it is shown.
 
-use super::digits::{split_sixty, ten_to_the, without_sixty, without_tens};
+use super::digits::{split_sixty, split_ten, ten_to_the, without_sixty, without_tens};
 use super::style::{DASH, NO, Unit, YES};
 use crate::math::multiply::of_lower_halves;
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
@@ -188,24 +188,31 @@ impl Value {
 
     #[inline(never)]
     fn angle_as(angle: Milliarcseconds, form: AngleForm, decimals: u8) -> Value {
+        let tens = u32::from(3 - decimals);
+        let mut all = angle.0;
         let in_seconds = matches!(form, AngleForm::MinutesSeconds | AngleForm::DecimalSeconds);
-        let mut all = without_tens(angle.0, 3 - decimals, in_seconds);
-        if form == AngleForm::DecimalSeconds {
-            return Value::number(all, decimals, Unit::Second);
+        if !in_seconds {
+            if form == AngleForm::DecimalDegrees {
+                all = split_sixty(all).0;
+                if tens == 0 {
+                    return Value::number(without_sixty(all), decimals, Unit::DecimalDegree);
+                }
+            }
+            // Rounded down, for tens are taken off behind it.
+            all = split_sixty(all).0;
         }
-        if form == AngleForm::DecimalDegrees {
-            return Value::number(without_sixty(split_sixty(all).0), decimals, Unit::DecimalDegree);
-        }
-        let unit = if in_seconds {
-            Unit::Second
-        } else {
-            all = without_sixty(all);
-            Unit::Minute
+        all = without_tens(all, tens);
+        let unit = match form {
+            AngleForm::DecimalDegrees => return Value::number(all, decimals, Unit::DecimalDegree),
+            AngleForm::DecimalSeconds => return Value::number(all, decimals, Unit::Second),
+            AngleForm::MinutesSeconds => Unit::Second,
+            _ => Unit::Minute,
         };
-        let (mut whole, mut power) = (all, 1);
-        if decimals > 0 {
-            (whole, power) = (without_tens(all, decimals, false), ten_to_the(decimals));
+        let mut whole = all;
+        for _ in 0..decimals {
+            whole = split_ten(whole).0;
         }
+        let power = ten_to_the(decimals);
         let (mut left, mut number) = split_sixty(whole);
         let mut groups = 1;
         if in_seconds && left >= 60 {
@@ -220,12 +227,12 @@ impl Value {
     }
 
     /// Any other decimal number: `number` in units of 10^-`places`, shown with at most as many decimals and at most 9.
-    #[cfg_attr(not(target_arch = "avr"), inline(never))]
+    #[inline(always)]
     pub fn decimal(number: u32, places: u8, decimals: u8, unit: Unit) -> Value {
         if decimals > places || decimals > 9 {
             return Value::REFUSED_2;
         }
-        Value::number(without_tens(number, places - decimals, true), decimals, unit)
+        Value::number(without_tens(number, (places - decimals).into()), decimals, unit)
     }
 
     /// The same with a sign.
