@@ -2,14 +2,17 @@
 #include "fieldstop.h"
 #include "screen.h"
 
+static fieldstop_telescope telescope = {0, 0, 0, 65536, 0};
+static fieldstop_eyepiece eyepiece;
+static fieldstop_observer observer = {0, 0, 0, 0, 550};
 static fieldstop_visual_readout readout;
 
 uint32_t setup_compute(const struct screen_input *in)
 {
-    fieldstop_telescope telescope = {in->aperture, in->focal_length, 0, 65536, 0};
-    fieldstop_eyepiece eyepiece = {in->eyepiece, in->field_stop, 0, 0, {0, 0, 0}};
-    fieldstop_observer observer = {0, 0, 0, 0, 550};
-
+    telescope.aperture_um = in->aperture;
+    telescope.focal_length_um = in->focal_length;
+    eyepiece.focal_length_um = in->eyepiece;
+    eyepiece.field_stop_um = in->field_stop;
     return fieldstop_visual_readout_compute(&telescope, &eyepiece, &observer,
                                             FIELDSTOP_VISUAL_MAGNIFICATION | FIELDSTOP_VISUAL_TRUE_FIELD
                                                 | FIELDSTOP_VISUAL_EXIT_PUPIL | FIELDSTOP_VISUAL_RESOLUTION,
