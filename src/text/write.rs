@@ -77,7 +77,7 @@ impl Value {
         let mut text = form.text();
         let mut end = UNIT as u32;
         if !form.is_in_front() {
-            end = put_text(style.text(text), end, places);
+            end = put_text(style, text, end, places);
         }
         let mut start = UNIT as u32;
         if form.is_word() {
@@ -92,7 +92,7 @@ impl Value {
             (number, start) = put_digits(number, decimals | 2 << 24, start, places);
             decimals = 0;
             text = text.wrapping_sub(1);
-            start = put_text_before(style.text(text), start, &mut end, places);
+            start = put_text_before(style, text, start, &mut end, places);
         }
         (_, start) = put_digits(number, decimals, start, places);
         if form.is_negative() {
@@ -100,7 +100,7 @@ impl Value {
             put(b'-', start, places);
         }
         if form.is_in_front() {
-            start = put_text_before(style.text(text), start, &mut end, places);
+            start = put_text_before(style, text, start, &mut end, places);
         }
         Spelled { start, end }
     }
@@ -141,9 +141,10 @@ fn put<P: Place>(byte: u8, at: u32, places: &mut [P; PLACES]) {
     }
 }
 
+/// Writes a text and gives where it ends.
 #[inline(never)]
-fn put_text<P: Place>(text: impl Iterator<Item = u8>, mut at: u32, places: &mut [P; PLACES]) -> u32 {
-    for byte in text {
+fn put_text<P: Place>(style: &impl Look, number: u8, mut at: u32, places: &mut [P; PLACES]) -> u32 {
+    for byte in style.text(number) {
         put(byte, at & 0xffff, places);
         at += 1;
         if !begins_character(byte) {
@@ -154,15 +155,16 @@ fn put_text<P: Place>(text: impl Iterator<Item = u8>, mut at: u32, places: &mut 
 }
 
 /// Writes a text before `start` and gives where it begins; `end` counts what continues a character.
-#[inline(always)]
+#[inline(never)]
 fn put_text_before<P: Place>(
-    text: impl Iterator<Item = u8> + Clone,
+    style: &impl Look,
+    number: u8,
     start: u32,
     end: &mut u32,
     places: &mut [P; PLACES],
 ) -> u32 {
-    let at = start - text.clone().count() as u32;
-    *end += put_text(text, at, places) - start;
+    let at = start - style.text(number).count() as u32;
+    *end += put_text(style, number, at, places) - start;
     at
 }
 
