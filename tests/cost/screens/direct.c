@@ -1,9 +1,8 @@
 /* The screen by direct calls of the library. */
 #include "fieldstop.h"
 #include "screen.h"
-#include <string.h>
 
-static const char labels[4][20] __attribute__((aligned(4))) = {
+static const char labels[4][20] PROGMEM __attribute__((aligned(4))) = {
     "Magnification", "True field   ", "Exit pupil   ", "Resolution   "};
 enum { AT = 13, WIDTH = 7 };
 
@@ -23,7 +22,7 @@ uint32_t direct_text(void)
     uint32_t refused;
     uint16_t n;
 
-    memcpy(screen_lines, labels, sizeof screen_lines);
+    memcpy_P(screen_lines, labels, sizeof screen_lines);
     refused = fieldstop_text_magnification(magnification, 1, style, WIDTH, screen_lines[0] + AT, WIDTH, &n);
     refused |= fieldstop_text_angle(field, FIELDSTOP_ANGLE_BY_SIZE, 0, style, WIDTH, screen_lines[1] + AT, WIDTH, &n);
     refused |= fieldstop_text_length_mm(pupil, 1, style, WIDTH, screen_lines[2] + AT, WIDTH, &n);

@@ -6,6 +6,15 @@
 #define SCREEN_H
 
 #include <stdint.h>
+#include <string.h>
+
+/* On AVR constants stay in program memory by these. */
+#ifdef __AVR__
+#include <avr/pgmspace.h>
+#else
+#define PROGMEM
+#define memcpy_P memcpy
+#endif
 
 extern char screen_lines[4][20];
 
@@ -23,5 +32,7 @@ uint32_t float_printf_compute(const struct screen_input *in);
 uint32_t float_printf_text(void);
 uint32_t float_scaled_compute(const struct screen_input *in);
 uint32_t float_scaled_text(void);
+uint32_t float_dtostrf_compute(const struct screen_input *in);
+uint32_t float_dtostrf_text(void);
 
 #endif
