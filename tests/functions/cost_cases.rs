@@ -50,12 +50,14 @@ fn header(row: &Row) -> String {
         "#define FUNCTION fieldstop_{}_fx\n#define ARGUMENTS {}\n#define WORDS (ARGUMENTS + 1)\n\
          /* Steps to the float unit, and whether signed; the result's last. */\n\
          static const double steps[WORDS] = {{{}}};\nstatic const uint8_t is_signed[WORDS] = {{{}}};\n\
-         /* Bytes that each has in C. */\nstatic const uint8_t bytes[WORDS] = {{{}}};\n{}{}",
+         /* Bytes that each has in C. */\nstatic const uint8_t bytes[WORDS] = {{{}}};\n\
+         /* Whether it is an integer in every form. */\nstatic const uint8_t is_count[WORDS] = {{{}}};\n{}{}",
         row.stem,
         row.arguments.len(),
         list(units.iter().map(|u| format!("{:?}", u.steps)).collect()),
         list(units.iter().map(|u| signed(u.least).to_string()).collect()),
         list(units.iter().map(|u| bytes(u.most).to_string()).collect()),
+        list(units.iter().map(|u| u8::from(u.count).to_string()).collect()),
         table("usual", &usual(row)),
         table("whole", &whole(row)),
     )
