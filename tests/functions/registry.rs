@@ -5,6 +5,8 @@ use super::big::{Big, big};
 use fieldstop::Error;
 
 mod field;
+mod focus;
+mod layout;
 mod light;
 mod resolution;
 mod units;
@@ -149,7 +151,7 @@ impl Row {
 }
 
 pub fn all_rows() -> Vec<Row> {
-    [units::rows(), field::rows(), resolution::rows(), light::rows()].concat()
+    [units::rows(), field::rows(), resolution::rows(), light::rows(), focus::rows(), layout::rows()].concat()
 }
 
 /// Those that FIELDSTOP_ONLY names, for a long run, or all.
@@ -191,6 +193,8 @@ macro_rules! quantities {
         }
     )*};
 }
+quantities!(SignedNanometres Millimetres Millikelvin SignedMillikelvin);
+quantities!(PartsPerBillionPerKelvin SignedPartsPerBillionPerKelvin);
 quantities!(Micrometres SignedMicrometres Nanometres Milliarcseconds SignedMilliarcseconds Microarcseconds
     MilliarcsecondsPerMillimetre Q16 Milli Millimagnitudes MillimagnitudesPerAirmass Bam SignedBam DayMilliseconds);
 impl Real for f32 {
