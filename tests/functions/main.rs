@@ -6,6 +6,7 @@ mod borders;
 mod cases;
 mod cost_cases;
 mod coverage;
+mod degenerate;
 mod documented;
 mod edges;
 mod oracle;

@@ -150,6 +150,11 @@ impl Row {
     }
 }
 
+/// a >= b for what [`Row::in_float_units`] gives: its last digits do not count.
+fn at_least(a: Big, b: Big) -> bool {
+    a > b - big(2f64.powi(-140))
+}
+
 pub fn all_rows() -> Vec<Row> {
     [units::rows(), field::rows(), resolution::rows(), light::rows(), focus::rows(), layout::rows()].concat()
 }

@@ -34,7 +34,7 @@ pub fn rows() -> Vec<Row> {
             |a| big(1000.0) * &a[2] / (&a[0] * &a[1]),
             refocus_temperature_fx fieldstop_refocus_temperature_fx fieldstop_refocus_temperature_f32 fieldstop_refocus_temperature_f64),
         Row {
-            refuses: |i, a| i == 1 && big(1000.0) * &a[1] <= a[0],
+            refuses: |i, a| i == 1 && at_least(a[0].clone(), big(1000.0) * &a[1]),
             ..row!(focus::near_focus_travel [0 FOCAL_LENGTH, 1 ordinary("object_distance_mm", MM, (6_000, 1_000_000))] -> UM, RATIONAL, 2.0,
                 |a| &a[0] * &a[0] / (big(1000.0) * &a[1] - &a[0]),
                 near_focus_travel_fx fieldstop_near_focus_travel_fx fieldstop_near_focus_travel_f32 fieldstop_near_focus_travel_f64)

@@ -21,14 +21,20 @@ fn cone(a: &[Big]) -> (Big, Big, Big) {
 fn refused_cone(i: usize, a: &[Big]) -> bool {
     match i {
         2 => a[2] > a[1],
-        3 => a[3] >= a[0] || &a[0] - &a[3] >= big(2.0) * &a[1],
+        3 => a[3] >= a[0] || at_least(&a[0] - &a[3], big(2.0) * &a[1]),
         _ => false,
     }
 }
 
-/// From the second mirror to the primary's focus, given the primary's and the system's focal length and the back focus.
+/// From the second mirror to the primary's focus, given the primary's and the system's focal length and the back focus,
+/// p = (f1 + b) / (m + 1).
 fn before_focus(a: &[Big]) -> Big {
-    (&a[0] + &a[2]) / (&a[1] / &a[0] + big(1.0))
+    (&a[0] + &a[2]) * &a[0] / (&a[1] + &a[0])
+}
+
+/// f1 - p over one denominator, so that the oracle gives 0 where it is 0.
+fn separation(a: &[Big]) -> Big {
+    &a[0] * (&a[1] - &a[2]) / (&a[1] + &a[0])
 }
 
 /// Of the argument `i` of those three.
@@ -105,7 +111,7 @@ pub fn rows() -> Vec<Row> {
         Row {
             refuses: refused_mirrors,
             ..row!(layout::secondary_separation [0 PRIMARY, 1 SYSTEM, 2 BACK_FOCUS] -> UM, RATIONAL, 2.0,
-                |a| &a[0] - before_focus(a),
+                separation,
                 secondary_separation_fx fieldstop_secondary_separation_fx fieldstop_secondary_separation_f32 fieldstop_secondary_separation_f64)
         },
         Row {
@@ -117,7 +123,7 @@ pub fn rows() -> Vec<Row> {
         Row {
             refuses: refused_mirrors,
             ..row!(layout::secondary_field_margin [0 PRIMARY, 1 SYSTEM, 2 BACK_FOCUS, 3 LIT_FIELD] -> UM, RATIONAL, 2.0,
-                |a| &a[3] * (&a[0] - before_focus(a)) / &a[1],
+                |a| &a[3] * separation(a) / &a[1],
                 secondary_field_margin_fx fieldstop_secondary_field_margin_fx fieldstop_secondary_field_margin_f32 fieldstop_secondary_field_margin_f64)
         },
         Row {
