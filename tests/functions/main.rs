@@ -9,6 +9,7 @@ mod coverage;
 mod degenerate;
 mod documented;
 mod edges;
+mod layout_properties;
 mod oracle;
 mod properties;
 mod registry;
