@@ -2748,7 +2748,7 @@ fieldstop_status fieldstop_illumination_f64(double beam_mm,
  * sqrt(L^2 + (D/2)^2) (geometry).
  * Caution: a moving mount can hurt. Stay clear of all that it can reach, dew caps, counterweights and cables too,
  * and follow the maker's instructions and local rules.
- * Error: at most 0.51 LSB.
+ * Error: at most 0.5 LSB.
  * Statuses: null pointer, overflow.
  */
 FIELDSTOP_CHECKED

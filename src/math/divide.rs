@@ -326,14 +326,19 @@ mod tests {
                 // The fraction's bits below the shifted divisor are dropped.
                 assert!(got == exact || got.map(|q| q + 1) == exact && fraction != 0, "{n}.{fraction} / {d}");
             }
-            let n96 = [n as u32, (n >> 32) as u32, upper, fraction >> (wide_d & 31)];
-            let d96 = [d, wide_d as u32, (wide_d >> 32) as u32 >> (n & 31)];
-            let joined =
-                |words: &[u32]| words.iter().rev().fold(0u128, |sum, &word| sum << 32 | word as u128);
-            if joined(&d96) != 0 {
-                let (n, d) = (joined(&n96), joined(&d96));
-                let exact = u32::try_from(n / d + (n % d >= d - n % d) as u128).ok();
-                assert_eq!(by_96(&n96, &d96).ok(), exact, "{n} / {d}");
+            // As drawn, beside a multiple of d and of d without its lowest word, and half way to the next.
+            let words = |n: u128| [0, 32, 64, 96].map(|shift| (n >> shift) as u32);
+            let d128 = ((wide_d as u128) << 32 | d as u128) >> (n & 31);
+            if d128 != 0 {
+                let drawn = (fraction as u128) << 96 >> (n & 63) | (n as u128) << 32 | upper as u128;
+                let multiple = upper as u128 * d128;
+                let less = upper as u128 * (d128 >> 32 << 32) + fraction as u128;
+                let near = (n >> (n & 63)) as u128;
+                for n in [drawn, multiple + near, multiple.saturating_sub(near), less, multiple + d128 / 2] {
+                    let [d0, d1, d2, _] = words(d128);
+                    let exact = u32::try_from(n / d128 + (n % d128 >= d128 - n % d128) as u128).ok();
+                    assert_eq!(by_96(&words(n), &[d0, d1, d2]).ok(), exact, "{n} / {d128}");
+                }
             }
             if wide_d != 0 {
                 let n128 = (upper as u128) << 64 | n as u128;

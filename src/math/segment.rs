@@ -77,6 +77,9 @@ fn half_root(height: u64) -> u32 {
     root::rounded(height).unwrap_or(1 << 31)
 }
 
+/// A whole disc in the steps of [`share_inside`], 2^-28.
+pub(crate) const WHOLE: u32 = 1 << 28;
+
 /// The share of the smaller of two discs that lies inside the other, in steps of 2^-28, within 2^-24. Their edges cross:
 /// the diameters are `small` and `large`, and `apart`, twice the distance of the centres, is between their difference
 /// and their sum.
@@ -96,7 +99,7 @@ pub(crate) fn share_inside(small: u32, large: u32, apart: u64) -> u32 {
     let chord =
         high((of_small >> 31).min(u32::MAX as u64) as u32, (rest_of_small >> 31).min(u32::MAX as u64) as u32);
     let large_part = high(chord, sine); // 2^-27
-    ((small_part >> 2) + large_part).min(1 << 28)
+    ((small_part >> 2) + large_part).min(WHOLE)
 }
 
 /// t - sin t cos t, to the last places also for a small angle.

@@ -1,12 +1,12 @@
 //! How much of a beam a stop lets through.
 
 use super::present;
-use crate::math::divide::{self, divide};
+use crate::math::divide::divide;
 #[cfg(feature = "float")]
 use crate::math::double::Double;
 #[cfg(feature = "float")]
 use crate::math::float::{Real, not_negative, positive};
-use crate::math::multiply::{high, wide};
+use crate::math::multiply::high;
 use crate::math::segment;
 use crate::status::Error;
 use crate::units::{Micrometres, Q16};
@@ -40,14 +40,11 @@ pub fn illumination_fx(beam: Micrometres, stop: Micrometres, offset: Micrometres
         let share = segment::share_inside(beam, stop, apart);
         return Ok(Q16((share + (1 << 11)) >> 12));
     }
-    if apart <= (beam - stop) as u64 {
-        let square = wide(stop, stop);
-        return divide::by_64((square >> 48) as u32, square << 16, wide(beam, beam)).map(Q16);
-    }
     // The share of the stop's disc, and that disc's of the beam's.
+    let inside = apart <= (beam - stop) as u64;
+    let share = if inside { segment::WHOLE } else { segment::share_inside(stop, beam, apart) };
     let ratio = divide((stop as u64) << 32, beam).0;
-    let share = high(segment::share_inside(stop, beam, apart), high(ratio, ratio));
-    Ok(Q16((share + (1 << 11)) >> 12))
+    Ok(Q16((high(share, high(ratio, ratio)) + (1 << 11)) >> 12))
 }
 
 /// Float form of [`illumination_fx`].

@@ -139,7 +139,7 @@ pub fn rows() -> Vec<Row> {
                 |a| illumination(&a[0], &a[1], &a[2]),
                 illumination_fx fieldstop_illumination_fx fieldstop_illumination_f32 fieldstop_illumination_f64)
         },
-        row!(layout::swing_radius [0 ordinary("reach_um", UM, (300_000, 2_000_000)), 1 ordinary("tube_diameter_um", UM, (60_000, 600_000))] -> UM, IRRATIONAL, 2.0,
+        row!(layout::swing_radius [0 ordinary("reach_um", UM, (300_000, 2_000_000)), 1 ordinary("tube_diameter_um", UM, (60_000, 600_000))] -> UM, RATIONAL, 2.0,
             |a| (&a[0] * &a[0] + &a[1] * &a[1] / big(4.0)).sqrt(),
             swing_radius_fx fieldstop_swing_radius_fx fieldstop_swing_radius_f32 fieldstop_swing_radius_f64),
         Row {
