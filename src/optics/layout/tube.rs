@@ -66,7 +66,7 @@ pub fn eyepiece_height_fx(
     allowed((0..=QUARTER_TURN).contains(&altitude.0), 3)?;
     // The sine is in steps of 2^-62; the lower 32 bits of the product are nothing.
     let (upper, lower) = wide_by(sine::sine(altitude.0 as u32) as u64, reach.0.unsigned_abs());
-    let rise = ((upper as u64) << 32 | lower >> 32) + (1 << 29) >> 30;
+    let rise = (((upper as u64) << 32 | lower >> 32) + (1 << 29)) >> 30;
     let rise = if reach.0 < 0 { -(rise as i64) } else { rise as i64 };
     u32::try_from(axis_height.0 as i64 + rise).map(Micrometres).map_err(|_| Error::OVERFLOW)
 }
@@ -78,7 +78,7 @@ pub fn eyepiece_height<F: Real>(axis_height_mm: F, reach_mm: F, altitude_deg: F)
     either_sign(reach_mm, 2)?;
     from_zero_to(90.0, altitude_deg, 3)?;
     let angle = Double::of(core::f64::consts::PI / 180.0) * altitude_deg;
-    let sine = angle.upper.sin() + angle.lower * angle.upper.cos();
-    let height = axis_height_mm + reach_mm * sine;
+    let sine = Double::sum(angle.upper.sin(), angle.lower * angle.upper.cos());
+    let height = (sine * reach_mm + Double::from(axis_height_mm)).upper;
     if height < F::of(0.0) { Err(Error::OVERFLOW) } else { Ok(height) }
 }
