@@ -11,6 +11,7 @@ pub mod layout;
 pub mod light;
 pub mod resolution;
 pub mod setup;
+mod short;
 pub mod status;
 pub mod text;
 pub mod units;

@@ -125,21 +125,12 @@ pub(crate) fn scaled(a: u32, b: u32, d: u32) -> Result<u32, Error> {
     rounded(wide(a, b), d)
 }
 
-/// (n + fraction / 2^32) / d to the nearest integer. `d` is not 0.
+/// (n + fraction / 2^32) / d to the nearest integer. `d` is not 0; n + d is below 2^64.
 #[inline(always)]
 pub(crate) fn with_fraction(n: u64, fraction: u32, d: u32) -> Result<u32, Error> {
-    if (n >> 32) as u32 >= d {
-        return Err(Error::OVERFLOW);
-    }
-    if cfg!(target_arch = "avr") {
-        // The same without a rest: its first bit below the point decides where `d` is odd.
-        let half = (fraction & !d) >> 31;
-        return rounded_up(n, (d + half) >> 1, d);
-    }
-    let (d, shift) = normalise(d);
-    let n = shift_up(n, shift) | ((fraction >> 1) >> (31 - shift)) as u64;
-    let (quotient, rest) = divide_normalised(n, d);
-    up_if(quotient, rest >= d - rest)
+    // Without a rest: the first bit below the point decides where `d` is odd.
+    let half = (fraction & !d) >> 31;
+    rounded_up(n, (d + half) >> 1, d)
 }
 
 /// A positive constant in steps of 2^-32.
