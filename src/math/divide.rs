@@ -3,7 +3,7 @@
 
 #[cfg(not(target_arch = "avr"))]
 use super::multiply::high;
-use super::multiply::{long, wide};
+use super::multiply::wide;
 use crate::status::Error;
 use crate::stored::stored;
 
@@ -203,11 +203,17 @@ pub(crate) fn by_64_of(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
     up_if(quotient, rest >= d - rest)
 }
 
-/// a b / (c d) to the nearest integer, halves up. Neither c nor d is 0, and c d is below 2^96.
+/// n / d to the nearest integer, halves up: `n` of 128 bits in its two upper words and the rest, `d` of 96 in its upper
+/// one and the rest. `d` is not 0.
 #[inline(always)]
-pub(crate) fn long_ratio(a: u64, b: u64, c: u64, d: u64) -> Result<u32, Error> {
-    let [d0, d1, d2, _] = long(c, d);
-    by_96(&long(a, b), &[d0, d1, d2])
+pub(crate) fn by_wide(n: (u32, u32, u64), d: (u32, u64)) -> Result<u32, Error> {
+    let ((n3, n2, n_lower), (d2, d_lower)) = (n, d);
+    if n3 == 0 && d2 == 0 {
+        return by_64(n2, n_lower, d_lower);
+    }
+    let words = |x: u64| (x as u32, (x >> 32) as u32);
+    let ((n0, n1), (d0, d1)) = (words(n_lower), words(d_lower));
+    by_96(&[n0, n1, n2, n3], &[d0, d1, d2])
 }
 
 /// n / d to the nearest integer, halves up, for words from the lowest on: from memory, as above. `d` is not 0.

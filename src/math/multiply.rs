@@ -37,15 +37,6 @@ pub(crate) fn wide_by(a: u64, b: u32) -> (u32, u64) {
     ((upper >> 32) as u32, upper << 32 | lower & 0xffff_ffff)
 }
 
-/// The product of two numbers of 64 bits, its words from the lowest on.
-#[inline(never)]
-pub(crate) fn long(a: u64, b: u64) -> [u32; 4] {
-    let (upper, lower) = wide_by(a, b as u32);
-    let (more_upper, more_lower) = wide_by(a, (b >> 32) as u32);
-    let (middle, carry) = more_lower.overflowing_add((upper as u64) << 32 | lower >> 32);
-    [lower as u32, middle as u32, (middle >> 32) as u32, more_upper + carry as u32]
-}
-
 /// The upper 32 bits of the product.
 #[inline(always)]
 pub(crate) fn high(a: u32, b: u32) -> u32 {

@@ -10,12 +10,14 @@ use crate::math::multiply::{wide, wide_by};
 use crate::status::Error;
 use crate::units::Micrometres;
 
-/// What the diagonal's size and offset are made of: D - F, 2 f - (D - F), 2 f + (D - F) and 2 f w, all exact.
+/// What the diagonal's size and offset are made of, all exact.
 struct Cone {
+    /// D - F
     narrowing: u32,
-    below: u64,
-    above: u64,
+    /// 2 f w, at most f D
     width: u64,
+    /// (2 f)^2 (1 - g^2): the upper 32 and the lower 64 bits
+    slope: (u32, u64),
 }
 
 /// The four arguments of the diagonal, checked.
@@ -30,14 +32,14 @@ fn cone(
     present(focal_length.0, 2)?;
     allowed(focus_distance.0 <= focal_length.0, 3)?;
     allowed(lit_field.0 < aperture.0, 4)?;
-    let (narrowing, twice) = (aperture.0 - lit_field.0, (focal_length.0 as u64) << 1);
-    allowed((narrowing as u64) < twice, 4)?;
+    let narrowing = aperture.0 - lit_field.0;
+    allowed(narrowing >> 1 < focal_length.0, 4)?;
+    let square = wide(focal_length.0, focal_length.0);
+    let (lower, borrow) = (square << 2).overflowing_sub(wide(narrowing, narrowing));
     Ok(Cone {
         narrowing,
-        below: twice - narrowing as u64,
-        above: twice + narrowing as u64,
-        // At most f D.
         width: wide(lit_field.0, focal_length.0) + wide(narrowing, focus_distance.0),
+        slope: ((square >> 62) as u32 - borrow as u32, lower),
     })
 }
 
@@ -63,19 +65,10 @@ pub fn diagonal_minor_axis_fx(
     focus_distance: Micrometres,
     lit_field: Micrometres,
 ) -> Result<Micrometres, Error> {
-    let Cone { below, above, width, .. } = cone(aperture, focal_length, focus_distance, lit_field)?;
-    // 4 f (2 f w) / (below above)
-    if focal_length.0 >> 31 == 0 {
-        let (upper, lower) = wide_by(width << 1, focal_length.0 << 1);
-        return divide::by_64(upper, lower, product(below, above)).map(Micrometres);
-    }
-    divide::long_ratio(width, (focal_length.0 as u64) << 2, below, above).map(Micrometres)
-}
-
-/// Of lengths for a focal length under 2^31 um, where the first has 32 bits and the product 64.
-#[inline(always)]
-fn product(below: u64, above: u64) -> u64 {
-    wide_by(above, below as u32).1
+    let Cone { width, slope, .. } = cone(aperture, focal_length, focus_distance, lit_field)?;
+    // 4 f (2 f w) over it
+    let (upper, lower) = wide_by(width, focal_length.0);
+    divide::by_wide((upper >> 30, upper << 2 | (lower >> 62) as u32, lower << 2), slope).map(Micrometres)
 }
 
 /// The cone of [`cone`]: D - F, 2 f - (D - F), 2 f + (D - F) and 2 f w, in twice the digits.
@@ -139,13 +132,10 @@ pub fn diagonal_offset_fx(
     focus_distance: Micrometres,
     lit_field: Micrometres,
 ) -> Result<Micrometres, Error> {
-    let Cone { narrowing, below, above, width } = cone(aperture, focal_length, focus_distance, lit_field)?;
-    // (2 f w) (D - F) / (below above)
-    if focal_length.0 >> 31 == 0 {
-        let (upper, lower) = wide_by(width, narrowing);
-        return divide::by_64(upper, lower, product(below, above)).map(Micrometres);
-    }
-    divide::long_ratio(width, narrowing as u64, below, above).map(Micrometres)
+    let Cone { narrowing, width, slope } = cone(aperture, focal_length, focus_distance, lit_field)?;
+    // (2 f w) (D - F) over it
+    let (upper, lower) = wide_by(width, narrowing);
+    divide::by_wide((0, upper, lower), slope).map(Micrometres)
 }
 
 /// Float form of [`diagonal_offset_fx`].

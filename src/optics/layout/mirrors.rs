@@ -152,14 +152,12 @@ pub fn secondary_field_margin_fx(
     lit_field: Micrometres,
 ) -> Result<Micrometres, Error> {
     checked(1, primary_focal.0, system_focal.0, back_focus.0)?;
-    // i f1 (F - b) / (F (F + f1))
-    let sum = primary_focal.0 as u64 + system_focal.0 as u64;
+    // i f1 (F - b) / (F F + F f1)
     let left = wide(primary_focal.0, system_focal.0 - back_focus.0);
-    if sum >> 32 == 0 {
-        let (upper, lower) = wide_by(left, lit_field.0);
-        return divide::by_64(upper, lower, wide(sum as u32, system_focal.0)).map(Micrometres);
-    }
-    divide::long_ratio(left, lit_field.0 as u64, sum, system_focal.0 as u64).map(Micrometres)
+    let (upper, lower) = wide_by(left, lit_field.0);
+    let (below, carry) =
+        wide(system_focal.0, system_focal.0).overflowing_add(wide(system_focal.0, primary_focal.0));
+    divide::by_wide((0, upper, lower), (carry as u32, below)).map(Micrometres)
 }
 
 /// Float form of [`secondary_field_margin_fx`].
@@ -195,15 +193,18 @@ pub fn secondary_radius_fx(
     back_focus: Micrometres,
 ) -> Result<Micrometres, Error> {
     checked(1, primary_focal.0, system_focal.0, back_focus.0)?;
-    // 2 f1 F (f1 + b) / ((F + f1) (F - f1))
-    let sum = primary_focal.0 as u64 + system_focal.0 as u64;
-    let twice_reach = (primary_focal.0 as u64 + back_focus.0 as u64) << 1;
-    let (focals, difference) = (wide(primary_focal.0, system_focal.0), system_focal.0 - primary_focal.0);
-    if sum >> 31 == 0 {
-        let (upper, lower) = wide_by(focals, twice_reach as u32);
-        return divide::by_64(upper, lower, wide(sum as u32, difference)).map(Micrometres);
+    // 2 f1 F (f1 + b) / (F F - f1 f1)
+    let focals = wide(primary_focal.0, system_focal.0);
+    let below = wide(system_focal.0, system_focal.0) - wide(primary_focal.0, primary_focal.0);
+    let (reach, beyond) = primary_focal.0.overflowing_add(back_focus.0);
+    let (upper, lower) = wide_by(focals, reach);
+    let (mut top, mut middle) = (0, (upper as u64) << 32 | lower >> 32);
+    if beyond {
+        let (sum, carry) = middle.overflowing_add(focals);
+        (top, middle) = (carry as u32, sum);
     }
-    divide::long_ratio(focals, twice_reach, sum, difference as u64).map(Micrometres)
+    let (n3, n2) = (top << 1 | (middle >> 63) as u32, (middle >> 31) as u32);
+    divide::by_wide((n3, n2, middle << 33 | (lower as u32 as u64) << 1), (0, below)).map(Micrometres)
 }
 
 /// Float form of [`secondary_radius_fx`].
