@@ -175,3 +175,12 @@ fn results_at_the_ends_of_their_types() {
         vec![-rise as i64 + aside(r) % 3, reach, altitude]
     });
 }
+
+/// A lit field of nearly nothing under a cone of 45 degrees: beyond what the type holds.
+#[test]
+fn a_cone_beyond_a_float() {
+    use fieldstop::{Error, optics::layout::*};
+    let least = f32::from_bits(1);
+    assert_eq!(diagonal_minor_axis(200.0, 100.0, 50.0, least), Err(Error::OVERFLOW));
+    assert_eq!(diagonal_offset(200.0, 100.0, 50.0, f64::from_bits(1)), Err(Error::OVERFLOW));
+}
