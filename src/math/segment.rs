@@ -107,7 +107,7 @@ pub(crate) fn share_inside(small: u32, large: u32, apart: u64) -> u32 {
 #[cfg(feature = "float")]
 pub(crate) fn segment_area<F: Real>(t: F) -> F {
     if t > F::of(0.5) {
-        return t - t.sin() * t.cos();
+        return t - F::of(0.5) * (t + t).sin();
     }
     let (one, square) = (F::of(1.0), F::of(4.0) * t * t);
     let tail = one - square * F::of(1.0 / 210.0) * (one - square * F::of(1.0 / 272.0));

@@ -78,7 +78,9 @@ pub fn eyepiece_height<F: Real>(axis_height_mm: F, reach_mm: F, altitude_deg: F)
     either_sign(reach_mm, 2)?;
     from_zero_to(90.0, altitude_deg, 3)?;
     let angle = Double::of(core::f64::consts::PI / 180.0) * altitude_deg;
-    let sine = Double::sum(angle.upper.sin(), angle.lower * angle.upper.cos());
+    let sine = angle.upper.sin();
+    let cosine = ((F::of(1.0) - sine) * (F::of(1.0) + sine)).sqrt(); // near enough for the lower part
+    let sine = Double::sum(sine, angle.lower * cosine);
     let height = (sine * reach_mm + Double::from(axis_height_mm)).upper;
     if height < F::of(0.0) { Err(Error::OVERFLOW) } else { Ok(height) }
 }
