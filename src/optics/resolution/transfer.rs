@@ -77,13 +77,14 @@ fn over(n: u64, d: u32) -> u64 {
 
 /// The square root of `x`, 0 to 1 in steps of 2^-48, in steps of 2^-63.
 fn square_root(x: u64) -> u64 {
-    // Newton's step from the nearest of 2^-31.
+    // Newton's step from the nearest of 2^-31: what its square leaves of x is at most as large as itself.
     let x = x << 14;
     match root::rounded(x) {
         Ok(near) if near != 0 => {
-            let (whole, rest) = divide(x, near);
-            let quotient = (whole as u64) << 32 | divide((rest as u64) << 32, near).0 as u64;
-            (((near as u64) << 32) >> 1) + (quotient >> 1)
+            let left = x.wrapping_sub(wide(near, near)) as i64;
+            let step = divide(left.unsigned_abs() << 31, near).0 as u64;
+            let near = (near as u64) << 32;
+            if left < 0 { near - step } else { near + step }
         }
         _ => 0,
     }
