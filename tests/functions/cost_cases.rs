@@ -27,12 +27,15 @@ fn whole(row: &Row) -> Vec<Vec<i64>> {
     accepted(row, cases::whole_types(row, 64 * WHOLE).into_iter(), WHOLE)
 }
 
-/// A table of words; a negative one is written as its 32 bits.
+/// Words; a negative one is written as its 32 bits.
+fn joined(case: &[i64]) -> String {
+    case.iter().map(|&x| format!("{}u", x as u32)).collect::<Vec<_>>().join(", ")
+}
+
 fn table(name: &str, cases: &[Vec<i64>]) -> String {
     let mut text = format!("static const uint32_t {name}[][WORDS] = {{\n");
     for case in cases {
-        let words: Vec<String> = case.iter().map(|&x| format!("{}u", x as u32)).collect();
-        writeln!(text, "    {{{}}},", words.join(", ")).unwrap();
+        writeln!(text, "    {{{}}},", joined(case)).unwrap();
     }
     text + "};\n"
 }
@@ -54,15 +57,37 @@ fn header(row: &Row) -> String {
     )
 }
 
-/// Telescopes, for the screens: the usual arguments of their four functions at once.
+/// Telescopes, for the screens: the usual arguments of their four functions at once. The rest of the equipment is beside
+/// them, in a struct.
 fn telescopes(rows: &[Row]) -> String {
-    let argument = |name: &str| *rows.iter().flat_map(|r| r.arguments).find(|a| a.name == name).unwrap();
-    let arguments: Vec<Argument> =
-        ["aperture_um", "focal_length_um", "eyepiece_um", "field_stop_um", "wavelength_nm"]
-            .map(argument)
-            .to_vec();
-    let drawn = cases::usual_arguments("telescopes", &arguments, USUAL);
-    format!("#define WORDS {}\n{}", arguments.len(), table("usual", &drawn))
+    let argument = |name: &&str| *rows.iter().flat_map(|r| r.arguments).find(|a| a.name == *name).unwrap();
+    let draw = |stream: &str, names: &[&str]| {
+        let arguments: Vec<Argument> = names.iter().map(argument).collect();
+        cases::usual_arguments(stream, &arguments, USUAL)
+    };
+    let drawn = draw(
+        "telescopes",
+        &["aperture_um", "focal_length_um", "eyepiece_um", "field_stop_um", "wavelength_nm"],
+    );
+    let members = [
+        "obstruction_q16",
+        "amplification_q16",
+        "throughput_q16",
+        "apparent_field_mas",
+        "pixel_nm",
+        "pixel_count",
+        "naked_eye_mmag",
+        "eye_pupil_um",
+        "seeing_uas",
+    ];
+    let equipment: Vec<String> =
+        draw("equipment", &members).iter().map(|values| format!("    {{{}}},", joined(values))).collect();
+    format!(
+        "#define WORDS 5\n{}static const struct equipment {{\n    uint32_t {};\n}} equipment[] = {{\n{}\n}};\n",
+        table("usual", &drawn),
+        members.join(", "),
+        equipment.join("\n")
+    )
 }
 
 #[test]
