@@ -1,4 +1,4 @@
-/* The screen by hand: float formulas, and newlib's snprintf or its snprintf without float. */
+/* The screen by hand: float formulas, and snprintf with %f, or the numbers scaled and newlib's snprintf for integers. */
 #include <math.h>
 #include <stdio.h>
 
