@@ -63,6 +63,12 @@ impl<T: Copy, const N: usize> Stored<[T; N]> {
         copy(&self.0[index])
     }
 
+    /// A copy of one entry, if there is one.
+    #[inline(always)]
+    pub(crate) fn checked(&self, index: usize) -> Option<T> {
+        self.0.get(index).map(copy)
+    }
+
     /// One entry, where it is.
     #[allow(unsafe_code)]
     #[inline(always)]

@@ -5,6 +5,8 @@ use core::ptr::{null, null_mut};
 use fieldstop::capi::text::*;
 use fieldstop::setup::{CameraReadout, VisualReadout};
 use fieldstop::text::*;
+use fieldstop::units::*;
+use proptest::prelude::*;
 
 const ASCII: &TextStyle = &TextStyle::ASCII;
 
@@ -272,4 +274,50 @@ fn constants() {
         }
     }
     assert_eq!((FIELDSTOP_UNIT_WATT, FIELDSTOP_UNIT_FOCAL_RATIO), (Unit::Watt as u8, Unit::FocalRatio as u8));
+}
+
+/// What C and Rust say to the same value, in a buffer of one size and behind it.
+fn the_same(
+    value: Value,
+    width: u8,
+    capacity: u16,
+    call: impl Fn(*const TextStyle, *mut c_char, u16, *mut u16) -> u16,
+) {
+    for style in [&TextStyle::ASCII, &TextStyle::UTF8] {
+        let (mut of_c, mut of_rust) = ([0x55u8; 40], [0x55u8; 40]);
+        let mut length = 0xabcd;
+        let status = call(style, of_c.as_mut_ptr().cast(), capacity, &mut length);
+        match value.write(style, width, &mut of_rust[..capacity.into()]) {
+            Ok(bytes) => assert_eq!((status, usize::from(length)), (0, bytes), "{value:?}"),
+            Err(error) => assert_eq!((status & 0xff, length), (error.cause() as u16, 0xabcd), "{value:?}"),
+        }
+        assert_eq!(of_c, of_rust, "{value:?}");
+    }
+}
+
+proptest! {
+    #![proptest_config(ProptestConfig::with_cases(4096))]
+    /// C has a short way of its own.
+    #[test]
+    fn c_writes_what_rust_writes(
+        bits in 0u32..=32, drawn: u32, decimals in 0u8..=5, width in 0u8..=12, capacity in 0u16..=14, form in 0u8..=4,
+    ) {
+        let n = (u64::from(drawn) & ((1 << bits) - 1)) as u32;
+        the_same(Value::millimetres(Micrometres(n), decimals), width, capacity, |style, text, capacity, length| unsafe {
+            fieldstop_text_length_mm(n, decimals, style, width, text, capacity, length)
+        });
+        the_same(Value::magnification(Q16(n), decimals), width, capacity, |style, text, capacity, length| unsafe {
+            fieldstop_text_magnification(n, decimals, style, width, text, capacity, length)
+        });
+        the_same(Value::magnitude(Millimagnitudes(n as i32), decimals), width, capacity, |style, text, capacity, length| unsafe {
+            fieldstop_text_magnitude(n as i32, decimals, style, width, text, capacity, length)
+        });
+        the_same(Value::count(n, Unit::SecondPerMillimetre), width, capacity, |style, text, capacity, length| unsafe {
+            fieldstop_text_count(n, FIELDSTOP_UNIT_SECOND_PER_MILLIMETRE, style, width, text, capacity, length)
+        });
+        let angle_form = AngleForm::from_number(form).unwrap();
+        the_same(Value::angle(Milliarcseconds(n), angle_form, decimals), width, capacity, |style, text, capacity, length| unsafe {
+            fieldstop_text_angle(n, form, decimals, style, width, text, capacity, length)
+        });
+    }
 }

@@ -1,16 +1,17 @@
 //! C exports of `text`.
 
-use super::fieldstop_status;
+use super::{fieldstop_status, short};
 use crate::setup::{CameraReadout, VisualReadout};
 use crate::status::{Cause, Error};
 use crate::stored::{Stored, stored, stored_text};
 use crate::text::{
-    AngleForm, CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, CameraRow, Look, Span, StyleOfC, TextStyle,
-    Unit, VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C, Value, VisualRow, camera_row, change, row_of,
-    visual_row, write_line,
+    AngleForm, CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, CameraRow, Look, Place, Span, StyleOfC,
+    TextStyle, Unit, VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C, Value, VisualRow, camera_row, change,
+    row_of, visual_row, write_line,
 };
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
 use core::ffi::c_char;
+use core::mem::MaybeUninit;
 use core::slice;
 
 /// Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on.
@@ -486,11 +487,11 @@ pub unsafe extern "C" fn fieldstop_text_visual_value(
     }
     // SAFETY: not null, and the caller's promise about the pointers.
     unsafe {
-        fill(style, [3, 5, 7], text, capacity, length, |style, out| {
-            let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
-            let row = visual_row(&*readout, row);
-            row.value.write_as(style, width, out)
-        })
+        let value = match VisualRow::from_number(row) {
+            Some(row) => visual_row(&*readout, row).value,
+            None => Value::REFUSED_2,
+        };
+        write(&value, style, [3, width], text, capacity, length)
     }
 }
 
@@ -515,11 +516,11 @@ pub unsafe extern "C" fn fieldstop_text_visual_number(
     }
     // SAFETY: not null, and the caller's promise about the pointers.
     unsafe {
-        fill(style, [3, 5, 7], text, capacity, length, |style, out| {
-            let row = VisualRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
-            let row = visual_row(&*readout, row);
-            row.value.without_unit().write_as(style, width, out)
-        })
+        let value = match VisualRow::from_number(row) {
+            Some(row) => visual_row(&*readout, row).value.without_unit(),
+            None => Value::REFUSED_2,
+        };
+        write(&value, style, [3, width], text, capacity, length)
     }
 }
 
@@ -623,11 +624,11 @@ pub unsafe extern "C" fn fieldstop_text_camera_value(
     }
     // SAFETY: not null, and the caller's promise about the pointers.
     unsafe {
-        fill(style, [3, 5, 7], text, capacity, length, |style, out| {
-            let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
-            let row = camera_row(&*readout, row);
-            row.value.write_as(style, width, out)
-        })
+        let value = match CameraRow::from_number(row) {
+            Some(row) => camera_row(&*readout, row).value,
+            None => Value::REFUSED_2,
+        };
+        write(&value, style, [3, width], text, capacity, length)
     }
 }
 
@@ -652,11 +653,11 @@ pub unsafe extern "C" fn fieldstop_text_camera_number(
     }
     // SAFETY: not null, and the caller's promise about the pointers.
     unsafe {
-        fill(style, [3, 5, 7], text, capacity, length, |style, out| {
-            let row = CameraRow::from_number(row).ok_or(Error::new(Cause::OutOfRange, 2))?;
-            let row = camera_row(&*readout, row);
-            row.value.without_unit().write_as(style, width, out)
-        })
+        let value = match CameraRow::from_number(row) {
+            Some(row) => camera_row(&*readout, row).value.without_unit(),
+            None => Value::REFUSED_2,
+        };
+        write(&value, style, [3, width], text, capacity, length)
     }
 }
 
@@ -762,11 +763,11 @@ const fn null(position: u8) -> fieldstop_status {
 }
 
 /// Copies a text into `out` and tells its length.
-fn put(text: impl ExactSizeIterator<Item = u8>, out: &mut [u8]) -> Result<usize, Error> {
-    let length = text.len();
+fn put<P: Place>(text: impl Iterator<Item = u8> + Clone, out: &mut [P]) -> Result<usize, Error> {
+    let length = text.clone().count();
     let out = out.get_mut(..length).ok_or(Error::new(Cause::NoRoom, 0))?;
     for (place, byte) in out.iter_mut().zip(text) {
-        *place = byte;
+        *place = P::of(byte);
     }
     Ok(length)
 }
@@ -786,7 +787,22 @@ unsafe fn write(
 ) -> fieldstop_status {
     let positions = [style_position, style_position + 2, style_position + 4];
     // SAFETY: the caller's promise about the pointers.
-    unsafe { fill(style, positions, text, capacity, length, |style, out| value.write_as(style, width, out)) }
+    unsafe {
+        fill(style, positions, text, capacity, length, |style, out| {
+            if let Some(short) = value.short()
+                && width > 0
+                && !style.is_utf8()
+                && out.len() >= width.into()
+            {
+                return if short::put(short, style, out.as_mut_ptr().cast(), width.into()) {
+                    Ok(width.into())
+                } else {
+                    Err(Error::new(Cause::NoRoom, 0))
+                };
+            }
+            value.write_as(style, width, out)
+        })
+    }
 }
 
 /// Checks the pointers, has the text written and gives its length.
@@ -800,7 +816,7 @@ unsafe fn fill(
     text: *mut c_char,
     capacity: u16,
     length: *mut u16,
-    write: impl FnOnce(&StyleOfC, &mut [u8]) -> Result<usize, Error>,
+    write: impl FnOnce(&StyleOfC, &mut [MaybeUninit<u8>]) -> Result<usize, Error>,
 ) -> fieldstop_status {
     if style.is_null() {
         return null(style_position);

@@ -4,6 +4,9 @@
 
 #[cfg(target_arch = "avr")]
 use crate::math::avr::times_repeated;
+use crate::math::multiply::high;
+#[cfg(any(test, feature = "capi"))]
+use crate::math::multiply::of_lower_halves;
 use crate::stored::stored;
 
 #[cfg(target_arch = "avr")]
@@ -35,6 +38,22 @@ pub(super) fn split_ten(n: u32) -> (u32, u8) {
     (quotient, (n - quotient * 10) as u8)
 }
 
+/// The same for a number under 2^16.
+#[cfg(any(test, feature = "capi"))]
+#[inline(always)]
+pub(crate) fn split_small_ten(n: u32) -> (u32, u32) {
+    let quotient = of_lower_halves(n, 52_429) >> 19;
+    (quotient, n - quotient * 10)
+}
+
+/// A number under 2^16 divided by a hundred, and what is left.
+#[cfg(any(test, feature = "capi"))]
+#[inline(always)]
+pub(crate) fn split_small_hundred(n: u32) -> (u32, u32) {
+    let quotient = of_lower_halves(n >> 2, 5_243) >> 17;
+    (quotient, n - quotient * 100)
+}
+
 /// `n` divided by sixty, and what is left.
 #[cfg(not(target_arch = "avr"))]
 #[inline(always)]
@@ -45,30 +64,47 @@ pub(super) fn split_sixty(n: u32) -> (u32, u32) {
     (quotient, n - quotient * 60)
 }
 
-/// `n` divided by ten `tens` times and by sixty `sixties` times, to nearest, halves up.
-pub(super) fn scale_down(mut n: u32, tens: u8, sixties: u8) -> u32 {
-    // Both are even, so what was left last alone tells which side of the half it was.
-    let mut up = false;
-    for _ in 0..tens {
-        let (quotient, digit) = split_ten(n);
-        (n, up) = (quotient, digit >= 5);
-    }
-    for _ in 0..sixties {
-        let (quotient, rest) = split_sixty(n);
-        (n, up) = (quotient, rest >= 30);
-    }
-    n + up as u32
-}
-
 stored! {
-    static POWERS: [u32; 9] =
-        [10, 100, 1_000, 10_000, 100_000, 1_000_000, 10_000_000, 100_000_000, 1_000_000_000];
+    static POWERS: [u32; 10] =
+        [1, 10, 100, 1_000, 10_000, 100_000, 1_000_000, 10_000_000, 100_000_000, 1_000_000_000];
+    /// 2^(32 + 2 n) / 5^n, rounded up: so 10^n is divided by as a shift by n, this product, and a shift by 2 n.
+    static FIFTHS: [u32; 10] = [
+        0, 3_435_973_837, 2_748_779_070, 2_199_023_256, 1_759_218_605, 1_407_374_884, 1_125_899_907, 900_719_926,
+        720_575_941, 576_460_753,
+    ];
 }
 
-/// Digits of `number`, at least one.
+/// 10^n, n at most 9.
 #[inline(always)]
-pub(super) fn count(number: u32) -> usize {
-    POWERS.iter().take_while(|&power| number >= power).count() + 1
+pub(super) fn ten_to_the(n: u8) -> u32 {
+    POWERS.checked(n.into()).unwrap_or(0)
+}
+
+/// Whether `number` has no more than so many digits.
+#[cfg(any(test, feature = "capi"))]
+#[inline(always)]
+pub(crate) fn has_at_most(number: u32, digits: usize) -> bool {
+    POWERS.checked(digits).is_none_or(|power| number < power)
+}
+
+/// `n` divided by ten so many times, to nearest, halves up.
+#[inline(never)]
+pub(super) fn without_tens(n: u32, tens: u32) -> u32 {
+    let Some(fifths) = FIFTHS.checked(tens as usize) else { return 0 };
+    if tens == 0 {
+        return n;
+    }
+    // The half of the divisor is an odd number of the bits that are shifted out last: no sum overflows.
+    let halves = n >> (tens - 1);
+    let most = (halves >> 1) + (halves & 1) + (POWERS.at(tens as usize) >> tens >> 1);
+    high(most, fifths) >> (2 * tens)
+}
+
+/// `n` divided by sixty to nearest, halves up.
+#[inline(always)]
+pub(super) fn without_sixty(n: u32) -> u32 {
+    let (quotient, rest) = split_sixty(n);
+    quotient + u32::from(rest >= 30)
 }
 
 #[cfg(test)]
@@ -91,13 +127,53 @@ mod tests {
         }
     }
 
-    #[test]
-    fn counts() {
-        for power in 0..=9 {
-            let ten = 10u32.pow(power);
-            assert_eq!((count(ten - 1).max(1), count(ten)), (power.max(1) as usize, power as usize + 1));
+    fn check_tens(n: u32) {
+        for tens in 0..=12 {
+            let power = 10u64.pow(tens);
+            assert_eq!(u64::from(without_tens(n, tens)), (u64::from(n) + power / 2) / power, "{n} {tens}");
         }
-        assert_eq!(count(u32::MAX), 10);
+    }
+
+    #[test]
+    fn splits_every_small_number() {
+        for n in 0..1 << 16 {
+            assert_eq!(split_small_ten(n), (n / 10, n % 10), "{n}");
+            assert_eq!(split_small_hundred(n), (n / 100, n % 100), "{n}");
+            for digits in 1..=12 {
+                let length = n.checked_ilog10().unwrap_or(0) as usize + 1;
+                assert_eq!(has_at_most(n, digits), length <= digits, "{n} {digits}");
+            }
+        }
+        assert!(has_at_most(u32::MAX, 10) && !has_at_most(1_000_000_000, 9));
+    }
+
+    #[test]
+    fn removes_tens() {
+        for tens in 1..=9 {
+            let power = 10u32.pow(tens);
+            for half in 0..=u32::MAX / (power / 2) {
+                // Where a quotient or its rounding changes; as far as a step lets it be seen in a second.
+                if half < 50_000 || half % 4_099 == 0 {
+                    let edge = half * (power / 2);
+                    [edge.saturating_sub(1), edge, edge.saturating_add(1)].into_iter().for_each(check_tens);
+                }
+            }
+        }
+        [u32::MAX, u32::MAX - 1].into_iter().for_each(check_tens);
+    }
+
+    #[test]
+    fn fifths_are_rounded_up() {
+        for n in 1..=9 {
+            assert_eq!(u64::from(FIFTHS.at(n)), (1u64 << (32 + 2 * n)).div_ceil(5u64.pow(n as u32)));
+            assert_eq!(POWERS.at(n), 10u32.pow(n as u32));
+        }
+    }
+
+    #[test]
+    #[ignore = "all 2^32 numbers; minutes in release"]
+    fn removes_tens_from_every_number() {
+        (0..=u32::MAX).for_each(check_tens);
     }
 
     #[test]

@@ -2,7 +2,7 @@
 
 use super::style::{Look, TextStyle, begins_character};
 use super::value::Value;
-use super::write::{NO_ROOM, blank};
+use super::write::{NO_ROOM, PLACES, Place, blank, copy};
 use crate::status::{Cause, Error};
 
 /// A value with its place on a page.
@@ -35,13 +35,13 @@ pub(crate) const fn row_of(line: u8, columns: u8) -> u8 {
 /// From 16 columns on: the label, cut where it must be, the mark, the value in its field at the right end. Below: the
 /// label and the mark, or, for an odd `line`, the value. A value longer than its field takes room from the label; one
 /// longer than the line loses its unit; one that is still too long is refused.
-pub(crate) fn write_line(
+pub(crate) fn write_line<P: Place>(
     row: Option<Row>,
     label: impl Iterator<Item = u8> + Clone,
     style: &impl Look,
     columns: u8,
     line: u8,
-    out: &mut [u8],
+    out: &mut [P],
 ) -> Result<usize, Error> {
     if columns < NARROWEST {
         return Err(Error::new(Cause::OutOfRange, 4));
@@ -58,7 +58,7 @@ pub(crate) fn write_line(
             (plan.value, plan.field, plan.mark) = (row.value, columns.into(), None);
         }
     }
-    if style.is_utf8() { plan.write_utf8(label, style, out) } else { plan.write(label, style, out) }
+    plan.write(label, style, out)
 }
 
 struct Plan {
@@ -70,94 +70,75 @@ struct Plan {
 }
 
 impl Plan {
-    #[inline]
-    fn write(
-        self,
-        label: impl Iterator<Item = u8>,
-        style: &impl Look,
-        out: &mut [u8],
-    ) -> Result<usize, Error> {
-        let out = out.get_mut(..self.columns).ok_or(NO_ROOM)?;
-        let before = usize::from(self.mark.is_some());
-        let most = self.columns - before;
-        let mut value = self.value;
-        let width = most as u8; // not more than columns
-        let mut written = value.write_right(style, width, out.get_mut(before..).unwrap_or(&mut []));
-        if written.is_err() {
-            value = value.without_unit();
-            written = value.write_right(style, width, out.get_mut(before..).unwrap_or(&mut []));
-        }
-        let blanks = usize::from(written?.blanks);
-        // What the value leaves of the line, and at most what its field leaves.
-        let room = blanks.min(most.saturating_sub(self.field));
-        let Some(head) = out.get_mut(..blanks + before) else { return Err(NO_ROOM) };
-        put_head(label, room, self.mark, head);
-        Ok(self.columns)
-    }
-
-    #[inline(never)]
-    fn write_utf8(
+    #[inline(always)]
+    fn write<P: Place>(
         self,
         label: impl Iterator<Item = u8> + Clone,
         style: &impl Look,
-        out: &mut [u8],
+        out: &mut [P],
     ) -> Result<usize, Error> {
-        let most = self.columns - usize::from(self.mark.is_some());
-        let mut value = self.value;
-        let mut size = value.measure(style)?;
-        if size.characters > most {
-            value = value.without_unit();
-            size = value.measure(style)?;
+        if let Some(position) = self.value.form.refused() {
+            return Err(Error::new(Cause::OutOfRange, position));
         }
-        let field = self.field.max(size.characters);
-        let room = most.checked_sub(field).ok_or(NO_ROOM)?;
-        let (label_bytes, label_characters) = cut(label.clone(), room);
-        let label_end = label_bytes + (room - label_characters);
-        let head = label_end + (self.columns - most) + (field - size.characters);
-        let out = out.get_mut(..head + size.bytes).ok_or(NO_ROOM)?;
-        let Some((head, tail)) = out.split_at_mut_checked(head) else { return Err(NO_ROOM) };
-        put_head(label.take(label_bytes), label_end, self.mark, head);
-        value.write_right(style, 0, tail)?;
-        Ok(head.len() + size.bytes)
+        let before = usize::from(self.mark.is_some());
+        let most = self.columns - before;
+        let mut value = self.value;
+        let mut places = [P::EMPTY; PLACES];
+        let spelled = loop {
+            let spelled = value.spell(style, &mut places);
+            if spelled.characters(style) <= most || value == value.without_unit() {
+                break spelled;
+            }
+            value = value.without_unit();
+        };
+        let characters = spelled.characters(style);
+        let room = most.checked_sub(self.field.max(characters)).ok_or(NO_ROOM)?;
+        let label_end = if style.is_utf8() { bytes_of(label.clone(), room) } else { room };
+        let head = label_end + (self.columns - room - characters);
+        let out = out.get_mut(..head + spelled.bytes()).ok_or(NO_ROOM)?;
+        let (head, tail) = out.split_at_mut_checked(head).ok_or(NO_ROOM)?;
+        put_head(label, label_end, self.mark, head);
+        copy(spelled.text(&places), tail);
+        Ok(head.len() + tail.len())
     }
 }
 
 /// Writes what stands before a value: a label in so many places, with blanks behind it, the mark, blanks.
 #[inline]
-fn put_head(mut label: impl Iterator<Item = u8>, room: usize, mark: Option<u8>, head: &mut [u8]) {
+fn put_head<P: Place>(mut label: impl Iterator<Item = u8>, room: usize, mark: Option<u8>, head: &mut [P]) {
     let Some((places, rest)) = head.split_at_mut_checked(room) else { return };
     let mut places = places.iter_mut();
     for place in places.by_ref() {
         let Some(byte) = label.next() else {
-            *place = b' ';
+            *place = P::of(b' ');
             break;
         };
-        *place = byte;
+        *place = P::of(byte);
     }
-    blank(places);
+    blank(places.into_slice());
     let mut rest = rest.iter_mut();
     if let Some(mark) = mark
         && let Some(place) = rest.next()
     {
-        *place = mark;
+        *place = P::of(mark);
     }
-    blank(rest);
+    blank(rest.into_slice());
 }
 
-/// Bytes and characters of a UTF-8 label as far as it has room.
-fn cut(label: impl Iterator<Item = u8>, room: usize) -> (usize, usize) {
-    let mut bytes = 0;
-    let mut characters = 0;
+/// Bytes of a UTF-8 label in so many characters, with blanks behind a shorter one.
+fn bytes_of(label: impl Iterator<Item = u8>, room: usize) -> usize {
+    let mut left = room;
+    let mut continued = 0;
     for byte in label {
-        if begins_character(byte) {
-            if characters == room {
-                break;
-            }
-            characters += 1;
+        if !begins_character(byte) {
+            continued += 1;
+        } else if left == 0 {
+            break;
+        } else {
+            left -= 1;
         }
-        bytes += 1;
     }
-    (bytes, characters)
+    room + continued
 }
 
 /// A part of a line, in characters.

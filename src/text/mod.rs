@@ -87,11 +87,14 @@ pub use value::{AngleForm, Value};
 
 #[cfg(feature = "capi")]
 pub(crate) use {
+    digits::{has_at_most, split_small_hundred, split_small_ten},
     labels::{
         CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C,
     },
     line::{change, row_of, write_line},
     style::{Look, StyleOfC},
+    value::Short,
+    write::Place,
 };
 
 // C sees these layouts on every target: any other does not compile.

@@ -1,6 +1,6 @@
 //! A quantity together with the form in which it is shown.
 
-use super::digits::{scale_down, split_sixty, split_ten};
+use super::digits::{split_sixty, split_ten, ten_to_the, without_sixty, without_tens};
 use super::style::{DASH, NO, Unit, YES};
 use crate::math::multiply::of_lower_halves;
 use crate::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
@@ -49,6 +49,15 @@ pub struct Value {
     pub(super) form: Form,
 }
 
+/// A positive number under 2^16 with its unit behind, or two: the last two digits, before them a sign.
+#[cfg(feature = "capi")]
+pub(crate) struct Short {
+    pub(crate) number: u32,
+    pub(crate) unit: u8,
+    pub(crate) decimals: usize,
+    pub(crate) two: bool,
+}
+
 /// What stands around the digits, in one word, so that a value fits in two registers: from the lowest byte the number
 /// of a text of the style, the decimals, the groups of two digits before these (minutes and seconds of arc), the kind.
 #[derive(Clone, Copy, Debug, PartialEq, Eq)]
@@ -59,6 +68,8 @@ const POSITIVE: u32 = 0;
 const NEGATIVE: u32 = 1;
 /// The text alone.
 const WORD: u32 = 4;
+/// The text before the digits.
+const IN_FRONT: u32 = 5;
 
 impl Form {
     const fn new(text: u8, decimals: u8, groups: u8, kind: u32) -> Form {
@@ -83,6 +94,10 @@ impl Form {
 
     pub(super) const fn is_negative(self) -> bool {
         self.0 >> 24 == NEGATIVE
+    }
+
+    pub(super) const fn is_in_front(self) -> bool {
+        self.0 >> 24 == IN_FRONT
     }
 
     /// The position of the argument that was refused.
@@ -154,62 +169,70 @@ impl Value {
         if decimals > most {
             return Value::REFUSED_3;
         }
-        match form {
-            AngleForm::BySize => Value::angle_by_size(angle, decimals),
-            AngleForm::DecimalDegrees => {
-                Value::number(scale_down(angle.0, 3 - decimals, 2), decimals, Unit::DecimalDegree)
-            }
-            AngleForm::DegreesMinutes => Value::sexagesimal(angle, 1, decimals),
-            AngleForm::MinutesSeconds => Value::sexagesimal(angle, 0, decimals),
-            AngleForm::DecimalSeconds => {
-                Value::number(scale_down(angle.0, 3 - decimals, 0), decimals, Unit::Second)
-            }
+        if form == AngleForm::BySize {
+            return Value::angle_by_size(angle, decimals);
         }
+        Value::angle_as(angle, form, decimals)
     }
 
     /// `decimals` at most 3.
     pub(super) fn angle_by_size(angle: Milliarcseconds, decimals: u8) -> Value {
         if angle.0 >= 3_599_500 {
-            Value::sexagesimal(angle, 1, 0)
+            Value::angle_as(angle, AngleForm::DegreesMinutes, 0)
         } else if angle.0 >= least_shown_as_a_minute(decimals) {
-            Value::sexagesimal(angle, 0, 0)
+            Value::angle_as(angle, AngleForm::MinutesSeconds, 0)
         } else {
-            Value::number(scale_down(angle.0, 3 - decimals, 0), decimals, Unit::Second)
+            Value::angle_as(angle, AngleForm::DecimalSeconds, decimals)
         }
     }
 
-    /// Degrees and minutes if divided by sixty once, otherwise minutes and seconds. `decimals` at most 2.
-    fn sexagesimal(angle: Milliarcseconds, sixties: u8, decimals: u8) -> Value {
-        let mut all = scale_down(angle.0, 3 - decimals, sixties);
-        let mut number = 0;
-        let mut power = 1;
-        for _ in 0..decimals {
-            let (rest, digit) = split_ten(all);
-            number += u32::from(digit) * power;
-            (all, power) = (rest, 10 * power);
-        }
-        let unit = if sixties == 0 { Unit::Second } else { Unit::Minute };
-        let mut groups = 0;
-        loop {
-            let (rest, group) = split_sixty(all);
-            number += group * power;
-            (all, power) = (rest, 100 * power);
-            groups += 1;
-            // Seconds alone have a second group, where it is needed.
-            if groups == 2 || sixties > 0 || all < 60 {
-                break;
+    #[inline(never)]
+    fn angle_as(angle: Milliarcseconds, form: AngleForm, decimals: u8) -> Value {
+        let tens = u32::from(3 - decimals);
+        let mut all = angle.0;
+        let in_seconds = matches!(form, AngleForm::MinutesSeconds | AngleForm::DecimalSeconds);
+        if !in_seconds {
+            if form == AngleForm::DecimalDegrees {
+                all = split_sixty(all).0;
+                if tens == 0 {
+                    return Value::number(without_sixty(all), decimals, Unit::DecimalDegree);
+                }
             }
+            // Rounded down, for tens are taken off behind it.
+            all = split_sixty(all).0;
         }
+        all = without_tens(all, tens);
+        let unit = match form {
+            AngleForm::DecimalDegrees => return Value::number(all, decimals, Unit::DecimalDegree),
+            AngleForm::DecimalSeconds => return Value::number(all, decimals, Unit::Second),
+            AngleForm::MinutesSeconds => Unit::Second,
+            _ => Unit::Minute,
+        };
+        let mut whole = all;
+        for _ in 0..decimals {
+            whole = split_ten(whole).0;
+        }
+        let power = ten_to_the(decimals);
+        let (mut left, mut number) = split_sixty(whole);
+        let mut groups = 1;
+        if in_seconds && left >= 60 {
+            // Degrees too.
+            let (degrees, minutes) = split_sixty(left);
+            (left, number, groups) = (degrees, number + 100 * minutes, 2);
+        }
+        number += left * if groups == 1 { 100 } else { 10_000 };
         // At most 1193°02'47.30", ten digits under 2^32.
-        Value { number: number + all * power, form: Form::new(unit as u8, decimals, groups, POSITIVE) }
+        let number = number * power + (all - whole * power);
+        Value { number, form: Form::new(unit as u8, decimals, groups, POSITIVE) }
     }
 
     /// Any other decimal number: `number` in units of 10^-`places`, shown with at most as many decimals and at most 9.
+    #[inline(always)]
     pub fn decimal(number: u32, places: u8, decimals: u8, unit: Unit) -> Value {
         if decimals > places || decimals > 9 {
             return Value::REFUSED_2;
         }
-        Value::number(scale_down(number, places - decimals, 0), decimals, unit)
+        Value::number(without_tens(number, (places - decimals).into()), decimals, unit)
     }
 
     /// The same with a sign.
@@ -229,6 +252,15 @@ impl Value {
         }
     }
 
+    /// The value, if the short way of writing can take it.
+    #[cfg(feature = "capi")]
+    #[inline(always)]
+    pub(crate) fn short(self) -> Option<Short> {
+        let (decimals, two) = (self.form.decimals(), self.form.groups() > 0);
+        let usual = self.number < 1 << 16 && self.form.0 >> 17 == 0 && !(two && decimals > 0);
+        usual.then_some(Short { number: self.number, unit: self.form.text(), decimals, two })
+    }
+
     /// The number alone, for a display that sets the unit elsewhere.
     pub const fn without_unit(self) -> Value {
         match self.unit() {
@@ -243,7 +275,8 @@ impl Value {
     pub(super) const BLANK: Value = Value::word(0);
 
     const fn number(number: u32, decimals: u8, unit: Unit) -> Value {
-        Value { number, form: Form::new(unit as u8, decimals, 0, POSITIVE) }
+        let kind = if matches!(unit, Unit::FocalRatio) { IN_FRONT } else { POSITIVE };
+        Value { number, form: Form::new(unit as u8, decimals, 0, kind) }
     }
 
     const fn word(text: u8) -> Value {
@@ -254,10 +287,7 @@ impl Value {
         if decimals > 4 - shift {
             return Value::REFUSED_2;
         }
-        let mut power = 1; // at most 10^4
-        for _ in 0..shift + decimals {
-            power = of_lower_halves(power, 10);
-        }
+        let power = ten_to_the(shift + decimals);
         // Whole and broken part on their own: each product stays under 2^16 * 10^4.
         let number = of_lower_halves(ratio.0 >> 16, power)
             + ((of_lower_halves(ratio.0 & 0xffff, power) + 0x8000) >> 16);

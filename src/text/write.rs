@@ -1,18 +1,34 @@
-//! A value as characters: measured first, then written from the right.
+//! A value as characters: spelled out in places of its own, then copied to where it is wanted if it has room there.
 
-use super::digits::{count, split_ten};
-use super::style::{Look, TextStyle, Unit};
+use super::digits::split_ten;
+use super::style::{Look, TextStyle, begins_character};
 use super::value::Value;
 use crate::status::{Cause, Error};
+use core::mem::MaybeUninit;
 use core::sync::atomic::{Ordering, compiler_fence};
 
 pub(super) const NO_ROOM: Error = Error::new(Cause::NoRoom, 0);
 
-/// Places left for blanks, and bytes of the value behind them.
-#[derive(Clone, Copy)]
-pub(super) struct Written {
-    pub(super) blanks: u8,
-    bytes: u8,
+/// Where a byte goes. The memory of C need not hold anything yet, and to clear our own would cost as much as a value.
+pub(crate) trait Place: Copy {
+    const EMPTY: Self;
+    fn of(byte: u8) -> Self;
+}
+
+impl Place for u8 {
+    const EMPTY: u8 = 0;
+
+    fn of(byte: u8) -> u8 {
+        byte
+    }
+}
+
+impl Place for MaybeUninit<u8> {
+    const EMPTY: MaybeUninit<u8> = MaybeUninit::uninit();
+
+    fn of(byte: u8) -> MaybeUninit<u8> {
+        MaybeUninit::new(byte)
+    }
 }
 
 impl Value {
@@ -28,123 +44,175 @@ impl Value {
         self.write_as(style, width, out)
     }
 
-    #[inline]
-    pub(crate) fn write_as(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<usize, Error> {
-        let written = if cfg!(target_arch = "avr") {
-            self.write_right_here(style, width, out) // a call costs a hundred cycles there
-        } else {
-            self.write_right(style, width, out)
-        };
-        let written = written?;
-        blank(out.iter_mut().take(written.blanks.into()));
-        Ok(usize::from(written.blanks) + usize::from(written.bytes))
-    }
-
-    /// The same without the blanks.
     #[inline(never)]
-    pub(super) fn write_right(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<Written, Error> {
-        self.write_right_here(style, width, out)
-    }
-
-    #[inline(always)]
-    fn write_right_here(self, style: &impl Look, width: u8, out: &mut [u8]) -> Result<Written, Error> {
-        let form = self.form;
-        let text = style.text(form.text());
-        let Size { digits, bytes, characters } = self.measure_with(text.len(), style)?;
-        let width = if width == 0 { characters } else { width.into() };
-        let Some(blanks) = width.checked_sub(characters) else { return Err(NO_ROOM) };
-        let Some(out) = out.get_mut(..blanks + bytes) else { return Err(NO_ROOM) };
-
-        let mut places = out.iter_mut();
-        // There always is a place: all was measured.
-        let mut put = |byte| {
-            if let Some(place) = places.next_back() {
-                *place = byte;
-            }
-        };
-        let in_front = form.text() == Unit::FocalRatio as u8;
-        if !in_front {
-            text.clone().rev().for_each(&mut put);
-        }
-        let mut number = self.number;
-        let mut left = digits;
-        let mut groups = form.groups();
-        let mut sign = form.text();
-        let mut mark = form.decimals() > 0;
-        let mut run = form.decimals();
-        while left > 0 {
-            for _ in 0..run {
-                let (rest, digit) = split_ten(number);
-                put(b'0' + digit);
-                number = rest;
-            }
-            left -= run;
-            if run > 0 && left > 0 {
-                if mark {
-                    put(style.decimal_mark());
-                    mark = false;
-                } else {
-                    sign -= 1;
-                    groups -= 1;
-                    style.text(sign).rev().for_each(&mut put);
-                }
-            }
-            run = if groups > 0 { 2 } else { left };
-        }
-        if form.is_negative() {
-            put(b'-');
-        }
-        if in_front {
-            text.rev().for_each(&mut put);
-        }
-        Ok(Written { blanks: blanks as u8, bytes: bytes as u8 })
-    }
-}
-
-/// What a value takes.
-pub(super) struct Size {
-    digits: usize,
-    pub(super) bytes: usize,
-    pub(super) characters: usize,
-}
-
-impl Value {
-    #[inline(never)]
-    pub(super) fn measure(self, style: &impl Look) -> Result<Size, Error> {
-        self.measure_with(style.text(self.form.text()).len(), style)
-    }
-
-    #[inline(always)]
-    fn measure_with(self, length: usize, style: &impl Look) -> Result<Size, Error> {
-        let form = self.form;
-        if let Some(position) = form.refused() {
+    pub(crate) fn write_as<P: Place>(
+        self,
+        style: &impl Look,
+        width: u8,
+        out: &mut [P],
+    ) -> Result<usize, Error> {
+        if let Some(position) = self.form.refused() {
             return Err(Error::new(Cause::OutOfRange, position));
         }
-        let mut bytes = length;
-        let mut digits = 0;
-        if !form.is_word() {
-            digits = count(self.number).max(form.decimals() + 2 * form.groups() + 1);
-            bytes += digits + usize::from(form.decimals() > 0) + usize::from(form.is_negative());
-            for back in 0..form.groups() {
-                bytes += style.text(form.text().wrapping_sub(1 + back as u8)).len();
-            }
+        let mut places = [P::EMPTY; PLACES];
+        let spelled = self.spell(style, &mut places);
+        let length = spelled.bytes();
+        let mut bytes = usize::from(width) + length - spelled.characters(style);
+        if width == 0 {
+            bytes = length;
         }
-        let continued = if style.is_utf8() { self.continued(style) } else { 0 };
-        Ok(Size { digits, bytes, characters: bytes - continued })
+        let (Some(blanks), Some(out)) = (bytes.checked_sub(length), out.get_mut(..bytes)) else {
+            return Err(NO_ROOM);
+        };
+        let Some((head, tail)) = out.split_at_mut_checked(blanks) else { return Err(NO_ROOM) };
+        blank(head);
+        copy(spelled.text(&places), tail);
+        Ok(bytes)
     }
 
-    /// Bytes that do not begin a character.
+    /// Spells out what has not been refused.
     #[inline(never)]
-    fn continued(self, style: &impl Look) -> usize {
-        let last = self.form.text();
-        (0..=self.form.groups() as u8).map(|back| style.continued(style.text(last.wrapping_sub(back)))).sum()
+    pub(super) fn spell<P: Place>(self, style: &impl Look, places: &mut [P; PLACES]) -> Spelled {
+        let form = self.form;
+        let mut text = form.text();
+        let mut end = UNIT as u32;
+        if !form.is_in_front() {
+            end = put_text(style, text, end, places);
+        }
+        let mut start = UNIT as u32;
+        if form.is_word() {
+            return Spelled { start, end };
+        }
+        let mut number = self.number;
+        let mut decimals = form.decimals() as u32;
+        if decimals > 0 {
+            decimals |= MARKED | u32::from(style.decimal_mark()) << 16;
+        }
+        for _ in 0..form.groups() {
+            (number, start) = put_digits(number, decimals | 2 << 24, start, places);
+            decimals = 0;
+            text = text.wrapping_sub(1);
+            start = put_text_before(style, text, start, &mut end, places);
+        }
+        (_, start) = put_digits(number, decimals, start, places);
+        if form.is_negative() {
+            start -= 1;
+            put(b'-', start, places);
+        }
+        if form.is_in_front() {
+            start = put_text_before(style, text, start, &mut end, places);
+        }
+        Spelled { start, end }
     }
 }
 
-pub(super) fn blank<'a>(places: impl Iterator<Item = &'a mut u8>) {
+/// Most bytes before a unit: ten digits, a mark, a minus, two texts.
+const UNIT: usize = 10 + 1 + 1 + 2 * 8;
+pub(super) const PLACES: usize = UNIT + 8;
+
+/// Where in its places a value is; in the upper half of `end` the bytes that continue a character of UTF-8.
+pub(super) struct Spelled {
+    start: u32,
+    end: u32,
+}
+
+impl Spelled {
+    /// The value, with places behind it.
+    #[inline(always)]
+    pub(super) fn text<'a, P>(&self, places: &'a [P; PLACES]) -> &'a [P] {
+        places.get(self.start as usize..).unwrap_or(&[])
+    }
+
+    #[inline(always)]
+    pub(super) fn bytes(&self) -> usize {
+        (self.end as u16 as u32).wrapping_sub(self.start) as usize
+    }
+
+    #[inline(always)]
+    pub(super) fn characters(&self, style: &impl Look) -> usize {
+        if style.is_utf8() { self.bytes() - (self.end >> 16) as usize } else { self.bytes() }
+    }
+}
+
+#[inline(always)]
+fn put<P: Place>(byte: u8, at: u32, places: &mut [P; PLACES]) {
+    if let Some(place) = places.get_mut(at as usize) {
+        *place = P::of(byte);
+    }
+}
+
+/// Writes a text and gives where it ends.
+#[inline(never)]
+fn put_text<P: Place>(style: &impl Look, number: u8, mut at: u32, places: &mut [P; PLACES]) -> u32 {
+    for byte in style.text(number) {
+        put(byte, at & 0xffff, places);
+        at += 1;
+        if !begins_character(byte) {
+            at += 1 << 16;
+        }
+    }
+    at
+}
+
+/// Writes a text before `start` and gives where it begins; `end` counts what continues a character.
+#[inline(never)]
+fn put_text_before<P: Place>(
+    style: &impl Look,
+    number: u8,
+    start: u32,
+    end: &mut u32,
+    places: &mut [P; PLACES],
+) -> u32 {
+    let at = start - style.text(number).count() as u32;
+    *end += put_text(style, number, at, places) - start;
+    at
+}
+
+/// Decimals in the lowest byte are followed by a mark, which is in the third.
+const MARKED: u32 = 0x100;
+
+/// Writes digits before `at`, as `plan` says: decimals with their mark, if there are any, and as many digits as its
+/// highest byte says, or all for 0. Gives the number that is left and where the digits begin.
+#[inline(never)]
+fn put_digits<P: Place>(mut number: u32, mut plan: u32, mut at: u32, places: &mut [P; PLACES]) -> (u32, u32) {
+    let mut left = (plan & 0xff) as i32;
+    if left == 0 {
+        left = (plan >> 24) as i32;
+    }
+    loop {
+        let (rest, digit) = split_ten(number);
+        number = rest;
+        at = at.wrapping_sub(1);
+        put(b'0' + digit, at, places);
+        left -= 1;
+        if left == 0 {
+            if plan & MARKED == 0 {
+                break;
+            }
+            at = at.wrapping_sub(1);
+            put((plan >> 16) as u8, at, places);
+            left = (plan >> 24) as i32;
+            plan = 0;
+        } else if left < 0 && number == 0 {
+            break;
+        }
+    }
+    (number, at)
+}
+
+// The fences keep these loops from becoming calls of memset and memcpy, which cost more than so few bytes.
+
+pub(super) fn blank<P: Place>(places: &mut [P]) {
     for place in places {
-        *place = b' ';
-        // Keeps this loop from becoming a call of memset, which costs more than so few blanks.
+        *place = P::of(b' ');
+        compiler_fence(Ordering::SeqCst);
+    }
+}
+
+#[inline(always)]
+pub(super) fn copy<P: Place>(text: &[P], places: &mut [P]) {
+    for (place, byte) in places.iter_mut().zip(text) {
+        *place = *byte;
         compiler_fence(Ordering::SeqCst);
     }
 }

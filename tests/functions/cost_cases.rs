@@ -27,67 +27,51 @@ fn whole(row: &Row) -> Vec<Vec<i64>> {
     accepted(row, cases::whole_types(row, 64 * WHOLE).into_iter(), WHOLE)
 }
 
-/// Words; a negative one is written as its 32 bits.
-fn joined(case: &[i64]) -> String {
-    case.iter().map(|&x| format!("{}u", x as u32)).collect::<Vec<_>>().join(", ")
-}
-
+/// A table of words; a negative one is written as its 32 bits.
 fn table(name: &str, cases: &[Vec<i64>]) -> String {
     let mut text = format!("static const uint32_t {name}[][WORDS] = {{\n");
     for case in cases {
-        writeln!(text, "    {{{}}},", joined(case)).unwrap();
+        let words: Vec<String> = case.iter().map(|&x| format!("{}u", x as u32)).collect();
+        writeln!(text, "    {{{}}},", words.join(", ")).unwrap();
     }
     text + "};\n"
 }
 
 fn header(row: &Row) -> String {
     let signed = |least: i64| if least < 0 { "1" } else { "0" };
+    let bytes = |most: i64| match most {
+        0xff => 1,
+        0xffff => 2,
+        _ => 4,
+    };
     let units = row.arguments.iter().map(|a| a.unit).chain([row.result]).collect::<Vec<_>>();
     let list = |words: Vec<String>| words.join(", ");
     format!(
         "#define FUNCTION fieldstop_{}_fx\n#define ARGUMENTS {}\n#define WORDS (ARGUMENTS + 1)\n\
          /* Steps to the float unit, and whether signed; the result's last. */\n\
-         static const double steps[WORDS] = {{{}}};\nstatic const uint8_t is_signed[WORDS] = {{{}}};\n{}{}",
+         static const double steps[WORDS] = {{{}}};\nstatic const uint8_t is_signed[WORDS] = {{{}}};\n\
+         /* Bytes that each has in C. */\nstatic const uint8_t bytes[WORDS] = {{{}}};\n\
+         /* Whether it is an integer in every form. */\nstatic const uint8_t is_count[WORDS] = {{{}}};\n{}{}",
         row.stem,
         row.arguments.len(),
         list(units.iter().map(|u| format!("{:?}", u.steps)).collect()),
         list(units.iter().map(|u| signed(u.least).to_string()).collect()),
+        list(units.iter().map(|u| bytes(u.most).to_string()).collect()),
+        list(units.iter().map(|u| u8::from(u.count).to_string()).collect()),
         table("usual", &usual(row)),
         table("whole", &whole(row)),
     )
 }
 
-/// Telescopes, for the screens: the usual arguments of their four functions at once. The rest of the equipment is beside
-/// them, in a struct.
+/// Telescopes, for the screens: the usual arguments of their four functions at once.
 fn telescopes(rows: &[Row]) -> String {
-    let argument = |name: &&str| *rows.iter().flat_map(|r| r.arguments).find(|a| a.name == *name).unwrap();
-    let draw = |stream: &str, names: &[&str]| {
-        let arguments: Vec<Argument> = names.iter().map(argument).collect();
-        cases::usual_arguments(stream, &arguments, USUAL)
-    };
-    let drawn = draw(
-        "telescopes",
-        &["aperture_um", "focal_length_um", "eyepiece_um", "field_stop_um", "wavelength_nm"],
-    );
-    let members = [
-        "obstruction_q16",
-        "amplification_q16",
-        "throughput_q16",
-        "apparent_field_mas",
-        "pixel_nm",
-        "pixel_count",
-        "naked_eye_mmag",
-        "eye_pupil_um",
-        "seeing_uas",
-    ];
-    let equipment: Vec<String> =
-        draw("equipment", &members).iter().map(|values| format!("    {{{}}},", joined(values))).collect();
-    format!(
-        "#define WORDS 5\n{}static const struct equipment {{\n    uint32_t {};\n}} equipment[] = {{\n{}\n}};\n",
-        table("usual", &drawn),
-        members.join(", "),
-        equipment.join("\n")
-    )
+    let argument = |name: &str| *rows.iter().flat_map(|r| r.arguments).find(|a| a.name == name).unwrap();
+    let arguments: Vec<Argument> =
+        ["aperture_um", "focal_length_um", "eyepiece_um", "field_stop_um", "wavelength_nm"]
+            .map(argument)
+            .to_vec();
+    let drawn = cases::usual_arguments("telescopes", &arguments, USUAL);
+    format!("#define WORDS {}\n{}", arguments.len(), table("usual", &drawn))
 }
 
 #[test]
