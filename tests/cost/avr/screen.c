@@ -26,6 +26,7 @@ static void set(uint8_t k)
     in.focal_length = pgm_read_dword(&usual[k][FOCAL_LENGTH]);
     in.eyepiece = pgm_read_dword(&usual[k][EYEPIECE]);
     in.field_stop = pgm_read_dword(&usual[k][FIELD_STOP]);
+    set_millimetres(&in);
 }
 
 static struct call half(uint8_t is_text)

@@ -1,3 +1,4 @@
 #include "screen.h"
 
 char screen_lines[4][20] __attribute__((aligned(4)));
+char lines_of_strings[4][21];
