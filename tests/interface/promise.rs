@@ -68,7 +68,8 @@ fn nothing_promised_is_gone() {
     holds(FILE, &format!("{HEAD}{}\n", now.into_iter().collect::<Vec<_>>().join("\n")));
 }
 
-const BREAK: &str = "Programs that are in use need it: give what is new a name of its own (DEVELOPERS.md, \"The promise\")";
+const BREAK: &str =
+    "Programs that are in use need it: give what is new a name of its own (DEVELOPERS.md, \"The promise\")";
 
 /// The gate must be able to fail: each of these breaks is seen in a copy of the header, and an addition is none.
 #[test]
@@ -89,18 +90,39 @@ fn planted_breaks_are_seen() {
             "argument widened",
             breaks(magnification, &magnification.replacen("uint32_t focal", "uint64_t focal", 1)),
         ),
-        ("argument in another unit", breaks(magnification, &magnification.replace("eyepiece_um", "eyepiece_mm"))),
+        (
+            "argument in another unit",
+            breaks(magnification, &magnification.replace("eyepiece_um", "eyepiece_mm")),
+        ),
         ("argument more", breaks(magnification, &magnification.replacen('(', "(uint32_t barlow_q16, ", 1))),
         ("cause renumbered", breaks("#define FIELDSTOP_OVERFLOW 5", "#define FIELDSTOP_OVERFLOW 6")),
         ("constant removed", breaks("#define FIELDSTOP_CAMERA_ALL 511", "")),
         ("macro removed", breaks("#define FIELDSTOP_CAUSE(status)", "#define FIELDSTOP_REASON(status)")),
-        ("status widened", breaks("typedef uint16_t fieldstop_status;", "typedef uint32_t fieldstop_status;")),
-        ("member resized", breaks("uint8_t padding[3];\n} fieldstop_camera;", "uint8_t padding[7];\n} fieldstop_camera;")),
-        ("member in the padding", breaks("    uint8_t padding[3];\n} fieldstop_camera;", "    uint8_t gain;\n    uint8_t padding[2];\n} fieldstop_camera;")),
+        (
+            "status widened",
+            breaks("typedef uint16_t fieldstop_status;", "typedef uint32_t fieldstop_status;"),
+        ),
+        (
+            "member resized",
+            breaks("uint8_t padding[3];\n} fieldstop_camera;", "uint8_t padding[7];\n} fieldstop_camera;"),
+        ),
+        (
+            "member in the padding",
+            breaks(
+                "    uint8_t padding[3];\n} fieldstop_camera;",
+                "    uint8_t gain;\n    uint8_t padding[2];\n} fieldstop_camera;",
+            ),
+        ),
         ("members swapped", breaks("    uint16_t first;\n", "    uint16_t second;\n")),
         ("member more", breaks("} fieldstop_observer;", "    uint32_t age_s;\n} fieldstop_observer;")),
         ("struct removed", breaks("fieldstop_span {", "fieldstop_stretch {")),
-        ("forms withdrawn from AVR", breaks("#if !defined(FIELDSTOP_NO_FLOAT)\n", "#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))\n")),
+        (
+            "forms withdrawn from AVR",
+            breaks(
+                "#if !defined(FIELDSTOP_NO_FLOAT)\n",
+                "#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))\n",
+            ),
+        ),
     ]);
     for (what, seen) in planted {
         assert!(!seen.is_empty(), "not seen: {what}");
@@ -137,19 +159,30 @@ fn compilers_are_asked() {
         hold(&mut c, format!("sizeof({name}) == {}", of.size()));
         for member in &of.members {
             let (member, place, size) = (&member.name, member.place, member.size);
-            hold(&mut c, format!("offsetof({name}, {member}) == {place} && sizeof((({name} *)0)->{member}) == {size}"));
+            hold(
+                &mut c,
+                format!("offsetof({name}, {member}) == {place} && sizeof((({name} *)0)->{member}) == {size}"),
+            );
         }
     }
     for constant in &declared.constants {
         hold(&mut c, format!("{} == {}", constant.name, constant.value));
     }
-    c.push_str("\ntypedef void (*any_function)(void);\nstatic volatile any_function present;\n\nint main(void)\n{\n");
+    c.push_str(
+        "\ntypedef void (*any_function)(void);\nstatic volatile any_function present;\n\nint main(void)\n{\n",
+    );
     for function in &declared.functions {
         let guard = function.condition.as_deref();
         if let Some(condition) = guard {
             writeln!(c, "#if {condition}").unwrap();
         }
-        writeln!(c, "    {{\n        {} = {};\n        present = (any_function)function;\n    }}", prototype(function, false), function.name).unwrap();
+        writeln!(
+            c,
+            "    {{\n        {} = {};\n        present = (any_function)function;\n    }}",
+            prototype(function, false),
+            function.name
+        )
+        .unwrap();
         if guard.is_some() {
             c.push_str("#endif\n");
         }
