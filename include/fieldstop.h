@@ -21,11 +21,14 @@
  *     _q16     unsigned Q16.16: 65536 is 1     _milli     thousandths of a plain number
  *     _mmag    millimagnitudes      _mag       magnitudes
  *     _ms _us  milli-, microseconds _s         seconds
+ *     _mk      millikelvin          _k         kelvin
+ *     _ppb     parts per billion    _ppm       parts per million
  *     _day_ms  milliseconds of a circle of 24 hours
  *     _bam     binary angle: 2^32 is one turn  _deg       degrees
  *     _per_mm, _per_s and the like divide the unit before them.
- * The float forms take millimetres for _um, micrometres for _nm (but wavelengths and rms wavefronts
- * stay in nanometres), arcseconds for _mas and _uas, plain numbers for _q16, magnitudes for _mmag.
+ * The float forms take millimetres for _um, micrometres for _nm (but wavelengths and errors of the
+ * wavefront stay in nanometres), metres, _m, for a fixed _mm, arcseconds for _mas and _uas, plain
+ * numbers for _q16, magnitudes for _mmag, degrees for _bam.
  *
  * Ranges. A fixed argument may be anything that its type holds, but for what the function's comment
  * says. A float argument is finite and at most 2^32 in magnitude, and at least 2^-32 where zero is
@@ -1879,6 +1882,975 @@ FIELDSTOP_CHECKED
 fieldstop_status fieldstop_t_number_f64(double focal_ratio,
                                         double throughput,
                                         double *t_number);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
+   Focus: how deep it is, what a miss costs, and how far heat, a near object and the edge of
+   the field move it. */
+
+/**
+ * Gives how far from the focus, each side, the wavefront is a quarter wave off, in nanometres.
+ *
+ * 2 lambda N^2 (Born and Wolf, Principles of Optics).
+ * Ranges: focal_ratio_q16, wavelength_nm not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_depth_of_focus_fx(uint32_t focal_ratio_q16,
+                                             uint32_t wavelength_nm,
+                                             uint32_t *depth_nm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how far from the focus, each side, the wavefront is a quarter wave off, in micrometres.
+ *
+ * 2 lambda N^2 (Born and Wolf, Principles of Optics).
+ * Ranges: focal_ratio, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_depth_of_focus_f32(float focal_ratio,
+                                              float wavelength_nm,
+                                              float *depth_um);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how far from the focus, each side, the wavefront is a quarter wave off, in micrometres, in double.
+ *
+ * 2 lambda N^2 (Born and Wolf, Principles of Optics).
+ * Ranges: focal_ratio, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_depth_of_focus_f64(double focal_ratio,
+                                              double wavelength_nm,
+                                              double *depth_um);
+#endif
+
+/**
+ * Gives the diameter of a star's image out of focus, by geometry, in nanometres.
+ *
+ * d / N (Smith, Modern Optical Engineering).
+ * Ranges: focal_ratio_q16 not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_defocus_blur_fx(uint32_t defocus_nm,
+                                           uint32_t focal_ratio_q16,
+                                           uint32_t *blur_nm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the diameter of a star's image out of focus, by geometry, in micrometres.
+ *
+ * d / N (Smith, Modern Optical Engineering).
+ * Ranges: defocus_um 0 to 2^32; focal_ratio 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_defocus_blur_f32(float defocus_um,
+                                            float focal_ratio,
+                                            float *blur_um);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the diameter of a star's image out of focus, by geometry, in micrometres, in double.
+ *
+ * d / N (Smith, Modern Optical Engineering).
+ * Ranges: defocus_um 0 to 2^32; focal_ratio 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_defocus_blur_f64(double defocus_um,
+                                            double focal_ratio,
+                                            double *blur_um);
+#endif
+
+/**
+ * Gives the error of the wavefront out of focus, from its lowest to its highest point, in nanometres.
+ *
+ * d / (8 N^2) (Smith, Modern Optical Engineering).
+ * Ranges: focal_ratio_q16 not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_defocus_wavefront_fx(uint32_t defocus_nm,
+                                                uint32_t focal_ratio_q16,
+                                                uint32_t *wavefront_nm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the error of the wavefront out of focus, from its lowest to its highest point, in nanometres.
+ *
+ * d / (8 N^2) (Smith, Modern Optical Engineering).
+ * Ranges: defocus_um 0 to 2^32; focal_ratio 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_defocus_wavefront_f32(float defocus_um,
+                                                 float focal_ratio,
+                                                 float *wavefront_nm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the error of the wavefront out of focus, from its lowest to its highest point, in nanometres, in double.
+ *
+ * d / (8 N^2) (Smith, Modern Optical Engineering).
+ * Ranges: defocus_um 0 to 2^32; focal_ratio 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_defocus_wavefront_f64(double defocus_um,
+                                                 double focal_ratio,
+                                                 double *wavefront_nm);
+#endif
+
+/**
+ * Gives how many steps of the focus motor a distance takes, to the nearest.
+ *
+ * d / s (counting).
+ * Ranges: step_nm not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_motor_steps_fx(uint32_t distance_nm,
+                                          uint32_t step_nm,
+                                          uint32_t *steps);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many steps of the focus motor a distance takes, steps and their fraction.
+ *
+ * d / s (counting).
+ * Ranges: distance_um 0 to 2^32; step_um 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_motor_steps_f32(float distance_um,
+                                           float step_um,
+                                           float *steps);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many steps of the focus motor a distance takes, steps and their fraction, in double.
+ *
+ * d / s (counting).
+ * Ranges: distance_um 0 to 2^32; step_um 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_motor_steps_f64(double distance_um,
+                                           double step_um,
+                                           double *steps);
+#endif
+
+/**
+ * Gives how much longer a tube or a rod gets by a change of temperature, negative where it gets shorter, in
+ * nanometres.
+ *
+ * L a dT (CRC Handbook of Chemistry and Physics, linear expansion).
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_thermal_shift_fx(uint32_t length_um,
+                                            int32_t expansion_ppb_per_k,
+                                            int32_t temperature_change_mk,
+                                            int32_t *shift_nm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how much longer a tube or a rod gets by a change of temperature, negative where it gets shorter, in
+ * micrometres.
+ *
+ * L a dT (CRC Handbook of Chemistry and Physics, linear expansion).
+ * Ranges: length_mm 0 to 2^32; expansion_ppm_per_k, temperature_change_k -2^32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_thermal_shift_f32(float length_mm,
+                                             float expansion_ppm_per_k,
+                                             float temperature_change_k,
+                                             float *shift_um);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how much longer a tube or a rod gets by a change of temperature, negative where it gets shorter, in
+ * micrometres, in double.
+ *
+ * L a dT (CRC Handbook of Chemistry and Physics, linear expansion).
+ * Ranges: length_mm 0 to 2^32; expansion_ppm_per_k, temperature_change_k -2^32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_thermal_shift_f64(double length_mm,
+                                             double expansion_ppm_per_k,
+                                             double temperature_change_k,
+                                             double *shift_um);
+#endif
+
+/**
+ * Gives the change of temperature that uses up a tolerance of focus, in millikelvin.
+ *
+ * t / (L a), a the size of the coefficient of linear expansion (CRC Handbook of Chemistry and Physics, linear
+ * expansion).
+ * Ranges: length_um, expansion_ppb_per_k not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_refocus_temperature_fx(uint32_t length_um,
+                                                  uint32_t expansion_ppb_per_k,
+                                                  uint32_t tolerance_nm,
+                                                  uint32_t *temperature_change_mk);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the change of temperature that uses up a tolerance of focus, in kelvin.
+ *
+ * t / (L a), a the size of the coefficient of linear expansion (CRC Handbook of Chemistry and Physics, linear
+ * expansion).
+ * Ranges: length_mm, expansion_ppm_per_k 2^-32 to 2^32; tolerance_um 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_refocus_temperature_f32(float length_mm,
+                                                   float expansion_ppm_per_k,
+                                                   float tolerance_um,
+                                                   float *temperature_change_k);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the change of temperature that uses up a tolerance of focus, in kelvin, in double.
+ *
+ * t / (L a), a the size of the coefficient of linear expansion (CRC Handbook of Chemistry and Physics, linear
+ * expansion).
+ * Ranges: length_mm, expansion_ppm_per_k 2^-32 to 2^32; tolerance_um 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_refocus_temperature_f64(double length_mm,
+                                                   double expansion_ppm_per_k,
+                                                   double tolerance_um,
+                                                   double *temperature_change_k);
+#endif
+
+/**
+ * Gives how far the focus lies behind its place for a star when the object is near, in micrometres.
+ *
+ * f^2 / (s - f) (Hecht, Optics).
+ * Ranges: focal_length_um not 0; object_distance_mm beyond the focal length.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_near_focus_travel_fx(uint32_t focal_length_um,
+                                                uint32_t object_distance_mm,
+                                                uint32_t *travel_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how far the focus lies behind its place for a star when the object is near, in millimetres.
+ *
+ * f^2 / (s - f) (Hecht, Optics).
+ * Ranges: focal_length_mm 2^-32 to 2^32; object_distance_m beyond the focal length, to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_near_focus_travel_f32(float focal_length_mm,
+                                                 float object_distance_m,
+                                                 float *travel_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how far the focus lies behind its place for a star when the object is near, in millimetres, in double.
+ *
+ * f^2 / (s - f) (Hecht, Optics).
+ * Ranges: focal_length_mm 2^-32 to 2^32; object_distance_m beyond the focal length, to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_near_focus_travel_f64(double focal_length_mm,
+                                                 double object_distance_m,
+                                                 double *travel_mm);
+#endif
+
+/**
+ * Gives how long the coma of a paraboloid draws a star out, off the axis, in microarcseconds.
+ *
+ * 3 t / (16 N^2), the tangential coma (Schroeder, Astronomical Optics).
+ * Ranges: focal_ratio_q16 not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_coma_length_fx(uint32_t off_axis_mas,
+                                          uint32_t focal_ratio_q16,
+                                          uint32_t *coma_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how long the coma of a paraboloid draws a star out, off the axis, in arcseconds.
+ *
+ * 3 t / (16 N^2), the tangential coma (Schroeder, Astronomical Optics).
+ * Ranges: off_axis_arcsec 0 to 2^32; focal_ratio 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_coma_length_f32(float off_axis_arcsec,
+                                           float focal_ratio,
+                                           float *coma_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how long the coma of a paraboloid draws a star out, off the axis, in arcseconds, in double.
+ *
+ * 3 t / (16 N^2), the tangential coma (Schroeder, Astronomical Optics).
+ * Ranges: off_axis_arcsec 0 to 2^32; focal_ratio 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_coma_length_f64(double off_axis_arcsec,
+                                           double focal_ratio,
+                                           double *coma_arcsec);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
+   Layout of mirrors and tube: how large the mirrors are and where they stand, what they leave
+   of the light, and what the tube needs around it. */
+
+/**
+ * Gives the minor axis of the smallest 45 degree diagonal that takes in the whole beam of a lit field, in
+ * micrometres.
+ *
+ * 2 w / (1 - g^2), g = (D - F) / 2f, w = F/2 + g L; the primary's rim in the plane of its vertex: for a
+ * paraboloid's true rim pass f - D^2 / 16f as the focal length (geometry).
+ * Ranges: aperture_um, focal_length_um not 0; focus_distance_um at most the focal length; lit_field_um under the
+ * aperture and over it less twice the focal length.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_minor_axis_fx(uint32_t aperture_um,
+                                                  uint32_t focal_length_um,
+                                                  uint32_t focus_distance_um,
+                                                  uint32_t lit_field_um,
+                                                  uint32_t *minor_axis_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the minor axis of the smallest 45 degree diagonal that takes in the whole beam of a lit field, in
+ * millimetres.
+ *
+ * 2 w / (1 - g^2), g = (D - F) / 2f, w = F/2 + g L; the primary's rim in the plane of its vertex: for a
+ * paraboloid's true rim pass f - D^2 / 16f as the focal length (geometry).
+ * Ranges: aperture_mm, focal_length_mm 2^-32 to 2^32; focus_distance_mm 0 to the focal length; lit_field_mm from
+ * 0, under the aperture and over it less twice the focal length.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_minor_axis_f32(float aperture_mm,
+                                                   float focal_length_mm,
+                                                   float focus_distance_mm,
+                                                   float lit_field_mm,
+                                                   float *minor_axis_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the minor axis of the smallest 45 degree diagonal that takes in the whole beam of a lit field, in
+ * millimetres, in double.
+ *
+ * 2 w / (1 - g^2), g = (D - F) / 2f, w = F/2 + g L; the primary's rim in the plane of its vertex: for a
+ * paraboloid's true rim pass f - D^2 / 16f as the focal length (geometry).
+ * Ranges: aperture_mm, focal_length_mm 2^-32 to 2^32; focus_distance_mm 0 to the focal length; lit_field_mm from
+ * 0, under the aperture and over it less twice the focal length.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_minor_axis_f64(double aperture_mm,
+                                                   double focal_length_mm,
+                                                   double focus_distance_mm,
+                                                   double lit_field_mm,
+                                                   double *minor_axis_mm);
+#endif
+
+/**
+ * Gives how far the diagonal's centre is moved off the axis, away from the focuser, and as much toward the
+ * primary, in micrometres.
+ *
+ * w g / (1 - g^2), g = (D - F) / 2f, w = F/2 + g L (geometry).
+ * Ranges: aperture_um, focal_length_um not 0; focus_distance_um at most the focal length; lit_field_um under the
+ * aperture and over it less twice the focal length.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_offset_fx(uint32_t aperture_um,
+                                              uint32_t focal_length_um,
+                                              uint32_t focus_distance_um,
+                                              uint32_t lit_field_um,
+                                              uint32_t *offset_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how far the diagonal's centre is moved off the axis, away from the focuser, and as much toward the
+ * primary, in millimetres.
+ *
+ * w g / (1 - g^2), g = (D - F) / 2f, w = F/2 + g L (geometry).
+ * Ranges: aperture_mm, focal_length_mm 2^-32 to 2^32; focus_distance_mm 0 to the focal length; lit_field_mm from
+ * 0, under the aperture and over it less twice the focal length.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_offset_f32(float aperture_mm,
+                                               float focal_length_mm,
+                                               float focus_distance_mm,
+                                               float lit_field_mm,
+                                               float *offset_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how far the diagonal's centre is moved off the axis, away from the focuser, and as much toward the
+ * primary, in millimetres, in double.
+ *
+ * w g / (1 - g^2), g = (D - F) / 2f, w = F/2 + g L (geometry).
+ * Ranges: aperture_mm, focal_length_mm 2^-32 to 2^32; focus_distance_mm 0 to the focal length; lit_field_mm from
+ * 0, under the aperture and over it less twice the focal length.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_offset_f64(double aperture_mm,
+                                               double focal_length_mm,
+                                               double focus_distance_mm,
+                                               double lit_field_mm,
+                                               double *offset_mm);
+#endif
+
+/**
+ * Gives the diameter of the beam to the middle of the field, at a distance before the focus, in micrometres.
+ *
+ * D L / f (Smith, Modern Optical Engineering).
+ * Ranges: aperture_um, focal_length_um not 0; focus_distance_um at most the focal length.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_beam_width_fx(uint32_t aperture_um,
+                                         uint32_t focal_length_um,
+                                         uint32_t focus_distance_um,
+                                         uint32_t *width_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the diameter of the beam to the middle of the field, at a distance before the focus, in millimetres.
+ *
+ * D L / f (Smith, Modern Optical Engineering).
+ * Ranges: aperture_mm, focal_length_mm 2^-32 to 2^32; focus_distance_mm 0 to the focal length.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_beam_width_f32(float aperture_mm,
+                                          float focal_length_mm,
+                                          float focus_distance_mm,
+                                          float *width_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the diameter of the beam to the middle of the field, at a distance before the focus, in millimetres, in
+ * double.
+ *
+ * D L / f (Smith, Modern Optical Engineering).
+ * Ranges: aperture_mm, focal_length_mm 2^-32 to 2^32; focus_distance_mm 0 to the focal length.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_beam_width_f64(double aperture_mm,
+                                          double focal_length_mm,
+                                          double focus_distance_mm,
+                                          double *width_mm);
+#endif
+
+/**
+ * Gives how far off the axis the beam to an image point off the axis has its centre, at a distance before the
+ * focus, in micrometres.
+ *
+ * y (f - L) / f (geometry).
+ * Ranges: focal_length_um not 0; focus_distance_um at most the focal length.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_beam_shift_fx(uint32_t image_offset_um,
+                                         uint32_t focal_length_um,
+                                         uint32_t focus_distance_um,
+                                         uint32_t *shift_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how far off the axis the beam to an image point off the axis has its centre, at a distance before the
+ * focus, in millimetres.
+ *
+ * y (f - L) / f (geometry).
+ * Ranges: image_offset_mm 0 to 2^32; focal_length_mm 2^-32 to 2^32; focus_distance_mm 0 to the focal length.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_beam_shift_f32(float image_offset_mm,
+                                          float focal_length_mm,
+                                          float focus_distance_mm,
+                                          float *shift_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how far off the axis the beam to an image point off the axis has its centre, at a distance before the
+ * focus, in millimetres, in double.
+ *
+ * y (f - L) / f (geometry).
+ * Ranges: image_offset_mm 0 to 2^32; focal_length_mm 2^-32 to 2^32; focus_distance_mm 0 to the focal length.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_beam_shift_f64(double image_offset_mm,
+                                          double focal_length_mm,
+                                          double focus_distance_mm,
+                                          double *shift_mm);
+#endif
+
+/**
+ * Gives how much the second mirror lengthens the primary's focal length, in Q16.16.
+ *
+ * F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_um not 0; system_focal_um over primary_focal_um.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_magnification_fx(uint32_t primary_focal_um,
+                                                      uint32_t system_focal_um,
+                                                      uint32_t *magnification_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how much the second mirror lengthens the primary's focal length, a plain number.
+ *
+ * F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_magnification_f32(float primary_focal_mm,
+                                                       float system_focal_mm,
+                                                       float *magnification);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how much the second mirror lengthens the primary's focal length, a plain number, in double.
+ *
+ * F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_magnification_f64(double primary_focal_mm,
+                                                       double system_focal_mm,
+                                                       double *magnification);
+#endif
+
+/**
+ * Gives how far the second mirror stands before the primary, from vertex to vertex, in micrometres.
+ *
+ * f1 - p, p = (f1 + b) / (m + 1), m = F / f1, b from the vertex of the primary to the focus behind it (Schroeder,
+ * Astronomical Optics).
+ * Ranges: primary_focal_um not 0; system_focal_um over primary_focal_um; back_focus_um at most system_focal_um.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_separation_fx(uint32_t primary_focal_um,
+                                                   uint32_t system_focal_um,
+                                                   uint32_t back_focus_um,
+                                                   uint32_t *separation_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how far the second mirror stands before the primary, from vertex to vertex, in millimetres.
+ *
+ * f1 - p, p = (f1 + b) / (m + 1), m = F / f1, b from the vertex of the primary to the focus behind it (Schroeder,
+ * Astronomical Optics).
+ * Ranges: primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm; back_focus_mm 0 to
+ * system_focal_mm.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_separation_f32(float primary_focal_mm,
+                                                    float system_focal_mm,
+                                                    float back_focus_mm,
+                                                    float *separation_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how far the second mirror stands before the primary, from vertex to vertex, in millimetres, in double.
+ *
+ * f1 - p, p = (f1 + b) / (m + 1), m = F / f1, b from the vertex of the primary to the focus behind it (Schroeder,
+ * Astronomical Optics).
+ * Ranges: primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm; back_focus_mm 0 to
+ * system_focal_mm.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_separation_f64(double primary_focal_mm,
+                                                    double system_focal_mm,
+                                                    double back_focus_mm,
+                                                    double *separation_mm);
+#endif
+
+/**
+ * Gives the diameter of the second mirror for the image point on the axis, in micrometres.
+ *
+ * D p / f1, p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_um, primary_focal_um not 0; system_focal_um over primary_focal_um; back_focus_um at most
+ * system_focal_um.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_diameter_fx(uint32_t aperture_um,
+                                                 uint32_t primary_focal_um,
+                                                 uint32_t system_focal_um,
+                                                 uint32_t back_focus_um,
+                                                 uint32_t *diameter_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the diameter of the second mirror for the image point on the axis, in millimetres.
+ *
+ * D p / f1, p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm, primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm; back_focus_mm 0 to
+ * system_focal_mm.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_diameter_f32(float aperture_mm,
+                                                  float primary_focal_mm,
+                                                  float system_focal_mm,
+                                                  float back_focus_mm,
+                                                  float *diameter_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the diameter of the second mirror for the image point on the axis, in millimetres, in double.
+ *
+ * D p / f1, p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: aperture_mm, primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm; back_focus_mm 0 to
+ * system_focal_mm.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_diameter_f64(double aperture_mm,
+                                                  double primary_focal_mm,
+                                                  double system_focal_mm,
+                                                  double back_focus_mm,
+                                                  double *diameter_mm);
+#endif
+
+/**
+ * Gives what a lit field adds to the second mirror's diameter, in micrometres.
+ *
+ * i (f1 - p) / F, p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_um not 0; system_focal_um over primary_focal_um; back_focus_um at most system_focal_um.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_field_margin_fx(uint32_t primary_focal_um,
+                                                     uint32_t system_focal_um,
+                                                     uint32_t back_focus_um,
+                                                     uint32_t lit_field_um,
+                                                     uint32_t *margin_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives what a lit field adds to the second mirror's diameter, in millimetres.
+ *
+ * i (f1 - p) / F, p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm; back_focus_mm 0 to
+ * system_focal_mm; lit_field_mm 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_field_margin_f32(float primary_focal_mm,
+                                                      float system_focal_mm,
+                                                      float back_focus_mm,
+                                                      float lit_field_mm,
+                                                      float *margin_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives what a lit field adds to the second mirror's diameter, in millimetres, in double.
+ *
+ * i (f1 - p) / F, p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm; back_focus_mm 0 to
+ * system_focal_mm; lit_field_mm 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_field_margin_f64(double primary_focal_mm,
+                                                      double system_focal_mm,
+                                                      double back_focus_mm,
+                                                      double lit_field_mm,
+                                                      double *margin_mm);
+#endif
+
+/**
+ * Gives the radius of curvature of the second mirror, which is convex, in micrometres.
+ *
+ * 2 p m / (m - 1), p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_um not 0; system_focal_um over primary_focal_um; back_focus_um at most system_focal_um.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_radius_fx(uint32_t primary_focal_um,
+                                               uint32_t system_focal_um,
+                                               uint32_t back_focus_um,
+                                               uint32_t *radius_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the radius of curvature of the second mirror, which is convex, in millimetres.
+ *
+ * 2 p m / (m - 1), p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm; back_focus_mm 0 to
+ * system_focal_mm.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_radius_f32(float primary_focal_mm,
+                                                float system_focal_mm,
+                                                float back_focus_mm,
+                                                float *radius_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the radius of curvature of the second mirror, which is convex, in millimetres, in double.
+ *
+ * 2 p m / (m - 1), p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
+ * Ranges: primary_focal_mm 2^-32 to 2^32; system_focal_mm over primary_focal_mm; back_focus_mm 0 to
+ * system_focal_mm.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_radius_f64(double primary_focal_mm,
+                                                double system_focal_mm,
+                                                double back_focus_mm,
+                                                double *radius_mm);
+#endif
+
+/**
+ * Gives the share of a beam's disc that lies inside a stop's or a mirror's, in Q16.16.
+ *
+ * the area that the two discs share over that of the beam (CRC Standard Mathematical Tables, circular segment).
+ * Ranges: beam_um not 0; the first two are diameters, the third is the distance of their centres.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_illumination_fx(uint32_t beam_um,
+                                           uint32_t stop_um,
+                                           uint32_t offset_um,
+                                           uint32_t *share_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the share of a beam's disc that lies inside a stop's or a mirror's, a plain number.
+ *
+ * the area that the two discs share over that of the beam (CRC Standard Mathematical Tables, circular segment).
+ * Ranges: beam_mm 2^-32 to 2^32; stop_mm, offset_mm 0 to 2^32; the first two are diameters, the third is the
+ * distance of their centres.
+ * Error: at most 1e-6, absolute.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_illumination_f32(float beam_mm,
+                                            float stop_mm,
+                                            float offset_mm,
+                                            float *share);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the share of a beam's disc that lies inside a stop's or a mirror's, a plain number, in double.
+ *
+ * the area that the two discs share over that of the beam (CRC Standard Mathematical Tables, circular segment).
+ * Ranges: beam_mm 2^-32 to 2^32; stop_mm, offset_mm 0 to 2^32; the first two are diameters, the third is the
+ * distance of their centres.
+ * Error: at most 1e-14, absolute.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_illumination_f64(double beam_mm,
+                                            double stop_mm,
+                                            double offset_mm,
+                                            double *share);
+#endif
+
+/**
+ * Gives the radius that the tube's far end sweeps about the pivot, which the room must clear, in micrometres.
+ *
+ * sqrt(L^2 + (D/2)^2) (geometry).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, dew caps, counterweights and cables too,
+ * and follow the maker's instructions and local rules.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_swing_radius_fx(uint32_t reach_um,
+                                           uint32_t tube_diameter_um,
+                                           uint32_t *radius_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the radius that the tube's far end sweeps about the pivot, which the room must clear, in millimetres.
+ *
+ * sqrt(L^2 + (D/2)^2) (geometry).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, dew caps, counterweights and cables too,
+ * and follow the maker's instructions and local rules.
+ * Ranges: reach_mm, tube_diameter_mm 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_swing_radius_f32(float reach_mm,
+                                            float tube_diameter_mm,
+                                            float *radius_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the radius that the tube's far end sweeps about the pivot, which the room must clear, in millimetres, in
+ * double.
+ *
+ * sqrt(L^2 + (D/2)^2) (geometry).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, dew caps, counterweights and cables too,
+ * and follow the maker's instructions and local rules.
+ * Ranges: reach_mm, tube_diameter_mm 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_swing_radius_f64(double reach_mm,
+                                            double tube_diameter_mm,
+                                            double *radius_mm);
+#endif
+
+/**
+ * Gives how high the eyepiece stands above the floor, in micrometres.
+ *
+ * h + r sin(altitude), r from the altitude axis to the eyepiece along the tube, negative where it is at the lower
+ * end (geometry).
+ * Caution: where it is high, stand on a stable platform, never on the top of a ladder, and clear of the moving
+ * mount; follow the makers' instructions and local rules.
+ * Ranges: altitude_bam 0 to 2^30, 90 degrees.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, out of range, overflow (also below the floor).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_height_fx(uint32_t axis_height_um,
+                                              int32_t reach_um,
+                                              int32_t altitude_bam,
+                                              uint32_t *height_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how high the eyepiece stands above the floor, in millimetres.
+ *
+ * h + r sin(altitude), r from the altitude axis to the eyepiece along the tube, negative where it is at the lower
+ * end (geometry).
+ * Caution: where it is high, stand on a stable platform, never on the top of a ladder, and clear of the moving
+ * mount; follow the makers' instructions and local rules.
+ * Ranges: axis_height_mm 0 to 2^32; reach_mm -2^32 to 2^32; altitude_deg 0 to 90.
+ * Error: at most 2 ulp of the larger term.
+ * Statuses: null pointer, out of range, not finite, overflow (also below the floor).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_height_f32(float axis_height_mm,
+                                               float reach_mm,
+                                               float altitude_deg,
+                                               float *height_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how high the eyepiece stands above the floor, in millimetres, in double.
+ *
+ * h + r sin(altitude), r from the altitude axis to the eyepiece along the tube, negative where it is at the lower
+ * end (geometry).
+ * Caution: where it is high, stand on a stable platform, never on the top of a ladder, and clear of the moving
+ * mount; follow the makers' instructions and local rules.
+ * Ranges: axis_height_mm 0 to 2^32; reach_mm -2^32 to 2^32; altitude_deg 0 to 90.
+ * Error: at most 2 ulp of the larger term.
+ * Statuses: null pointer, out of range, not finite, overflow (also below the floor).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_eyepiece_height_f64(double axis_height_mm,
+                                               double reach_mm,
+                                               double altitude_deg,
+                                               double *height_mm);
 #endif
 
 /* --------------------------------------------------------------------------------------------------

@@ -262,8 +262,14 @@ typedef quantity<unit::arcseconds_per_millimetre, float> arcseconds_per_millimet
 typedef quantity<unit::binary_angle, int32_t> signed_binary_angle;
 typedef quantity<unit::binary_angle, uint32_t> binary_angle;
 typedef quantity<unit::day_milliseconds, uint32_t> day_milliseconds;
+typedef quantity<unit::degrees_of_arc, double> degrees_of_arc_f64;
+typedef quantity<unit::degrees_of_arc, float> degrees_of_arc_f32;
+typedef quantity<unit::kelvin, double> kelvin_f64;
+typedef quantity<unit::kelvin, float> kelvin_f32;
 typedef quantity<unit::magnitudes, double> magnitudes_f64;
 typedef quantity<unit::magnitudes, float> magnitudes_f32;
+typedef quantity<unit::metres, double> metres_f64;
+typedef quantity<unit::metres, float> metres_f32;
 typedef quantity<unit::microarcseconds, uint32_t> microarcseconds;
 typedef quantity<unit::micrometres, double> micrometres_f64;
 typedef quantity<unit::micrometres, float> micrometres_f32;
@@ -272,13 +278,21 @@ typedef quantity<unit::micrometres, uint32_t> micrometres;
 typedef quantity<unit::milliarcseconds, int32_t> signed_milliarcseconds;
 typedef quantity<unit::milliarcseconds, uint32_t> milliarcseconds;
 typedef quantity<unit::milliarcseconds_per_millimetre, uint32_t> milliarcseconds_per_millimetre;
+typedef quantity<unit::millikelvin, int32_t> signed_millikelvin;
+typedef quantity<unit::millikelvin, uint32_t> millikelvin;
 typedef quantity<unit::millimagnitudes, int32_t> millimagnitudes;
 typedef quantity<unit::millimagnitudes, uint32_t> unsigned_millimagnitudes;
 typedef quantity<unit::millimetres, double> millimetres_f64;
 typedef quantity<unit::millimetres, float> millimetres_f32;
+typedef quantity<unit::millimetres, uint32_t> millimetres;
 typedef quantity<unit::nanometres, double> nanometres_f64;
 typedef quantity<unit::nanometres, float> nanometres_f32;
+typedef quantity<unit::nanometres, int32_t> signed_nanometres;
 typedef quantity<unit::nanometres, uint32_t> nanometres;
+typedef quantity<unit::parts_per_billion_per_kelvin, int32_t> signed_parts_per_billion_per_kelvin;
+typedef quantity<unit::parts_per_billion_per_kelvin, uint32_t> parts_per_billion_per_kelvin;
+typedef quantity<unit::parts_per_million_per_kelvin, double> parts_per_million_per_kelvin_f64;
+typedef quantity<unit::parts_per_million_per_kelvin, float> parts_per_million_per_kelvin_f32;
 typedef quantity<unit::q16, uint32_t> q16;
 typedef quantity<unit::thousandths, uint32_t> thousandths;
 
@@ -2024,6 +2038,570 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> t_number_f64(double focal_rati
     double given;
     const fieldstop_status number = ::fieldstop_t_number_f64(focal_ratio, throughput, &given);
     return access::given<double>(number, given);
+}
+#endif
+
+/* Focus: how deep it is, what a miss costs, and how far heat, a near object and the edge of the field move it. */
+
+/** Gives how far from the focus, each side, the wavefront is a quarter wave off, in nanometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<nanometres> depth_of_focus_fx(q16 focal_ratio_q16, nanometres wavelength_nm)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_depth_of_focus_fx(focal_ratio_q16.count(), wavelength_nm.count(), &given);
+    return access::given<nanometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how far from the focus, each side, the wavefront is a quarter wave off, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f32> depth_of_focus_f32(float focal_ratio, nanometres_f32 wavelength_nm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_depth_of_focus_f32(focal_ratio, wavelength_nm.count(), &given);
+    return access::given<micrometres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how far from the focus, each side, the wavefront is a quarter wave off, in micrometres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f64> depth_of_focus_f64(double focal_ratio, nanometres_f64 wavelength_nm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_depth_of_focus_f64(focal_ratio, wavelength_nm.count(), &given);
+    return access::given<micrometres_f64>(number, given);
+}
+#endif
+
+/** Gives the diameter of a star's image out of focus, by geometry, in nanometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<nanometres> defocus_blur_fx(nanometres defocus_nm, q16 focal_ratio_q16)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_defocus_blur_fx(defocus_nm.count(), focal_ratio_q16.count(), &given);
+    return access::given<nanometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the diameter of a star's image out of focus, by geometry, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f32> defocus_blur_f32(micrometres_f32 defocus_um, float focal_ratio)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_defocus_blur_f32(defocus_um.count(), focal_ratio, &given);
+    return access::given<micrometres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the diameter of a star's image out of focus, by geometry, in micrometres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f64> defocus_blur_f64(micrometres_f64 defocus_um, double focal_ratio)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_defocus_blur_f64(defocus_um.count(), focal_ratio, &given);
+    return access::given<micrometres_f64>(number, given);
+}
+#endif
+
+/** Gives the error of the wavefront out of focus, from its lowest to its highest point, in nanometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<nanometres> defocus_wavefront_fx(nanometres defocus_nm, q16 focal_ratio_q16)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_defocus_wavefront_fx(defocus_nm.count(), focal_ratio_q16.count(), &given);
+    return access::given<nanometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the error of the wavefront out of focus, from its lowest to its highest point, in nanometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<nanometres_f32> defocus_wavefront_f32(micrometres_f32 defocus_um, float focal_ratio)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_defocus_wavefront_f32(defocus_um.count(), focal_ratio, &given);
+    return access::given<nanometres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the error of the wavefront out of focus, from its lowest to its highest point, in nanometres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<nanometres_f64> defocus_wavefront_f64(micrometres_f64 defocus_um, double focal_ratio)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_defocus_wavefront_f64(defocus_um.count(), focal_ratio, &given);
+    return access::given<nanometres_f64>(number, given);
+}
+#endif
+
+/** Gives how many steps of the focus motor a distance takes, to the nearest. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint32_t> motor_steps_fx(nanometres distance_nm, nanometres step_nm)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_motor_steps_fx(distance_nm.count(), step_nm.count(), &given);
+    return access::given<uint32_t>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how many steps of the focus motor a distance takes, steps and their fraction. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<float> motor_steps_f32(micrometres_f32 distance_um, micrometres_f32 step_um)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_motor_steps_f32(distance_um.count(), step_um.count(), &given);
+    return access::given<float>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how many steps of the focus motor a distance takes, steps and their fraction, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> motor_steps_f64(micrometres_f64 distance_um, micrometres_f64 step_um)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_motor_steps_f64(distance_um.count(), step_um.count(), &given);
+    return access::given<double>(number, given);
+}
+#endif
+
+/** Gives how much longer a tube or a rod gets by a change of temperature, negative where it gets shorter, in nanometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<signed_nanometres> thermal_shift_fx(micrometres length_um, signed_parts_per_billion_per_kelvin expansion_ppb_per_k, signed_millikelvin temperature_change_mk)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_thermal_shift_fx(length_um.count(), expansion_ppb_per_k.count(), temperature_change_mk.count(), &given);
+    return access::given<signed_nanometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how much longer a tube or a rod gets by a change of temperature, negative where it gets shorter, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f32> thermal_shift_f32(millimetres_f32 length_mm, parts_per_million_per_kelvin_f32 expansion_ppm_per_k, kelvin_f32 temperature_change_k)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_thermal_shift_f32(length_mm.count(), expansion_ppm_per_k.count(), temperature_change_k.count(), &given);
+    return access::given<micrometres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how much longer a tube or a rod gets by a change of temperature, negative where it gets shorter, in micrometres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f64> thermal_shift_f64(millimetres_f64 length_mm, parts_per_million_per_kelvin_f64 expansion_ppm_per_k, kelvin_f64 temperature_change_k)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_thermal_shift_f64(length_mm.count(), expansion_ppm_per_k.count(), temperature_change_k.count(), &given);
+    return access::given<micrometres_f64>(number, given);
+}
+#endif
+
+/** Gives the change of temperature that uses up a tolerance of focus, in millikelvin. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millikelvin> refocus_temperature_fx(micrometres length_um, parts_per_billion_per_kelvin expansion_ppb_per_k, nanometres tolerance_nm)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_refocus_temperature_fx(length_um.count(), expansion_ppb_per_k.count(), tolerance_nm.count(), &given);
+    return access::given<millikelvin>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the change of temperature that uses up a tolerance of focus, in kelvin. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<kelvin_f32> refocus_temperature_f32(millimetres_f32 length_mm, parts_per_million_per_kelvin_f32 expansion_ppm_per_k, micrometres_f32 tolerance_um)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_refocus_temperature_f32(length_mm.count(), expansion_ppm_per_k.count(), tolerance_um.count(), &given);
+    return access::given<kelvin_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the change of temperature that uses up a tolerance of focus, in kelvin, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<kelvin_f64> refocus_temperature_f64(millimetres_f64 length_mm, parts_per_million_per_kelvin_f64 expansion_ppm_per_k, micrometres_f64 tolerance_um)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_refocus_temperature_f64(length_mm.count(), expansion_ppm_per_k.count(), tolerance_um.count(), &given);
+    return access::given<kelvin_f64>(number, given);
+}
+#endif
+
+/** Gives how far the focus lies behind its place for a star when the object is near, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> near_focus_travel_fx(micrometres focal_length_um, millimetres object_distance_mm)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_near_focus_travel_fx(focal_length_um.count(), object_distance_mm.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how far the focus lies behind its place for a star when the object is near, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> near_focus_travel_f32(millimetres_f32 focal_length_mm, metres_f32 object_distance_m)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_near_focus_travel_f32(focal_length_mm.count(), object_distance_m.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how far the focus lies behind its place for a star when the object is near, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> near_focus_travel_f64(millimetres_f64 focal_length_mm, metres_f64 object_distance_m)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_near_focus_travel_f64(focal_length_mm.count(), object_distance_m.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives how long the coma of a paraboloid draws a star out, off the axis, in microarcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<microarcseconds> coma_length_fx(milliarcseconds off_axis_mas, q16 focal_ratio_q16)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_coma_length_fx(off_axis_mas.count(), focal_ratio_q16.count(), &given);
+    return access::given<microarcseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how long the coma of a paraboloid draws a star out, off the axis, in arcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> coma_length_f32(arcseconds_f32 off_axis_arcsec, float focal_ratio)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_coma_length_f32(off_axis_arcsec.count(), focal_ratio, &given);
+    return access::given<arcseconds_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how long the coma of a paraboloid draws a star out, off the axis, in arcseconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> coma_length_f64(arcseconds_f64 off_axis_arcsec, double focal_ratio)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_coma_length_f64(off_axis_arcsec.count(), focal_ratio, &given);
+    return access::given<arcseconds_f64>(number, given);
+}
+#endif
+
+/* Layout of mirrors and tube: how large the mirrors are and where they stand, what they leave of the light, and what the tube needs around it. */
+
+/** Gives the minor axis of the smallest 45 degree diagonal that takes in the whole beam of a lit field, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> diagonal_minor_axis_fx(micrometres aperture_um, micrometres focal_length_um, micrometres focus_distance_um, micrometres lit_field_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_diagonal_minor_axis_fx(aperture_um.count(), focal_length_um.count(), focus_distance_um.count(), lit_field_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the minor axis of the smallest 45 degree diagonal that takes in the whole beam of a lit field, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> diagonal_minor_axis_f32(millimetres_f32 aperture_mm, millimetres_f32 focal_length_mm, millimetres_f32 focus_distance_mm, millimetres_f32 lit_field_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_diagonal_minor_axis_f32(aperture_mm.count(), focal_length_mm.count(), focus_distance_mm.count(), lit_field_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the minor axis of the smallest 45 degree diagonal that takes in the whole beam of a lit field, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> diagonal_minor_axis_f64(millimetres_f64 aperture_mm, millimetres_f64 focal_length_mm, millimetres_f64 focus_distance_mm, millimetres_f64 lit_field_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_diagonal_minor_axis_f64(aperture_mm.count(), focal_length_mm.count(), focus_distance_mm.count(), lit_field_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives how far the diagonal's centre is moved off the axis, away from the focuser, and as much toward the primary, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> diagonal_offset_fx(micrometres aperture_um, micrometres focal_length_um, micrometres focus_distance_um, micrometres lit_field_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_diagonal_offset_fx(aperture_um.count(), focal_length_um.count(), focus_distance_um.count(), lit_field_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how far the diagonal's centre is moved off the axis, away from the focuser, and as much toward the primary, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> diagonal_offset_f32(millimetres_f32 aperture_mm, millimetres_f32 focal_length_mm, millimetres_f32 focus_distance_mm, millimetres_f32 lit_field_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_diagonal_offset_f32(aperture_mm.count(), focal_length_mm.count(), focus_distance_mm.count(), lit_field_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how far the diagonal's centre is moved off the axis, away from the focuser, and as much toward the primary, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> diagonal_offset_f64(millimetres_f64 aperture_mm, millimetres_f64 focal_length_mm, millimetres_f64 focus_distance_mm, millimetres_f64 lit_field_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_diagonal_offset_f64(aperture_mm.count(), focal_length_mm.count(), focus_distance_mm.count(), lit_field_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives the diameter of the beam to the middle of the field, at a distance before the focus, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> beam_width_fx(micrometres aperture_um, micrometres focal_length_um, micrometres focus_distance_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_beam_width_fx(aperture_um.count(), focal_length_um.count(), focus_distance_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the diameter of the beam to the middle of the field, at a distance before the focus, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> beam_width_f32(millimetres_f32 aperture_mm, millimetres_f32 focal_length_mm, millimetres_f32 focus_distance_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_beam_width_f32(aperture_mm.count(), focal_length_mm.count(), focus_distance_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the diameter of the beam to the middle of the field, at a distance before the focus, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> beam_width_f64(millimetres_f64 aperture_mm, millimetres_f64 focal_length_mm, millimetres_f64 focus_distance_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_beam_width_f64(aperture_mm.count(), focal_length_mm.count(), focus_distance_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives how far off the axis the beam to an image point off the axis has its centre, at a distance before the focus, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> beam_shift_fx(micrometres image_offset_um, micrometres focal_length_um, micrometres focus_distance_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_beam_shift_fx(image_offset_um.count(), focal_length_um.count(), focus_distance_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how far off the axis the beam to an image point off the axis has its centre, at a distance before the focus, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> beam_shift_f32(millimetres_f32 image_offset_mm, millimetres_f32 focal_length_mm, millimetres_f32 focus_distance_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_beam_shift_f32(image_offset_mm.count(), focal_length_mm.count(), focus_distance_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how far off the axis the beam to an image point off the axis has its centre, at a distance before the focus, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> beam_shift_f64(millimetres_f64 image_offset_mm, millimetres_f64 focal_length_mm, millimetres_f64 focus_distance_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_beam_shift_f64(image_offset_mm.count(), focal_length_mm.count(), focus_distance_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives how much the second mirror lengthens the primary's focal length, in Q16.16. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<q16> secondary_magnification_fx(micrometres primary_focal_um, micrometres system_focal_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_magnification_fx(primary_focal_um.count(), system_focal_um.count(), &given);
+    return access::given<q16>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how much the second mirror lengthens the primary's focal length, a plain number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<float> secondary_magnification_f32(millimetres_f32 primary_focal_mm, millimetres_f32 system_focal_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_magnification_f32(primary_focal_mm.count(), system_focal_mm.count(), &given);
+    return access::given<float>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how much the second mirror lengthens the primary's focal length, a plain number, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> secondary_magnification_f64(millimetres_f64 primary_focal_mm, millimetres_f64 system_focal_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_magnification_f64(primary_focal_mm.count(), system_focal_mm.count(), &given);
+    return access::given<double>(number, given);
+}
+#endif
+
+/** Gives how far the second mirror stands before the primary, from vertex to vertex, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> secondary_separation_fx(micrometres primary_focal_um, micrometres system_focal_um, micrometres back_focus_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_separation_fx(primary_focal_um.count(), system_focal_um.count(), back_focus_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how far the second mirror stands before the primary, from vertex to vertex, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> secondary_separation_f32(millimetres_f32 primary_focal_mm, millimetres_f32 system_focal_mm, millimetres_f32 back_focus_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_separation_f32(primary_focal_mm.count(), system_focal_mm.count(), back_focus_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how far the second mirror stands before the primary, from vertex to vertex, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> secondary_separation_f64(millimetres_f64 primary_focal_mm, millimetres_f64 system_focal_mm, millimetres_f64 back_focus_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_separation_f64(primary_focal_mm.count(), system_focal_mm.count(), back_focus_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives the diameter of the second mirror for the image point on the axis, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> secondary_diameter_fx(micrometres aperture_um, micrometres primary_focal_um, micrometres system_focal_um, micrometres back_focus_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_diameter_fx(aperture_um.count(), primary_focal_um.count(), system_focal_um.count(), back_focus_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the diameter of the second mirror for the image point on the axis, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> secondary_diameter_f32(millimetres_f32 aperture_mm, millimetres_f32 primary_focal_mm, millimetres_f32 system_focal_mm, millimetres_f32 back_focus_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_diameter_f32(aperture_mm.count(), primary_focal_mm.count(), system_focal_mm.count(), back_focus_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the diameter of the second mirror for the image point on the axis, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> secondary_diameter_f64(millimetres_f64 aperture_mm, millimetres_f64 primary_focal_mm, millimetres_f64 system_focal_mm, millimetres_f64 back_focus_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_diameter_f64(aperture_mm.count(), primary_focal_mm.count(), system_focal_mm.count(), back_focus_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives what a lit field adds to the second mirror's diameter, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> secondary_field_margin_fx(micrometres primary_focal_um, micrometres system_focal_um, micrometres back_focus_um, micrometres lit_field_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_field_margin_fx(primary_focal_um.count(), system_focal_um.count(), back_focus_um.count(), lit_field_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives what a lit field adds to the second mirror's diameter, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> secondary_field_margin_f32(millimetres_f32 primary_focal_mm, millimetres_f32 system_focal_mm, millimetres_f32 back_focus_mm, millimetres_f32 lit_field_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_field_margin_f32(primary_focal_mm.count(), system_focal_mm.count(), back_focus_mm.count(), lit_field_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives what a lit field adds to the second mirror's diameter, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> secondary_field_margin_f64(millimetres_f64 primary_focal_mm, millimetres_f64 system_focal_mm, millimetres_f64 back_focus_mm, millimetres_f64 lit_field_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_field_margin_f64(primary_focal_mm.count(), system_focal_mm.count(), back_focus_mm.count(), lit_field_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives the radius of curvature of the second mirror, which is convex, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> secondary_radius_fx(micrometres primary_focal_um, micrometres system_focal_um, micrometres back_focus_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_radius_fx(primary_focal_um.count(), system_focal_um.count(), back_focus_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the radius of curvature of the second mirror, which is convex, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> secondary_radius_f32(millimetres_f32 primary_focal_mm, millimetres_f32 system_focal_mm, millimetres_f32 back_focus_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_radius_f32(primary_focal_mm.count(), system_focal_mm.count(), back_focus_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the radius of curvature of the second mirror, which is convex, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> secondary_radius_f64(millimetres_f64 primary_focal_mm, millimetres_f64 system_focal_mm, millimetres_f64 back_focus_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_radius_f64(primary_focal_mm.count(), system_focal_mm.count(), back_focus_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives the share of a beam's disc that lies inside a stop's or a mirror's, in Q16.16. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<q16> illumination_fx(micrometres beam_um, micrometres stop_um, micrometres offset_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_illumination_fx(beam_um.count(), stop_um.count(), offset_um.count(), &given);
+    return access::given<q16>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the share of a beam's disc that lies inside a stop's or a mirror's, a plain number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<float> illumination_f32(millimetres_f32 beam_mm, millimetres_f32 stop_mm, millimetres_f32 offset_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_illumination_f32(beam_mm.count(), stop_mm.count(), offset_mm.count(), &given);
+    return access::given<float>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the share of a beam's disc that lies inside a stop's or a mirror's, a plain number, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> illumination_f64(millimetres_f64 beam_mm, millimetres_f64 stop_mm, millimetres_f64 offset_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_illumination_f64(beam_mm.count(), stop_mm.count(), offset_mm.count(), &given);
+    return access::given<double>(number, given);
+}
+#endif
+
+/** Gives the radius that the tube's far end sweeps about the pivot, which the room must clear, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> swing_radius_fx(micrometres reach_um, micrometres tube_diameter_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_swing_radius_fx(reach_um.count(), tube_diameter_um.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the radius that the tube's far end sweeps about the pivot, which the room must clear, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> swing_radius_f32(millimetres_f32 reach_mm, millimetres_f32 tube_diameter_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_swing_radius_f32(reach_mm.count(), tube_diameter_mm.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the radius that the tube's far end sweeps about the pivot, which the room must clear, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> swing_radius_f64(millimetres_f64 reach_mm, millimetres_f64 tube_diameter_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_swing_radius_f64(reach_mm.count(), tube_diameter_mm.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives how high the eyepiece stands above the floor, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> eyepiece_height_fx(micrometres axis_height_um, signed_micrometres reach_um, signed_binary_angle altitude_bam)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_eyepiece_height_fx(axis_height_um.count(), reach_um.count(), altitude_bam.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how high the eyepiece stands above the floor, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> eyepiece_height_f32(millimetres_f32 axis_height_mm, millimetres_f32 reach_mm, degrees_of_arc_f32 altitude_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_eyepiece_height_f32(axis_height_mm.count(), reach_mm.count(), altitude_deg.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how high the eyepiece stands above the floor, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> eyepiece_height_f64(millimetres_f64 axis_height_mm, millimetres_f64 reach_mm, degrees_of_arc_f64 altitude_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_eyepiece_height_f64(axis_height_mm.count(), reach_mm.count(), altitude_deg.count(), &given);
+    return access::given<millimetres_f64>(number, given);
 }
 #endif
 

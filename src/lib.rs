@@ -52,7 +52,8 @@
 //! # Caution
 //!
 //! Never look at or near the Sun through a telescope without a full-aperture filter made for it; nothing that this
-//! library computes says that it is safe. Follow the makers' instructions and local rules.
+//! library computes says that it is safe. At a high eyepiece stand on a stable platform, never on the top of a ladder,
+//! and stay clear of a moving mount. Follow the makers' instructions and local rules.
 //!
 //! # Features
 //! - `float` (default): the f32 and f64 forms, over libm.

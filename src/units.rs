@@ -25,6 +25,10 @@ quantity! {
     /// Pixel pitch, wavelength, lengths at the focus. C suffix `_nm`; the float form is in micrometres, `_um`, but
     /// for wavelengths and rms wavefront, which stay in nanometres, `_nm`.
     Nanometres(u32),
+    /// A length at the focus that may be negative. C suffix `_nm`; the float form is in micrometres, `_um`.
+    SignedNanometres(i32),
+    /// Distances before the telescope. C suffix `_mm`; the float form is in metres, `_m`.
+    Millimetres(u32),
     /// Fields of view and separations. C suffix `_mas`; the float form is in arcseconds, `_arcsec`.
     Milliarcseconds(u32),
     /// An angle that may be negative. C suffix `_mas`.
@@ -41,6 +45,15 @@ quantity! {
     Millimagnitudes(i32),
     /// Extinction, never negative. C suffix `_mmag`; the float form is in magnitudes, `_mag`.
     MillimagnitudesPerAirmass(u32),
+    /// A difference of temperature, in size. C suffix `_mk`; the float form is in kelvin, `_k`.
+    Millikelvin(u32),
+    /// A change of temperature. C suffix `_mk`; the float form is in kelvin, `_k`.
+    SignedMillikelvin(i32),
+    /// Thermal expansion, in size. C suffix `_ppb_per_k`; the float form is in parts per million per kelvin, `_ppm_per_k`.
+    PartsPerBillionPerKelvin(u32),
+    /// Thermal expansion of either sign. C suffix `_ppb_per_k`; the float form is in parts per million per kelvin,
+    /// `_ppm_per_k`.
+    SignedPartsPerBillionPerKelvin(i32),
     /// A binary angle that wraps: 2^32 is one turn. C suffix `_bam`; the float form is in degrees, `_deg`.
     Bam(u32),
     /// A binary angle either side of zero: 2^32 is one turn. C suffix `_bam`; the float form is in degrees, `_deg`.

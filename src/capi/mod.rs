@@ -6,6 +6,8 @@
 #![allow(unsafe_code, non_camel_case_types, clippy::missing_safety_doc)]
 
 pub mod field;
+pub mod focus;
+pub mod layout;
 pub mod light;
 pub mod resolution;
 pub mod setup;

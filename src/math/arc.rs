@@ -64,7 +64,7 @@ pub(crate) fn angle_across(n: u32, d: u32) -> u32 {
 
 /// The upper 32 bits of `x` from its first one on, cut, and how many bits stand below them (negative: zeros added).
 #[inline(always)]
-fn leading(x: u64) -> (u32, i32) {
+pub(crate) fn leading(x: u64) -> (u32, i32) {
     if x >> 32 == 0 {
         let (x, shift) = normalise(x as u32);
         (x, -(shift as i32))

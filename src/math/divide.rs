@@ -203,6 +203,66 @@ pub(crate) fn by_64_of(upper: u32, n: u64, d: u64) -> Result<u32, Error> {
     up_if(quotient, rest >= d - rest)
 }
 
+/// n / d to the nearest integer, halves up: `n` of 128 bits in its two upper words and the rest, `d` of 96 in its upper
+/// one and the rest. `d` is not 0.
+#[inline(always)]
+pub(crate) fn by_wide(n: (u32, u32, u64), d: (u32, u64)) -> Result<u32, Error> {
+    let ((n3, n2, n_lower), (d2, d_lower)) = (n, d);
+    if n3 == 0 && d2 == 0 {
+        return by_64(n2, n_lower, d_lower);
+    }
+    let words = |x: u64| (x as u32, (x >> 32) as u32);
+    let ((n0, n1), (d0, d1)) = (words(n_lower), words(d_lower));
+    by_96(&[n0, n1, n2, n3], &[d0, d1, d2])
+}
+
+/// n / d to the nearest integer, halves up, for words from the lowest on: from memory, as above. `d` is not 0.
+#[inline(never)]
+fn by_96(n: &[u32; 4], d: &[u32; 3]) -> Result<u32, Error> {
+    let pair = |upper: u32, lower: u32| (upper as u64) << 32 | lower as u64;
+    let ([n0, n1, n2, n3], [d0, d1, d2]) = (*n, *d);
+    if d2 == 0 {
+        return if n3 == 0 { by_64(n2, pair(n1, n0), pair(d1, d0)) } else { Err(Error::OVERFLOW) };
+    }
+    if pair(n3, n2) > pair(d2, d1) || (pair(n3, n2) == pair(d2, d1) && n1 >= d0) {
+        return Err(Error::OVERFLOW);
+    }
+    let (_, shift) = normalise(d2);
+    let up = |upper: u32, lower: u32| upper << shift | (lower >> 1) >> (31 - shift);
+    let (d2, d1, d0) = (up(d2, d1), up(d1, d0), d0 << shift);
+    let (n3, n2, n1, n0) = (up(n3, n2), up(n2, n1), up(n1, n0), n0 << shift);
+    let (mut quotient, mut rest) = if n3 >= d2 {
+        (u32::MAX, n2 as u64 + d2 as u64)
+    } else {
+        let (quotient, rest) = divide_normalised(pair(n3, n2), d2);
+        (quotient, rest as u64)
+    };
+    let mut excess = wide(quotient, d1);
+    // As in `by_64`: then the quotient is right or one too high.
+    while rest >> 32 == 0 && excess > (rest << 32 | n1 as u64) {
+        quotient -= 1;
+        rest += d2 as u64;
+        excess -= d1 as u64;
+    }
+    let mut upper = (rest << 32 | n1 as u64).wrapping_sub(excess);
+    let taken = wide(quotient, d0);
+    let (mut lower, borrow) = n0.overflowing_sub(taken as u32);
+    let taken = (taken >> 32) + borrow as u64;
+    let negative = upper < taken;
+    upper = upper.wrapping_sub(taken);
+    let d_upper = pair(d2, d1);
+    if negative {
+        quotient -= 1;
+        let (sum, carry) = lower.overflowing_add(d0);
+        lower = sum;
+        upper = upper.wrapping_add(d_upper).wrapping_add(carry as u64);
+    }
+    // The rest against what it lacks to d.
+    let (lacking, borrow) = d0.overflowing_sub(lower);
+    let lacking_upper = d_upper - upper - borrow as u64;
+    up_if(quotient, upper > lacking_upper || (upper == lacking_upper && lower >= lacking))
+}
+
 #[cfg(test)]
 mod tests {
     use super::*;
@@ -257,11 +317,27 @@ mod tests {
                 }
                 if n < u64::MAX - d as u64 {
                     assert_eq!(rounded(n, d).ok(), rounded_128(n as u128, d as u128), "{n} / {d}");
+                    let exact = rounded_128((n as u128) << 32 | fraction as u128, (d as u128) << 32);
+                    let got = with_fraction(n, fraction, d).ok();
+                    assert!(
+                        got == exact || got.map(|q| q + 1) == exact && fraction != 0,
+                        "{n}.{fraction} / {d}"
+                    );
                 }
-                let exact = rounded_128((n as u128) << 32 | fraction as u128, (d as u128) << 32);
-                let got = with_fraction(n, fraction, d).ok();
-                // The fraction's bits below the shifted divisor are dropped.
-                assert!(got == exact || got.map(|q| q + 1) == exact && fraction != 0, "{n}.{fraction} / {d}");
+            }
+            // As drawn, beside a multiple of d and of d without its lowest word, and half way to the next.
+            let words = |n: u128| [0, 32, 64, 96].map(|shift| (n >> shift) as u32);
+            let d128 = ((wide_d as u128) << 32 | d as u128) >> (n & 31);
+            if d128 != 0 {
+                let drawn = (fraction as u128) << 96 >> (n & 63) | (n as u128) << 32 | upper as u128;
+                let multiple = upper as u128 * d128;
+                let less = upper as u128 * (d128 >> 32 << 32) + fraction as u128;
+                let near = (n >> (n & 63)) as u128;
+                for n in [drawn, multiple + near, multiple.saturating_sub(near), less, multiple + d128 / 2] {
+                    let [d0, d1, d2, _] = words(d128);
+                    let exact = u32::try_from(n / d128 + (n % d128 >= d128 - n % d128) as u128).ok();
+                    assert_eq!(by_96(&words(n), &[d0, d1, d2]).ok(), exact, "{n} / {d128}");
+                }
             }
             if wide_d != 0 {
                 let n128 = (upper as u128) << 64 | n as u128;

@@ -1,7 +1,7 @@
 //! Numbers of twice the digits: an unevaluated sum of two floats (Dekker, Numerische Mathematik 18, 1971).
 
 use super::float::Real;
-use core::ops::{Div, Mul, Sub};
+use core::ops::{Add, Div, Mul, Sub};
 
 #[derive(Clone, Copy)]
 pub(crate) struct Double<F> {
@@ -50,6 +50,22 @@ impl<F: Real> Mul<F> for Double<F> {
     fn mul(self, x: F) -> Double<F> {
         let Double { upper, lower } = Double::product(self.upper, x);
         Double::sum(upper, lower + self.lower * x)
+    }
+}
+
+impl<F: Real> Mul for Double<F> {
+    type Output = Double<F>;
+    fn mul(self, other: Double<F>) -> Double<F> {
+        let Double { upper, lower } = Double::product(self.upper, other.upper);
+        Double::sum(upper, lower + (self.upper * other.lower + self.lower * other.upper))
+    }
+}
+
+impl<F: Real> Add for Double<F> {
+    type Output = Double<F>;
+    fn add(self, other: Double<F>) -> Double<F> {
+        let Double { upper, lower } = Double::sum(self.upper, other.upper);
+        Double::sum(upper, lower + (self.lower + other.lower))
     }
 }
 

@@ -50,8 +50,9 @@ pub trait Real:
     fn atan(self) -> Self;
     #[doc(hidden)]
     fn atan2(self, x: Self) -> Self;
+    /// The tangent of at most pi / 4, as a sum of two.
     #[doc(hidden)]
-    fn tan(self) -> Self;
+    fn tangent(self) -> (Self, Self);
     #[doc(hidden)]
     fn asin(self) -> Self;
     #[doc(hidden)]
@@ -71,7 +72,7 @@ pub trait Real:
 }
 
 macro_rules! real {
-    ($t:ty, $split:literal, $times:expr, $floor:ident $sqrt:ident $atan:ident $atan2:ident $tan:ident $asin:ident $sin:ident $cos:ident $ln_1p:ident
+    ($t:ty, $split:literal, $times:expr, $floor:ident $sqrt:ident $atan:ident $atan2:ident $tangent:expr, $asin:ident $sin:ident $cos:ident $ln_1p:ident
      $log10:ident $exp:ident $pow:ident $hypot:ident) => {
         impl Real for $t {
             const SPLIT: Self = $split;
@@ -111,8 +112,9 @@ macro_rules! real {
             fn atan2(self, x: Self) -> Self {
                 libm::$atan2(self, x)
             }
-            fn tan(self) -> Self {
-                libm::$tan(self)
+            fn tangent(self) -> ($t, $t) {
+                let tangent: fn($t) -> ($t, $t) = $tangent;
+                tangent(self)
             }
             fn asin(self) -> Self {
                 libm::$asin(self)
@@ -142,8 +144,22 @@ macro_rules! real {
     };
 }
 
-real!(f32, 4097.0, |x, (upper, _)| x * upper as f32, floorf sqrtf atanf atan2f tanf asinf sinf cosf log1pf log10f expf powf hypotf);
-real!(f64, 134217729.0, |x, (upper, lower)| (Double { upper, lower } * x).upper, floor sqrt atan atan2 tan asin sin cos log1p log10 exp pow hypot);
+real!(f32, 4097.0, |x, (upper, _)| x * upper as f32, floorf sqrtf atanf atan2f tangent_in_f32, asinf sinf cosf log1pf log10f expf powf hypotf);
+real!(f64, 134217729.0, |x, (upper, lower)| (Double { upper, lower } * x).upper, floor sqrt atan atan2 |x| (libm::tan(x), 0.0), asin sin cos log1p log10 exp pow hypot);
+
+/// (tan x / x - 1) / x^2 as a polynomial in x^2 up to (pi / 4)^2, low power first.
+const TANGENT: [f32; 7] =
+    [0.33333334, 0.13333231, 0.053994465, 0.021621127, 0.009962147, 0.0011853216, 0.0038431398];
+
+/// libm's works in f64, which a part with an FPU for f32 only has no instructions for.
+fn tangent_in_f32(x: f32) -> (f32, f32) {
+    let square = x * x;
+    let [c0, c1, c2, c3, c4, c5, c6] = TANGENT;
+    let tail = c3 + square * (c4 + square * (c5 + square * c6));
+    let tail = c0 + square * (c1 + square * (c2 + square * tail));
+    let Double { upper, lower } = Double::sum(x, x * square * tail);
+    (upper, lower)
+}
 
 const LEAST: f64 = 1.0 / (1u64 << 32) as f64;
 const MOST: f64 = (1u64 << 32) as f64;
@@ -182,4 +198,40 @@ pub(crate) fn not_negative<F: Real>(x: F, argument: u8) -> Result<(), Error> {
 /// Refuses what is not in -2^32 to 2^32.
 pub(crate) fn either_sign<F: Real>(x: F, argument: u8) -> Result<(), Error> {
     not_negative(if x < F::of(0.0) { -x } else { x }, argument)
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+    use crate::math::chebyshev::interpolate;
+    use std::f64::consts::FRAC_PI_4;
+
+    #[test]
+    fn tangent_is_interpolated() {
+        let tail = |square: f64| {
+            let x = square.sqrt();
+            if x < 0.02 {
+                1.0 / 3.0 + 2.0 / 15.0 * square + 17.0 / 315.0 * square * square
+            } else {
+                (x.tan() / x - 1.0) / square
+            }
+        };
+        let terms = interpolate(tail, 0.0, FRAC_PI_4 * FRAC_PI_4, TANGENT.len());
+        for (term, stored) in terms.iter().zip(TANGENT) {
+            assert_eq!(*term as f32, stored);
+        }
+    }
+
+    #[test]
+    fn tangent_is_near() {
+        let mut worst: f64 = 0.0;
+        let top = (FRAC_PI_4 as f32).to_bits();
+        for bits in (0x3000_0000..=top).step_by(101) {
+            let x = f32::from_bits(bits);
+            let (exact, (upper, lower)) = (f64::from(x).tan(), tangent_in_f32(x));
+            let error = (f64::from(upper) + f64::from(lower) - exact).abs();
+            worst = worst.max(error / (exact * f64::from(f32::EPSILON)));
+        }
+        assert!(worst < 0.35, "{worst}");
+    }
 }

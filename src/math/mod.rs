@@ -18,3 +18,5 @@ pub(crate) mod float;
 pub(crate) mod logarithm;
 pub(crate) mod multiply;
 pub(crate) mod root;
+pub(crate) mod segment;
+pub(crate) mod sine;

@@ -29,6 +29,14 @@ pub(crate) fn of_lower_halves(a: u32, b: u32) -> u32 {
     a * b
 }
 
+/// The product of 64 and 32 bits: the upper 32 and the lower 64.
+#[inline(always)]
+pub(crate) fn wide_by(a: u64, b: u32) -> (u32, u64) {
+    let lower = wide(a as u32, b);
+    let upper = wide((a >> 32) as u32, b) + (lower >> 32);
+    ((upper >> 32) as u32, upper << 32 | lower & 0xffff_ffff)
+}
+
 /// The upper 32 bits of the product.
 #[inline(always)]
 pub(crate) fn high(a: u32, b: u32) -> u32 {

@@ -33,13 +33,13 @@ const RADIAN_ARCSEC: f64 = 206_264.806_247_096_36;
 #[cfg(feature = "float")]
 const RADIAN_ARCSEC_PER_THOUSAND: (f64, f64) = (206.264_806_247_096_35, 9.896_767_216_834_942e-15);
 
-/// tan(angle / 2) in twice the digits but for the error of `tan` itself, for an angle up to 90 degrees.
+/// tan(angle / 2) in twice the digits but for the error of `tangent` itself, for an angle up to 90 degrees.
 #[cfg(feature = "float")]
 fn half_tangent<F: Real>(angle_arcsec: F) -> Double<F> {
     const TO_HALF: f64 = 0.5 / RADIAN_ARCSEC;
     let half = Double::of(TO_HALF) * angle_arcsec;
-    let tangent = half.upper.tan();
-    Double::sum(tangent, half.lower * (F::of(1.0) + tangent * tangent))
+    let (upper, lower) = half.upper.tangent();
+    Double::sum(upper, lower + half.lower * (F::of(1.0) + upper * upper))
 }
 
 /// 2 atan(tangent) in arcseconds.

@@ -5,7 +5,7 @@ use super::{allowed, present};
 use crate::math::double::Double;
 #[cfg(feature = "float")]
 use crate::math::float::{Real, either_sign, from_zero_to, not_negative, positive};
-use crate::math::multiply::wide;
+use crate::math::multiply::{wide, wide_by};
 use crate::math::{divide, logarithm, root};
 use crate::status::Error;
 use crate::units::{Micrometres, Millimagnitudes, MillimagnitudesPerAirmass, Q16};
@@ -94,14 +94,6 @@ fn clear_square(aperture: Micrometres, obstruction: Micrometres) -> Result<u64, 
     Ok(wide(aperture.0, aperture.0) - wide(obstruction.0, obstruction.0))
 }
 
-/// n by a share: the upper 32 and the lower 64 bits.
-#[inline(always)]
-fn share_of(n: u64, share: u32) -> (u32, u64) {
-    let lower = wide(n as u32, share);
-    let upper = wide((n >> 32) as u32, share) + (lower >> 32);
-    ((upper >> 32) as u32, upper << 32 | lower & 0xffff_ffff)
-}
-
 /// The clear, lossless aperture that would gather as much light.
 ///
 /// D sqrt((1 - (d / D)^2) T). Source: equal areas, with the throughput; Schroeder, *Astronomical Optics*.
@@ -121,7 +113,7 @@ pub fn effective_aperture_fx(
 ) -> Result<Micrometres, Error> {
     let clear = clear_square(aperture, obstruction)?;
     allowed(throughput.0 <= WHOLE, 3)?;
-    let (upper, lower) = share_of(clear, throughput.0);
+    let (upper, lower) = wide_by(clear, throughput.0);
     root::with_fraction((upper as u64) << 48 | lower >> 16, (lower as u32) << 16).map(Micrometres)
 }
 
@@ -254,7 +246,7 @@ pub fn surface_brightness_fx(
     if exit_pupil >= eye_pupil {
         return Ok(throughput);
     }
-    let (upper, lower) = share_of(wide(exit_pupil.0, exit_pupil.0), throughput.0);
+    let (upper, lower) = wide_by(wide(exit_pupil.0, exit_pupil.0), throughput.0);
     divide::by_64(upper, lower, wide(eye_pupil.0, eye_pupil.0)).map(Q16)
 }
 

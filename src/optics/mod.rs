@@ -13,6 +13,8 @@
 //!   [`Overflow`](crate::Cause::Overflow) where the result does not fit. Nothing wraps or saturates.
 
 pub mod field;
+pub mod focus;
+pub mod layout;
 pub mod light;
 pub mod resolution;
 

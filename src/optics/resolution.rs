@@ -53,6 +53,7 @@ pub fn rayleigh_limit_fx(aperture: Micrometres, wavelength: Nanometres) -> Resul
 
 /// Float form of [`rayleigh_limit_fx`].
 #[cfg(feature = "float")]
+#[inline(always)]
 pub fn rayleigh_limit<F: Real>(aperture_mm: F, wavelength_nm: F) -> Result<F, Error> {
     positive(aperture_mm, 1)?;
     positive(wavelength_nm, 2)?;

@@ -12,6 +12,11 @@ void reset(void)
     uint32_t *from = data_stored;
     uint32_t *to;
 
+#ifdef __ARM_FP
+    /* Full access to the FPU, in the part's CPACR. */
+    *(volatile uint32_t *)0xE000ED88 |= 0xFu << 20;
+    __asm__ volatile("dsb\n\tisb");
+#endif
     for (to = data_start; to < data_end; to++) {
         *to = *from++;
     }

@@ -801,6 +801,326 @@ int main(void)
     }
 #endif
     {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_depth_of_focus_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_depth_of_focus_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_depth_of_focus_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_defocus_blur_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_defocus_blur_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_defocus_blur_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_defocus_wavefront_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_defocus_wavefront_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_defocus_wavefront_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_motor_steps_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_motor_steps_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_motor_steps_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t, int32_t, int32_t *) = fieldstop_thermal_shift_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_thermal_shift_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_thermal_shift_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_refocus_temperature_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_refocus_temperature_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_refocus_temperature_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_near_focus_travel_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_near_focus_travel_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_near_focus_travel_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_coma_length_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_coma_length_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_coma_length_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_diagonal_minor_axis_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float, float *) = fieldstop_diagonal_minor_axis_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double, double *) = fieldstop_diagonal_minor_axis_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_diagonal_offset_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float, float *) = fieldstop_diagonal_offset_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double, double *) = fieldstop_diagonal_offset_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_beam_width_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_beam_width_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_beam_width_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_beam_shift_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_beam_shift_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_beam_shift_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_secondary_magnification_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_secondary_magnification_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_secondary_magnification_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_secondary_separation_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_secondary_separation_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_secondary_separation_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_secondary_diameter_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float, float *) = fieldstop_secondary_diameter_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double, double *) = fieldstop_secondary_diameter_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_secondary_field_margin_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float, float *) = fieldstop_secondary_field_margin_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double, double *) = fieldstop_secondary_field_margin_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_secondary_radius_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_secondary_radius_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_secondary_radius_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_illumination_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_illumination_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_illumination_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_swing_radius_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_swing_radius_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_swing_radius_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t, int32_t, uint32_t *) = fieldstop_eyepiece_height_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_eyepiece_height_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_eyepiece_height_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
         fieldstop_status (*function)(const struct fieldstop_telescope *) = fieldstop_telescope_check;
         present = (any_function)function;
     }

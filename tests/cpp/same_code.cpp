@@ -2276,6 +2276,1166 @@ fieldstop_status typed_t_number_f64(double focal_ratio, double throughput, doubl
 }
 #endif
 
+fieldstop_status plain_depth_of_focus_fx(uint32_t focal_ratio_q16, uint32_t wavelength_nm, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_depth_of_focus_fx(focal_ratio_q16, wavelength_nm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_depth_of_focus_fx(uint32_t focal_ratio_q16, uint32_t wavelength_nm, uint32_t *out)
+{
+    const auto given = fieldstop::depth_of_focus_fx(fieldstop::q16(focal_ratio_q16), fieldstop::nanometres(wavelength_nm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_depth_of_focus_f32(float focal_ratio, float wavelength_nm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_depth_of_focus_f32(focal_ratio, wavelength_nm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_depth_of_focus_f32(float focal_ratio, float wavelength_nm, float *out)
+{
+    const auto given = fieldstop::depth_of_focus_f32(focal_ratio, fieldstop::nanometres_f32(wavelength_nm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_depth_of_focus_f64(double focal_ratio, double wavelength_nm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_depth_of_focus_f64(focal_ratio, wavelength_nm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_depth_of_focus_f64(double focal_ratio, double wavelength_nm, double *out)
+{
+    const auto given = fieldstop::depth_of_focus_f64(focal_ratio, fieldstop::nanometres_f64(wavelength_nm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_defocus_blur_fx(uint32_t defocus_nm, uint32_t focal_ratio_q16, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_defocus_blur_fx(defocus_nm, focal_ratio_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_defocus_blur_fx(uint32_t defocus_nm, uint32_t focal_ratio_q16, uint32_t *out)
+{
+    const auto given = fieldstop::defocus_blur_fx(fieldstop::nanometres(defocus_nm), fieldstop::q16(focal_ratio_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_defocus_blur_f32(float defocus_um, float focal_ratio, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_defocus_blur_f32(defocus_um, focal_ratio, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_defocus_blur_f32(float defocus_um, float focal_ratio, float *out)
+{
+    const auto given = fieldstop::defocus_blur_f32(fieldstop::micrometres_f32(defocus_um), focal_ratio);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_defocus_blur_f64(double defocus_um, double focal_ratio, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_defocus_blur_f64(defocus_um, focal_ratio, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_defocus_blur_f64(double defocus_um, double focal_ratio, double *out)
+{
+    const auto given = fieldstop::defocus_blur_f64(fieldstop::micrometres_f64(defocus_um), focal_ratio);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_defocus_wavefront_fx(uint32_t defocus_nm, uint32_t focal_ratio_q16, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_defocus_wavefront_fx(defocus_nm, focal_ratio_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_defocus_wavefront_fx(uint32_t defocus_nm, uint32_t focal_ratio_q16, uint32_t *out)
+{
+    const auto given = fieldstop::defocus_wavefront_fx(fieldstop::nanometres(defocus_nm), fieldstop::q16(focal_ratio_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_defocus_wavefront_f32(float defocus_um, float focal_ratio, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_defocus_wavefront_f32(defocus_um, focal_ratio, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_defocus_wavefront_f32(float defocus_um, float focal_ratio, float *out)
+{
+    const auto given = fieldstop::defocus_wavefront_f32(fieldstop::micrometres_f32(defocus_um), focal_ratio);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_defocus_wavefront_f64(double defocus_um, double focal_ratio, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_defocus_wavefront_f64(defocus_um, focal_ratio, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_defocus_wavefront_f64(double defocus_um, double focal_ratio, double *out)
+{
+    const auto given = fieldstop::defocus_wavefront_f64(fieldstop::micrometres_f64(defocus_um), focal_ratio);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_motor_steps_fx(uint32_t distance_nm, uint32_t step_nm, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_motor_steps_fx(distance_nm, step_nm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_motor_steps_fx(uint32_t distance_nm, uint32_t step_nm, uint32_t *out)
+{
+    const auto given = fieldstop::motor_steps_fx(fieldstop::nanometres(distance_nm), fieldstop::nanometres(step_nm));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_motor_steps_f32(float distance_um, float step_um, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_motor_steps_f32(distance_um, step_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_motor_steps_f32(float distance_um, float step_um, float *out)
+{
+    const auto given = fieldstop::motor_steps_f32(fieldstop::micrometres_f32(distance_um), fieldstop::micrometres_f32(step_um));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_motor_steps_f64(double distance_um, double step_um, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_motor_steps_f64(distance_um, step_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_motor_steps_f64(double distance_um, double step_um, double *out)
+{
+    const auto given = fieldstop::motor_steps_f64(fieldstop::micrometres_f64(distance_um), fieldstop::micrometres_f64(step_um));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_thermal_shift_fx(uint32_t length_um, int32_t expansion_ppb_per_k, int32_t temperature_change_mk, int32_t *out)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_thermal_shift_fx(length_um, expansion_ppb_per_k, temperature_change_mk, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_thermal_shift_fx(uint32_t length_um, int32_t expansion_ppb_per_k, int32_t temperature_change_mk, int32_t *out)
+{
+    const auto given = fieldstop::thermal_shift_fx(fieldstop::micrometres(length_um), fieldstop::signed_parts_per_billion_per_kelvin(expansion_ppb_per_k), fieldstop::signed_millikelvin(temperature_change_mk));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_thermal_shift_f32(float length_mm, float expansion_ppm_per_k, float temperature_change_k, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_thermal_shift_f32(length_mm, expansion_ppm_per_k, temperature_change_k, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_thermal_shift_f32(float length_mm, float expansion_ppm_per_k, float temperature_change_k, float *out)
+{
+    const auto given = fieldstop::thermal_shift_f32(fieldstop::millimetres_f32(length_mm), fieldstop::parts_per_million_per_kelvin_f32(expansion_ppm_per_k), fieldstop::kelvin_f32(temperature_change_k));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_thermal_shift_f64(double length_mm, double expansion_ppm_per_k, double temperature_change_k, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_thermal_shift_f64(length_mm, expansion_ppm_per_k, temperature_change_k, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_thermal_shift_f64(double length_mm, double expansion_ppm_per_k, double temperature_change_k, double *out)
+{
+    const auto given = fieldstop::thermal_shift_f64(fieldstop::millimetres_f64(length_mm), fieldstop::parts_per_million_per_kelvin_f64(expansion_ppm_per_k), fieldstop::kelvin_f64(temperature_change_k));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_refocus_temperature_fx(uint32_t length_um, uint32_t expansion_ppb_per_k, uint32_t tolerance_nm, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_refocus_temperature_fx(length_um, expansion_ppb_per_k, tolerance_nm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_refocus_temperature_fx(uint32_t length_um, uint32_t expansion_ppb_per_k, uint32_t tolerance_nm, uint32_t *out)
+{
+    const auto given = fieldstop::refocus_temperature_fx(fieldstop::micrometres(length_um), fieldstop::parts_per_billion_per_kelvin(expansion_ppb_per_k), fieldstop::nanometres(tolerance_nm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_refocus_temperature_f32(float length_mm, float expansion_ppm_per_k, float tolerance_um, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_refocus_temperature_f32(length_mm, expansion_ppm_per_k, tolerance_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_refocus_temperature_f32(float length_mm, float expansion_ppm_per_k, float tolerance_um, float *out)
+{
+    const auto given = fieldstop::refocus_temperature_f32(fieldstop::millimetres_f32(length_mm), fieldstop::parts_per_million_per_kelvin_f32(expansion_ppm_per_k), fieldstop::micrometres_f32(tolerance_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_refocus_temperature_f64(double length_mm, double expansion_ppm_per_k, double tolerance_um, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_refocus_temperature_f64(length_mm, expansion_ppm_per_k, tolerance_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_refocus_temperature_f64(double length_mm, double expansion_ppm_per_k, double tolerance_um, double *out)
+{
+    const auto given = fieldstop::refocus_temperature_f64(fieldstop::millimetres_f64(length_mm), fieldstop::parts_per_million_per_kelvin_f64(expansion_ppm_per_k), fieldstop::micrometres_f64(tolerance_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_near_focus_travel_fx(uint32_t focal_length_um, uint32_t object_distance_mm, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_near_focus_travel_fx(focal_length_um, object_distance_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_near_focus_travel_fx(uint32_t focal_length_um, uint32_t object_distance_mm, uint32_t *out)
+{
+    const auto given = fieldstop::near_focus_travel_fx(fieldstop::micrometres(focal_length_um), fieldstop::millimetres(object_distance_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_near_focus_travel_f32(float focal_length_mm, float object_distance_m, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_near_focus_travel_f32(focal_length_mm, object_distance_m, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_near_focus_travel_f32(float focal_length_mm, float object_distance_m, float *out)
+{
+    const auto given = fieldstop::near_focus_travel_f32(fieldstop::millimetres_f32(focal_length_mm), fieldstop::metres_f32(object_distance_m));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_near_focus_travel_f64(double focal_length_mm, double object_distance_m, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_near_focus_travel_f64(focal_length_mm, object_distance_m, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_near_focus_travel_f64(double focal_length_mm, double object_distance_m, double *out)
+{
+    const auto given = fieldstop::near_focus_travel_f64(fieldstop::millimetres_f64(focal_length_mm), fieldstop::metres_f64(object_distance_m));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_coma_length_fx(uint32_t off_axis_mas, uint32_t focal_ratio_q16, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_coma_length_fx(off_axis_mas, focal_ratio_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_coma_length_fx(uint32_t off_axis_mas, uint32_t focal_ratio_q16, uint32_t *out)
+{
+    const auto given = fieldstop::coma_length_fx(fieldstop::milliarcseconds(off_axis_mas), fieldstop::q16(focal_ratio_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_coma_length_f32(float off_axis_arcsec, float focal_ratio, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_coma_length_f32(off_axis_arcsec, focal_ratio, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_coma_length_f32(float off_axis_arcsec, float focal_ratio, float *out)
+{
+    const auto given = fieldstop::coma_length_f32(fieldstop::arcseconds_f32(off_axis_arcsec), focal_ratio);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_coma_length_f64(double off_axis_arcsec, double focal_ratio, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_coma_length_f64(off_axis_arcsec, focal_ratio, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_coma_length_f64(double off_axis_arcsec, double focal_ratio, double *out)
+{
+    const auto given = fieldstop::coma_length_f64(fieldstop::arcseconds_f64(off_axis_arcsec), focal_ratio);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_diagonal_minor_axis_fx(uint32_t aperture_um, uint32_t focal_length_um, uint32_t focus_distance_um, uint32_t lit_field_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_diagonal_minor_axis_fx(aperture_um, focal_length_um, focus_distance_um, lit_field_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_minor_axis_fx(uint32_t aperture_um, uint32_t focal_length_um, uint32_t focus_distance_um, uint32_t lit_field_um, uint32_t *out)
+{
+    const auto given = fieldstop::diagonal_minor_axis_fx(fieldstop::micrometres(aperture_um), fieldstop::micrometres(focal_length_um), fieldstop::micrometres(focus_distance_um), fieldstop::micrometres(lit_field_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_diagonal_minor_axis_f32(float aperture_mm, float focal_length_mm, float focus_distance_mm, float lit_field_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_diagonal_minor_axis_f32(aperture_mm, focal_length_mm, focus_distance_mm, lit_field_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_minor_axis_f32(float aperture_mm, float focal_length_mm, float focus_distance_mm, float lit_field_mm, float *out)
+{
+    const auto given = fieldstop::diagonal_minor_axis_f32(fieldstop::millimetres_f32(aperture_mm), fieldstop::millimetres_f32(focal_length_mm), fieldstop::millimetres_f32(focus_distance_mm), fieldstop::millimetres_f32(lit_field_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_diagonal_minor_axis_f64(double aperture_mm, double focal_length_mm, double focus_distance_mm, double lit_field_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_diagonal_minor_axis_f64(aperture_mm, focal_length_mm, focus_distance_mm, lit_field_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_minor_axis_f64(double aperture_mm, double focal_length_mm, double focus_distance_mm, double lit_field_mm, double *out)
+{
+    const auto given = fieldstop::diagonal_minor_axis_f64(fieldstop::millimetres_f64(aperture_mm), fieldstop::millimetres_f64(focal_length_mm), fieldstop::millimetres_f64(focus_distance_mm), fieldstop::millimetres_f64(lit_field_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_diagonal_offset_fx(uint32_t aperture_um, uint32_t focal_length_um, uint32_t focus_distance_um, uint32_t lit_field_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_diagonal_offset_fx(aperture_um, focal_length_um, focus_distance_um, lit_field_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_offset_fx(uint32_t aperture_um, uint32_t focal_length_um, uint32_t focus_distance_um, uint32_t lit_field_um, uint32_t *out)
+{
+    const auto given = fieldstop::diagonal_offset_fx(fieldstop::micrometres(aperture_um), fieldstop::micrometres(focal_length_um), fieldstop::micrometres(focus_distance_um), fieldstop::micrometres(lit_field_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_diagonal_offset_f32(float aperture_mm, float focal_length_mm, float focus_distance_mm, float lit_field_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_diagonal_offset_f32(aperture_mm, focal_length_mm, focus_distance_mm, lit_field_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_offset_f32(float aperture_mm, float focal_length_mm, float focus_distance_mm, float lit_field_mm, float *out)
+{
+    const auto given = fieldstop::diagonal_offset_f32(fieldstop::millimetres_f32(aperture_mm), fieldstop::millimetres_f32(focal_length_mm), fieldstop::millimetres_f32(focus_distance_mm), fieldstop::millimetres_f32(lit_field_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_diagonal_offset_f64(double aperture_mm, double focal_length_mm, double focus_distance_mm, double lit_field_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_diagonal_offset_f64(aperture_mm, focal_length_mm, focus_distance_mm, lit_field_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_offset_f64(double aperture_mm, double focal_length_mm, double focus_distance_mm, double lit_field_mm, double *out)
+{
+    const auto given = fieldstop::diagonal_offset_f64(fieldstop::millimetres_f64(aperture_mm), fieldstop::millimetres_f64(focal_length_mm), fieldstop::millimetres_f64(focus_distance_mm), fieldstop::millimetres_f64(lit_field_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_beam_width_fx(uint32_t aperture_um, uint32_t focal_length_um, uint32_t focus_distance_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_beam_width_fx(aperture_um, focal_length_um, focus_distance_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_beam_width_fx(uint32_t aperture_um, uint32_t focal_length_um, uint32_t focus_distance_um, uint32_t *out)
+{
+    const auto given = fieldstop::beam_width_fx(fieldstop::micrometres(aperture_um), fieldstop::micrometres(focal_length_um), fieldstop::micrometres(focus_distance_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_beam_width_f32(float aperture_mm, float focal_length_mm, float focus_distance_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_beam_width_f32(aperture_mm, focal_length_mm, focus_distance_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_beam_width_f32(float aperture_mm, float focal_length_mm, float focus_distance_mm, float *out)
+{
+    const auto given = fieldstop::beam_width_f32(fieldstop::millimetres_f32(aperture_mm), fieldstop::millimetres_f32(focal_length_mm), fieldstop::millimetres_f32(focus_distance_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_beam_width_f64(double aperture_mm, double focal_length_mm, double focus_distance_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_beam_width_f64(aperture_mm, focal_length_mm, focus_distance_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_beam_width_f64(double aperture_mm, double focal_length_mm, double focus_distance_mm, double *out)
+{
+    const auto given = fieldstop::beam_width_f64(fieldstop::millimetres_f64(aperture_mm), fieldstop::millimetres_f64(focal_length_mm), fieldstop::millimetres_f64(focus_distance_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_beam_shift_fx(uint32_t image_offset_um, uint32_t focal_length_um, uint32_t focus_distance_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_beam_shift_fx(image_offset_um, focal_length_um, focus_distance_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_beam_shift_fx(uint32_t image_offset_um, uint32_t focal_length_um, uint32_t focus_distance_um, uint32_t *out)
+{
+    const auto given = fieldstop::beam_shift_fx(fieldstop::micrometres(image_offset_um), fieldstop::micrometres(focal_length_um), fieldstop::micrometres(focus_distance_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_beam_shift_f32(float image_offset_mm, float focal_length_mm, float focus_distance_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_beam_shift_f32(image_offset_mm, focal_length_mm, focus_distance_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_beam_shift_f32(float image_offset_mm, float focal_length_mm, float focus_distance_mm, float *out)
+{
+    const auto given = fieldstop::beam_shift_f32(fieldstop::millimetres_f32(image_offset_mm), fieldstop::millimetres_f32(focal_length_mm), fieldstop::millimetres_f32(focus_distance_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_beam_shift_f64(double image_offset_mm, double focal_length_mm, double focus_distance_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_beam_shift_f64(image_offset_mm, focal_length_mm, focus_distance_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_beam_shift_f64(double image_offset_mm, double focal_length_mm, double focus_distance_mm, double *out)
+{
+    const auto given = fieldstop::beam_shift_f64(fieldstop::millimetres_f64(image_offset_mm), fieldstop::millimetres_f64(focal_length_mm), fieldstop::millimetres_f64(focus_distance_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_secondary_magnification_fx(uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_magnification_fx(primary_focal_um, system_focal_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_magnification_fx(uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t *out)
+{
+    const auto given = fieldstop::secondary_magnification_fx(fieldstop::micrometres(primary_focal_um), fieldstop::micrometres(system_focal_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_secondary_magnification_f32(float primary_focal_mm, float system_focal_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_magnification_f32(primary_focal_mm, system_focal_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_magnification_f32(float primary_focal_mm, float system_focal_mm, float *out)
+{
+    const auto given = fieldstop::secondary_magnification_f32(fieldstop::millimetres_f32(primary_focal_mm), fieldstop::millimetres_f32(system_focal_mm));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_secondary_magnification_f64(double primary_focal_mm, double system_focal_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_magnification_f64(primary_focal_mm, system_focal_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_magnification_f64(double primary_focal_mm, double system_focal_mm, double *out)
+{
+    const auto given = fieldstop::secondary_magnification_f64(fieldstop::millimetres_f64(primary_focal_mm), fieldstop::millimetres_f64(system_focal_mm));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_secondary_separation_fx(uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t back_focus_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_separation_fx(primary_focal_um, system_focal_um, back_focus_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_separation_fx(uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t back_focus_um, uint32_t *out)
+{
+    const auto given = fieldstop::secondary_separation_fx(fieldstop::micrometres(primary_focal_um), fieldstop::micrometres(system_focal_um), fieldstop::micrometres(back_focus_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_secondary_separation_f32(float primary_focal_mm, float system_focal_mm, float back_focus_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_separation_f32(primary_focal_mm, system_focal_mm, back_focus_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_separation_f32(float primary_focal_mm, float system_focal_mm, float back_focus_mm, float *out)
+{
+    const auto given = fieldstop::secondary_separation_f32(fieldstop::millimetres_f32(primary_focal_mm), fieldstop::millimetres_f32(system_focal_mm), fieldstop::millimetres_f32(back_focus_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_secondary_separation_f64(double primary_focal_mm, double system_focal_mm, double back_focus_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_separation_f64(primary_focal_mm, system_focal_mm, back_focus_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_separation_f64(double primary_focal_mm, double system_focal_mm, double back_focus_mm, double *out)
+{
+    const auto given = fieldstop::secondary_separation_f64(fieldstop::millimetres_f64(primary_focal_mm), fieldstop::millimetres_f64(system_focal_mm), fieldstop::millimetres_f64(back_focus_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_secondary_diameter_fx(uint32_t aperture_um, uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t back_focus_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_diameter_fx(aperture_um, primary_focal_um, system_focal_um, back_focus_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_diameter_fx(uint32_t aperture_um, uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t back_focus_um, uint32_t *out)
+{
+    const auto given = fieldstop::secondary_diameter_fx(fieldstop::micrometres(aperture_um), fieldstop::micrometres(primary_focal_um), fieldstop::micrometres(system_focal_um), fieldstop::micrometres(back_focus_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_secondary_diameter_f32(float aperture_mm, float primary_focal_mm, float system_focal_mm, float back_focus_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_diameter_f32(aperture_mm, primary_focal_mm, system_focal_mm, back_focus_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_diameter_f32(float aperture_mm, float primary_focal_mm, float system_focal_mm, float back_focus_mm, float *out)
+{
+    const auto given = fieldstop::secondary_diameter_f32(fieldstop::millimetres_f32(aperture_mm), fieldstop::millimetres_f32(primary_focal_mm), fieldstop::millimetres_f32(system_focal_mm), fieldstop::millimetres_f32(back_focus_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_secondary_diameter_f64(double aperture_mm, double primary_focal_mm, double system_focal_mm, double back_focus_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_diameter_f64(aperture_mm, primary_focal_mm, system_focal_mm, back_focus_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_diameter_f64(double aperture_mm, double primary_focal_mm, double system_focal_mm, double back_focus_mm, double *out)
+{
+    const auto given = fieldstop::secondary_diameter_f64(fieldstop::millimetres_f64(aperture_mm), fieldstop::millimetres_f64(primary_focal_mm), fieldstop::millimetres_f64(system_focal_mm), fieldstop::millimetres_f64(back_focus_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_secondary_field_margin_fx(uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t back_focus_um, uint32_t lit_field_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_field_margin_fx(primary_focal_um, system_focal_um, back_focus_um, lit_field_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_field_margin_fx(uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t back_focus_um, uint32_t lit_field_um, uint32_t *out)
+{
+    const auto given = fieldstop::secondary_field_margin_fx(fieldstop::micrometres(primary_focal_um), fieldstop::micrometres(system_focal_um), fieldstop::micrometres(back_focus_um), fieldstop::micrometres(lit_field_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_secondary_field_margin_f32(float primary_focal_mm, float system_focal_mm, float back_focus_mm, float lit_field_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_field_margin_f32(primary_focal_mm, system_focal_mm, back_focus_mm, lit_field_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_field_margin_f32(float primary_focal_mm, float system_focal_mm, float back_focus_mm, float lit_field_mm, float *out)
+{
+    const auto given = fieldstop::secondary_field_margin_f32(fieldstop::millimetres_f32(primary_focal_mm), fieldstop::millimetres_f32(system_focal_mm), fieldstop::millimetres_f32(back_focus_mm), fieldstop::millimetres_f32(lit_field_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_secondary_field_margin_f64(double primary_focal_mm, double system_focal_mm, double back_focus_mm, double lit_field_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_field_margin_f64(primary_focal_mm, system_focal_mm, back_focus_mm, lit_field_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_field_margin_f64(double primary_focal_mm, double system_focal_mm, double back_focus_mm, double lit_field_mm, double *out)
+{
+    const auto given = fieldstop::secondary_field_margin_f64(fieldstop::millimetres_f64(primary_focal_mm), fieldstop::millimetres_f64(system_focal_mm), fieldstop::millimetres_f64(back_focus_mm), fieldstop::millimetres_f64(lit_field_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_secondary_radius_fx(uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t back_focus_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_radius_fx(primary_focal_um, system_focal_um, back_focus_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_radius_fx(uint32_t primary_focal_um, uint32_t system_focal_um, uint32_t back_focus_um, uint32_t *out)
+{
+    const auto given = fieldstop::secondary_radius_fx(fieldstop::micrometres(primary_focal_um), fieldstop::micrometres(system_focal_um), fieldstop::micrometres(back_focus_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_secondary_radius_f32(float primary_focal_mm, float system_focal_mm, float back_focus_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_radius_f32(primary_focal_mm, system_focal_mm, back_focus_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_radius_f32(float primary_focal_mm, float system_focal_mm, float back_focus_mm, float *out)
+{
+    const auto given = fieldstop::secondary_radius_f32(fieldstop::millimetres_f32(primary_focal_mm), fieldstop::millimetres_f32(system_focal_mm), fieldstop::millimetres_f32(back_focus_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_secondary_radius_f64(double primary_focal_mm, double system_focal_mm, double back_focus_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_radius_f64(primary_focal_mm, system_focal_mm, back_focus_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_radius_f64(double primary_focal_mm, double system_focal_mm, double back_focus_mm, double *out)
+{
+    const auto given = fieldstop::secondary_radius_f64(fieldstop::millimetres_f64(primary_focal_mm), fieldstop::millimetres_f64(system_focal_mm), fieldstop::millimetres_f64(back_focus_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_illumination_fx(uint32_t beam_um, uint32_t stop_um, uint32_t offset_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_illumination_fx(beam_um, stop_um, offset_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_illumination_fx(uint32_t beam_um, uint32_t stop_um, uint32_t offset_um, uint32_t *out)
+{
+    const auto given = fieldstop::illumination_fx(fieldstop::micrometres(beam_um), fieldstop::micrometres(stop_um), fieldstop::micrometres(offset_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_illumination_f32(float beam_mm, float stop_mm, float offset_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_illumination_f32(beam_mm, stop_mm, offset_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_illumination_f32(float beam_mm, float stop_mm, float offset_mm, float *out)
+{
+    const auto given = fieldstop::illumination_f32(fieldstop::millimetres_f32(beam_mm), fieldstop::millimetres_f32(stop_mm), fieldstop::millimetres_f32(offset_mm));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_illumination_f64(double beam_mm, double stop_mm, double offset_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_illumination_f64(beam_mm, stop_mm, offset_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_illumination_f64(double beam_mm, double stop_mm, double offset_mm, double *out)
+{
+    const auto given = fieldstop::illumination_f64(fieldstop::millimetres_f64(beam_mm), fieldstop::millimetres_f64(stop_mm), fieldstop::millimetres_f64(offset_mm));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_swing_radius_fx(uint32_t reach_um, uint32_t tube_diameter_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_swing_radius_fx(reach_um, tube_diameter_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_swing_radius_fx(uint32_t reach_um, uint32_t tube_diameter_um, uint32_t *out)
+{
+    const auto given = fieldstop::swing_radius_fx(fieldstop::micrometres(reach_um), fieldstop::micrometres(tube_diameter_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_swing_radius_f32(float reach_mm, float tube_diameter_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_swing_radius_f32(reach_mm, tube_diameter_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_swing_radius_f32(float reach_mm, float tube_diameter_mm, float *out)
+{
+    const auto given = fieldstop::swing_radius_f32(fieldstop::millimetres_f32(reach_mm), fieldstop::millimetres_f32(tube_diameter_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_swing_radius_f64(double reach_mm, double tube_diameter_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_swing_radius_f64(reach_mm, tube_diameter_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_swing_radius_f64(double reach_mm, double tube_diameter_mm, double *out)
+{
+    const auto given = fieldstop::swing_radius_f64(fieldstop::millimetres_f64(reach_mm), fieldstop::millimetres_f64(tube_diameter_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_eyepiece_height_fx(uint32_t axis_height_um, int32_t reach_um, int32_t altitude_bam, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_eyepiece_height_fx(axis_height_um, reach_um, altitude_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_eyepiece_height_fx(uint32_t axis_height_um, int32_t reach_um, int32_t altitude_bam, uint32_t *out)
+{
+    const auto given = fieldstop::eyepiece_height_fx(fieldstop::micrometres(axis_height_um), fieldstop::signed_micrometres(reach_um), fieldstop::signed_binary_angle(altitude_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_eyepiece_height_f32(float axis_height_mm, float reach_mm, float altitude_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_eyepiece_height_f32(axis_height_mm, reach_mm, altitude_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_eyepiece_height_f32(float axis_height_mm, float reach_mm, float altitude_deg, float *out)
+{
+    const auto given = fieldstop::eyepiece_height_f32(fieldstop::millimetres_f32(axis_height_mm), fieldstop::millimetres_f32(reach_mm), fieldstop::degrees_of_arc_f32(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_eyepiece_height_f64(double axis_height_mm, double reach_mm, double altitude_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_eyepiece_height_f64(axis_height_mm, reach_mm, altitude_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_eyepiece_height_f64(double axis_height_mm, double reach_mm, double altitude_deg, double *out)
+{
+    const auto given = fieldstop::eyepiece_height_f64(fieldstop::millimetres_f64(axis_height_mm), fieldstop::millimetres_f64(reach_mm), fieldstop::degrees_of_arc_f64(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
 fieldstop_status plain_telescope_check(const fieldstop::telescope *telescope)
 {
     return ::fieldstop_telescope_check(&telescope->c());

@@ -2,6 +2,8 @@
 //! where a value is quoted from memory.
 
 mod field;
+mod focus;
+mod layout;
 mod light;
 mod resolution;
 

@@ -39,16 +39,25 @@ fn table(name: &str, cases: &[Vec<i64>]) -> String {
 
 fn header(row: &Row) -> String {
     let signed = |least: i64| if least < 0 { "1" } else { "0" };
+    let bytes = |most: i64| match most {
+        0xff => 1,
+        0xffff => 2,
+        _ => 4,
+    };
     let units = row.arguments.iter().map(|a| a.unit).chain([row.result]).collect::<Vec<_>>();
     let list = |words: Vec<String>| words.join(", ");
     format!(
         "#define FUNCTION fieldstop_{}_fx\n#define ARGUMENTS {}\n#define WORDS (ARGUMENTS + 1)\n\
          /* Steps to the float unit, and whether signed; the result's last. */\n\
-         static const double steps[WORDS] = {{{}}};\nstatic const uint8_t is_signed[WORDS] = {{{}}};\n{}{}",
+         static const double steps[WORDS] = {{{}}};\nstatic const uint8_t is_signed[WORDS] = {{{}}};\n\
+         /* Bytes that each has in C. */\nstatic const uint8_t bytes[WORDS] = {{{}}};\n\
+         /* Whether it is an integer in every form. */\nstatic const uint8_t is_count[WORDS] = {{{}}};\n{}{}",
         row.stem,
         row.arguments.len(),
         list(units.iter().map(|u| format!("{:?}", u.steps)).collect()),
         list(units.iter().map(|u| signed(u.least).to_string()).collect()),
+        list(units.iter().map(|u| bytes(u.most).to_string()).collect()),
+        list(units.iter().map(|u| u8::from(u.count).to_string()).collect()),
         table("usual", &usual(row)),
         table("whole", &whole(row)),
     )

@@ -53,6 +53,27 @@ const DIRECTIONS: &[(&str, &str)] = &[
     ("distance_dimming", "-+"),
     ("extinction", "++"),
     ("t_number", "+-"),
+    ("depth_of_focus", "++"),
+    ("defocus_blur", "+-"),
+    ("defocus_wavefront", "+-"),
+    ("motor_steps", "+-"),
+    ("thermal_shift", "."),
+    ("refocus_temperature", "--+"),
+    ("near_focus_travel", "+-"),
+    ("coma_length", "+-"),
+    // A wider lit field makes the beam wider but less steep.
+    ("diagonal_minor_axis", "+-+."),
+    ("diagonal_offset", "+-+."),
+    ("beam_width", "+-+"),
+    ("beam_shift", "++-"),
+    ("secondary_magnification", "-+"),
+    ("secondary_separation", "++-"),
+    ("secondary_diameter", "++-+"),
+    ("secondary_field_margin", "+.-+"),
+    ("secondary_radius", "+-+"),
+    ("illumination", ".+-"),
+    ("swing_radius", "++"),
+    ("eyepiece_height", "++."),
 ];
 
 fn directions(row: &Row) -> Vec<char> {

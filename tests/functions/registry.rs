@@ -5,6 +5,8 @@ use super::big::{Big, big};
 use fieldstop::Error;
 
 mod field;
+mod focus;
+mod layout;
 mod light;
 mod resolution;
 mod units;
@@ -148,8 +150,13 @@ impl Row {
     }
 }
 
+/// a >= b for what [`Row::in_float_units`] gives: its last digits do not count.
+fn at_least(a: Big, b: Big) -> bool {
+    a > b - big(2f64.powi(-140))
+}
+
 pub fn all_rows() -> Vec<Row> {
-    [units::rows(), field::rows(), resolution::rows(), light::rows()].concat()
+    [units::rows(), field::rows(), resolution::rows(), light::rows(), focus::rows(), layout::rows()].concat()
 }
 
 /// Those that FIELDSTOP_ONLY names, for a long run, or all.
@@ -191,6 +198,8 @@ macro_rules! quantities {
         }
     )*};
 }
+quantities!(SignedNanometres Millimetres Millikelvin SignedMillikelvin);
+quantities!(PartsPerBillionPerKelvin SignedPartsPerBillionPerKelvin);
 quantities!(Micrometres SignedMicrometres Nanometres Milliarcseconds SignedMilliarcseconds Microarcseconds
     MilliarcsecondsPerMillimetre Q16 Milli Millimagnitudes MillimagnitudesPerAirmass Bam SignedBam DayMilliseconds);
 impl Real for f32 {

@@ -5,6 +5,8 @@ use crate::math::divide::{self, divide};
 use crate::math::float::{Real, from_zero_to};
 use crate::math::multiply::{high_64, wide};
 use crate::math::root;
+#[cfg(feature = "float")]
+use crate::math::segment::segment_area;
 use crate::optics::allowed;
 use crate::status::Error;
 use crate::stored::stored;
@@ -75,13 +77,14 @@ fn over(n: u64, d: u32) -> u64 {
 
 /// The square root of `x`, 0 to 1 in steps of 2^-48, in steps of 2^-63.
 fn square_root(x: u64) -> u64 {
-    // Newton's step from the nearest of 2^-31.
+    // Newton's step from the nearest of 2^-31: what its square leaves of x is at most as large as itself.
     let x = x << 14;
     match root::rounded(x) {
         Ok(near) if near != 0 => {
-            let (whole, rest) = divide(x, near);
-            let quotient = (whole as u64) << 32 | divide((rest as u64) << 32, near).0 as u64;
-            (((near as u64) << 32) >> 1) + (quotient >> 1)
+            let left = x.wrapping_sub(wide(near, near)) as i64;
+            let step = divide(left.unsigned_abs() << 31, near).0 as u64;
+            let near = (near as u64) << 32;
+            if left < 0 { near - step } else { near + step }
         }
         _ => 0,
     }
@@ -183,19 +186,6 @@ pub fn contrast<F: Real>(frequency: F, obstruction: F) -> Result<F, Error> {
 
 #[cfg(feature = "float")]
 use core::f64::consts::{FRAC_PI_2, PI};
-
-/// t - sin t cos t, to the last places also for a small angle.
-#[cfg(feature = "float")]
-fn segment_area<F: Real>(t: F) -> F {
-    if t > F::of(0.5) {
-        return t - t.sin() * t.cos();
-    }
-    let (one, square) = (F::of(1.0), F::of(4.0) * t * t);
-    let tail = one - square * F::of(1.0 / 210.0) * (one - square * F::of(1.0 / 272.0));
-    let tail = one - square * F::of(1.0 / 110.0) * (one - square * F::of(1.0 / 156.0) * tail);
-    let tail = one - square * F::of(1.0 / 42.0) * (one - square * F::of(1.0 / 72.0) * tail);
-    F::of(2.0 / 3.0) * t * t * t * (one - square * F::of(1.0 / 20.0) * tail)
-}
 
 #[cfg(test)]
 mod tests {

@@ -1,0 +1,2 @@
+#define IN_DOUBLE
+#include "readouts.h"

@@ -1,0 +1,51 @@
+/* Counts one way of making the screen, WAY, over the usual telescopes of CASES. */
+#include "../measure.h"
+#include "screen.h"
+#include CASES
+
+#define JOIN(a, b) a##b
+#define HALF(way, half) JOIN(way, half)
+enum { APERTURE, FOCAL_LENGTH, EYEPIECE, FIELD_STOP };
+
+static uint32_t both(const struct screen_input *in)
+{
+    return HALF(WAY, _compute)(in) | HALF(WAY, _text)();
+}
+
+static uint32_t count(uint32_t (*function)(), const struct screen_input *in)
+{
+    struct call call = {(uintptr_t)function, {(uint32_t)(uintptr_t)in}, 0};
+    if ((uint16_t)measure(&call) != 0) {
+        puts("a call was refused");
+        exit(1);
+    }
+    return counted(&call);
+}
+
+int main(void)
+{
+    static uint32_t compute[MOST], text[MOST], total[MOST];
+    uint32_t n = sizeof usual / sizeof usual[0], stack = 0, k;
+
+    verify();
+    for (k = 0; k < n; k++) {
+        const uint32_t *words = usual[k];
+        struct screen_input in = {words[APERTURE], words[FOCAL_LENGTH], words[EYEPIECE], words[FIELD_STOP]};
+        struct call call = {(uintptr_t)both, {(uint32_t)(uintptr_t)&in}, 0};
+        uint32_t used = stack_of(call);
+        stack = used > stack ? used : stack;
+        compute[k] = count(HALF(WAY, _compute), &in);
+        text[k] = count(HALF(WAY, _text), &in);
+        total[k] = compute[k] + text[k];
+    }
+#ifdef SHOW
+    for (k = 0; k < 4; k++) {
+        printf("%.20s\n", screen_lines[k]);
+    }
+#endif
+    print_counts(compute, n);
+    print_counts(text, n);
+    print_counts(total, n);
+    printf(" %u\n", (unsigned)stack);
+    return 0;
+}

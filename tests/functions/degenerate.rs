@@ -1,0 +1,186 @@
+//! Focus and layout where their formulas nearly break down: systems hardly longer than their primary, cones as steep as
+//! a plane, discs that just touch, objects at the focal length. In all three forms.
+
+use super::cases::{self, Random};
+use super::oracle::{fixed_error, float_error};
+use super::registry::{Row, all_rows};
+
+fn row(stem: &str) -> Row {
+    all_rows().into_iter().find(|row| row.stem == stem).unwrap()
+}
+
+/// `make` draws a case near the border; an argument out of its type is put at its end.
+fn check(stem: &str, make: impl Fn(&mut Random) -> Vec<i64>) {
+    let (row, mut r) = (row(stem), Random::new(stem));
+    let mut worst = [0.0f64; 3];
+    for _ in 0..cases::count() {
+        let case: Vec<i64> = (row.arguments.iter().zip(make(&mut r)))
+            .map(|(a, x)| x.clamp(a.unit.least, a.unit.most))
+            .collect();
+        worst[0] = worst[0].max(fixed_error(&row, &case));
+        for (k, single) in [(1, true), (2, false)] {
+            // The same border in float units, where the arguments' last digits are others.
+            let cut = |x: f64| if single { x as f32 as f64 } else { x };
+            let case: Vec<f64> =
+                row.arguments.iter().zip(&case).map(|(a, &x)| cut(x as f64 / a.unit.steps)).collect();
+            worst[k] = worst[k].max(float_error(&row, &case, single));
+        }
+    }
+    println!("{stem:26} at its borders: fx {:.4}, f32 {:.3}, f64 {:.3}", worst[0], worst[1], worst[2]);
+}
+
+/// Float cases at a border that only a float tells.
+fn check_floats(stem: &str, make: impl Fn(&mut Random, &dyn Fn(f64) -> f64) -> Vec<f64>) {
+    let row = row(stem);
+    for single in [true, false] {
+        let cut = move |x: f64| if single { x as f32 as f64 } else { x };
+        let mut r = Random::new(stem);
+        for _ in 0..cases::count() {
+            let case = make(&mut r, &cut);
+            float_error(&row, &case, single);
+        }
+    }
+}
+
+/// Log-uniform from 1 to below 2^bits.
+fn length(r: &mut Random, bits: u32) -> i64 {
+    let bits = r.below(bits as u64) as u32;
+    (1 << bits) + r.below(1 << bits) as i64
+}
+
+/// 0 or a few, or more by any power of two; either sign.
+fn aside(r: &mut Random) -> i64 {
+    let more = if r.below(2) == 0 { r.below(4) as i64 } else { length(r, 31) };
+    if r.below(2) == 0 { more } else { -more }
+}
+
+#[test]
+fn systems_hardly_longer_than_the_primary() {
+    let mirrors = |r: &mut Random| {
+        let primary = length(r, 32);
+        let system = primary + 1 + r.below(4) as i64 * aside(r).abs();
+        let back = [0, 1, system, system - 1, system / 2, system + 1][r.below(6) as usize];
+        vec![primary, system, back]
+    };
+    check("secondary_magnification", |r| mirrors(r)[..2].to_vec());
+    check("secondary_separation", mirrors);
+    check("secondary_radius", mirrors);
+    check("secondary_diameter", |r| [vec![length(r, 32)], mirrors(r)].concat());
+    check("secondary_field_margin", |r| [mirrors(r), vec![length(r, 32)]].concat());
+    // The same in the last digits of a float.
+    let beside = |r: &mut Random, cut: &dyn Fn(f64) -> f64| {
+        let primary = cut(length(r, 32) as f64 * (1.0 + r.unit()));
+        let system = cut(primary * (1.0 + 2f64.powf(-54.0 * r.unit())));
+        vec![primary.min(4e9), system.min(4e9), cut(system.min(4e9) * r.unit())]
+    };
+    check_floats("secondary_radius", beside);
+    check_floats("secondary_separation", beside);
+}
+
+#[test]
+fn cones_as_steep_as_a_plane() {
+    let cone = |r: &mut Random| {
+        let focal_length = length(r, 32);
+        let distance =
+            [0, 1, focal_length, focal_length - 1, focal_length / 2, focal_length + 1][r.below(6) as usize];
+        let field = length(r, 32) - 1;
+        let aperture = match r.below(3) {
+            0 => field + 1 + r.below(3) as i64,       // g just over 0
+            1 => field + 2 * focal_length - aside(r), // g just under 1
+            _ => field + length(r, 32),
+        };
+        vec![aperture, focal_length, distance, field]
+    };
+    check("diagonal_minor_axis", cone);
+    check("diagonal_offset", cone);
+    check("beam_width", |r| cone(r)[..3].to_vec());
+    check("beam_shift", |r| [vec![length(r, 32)], cone(r)[1..3].to_vec()].concat());
+    // The same in the last digits of a float.
+    let beside = |r: &mut Random, cut: &dyn Fn(f64) -> f64| {
+        let focal_length = cut(length(r, 30) as f64 * (1.0 + r.unit()));
+        let field = cut(focal_length * 2f64.powf(-30.0 * r.unit()));
+        let close = 2f64.powf(-54.0 * r.unit());
+        let aperture = cut((field + 2.0 * focal_length) * (1.0 - close));
+        vec![aperture, focal_length, cut(focal_length * r.unit()), field]
+    };
+    check_floats("diagonal_minor_axis", beside);
+    check_floats("diagonal_offset", beside);
+}
+
+#[test]
+fn discs_just_touching_and_just_inside() {
+    check("illumination", |r| {
+        let beam = length(r, 32);
+        let stop = match r.below(4) {
+            0 => 0,
+            1 => beam + aside(r),
+            _ => length(r, 32),
+        };
+        // The offset is a radius, the others diameters.
+        let offset = match r.below(3) {
+            0 => (beam + stop) / 2 + aside(r),
+            1 => (beam - stop).abs() / 2 + aside(r),
+            _ => r.below((beam + stop) as u64 / 2 + 1) as i64,
+        };
+        vec![beam, stop, offset]
+    });
+    check_floats("illumination", |r, cut| {
+        let beam = cut(2f64.powf(60.0 * r.unit() - 30.0));
+        let stop = if r.below(2) == 0 {
+            cut(beam * (1.0 + 2f64.powf(-60.0 * r.unit())))
+        } else {
+            cut(2f64.powf(60.0 * r.unit() - 30.0))
+        };
+        let close = 1.0 + 2f64.powf(-60.0 * r.unit()) * (r.below(3) as f64 - 1.0);
+        let border = if r.below(2) == 0 { beam + stop } else { (beam - stop).abs() };
+        vec![beam, stop, cut((border / 2.0 * close).min(4e9))]
+    });
+}
+
+#[test]
+fn objects_at_the_focal_length() {
+    check("near_focus_travel", |r| {
+        let distance = length(r, 23);
+        vec![1000 * distance - aside(r), distance]
+    });
+    check_floats("near_focus_travel", |r, cut| {
+        let distance = cut(length(r, 22) as f64 * (1.0 + r.unit()));
+        vec![cut(distance * 1000.0 * (1.0 - 2f64.powf(-54.0 * r.unit()))), distance]
+    });
+}
+
+#[test]
+fn results_at_the_ends_of_their_types() {
+    // Both ends of the signed result, with its sign from either argument.
+    check("thermal_shift", |r| {
+        let product = (1i64 << 31) * 1_000_000_000;
+        let (length, expansion) = (length(r, 32), length(r, 31));
+        let change = (product / length / expansion).clamp(0, i32::MAX as i64) + aside(r) % 3;
+        let sign = |r: &mut Random| if r.below(2) == 0 { 1 } else { -1 };
+        vec![length, sign(r) * expansion, sign(r) * change]
+    });
+    check("depth_of_focus", |r| {
+        let ratio = length(r, 32);
+        let wavelength = ((1u128 << 63) / (ratio as u128 * ratio as u128)).min(u32::MAX as u128) as i64;
+        vec![ratio, wavelength + aside(r) % 3]
+    });
+    check("swing_radius", |r| {
+        let reach = if r.below(2) == 0 { u32::MAX as i64 - length(r, 20) } else { length(r, 32) };
+        vec![reach, aside(r).abs()]
+    });
+    // The eyepiece near the floor.
+    check("eyepiece_height", |r| {
+        let (reach, altitude) = (-length(r, 31), r.below((1 << 30) + 1) as i64);
+        let rise = reach as f64 * (altitude as f64 / (1u64 << 31) as f64 * std::f64::consts::PI).sin();
+        vec![-rise as i64 + aside(r) % 3, reach, altitude]
+    });
+}
+
+/// A lit field of nearly nothing under a cone of 45 degrees: beyond what the type holds.
+#[test]
+fn a_cone_beyond_a_float() {
+    use fieldstop::{Error, optics::layout::*};
+    let least = f32::from_bits(1);
+    assert_eq!(diagonal_minor_axis(200.0, 100.0, 50.0, least), Err(Error::OVERFLOW));
+    assert_eq!(diagonal_offset(200.0, 100.0, 50.0, f64::from_bits(1)), Err(Error::OVERFLOW));
+}
