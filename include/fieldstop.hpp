@@ -20,7 +20,7 @@
  * ignored. value_or(other) is always safe; value() without a value stops the program by FIELDSTOP_STOP(), which
  * you may define before this header is read, as an expression that does not return; it is a trap otherwise.
  *
- * Equipment is built member by member: telescope().with_aperture(187500_um)… and what C takes is c(). A member of a
+ * Equipment is built member by member: telescope().with_aperture(187500_um) and so on; what C takes is c(). A member of a
  * readout that is not available is a result without a value, of cause FIELDSTOP_UNDEFINED.
  *
  * CAUTION. Never look at or near the Sun through a telescope without a full-aperture filter made for it; nothing that
@@ -403,7 +403,7 @@ template <> struct conversion<false, true> {
     }
 };
 
-constexpr long long steps(long long from, long long to)
+constexpr long long times_larger(long long from, long long to)
 {
     return from > to ? from / to : 1;
 }
@@ -413,7 +413,8 @@ FIELDSTOP_CHECKED constexpr result<target> convert(quantity<unit_type, number> f
 {
     static_assert(target::unit_of::kind() == unit_type::kind(), "units of different kinds");
     return conversion<number_kind<typename target::number>::floating(), number_kind<number>::floating()>::template of<target>(
-        from.count(), steps(unit_type::size(), target::unit_of::size()), steps(target::unit_of::size(), unit_type::size()));
+        from.count(), times_larger(unit_type::size(), target::unit_of::size()),
+        times_larger(target::unit_of::size(), unit_type::size()));
 }
 template <typename target, typename unit_type> FIELDSTOP_CHECKED constexpr result<target> convert(whole<unit_type> from)
 {
