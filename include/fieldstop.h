@@ -23,12 +23,13 @@
  *     _ms _us  milli-, microseconds _s         seconds
  *     _mk      millikelvin          _k         kelvin
  *     _ppb     parts per billion    _ppm       parts per million
+ *     _n7      refractive index times 10^7: 15168000 is 1.5168
  *     _day_ms  milliseconds of a circle of 24 hours
  *     _bam     binary angle: 2^32 is one turn  _deg       degrees
  *     _per_mm, _per_s and the like divide the unit before them.
  * The float forms take millimetres for _um, micrometres for _nm (but wavelengths and errors of the
  * wavefront stay in nanometres), metres, _m, for a fixed _mm, arcseconds for _mas and _uas, plain
- * numbers for _q16, magnitudes for _mmag, degrees for _bam.
+ * numbers for _q16, _n7 and _ppm, magnitudes for _mmag, degrees for _bam.
  *
  * Ranges. A fixed argument may be anything that its type holds, but for what the function's comment
  * says. A float argument is finite and at most 2^32 in magnitude, and at least 2^-32 where zero is
@@ -1885,6 +1886,280 @@ fieldstop_status fieldstop_t_number_f64(double focal_ratio,
 #endif
 
 /* --------------------------------------------------------------------------------------------------
+   Imaging: how a sensor samples the sky, how large a target falls on it, and what a focal
+   ratio does to the exposure. */
+
+/**
+ * Gives how many pixels lie across the width of a star's image, Q16.16.
+ *
+ * FWHM / scale (Howell, Handbook of CCD Astronomy).
+ * Ranges: fwhm_uas, pixel_scale_uas not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_pixels_per_fwhm_fx(uint32_t fwhm_uas,
+                                              uint32_t pixel_scale_uas,
+                                              uint32_t *pixels_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many pixels lie across the width of a star's image.
+ *
+ * FWHM / scale (Howell, Handbook of CCD Astronomy).
+ * Ranges: fwhm_arcsec, pixel_scale_arcsec 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_pixels_per_fwhm_f32(float fwhm_arcsec,
+                                               float pixel_scale_arcsec,
+                                               float *pixels);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many pixels lie across the width of a star's image, in double.
+ *
+ * FWHM / scale (Howell, Handbook of CCD Astronomy).
+ * Ranges: fwhm_arcsec, pixel_scale_arcsec 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_pixels_per_fwhm_f64(double fwhm_arcsec,
+                                               double pixel_scale_arcsec,
+                                               double *pixels);
+#endif
+
+/**
+ * Gives the coarsest pixel that loses nothing of what the telescope shows in still air, in nanometres.
+ *
+ * lambda f / (2 D): two pixels to the period of the cutoff frequency (Shannon 1949; Goodman, Introduction to Fourier
+ * Optics).
+ * Ranges: focal_length_um, aperture_um, wavelength_nm not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_nyquist_pixel_fx(uint32_t focal_length_um,
+                                            uint32_t aperture_um,
+                                            uint32_t wavelength_nm,
+                                            uint32_t *pixel_nm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the coarsest pixel that loses nothing of what the telescope shows in still air, in micrometres.
+ *
+ * lambda f / (2 D): two pixels to the period of the cutoff frequency (Shannon 1949; Goodman, Introduction to Fourier
+ * Optics).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_nyquist_pixel_f32(float focal_length_mm,
+                                             float aperture_mm,
+                                             float wavelength_nm,
+                                             float *pixel_um);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the coarsest pixel that loses nothing of what the telescope shows in still air, in micrometres, in double.
+ *
+ * lambda f / (2 D): two pixels to the period of the cutoff frequency (Shannon 1949; Goodman, Introduction to Fourier
+ * Optics).
+ * Ranges: focal_length_mm, aperture_mm, wavelength_nm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_nyquist_pixel_f64(double focal_length_mm,
+                                             double aperture_mm,
+                                             double wavelength_nm,
+                                             double *pixel_um);
+#endif
+
+/**
+ * Gives the focal length that gives a pixel so much of the sky, in micrometres.
+ *
+ * (1 rad) p / scale (Schroeder, Astronomical Optics).
+ * Ranges: pixel_nm, pixel_scale_uas not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_length_for_pixel_scale_fx(uint32_t pixel_nm,
+                                                           uint32_t pixel_scale_uas,
+                                                           uint32_t *focal_length_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the focal length that gives a pixel so much of the sky, in millimetres.
+ *
+ * (1 rad) p / scale (Schroeder, Astronomical Optics).
+ * Ranges: pixel_um, pixel_scale_arcsec 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_length_for_pixel_scale_f32(float pixel_um,
+                                                            float pixel_scale_arcsec,
+                                                            float *focal_length_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the focal length that gives a pixel so much of the sky, in millimetres, in double.
+ *
+ * (1 rad) p / scale (Schroeder, Astronomical Optics).
+ * Ranges: pixel_um, pixel_scale_arcsec 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focal_length_for_pixel_scale_f64(double pixel_um,
+                                                            double pixel_scale_arcsec,
+                                                            double *focal_length_mm);
+#endif
+
+/**
+ * Gives the angle of sky from corner to corner of a sensor, in milliarcseconds.
+ *
+ * 2 atan(p sqrt(c^2 + r^2) / 2f) (Schroeder, Astronomical Optics).
+ * Ranges: pixel_nm, columns, rows, focal_length_um not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_field_fx(uint32_t pixel_nm,
+                                             uint16_t columns,
+                                             uint16_t rows,
+                                             uint32_t focal_length_um,
+                                             uint32_t *field_mas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the angle of sky from corner to corner of a sensor, in arcseconds.
+ *
+ * 2 atan(p sqrt(c^2 + r^2) / 2f) (Schroeder, Astronomical Optics).
+ * Ranges: pixel_um, focal_length_mm 2^-32 to 2^32; columns, rows not 0.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_field_f32(float pixel_um,
+                                              uint16_t columns,
+                                              uint16_t rows,
+                                              float focal_length_mm,
+                                              float *field_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle of sky from corner to corner of a sensor, in arcseconds, in double.
+ *
+ * 2 atan(p sqrt(c^2 + r^2) / 2f) (Schroeder, Astronomical Optics).
+ * Ranges: pixel_um, focal_length_mm 2^-32 to 2^32; columns, rows not 0.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_diagonal_field_f64(double pixel_um,
+                                              uint16_t columns,
+                                              uint16_t rows,
+                                              double focal_length_mm,
+                                              double *field_arcsec);
+#endif
+
+/**
+ * Gives how large a target is at the focus, in nanometres.
+ *
+ * 2 f tan(t/2) (Schroeder, Astronomical Optics).
+ * Ranges: field_mas not 0, under 648000000 (180 degrees); focal_length_um not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_image_size_fx(uint32_t field_mas,
+                                         uint32_t focal_length_um,
+                                         uint32_t *size_nm);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how large a target is at the focus, in micrometres.
+ *
+ * 2 f tan(t/2) (Schroeder, Astronomical Optics).
+ * Ranges: field_arcsec 2^-32 to under 648000 (180 degrees); focal_length_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_image_size_f32(float field_arcsec,
+                                          float focal_length_mm,
+                                          float *size_um);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how large a target is at the focus, in micrometres, in double.
+ *
+ * 2 f tan(t/2) (Schroeder, Astronomical Optics).
+ * Ranges: field_arcsec 2^-32 to under 648000 (180 degrees); focal_length_mm 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_image_size_f64(double field_arcsec,
+                                          double focal_length_mm,
+                                          double *size_um);
+#endif
+
+/**
+ * Gives how many stops more exposure a focal ratio needs than another, negative where it needs less, signed Q16.16.
+ *
+ * 2 log2(Nto / Nfrom) (ISO 517: a stop is twice the time, the root of two in the focal ratio).
+ * Ranges: from_focal_ratio_q16, to_focal_ratio_q16 not 0.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_exposure_stops_fx(uint32_t from_focal_ratio_q16,
+                                             uint32_t to_focal_ratio_q16,
+                                             int32_t *stops_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how many stops more exposure a focal ratio needs than another, negative where it needs less.
+ *
+ * 2 log2(Nto / Nfrom) (ISO 517: a stop is twice the time, the root of two in the focal ratio).
+ * Ranges: from_focal_ratio, to_focal_ratio 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_exposure_stops_f32(float from_focal_ratio,
+                                              float to_focal_ratio,
+                                              float *stops);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how many stops more exposure a focal ratio needs than another, negative where it needs less, in double.
+ *
+ * 2 log2(Nto / Nfrom) (ISO 517: a stop is twice the time, the root of two in the focal ratio).
+ * Ranges: from_focal_ratio, to_focal_ratio 2^-32 to 2^32.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_exposure_stops_f64(double from_focal_ratio,
+                                              double to_focal_ratio,
+                                              double *stops);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
    Focus: how deep it is, what a miss costs, and how far heat, a near object and the edge of
    the field move it. */
 
@@ -2851,6 +3126,286 @@ fieldstop_status fieldstop_eyepiece_height_f64(double axis_height_mm,
                                                double reach_mm,
                                                double altitude_deg,
                                                double *height_mm);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
+   Colour: what a single lens does to it, and what a pair of two glasses leaves. */
+
+/**
+ * Gives the Abbe number of a glass, Q16.16.
+ *
+ * (nd - 1) / (nF - nC), the indices at 587.6, 486.1 and 656.3 nm (ISO 10110-18).
+ * Ranges: index_d_n7 over 10000000 (1); index_f_n7 not 0; index_c_n7 not 0, under index_f_n7.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_abbe_number_fx(uint32_t index_d_n7,
+                                          uint32_t index_f_n7,
+                                          uint32_t index_c_n7,
+                                          uint32_t *abbe_q16);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the Abbe number of a glass.
+ *
+ * (nd - 1) / (nF - nC), the indices at 587.6, 486.1 and 656.3 nm (ISO 10110-18).
+ * Ranges: index_d over 1 to 2^32; index_f 2^-32 to 2^32; index_c 2^-32 to under index_f.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_abbe_number_f32(float index_d,
+                                           float index_f,
+                                           float index_c,
+                                           float *abbe);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the Abbe number of a glass, in double.
+ *
+ * (nd - 1) / (nF - nC), the indices at 587.6, 486.1 and 656.3 nm (ISO 10110-18).
+ * Ranges: index_d over 1 to 2^32; index_f 2^-32 to 2^32; index_c 2^-32 to under index_f.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_abbe_number_f64(double index_d,
+                                           double index_f,
+                                           double index_c,
+                                           double *abbe);
+#endif
+
+/**
+ * Gives how far apart along the axis a single lens focuses blue and red, F and C, in micrometres.
+ *
+ * f / V, a thin lens (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_um, abbe_q16 not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_singlet_colour_shift_fx(uint32_t focal_length_um,
+                                                   uint32_t abbe_q16,
+                                                   uint32_t *shift_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how far apart along the axis a single lens focuses blue and red, F and C, in millimetres.
+ *
+ * f / V, a thin lens (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_mm, abbe 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_singlet_colour_shift_f32(float focal_length_mm,
+                                                    float abbe,
+                                                    float *shift_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how far apart along the axis a single lens focuses blue and red, F and C, in millimetres, in double.
+ *
+ * f / V, a thin lens (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_mm, abbe 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_singlet_colour_shift_f64(double focal_length_mm,
+                                                    double abbe,
+                                                    double *shift_mm);
+#endif
+
+/**
+ * Gives the diameter on the sky to which a single lens draws a star in blue and red, F and C, at the best focus, in
+ * microarcseconds.
+ *
+ * (1 rad) / (2 V N) (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_ratio_q16, abbe_q16 not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_singlet_colour_blur_fx(uint32_t focal_ratio_q16,
+                                                  uint32_t abbe_q16,
+                                                  uint32_t *blur_uas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the diameter on the sky to which a single lens draws a star in blue and red, F and C, at the best focus, in
+ * arcseconds.
+ *
+ * (1 rad) / (2 V N) (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_ratio, abbe 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_singlet_colour_blur_f32(float focal_ratio,
+                                                   float abbe,
+                                                   float *blur_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the diameter on the sky to which a single lens draws a star in blue and red, F and C, at the best focus, in
+ * arcseconds, in double.
+ *
+ * (1 rad) / (2 V N) (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_ratio, abbe 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_singlet_colour_blur_f64(double focal_ratio,
+                                                   double abbe,
+                                                   double *blur_arcsec);
+#endif
+
+/**
+ * Gives the focal length of the crown lens of an achromat, in micrometres.
+ *
+ * f (V1 - V2) / V1, thin lenses in contact (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_um, crown_abbe_q16, flint_abbe_q16 not 0; flint_abbe_q16 under crown_abbe_q16.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_achromat_crown_fx(uint32_t focal_length_um,
+                                             uint32_t crown_abbe_q16,
+                                             uint32_t flint_abbe_q16,
+                                             uint32_t *crown_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the focal length of the crown lens of an achromat, in millimetres.
+ *
+ * f (V1 - V2) / V1, thin lenses in contact (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_mm, crown_abbe 2^-32 to 2^32; flint_abbe 2^-32 to under crown_abbe.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_achromat_crown_f32(float focal_length_mm,
+                                              float crown_abbe,
+                                              float flint_abbe,
+                                              float *crown_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the focal length of the crown lens of an achromat, in millimetres, in double.
+ *
+ * f (V1 - V2) / V1, thin lenses in contact (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_mm, crown_abbe 2^-32 to 2^32; flint_abbe 2^-32 to under crown_abbe.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_achromat_crown_f64(double focal_length_mm,
+                                              double crown_abbe,
+                                              double flint_abbe,
+                                              double *crown_mm);
+#endif
+
+/**
+ * Gives the focal length of the flint lens of an achromat, in size: the lens is negative, in micrometres.
+ *
+ * f (V1 - V2) / V2, thin lenses in contact (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_um, crown_abbe_q16, flint_abbe_q16 not 0; flint_abbe_q16 under crown_abbe_q16.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_achromat_flint_fx(uint32_t focal_length_um,
+                                             uint32_t crown_abbe_q16,
+                                             uint32_t flint_abbe_q16,
+                                             uint32_t *flint_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the focal length of the flint lens of an achromat, in size: the lens is negative, in millimetres.
+ *
+ * f (V1 - V2) / V2, thin lenses in contact (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_mm, crown_abbe 2^-32 to 2^32; flint_abbe 2^-32 to under crown_abbe.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_achromat_flint_f32(float focal_length_mm,
+                                              float crown_abbe,
+                                              float flint_abbe,
+                                              float *flint_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the focal length of the flint lens of an achromat, in size: the lens is negative, in millimetres, in double.
+ *
+ * f (V1 - V2) / V2, thin lenses in contact (Kingslake, Lens Design Fundamentals).
+ * Ranges: focal_length_mm, crown_abbe 2^-32 to 2^32; flint_abbe 2^-32 to under crown_abbe.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_achromat_flint_f64(double focal_length_mm,
+                                              double crown_abbe,
+                                              double flint_abbe,
+                                              double *flint_mm);
+#endif
+
+/**
+ * Gives how far from the common focus of blue and red, F and C, an achromat brings the colour between, in micrometres.
+ *
+ * f dP / dV, dP and dV the differences of the two glasses in partial dispersion and Abbe number (Kingslake, Lens
+ * Design Fundamentals).
+ * Ranges: focal_length_um, abbe_difference_q16 not 0.
+ * Error: at most 0.5 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_spectrum_fx(uint32_t focal_length_um,
+                                                 uint32_t partial_difference_ppm,
+                                                 uint32_t abbe_difference_q16,
+                                                 uint32_t *spectrum_um);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how far from the common focus of blue and red, F and C, an achromat brings the colour between, in millimetres.
+ *
+ * f dP / dV, dP and dV the differences of the two glasses in partial dispersion and Abbe number (Kingslake, Lens
+ * Design Fundamentals).
+ * Ranges: focal_length_mm, abbe_difference 2^-32 to 2^32; partial_difference 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_spectrum_f32(float focal_length_mm,
+                                                  float partial_difference,
+                                                  float abbe_difference,
+                                                  float *spectrum_mm);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how far from the common focus of blue and red, F and C, an achromat brings the colour between, in millimetres,
+ * in double.
+ *
+ * f dP / dV, dP and dV the differences of the two glasses in partial dispersion and Abbe number (Kingslake, Lens
+ * Design Fundamentals).
+ * Ranges: focal_length_mm, abbe_difference 2^-32 to 2^32; partial_difference 0 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_secondary_spectrum_f64(double focal_length_mm,
+                                                  double partial_difference,
+                                                  double abbe_difference,
+                                                  double *spectrum_mm);
 #endif
 
 /* --------------------------------------------------------------------------------------------------

@@ -40,6 +40,8 @@ quantity! {
     MilliarcsecondsPerMillimetre(u32),
     /// Ratios, magnifications, focal ratios: unsigned Q16.16. C suffix `_q16`; the float form is a plain number.
     Q16(u32),
+    /// Exposure in stops: signed Q16.16. C suffix `_q16`; the float form is a plain number.
+    SignedQ16(i32),
     /// Thousandths of a plain number. C suffix `_milli`.
     Milli(u32),
     /// Brightness on the magnitude scale. C suffix `_mmag`; the float form is in magnitudes, `_mag`.
@@ -55,6 +57,10 @@ quantity! {
     /// Thermal expansion of either sign. C suffix `_ppb_per_k`; the float form is in parts per million per kelvin,
     /// `_ppm_per_k`.
     SignedPartsPerBillionPerKelvin(i32),
+    /// Refractive index in steps of 10^-7. C suffix `_n7`; the float form is the index.
+    RefractiveIndex(u32),
+    /// A small share. C suffix `_ppm`; the float form is a plain number, 10^-6 for each part.
+    PartsPerMillion(u32),
     /// A binary angle that wraps: 2^32 is one turn. C suffix `_bam`; the float form is in degrees, `_deg`.
     Bam(u32),
     /// A binary angle either side of zero: 2^32 is one turn. C suffix `_bam`; the float form is in degrees, `_deg`.
@@ -66,4 +72,9 @@ quantity! {
 impl Q16 {
     /// 1.0
     pub const ONE: Q16 = Q16(1 << 16);
+}
+
+impl RefractiveIndex {
+    /// 1.0, that of nothing.
+    pub const ONE: RefractiveIndex = RefractiveIndex(10_000_000);
 }

@@ -23,12 +23,13 @@
  *     _ms _us  milli-, microseconds _s         seconds
  *     _mk      millikelvin          _k         kelvin
  *     _ppb     parts per billion    _ppm       parts per million
+ *     _n7      refractive index times 10^7: 15168000 is 1.5168
  *     _day_ms  milliseconds of a circle of 24 hours
  *     _bam     binary angle: 2^32 is one turn  _deg       degrees
  *     _per_mm, _per_s and the like divide the unit before them.
  * The float forms take millimetres for _um, micrometres for _nm (but wavelengths and errors of the
  * wavefront stay in nanometres), metres, _m, for a fixed _mm, arcseconds for _mas and _uas, plain
- * numbers for _q16, magnitudes for _mmag, degrees for _bam.
+ * numbers for _q16, _n7 and _ppm, magnitudes for _mmag, degrees for _bam.
  *
  * Ranges. A fixed argument may be anything that its type holds, but for what the function's comment
  * says. A float argument is finite and at most 2^32 in magnitude, and at least 2^-32 where zero is

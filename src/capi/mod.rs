@@ -5,8 +5,10 @@
 //! success.
 #![allow(unsafe_code, non_camel_case_types, clippy::missing_safety_doc)]
 
+pub mod colour;
 pub mod field;
 pub mod focus;
+pub mod imaging;
 pub mod layout;
 pub mod light;
 pub mod resolution;

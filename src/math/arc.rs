@@ -1,6 +1,6 @@
 //! Angles from ratios and back: twice the arc tangent, and the cotangent of half an angle.
 
-use super::divide::{divide, normalise, shift_up};
+use super::divide::{by_64, divide, normalise, shift_up};
 use super::multiply::{high, high_64, high_signed, wide};
 use crate::stored::{Stored, stored};
 
@@ -113,6 +113,21 @@ fn angle_of_ratio(n: u64, d: u64) -> u32 {
         twice_arctangent(divide(((small as u64) << 32) >> down, large).0)
     };
     if inverted { HALF_TURN_MAS - angle } else { angle }
+}
+
+/// 2 atan(n / (d 2^down)) in milliarcseconds, at most 1 from the exact value, with all bits of both. Neither is 0; n is
+/// at most (2^32 - 1)^2, and `down` from 1 to 31.
+#[inline(never)]
+pub(crate) fn angle_of_wide(n: u64, d: u64, down: u32) -> u32 {
+    if let Ok(ratio) = by_64((n >> 32) as u32 >> down, shift_up(n, 32 - down), d) {
+        return twice_arctangent(ratio);
+    }
+    // Not above n but in the last places, so it fits.
+    let d = shift_up(d, down);
+    match by_64((d >> 32) as u32, d << 32, n) {
+        Ok(ratio) => HALF_TURN_MAS - twice_arctangent(ratio),
+        Err(_) => HALF_TURN_MAS / 2,
+    }
 }
 
 /// (1 - a cot a) / a^2 - 1/3 in steps of 2^-37 as a polynomial in a^2, which is at most (pi / 4)^2; low power first.

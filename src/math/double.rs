@@ -35,7 +35,11 @@ impl<F: Real> Double<F> {
 
 /// a b / (c d) within 1.6 ulp.
 pub(crate) fn product_ratio<F: Real>(a: F, b: F, c: F, d: F) -> F {
-    let (n, d) = (Double::product(a, b), Double::product(c, d));
+    quotient(Double::product(a, b), Double::product(c, d))
+}
+
+/// n / d within 1.6 ulp.
+pub(crate) fn quotient<F: Real>(n: Double<F>, d: Double<F>) -> F {
     (n.upper + (n.lower - n.upper * (d.lower / d.upper))) / d.upper
 }
 

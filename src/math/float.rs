@@ -62,6 +62,8 @@ pub trait Real:
     #[doc(hidden)]
     fn ln_1p(self) -> Self;
     #[doc(hidden)]
+    fn log2(self) -> Self;
+    #[doc(hidden)]
     fn log10(self) -> Self;
     #[doc(hidden)]
     fn exp(self) -> Self;
@@ -73,7 +75,7 @@ pub trait Real:
 
 macro_rules! real {
     ($t:ty, $split:literal, $times:expr, $floor:ident $sqrt:ident $atan:ident $atan2:ident $tangent:expr, $asin:ident $sin:ident $cos:ident $ln_1p:ident
-     $log10:ident $exp:ident $pow:ident $hypot:ident) => {
+     $log2:ident $log10:ident $exp:ident $pow:ident $hypot:ident) => {
         impl Real for $t {
             const SPLIT: Self = $split;
             #[inline(always)]
@@ -128,6 +130,9 @@ macro_rules! real {
             fn ln_1p(self) -> Self {
                 libm::$ln_1p(self)
             }
+            fn log2(self) -> Self {
+                libm::$log2(self)
+            }
             fn log10(self) -> Self {
                 libm::$log10(self)
             }
@@ -144,8 +149,8 @@ macro_rules! real {
     };
 }
 
-real!(f32, 4097.0, |x, (upper, _)| x * upper as f32, floorf sqrtf atanf atan2f tangent_in_f32, asinf sinf cosf log1pf log10f expf powf hypotf);
-real!(f64, 134217729.0, |x, (upper, lower)| (Double { upper, lower } * x).upper, floor sqrt atan atan2 |x| (libm::tan(x), 0.0), asin sin cos log1p log10 exp pow hypot);
+real!(f32, 4097.0, |x, (upper, _)| x * upper as f32, floorf sqrtf atanf atan2f tangent_in_f32, asinf sinf cosf log1pf log2f log10f expf powf hypotf);
+real!(f64, 134217729.0, |x, (upper, lower)| (Double { upper, lower } * x).upper, floor sqrt atan atan2 |x| (libm::tan(x), 0.0), asin sin cos log1p log2 log10 exp pow hypot);
 
 /// (tan x / x - 1) / x^2 as a polynomial in x^2 up to (pi / 4)^2, low power first.
 const TANGENT: [f32; 7] =

@@ -15,27 +15,28 @@ use crate::units::{
     SignedMicrometres,
 };
 
-const HALF_TURN_MAS: u32 = 648_000_000;
+pub(super) const HALF_TURN_MAS: u32 = 648_000_000;
 
 /// 1000 radians in microarcseconds, cut: what is cut moves no result by more than 0.002, since 48 um already overflows.
 const RADIAN_UAS: u64 = 206_264_806_247;
 
 /// One radian in milliarcseconds, 648000000 / pi.
-const RADIAN_MAS: divide::Constant = divide::Constant { whole: 206_264_806, fraction: 1_061_268_899 };
+pub(super) const RADIAN_MAS: divide::Constant =
+    divide::Constant { whole: 206_264_806, fraction: 1_061_268_899 };
 
 #[cfg(feature = "float")]
-const HALF_TURN_ARCSEC: f64 = 648_000.0;
+pub(super) const HALF_TURN_ARCSEC: f64 = 648_000.0;
 
 #[cfg(feature = "float")]
 const RADIAN_ARCSEC: f64 = 206_264.806_247_096_36;
 
 /// A thousandth of a radian in arcseconds, and what the last digit of that leaves out.
 #[cfg(feature = "float")]
-const RADIAN_ARCSEC_PER_THOUSAND: (f64, f64) = (206.264_806_247_096_35, 9.896_767_216_834_942e-15);
+pub(super) const RADIAN_ARCSEC_PER_THOUSAND: (f64, f64) = (206.264_806_247_096_35, 9.896_767_216_834_942e-15);
 
 /// tan(angle / 2) in twice the digits but for the error of `tangent` itself, for an angle up to 90 degrees.
 #[cfg(feature = "float")]
-fn half_tangent<F: Real>(angle_arcsec: F) -> Double<F> {
+pub(super) fn half_tangent<F: Real>(angle_arcsec: F) -> Double<F> {
     const TO_HALF: f64 = 0.5 / RADIAN_ARCSEC;
     let half = Double::of(TO_HALF) * angle_arcsec;
     let (upper, lower) = half.upper.tangent();
@@ -44,7 +45,7 @@ fn half_tangent<F: Real>(angle_arcsec: F) -> Double<F> {
 
 /// 2 atan(tangent) in arcseconds.
 #[cfg(feature = "float")]
-fn angle_of_tangent<F: Real>(tangent: Double<F>) -> F {
+pub(super) fn angle_of_tangent<F: Real>(tangent: Double<F>) -> F {
     let x = tangent.upper;
     let (angle, more) = (x.atan(), tangent.lower / (F::of(1.0) + x * x));
     let Double { upper, lower } = Double::of(2.0 * RADIAN_ARCSEC) * angle;

@@ -12,8 +12,10 @@
 //!   quantity must exist, [`OutOfRange`](crate::Cause::OutOfRange), [`NotFinite`](crate::Cause::NotFinite) for floats,
 //!   [`Overflow`](crate::Cause::Overflow) where the result does not fit. Nothing wraps or saturates.
 
+pub mod colour;
 pub mod field;
 pub mod focus;
+pub mod imaging;
 pub mod layout;
 pub mod light;
 pub mod resolution;

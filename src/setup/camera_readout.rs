@@ -1,5 +1,6 @@
-use super::{Camera, Observer, Telescope, ratio_q16};
+use super::{Camera, Observer, Telescope};
 use crate::optics::field::{focal_ratio_fx, frame_field_fx, pixel_scale_fx, plate_scale_fx};
+use crate::optics::imaging::pixels_per_fwhm_fx;
 use crate::status::Error;
 use crate::units::{Micrometres, Nanometres};
 
@@ -150,7 +151,7 @@ impl CameraReadout {
             tell!(out, wanted, STAR_FWHM, star_fwhm_uas, Ok::<_, Error>(fwhm));
             if wants(Self::PIXELS_PER_FWHM)
                 && let Some(scale) = pixel_scale
-                && let Ok(pixels) = ratio_q16(fwhm.0.into(), scale.0)
+                && let Ok(pixels) = pixels_per_fwhm_fx(fwhm, scale)
             {
                 out.available |= Self::PIXELS_PER_FWHM;
                 out.pixels_per_fwhm_q16 = pixels.0;

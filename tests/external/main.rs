@@ -1,8 +1,10 @@
 //! The readouts against the world outside: handbook tables, textbooks, standards. Each check names its source, and says
 //! where a value is quoted from memory.
 
+mod colour;
 mod field;
 mod focus;
+mod imaging;
 mod layout;
 mod light;
 mod resolution;

@@ -1,5 +1,5 @@
-//! Focus and layout where their formulas nearly break down: systems hardly longer than their primary, cones as steep as
-//! a plane, discs that just touch, objects at the focal length. In all three forms.
+//! Formulas where they nearly break down: systems hardly longer than their primary, cones as steep as a plane, discs that
+//! just touch, objects at the focal length, half the sky, glasses hardly apart. In all three forms.
 
 use super::cases::{self, Random};
 use super::oracle::{fixed_error, float_error};
@@ -150,7 +150,124 @@ fn objects_at_the_focal_length() {
 }
 
 #[test]
+fn fields_up_to_half_the_sky() {
+    const HALF_TURN: i64 = 648_000_000;
+    check("image_size", |r| {
+        let field = match r.below(5) {
+            0 => HALF_TURN - length(r, 30),
+            1 => HALF_TURN / 2 + aside(r), // the two ways meet
+            2 => length(r, 30),
+            _ => HALF_TURN - r.below(4) as i64,
+        };
+        let size = |f: i64| 2000.0 * f as f64 * (field as f64 / 412_529_612.494).tan();
+        let focal_length = match r.below(4) {
+            // At the end of the type, and where the short way ends.
+            0 => (u32::MAX as f64 / size(1)) as i64 + aside(r) % 3,
+            1 => ((1i64 << 28) as f64 / size(1)) as i64 + aside(r) % 3,
+            _ => length(r, 32),
+        };
+        vec![field, focal_length]
+    });
+    check_floats("image_size", |r, cut| {
+        let field = cut(648_000.0 * (1.0 - 2f64.powf(-54.0 * r.unit())));
+        vec![field, cut(2f64.powf(60.0 * r.unit() - 30.0))]
+    });
+    check_floats("image_size", |r, cut| {
+        // Where the two ways meet.
+        let aside = 2f64.powf(-54.0 * r.unit()) * (r.below(3) as f64 - 1.0);
+        vec![cut(324_000.0 * (1.0 + aside)), cut(2f64.powf(60.0 * r.unit() - 30.0))]
+    });
+}
+
+#[test]
+fn sensors_from_one_pixel_to_the_largest() {
+    let side = |r: &mut Random| match r.below(4) {
+        0 => 1 + r.below(3) as i64,
+        1 => 65_535 - r.below(3) as i64,
+        2 => 46_341 - r.below(3) as i64, // whose squares make 2^32
+        _ => length(r, 16),
+    };
+    let sensor = |r: &mut Random| {
+        let (columns, rows) = (side(r), side(r));
+        let pixel = length(r, 32);
+        let diagonal = ((columns * columns + rows * rows) as f64).sqrt();
+        let focal_length = match r.below(3) {
+            0 => (pixel as f64 * diagonal / 2000.0) as i64 + aside(r), // a right angle
+            1 => (pixel as f64 * diagonal / 2000.0 * (1.0 + r.unit())) as i64,
+            _ => length(r, 32),
+        };
+        vec![pixel, columns, rows, focal_length.max(1)]
+    };
+    check("diagonal_field", sensor);
+    check_floats("diagonal_field", |r, cut| {
+        let sensor = sensor(r);
+        let pixel = cut(sensor[0] as f64 * (1.0 + r.unit()) / 1000.0);
+        vec![pixel, sensor[1] as f64, sensor[2] as f64, cut(sensor[3] as f64 / 1000.0)]
+    });
+}
+
+#[test]
+fn focal_ratios_hardly_apart() {
+    let ratio =
+        |r: &mut Random| if r.below(2) == 0 { u32::MAX as i64 - length(r, 30) } else { length(r, 32) };
+    check("exposure_stops", |r| {
+        let from = ratio(r);
+        vec![from, [from + aside(r), 2 * from + aside(r) % 3, ratio(r), 1][r.below(4) as usize]]
+    });
+    check_floats("exposure_stops", |r, cut| {
+        let from = cut(2f64.powf(60.0 * r.unit() - 30.0));
+        let close = 1.0 + 2f64.powf(-54.0 * r.unit()) * (r.below(3) as f64 - 1.0) / 2.0;
+        vec![from, cut(from * close * [0.5, 1.0, 1.0, 2.0][r.below(4) as usize])]
+    });
+}
+
+#[test]
+fn glasses_hardly_apart() {
+    check("abbe_number", |r| {
+        let index_f = length(r, 32);
+        let index_d = [10_000_001 + r.below(4) as i64, length(r, 32), u32::MAX as i64][r.below(3) as usize];
+        vec![index_d, index_f, index_f - 1 - r.below(4) as i64 * aside(r).abs()]
+    });
+    check_floats("abbe_number", |r, cut| {
+        let index_d = cut(1.0 + 2f64.powf(86.0 * r.unit() - 54.0)).min(4e9);
+        let index_f = cut(2f64.powf(60.0 * r.unit() - 30.0));
+        vec![index_d, index_f, cut(index_f * (1.0 - 2f64.powf(-54.0 * r.unit())))]
+    });
+    for stem in ["achromat_crown", "achromat_flint"] {
+        check(stem, |r| {
+            let crown = length(r, 32);
+            let flint = [crown - r.below(4) as i64, crown - aside(r).abs(), 1 + r.below(3) as i64];
+            vec![length(r, 32), crown, flint[r.below(3) as usize]]
+        });
+        check_floats(stem, |r, cut| {
+            let crown = cut(2f64.powf(60.0 * r.unit() - 30.0));
+            let flint = cut(crown * (1.0 - 2f64.powf(-54.0 * r.unit())));
+            vec![cut(2f64.powf(60.0 * r.unit() - 30.0)), crown, flint]
+        });
+    }
+}
+
+#[test]
 fn results_at_the_ends_of_their_types() {
+    let end = u32::MAX as u128;
+    check("nyquist_pixel", |r| {
+        let (focal_length, aperture) = (length(r, 32), length(r, 32));
+        let wavelength = (2 * end * aperture as u128 / focal_length as u128).min(end) as i64;
+        vec![focal_length, aperture, wavelength + aside(r) % 4]
+    });
+    check("singlet_colour_blur", |r| {
+        let ratio = length(r, 32);
+        vec![ratio, ((1u128 << 67) * 3 / (ratio as u128 * end)).min(end) as i64 + aside(r) % 1000]
+    });
+    check("secondary_spectrum", |r| {
+        let (focal_length, spread) = (length(r, 32), length(r, 32));
+        let product = focal_length as u128 * spread as u128 * 1024 / 15_625;
+        vec![focal_length, spread, (product / end).min(end) as i64 + aside(r) % 3]
+    });
+    check("focal_length_for_pixel_scale", |r| {
+        let pixel = length(r, 32);
+        vec![pixel, (206_264_806.247 * pixel as f64 / end as f64) as i64 + aside(r) % 3]
+    });
     // Both ends of the signed result, with its sign from either argument.
     check("thermal_shift", |r| {
         let product = (1i64 << 31) * 1_000_000_000;

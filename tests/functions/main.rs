@@ -9,6 +9,7 @@ mod coverage;
 mod degenerate;
 mod documented;
 mod edges;
+mod imaging_properties;
 mod layout_properties;
 mod oracle;
 mod properties;

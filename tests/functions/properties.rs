@@ -53,6 +53,12 @@ const DIRECTIONS: &[(&str, &str)] = &[
     ("distance_dimming", "-+"),
     ("extinction", "++"),
     ("t_number", "+-"),
+    ("pixels_per_fwhm", "+-"),
+    ("nyquist_pixel", "+-+"),
+    ("focal_length_for_pixel_scale", "+-"),
+    ("diagonal_field", "+++-"),
+    ("image_size", "++"),
+    ("exposure_stops", "-+"),
     ("depth_of_focus", "++"),
     ("defocus_blur", "+-"),
     ("defocus_wavefront", "+-"),
@@ -74,6 +80,12 @@ const DIRECTIONS: &[(&str, &str)] = &[
     ("illumination", ".+-"),
     ("swing_radius", "++"),
     ("eyepiece_height", "++."),
+    ("abbe_number", "+-+"),
+    ("singlet_colour_shift", "+-"),
+    ("singlet_colour_blur", "--"),
+    ("achromat_crown", "++-"),
+    ("achromat_flint", "++-"),
+    ("secondary_spectrum", "++-"),
 ];
 
 fn directions(row: &Row) -> Vec<char> {

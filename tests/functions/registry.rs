@@ -4,8 +4,10 @@
 use super::big::{Big, big};
 use fieldstop::Error;
 
+mod colour;
 mod field;
 mod focus;
+mod imaging;
 mod layout;
 mod light;
 mod resolution;
@@ -40,6 +42,7 @@ pub const UNSIGNED_MMAG: Unit = unit(1000.0, 0, U32);
 /// Any one unit, or none.
 pub const PLAIN: Unit = unit(1.0, 0, U32);
 pub const COUNT: Unit = Unit { steps: 1.0, least: 0, most: U32, count: true };
+pub const COUNT_16: Unit = Unit { steps: 1.0, least: 0, most: u16::MAX as i64, count: true };
 pub const COUNT_8: Unit = Unit { steps: 1.0, least: 0, most: u8::MAX as i64, count: true };
 
 #[derive(Clone, Copy)]
@@ -156,7 +159,17 @@ fn at_least(a: Big, b: Big) -> bool {
 }
 
 pub fn all_rows() -> Vec<Row> {
-    [units::rows(), field::rows(), resolution::rows(), light::rows(), focus::rows(), layout::rows()].concat()
+    [
+        units::rows(),
+        field::rows(),
+        resolution::rows(),
+        light::rows(),
+        imaging::rows(),
+        focus::rows(),
+        layout::rows(),
+        colour::rows(),
+    ]
+    .concat()
 }
 
 /// Those that FIELDSTOP_ONLY names, for a long run, or all.
@@ -198,6 +211,7 @@ macro_rules! quantities {
         }
     )*};
 }
+quantities!(SignedQ16 RefractiveIndex PartsPerMillion);
 quantities!(SignedNanometres Millimetres Millikelvin SignedMillikelvin);
 quantities!(PartsPerBillionPerKelvin SignedPartsPerBillionPerKelvin);
 quantities!(Micrometres SignedMicrometres Nanometres Milliarcseconds SignedMilliarcseconds Microarcseconds

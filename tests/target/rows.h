@@ -132,63 +132,99 @@ ROW(extinction, DRAW(100u, 600u, 0u, 4294967295u) DRAW(65536u, 400000u, 0u, 4294
 ROW(t_number, DRAW(196608u, 1048576u, 0u, 4294967295u) DRAW(30000u, 65536u, 0u, 65536u), fieldstop_t_number_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(44)
-ROW(depth_of_focus, DRAW(196608u, 1048576u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_depth_of_focus_fx(a[0], a[1], &result))
+ROW(pixels_per_fwhm, DRAW(500000u, 6000000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u), fieldstop_pixels_per_fwhm_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(45)
-ROW(defocus_blur, DRAW(1000u, 500000u, 0u, 4294967295u) DRAW(196608u, 1048576u, 0u, 4294967295u), fieldstop_defocus_blur_fx(a[0], a[1], &result))
+ROW(nyquist_pixel, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_nyquist_pixel_fx(a[0], a[1], a[2], &result))
 #endif
 #if HAS_ROW(46)
-ROW(defocus_wavefront, DRAW(1000u, 500000u, 0u, 4294967295u) DRAW(196608u, 1048576u, 0u, 4294967295u), fieldstop_defocus_wavefront_fx(a[0], a[1], &result))
+ROW(focal_length_for_pixel_scale, DRAW(1000u, 15000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u), fieldstop_focal_length_for_pixel_scale_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(47)
-ROW(motor_steps, DRAW(1000u, 5000000u, 0u, 4294967295u) DRAW(50u, 20000u, 0u, 4294967295u), fieldstop_motor_steps_fx(a[0], a[1], &result))
+ROW(diagonal_field, DRAW(1000u, 15000u, 0u, 4294967295u) DRAW(500u, 10000u, 0u, 65535u) DRAW(500u, 10000u, 0u, 65535u) DRAW(200000u, 5000000u, 0u, 4294967295u), fieldstop_diagonal_field_fx(a[0], (uint16_t)a[1], (uint16_t)a[2], a[3], &result))
 #endif
 #if HAS_ROW(48)
-ROW(thermal_shift, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(100u, 24000u, 2147483648u, 2147483647u) DRAW(100u, 20000u, 2147483648u, 2147483647u), fieldstop_thermal_shift_fx(a[0], (int32_t)a[1], (int32_t)a[2], (int32_t *)&result))
+ROW(image_size, DRAW(30000u, 7200000u, 0u, 647999999u) DRAW(200000u, 5000000u, 0u, 4294967295u), fieldstop_image_size_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(49)
-ROW(refocus_temperature, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(100u, 24000u, 0u, 4294967295u) DRAW(10000u, 300000u, 0u, 4294967295u), fieldstop_refocus_temperature_fx(a[0], a[1], a[2], &result))
+ROW(exposure_stops, DRAW(131072u, 1048576u, 0u, 4294967295u) DRAW(131072u, 1048576u, 0u, 4294967295u), fieldstop_exposure_stops_fx(a[0], a[1], (int32_t *)&result))
 #endif
 #if HAS_ROW(50)
-ROW(near_focus_travel, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(6000u, 1000000u, 0u, 4294967295u), fieldstop_near_focus_travel_fx(a[0], a[1], &result))
+ROW(depth_of_focus, DRAW(196608u, 1048576u, 0u, 4294967295u) DRAW(400u, 900u, 0u, 4294967295u), fieldstop_depth_of_focus_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(51)
-ROW(coma_length, DRAW(60000u, 3600000u, 0u, 4294967295u) DRAW(196608u, 1048576u, 0u, 4294967295u), fieldstop_coma_length_fx(a[0], a[1], &result))
+ROW(defocus_blur, DRAW(1000u, 500000u, 0u, 4294967295u) DRAW(196608u, 1048576u, 0u, 4294967295u), fieldstop_defocus_blur_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(52)
-ROW(diagonal_minor_axis, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(80000u, 200000u, 0u, 4294967295u) DRAW(1000u, 40000u, 0u, 4294967295u), fieldstop_diagonal_minor_axis_fx(a[0], a[1], a[2], a[3], &result))
+ROW(defocus_wavefront, DRAW(1000u, 500000u, 0u, 4294967295u) DRAW(196608u, 1048576u, 0u, 4294967295u), fieldstop_defocus_wavefront_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(53)
-ROW(diagonal_offset, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(80000u, 200000u, 0u, 4294967295u) DRAW(1000u, 40000u, 0u, 4294967295u), fieldstop_diagonal_offset_fx(a[0], a[1], a[2], a[3], &result))
+ROW(motor_steps, DRAW(1000u, 5000000u, 0u, 4294967295u) DRAW(50u, 20000u, 0u, 4294967295u), fieldstop_motor_steps_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(54)
-ROW(beam_width, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(80000u, 200000u, 0u, 4294967295u), fieldstop_beam_width_fx(a[0], a[1], a[2], &result))
+ROW(thermal_shift, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(100u, 24000u, 2147483648u, 2147483647u) DRAW(100u, 20000u, 2147483648u, 2147483647u), fieldstop_thermal_shift_fx(a[0], (int32_t)a[1], (int32_t)a[2], (int32_t *)&result))
 #endif
 #if HAS_ROW(55)
-ROW(beam_shift, DRAW(1000u, 25000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(80000u, 200000u, 0u, 4294967295u), fieldstop_beam_shift_fx(a[0], a[1], a[2], &result))
+ROW(refocus_temperature, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(100u, 24000u, 0u, 4294967295u) DRAW(10000u, 300000u, 0u, 4294967295u), fieldstop_refocus_temperature_fx(a[0], a[1], a[2], &result))
 #endif
 #if HAS_ROW(56)
-ROW(secondary_magnification, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u), fieldstop_secondary_magnification_fx(a[0], a[1], &result))
+ROW(near_focus_travel, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(6000u, 1000000u, 0u, 4294967295u), fieldstop_near_focus_travel_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(57)
-ROW(secondary_separation, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_secondary_separation_fx(a[0], a[1], a[2], &result))
+ROW(coma_length, DRAW(60000u, 3600000u, 0u, 4294967295u) DRAW(196608u, 1048576u, 0u, 4294967295u), fieldstop_coma_length_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(58)
-ROW(secondary_diameter, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_secondary_diameter_fx(a[0], a[1], a[2], a[3], &result))
+ROW(diagonal_minor_axis, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(80000u, 200000u, 0u, 4294967295u) DRAW(1000u, 40000u, 0u, 4294967295u), fieldstop_diagonal_minor_axis_fx(a[0], a[1], a[2], a[3], &result))
 #endif
 #if HAS_ROW(59)
-ROW(secondary_field_margin, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(1000u, 40000u, 0u, 4294967295u), fieldstop_secondary_field_margin_fx(a[0], a[1], a[2], a[3], &result))
+ROW(diagonal_offset, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(80000u, 200000u, 0u, 4294967295u) DRAW(1000u, 40000u, 0u, 4294967295u), fieldstop_diagonal_offset_fx(a[0], a[1], a[2], a[3], &result))
 #endif
 #if HAS_ROW(60)
-ROW(secondary_radius, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_secondary_radius_fx(a[0], a[1], a[2], &result))
+ROW(beam_width, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(80000u, 200000u, 0u, 4294967295u), fieldstop_beam_width_fx(a[0], a[1], a[2], &result))
 #endif
 #if HAS_ROW(61)
-ROW(illumination, DRAW(20000u, 80000u, 0u, 4294967295u) DRAW(30000u, 100000u, 0u, 4294967295u) DRAW(1000u, 40000u, 0u, 4294967295u), fieldstop_illumination_fx(a[0], a[1], a[2], &result))
+ROW(beam_shift, DRAW(1000u, 25000u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(80000u, 200000u, 0u, 4294967295u), fieldstop_beam_shift_fx(a[0], a[1], a[2], &result))
 #endif
 #if HAS_ROW(62)
-ROW(swing_radius, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(60000u, 600000u, 0u, 4294967295u), fieldstop_swing_radius_fx(a[0], a[1], &result))
+ROW(secondary_magnification, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u), fieldstop_secondary_magnification_fx(a[0], a[1], &result))
 #endif
 #if HAS_ROW(63)
+ROW(secondary_separation, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_secondary_separation_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(64)
+ROW(secondary_diameter, DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_secondary_diameter_fx(a[0], a[1], a[2], a[3], &result))
+#endif
+#if HAS_ROW(65)
+ROW(secondary_field_margin, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u) DRAW(1000u, 40000u, 0u, 4294967295u), fieldstop_secondary_field_margin_fx(a[0], a[1], a[2], a[3], &result))
+#endif
+#if HAS_ROW(66)
+ROW(secondary_radius, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(2000001u, 10000000u, 0u, 4294967295u) DRAW(50000u, 500000u, 0u, 4294967295u), fieldstop_secondary_radius_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(67)
+ROW(illumination, DRAW(20000u, 80000u, 0u, 4294967295u) DRAW(30000u, 100000u, 0u, 4294967295u) DRAW(1000u, 40000u, 0u, 4294967295u), fieldstop_illumination_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(68)
+ROW(swing_radius, DRAW(300000u, 2000000u, 0u, 4294967295u) DRAW(60000u, 600000u, 0u, 4294967295u), fieldstop_swing_radius_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(69)
 ROW(eyepiece_height, DRAW(600000u, 1800000u, 0u, 4294967295u) DRAW(100000u, 1500000u, 2147483648u, 2147483647u) DRAW(1048576u, 1073741824u, 0u, 1073741824u), fieldstop_eyepiece_height_fx(a[0], (int32_t)a[1], (int32_t)a[2], &result))
 #endif
-#define ROWS 64
+#if HAS_ROW(70)
+ROW(abbe_number, DRAW(15100000u, 15250000u, 0u, 4294967295u) DRAW(15260000u, 15400000u, 0u, 4294967295u) DRAW(15000000u, 15100000u, 0u, 4294967295u), fieldstop_abbe_number_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(71)
+ROW(singlet_colour_shift, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(1638400u, 5570560u, 0u, 4294967295u), fieldstop_singlet_colour_shift_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(72)
+ROW(singlet_colour_blur, DRAW(196608u, 1048576u, 0u, 4294967295u) DRAW(1638400u, 5570560u, 0u, 4294967295u), fieldstop_singlet_colour_blur_fx(a[0], a[1], &result))
+#endif
+#if HAS_ROW(73)
+ROW(achromat_crown, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(3342336u, 5570560u, 0u, 4294967295u) DRAW(1638400u, 3276800u, 0u, 4294967295u), fieldstop_achromat_crown_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(74)
+ROW(achromat_flint, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(3342336u, 5570560u, 0u, 4294967295u) DRAW(1638400u, 3276800u, 0u, 4294967295u), fieldstop_achromat_flint_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(75)
+ROW(secondary_spectrum, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(500u, 50000u, 0u, 4294967295u) DRAW(655360u, 3932160u, 0u, 4294967295u), fieldstop_secondary_spectrum_fx(a[0], a[1], a[2], &result))
+#endif
+#define ROWS 76
