@@ -58,6 +58,7 @@
 //! # Features
 //! - `float` (default): the f32 and f64 forms, over libm.
 //! - `heapless` (default): text as a `heapless::String`.
+//! - `defmt`: quantities and errors print themselves by defmt.
 //! - `capi`: the C interface.
 //! - `header`: the build script makes the C header again (a desktop job).
 //! - `panic-handler`: one that stops, for a static library where there is no operating system.

@@ -10,6 +10,7 @@ macro_rules! causes {
     ($($(#[$doc:meta])* $name:ident = $number:literal, $text:literal;)*) => {
         /// Why a call was refused. New causes may be added; the numbers of these never change.
         #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
+        #[cfg_attr(feature = "defmt", derive(defmt::Format))]
         #[non_exhaustive]
         #[repr(u8)]
         pub enum Cause {
@@ -105,3 +106,10 @@ impl fmt::Display for Error {
 }
 
 impl core::error::Error for Error {}
+
+#[cfg(feature = "defmt")]
+impl defmt::Format for Error {
+    fn format(&self, f: defmt::Formatter<'_>) {
+        defmt::write!(f, "argument {=u8}: {}", self.argument(), self.cause());
+    }
+}

@@ -6,6 +6,7 @@ macro_rules! quantity {
     ($($(#[$doc:meta])* $name:ident($integer:ty)),* $(,)?) => {$(
         $(#[$doc])*
         #[derive(Clone, Copy, Debug, Default, PartialEq, Eq, PartialOrd, Ord, Hash)]
+        #[cfg_attr(feature = "defmt", derive(defmt::Format))]
         #[repr(transparent)]
         pub struct $name(pub $integer);
 

@@ -3,6 +3,8 @@
 //!
 //! A program `x.c` of tests/c or examples/c belongs here when there is a tests/c/x.expected; any other .c file of tests/c
 //! must give nothing but success, but for those named in `NOT_PROGRAMS`.
+//!
+//! The C++ header is tried by the programs of tests/cpp, with every C++ compiler there is.
 #![cfg(unix)]
 
 mod support;
@@ -157,4 +159,104 @@ fn header_of_another_abi_does_not_link() {
     let output = build.arg(scratch().join("another-abi/readout")).output().unwrap();
     assert!(!output.status.success(), "a header of another ABI links");
     assert!(String::from_utf8_lossy(&output.stderr).contains("fieldstop_abi_2"));
+}
+
+const CPP_COMPILERS: [&str; 2] = ["g++", "clang++"];
+const CPP_STANDARDS: [&str; 4] = ["c++11", "c++14", "c++17", "c++20"];
+
+/// The C++ compilers of this machine, each with the standards that it knows.
+fn cpp_compilers() -> Vec<(&'static str, Vec<&'static str>)> {
+    let source = scratch().join("empty.cpp");
+    fs::write(&source, "int main() { return 0; }\n").unwrap();
+    let mut found = Vec::new();
+    for compiler in CPP_COMPILERS {
+        let knows = |standard: &&str| {
+            let mut build = Command::new(compiler);
+            build.arg(format!("-std={standard}")).arg("-c").arg(&source).arg("-o");
+            build.arg(scratch().join("empty-cpp.o")).output().is_ok_and(|output| output.status.success())
+        };
+        let standards: Vec<&str> = CPP_STANDARDS.into_iter().filter(knows).collect();
+        if standards.len() < CPP_STANDARDS.len() {
+            let missing = CPP_STANDARDS.len() - standards.len();
+            skipped(&format!("{missing} of {} standards of C++ with {compiler}", CPP_STANDARDS.len()));
+        }
+        found.push((compiler, standards));
+    }
+    found
+}
+
+fn cpp(compiler: &str, standard: &str, source: &str) -> Command {
+    let mut build = Command::new(compiler);
+    build.args([&format!("-std={standard}"), "-O1", "-fno-exceptions", "-fno-rtti"]);
+    build.args([
+        "-Wall",
+        "-Wextra",
+        "-Wpedantic",
+        "-Wconversion",
+        "-Wsign-conversion",
+        "-Wshadow",
+        "-Werror",
+    ]);
+    build.arg("-I").arg(root().join("include")).arg(root().join("tests/cpp").join(source));
+    build
+}
+
+#[test]
+fn cpp_header_works() {
+    let Some(libraries) = libraries() else { return };
+    let macros = root().join("tests/c/embedded_macros.h");
+    let macros = macros.to_str().unwrap();
+    for (compiler, standards) in cpp_compilers() {
+        for standard in standards {
+            for more in [&[][..], &["-DFIELDSTOP_NO_FLOAT"], &["-include", macros]] {
+                let program = scratch().join("quantities");
+                let mut build = cpp(compiler, standard, "quantities.cpp");
+                build.args(more).arg(libraries.join("libfieldstop.a"));
+                build.args(["-lpthread", "-ldl", "-lm", "-o"]).arg(&program);
+                let what = format!("quantities as {standard} by {compiler} {more:?}");
+                finish(build, &what);
+                finish(Command::new(&program), &what);
+            }
+        }
+    }
+}
+
+#[test]
+fn cpp_mistakes_do_not_compile() {
+    let text = fs::read_to_string(root().join("tests/cpp/refused.cpp")).unwrap();
+    let mistakes = text.matches("if REFUSED == ").count();
+    assert!(mistakes >= 14);
+    for (compiler, standards) in cpp_compilers() {
+        for standard in standards.into_iter().filter(|s| ["c++11", "c++17"].contains(s)) {
+            for mistake in 0..=mistakes {
+                let mut build = cpp(compiler, standard, "refused.cpp");
+                build.arg(format!("-DREFUSED={mistake}")).args(["-fsyntax-only"]);
+                let output = build.output().unwrap();
+                let error = String::from_utf8_lossy(&output.stderr);
+                assert_eq!(
+                    output.status.success(),
+                    mistake == 0,
+                    "mistake {mistake} as {standard} by {compiler}\n{error}"
+                );
+            }
+        }
+    }
+}
+
+#[test]
+fn value_of_a_result_without_one_stops() {
+    let Some(libraries) = libraries() else { return };
+    for (compiler, standards) in cpp_compilers() {
+        for standard in standards.into_iter().take(1) {
+            for (own, code) in [(true, Some(3)), (false, None)] {
+                let program = scratch().join("stop");
+                let mut build = cpp(compiler, standard, "stop.cpp");
+                build.args(own.then_some("-DOWN_STOP")).arg(libraries.join("libfieldstop.a"));
+                build.args(["-lpthread", "-ldl", "-lm", "-o"]).arg(&program);
+                finish(build, &format!("stop as {standard} by {compiler}"));
+                let ended = Command::new(&program).output().unwrap().status;
+                assert_eq!(ended.code(), code, "{standard} by {compiler}: {ended}");
+            }
+        }
+    }
 }

@@ -80,12 +80,19 @@
 #endif
 
 /*
- * A library of another ABI does not link: a word among the debugging data, which takes no room on
- * the part, asks for this one's. Define FIELDSTOP_NO_ABI_CHECK where a linker script refuses
- * that section.
+ * A library of another ABI does not link: `undefined reference to fieldstop_abi_...`. Take the header and the
+ * library from one release. On a part a note asks for it that is never loaded; no more than the empty function
+ * that it names stands in the image. Where there are shared libraries, a word among the debugging data asks,
+ * which a linker that strips (-s) does not see. Define FIELDSTOP_NO_ABI_CHECK where a linker script refuses
+ * the section.
  */
 #if defined(__GNUC__) && defined(__ELF__) && !defined(FIELDSTOP_NO_ABI_CHECK)
-__asm__(".pushsection .debug_fieldstop_abi,\"\"\n\t.long fieldstop_abi_1\n\t.popsection");
+#ifdef __unix__
+__asm__(".pushsection .debug_fieldstop,\"\"\n\t.long fieldstop_abi_1\n\t.popsection");
+#else
+__asm__(".pushsection .note.fieldstop,\"\",%note\n\t.balign 4\n\t.long 10, 4, 1\n\t.asciz \"fieldstop\"\n\t"
+        ".balign 4\n\t.long fieldstop_abi_1\n\t.popsection");
+#endif
 #endif
 
 #ifdef __cplusplus

@@ -72,6 +72,10 @@ static __attribute__((noinline)) uint32_t stack_of(struct call call)
     measure(&call);
     for (p = top - PAINTED / 4; p < top && *p == 0xA5C35A3Cu; p++) {
     }
+    if (p == top - PAINTED / 4) {
+        puts("more stack than was painted");
+        exit(1);
+    }
     return (uint32_t)(top - p) * 4u - FRAME_OF_MEASURE;
 }
 

@@ -4,6 +4,7 @@
 #include CASES
 #undef static
 #include "measure.h"
+#include <math.h>
 
 #define JOIN(a, b) a##b
 #define TYPED(name, type) JOIN(name, type)
@@ -26,6 +27,23 @@ static struct call prepared(uint8_t k)
     return call;
 }
 
+/* By hand is right too, to a step of the fixed result and a part in ten thousand. */
+static void check(uint8_t k, const struct call *call)
+{
+    uint32_t word = pgm_read_dword(&usual[k][ARGUMENTS]), bits = (uint32_t)call->status << 16 | call->below;
+    float step, expected = pgm_read_byte(is_signed + ARGUMENTS) ? (float)(int32_t)word : (float)word, given;
+
+    memcpy_P(&step, steps + ARGUMENTS, sizeof step);
+    step = 1 / step;
+    expected *= step;
+    memcpy(&given, &bits, sizeof given);
+    if (!(fabs(given - expected) < step + 1e-4f * fabs(expected))) {
+        print_stored(PSTR("by hand another result in case "));
+        print_number(k);
+        end(WRONG);
+    }
+}
+
 int main(void)
 {
     uint16_t stack = 0;
@@ -35,6 +53,7 @@ int main(void)
     for (k = 0; k < N; k++) {
         struct call call = prepared(k);
         measure(&call);
+        check(k, &call);
     }
     GPIOR0 = 4;
     for (k = 0; k < N; k += 4) {

@@ -14,7 +14,7 @@
 struct call {
     void (*function)(void);
     uint8_t registers[18];
-    uint16_t status;
+    uint16_t status, below; /* r24 and r25, r22 and r23: of a float its upper half and its lower */
     uint8_t free; /* registers not used yet, from r8 on */
 };
 
@@ -32,7 +32,7 @@ __asm__(".global measure\nmeasure:\n"
         "ldi r26, 1\nout 0x1e, r26\n"
         "icall\n"
         "ldi r26, 2\nout 0x1e, r26\n"
-        "std Y+20, r24\nstd Y+21, r25\n"
+        "std Y+20, r24\nstd Y+21, r25\nstd Y+22, r22\nstd Y+23, r23\n"
         "pop r29\npop r28\npop r17\npop r16\npop r15\npop r14\npop r13\npop r12\npop r11\npop r10\npop r9\npop r8\npop r3\npop r2\n"
         "ret\n"
         /* 100 cycles and the return. */
@@ -48,7 +48,7 @@ static inline void put_argument(struct call *call, uint32_t value, uint8_t size)
 
 static inline struct call call_of(void (*function)(void))
 {
-    struct call call = {function, {0}, 0, 18};
+    struct call call = {function, {0}, 0, 0, 18};
     return call;
 }
 

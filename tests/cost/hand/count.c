@@ -19,6 +19,7 @@ typedef float real;
 #define BY_HAND TYPED(NAME, _float)
 #endif
 extern real BY_HAND();
+uint64_t measure_wide(struct call *call) __asm__("measure"); /* with all of a double that is given */
 
 static struct call prepared(const uint32_t *words)
 {
@@ -33,6 +34,23 @@ static struct call prepared(const uint32_t *words)
     return call;
 }
 
+/* By hand is right too, to a step of the fixed result and a part in ten thousand. */
+static void check(const uint32_t *words, uint64_t given)
+{
+    double step = 1.0 / steps[ARGUMENTS], expected = words[ARGUMENTS] * step, error;
+    real result;
+
+    memcpy(&result, &given, sizeof result);
+    if (is_signed[ARGUMENTS]) {
+        expected = (int32_t)words[ARGUMENTS] * step;
+    }
+    error = (double)result - expected;
+    if (!(error < step + 1e-4 * expected && -error < step + 1e-4 * expected)) {
+        printf("by hand gives %d steps, not %d\n", (int)((double)result / step), (int)words[ARGUMENTS]);
+        exit(1);
+    }
+}
+
 int main(void)
 {
     static uint32_t counts[MOST];
@@ -42,7 +60,7 @@ int main(void)
     for (k = 0; k < n; k++) {
         struct call call = prepared(usual[k]);
         uint32_t used;
-        measure(&call);
+        check(usual[k], measure_wide(&call));
         counts[k] = counted(&call);
         used = stack_of(prepared(usual[k]));
         stack = used > stack ? used : stack;

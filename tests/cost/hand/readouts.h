@@ -51,6 +51,12 @@ real NAMED(rayleigh_limit)(real aperture, real wavelength)
     return (real)(1.21966989 * 206264.806e-6) * wavelength / aperture;
 }
 
+/* Nanometres in, micrometres out. */
+real NAMED(depth_of_focus)(real focal_ratio, real wavelength)
+{
+    return (real)0.002 * wavelength * focal_ratio * focal_ratio;
+}
+
 real NAMED(limiting_magnitude)(real naked_eye, real effective_aperture, real eye_pupil)
 {
     return naked_eye + 5 * LOG10(effective_aperture / eye_pupil);

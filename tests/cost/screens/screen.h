@@ -17,11 +17,21 @@
 #endif
 
 extern char screen_lines[4][20];
+extern char lines_of_strings[4][21]; /* with room for the zero that snprintf puts behind each */
 
-/* Micrometres. */
+/* Micrometres, and the same in millimetres, as a firmware that computes in float keeps them. */
 struct screen_input {
     uint32_t aperture, focal_length, eyepiece, field_stop;
+    float aperture_mm, focal_length_mm, eyepiece_mm, field_stop_mm;
 };
+
+static inline void set_millimetres(struct screen_input *in)
+{
+    in->aperture_mm = (float)in->aperture * 1e-3f;
+    in->focal_length_mm = (float)in->focal_length * 1e-3f;
+    in->eyepiece_mm = (float)in->eyepiece * 1e-3f;
+    in->field_stop_mm = (float)in->field_stop * 1e-3f;
+}
 
 /* What a way of making the screen gives: 0, or not for a status. */
 uint32_t direct_compute(const struct screen_input *in);

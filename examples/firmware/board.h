@@ -1,0 +1,13 @@
+/* What the firmware asks of its board. */
+#ifndef BOARD_H
+#define BOARD_H
+
+void board_start(void);
+/* The display's serial line. */
+void board_send(char c);
+/* A button's letter, or 0 if none was pressed. */
+char board_button(void);
+/* The end, which a real board does not have: it sleeps. */
+void board_off(void);
+
+#endif
