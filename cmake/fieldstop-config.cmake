@@ -17,7 +17,7 @@ find_library(fieldstop_SHARED_LIBRARY NAMES libfieldstop.so libfieldstop.dylib f
 if(NOT EXISTS "${fieldstop_INCLUDE_DIR}/fieldstop.h" OR NOT (fieldstop_STATIC_LIBRARY OR fieldstop_SHARED_LIBRARY))
     set(fieldstop_FOUND FALSE)
     set(fieldstop_NOT_FOUND_MESSAGE
-        "no header in ${fieldstop_INCLUDE_DIR}, or no library in ${fieldstop_LIBRARY_DIRS}: install it by `cargo cinstall` or `cmake --install`")
+        "no header in ${fieldstop_INCLUDE_DIR}, or no library in ${fieldstop_LIBRARY_DIRS}: install it by `cmake --install`")
     return()
 endif()
 
