@@ -264,6 +264,7 @@ typedef quantity<unit::binary_angle, uint32_t> binary_angle;
 typedef quantity<unit::day_milliseconds, uint32_t> day_milliseconds;
 typedef quantity<unit::degrees_of_arc, double> degrees_of_arc_f64;
 typedef quantity<unit::degrees_of_arc, float> degrees_of_arc_f32;
+typedef quantity<unit::index_n7, uint32_t> index_n7;
 typedef quantity<unit::kelvin, double> kelvin_f64;
 typedef quantity<unit::kelvin, float> kelvin_f32;
 typedef quantity<unit::magnitudes, double> magnitudes_f64;
@@ -291,8 +292,10 @@ typedef quantity<unit::nanometres, int32_t> signed_nanometres;
 typedef quantity<unit::nanometres, uint32_t> nanometres;
 typedef quantity<unit::parts_per_billion_per_kelvin, int32_t> signed_parts_per_billion_per_kelvin;
 typedef quantity<unit::parts_per_billion_per_kelvin, uint32_t> parts_per_billion_per_kelvin;
+typedef quantity<unit::parts_per_million, uint32_t> parts_per_million;
 typedef quantity<unit::parts_per_million_per_kelvin, double> parts_per_million_per_kelvin_f64;
 typedef quantity<unit::parts_per_million_per_kelvin, float> parts_per_million_per_kelvin_f32;
+typedef quantity<unit::q16, int32_t> signed_q16;
 typedef quantity<unit::q16, uint32_t> q16;
 typedef quantity<unit::thousandths, uint32_t> thousandths;
 
@@ -2042,6 +2045,176 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> t_number_f64(double focal_rati
 }
 #endif
 
+/* Imaging: how a sensor samples the sky, how large a target falls on it, and what a focal ratio does to the exposure. */
+
+/** Gives how many pixels lie across the width of a star's image, Q16.16. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<q16> pixels_per_fwhm_fx(microarcseconds fwhm_uas, microarcseconds pixel_scale_uas)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_pixels_per_fwhm_fx(fwhm_uas.count(), pixel_scale_uas.count(), &given);
+    return access::given<q16>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how many pixels lie across the width of a star's image. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<float> pixels_per_fwhm_f32(arcseconds_f32 fwhm_arcsec, arcseconds_f32 pixel_scale_arcsec)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_pixels_per_fwhm_f32(fwhm_arcsec.count(), pixel_scale_arcsec.count(), &given);
+    return access::given<float>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how many pixels lie across the width of a star's image, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> pixels_per_fwhm_f64(arcseconds_f64 fwhm_arcsec, arcseconds_f64 pixel_scale_arcsec)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_pixels_per_fwhm_f64(fwhm_arcsec.count(), pixel_scale_arcsec.count(), &given);
+    return access::given<double>(number, given);
+}
+#endif
+
+/** Gives the coarsest pixel that loses nothing of what the telescope shows in still air, in nanometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<nanometres> nyquist_pixel_fx(micrometres focal_length_um, micrometres aperture_um, nanometres wavelength_nm)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_nyquist_pixel_fx(focal_length_um.count(), aperture_um.count(), wavelength_nm.count(), &given);
+    return access::given<nanometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the coarsest pixel that loses nothing of what the telescope shows in still air, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f32> nyquist_pixel_f32(millimetres_f32 focal_length_mm, millimetres_f32 aperture_mm, nanometres_f32 wavelength_nm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_nyquist_pixel_f32(focal_length_mm.count(), aperture_mm.count(), wavelength_nm.count(), &given);
+    return access::given<micrometres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the coarsest pixel that loses nothing of what the telescope shows in still air, in micrometres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f64> nyquist_pixel_f64(millimetres_f64 focal_length_mm, millimetres_f64 aperture_mm, nanometres_f64 wavelength_nm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_nyquist_pixel_f64(focal_length_mm.count(), aperture_mm.count(), wavelength_nm.count(), &given);
+    return access::given<micrometres_f64>(number, given);
+}
+#endif
+
+/** Gives the focal length that gives a pixel so much of the sky, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> focal_length_for_pixel_scale_fx(nanometres pixel_nm, microarcseconds pixel_scale_uas)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_focal_length_for_pixel_scale_fx(pixel_nm.count(), pixel_scale_uas.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the focal length that gives a pixel so much of the sky, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> focal_length_for_pixel_scale_f32(micrometres_f32 pixel_um, arcseconds_f32 pixel_scale_arcsec)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_focal_length_for_pixel_scale_f32(pixel_um.count(), pixel_scale_arcsec.count(), &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the focal length that gives a pixel so much of the sky, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> focal_length_for_pixel_scale_f64(micrometres_f64 pixel_um, arcseconds_f64 pixel_scale_arcsec)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_focal_length_for_pixel_scale_f64(pixel_um.count(), pixel_scale_arcsec.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives the angle of sky from corner to corner of a sensor, in milliarcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> diagonal_field_fx(nanometres pixel_nm, uint16_t columns, uint16_t rows, micrometres focal_length_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_diagonal_field_fx(pixel_nm.count(), columns, rows, focal_length_um.count(), &given);
+    return access::given<milliarcseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the angle of sky from corner to corner of a sensor, in arcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> diagonal_field_f32(micrometres_f32 pixel_um, uint16_t columns, uint16_t rows, millimetres_f32 focal_length_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_diagonal_field_f32(pixel_um.count(), columns, rows, focal_length_mm.count(), &given);
+    return access::given<arcseconds_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the angle of sky from corner to corner of a sensor, in arcseconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> diagonal_field_f64(micrometres_f64 pixel_um, uint16_t columns, uint16_t rows, millimetres_f64 focal_length_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_diagonal_field_f64(pixel_um.count(), columns, rows, focal_length_mm.count(), &given);
+    return access::given<arcseconds_f64>(number, given);
+}
+#endif
+
+/** Gives how large a target is at the focus, in nanometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<nanometres> image_size_fx(milliarcseconds field_mas, micrometres focal_length_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_image_size_fx(field_mas.count(), focal_length_um.count(), &given);
+    return access::given<nanometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how large a target is at the focus, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f32> image_size_f32(arcseconds_f32 field_arcsec, millimetres_f32 focal_length_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_image_size_f32(field_arcsec.count(), focal_length_mm.count(), &given);
+    return access::given<micrometres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how large a target is at the focus, in micrometres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres_f64> image_size_f64(arcseconds_f64 field_arcsec, millimetres_f64 focal_length_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_image_size_f64(field_arcsec.count(), focal_length_mm.count(), &given);
+    return access::given<micrometres_f64>(number, given);
+}
+#endif
+
+/** Gives how many stops more exposure a focal ratio needs than another, negative where it needs less, signed Q16.16. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<signed_q16> exposure_stops_fx(q16 from_focal_ratio_q16, q16 to_focal_ratio_q16)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_exposure_stops_fx(from_focal_ratio_q16.count(), to_focal_ratio_q16.count(), &given);
+    return access::given<signed_q16>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how many stops more exposure a focal ratio needs than another, negative where it needs less. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<float> exposure_stops_f32(float from_focal_ratio, float to_focal_ratio)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_exposure_stops_f32(from_focal_ratio, to_focal_ratio, &given);
+    return access::given<float>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how many stops more exposure a focal ratio needs than another, negative where it needs less, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> exposure_stops_f64(double from_focal_ratio, double to_focal_ratio)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_exposure_stops_f64(from_focal_ratio, to_focal_ratio, &given);
+    return access::given<double>(number, given);
+}
+#endif
+
 /* Focus: how deep it is, what a miss costs, and how far heat, a near object and the edge of the field move it. */
 
 /** Gives how far from the focus, each side, the wavefront is a quarter wave off, in nanometres. */
@@ -2602,6 +2775,176 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> eyepiece_height_f64(m
 {
     double given;
     const fieldstop_status number = ::fieldstop_eyepiece_height_f64(axis_height_mm.count(), reach_mm.count(), altitude_deg.count(), &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/* Colour: what a single lens does to it, and what a pair of two glasses leaves. */
+
+/** Gives the Abbe number of a glass, Q16.16. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<q16> abbe_number_fx(index_n7 index_d_n7, index_n7 index_f_n7, index_n7 index_c_n7)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_abbe_number_fx(index_d_n7.count(), index_f_n7.count(), index_c_n7.count(), &given);
+    return access::given<q16>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the Abbe number of a glass. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<float> abbe_number_f32(float index_d, float index_f, float index_c)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_abbe_number_f32(index_d, index_f, index_c, &given);
+    return access::given<float>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the Abbe number of a glass, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> abbe_number_f64(double index_d, double index_f, double index_c)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_abbe_number_f64(index_d, index_f, index_c, &given);
+    return access::given<double>(number, given);
+}
+#endif
+
+/** Gives how far apart along the axis a single lens focuses blue and red, F and C, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> singlet_colour_shift_fx(micrometres focal_length_um, q16 abbe_q16)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_shift_fx(focal_length_um.count(), abbe_q16.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how far apart along the axis a single lens focuses blue and red, F and C, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> singlet_colour_shift_f32(millimetres_f32 focal_length_mm, float abbe)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_shift_f32(focal_length_mm.count(), abbe, &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how far apart along the axis a single lens focuses blue and red, F and C, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> singlet_colour_shift_f64(millimetres_f64 focal_length_mm, double abbe)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_shift_f64(focal_length_mm.count(), abbe, &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives the diameter on the sky to which a single lens draws a star in blue and red, F and C, at the best focus, in microarcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<microarcseconds> singlet_colour_blur_fx(q16 focal_ratio_q16, q16 abbe_q16)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_blur_fx(focal_ratio_q16.count(), abbe_q16.count(), &given);
+    return access::given<microarcseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the diameter on the sky to which a single lens draws a star in blue and red, F and C, at the best focus, in arcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> singlet_colour_blur_f32(float focal_ratio, float abbe)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_blur_f32(focal_ratio, abbe, &given);
+    return access::given<arcseconds_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the diameter on the sky to which a single lens draws a star in blue and red, F and C, at the best focus, in arcseconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> singlet_colour_blur_f64(double focal_ratio, double abbe)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_blur_f64(focal_ratio, abbe, &given);
+    return access::given<arcseconds_f64>(number, given);
+}
+#endif
+
+/** Gives the focal length of the crown lens of an achromat, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> achromat_crown_fx(micrometres focal_length_um, q16 crown_abbe_q16, q16 flint_abbe_q16)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_achromat_crown_fx(focal_length_um.count(), crown_abbe_q16.count(), flint_abbe_q16.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the focal length of the crown lens of an achromat, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> achromat_crown_f32(millimetres_f32 focal_length_mm, float crown_abbe, float flint_abbe)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_achromat_crown_f32(focal_length_mm.count(), crown_abbe, flint_abbe, &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the focal length of the crown lens of an achromat, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> achromat_crown_f64(millimetres_f64 focal_length_mm, double crown_abbe, double flint_abbe)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_achromat_crown_f64(focal_length_mm.count(), crown_abbe, flint_abbe, &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives the focal length of the flint lens of an achromat, in size: the lens is negative, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> achromat_flint_fx(micrometres focal_length_um, q16 crown_abbe_q16, q16 flint_abbe_q16)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_achromat_flint_fx(focal_length_um.count(), crown_abbe_q16.count(), flint_abbe_q16.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the focal length of the flint lens of an achromat, in size: the lens is negative, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> achromat_flint_f32(millimetres_f32 focal_length_mm, float crown_abbe, float flint_abbe)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_achromat_flint_f32(focal_length_mm.count(), crown_abbe, flint_abbe, &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the focal length of the flint lens of an achromat, in size: the lens is negative, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> achromat_flint_f64(millimetres_f64 focal_length_mm, double crown_abbe, double flint_abbe)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_achromat_flint_f64(focal_length_mm.count(), crown_abbe, flint_abbe, &given);
+    return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/** Gives how far from the common focus of blue and red, F and C, an achromat brings the colour between, in micrometres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> secondary_spectrum_fx(micrometres focal_length_um, parts_per_million partial_difference_ppm, q16 abbe_difference_q16)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_spectrum_fx(focal_length_um.count(), partial_difference_ppm.count(), abbe_difference_q16.count(), &given);
+    return access::given<micrometres>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how far from the common focus of blue and red, F and C, an achromat brings the colour between, in millimetres. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> secondary_spectrum_f32(millimetres_f32 focal_length_mm, float partial_difference, float abbe_difference)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_spectrum_f32(focal_length_mm.count(), partial_difference, abbe_difference, &given);
+    return access::given<millimetres_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how far from the common focus of blue and red, F and C, an achromat brings the colour between, in millimetres, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> secondary_spectrum_f64(millimetres_f64 focal_length_mm, double partial_difference, double abbe_difference)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_spectrum_f64(focal_length_mm.count(), partial_difference, abbe_difference, &given);
     return access::given<millimetres_f64>(number, given);
 }
 #endif

@@ -142,6 +142,16 @@ pub(crate) struct Constant {
 /// a k / d to the nearest integer, k within 2^-33. `d` is not 0.
 #[inline(always)]
 pub(crate) fn constant(a: u32, k: Constant, d: u32) -> Result<u32, Error> {
+    #[cfg(target_arch = "avr")]
+    if a >> 16 == 0 {
+        use super::multiply::of_lower_halves as by;
+        let low = by(a, k.fraction & 0xffff);
+        let low1 = by(a, k.fraction >> 16) + (low >> 16);
+        let up = by(a, k.whole & 0xffff) + (low1 >> 16);
+        let up1 = by(a, k.whole >> 16) + (up >> 16);
+        let n = (up1 as u64) << 16 | (up & 0xffff) as u64;
+        return with_fraction(n, low1 << 16 | low & 0xffff, d);
+    }
     let low = wide(a, k.fraction);
     // Below 2^64: a (whole + 1) at most.
     with_fraction(wide(a, k.whole) + (low >> 32), low as u32, d)

@@ -37,10 +37,20 @@ pub(super) const RADIAN_ARCSEC_PER_THOUSAND: (f64, f64) = (206.264_806_247_096_3
 /// tan(angle / 2) in twice the digits but for the error of `tangent` itself, for an angle up to 90 degrees.
 #[cfg(feature = "float")]
 pub(super) fn half_tangent<F: Real>(angle_arcsec: F) -> Double<F> {
+    let Double { upper, lower } = half_tangent_in_parts(angle_arcsec);
+    Double::sum(upper, lower)
+}
+
+/// The same, with a lower part that may overlap the upper.
+#[cfg(feature = "float")]
+#[inline(always)]
+fn half_tangent_in_parts<F: Real>(angle_arcsec: F) -> Double<F> {
     const TO_HALF: f64 = 0.5 / RADIAN_ARCSEC;
-    let half = Double::of(TO_HALF) * angle_arcsec;
+    let constant = Double::of(TO_HALF);
+    let half = Double::product(constant.upper, angle_arcsec);
     let (upper, lower) = half.upper.tangent();
-    Double::sum(upper, lower + half.lower * (F::of(1.0) + upper * upper))
+    let more = half.lower + constant.lower * angle_arcsec;
+    Double { upper, lower: lower + more * (F::of(1.0) + upper * upper) }
 }
 
 /// 2 atan(tangent) in arcseconds.
@@ -351,11 +361,21 @@ pub fn true_field_rectilinear<F: Real>(
     positive(focal_length_mm, 2)?;
     positive(eyepiece_mm, 3)?;
     let rest = F::of(HALF_TURN_ARCSEC) - apparent_field_arcsec;
-    Ok(angle_of_tangent(if apparent_field_arcsec <= rest {
-        half_tangent(apparent_field_arcsec) * eyepiece_mm / Double::from(focal_length_mm)
-    } else {
-        Double::from(eyepiece_mm) / (half_tangent(rest) * focal_length_mm)
-    }))
+    let is_small = apparent_field_arcsec <= rest;
+    let (angle, factor) =
+        if is_small { (apparent_field_arcsec, eyepiece_mm) } else { (rest, focal_length_mm) };
+    let tangent = half_tangent_in_parts(angle);
+    let product = Double::product(tangent.upper, factor);
+    // What the tangent and the product leave out, as a part of the product.
+    let more = (product.lower + tangent.lower * factor) / product.upper;
+    let (x, more) =
+        if is_small { (product.upper / focal_length_mm, more) } else { (eyepiece_mm / product.upper, -more) };
+    let one = F::of(1.0);
+    let constant = Double::of(2.0 * RADIAN_ARCSEC);
+    let angle = x.atan();
+    let more = constant.upper * (more * x / (one + x * x)) + constant.lower * angle;
+    let whole = Double::product(constant.upper, angle);
+    Ok(whole.upper + (whole.lower + more))
 }
 
 /// The angle of sky in an eyepiece that keeps equal angles equal.

@@ -43,7 +43,7 @@ pub(super) fn split_ten(n: u32) -> (u32, u8) {
 #[inline(always)]
 pub(crate) fn split_small_ten(n: u32) -> (u32, u32) {
     let quotient = of_lower_halves(n, 52_429) >> 19;
-    (quotient, n - quotient * 10)
+    (quotient, (n as u8).wrapping_sub((quotient as u8).wrapping_mul(10)).into())
 }
 
 /// A number under 2^16 divided by a hundred, and what is left.
@@ -51,7 +51,7 @@ pub(crate) fn split_small_ten(n: u32) -> (u32, u32) {
 #[inline(always)]
 pub(crate) fn split_small_hundred(n: u32) -> (u32, u32) {
     let quotient = of_lower_halves(n >> 2, 5_243) >> 17;
-    (quotient, n - quotient * 100)
+    (quotient, (n as u8).wrapping_sub((quotient as u8).wrapping_mul(100)).into())
 }
 
 /// `n` divided by sixty, and what is left.
@@ -67,6 +67,8 @@ pub(super) fn split_sixty(n: u32) -> (u32, u32) {
 stored! {
     static POWERS: [u32; 10] =
         [1, 10, 100, 1_000, 10_000, 100_000, 1_000_000, 10_000_000, 100_000_000, 1_000_000_000];
+    /// 5^n / 2, cut.
+    static HALF_FIVES: [u32; 10] = [0, 2, 12, 62, 312, 1562, 7812, 39062, 195312, 976562];
     /// 2^(32 + 2 n) / 5^n, rounded up: so 10^n is divided by as a shift by n, this product, and a shift by 2 n.
     static FIFTHS: [u32; 10] = [
         0, 3_435_973_837, 2_748_779_070, 2_199_023_256, 1_759_218_605, 1_407_374_884, 1_125_899_907, 900_719_926,
@@ -96,7 +98,7 @@ pub(super) fn without_tens(n: u32, tens: u32) -> u32 {
     }
     // The half of the divisor is an odd number of the bits that are shifted out last: no sum overflows.
     let halves = n >> (tens - 1);
-    let most = (halves >> 1) + (halves & 1) + (POWERS.at(tens as usize) >> tens >> 1);
+    let most = (halves >> 1) + (halves & 1) + HALF_FIVES.at(tens as usize);
     high(most, fifths) >> (2 * tens)
 }
 
@@ -167,6 +169,7 @@ mod tests {
         for n in 1..=9 {
             assert_eq!(u64::from(FIFTHS.at(n)), (1u64 << (32 + 2 * n)).div_ceil(5u64.pow(n as u32)));
             assert_eq!(POWERS.at(n), 10u32.pow(n as u32));
+            assert_eq!(HALF_FIVES.at(n), 5u32.pow(n as u32) / 2);
         }
     }
 

@@ -212,17 +212,19 @@ impl Value {
         for _ in 0..decimals {
             whole = split_ten(whole).0;
         }
-        let power = ten_to_the(decimals);
         let (mut left, mut number) = split_sixty(whole);
         let mut groups = 1;
         if in_seconds && left >= 60 {
             // Degrees too.
             let (degrees, minutes) = split_sixty(left);
-            (left, number, groups) = (degrees, number + 100 * minutes, 2);
+            (left, number, groups) = (degrees, number + of_lower_halves(minutes, 100), 2);
         }
-        number += left * if groups == 1 { 100 } else { 10_000 };
+        number += of_lower_halves(left, if groups == 1 { 100 } else { 10_000 });
         // At most 1193°02'47.30", ten digits under 2^32.
-        let number = number * power + (all - whole * power);
+        if decimals > 0 {
+            let power = ten_to_the(decimals);
+            number = number * power + (all - whole * power);
+        }
         Value { number, form: Form::new(unit as u8, decimals, groups, POSITIVE) }
     }
 

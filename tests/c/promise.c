@@ -801,6 +801,102 @@ int main(void)
     }
 #endif
     {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_pixels_per_fwhm_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_pixels_per_fwhm_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_pixels_per_fwhm_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_nyquist_pixel_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_nyquist_pixel_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_nyquist_pixel_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_focal_length_for_pixel_scale_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_focal_length_for_pixel_scale_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_focal_length_for_pixel_scale_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint16_t, uint16_t, uint32_t, uint32_t *) = fieldstop_diagonal_field_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, uint16_t, uint16_t, float, float *) = fieldstop_diagonal_field_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, uint16_t, uint16_t, double, double *) = fieldstop_diagonal_field_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_image_size_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_image_size_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_image_size_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, int32_t *) = fieldstop_exposure_stops_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_exposure_stops_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_exposure_stops_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
         fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_depth_of_focus_fx;
         present = (any_function)function;
     }
@@ -1117,6 +1213,102 @@ int main(void)
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
     {
         fieldstop_status (*function)(double, double, double, double *) = fieldstop_eyepiece_height_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_abbe_number_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_abbe_number_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_abbe_number_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_singlet_colour_shift_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_singlet_colour_shift_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_singlet_colour_shift_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t *) = fieldstop_singlet_colour_blur_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_singlet_colour_blur_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_singlet_colour_blur_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_achromat_crown_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_achromat_crown_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_achromat_crown_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_achromat_flint_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_achromat_flint_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_achromat_flint_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_secondary_spectrum_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_secondary_spectrum_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_secondary_spectrum_f64;
         present = (any_function)function;
     }
 #endif

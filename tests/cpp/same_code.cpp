@@ -2276,6 +2276,354 @@ fieldstop_status typed_t_number_f64(double focal_ratio, double throughput, doubl
 }
 #endif
 
+fieldstop_status plain_pixels_per_fwhm_fx(uint32_t fwhm_uas, uint32_t pixel_scale_uas, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_pixels_per_fwhm_fx(fwhm_uas, pixel_scale_uas, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_pixels_per_fwhm_fx(uint32_t fwhm_uas, uint32_t pixel_scale_uas, uint32_t *out)
+{
+    const auto given = fieldstop::pixels_per_fwhm_fx(fieldstop::microarcseconds(fwhm_uas), fieldstop::microarcseconds(pixel_scale_uas));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_pixels_per_fwhm_f32(float fwhm_arcsec, float pixel_scale_arcsec, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_pixels_per_fwhm_f32(fwhm_arcsec, pixel_scale_arcsec, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_pixels_per_fwhm_f32(float fwhm_arcsec, float pixel_scale_arcsec, float *out)
+{
+    const auto given = fieldstop::pixels_per_fwhm_f32(fieldstop::arcseconds_f32(fwhm_arcsec), fieldstop::arcseconds_f32(pixel_scale_arcsec));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_pixels_per_fwhm_f64(double fwhm_arcsec, double pixel_scale_arcsec, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_pixels_per_fwhm_f64(fwhm_arcsec, pixel_scale_arcsec, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_pixels_per_fwhm_f64(double fwhm_arcsec, double pixel_scale_arcsec, double *out)
+{
+    const auto given = fieldstop::pixels_per_fwhm_f64(fieldstop::arcseconds_f64(fwhm_arcsec), fieldstop::arcseconds_f64(pixel_scale_arcsec));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_nyquist_pixel_fx(uint32_t focal_length_um, uint32_t aperture_um, uint32_t wavelength_nm, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_nyquist_pixel_fx(focal_length_um, aperture_um, wavelength_nm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_nyquist_pixel_fx(uint32_t focal_length_um, uint32_t aperture_um, uint32_t wavelength_nm, uint32_t *out)
+{
+    const auto given = fieldstop::nyquist_pixel_fx(fieldstop::micrometres(focal_length_um), fieldstop::micrometres(aperture_um), fieldstop::nanometres(wavelength_nm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_nyquist_pixel_f32(float focal_length_mm, float aperture_mm, float wavelength_nm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_nyquist_pixel_f32(focal_length_mm, aperture_mm, wavelength_nm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_nyquist_pixel_f32(float focal_length_mm, float aperture_mm, float wavelength_nm, float *out)
+{
+    const auto given = fieldstop::nyquist_pixel_f32(fieldstop::millimetres_f32(focal_length_mm), fieldstop::millimetres_f32(aperture_mm), fieldstop::nanometres_f32(wavelength_nm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_nyquist_pixel_f64(double focal_length_mm, double aperture_mm, double wavelength_nm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_nyquist_pixel_f64(focal_length_mm, aperture_mm, wavelength_nm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_nyquist_pixel_f64(double focal_length_mm, double aperture_mm, double wavelength_nm, double *out)
+{
+    const auto given = fieldstop::nyquist_pixel_f64(fieldstop::millimetres_f64(focal_length_mm), fieldstop::millimetres_f64(aperture_mm), fieldstop::nanometres_f64(wavelength_nm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_focal_length_for_pixel_scale_fx(uint32_t pixel_nm, uint32_t pixel_scale_uas, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_focal_length_for_pixel_scale_fx(pixel_nm, pixel_scale_uas, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_focal_length_for_pixel_scale_fx(uint32_t pixel_nm, uint32_t pixel_scale_uas, uint32_t *out)
+{
+    const auto given = fieldstop::focal_length_for_pixel_scale_fx(fieldstop::nanometres(pixel_nm), fieldstop::microarcseconds(pixel_scale_uas));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_focal_length_for_pixel_scale_f32(float pixel_um, float pixel_scale_arcsec, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_focal_length_for_pixel_scale_f32(pixel_um, pixel_scale_arcsec, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_focal_length_for_pixel_scale_f32(float pixel_um, float pixel_scale_arcsec, float *out)
+{
+    const auto given = fieldstop::focal_length_for_pixel_scale_f32(fieldstop::micrometres_f32(pixel_um), fieldstop::arcseconds_f32(pixel_scale_arcsec));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_focal_length_for_pixel_scale_f64(double pixel_um, double pixel_scale_arcsec, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_focal_length_for_pixel_scale_f64(pixel_um, pixel_scale_arcsec, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_focal_length_for_pixel_scale_f64(double pixel_um, double pixel_scale_arcsec, double *out)
+{
+    const auto given = fieldstop::focal_length_for_pixel_scale_f64(fieldstop::micrometres_f64(pixel_um), fieldstop::arcseconds_f64(pixel_scale_arcsec));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_diagonal_field_fx(uint32_t pixel_nm, uint16_t columns, uint16_t rows, uint32_t focal_length_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_diagonal_field_fx(pixel_nm, columns, rows, focal_length_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_field_fx(uint32_t pixel_nm, uint16_t columns, uint16_t rows, uint32_t focal_length_um, uint32_t *out)
+{
+    const auto given = fieldstop::diagonal_field_fx(fieldstop::nanometres(pixel_nm), columns, rows, fieldstop::micrometres(focal_length_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_diagonal_field_f32(float pixel_um, uint16_t columns, uint16_t rows, float focal_length_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_diagonal_field_f32(pixel_um, columns, rows, focal_length_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_field_f32(float pixel_um, uint16_t columns, uint16_t rows, float focal_length_mm, float *out)
+{
+    const auto given = fieldstop::diagonal_field_f32(fieldstop::micrometres_f32(pixel_um), columns, rows, fieldstop::millimetres_f32(focal_length_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_diagonal_field_f64(double pixel_um, uint16_t columns, uint16_t rows, double focal_length_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_diagonal_field_f64(pixel_um, columns, rows, focal_length_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_diagonal_field_f64(double pixel_um, uint16_t columns, uint16_t rows, double focal_length_mm, double *out)
+{
+    const auto given = fieldstop::diagonal_field_f64(fieldstop::micrometres_f64(pixel_um), columns, rows, fieldstop::millimetres_f64(focal_length_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_image_size_fx(uint32_t field_mas, uint32_t focal_length_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_image_size_fx(field_mas, focal_length_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_image_size_fx(uint32_t field_mas, uint32_t focal_length_um, uint32_t *out)
+{
+    const auto given = fieldstop::image_size_fx(fieldstop::milliarcseconds(field_mas), fieldstop::micrometres(focal_length_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_image_size_f32(float field_arcsec, float focal_length_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_image_size_f32(field_arcsec, focal_length_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_image_size_f32(float field_arcsec, float focal_length_mm, float *out)
+{
+    const auto given = fieldstop::image_size_f32(fieldstop::arcseconds_f32(field_arcsec), fieldstop::millimetres_f32(focal_length_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_image_size_f64(double field_arcsec, double focal_length_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_image_size_f64(field_arcsec, focal_length_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_image_size_f64(double field_arcsec, double focal_length_mm, double *out)
+{
+    const auto given = fieldstop::image_size_f64(fieldstop::arcseconds_f64(field_arcsec), fieldstop::millimetres_f64(focal_length_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_exposure_stops_fx(uint32_t from_focal_ratio_q16, uint32_t to_focal_ratio_q16, int32_t *out)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_exposure_stops_fx(from_focal_ratio_q16, to_focal_ratio_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_exposure_stops_fx(uint32_t from_focal_ratio_q16, uint32_t to_focal_ratio_q16, int32_t *out)
+{
+    const auto given = fieldstop::exposure_stops_fx(fieldstop::q16(from_focal_ratio_q16), fieldstop::q16(to_focal_ratio_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_exposure_stops_f32(float from_focal_ratio, float to_focal_ratio, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_exposure_stops_f32(from_focal_ratio, to_focal_ratio, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_exposure_stops_f32(float from_focal_ratio, float to_focal_ratio, float *out)
+{
+    const auto given = fieldstop::exposure_stops_f32(from_focal_ratio, to_focal_ratio);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_exposure_stops_f64(double from_focal_ratio, double to_focal_ratio, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_exposure_stops_f64(from_focal_ratio, to_focal_ratio, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_exposure_stops_f64(double from_focal_ratio, double to_focal_ratio, double *out)
+{
+    const auto given = fieldstop::exposure_stops_f64(from_focal_ratio, to_focal_ratio);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
 fieldstop_status plain_depth_of_focus_fx(uint32_t focal_ratio_q16, uint32_t wavelength_nm, uint32_t *out)
 {
     uint32_t given;
@@ -3429,6 +3777,354 @@ fieldstop_status plain_eyepiece_height_f64(double axis_height_mm, double reach_m
 fieldstop_status typed_eyepiece_height_f64(double axis_height_mm, double reach_mm, double altitude_deg, double *out)
 {
     const auto given = fieldstop::eyepiece_height_f64(fieldstop::millimetres_f64(axis_height_mm), fieldstop::millimetres_f64(reach_mm), fieldstop::degrees_of_arc_f64(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_abbe_number_fx(uint32_t index_d_n7, uint32_t index_f_n7, uint32_t index_c_n7, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_abbe_number_fx(index_d_n7, index_f_n7, index_c_n7, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_abbe_number_fx(uint32_t index_d_n7, uint32_t index_f_n7, uint32_t index_c_n7, uint32_t *out)
+{
+    const auto given = fieldstop::abbe_number_fx(fieldstop::index_n7(index_d_n7), fieldstop::index_n7(index_f_n7), fieldstop::index_n7(index_c_n7));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_abbe_number_f32(float index_d, float index_f, float index_c, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_abbe_number_f32(index_d, index_f, index_c, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_abbe_number_f32(float index_d, float index_f, float index_c, float *out)
+{
+    const auto given = fieldstop::abbe_number_f32(index_d, index_f, index_c);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_abbe_number_f64(double index_d, double index_f, double index_c, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_abbe_number_f64(index_d, index_f, index_c, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_abbe_number_f64(double index_d, double index_f, double index_c, double *out)
+{
+    const auto given = fieldstop::abbe_number_f64(index_d, index_f, index_c);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_singlet_colour_shift_fx(uint32_t focal_length_um, uint32_t abbe_q16, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_shift_fx(focal_length_um, abbe_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_singlet_colour_shift_fx(uint32_t focal_length_um, uint32_t abbe_q16, uint32_t *out)
+{
+    const auto given = fieldstop::singlet_colour_shift_fx(fieldstop::micrometres(focal_length_um), fieldstop::q16(abbe_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_singlet_colour_shift_f32(float focal_length_mm, float abbe, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_shift_f32(focal_length_mm, abbe, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_singlet_colour_shift_f32(float focal_length_mm, float abbe, float *out)
+{
+    const auto given = fieldstop::singlet_colour_shift_f32(fieldstop::millimetres_f32(focal_length_mm), abbe);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_singlet_colour_shift_f64(double focal_length_mm, double abbe, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_shift_f64(focal_length_mm, abbe, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_singlet_colour_shift_f64(double focal_length_mm, double abbe, double *out)
+{
+    const auto given = fieldstop::singlet_colour_shift_f64(fieldstop::millimetres_f64(focal_length_mm), abbe);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_singlet_colour_blur_fx(uint32_t focal_ratio_q16, uint32_t abbe_q16, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_blur_fx(focal_ratio_q16, abbe_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_singlet_colour_blur_fx(uint32_t focal_ratio_q16, uint32_t abbe_q16, uint32_t *out)
+{
+    const auto given = fieldstop::singlet_colour_blur_fx(fieldstop::q16(focal_ratio_q16), fieldstop::q16(abbe_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_singlet_colour_blur_f32(float focal_ratio, float abbe, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_blur_f32(focal_ratio, abbe, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_singlet_colour_blur_f32(float focal_ratio, float abbe, float *out)
+{
+    const auto given = fieldstop::singlet_colour_blur_f32(focal_ratio, abbe);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_singlet_colour_blur_f64(double focal_ratio, double abbe, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_singlet_colour_blur_f64(focal_ratio, abbe, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_singlet_colour_blur_f64(double focal_ratio, double abbe, double *out)
+{
+    const auto given = fieldstop::singlet_colour_blur_f64(focal_ratio, abbe);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_achromat_crown_fx(uint32_t focal_length_um, uint32_t crown_abbe_q16, uint32_t flint_abbe_q16, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_achromat_crown_fx(focal_length_um, crown_abbe_q16, flint_abbe_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_achromat_crown_fx(uint32_t focal_length_um, uint32_t crown_abbe_q16, uint32_t flint_abbe_q16, uint32_t *out)
+{
+    const auto given = fieldstop::achromat_crown_fx(fieldstop::micrometres(focal_length_um), fieldstop::q16(crown_abbe_q16), fieldstop::q16(flint_abbe_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_achromat_crown_f32(float focal_length_mm, float crown_abbe, float flint_abbe, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_achromat_crown_f32(focal_length_mm, crown_abbe, flint_abbe, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_achromat_crown_f32(float focal_length_mm, float crown_abbe, float flint_abbe, float *out)
+{
+    const auto given = fieldstop::achromat_crown_f32(fieldstop::millimetres_f32(focal_length_mm), crown_abbe, flint_abbe);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_achromat_crown_f64(double focal_length_mm, double crown_abbe, double flint_abbe, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_achromat_crown_f64(focal_length_mm, crown_abbe, flint_abbe, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_achromat_crown_f64(double focal_length_mm, double crown_abbe, double flint_abbe, double *out)
+{
+    const auto given = fieldstop::achromat_crown_f64(fieldstop::millimetres_f64(focal_length_mm), crown_abbe, flint_abbe);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_achromat_flint_fx(uint32_t focal_length_um, uint32_t crown_abbe_q16, uint32_t flint_abbe_q16, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_achromat_flint_fx(focal_length_um, crown_abbe_q16, flint_abbe_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_achromat_flint_fx(uint32_t focal_length_um, uint32_t crown_abbe_q16, uint32_t flint_abbe_q16, uint32_t *out)
+{
+    const auto given = fieldstop::achromat_flint_fx(fieldstop::micrometres(focal_length_um), fieldstop::q16(crown_abbe_q16), fieldstop::q16(flint_abbe_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_achromat_flint_f32(float focal_length_mm, float crown_abbe, float flint_abbe, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_achromat_flint_f32(focal_length_mm, crown_abbe, flint_abbe, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_achromat_flint_f32(float focal_length_mm, float crown_abbe, float flint_abbe, float *out)
+{
+    const auto given = fieldstop::achromat_flint_f32(fieldstop::millimetres_f32(focal_length_mm), crown_abbe, flint_abbe);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_achromat_flint_f64(double focal_length_mm, double crown_abbe, double flint_abbe, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_achromat_flint_f64(focal_length_mm, crown_abbe, flint_abbe, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_achromat_flint_f64(double focal_length_mm, double crown_abbe, double flint_abbe, double *out)
+{
+    const auto given = fieldstop::achromat_flint_f64(fieldstop::millimetres_f64(focal_length_mm), crown_abbe, flint_abbe);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_secondary_spectrum_fx(uint32_t focal_length_um, uint32_t partial_difference_ppm, uint32_t abbe_difference_q16, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_secondary_spectrum_fx(focal_length_um, partial_difference_ppm, abbe_difference_q16, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_spectrum_fx(uint32_t focal_length_um, uint32_t partial_difference_ppm, uint32_t abbe_difference_q16, uint32_t *out)
+{
+    const auto given = fieldstop::secondary_spectrum_fx(fieldstop::micrometres(focal_length_um), fieldstop::parts_per_million(partial_difference_ppm), fieldstop::q16(abbe_difference_q16));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_secondary_spectrum_f32(float focal_length_mm, float partial_difference, float abbe_difference, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_secondary_spectrum_f32(focal_length_mm, partial_difference, abbe_difference, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_spectrum_f32(float focal_length_mm, float partial_difference, float abbe_difference, float *out)
+{
+    const auto given = fieldstop::secondary_spectrum_f32(fieldstop::millimetres_f32(focal_length_mm), partial_difference, abbe_difference);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_secondary_spectrum_f64(double focal_length_mm, double partial_difference, double abbe_difference, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_secondary_spectrum_f64(focal_length_mm, partial_difference, abbe_difference, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_secondary_spectrum_f64(double focal_length_mm, double partial_difference, double abbe_difference, double *out)
+{
+    const auto given = fieldstop::secondary_spectrum_f64(fieldstop::millimetres_f64(focal_length_mm), partial_difference, abbe_difference);
     if (given) {
         *out = given.value().count();
     }
