@@ -3471,8 +3471,14 @@ fieldstop_status fieldstop_secondary_spectrum_f64(double focal_length_mm,
 #define FIELDSTOP_CAMERA_STAR_FWHM 128
 /** Camera readout, wanted and available: pixels_per_fwhm_q16. */
 #define FIELDSTOP_CAMERA_PIXELS_PER_FWHM 256
+/** Camera readout, wanted and available: cutoff_frequency_q16. */
+#define FIELDSTOP_CAMERA_CUTOFF_FREQUENCY 512
+/** Camera readout, wanted and available: nyquist_pixel_nm. */
+#define FIELDSTOP_CAMERA_NYQUIST_PIXEL 1024
+/** Camera readout, wanted and available: diagonal_mas. */
+#define FIELDSTOP_CAMERA_DIAGONAL 2048
 /** Camera readout, wanted: every member. */
-#define FIELDSTOP_CAMERA_ALL 511
+#define FIELDSTOP_CAMERA_ALL 4095
 /** Camera readout, fact: under two pixels to the star image (common practice, after Shannon 1949). */
 #define FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING 1
 /** Camera readout, fact: over three pixels to the star image (common practice). */
@@ -3531,6 +3537,70 @@ fieldstop_status fieldstop_secondary_spectrum_f64(double focal_length_mm,
 #define FIELDSTOP_CAMERA_CHOICE_FACT_FINE_SAMPLING 2
 /** Camera choice, fact: one frame takes the whole target. */
 #define FIELDSTOP_CAMERA_CHOICE_FACT_FITS 4
+/** Focus readout, wanted and available: focal_ratio_q16. */
+#define FIELDSTOP_FOCUS_FOCAL_RATIO 1
+/** Focus readout, wanted and available: depth_nm. */
+#define FIELDSTOP_FOCUS_DEPTH 2
+/** Focus readout, wanted and available: depth_steps. */
+#define FIELDSTOP_FOCUS_DEPTH_STEPS 4
+/** Focus readout, wanted and available: temperature_mk. */
+#define FIELDSTOP_FOCUS_TEMPERATURE 8
+/** Focus readout, wanted and available: blur_nm. */
+#define FIELDSTOP_FOCUS_BLUR 16
+/** Focus readout, wanted and available: blur_uas. */
+#define FIELDSTOP_FOCUS_BLUR_ANGLE 32
+/** Focus readout, wanted and available: wavefront_nm. */
+#define FIELDSTOP_FOCUS_WAVEFRONT 64
+/** Focus readout, wanted: every member. */
+#define FIELDSTOP_FOCUS_ALL 127
+/** Focus readout, fact: one step of the motor is over the depth of focus (Rayleigh 1879). */
+#define FIELDSTOP_FOCUS_FACT_COARSE_STEP 1
+/** Focus readout, fact: the defocus is over the depth of focus (Rayleigh 1879). */
+#define FIELDSTOP_FOCUS_FACT_OUT_OF_FOCUS 2
+/** Newtonian readout, wanted and available: diagonal_um. */
+#define FIELDSTOP_NEWTONIAN_DIAGONAL 1
+/** Newtonian readout, wanted and available: diagonal_offset_um. */
+#define FIELDSTOP_NEWTONIAN_DIAGONAL_OFFSET 2
+/** Newtonian readout, wanted and available: obstruction_q16. */
+#define FIELDSTOP_NEWTONIAN_OBSTRUCTION 4
+/** Newtonian readout, wanted and available: beam_um. */
+#define FIELDSTOP_NEWTONIAN_BEAM 8
+/** Newtonian readout, wanted and available: beam_shift_um. */
+#define FIELDSTOP_NEWTONIAN_BEAM_SHIFT 16
+/** Newtonian readout, wanted and available: edge_light_q16. */
+#define FIELDSTOP_NEWTONIAN_EDGE_LIGHT 32
+/** Newtonian readout, wanted and available: eyepiece_height_um. */
+#define FIELDSTOP_NEWTONIAN_EYEPIECE_HEIGHT 64
+/** Newtonian readout, wanted and available: greatest_height_um. */
+#define FIELDSTOP_NEWTONIAN_GREATEST_HEIGHT 128
+/** Newtonian readout, wanted: every member. */
+#define FIELDSTOP_NEWTONIAN_ALL 255
+/** Newtonian readout, fact: the diagonal in place is smaller than the field needs (geometry). */
+#define FIELDSTOP_NEWTONIAN_FACT_SMALL_DIAGONAL 1
+/** Newtonian readout, fact: the diagonal is wider than the obstruction that the telescope tells (geometry). */
+#define FIELDSTOP_NEWTONIAN_FACT_WIDER_THAN_TOLD 2
+/** Newtonian readout, fact: the eyepiece is above the height that the layout sets; show the caution. */
+#define FIELDSTOP_NEWTONIAN_FACT_HIGH_EYEPIECE 4
+/** Newtonian readout, fact: within its altitudes it gets above that height; show the caution. */
+#define FIELDSTOP_NEWTONIAN_FACT_HIGH_REACHED 8
+/** Two mirror readout, wanted and available: secondary_magnification_q16. */
+#define FIELDSTOP_TWO_MIRROR_SECONDARY_MAGNIFICATION 1
+/** Two mirror readout, wanted and available: separation_um. */
+#define FIELDSTOP_TWO_MIRROR_SEPARATION 2
+/** Two mirror readout, wanted and available: secondary_um. */
+#define FIELDSTOP_TWO_MIRROR_SECONDARY 4
+/** Two mirror readout, wanted and available: secondary_radius_um. */
+#define FIELDSTOP_TWO_MIRROR_SECONDARY_RADIUS 8
+/** Two mirror readout, wanted and available: obstruction_q16. */
+#define FIELDSTOP_TWO_MIRROR_OBSTRUCTION 16
+/** Two mirror readout, wanted and available: length_um. */
+#define FIELDSTOP_TWO_MIRROR_LENGTH 32
+/** Two mirror readout, wanted and available: length_q16. */
+#define FIELDSTOP_TWO_MIRROR_LENGTH_SHARE 64
+/** Two mirror readout, wanted: every member. */
+#define FIELDSTOP_TWO_MIRROR_ALL 127
+/** Two mirror readout, fact: the secondary is wider than the obstruction that the telescope tells (geometry). */
+#define FIELDSTOP_TWO_MIRROR_FACT_WIDER_THAN_TOLD 1
 
 /** A telescope: objective or primary mirror, with the Barlow or reducer that is in use. */
 typedef struct fieldstop_telescope {
@@ -3699,6 +3769,12 @@ typedef struct fieldstop_camera_readout {
     uint32_t star_fwhm_uas;
     /** Pixels as read out across that width. */
     uint32_t pixels_per_fwhm_q16;
+    /** Finest detail that the optics pass at all, cycles per millimetre at the focus: 1 / (lambda N). */
+    uint32_t cutoff_frequency_q16;
+    /** The coarsest pixel that loses nothing of it in still air, nanometres: lambda f k / (2 D). */
+    uint32_t nyquist_pixel_nm;
+    /** Sky from corner to corner of the frame, milliarcseconds: 2 atan(p sqrt(c^2 + r^2) / (2 f k)). */
+    uint32_t diagonal_mas;
 } fieldstop_camera_readout;
 
 /** What an eyepiece is wanted for. */
@@ -3797,6 +3873,144 @@ typedef struct fieldstop_camera_choice {
     /** 0. */
     uint8_t padding[2];
 } fieldstop_camera_choice;
+
+/** Where things are in a Newtonian telescope, and how it stands. A Barlow or reducer does not count here. */
+typedef struct fieldstop_newtonian_layout {
+    /**
+     * Member 1. From the centre of the diagonal to the focus, micrometres; not over the telescope's focal
+     * length, or what rests on it is not available.
+     */
+    uint32_t focus_distance_um;
+    /** Member 2. Diameter at the focus that the whole aperture is to light, micrometres; 0: the centre only. */
+    uint32_t lit_field_um;
+    /** Member 3. How far from the axis the edge of the field is whose light is asked for, micrometres. */
+    uint32_t edge_offset_um;
+    /** Member 4. Minor axis of the diagonal that is in place, micrometres; 0: as large as it must be. */
+    uint32_t diagonal_um;
+    /** Member 5. The altitude axis above the place where the observer stands, micrometres. */
+    uint32_t axis_height_um;
+    /**
+     * Member 6. From the altitude axis to the eyepiece along the tube, micrometres; negative where the
+     * eyepiece is at the lower end.
+     */
+    int32_t reach_um;
+    /** Member 7. Where the telescope points now, binary angle from 0 to 90 degrees (0x40000000). */
+    int32_t altitude_bam;
+    /** Member 8. The lowest altitude that it points to, from 0 to 90 degrees. */
+    int32_t lowest_altitude_bam;
+    /** Member 9. The highest, from 0 to 90 degrees, not under the lowest. */
+    int32_t highest_altitude_bam;
+    /** Member 10. An eyepiece above this height is told as a fact, micrometres; 0: none is. */
+    uint32_t height_limit_um;
+} fieldstop_newtonian_layout;
+
+/**
+ * What a telescope of two mirrors with a convex secondary is made of. The telescope's focal length is that of
+ * the system; a Barlow or reducer does not count here.
+ */
+typedef struct fieldstop_two_mirror_layout {
+    /**
+     * Member 1. Focal length of the primary mirror, micrometres; not 0. Unless the system's is longer, nothing
+     * is available.
+     */
+    uint32_t primary_focal_um;
+    /** Member 2. The focus behind the primary's vertex, micrometres. */
+    uint32_t back_focus_um;
+    /** Member 3. Diameter at the focus that the whole aperture is to light, micrometres; 0: the centre only. */
+    uint32_t lit_field_um;
+} fieldstop_two_mirror_layout;
+
+/** A focuser, and the tube whose length moves the focus. Any values can be used. */
+typedef struct fieldstop_focuser {
+    /** Member 1. Travel of one step of the motor, nanometres; 0: unknown. */
+    uint32_t motor_step_nm;
+    /** Member 2. The distance from the best focus that is asked about, nanometres; 0 is in focus. */
+    uint32_t defocus_nm;
+    /**
+     * Member 3. Length that grows with the temperature between the objective and the focus, micrometres; 0:
+     * unknown.
+     */
+    uint32_t tube_length_um;
+    /** Member 4. Its thermal expansion, parts per billion per kelvin; 0: unknown. */
+    uint32_t expansion_ppb_per_k;
+} fieldstop_focuser;
+
+/**
+ * How exact the focus must be, and what it costs to be off. Members from `focal_ratio_q16` on are 0 where
+ * their bit in `available` is clear.
+ */
+typedef struct fieldstop_focus_readout {
+    /** Bits of the members that were wanted and could be known. */
+    uint32_t available;
+    /** What is worth telling beside the values; named constants. */
+    uint32_t facts;
+    /** Focal ratio with the Barlow or reducer: N = f k / D. */
+    uint32_t focal_ratio_q16;
+    /** How far from the best focus, each side, the wavefront is a quarter wave off, nanometres: 2 lambda N^2. */
+    uint32_t depth_nm;
+    /** The same in steps of the motor, to the nearest. */
+    uint32_t depth_steps;
+    /** Change of temperature that moves the focus so far, millikelvin: depth / (length expansion). */
+    uint32_t temperature_mk;
+    /** Width of a star's image at the defocus asked about, by geometry, nanometres: defocus / N. */
+    uint32_t blur_nm;
+    /** The same on the sky, microarcseconds: (1 rad) blur / (f k). */
+    uint32_t blur_uas;
+    /** Error of the wavefront there, peak to valley, nanometres: defocus / (8 N^2). */
+    uint32_t wavefront_nm;
+} fieldstop_focus_readout;
+
+/**
+ * A Newtonian's diagonal, the light that it passes, and the height of the eyepiece. Members from
+ * `diagonal_um` on are 0 where their bit in `available` is clear.
+ */
+typedef struct fieldstop_newtonian_readout {
+    /** Bits of the members that were wanted and could be known. */
+    uint32_t available;
+    /** What is worth telling beside the values; named constants. */
+    uint32_t facts;
+    /** Minor axis of the smallest diagonal that lights the field wanted, micrometres. */
+    uint32_t diagonal_um;
+    /** How far its centre lies away from the focuser, and as much toward the primary, micrometres. */
+    uint32_t diagonal_offset_um;
+    /** The diagonal in place over the aperture. */
+    uint32_t obstruction_q16;
+    /** Width of the beam at the diagonal, micrometres: D L / f. */
+    uint32_t beam_um;
+    /** How far off the axis the beam to the edge of the field is there, micrometres: y (f - L) / f. */
+    uint32_t beam_shift_um;
+    /** Share of the light on the axis that the diagonal in place passes to the edge of the field. */
+    uint32_t edge_light_q16;
+    /** The eyepiece above the place where the observer stands, now, micrometres. */
+    uint32_t eyepiece_height_um;
+    /** The same at the altitude where it is highest, micrometres. */
+    uint32_t greatest_height_um;
+} fieldstop_newtonian_readout;
+
+/**
+ * Where the second mirror goes and what it is. Members from `secondary_magnification_q16` on are 0 where their
+ * bit in `available` is clear.
+ */
+typedef struct fieldstop_two_mirror_readout {
+    /** Bits of the members that were wanted and could be known. */
+    uint32_t available;
+    /** What is worth telling beside the values; named constants. */
+    uint32_t facts;
+    /** How much longer the secondary makes the focal length: m = F / f1. */
+    uint32_t secondary_magnification_q16;
+    /** From the primary's vertex to the secondary's, micrometres: f1 - p, p = (f1 + b) / (m + 1). */
+    uint32_t separation_um;
+    /** Diameter of the secondary with the margin for the lit field, micrometres: D p / f1 + i (f1 - p) / F. */
+    uint32_t secondary_um;
+    /** Radius of curvature of the secondary, convex, micrometres: 2 p m / (m - 1). */
+    uint32_t secondary_radius_um;
+    /** That diameter over the aperture. */
+    uint32_t obstruction_q16;
+    /** From the secondary to the focus, micrometres: the separation and the back focus. */
+    uint32_t length_um;
+    /** That length over the focal length: how short the tube is for it. */
+    uint32_t length_q16;
+} fieldstop_two_mirror_readout;
 
 /**
  * Gives 0 for a telescope that can be used; otherwise the cause, with the number of the first bad member,
@@ -3934,6 +4148,86 @@ fieldstop_status fieldstop_camera_choose(const struct fieldstop_telescope *teles
                                          struct fieldstop_camera_choice *choices,
                                          uint8_t *choice_count);
 
+/**
+ * Gives 0 for a Newtonian's layout that can be used; otherwise the cause, with the number of the first bad member,
+ * counted from 1, in the place of the argument.
+ *
+ * Members: focus_distance_um (1), lit_field_um (2), edge_offset_um (3), diagonal_um (4; 0: as large as it must be),
+ * axis_height_um (5), reach_um (6), altitude_bam 0 to 0x40000000, which is 90 degrees (7), lowest_altitude_bam
+ * likewise (8), highest_altitude_bam likewise, not under the lowest (9), height_limit_um (10; 0: none).
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_newtonian_layout_check(const struct fieldstop_newtonian_layout *layout);
+
+/**
+ * Gives 0 for a layout of two mirrors that can be used; otherwise the cause, with the number of the first bad member,
+ * counted from 1, in the place of the argument.
+ *
+ * Members: primary_focal_um not 0 (1), back_focus_um (2), lit_field_um (3).
+ * Statuses: null pointer, zero.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_two_mirror_layout_check(const struct fieldstop_two_mirror_layout *layout);
+
+/**
+ * Gives how exact the focus must be and what it costs to be off: the wanted values, each in the unit of its name,
+ * and the facts about them.
+ *
+ * wanted: any of the FIELDSTOP_FOCUS_ bits; only those values are computed, and unknown bits are ignored.
+ * Formulas: beside each member of the readout; a value is exactly that of the fixed function of the formula.
+ * A value that rests on something unknown (motor step, tube, expansion) or that does not fit its type is not
+ * available: its bit in `available` is clear and its member 0. The rest still comes.
+ * Caution: never point unfiltered optics at the Sun; follow the maker's instructions and local rules.
+ * Statuses: null pointer; zero or out of range, as the check of the first bad struct gives it, with the
+ * struct's position (telescope 1, observer 3): its check names the member.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_focus_readout_compute(const struct fieldstop_telescope *telescope,
+                                                 const struct fieldstop_focuser *focuser,
+                                                 const struct fieldstop_observer *observer,
+                                                 uint32_t wanted,
+                                                 struct fieldstop_focus_readout *readout);
+
+/**
+ * Gives a Newtonian's diagonal, the light that it passes, and the height of the eyepiece: the wanted values, each in
+ * the unit of its name, and the facts about them.
+ *
+ * wanted: any of the FIELDSTOP_NEWTONIAN_ bits; only those values are computed, and unknown bits are ignored.
+ * Formulas: beside each member of the readout; a value is exactly that of the fixed function of the formula. The
+ * telescope's Barlow or reducer does not count.
+ * A value that has none with this layout (a focus distance over the focal length, an eyepiece under the floor) or
+ * that does not fit its type is not available: its bit in `available` is clear and its member 0. The rest still comes.
+ * Caution: at a high eyepiece stand on a stable platform, never on the top of a ladder, and clear of the moving
+ * mount; never point unfiltered optics at the Sun; follow the maker's instructions and local rules.
+ * Statuses: null pointer; zero or out of range, as the check of the first bad struct gives it, with the
+ * struct's position (telescope 1, layout 2): its check names the member.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_newtonian_readout_compute(const struct fieldstop_telescope *telescope,
+                                                     const struct fieldstop_newtonian_layout *layout,
+                                                     uint32_t wanted,
+                                                     struct fieldstop_newtonian_readout *readout);
+
+/**
+ * Gives where the second mirror of two goes and what it is: the wanted values, each in the unit of its name, and the
+ * facts about them.
+ *
+ * wanted: any of the FIELDSTOP_TWO_MIRROR_ bits; only those values are computed, and unknown bits are ignored.
+ * Formulas: beside each member of the readout; a value is that of the fixed functions of the formula, sums and
+ * ratios of them rounded once more. The telescope's focal length is the system's; its Barlow or reducer does not count.
+ * A value that has none with this layout (a system not longer than the primary) or that does not fit its type is not
+ * available: its bit in `available` is clear and its member 0. The rest still comes.
+ * Caution: never point unfiltered optics at the Sun; follow the maker's instructions and local rules.
+ * Statuses: null pointer; zero or out of range, as the check of the first bad struct gives it, with the
+ * struct's position (telescope 1, layout 2): its check names the member.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_two_mirror_readout_compute(const struct fieldstop_telescope *telescope,
+                                                      const struct fieldstop_two_mirror_layout *layout,
+                                                      uint32_t wanted,
+                                                      struct fieldstop_two_mirror_readout *readout);
+
 /* --------------------------------------------------------------------------------------------------
    Quantities as characters of a display: integers only, into a buffer of the caller's. */
 
@@ -4026,7 +4320,7 @@ fieldstop_status fieldstop_camera_choose(const struct fieldstop_telescope *teles
 /** Visual row: seeing limited. */
 #define FIELDSTOP_VISUAL_ROW_SEEING_LIMITED 15
 /** Rows of the camera pages, and labels that they need. */
-#define FIELDSTOP_CAMERA_ROWS 11
+#define FIELDSTOP_CAMERA_ROWS 14
 /** Camera row: frame width. */
 #define FIELDSTOP_CAMERA_ROW_FRAME_WIDTH 0
 /** Camera row: frame height. */
@@ -4045,10 +4339,84 @@ fieldstop_status fieldstop_camera_choose(const struct fieldstop_telescope *teles
 #define FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH 7
 /** Camera row: plate scale. */
 #define FIELDSTOP_CAMERA_ROW_PLATE_SCALE 8
+/** Camera row: diagonal. */
+#define FIELDSTOP_CAMERA_ROW_DIAGONAL 9
+/** Camera row: cutoff. */
+#define FIELDSTOP_CAMERA_ROW_CUTOFF 10
+/** Camera row: nyquist pixel. */
+#define FIELDSTOP_CAMERA_ROW_NYQUIST_PIXEL 11
 /** Camera row: coarse sampling. */
-#define FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING 9
+#define FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING 12
 /** Camera row: fine sampling. */
-#define FIELDSTOP_CAMERA_ROW_FINE_SAMPLING 10
+#define FIELDSTOP_CAMERA_ROW_FINE_SAMPLING 13
+/** Caution: where a fact tells that the eyepiece is high. */
+#define FIELDSTOP_CAUTION_HIGH_EYEPIECE 0
+/** Caution: where the Sun may be near. */
+#define FIELDSTOP_CAUTION_SUN 1
+/** Rows of the focus pages, and labels that they need. */
+#define FIELDSTOP_FOCUS_ROWS 9
+/** Focus row: depth of focus. */
+#define FIELDSTOP_FOCUS_ROW_DEPTH_OF_FOCUS 0
+/** Focus row: depth steps. */
+#define FIELDSTOP_FOCUS_ROW_DEPTH_STEPS 1
+/** Focus row: temperature. */
+#define FIELDSTOP_FOCUS_ROW_TEMPERATURE 2
+/** Focus row: blur. */
+#define FIELDSTOP_FOCUS_ROW_BLUR 3
+/** Focus row: blur angle. */
+#define FIELDSTOP_FOCUS_ROW_BLUR_ANGLE 4
+/** Focus row: wavefront. */
+#define FIELDSTOP_FOCUS_ROW_WAVEFRONT 5
+/** Focus row: focal ratio. */
+#define FIELDSTOP_FOCUS_ROW_FOCAL_RATIO 6
+/** Focus row: coarse step. */
+#define FIELDSTOP_FOCUS_ROW_COARSE_STEP 7
+/** Focus row: out of focus. */
+#define FIELDSTOP_FOCUS_ROW_OUT_OF_FOCUS 8
+/** Rows of the pages of a Newtonian's layout, and labels that they need. */
+#define FIELDSTOP_NEWTONIAN_ROWS 12
+/** Newtonian row: diagonal. */
+#define FIELDSTOP_NEWTONIAN_ROW_DIAGONAL 0
+/** Newtonian row: diagonal offset. */
+#define FIELDSTOP_NEWTONIAN_ROW_DIAGONAL_OFFSET 1
+/** Newtonian row: obstruction. */
+#define FIELDSTOP_NEWTONIAN_ROW_OBSTRUCTION 2
+/** Newtonian row: edge light. */
+#define FIELDSTOP_NEWTONIAN_ROW_EDGE_LIGHT 3
+/** Newtonian row: eyepiece height. */
+#define FIELDSTOP_NEWTONIAN_ROW_EYEPIECE_HEIGHT 4
+/** Newtonian row: greatest height. */
+#define FIELDSTOP_NEWTONIAN_ROW_GREATEST_HEIGHT 5
+/** Newtonian row: beam. */
+#define FIELDSTOP_NEWTONIAN_ROW_BEAM 6
+/** Newtonian row: beam shift. */
+#define FIELDSTOP_NEWTONIAN_ROW_BEAM_SHIFT 7
+/** Newtonian row: small diagonal. */
+#define FIELDSTOP_NEWTONIAN_ROW_SMALL_DIAGONAL 8
+/** Newtonian row: wider than told. */
+#define FIELDSTOP_NEWTONIAN_ROW_WIDER_THAN_TOLD 9
+/** Newtonian row: high eyepiece. */
+#define FIELDSTOP_NEWTONIAN_ROW_HIGH_EYEPIECE 10
+/** Newtonian row: high reached. */
+#define FIELDSTOP_NEWTONIAN_ROW_HIGH_REACHED 11
+/** Rows of the pages of two mirrors' layout, and labels that they need. */
+#define FIELDSTOP_TWO_MIRROR_ROWS 8
+/** Two-mirror row: separation. */
+#define FIELDSTOP_TWO_MIRROR_ROW_SEPARATION 0
+/** Two-mirror row: secondary. */
+#define FIELDSTOP_TWO_MIRROR_ROW_SECONDARY 1
+/** Two-mirror row: radius. */
+#define FIELDSTOP_TWO_MIRROR_ROW_RADIUS 2
+/** Two-mirror row: obstruction. */
+#define FIELDSTOP_TWO_MIRROR_ROW_OBSTRUCTION 3
+/** Two-mirror row: secondary magnification. */
+#define FIELDSTOP_TWO_MIRROR_ROW_SECONDARY_MAGNIFICATION 4
+/** Two-mirror row: length. */
+#define FIELDSTOP_TWO_MIRROR_ROW_LENGTH 5
+/** Two-mirror row: length share. */
+#define FIELDSTOP_TWO_MIRROR_ROW_LENGTH_SHARE 6
+/** Two-mirror row: wider than told. */
+#define FIELDSTOP_TWO_MIRROR_ROW_WIDER_THAN_TOLD 7
 
 /**
  * The look of all text. Plain data that the caller owns: copy one of the ready ones and change what you like.
@@ -4439,6 +4807,254 @@ fieldstop_status fieldstop_text_changed(const char *shown,
                                         uint16_t line_length,
                                         const struct fieldstop_text_style *style,
                                         struct fieldstop_span *span);
+
+/**
+ * Gives a caution in English, one of FIELDSTOP_CAUTION_...; an empty text for any other number, never null.
+ *
+ * On AVR it is in program memory (PROGMEM). A translation can take its place in fieldstop_text_caution_line.
+ */
+const char *fieldstop_text_caution(uint8_t caution);
+
+/**
+ * Gives how many lines of `columns` characters a sentence takes, broken between words; 0 for a null pointer.
+ *
+ * sentence: bytes with a zero byte at their end; on AVR in program memory. Columns under 8 count as 8.
+ */
+uint8_t fieldstop_text_caution_lines(const char *sentence,
+                                     uint8_t columns);
+
+/**
+ * Writes one line of a sentence broken between words and gives its length in bytes; it is always `columns`
+ * characters long.
+ *
+ * sentence: bytes with a zero byte at their end, as fieldstop_text_caution gives; on AVR in program memory. A line
+ * behind the last is blank; a word longer than a line is cut.
+ * Ranges: columns 8 to 255.
+ * Statuses: null pointer, out of range (columns), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_caution_line(const char *sentence,
+                                             uint8_t columns,
+                                             uint8_t line,
+                                             char *text,
+                                             uint16_t capacity,
+                                             uint16_t *length);
+
+/** Gives the English labels of the focus pages for 20 columns and more, an array of FIELDSTOP_FOCUS_ROWS; never null. */
+const char *const *fieldstop_text_focus_labels(void);
+
+/** Gives the English labels of the focus pages for 8 and 16 columns, an array of FIELDSTOP_FOCUS_ROWS; never null. */
+const char *const *fieldstop_text_focus_labels_short(void);
+
+/**
+ * Writes one line of the focus pages and gives its length in bytes; it is always `columns` characters long.
+ *
+ * `line` counts over all pages: line r of page p is p rows + r. From 16 columns on a line has the label, cut where it
+ * must be, a mark where a fact concerns the value, and the value in its field at the right end; below 16 columns the
+ * label and the value have a line each. A line behind the last row is blank.
+ * Ranges: columns 8 to 255; labels an array of FIELDSTOP_FOCUS_ROWS.
+ * Statuses: null pointer, out of range (columns), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_focus_line(const struct fieldstop_focus_readout *readout,
+                                           const char *const *labels,
+                                           const struct fieldstop_text_style *style,
+                                           uint8_t columns,
+                                           uint8_t line,
+                                           char *text,
+                                           uint16_t capacity,
+                                           uint16_t *length);
+
+/**
+ * Writes a value of the focus pages with its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_FOCUS_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_focus_value(const struct fieldstop_focus_readout *readout,
+                                            uint8_t row,
+                                            const struct fieldstop_text_style *style,
+                                            uint8_t width,
+                                            char *text,
+                                            uint16_t capacity,
+                                            uint16_t *length);
+
+/**
+ * Writes a value of the focus pages without its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_FOCUS_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_focus_number(const struct fieldstop_focus_readout *readout,
+                                             uint8_t row,
+                                             const struct fieldstop_text_style *style,
+                                             uint8_t width,
+                                             char *text,
+                                             uint16_t capacity,
+                                             uint16_t *length);
+
+/**
+ * Writes the unit of a value of the focus pages and gives its length in bytes, which may be 0.
+ *
+ * It belongs to the number that fieldstop_text_focus_number writes.
+ * Ranges: row one of FIELDSTOP_FOCUS_ROW_...
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_focus_unit(const struct fieldstop_focus_readout *readout,
+                                           uint8_t row,
+                                           const struct fieldstop_text_style *style,
+                                           char *text,
+                                           uint16_t capacity,
+                                           uint16_t *length);
+
+/** Gives the English labels of the pages of a Newtonian's layout for 20 columns and more, an array of FIELDSTOP_NEWTONIAN_ROWS; never null. */
+const char *const *fieldstop_text_newtonian_labels(void);
+
+/** Gives the English labels of the pages of a Newtonian's layout for 8 and 16 columns, an array of FIELDSTOP_NEWTONIAN_ROWS; never null. */
+const char *const *fieldstop_text_newtonian_labels_short(void);
+
+/**
+ * Writes one line of the pages of a Newtonian's layout and gives its length in bytes; it is always `columns` characters long.
+ *
+ * `line` counts over all pages: line r of page p is p rows + r. From 16 columns on a line has the label, cut where it
+ * must be, a mark where a fact concerns the value, and the value in its field at the right end; below 16 columns the
+ * label and the value have a line each. A line behind the last row is blank.
+ * Ranges: columns 8 to 255; labels an array of FIELDSTOP_NEWTONIAN_ROWS.
+ * Statuses: null pointer, out of range (columns), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_newtonian_line(const struct fieldstop_newtonian_readout *readout,
+                                               const char *const *labels,
+                                               const struct fieldstop_text_style *style,
+                                               uint8_t columns,
+                                               uint8_t line,
+                                               char *text,
+                                               uint16_t capacity,
+                                               uint16_t *length);
+
+/**
+ * Writes a value of the pages of a Newtonian's layout with its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_NEWTONIAN_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_newtonian_value(const struct fieldstop_newtonian_readout *readout,
+                                                uint8_t row,
+                                                const struct fieldstop_text_style *style,
+                                                uint8_t width,
+                                                char *text,
+                                                uint16_t capacity,
+                                                uint16_t *length);
+
+/**
+ * Writes a value of the pages of a Newtonian's layout without its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_NEWTONIAN_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_newtonian_number(const struct fieldstop_newtonian_readout *readout,
+                                                 uint8_t row,
+                                                 const struct fieldstop_text_style *style,
+                                                 uint8_t width,
+                                                 char *text,
+                                                 uint16_t capacity,
+                                                 uint16_t *length);
+
+/**
+ * Writes the unit of a value of the pages of a Newtonian's layout and gives its length in bytes, which may be 0.
+ *
+ * It belongs to the number that fieldstop_text_newtonian_number writes.
+ * Ranges: row one of FIELDSTOP_NEWTONIAN_ROW_...
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_newtonian_unit(const struct fieldstop_newtonian_readout *readout,
+                                               uint8_t row,
+                                               const struct fieldstop_text_style *style,
+                                               char *text,
+                                               uint16_t capacity,
+                                               uint16_t *length);
+
+/** Gives the English labels of the pages of two mirrors' layout for 20 columns and more, an array of FIELDSTOP_TWO_MIRROR_ROWS; never null. */
+const char *const *fieldstop_text_two_mirror_labels(void);
+
+/** Gives the English labels of the pages of two mirrors' layout for 8 and 16 columns, an array of FIELDSTOP_TWO_MIRROR_ROWS; never null. */
+const char *const *fieldstop_text_two_mirror_labels_short(void);
+
+/**
+ * Writes one line of the pages of two mirrors' layout and gives its length in bytes; it is always `columns` characters long.
+ *
+ * `line` counts over all pages: line r of page p is p rows + r. From 16 columns on a line has the label, cut where it
+ * must be, a mark where a fact concerns the value, and the value in its field at the right end; below 16 columns the
+ * label and the value have a line each. A line behind the last row is blank.
+ * Ranges: columns 8 to 255; labels an array of FIELDSTOP_TWO_MIRROR_ROWS.
+ * Statuses: null pointer, out of range (columns), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_two_mirror_line(const struct fieldstop_two_mirror_readout *readout,
+                                                const char *const *labels,
+                                                const struct fieldstop_text_style *style,
+                                                uint8_t columns,
+                                                uint8_t line,
+                                                char *text,
+                                                uint16_t capacity,
+                                                uint16_t *length);
+
+/**
+ * Writes a value of the pages of two mirrors' layout with its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_TWO_MIRROR_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_two_mirror_value(const struct fieldstop_two_mirror_readout *readout,
+                                                 uint8_t row,
+                                                 const struct fieldstop_text_style *style,
+                                                 uint8_t width,
+                                                 char *text,
+                                                 uint16_t capacity,
+                                                 uint16_t *length);
+
+/**
+ * Writes a value of the pages of two mirrors' layout without its unit and gives its length in bytes.
+ *
+ * In the form that the pages show; a dash where it is not available.
+ * Ranges: row one of FIELDSTOP_TWO_MIRROR_ROW_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_two_mirror_number(const struct fieldstop_two_mirror_readout *readout,
+                                                  uint8_t row,
+                                                  const struct fieldstop_text_style *style,
+                                                  uint8_t width,
+                                                  char *text,
+                                                  uint16_t capacity,
+                                                  uint16_t *length);
+
+/**
+ * Writes the unit of a value of the pages of two mirrors' layout and gives its length in bytes, which may be 0.
+ *
+ * It belongs to the number that fieldstop_text_two_mirror_number writes.
+ * Ranges: row one of FIELDSTOP_TWO_MIRROR_ROW_...
+ * Statuses: null pointer, out of range (row), no room.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_text_two_mirror_unit(const struct fieldstop_two_mirror_readout *readout,
+                                                uint8_t row,
+                                                const struct fieldstop_text_style *style,
+                                                char *text,
+                                                uint16_t capacity,
+                                                uint16_t *length);
 
 #ifdef __cplusplus
 } /* extern "C" */

@@ -498,6 +498,12 @@ constexpr uint32_t camera_plate_scale = FIELDSTOP_CAMERA_PLATE_SCALE;
 constexpr uint32_t camera_star_fwhm = FIELDSTOP_CAMERA_STAR_FWHM;
 /** Camera readout, wanted and available: pixels_per_fwhm_q16 */
 constexpr uint32_t camera_pixels_per_fwhm = FIELDSTOP_CAMERA_PIXELS_PER_FWHM;
+/** Camera readout, wanted and available: cutoff_frequency_q16 */
+constexpr uint32_t camera_cutoff_frequency = FIELDSTOP_CAMERA_CUTOFF_FREQUENCY;
+/** Camera readout, wanted and available: nyquist_pixel_nm */
+constexpr uint32_t camera_nyquist_pixel = FIELDSTOP_CAMERA_NYQUIST_PIXEL;
+/** Camera readout, wanted and available: diagonal_mas */
+constexpr uint32_t camera_diagonal = FIELDSTOP_CAMERA_DIAGONAL;
 /** Camera readout, wanted: every member */
 constexpr uint32_t camera_all = FIELDSTOP_CAMERA_ALL;
 /** Camera readout, fact: under two pixels to the star image (common practice, after Shannon 1949) */
@@ -550,6 +556,70 @@ constexpr uint32_t camera_choice_fact_coarse_sampling = FIELDSTOP_CAMERA_CHOICE_
 constexpr uint32_t camera_choice_fact_fine_sampling = FIELDSTOP_CAMERA_CHOICE_FACT_FINE_SAMPLING;
 /** Camera choice, fact: one frame takes the whole target */
 constexpr uint32_t camera_choice_fact_fits = FIELDSTOP_CAMERA_CHOICE_FACT_FITS;
+/** Focus readout, wanted and available: focal_ratio_q16 */
+constexpr uint32_t focus_focal_ratio = FIELDSTOP_FOCUS_FOCAL_RATIO;
+/** Focus readout, wanted and available: depth_nm */
+constexpr uint32_t focus_depth = FIELDSTOP_FOCUS_DEPTH;
+/** Focus readout, wanted and available: depth_steps */
+constexpr uint32_t focus_depth_steps = FIELDSTOP_FOCUS_DEPTH_STEPS;
+/** Focus readout, wanted and available: temperature_mk */
+constexpr uint32_t focus_temperature = FIELDSTOP_FOCUS_TEMPERATURE;
+/** Focus readout, wanted and available: blur_nm */
+constexpr uint32_t focus_blur = FIELDSTOP_FOCUS_BLUR;
+/** Focus readout, wanted and available: blur_uas */
+constexpr uint32_t focus_blur_angle = FIELDSTOP_FOCUS_BLUR_ANGLE;
+/** Focus readout, wanted and available: wavefront_nm */
+constexpr uint32_t focus_wavefront = FIELDSTOP_FOCUS_WAVEFRONT;
+/** Focus readout, wanted: every member */
+constexpr uint32_t focus_all = FIELDSTOP_FOCUS_ALL;
+/** Focus readout, fact: one step of the motor is over the depth of focus (Rayleigh 1879) */
+constexpr uint32_t focus_fact_coarse_step = FIELDSTOP_FOCUS_FACT_COARSE_STEP;
+/** Focus readout, fact: the defocus is over the depth of focus (Rayleigh 1879) */
+constexpr uint32_t focus_fact_out_of_focus = FIELDSTOP_FOCUS_FACT_OUT_OF_FOCUS;
+/** Newtonian readout, wanted and available: diagonal_um */
+constexpr uint32_t newtonian_diagonal = FIELDSTOP_NEWTONIAN_DIAGONAL;
+/** Newtonian readout, wanted and available: diagonal_offset_um */
+constexpr uint32_t newtonian_diagonal_offset = FIELDSTOP_NEWTONIAN_DIAGONAL_OFFSET;
+/** Newtonian readout, wanted and available: obstruction_q16 */
+constexpr uint32_t newtonian_obstruction = FIELDSTOP_NEWTONIAN_OBSTRUCTION;
+/** Newtonian readout, wanted and available: beam_um */
+constexpr uint32_t newtonian_beam = FIELDSTOP_NEWTONIAN_BEAM;
+/** Newtonian readout, wanted and available: beam_shift_um */
+constexpr uint32_t newtonian_beam_shift = FIELDSTOP_NEWTONIAN_BEAM_SHIFT;
+/** Newtonian readout, wanted and available: edge_light_q16 */
+constexpr uint32_t newtonian_edge_light = FIELDSTOP_NEWTONIAN_EDGE_LIGHT;
+/** Newtonian readout, wanted and available: eyepiece_height_um */
+constexpr uint32_t newtonian_eyepiece_height = FIELDSTOP_NEWTONIAN_EYEPIECE_HEIGHT;
+/** Newtonian readout, wanted and available: greatest_height_um */
+constexpr uint32_t newtonian_greatest_height = FIELDSTOP_NEWTONIAN_GREATEST_HEIGHT;
+/** Newtonian readout, wanted: every member */
+constexpr uint32_t newtonian_all = FIELDSTOP_NEWTONIAN_ALL;
+/** Newtonian readout, fact: the diagonal in place is smaller than the field needs (geometry) */
+constexpr uint32_t newtonian_fact_small_diagonal = FIELDSTOP_NEWTONIAN_FACT_SMALL_DIAGONAL;
+/** Newtonian readout, fact: the diagonal is wider than the obstruction that the telescope tells (geometry) */
+constexpr uint32_t newtonian_fact_wider_than_told = FIELDSTOP_NEWTONIAN_FACT_WIDER_THAN_TOLD;
+/** Newtonian readout, fact: the eyepiece is above the height that the layout sets; show the caution */
+constexpr uint32_t newtonian_fact_high_eyepiece = FIELDSTOP_NEWTONIAN_FACT_HIGH_EYEPIECE;
+/** Newtonian readout, fact: within its altitudes it gets above that height; show the caution */
+constexpr uint32_t newtonian_fact_high_reached = FIELDSTOP_NEWTONIAN_FACT_HIGH_REACHED;
+/** Two mirror readout, wanted and available: secondary_magnification_q16 */
+constexpr uint32_t two_mirror_secondary_magnification = FIELDSTOP_TWO_MIRROR_SECONDARY_MAGNIFICATION;
+/** Two mirror readout, wanted and available: separation_um */
+constexpr uint32_t two_mirror_separation = FIELDSTOP_TWO_MIRROR_SEPARATION;
+/** Two mirror readout, wanted and available: secondary_um */
+constexpr uint32_t two_mirror_secondary = FIELDSTOP_TWO_MIRROR_SECONDARY;
+/** Two mirror readout, wanted and available: secondary_radius_um */
+constexpr uint32_t two_mirror_secondary_radius = FIELDSTOP_TWO_MIRROR_SECONDARY_RADIUS;
+/** Two mirror readout, wanted and available: obstruction_q16 */
+constexpr uint32_t two_mirror_obstruction = FIELDSTOP_TWO_MIRROR_OBSTRUCTION;
+/** Two mirror readout, wanted and available: length_um */
+constexpr uint32_t two_mirror_length = FIELDSTOP_TWO_MIRROR_LENGTH;
+/** Two mirror readout, wanted and available: length_q16 */
+constexpr uint32_t two_mirror_length_share = FIELDSTOP_TWO_MIRROR_LENGTH_SHARE;
+/** Two mirror readout, wanted: every member */
+constexpr uint32_t two_mirror_all = FIELDSTOP_TWO_MIRROR_ALL;
+/** Two mirror readout, fact: the secondary is wider than the obstruction that the telescope tells (geometry) */
+constexpr uint32_t two_mirror_fact_wider_than_told = FIELDSTOP_TWO_MIRROR_FACT_WIDER_THAN_TOLD;
 /** Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on */
 constexpr uint8_t angle_by_size = FIELDSTOP_ANGLE_BY_SIZE;
 /** Angle: degrees with decimals */
@@ -658,10 +728,84 @@ constexpr uint8_t camera_row_t_number = FIELDSTOP_CAMERA_ROW_T_NUMBER;
 constexpr uint8_t camera_row_focal_length = FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH;
 /** Camera row: plate scale */
 constexpr uint8_t camera_row_plate_scale = FIELDSTOP_CAMERA_ROW_PLATE_SCALE;
+/** Camera row: diagonal */
+constexpr uint8_t camera_row_diagonal = FIELDSTOP_CAMERA_ROW_DIAGONAL;
+/** Camera row: cutoff */
+constexpr uint8_t camera_row_cutoff = FIELDSTOP_CAMERA_ROW_CUTOFF;
+/** Camera row: nyquist pixel */
+constexpr uint8_t camera_row_nyquist_pixel = FIELDSTOP_CAMERA_ROW_NYQUIST_PIXEL;
 /** Camera row: coarse sampling */
 constexpr uint8_t camera_row_coarse_sampling = FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING;
 /** Camera row: fine sampling */
 constexpr uint8_t camera_row_fine_sampling = FIELDSTOP_CAMERA_ROW_FINE_SAMPLING;
+/** Caution: where a fact tells that the eyepiece is high */
+constexpr uint8_t caution_high_eyepiece = FIELDSTOP_CAUTION_HIGH_EYEPIECE;
+/** Caution: where the Sun may be near */
+constexpr uint8_t caution_sun = FIELDSTOP_CAUTION_SUN;
+/** Rows of the focus pages, and labels that they need */
+constexpr uint8_t focus_rows = FIELDSTOP_FOCUS_ROWS;
+/** Focus row: depth of focus */
+constexpr uint8_t focus_row_depth_of_focus = FIELDSTOP_FOCUS_ROW_DEPTH_OF_FOCUS;
+/** Focus row: depth steps */
+constexpr uint8_t focus_row_depth_steps = FIELDSTOP_FOCUS_ROW_DEPTH_STEPS;
+/** Focus row: temperature */
+constexpr uint8_t focus_row_temperature = FIELDSTOP_FOCUS_ROW_TEMPERATURE;
+/** Focus row: blur */
+constexpr uint8_t focus_row_blur = FIELDSTOP_FOCUS_ROW_BLUR;
+/** Focus row: blur angle */
+constexpr uint8_t focus_row_blur_angle = FIELDSTOP_FOCUS_ROW_BLUR_ANGLE;
+/** Focus row: wavefront */
+constexpr uint8_t focus_row_wavefront = FIELDSTOP_FOCUS_ROW_WAVEFRONT;
+/** Focus row: focal ratio */
+constexpr uint8_t focus_row_focal_ratio = FIELDSTOP_FOCUS_ROW_FOCAL_RATIO;
+/** Focus row: coarse step */
+constexpr uint8_t focus_row_coarse_step = FIELDSTOP_FOCUS_ROW_COARSE_STEP;
+/** Focus row: out of focus */
+constexpr uint8_t focus_row_out_of_focus = FIELDSTOP_FOCUS_ROW_OUT_OF_FOCUS;
+/** Rows of the pages of a Newtonian's layout, and labels that they need */
+constexpr uint8_t newtonian_rows = FIELDSTOP_NEWTONIAN_ROWS;
+/** Newtonian row: diagonal */
+constexpr uint8_t newtonian_row_diagonal = FIELDSTOP_NEWTONIAN_ROW_DIAGONAL;
+/** Newtonian row: diagonal offset */
+constexpr uint8_t newtonian_row_diagonal_offset = FIELDSTOP_NEWTONIAN_ROW_DIAGONAL_OFFSET;
+/** Newtonian row: obstruction */
+constexpr uint8_t newtonian_row_obstruction = FIELDSTOP_NEWTONIAN_ROW_OBSTRUCTION;
+/** Newtonian row: edge light */
+constexpr uint8_t newtonian_row_edge_light = FIELDSTOP_NEWTONIAN_ROW_EDGE_LIGHT;
+/** Newtonian row: eyepiece height */
+constexpr uint8_t newtonian_row_eyepiece_height = FIELDSTOP_NEWTONIAN_ROW_EYEPIECE_HEIGHT;
+/** Newtonian row: greatest height */
+constexpr uint8_t newtonian_row_greatest_height = FIELDSTOP_NEWTONIAN_ROW_GREATEST_HEIGHT;
+/** Newtonian row: beam */
+constexpr uint8_t newtonian_row_beam = FIELDSTOP_NEWTONIAN_ROW_BEAM;
+/** Newtonian row: beam shift */
+constexpr uint8_t newtonian_row_beam_shift = FIELDSTOP_NEWTONIAN_ROW_BEAM_SHIFT;
+/** Newtonian row: small diagonal */
+constexpr uint8_t newtonian_row_small_diagonal = FIELDSTOP_NEWTONIAN_ROW_SMALL_DIAGONAL;
+/** Newtonian row: wider than told */
+constexpr uint8_t newtonian_row_wider_than_told = FIELDSTOP_NEWTONIAN_ROW_WIDER_THAN_TOLD;
+/** Newtonian row: high eyepiece */
+constexpr uint8_t newtonian_row_high_eyepiece = FIELDSTOP_NEWTONIAN_ROW_HIGH_EYEPIECE;
+/** Newtonian row: high reached */
+constexpr uint8_t newtonian_row_high_reached = FIELDSTOP_NEWTONIAN_ROW_HIGH_REACHED;
+/** Rows of the pages of two mirrors' layout, and labels that they need */
+constexpr uint8_t two_mirror_rows = FIELDSTOP_TWO_MIRROR_ROWS;
+/** Two-mirror row: separation */
+constexpr uint8_t two_mirror_row_separation = FIELDSTOP_TWO_MIRROR_ROW_SEPARATION;
+/** Two-mirror row: secondary */
+constexpr uint8_t two_mirror_row_secondary = FIELDSTOP_TWO_MIRROR_ROW_SECONDARY;
+/** Two-mirror row: radius */
+constexpr uint8_t two_mirror_row_radius = FIELDSTOP_TWO_MIRROR_ROW_RADIUS;
+/** Two-mirror row: obstruction */
+constexpr uint8_t two_mirror_row_obstruction = FIELDSTOP_TWO_MIRROR_ROW_OBSTRUCTION;
+/** Two-mirror row: secondary magnification */
+constexpr uint8_t two_mirror_row_secondary_magnification = FIELDSTOP_TWO_MIRROR_ROW_SECONDARY_MAGNIFICATION;
+/** Two-mirror row: length */
+constexpr uint8_t two_mirror_row_length = FIELDSTOP_TWO_MIRROR_ROW_LENGTH;
+/** Two-mirror row: length share */
+constexpr uint8_t two_mirror_row_length_share = FIELDSTOP_TWO_MIRROR_ROW_LENGTH_SHARE;
+/** Two-mirror row: wider than told */
+constexpr uint8_t two_mirror_row_wider_than_told = FIELDSTOP_TWO_MIRROR_ROW_WIDER_THAN_TOLD;
 
 /** A telescope: objective or primary mirror, with the Barlow or reducer that is in use */
 class telescope {
@@ -963,6 +1107,21 @@ public:
     {
         return (raw_.available & FIELDSTOP_CAMERA_PIXELS_PER_FWHM) != 0 ? result<q16>(q16(raw_.pixels_per_fwhm_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
     }
+    /** Finest detail that the optics pass at all, cycles per millimetre at the focus: 1 / (lambda N) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> cutoff_frequency() const
+    {
+        return (raw_.available & FIELDSTOP_CAMERA_CUTOFF_FREQUENCY) != 0 ? result<q16>(q16(raw_.cutoff_frequency_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** The coarsest pixel that loses nothing of it in still air, nanometres: lambda f k / (2 D) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<nanometres> nyquist_pixel() const
+    {
+        return (raw_.available & FIELDSTOP_CAMERA_NYQUIST_PIXEL) != 0 ? result<nanometres>(nanometres(raw_.nyquist_pixel_nm)) : result<nanometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Sky from corner to corner of the frame, milliarcseconds: 2 atan(p sqrt(c^2 + r^2) / (2 f k)) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<milliarcseconds> diagonal() const
+    {
+        return (raw_.available & FIELDSTOP_CAMERA_DIAGONAL) != 0 ? result<milliarcseconds>(milliarcseconds(raw_.diagonal_mas)) : result<milliarcseconds>(status(FIELDSTOP_UNDEFINED));
+    }
 
 private:
     friend struct access;
@@ -1143,6 +1302,323 @@ private:
     ::fieldstop_camera_choice raw_;
 };
 static_assert(sizeof(camera_choice) == sizeof(::fieldstop_camera_choice), "no more than in C");
+
+/** Where things are in a Newtonian telescope, and how it stands */
+class newtonian_layout {
+public:
+    /** Every member 0. */
+    FIELDSTOP_INLINE constexpr newtonian_layout() : raw_() {}
+    FIELDSTOP_INLINE constexpr explicit newtonian_layout(const ::fieldstop_newtonian_layout &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_newtonian_layout &c() const { return raw_; }
+    /** From the centre of the diagonal to the focus, micrometres; not over the telescope's focal length, or what rests on it is not available */
+    FIELDSTOP_INLINE constexpr micrometres focus_distance() const { return micrometres(raw_.focus_distance_um); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_focus_distance(micrometres focus_distance_um) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{focus_distance_um.count(), raw_.lit_field_um, raw_.edge_offset_um, raw_.diagonal_um, raw_.axis_height_um, raw_.reach_um, raw_.altitude_bam, raw_.lowest_altitude_bam, raw_.highest_altitude_bam, raw_.height_limit_um});
+    }
+    /** Diameter at the focus that the whole aperture is to light, micrometres; 0: the centre only */
+    FIELDSTOP_INLINE constexpr micrometres lit_field() const { return micrometres(raw_.lit_field_um); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_lit_field(micrometres lit_field_um) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, lit_field_um.count(), raw_.edge_offset_um, raw_.diagonal_um, raw_.axis_height_um, raw_.reach_um, raw_.altitude_bam, raw_.lowest_altitude_bam, raw_.highest_altitude_bam, raw_.height_limit_um});
+    }
+    /** How far from the axis the edge of the field is whose light is asked for, micrometres */
+    FIELDSTOP_INLINE constexpr micrometres edge_offset() const { return micrometres(raw_.edge_offset_um); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_edge_offset(micrometres edge_offset_um) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, raw_.lit_field_um, edge_offset_um.count(), raw_.diagonal_um, raw_.axis_height_um, raw_.reach_um, raw_.altitude_bam, raw_.lowest_altitude_bam, raw_.highest_altitude_bam, raw_.height_limit_um});
+    }
+    /** Minor axis of the diagonal that is in place, micrometres; 0: as large as it must be */
+    FIELDSTOP_INLINE constexpr micrometres diagonal() const { return micrometres(raw_.diagonal_um); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_diagonal(micrometres diagonal_um) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, raw_.lit_field_um, raw_.edge_offset_um, diagonal_um.count(), raw_.axis_height_um, raw_.reach_um, raw_.altitude_bam, raw_.lowest_altitude_bam, raw_.highest_altitude_bam, raw_.height_limit_um});
+    }
+    /** The altitude axis above the place where the observer stands, micrometres */
+    FIELDSTOP_INLINE constexpr micrometres axis_height() const { return micrometres(raw_.axis_height_um); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_axis_height(micrometres axis_height_um) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, raw_.lit_field_um, raw_.edge_offset_um, raw_.diagonal_um, axis_height_um.count(), raw_.reach_um, raw_.altitude_bam, raw_.lowest_altitude_bam, raw_.highest_altitude_bam, raw_.height_limit_um});
+    }
+    /** From the altitude axis to the eyepiece along the tube, micrometres; negative where the eyepiece is at the lower end */
+    FIELDSTOP_INLINE constexpr signed_micrometres reach() const { return signed_micrometres(raw_.reach_um); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_reach(signed_micrometres reach_um) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, raw_.lit_field_um, raw_.edge_offset_um, raw_.diagonal_um, raw_.axis_height_um, reach_um.count(), raw_.altitude_bam, raw_.lowest_altitude_bam, raw_.highest_altitude_bam, raw_.height_limit_um});
+    }
+    /** Where the telescope points now, binary angle from 0 to 90 degrees (0x40000000) */
+    FIELDSTOP_INLINE constexpr signed_binary_angle altitude() const { return signed_binary_angle(raw_.altitude_bam); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_altitude(signed_binary_angle altitude_bam) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, raw_.lit_field_um, raw_.edge_offset_um, raw_.diagonal_um, raw_.axis_height_um, raw_.reach_um, altitude_bam.count(), raw_.lowest_altitude_bam, raw_.highest_altitude_bam, raw_.height_limit_um});
+    }
+    /** The lowest altitude that it points to, from 0 to 90 degrees */
+    FIELDSTOP_INLINE constexpr signed_binary_angle lowest_altitude() const { return signed_binary_angle(raw_.lowest_altitude_bam); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_lowest_altitude(signed_binary_angle lowest_altitude_bam) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, raw_.lit_field_um, raw_.edge_offset_um, raw_.diagonal_um, raw_.axis_height_um, raw_.reach_um, raw_.altitude_bam, lowest_altitude_bam.count(), raw_.highest_altitude_bam, raw_.height_limit_um});
+    }
+    /** The highest, from 0 to 90 degrees, not under the lowest */
+    FIELDSTOP_INLINE constexpr signed_binary_angle highest_altitude() const { return signed_binary_angle(raw_.highest_altitude_bam); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_highest_altitude(signed_binary_angle highest_altitude_bam) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, raw_.lit_field_um, raw_.edge_offset_um, raw_.diagonal_um, raw_.axis_height_um, raw_.reach_um, raw_.altitude_bam, raw_.lowest_altitude_bam, highest_altitude_bam.count(), raw_.height_limit_um});
+    }
+    /** An eyepiece above this height is told as a fact, micrometres; 0: none is */
+    FIELDSTOP_INLINE constexpr micrometres height_limit() const { return micrometres(raw_.height_limit_um); }
+    FIELDSTOP_INLINE constexpr newtonian_layout with_height_limit(micrometres height_limit_um) const
+    {
+        return newtonian_layout(::fieldstop_newtonian_layout{raw_.focus_distance_um, raw_.lit_field_um, raw_.edge_offset_um, raw_.diagonal_um, raw_.axis_height_um, raw_.reach_um, raw_.altitude_bam, raw_.lowest_altitude_bam, raw_.highest_altitude_bam, height_limit_um.count()});
+    }
+
+private:
+    ::fieldstop_newtonian_layout raw_;
+};
+static_assert(sizeof(newtonian_layout) == sizeof(::fieldstop_newtonian_layout), "no more than in C");
+
+/** What a telescope of two mirrors with a convex secondary is made of */
+class two_mirror_layout {
+public:
+    /** Every member 0. */
+    FIELDSTOP_INLINE constexpr two_mirror_layout() : raw_() {}
+    FIELDSTOP_INLINE constexpr explicit two_mirror_layout(const ::fieldstop_two_mirror_layout &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_two_mirror_layout &c() const { return raw_; }
+    /** Focal length of the primary mirror, micrometres; not 0 */
+    FIELDSTOP_INLINE constexpr micrometres primary_focal() const { return micrometres(raw_.primary_focal_um); }
+    FIELDSTOP_INLINE constexpr two_mirror_layout with_primary_focal(micrometres primary_focal_um) const
+    {
+        return two_mirror_layout(::fieldstop_two_mirror_layout{primary_focal_um.count(), raw_.back_focus_um, raw_.lit_field_um});
+    }
+    /** The focus behind the primary's vertex, micrometres */
+    FIELDSTOP_INLINE constexpr micrometres back_focus() const { return micrometres(raw_.back_focus_um); }
+    FIELDSTOP_INLINE constexpr two_mirror_layout with_back_focus(micrometres back_focus_um) const
+    {
+        return two_mirror_layout(::fieldstop_two_mirror_layout{raw_.primary_focal_um, back_focus_um.count(), raw_.lit_field_um});
+    }
+    /** Diameter at the focus that the whole aperture is to light, micrometres; 0: the centre only */
+    FIELDSTOP_INLINE constexpr micrometres lit_field() const { return micrometres(raw_.lit_field_um); }
+    FIELDSTOP_INLINE constexpr two_mirror_layout with_lit_field(micrometres lit_field_um) const
+    {
+        return two_mirror_layout(::fieldstop_two_mirror_layout{raw_.primary_focal_um, raw_.back_focus_um, lit_field_um.count()});
+    }
+
+private:
+    ::fieldstop_two_mirror_layout raw_;
+};
+static_assert(sizeof(two_mirror_layout) == sizeof(::fieldstop_two_mirror_layout), "no more than in C");
+
+/** A focuser, and the tube whose length moves the focus */
+class focuser {
+public:
+    /** Every member 0. */
+    FIELDSTOP_INLINE constexpr focuser() : raw_() {}
+    FIELDSTOP_INLINE constexpr explicit focuser(const ::fieldstop_focuser &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_focuser &c() const { return raw_; }
+    /** Travel of one step of the motor, nanometres; 0: unknown */
+    FIELDSTOP_INLINE constexpr nanometres motor_step() const { return nanometres(raw_.motor_step_nm); }
+    FIELDSTOP_INLINE constexpr focuser with_motor_step(nanometres motor_step_nm) const
+    {
+        return focuser(::fieldstop_focuser{motor_step_nm.count(), raw_.defocus_nm, raw_.tube_length_um, raw_.expansion_ppb_per_k});
+    }
+    /** The distance from the best focus that is asked about, nanometres; 0 is in focus */
+    FIELDSTOP_INLINE constexpr nanometres defocus() const { return nanometres(raw_.defocus_nm); }
+    FIELDSTOP_INLINE constexpr focuser with_defocus(nanometres defocus_nm) const
+    {
+        return focuser(::fieldstop_focuser{raw_.motor_step_nm, defocus_nm.count(), raw_.tube_length_um, raw_.expansion_ppb_per_k});
+    }
+    /** Length that grows with the temperature between the objective and the focus, micrometres; 0: unknown */
+    FIELDSTOP_INLINE constexpr micrometres tube_length() const { return micrometres(raw_.tube_length_um); }
+    FIELDSTOP_INLINE constexpr focuser with_tube_length(micrometres tube_length_um) const
+    {
+        return focuser(::fieldstop_focuser{raw_.motor_step_nm, raw_.defocus_nm, tube_length_um.count(), raw_.expansion_ppb_per_k});
+    }
+    /** Its thermal expansion, parts per billion per kelvin; 0: unknown */
+    FIELDSTOP_INLINE constexpr parts_per_billion_per_kelvin expansion() const { return parts_per_billion_per_kelvin(raw_.expansion_ppb_per_k); }
+    FIELDSTOP_INLINE constexpr focuser with_expansion(parts_per_billion_per_kelvin expansion_ppb_per_k) const
+    {
+        return focuser(::fieldstop_focuser{raw_.motor_step_nm, raw_.defocus_nm, raw_.tube_length_um, expansion_ppb_per_k.count()});
+    }
+
+private:
+    ::fieldstop_focuser raw_;
+};
+static_assert(sizeof(focuser) == sizeof(::fieldstop_focuser), "no more than in C");
+
+/** How exact the focus must be, and what it costs to be off */
+class focus_readout;
+template <> struct given_as<focus_readout> {
+    typedef const focus_readout &type;
+};
+class focus_readout {
+public:
+    FIELDSTOP_INLINE constexpr explicit focus_readout(const ::fieldstop_focus_readout &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_focus_readout &c() const { return raw_; }
+    /** Bits of the members that were wanted and could be known */
+    FIELDSTOP_INLINE constexpr uint32_t available() const { return raw_.available; }
+    /** What is worth telling beside the values; named constants */
+    FIELDSTOP_INLINE constexpr uint32_t facts() const { return raw_.facts; }
+    /** Focal ratio with the Barlow or reducer: N = f k / D */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> focal_ratio() const
+    {
+        return (raw_.available & FIELDSTOP_FOCUS_FOCAL_RATIO) != 0 ? result<q16>(q16(raw_.focal_ratio_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** How far from the best focus, each side, the wavefront is a quarter wave off, nanometres: 2 lambda N^2 */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<nanometres> depth() const
+    {
+        return (raw_.available & FIELDSTOP_FOCUS_DEPTH) != 0 ? result<nanometres>(nanometres(raw_.depth_nm)) : result<nanometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** The same in steps of the motor, to the nearest */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<uint32_t> depth_steps() const
+    {
+        return (raw_.available & FIELDSTOP_FOCUS_DEPTH_STEPS) != 0 ? result<uint32_t>(uint32_t(raw_.depth_steps)) : result<uint32_t>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Change of temperature that moves the focus so far, millikelvin: depth / (length expansion) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<millikelvin> temperature() const
+    {
+        return (raw_.available & FIELDSTOP_FOCUS_TEMPERATURE) != 0 ? result<millikelvin>(millikelvin(raw_.temperature_mk)) : result<millikelvin>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Width of a star's image at the defocus asked about, by geometry, nanometres: defocus / N */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<nanometres> blur() const
+    {
+        return (raw_.available & FIELDSTOP_FOCUS_BLUR) != 0 ? result<nanometres>(nanometres(raw_.blur_nm)) : result<nanometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** The same on the sky, microarcseconds: (1 rad) blur / (f k) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<microarcseconds> blur() const
+    {
+        return (raw_.available & FIELDSTOP_FOCUS_BLUR_ANGLE) != 0 ? result<microarcseconds>(microarcseconds(raw_.blur_uas)) : result<microarcseconds>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Error of the wavefront there, peak to valley, nanometres: defocus / (8 N^2) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<nanometres> wavefront() const
+    {
+        return (raw_.available & FIELDSTOP_FOCUS_WAVEFRONT) != 0 ? result<nanometres>(nanometres(raw_.wavefront_nm)) : result<nanometres>(status(FIELDSTOP_UNDEFINED));
+    }
+
+private:
+    friend struct access;
+    friend class result<focus_readout>;
+    focus_readout() = default;
+    ::fieldstop_focus_readout raw_;
+};
+static_assert(sizeof(focus_readout) == sizeof(::fieldstop_focus_readout), "no more than in C");
+
+/** A Newtonian's diagonal, the light that it passes, and the height of the eyepiece */
+class newtonian_readout;
+template <> struct given_as<newtonian_readout> {
+    typedef const newtonian_readout &type;
+};
+class newtonian_readout {
+public:
+    FIELDSTOP_INLINE constexpr explicit newtonian_readout(const ::fieldstop_newtonian_readout &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_newtonian_readout &c() const { return raw_; }
+    /** Bits of the members that were wanted and could be known */
+    FIELDSTOP_INLINE constexpr uint32_t available() const { return raw_.available; }
+    /** What is worth telling beside the values; named constants */
+    FIELDSTOP_INLINE constexpr uint32_t facts() const { return raw_.facts; }
+    /** Minor axis of the smallest diagonal that lights the field wanted, micrometres */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> diagonal() const
+    {
+        return (raw_.available & FIELDSTOP_NEWTONIAN_DIAGONAL) != 0 ? result<micrometres>(micrometres(raw_.diagonal_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** How far its centre lies away from the focuser, and as much toward the primary, micrometres */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> diagonal_offset() const
+    {
+        return (raw_.available & FIELDSTOP_NEWTONIAN_DIAGONAL_OFFSET) != 0 ? result<micrometres>(micrometres(raw_.diagonal_offset_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** The diagonal in place over the aperture */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> obstruction() const
+    {
+        return (raw_.available & FIELDSTOP_NEWTONIAN_OBSTRUCTION) != 0 ? result<q16>(q16(raw_.obstruction_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Width of the beam at the diagonal, micrometres: D L / f */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> beam() const
+    {
+        return (raw_.available & FIELDSTOP_NEWTONIAN_BEAM) != 0 ? result<micrometres>(micrometres(raw_.beam_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** How far off the axis the beam to the edge of the field is there, micrometres: y (f - L) / f */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> beam_shift() const
+    {
+        return (raw_.available & FIELDSTOP_NEWTONIAN_BEAM_SHIFT) != 0 ? result<micrometres>(micrometres(raw_.beam_shift_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Share of the light on the axis that the diagonal in place passes to the edge of the field */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> edge_light() const
+    {
+        return (raw_.available & FIELDSTOP_NEWTONIAN_EDGE_LIGHT) != 0 ? result<q16>(q16(raw_.edge_light_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** The eyepiece above the place where the observer stands, now, micrometres */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> eyepiece_height() const
+    {
+        return (raw_.available & FIELDSTOP_NEWTONIAN_EYEPIECE_HEIGHT) != 0 ? result<micrometres>(micrometres(raw_.eyepiece_height_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** The same at the altitude where it is highest, micrometres */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> greatest_height() const
+    {
+        return (raw_.available & FIELDSTOP_NEWTONIAN_GREATEST_HEIGHT) != 0 ? result<micrometres>(micrometres(raw_.greatest_height_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+
+private:
+    friend struct access;
+    friend class result<newtonian_readout>;
+    newtonian_readout() = default;
+    ::fieldstop_newtonian_readout raw_;
+};
+static_assert(sizeof(newtonian_readout) == sizeof(::fieldstop_newtonian_readout), "no more than in C");
+
+/** Where the second mirror goes and what it is */
+class two_mirror_readout;
+template <> struct given_as<two_mirror_readout> {
+    typedef const two_mirror_readout &type;
+};
+class two_mirror_readout {
+public:
+    FIELDSTOP_INLINE constexpr explicit two_mirror_readout(const ::fieldstop_two_mirror_readout &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_two_mirror_readout &c() const { return raw_; }
+    /** Bits of the members that were wanted and could be known */
+    FIELDSTOP_INLINE constexpr uint32_t available() const { return raw_.available; }
+    /** What is worth telling beside the values; named constants */
+    FIELDSTOP_INLINE constexpr uint32_t facts() const { return raw_.facts; }
+    /** How much longer the secondary makes the focal length: m = F / f1 */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> secondary_magnification() const
+    {
+        return (raw_.available & FIELDSTOP_TWO_MIRROR_SECONDARY_MAGNIFICATION) != 0 ? result<q16>(q16(raw_.secondary_magnification_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** From the primary's vertex to the secondary's, micrometres: f1 - p, p = (f1 + b) / (m + 1) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> separation() const
+    {
+        return (raw_.available & FIELDSTOP_TWO_MIRROR_SEPARATION) != 0 ? result<micrometres>(micrometres(raw_.separation_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Diameter of the secondary with the margin for the lit field, micrometres: D p / f1 + i (f1 - p) / F */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> secondary() const
+    {
+        return (raw_.available & FIELDSTOP_TWO_MIRROR_SECONDARY) != 0 ? result<micrometres>(micrometres(raw_.secondary_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Radius of curvature of the secondary, convex, micrometres: 2 p m / (m - 1) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> secondary_radius() const
+    {
+        return (raw_.available & FIELDSTOP_TWO_MIRROR_SECONDARY_RADIUS) != 0 ? result<micrometres>(micrometres(raw_.secondary_radius_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** That diameter over the aperture */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> obstruction() const
+    {
+        return (raw_.available & FIELDSTOP_TWO_MIRROR_OBSTRUCTION) != 0 ? result<q16>(q16(raw_.obstruction_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** From the secondary to the focus, micrometres: the separation and the back focus */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> length() const
+    {
+        return (raw_.available & FIELDSTOP_TWO_MIRROR_LENGTH) != 0 ? result<micrometres>(micrometres(raw_.length_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** That length over the focal length: how short the tube is for it */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> length() const
+    {
+        return (raw_.available & FIELDSTOP_TWO_MIRROR_LENGTH_SHARE) != 0 ? result<q16>(q16(raw_.length_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+
+private:
+    friend struct access;
+    friend class result<two_mirror_readout>;
+    two_mirror_readout() = default;
+    ::fieldstop_two_mirror_readout raw_;
+};
+static_assert(sizeof(two_mirror_readout) == sizeof(::fieldstop_two_mirror_readout), "no more than in C");
 
 /** The look of all text */
 typedef ::fieldstop_text_style text_style;
@@ -3221,6 +3697,42 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE status camera_choose(const telescope &telesco
     return status(::fieldstop_camera_choose(&telescope.c(), cameras == nullptr ? nullptr : &cameras->c(), camera_count, amplifiers_q16, amplifier_count, &observer.c(), &target.c(), choices, choice_count));
 }
 
+/** Gives 0 for a Newtonian's layout that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in the place of the argument. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status newtonian_layout_check(const newtonian_layout &layout)
+{
+    return status(::fieldstop_newtonian_layout_check(&layout.c()));
+}
+
+/** Gives 0 for a layout of two mirrors that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in the place of the argument. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status two_mirror_layout_check(const two_mirror_layout &layout)
+{
+    return status(::fieldstop_two_mirror_layout_check(&layout.c()));
+}
+
+/** Gives how exact the focus must be and what it costs to be off: the wanted values, each in the unit of its name, and the facts about them. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<focus_readout> focus_readout_compute(const telescope &telescope, const focuser &focuser, const observer &observer, uint32_t wanted)
+{
+    result<focus_readout> given = access::blank<focus_readout>();
+    access::finish(given, ::fieldstop_focus_readout_compute(&telescope.c(), &focuser.c(), &observer.c(), wanted, access::place(given)));
+    return given;
+}
+
+/** Gives a Newtonian's diagonal, the light that it passes, and the height of the eyepiece: the wanted values, each in the unit of its name, and the facts about them. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<newtonian_readout> newtonian_readout_compute(const telescope &telescope, const newtonian_layout &layout, uint32_t wanted)
+{
+    result<newtonian_readout> given = access::blank<newtonian_readout>();
+    access::finish(given, ::fieldstop_newtonian_readout_compute(&telescope.c(), &layout.c(), wanted, access::place(given)));
+    return given;
+}
+
+/** Gives where the second mirror of two goes and what it is: the wanted values, each in the unit of its name, and the facts about them. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<two_mirror_readout> two_mirror_readout_compute(const telescope &telescope, const two_mirror_layout &layout, uint32_t wanted)
+{
+    result<two_mirror_readout> given = access::blank<two_mirror_readout>();
+    access::finish(given, ::fieldstop_two_mirror_readout_compute(&telescope.c(), &layout.c(), wanted, access::place(given)));
+    return given;
+}
+
 /* Quantities as characters of a display: integers only, into a buffer of the caller's. */
 
 /** Gives the style of plain ASCII; never null. */
@@ -3429,6 +3941,158 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<span> text_changed(const char *shown, 
     fieldstop_span given;
     const fieldstop_status number = ::fieldstop_text_changed(shown, shown_length, line, line_length, &style, &given);
     return access::given<span>(number, given);
+}
+
+/** Gives a caution in English, one of FIELDSTOP_CAUTION_...; an empty text for any other number, never null. */
+FIELDSTOP_INLINE const char *text_caution(uint8_t caution)
+{
+    return ::fieldstop_text_caution(caution);
+}
+
+/** Gives how many lines of `columns` characters a sentence takes, broken between words; 0 for a null pointer. */
+FIELDSTOP_INLINE uint8_t text_caution_lines(const char *sentence, uint8_t columns)
+{
+    return ::fieldstop_text_caution_lines(sentence, columns);
+}
+
+/** Writes one line of a sentence broken between words and gives its length in bytes; it is always `columns` characters long. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_caution_line(const char *sentence, uint8_t columns, uint8_t line, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_caution_line(sentence, columns, line, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Gives the English labels of the focus pages for 20 columns and more, an array of FIELDSTOP_FOCUS_ROWS; never null. */
+FIELDSTOP_INLINE const char *const *text_focus_labels()
+{
+    return ::fieldstop_text_focus_labels();
+}
+
+/** Gives the English labels of the focus pages for 8 and 16 columns, an array of FIELDSTOP_FOCUS_ROWS; never null. */
+FIELDSTOP_INLINE const char *const *text_focus_labels_short()
+{
+    return ::fieldstop_text_focus_labels_short();
+}
+
+/** Writes one line of the focus pages and gives its length in bytes; it is always `columns` characters long. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_focus_line(const focus_readout &readout, const char *const *labels, const text_style &style, uint8_t columns, uint8_t line, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_focus_line(&readout.c(), labels, &style, columns, line, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes a value of the focus pages with its unit and gives its length in bytes. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_focus_value(const focus_readout &readout, uint8_t row, const text_style &style, uint8_t width, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_focus_value(&readout.c(), row, &style, width, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes a value of the focus pages without its unit and gives its length in bytes. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_focus_number(const focus_readout &readout, uint8_t row, const text_style &style, uint8_t width, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_focus_number(&readout.c(), row, &style, width, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes the unit of a value of the focus pages and gives its length in bytes, which may be 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_focus_unit(const focus_readout &readout, uint8_t row, const text_style &style, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_focus_unit(&readout.c(), row, &style, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Gives the English labels of the pages of a Newtonian's layout for 20 columns and more, an array of FIELDSTOP_NEWTONIAN_ROWS; never null. */
+FIELDSTOP_INLINE const char *const *text_newtonian_labels()
+{
+    return ::fieldstop_text_newtonian_labels();
+}
+
+/** Gives the English labels of the pages of a Newtonian's layout for 8 and 16 columns, an array of FIELDSTOP_NEWTONIAN_ROWS; never null. */
+FIELDSTOP_INLINE const char *const *text_newtonian_labels_short()
+{
+    return ::fieldstop_text_newtonian_labels_short();
+}
+
+/** Writes one line of the pages of a Newtonian's layout and gives its length in bytes; it is always `columns` characters long. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_newtonian_line(const newtonian_readout &readout, const char *const *labels, const text_style &style, uint8_t columns, uint8_t line, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_newtonian_line(&readout.c(), labels, &style, columns, line, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes a value of the pages of a Newtonian's layout with its unit and gives its length in bytes. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_newtonian_value(const newtonian_readout &readout, uint8_t row, const text_style &style, uint8_t width, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_newtonian_value(&readout.c(), row, &style, width, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes a value of the pages of a Newtonian's layout without its unit and gives its length in bytes. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_newtonian_number(const newtonian_readout &readout, uint8_t row, const text_style &style, uint8_t width, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_newtonian_number(&readout.c(), row, &style, width, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes the unit of a value of the pages of a Newtonian's layout and gives its length in bytes, which may be 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_newtonian_unit(const newtonian_readout &readout, uint8_t row, const text_style &style, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_newtonian_unit(&readout.c(), row, &style, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Gives the English labels of the pages of two mirrors' layout for 20 columns and more, an array of FIELDSTOP_TWO_MIRROR_ROWS; never null. */
+FIELDSTOP_INLINE const char *const *text_two_mirror_labels()
+{
+    return ::fieldstop_text_two_mirror_labels();
+}
+
+/** Gives the English labels of the pages of two mirrors' layout for 8 and 16 columns, an array of FIELDSTOP_TWO_MIRROR_ROWS; never null. */
+FIELDSTOP_INLINE const char *const *text_two_mirror_labels_short()
+{
+    return ::fieldstop_text_two_mirror_labels_short();
+}
+
+/** Writes one line of the pages of two mirrors' layout and gives its length in bytes; it is always `columns` characters long. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_two_mirror_line(const two_mirror_readout &readout, const char *const *labels, const text_style &style, uint8_t columns, uint8_t line, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_two_mirror_line(&readout.c(), labels, &style, columns, line, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes a value of the pages of two mirrors' layout with its unit and gives its length in bytes. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_two_mirror_value(const two_mirror_readout &readout, uint8_t row, const text_style &style, uint8_t width, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_two_mirror_value(&readout.c(), row, &style, width, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes a value of the pages of two mirrors' layout without its unit and gives its length in bytes. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_two_mirror_number(const two_mirror_readout &readout, uint8_t row, const text_style &style, uint8_t width, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_two_mirror_number(&readout.c(), row, &style, width, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Writes the unit of a value of the pages of two mirrors' layout and gives its length in bytes, which may be 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_two_mirror_unit(const two_mirror_readout &readout, uint8_t row, const text_style &style, buffer text)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_two_mirror_unit(&readout.c(), row, &style, text.text(), text.capacity(), &given);
+    return access::given<uint16_t>(number, given);
 }
 } // namespace fieldstop
 

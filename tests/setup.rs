@@ -1,7 +1,10 @@
 //! The equipment structs, their checks and the two readouts.
 
-use fieldstop::optics::{field, light, resolution};
-use fieldstop::setup::{Camera, CameraReadout, Eyepiece, Observer, Telescope, VisualReadout};
+use fieldstop::optics::{field, imaging, light, resolution};
+use fieldstop::setup::{
+    Camera, CameraReadout, Eyepiece, FocusReadout, Focuser, NewtonianLayout, NewtonianReadout, Observer,
+    Telescope, TwoMirrorLayout, TwoMirrorReadout, VisualReadout,
+};
 use fieldstop::units::{Microarcseconds, Micrometres, Milliarcseconds, Millimagnitudes, Nanometres, Q16};
 use fieldstop::{Cause, Error};
 use proptest::prelude::*;
@@ -56,7 +59,7 @@ fn visual_values(readout: &VisualReadout) -> [(u32, u32); 12] {
     ]
 }
 
-fn camera_values(readout: &CameraReadout) -> [(u32, u32); 9] {
+fn camera_values(readout: &CameraReadout) -> [(u32, u32); 12] {
     type C = CameraReadout;
     [
         (C::FOCAL_LENGTH, readout.focal_length_um),
@@ -68,6 +71,9 @@ fn camera_values(readout: &CameraReadout) -> [(u32, u32); 9] {
         (C::PLATE_SCALE, readout.plate_scale_mas_per_mm),
         (C::STAR_FWHM, readout.star_fwhm_uas),
         (C::PIXELS_PER_FWHM, readout.pixels_per_fwhm_q16),
+        (C::CUTOFF_FREQUENCY, readout.cutoff_frequency_q16),
+        (C::NYQUIST_PIXEL, readout.nyquist_pixel_nm),
+        (C::DIAGONAL, readout.diagonal_mas),
     ]
 }
 
@@ -138,9 +144,10 @@ fn expected_visual(t: &Telescope, e: &Eyepiece, o: &Observer) -> [Option<u32>; 1
     ]
 }
 
-fn expected_camera(t: &Telescope, c: &Camera, o: &Observer) -> [Option<u32>; 9] {
+fn expected_camera(t: &Telescope, c: &Camera, o: &Observer) -> [Option<u32>; 12] {
     let aperture = Micrometres(t.aperture_um);
     let pixel = Nanometres(c.pixel_nm);
+    let wavelength = Nanometres(o.wavelength_nm);
     let focal =
         field::amplified_focal_length_fx(Micrometres(t.focal_length_um), Q16(t.amplification_q16)).ok();
     let effective = match t.throughput_q16 {
@@ -172,6 +179,11 @@ fn expected_camera(t: &Telescope, c: &Camera, o: &Observer) -> [Option<u32>; 9] 
         focal.and_then(|focal| field::plate_scale_fx(focal).ok()).map(|v| v.0),
         fwhm.map(|v| v.0),
         fwhm.and_then(|fwhm| ratio_q16(fwhm.0.into(), scale?.0.into())),
+        focal
+            .and_then(|focal| resolution::cutoff_frequency_fx(focal, aperture, wavelength).ok())
+            .map(|v| v.0),
+        focal.and_then(|focal| imaging::nyquist_pixel_fx(focal, aperture, wavelength).ok()).map(|v| v.0),
+        focal.and_then(|focal| imaging::diagonal_field_fx(pixel, c.columns, c.rows, focal).ok()).map(|v| v.0),
     ]
 }
 
@@ -528,9 +540,20 @@ fn layouts_are_as_published() {
         exit_pupil_um 20, true_field_mas 24, resolution_uas 28, dawes_limit_uas 32, lowest_magnification_q16 36,
         resolving_magnification_q16 40, effective_aperture_um 44, limiting_magnitude_mmag 48,
         surface_brightness_q16 52);
-    layout!(CameraReadout, 44: available 0, facts 4, focal_length_um 8, focal_ratio_q16 12, t_number_q16 16,
+    layout!(CameraReadout, 56: available 0, facts 4, focal_length_um 8, focal_ratio_q16 12, t_number_q16 16,
         frame_width_mas 20, frame_height_mas 24, pixel_scale_uas 28, plate_scale_mas_per_mm 32, star_fwhm_uas 36,
-        pixels_per_fwhm_q16 40);
+        pixels_per_fwhm_q16 40, cutoff_frequency_q16 44, nyquist_pixel_nm 48, diagonal_mas 52);
+    layout!(Focuser, 16: motor_step_nm 0, defocus_nm 4, tube_length_um 8, expansion_ppb_per_k 12);
+    layout!(FocusReadout, 36: available 0, facts 4, focal_ratio_q16 8, depth_nm 12, depth_steps 16, temperature_mk 20,
+        blur_nm 24, blur_uas 28, wavefront_nm 32);
+    layout!(NewtonianLayout, 40: focus_distance_um 0, lit_field_um 4, edge_offset_um 8, diagonal_um 12,
+        axis_height_um 16, reach_um 20, altitude_bam 24, lowest_altitude_bam 28, highest_altitude_bam 32,
+        height_limit_um 36);
+    layout!(NewtonianReadout, 40: available 0, facts 4, diagonal_um 8, diagonal_offset_um 12, obstruction_q16 16,
+        beam_um 20, beam_shift_um 24, edge_light_q16 28, eyepiece_height_um 32, greatest_height_um 36);
+    layout!(TwoMirrorLayout, 12: primary_focal_um 0, back_focus_um 4, lit_field_um 8);
+    layout!(TwoMirrorReadout, 36: available 0, facts 4, secondary_magnification_q16 8, separation_um 12,
+        secondary_um 16, secondary_radius_um 20, obstruction_q16 24, length_um 28, length_q16 32);
 }
 
 /// Every size of number about as often, with the edges.

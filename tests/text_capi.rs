@@ -3,7 +3,11 @@
 use core::ffi::{CStr, c_char};
 use core::ptr::{null, null_mut};
 use fieldstop::capi::text::*;
-use fieldstop::setup::{CameraReadout, VisualReadout};
+use fieldstop::capi::text_caution::*;
+use fieldstop::capi::text_focus::*;
+use fieldstop::capi::text_newtonian::*;
+use fieldstop::capi::text_two_mirror::*;
+use fieldstop::setup::{CameraReadout, FocusReadout, NewtonianReadout, TwoMirrorReadout, VisualReadout};
 use fieldstop::text::*;
 use fieldstop::units::*;
 use proptest::prelude::*;
@@ -220,6 +224,102 @@ fn camera_pages() {
 }
 
 #[test]
+fn layout_pages() {
+    let focus = FocusReadout {
+        available: 0x7d,
+        facts: 3,
+        depth_steps: 31,
+        blur_nm: 3_500,
+        ..FocusReadout::default()
+    };
+    pages!(
+        focus,
+        focus_row,
+        FocusRow,
+        focus_line,
+        FOCUS_LABELS,
+        fieldstop_text_focus_line,
+        fieldstop_text_focus_value,
+        fieldstop_text_focus_number,
+        fieldstop_text_focus_unit,
+        fieldstop_text_focus_labels
+    );
+    let newtonian = NewtonianReadout {
+        available: 0xef,
+        facts: 9,
+        obstruction_q16: 16_000,
+        eyepiece_height_um: 1_724_000,
+        ..NewtonianReadout::default()
+    };
+    pages!(
+        newtonian,
+        newtonian_row,
+        NewtonianRow,
+        newtonian_line,
+        NEWTONIAN_LABELS,
+        fieldstop_text_newtonian_line,
+        fieldstop_text_newtonian_value,
+        fieldstop_text_newtonian_number,
+        fieldstop_text_newtonian_unit,
+        fieldstop_text_newtonian_labels
+    );
+    let mirrors =
+        TwoMirrorReadout { available: 0x5f, facts: 1, separation_um: 612_345, ..TwoMirrorReadout::default() };
+    pages!(
+        mirrors,
+        two_mirror_row,
+        TwoMirrorRow,
+        two_mirror_line,
+        TWO_MIRROR_LABELS,
+        fieldstop_text_two_mirror_line,
+        fieldstop_text_two_mirror_value,
+        fieldstop_text_two_mirror_number,
+        fieldstop_text_two_mirror_unit,
+        fieldstop_text_two_mirror_labels
+    );
+}
+
+#[test]
+fn cautions() {
+    for (number, sentence) in [
+        (FIELDSTOP_CAUTION_HIGH_EYEPIECE, HIGH_EYEPIECE_CAUTION),
+        (FIELDSTOP_CAUTION_SUN, SUN_CAUTION),
+        (2, ""),
+        (255, ""),
+    ] {
+        let given = fieldstop_text_caution(number);
+        assert_eq!(unsafe { CStr::from_ptr(given) }.to_str(), Ok(sentence));
+        for columns in [8, 16, 20, 40] {
+            let lines = unsafe { fieldstop_text_caution_lines(given, columns) };
+            assert_eq!(lines, caution_lines(sentence, columns));
+            for line in [0, 1, lines, 255] {
+                let mut expected = [0; 64];
+                let length = caution_line(sentence, columns, line, &mut expected).unwrap();
+                let mut text = [0x55; 64];
+                let mut given_length = 0;
+                let call = |text, capacity, length| unsafe {
+                    fieldstop_text_caution_line(given, columns, line, text, capacity, length)
+                };
+                assert_eq!(call(null_mut(), 64, &mut given_length), 0x0401);
+                assert_eq!(call(text.as_mut_ptr().cast(), 64, null_mut()), 0x0601);
+                assert_eq!(call(text.as_mut_ptr().cast(), u16::from(columns) - 1, &mut given_length), 6);
+                assert_eq!((text, given_length), ([0x55; 64], 0));
+                assert_eq!(call(text.as_mut_ptr().cast(), 64, &mut given_length), 0);
+                assert_eq!((usize::from(given_length), &text[..length]), (length, &expected[..length]));
+            }
+        }
+    }
+    let mut length = 0;
+    let mut text = [0; 64];
+    unsafe {
+        assert_eq!(fieldstop_text_caution_line(null(), 20, 0, text.as_mut_ptr(), 64, &mut length), 0x0101);
+        let some = fieldstop_text_caution(0);
+        assert_eq!(fieldstop_text_caution_line(some, 7, 0, text.as_mut_ptr(), 64, &mut length), 0x0203);
+        assert_eq!(fieldstop_text_caution_lines(null(), 20), 0);
+    }
+}
+
+#[test]
 fn labels_and_styles() {
     let same = |labels: *const *const c_char, expected: &[&str]| {
         for (at, expected) in expected.iter().enumerate() {
@@ -230,6 +330,12 @@ fn labels_and_styles() {
     same(fieldstop_text_visual_labels_short(), &VISUAL_LABELS_SHORT);
     same(fieldstop_text_camera_labels(), &CAMERA_LABELS);
     same(fieldstop_text_camera_labels_short(), &CAMERA_LABELS_SHORT);
+    same(fieldstop_text_focus_labels(), &FOCUS_LABELS);
+    same(fieldstop_text_focus_labels_short(), &FOCUS_LABELS_SHORT);
+    same(fieldstop_text_newtonian_labels(), &NEWTONIAN_LABELS);
+    same(fieldstop_text_newtonian_labels_short(), &NEWTONIAN_LABELS_SHORT);
+    same(fieldstop_text_two_mirror_labels(), &TWO_MIRROR_LABELS);
+    same(fieldstop_text_two_mirror_labels_short(), &TWO_MIRROR_LABELS_SHORT);
     unsafe {
         assert_eq!(*fieldstop_text_style_ascii(), TextStyle::ASCII);
         assert_eq!(*fieldstop_text_style_utf8(), TextStyle::UTF8);
@@ -265,6 +371,12 @@ fn constants() {
     assert_eq!(FIELDSTOP_VISUAL_ROW_EXIT_PUPIL, VisualRow::ExitPupil as u8);
     assert_eq!(FIELDSTOP_CAMERA_ROW_T_NUMBER, CameraRow::TNumber as u8);
     assert_eq!(FIELDSTOP_CAMERA_ROW_FINE_SAMPLING, CameraRow::FineSampling as u8);
+    assert_eq!(usize::from(FIELDSTOP_FOCUS_ROWS), FocusRow::ALL.len());
+    assert_eq!(FIELDSTOP_FOCUS_ROW_OUT_OF_FOCUS, FocusRow::OutOfFocus as u8);
+    assert_eq!(usize::from(FIELDSTOP_NEWTONIAN_ROWS), NewtonianRow::ALL.len());
+    assert_eq!(FIELDSTOP_NEWTONIAN_ROW_HIGH_REACHED, NewtonianRow::HighReached as u8);
+    assert_eq!(usize::from(FIELDSTOP_TWO_MIRROR_ROWS), TwoMirrorRow::ALL.len());
+    assert_eq!(FIELDSTOP_TWO_MIRROR_ROW_WIDER_THAN_TOLD, TwoMirrorRow::WiderThanTold as u8);
     for number in 0..=255 {
         if let Some(unit) = Unit::from_number(number) {
             assert_eq!(unit as u8, number);

@@ -39,6 +39,9 @@ fn camera() -> CameraReadout {
         plate_scale_mas_per_mm: 206_265,
         star_fwhm_uas: 2_512_000,
         pixels_per_fwhm_q16: 105_000,
+        cutoff_frequency_q16: 23_831_273,
+        nyquist_pixel_nm: 1_375,
+        diagonal_mas: 5_801_000,
     }
 }
 
@@ -56,8 +59,8 @@ fn visual_page(readout: &VisualReadout, labels: &[&str; 16], style: &TextStyle, 
     whole_page(|line, out| visual_line(readout, labels, style, columns, line, out), lines(16, columns))
 }
 
-fn camera_page(readout: &CameraReadout, labels: &[&str; 11], style: &TextStyle, columns: u8) -> Vec<String> {
-    whole_page(|line, out| camera_line(readout, labels, style, columns, line, out), lines(11, columns))
+fn camera_page(readout: &CameraReadout, labels: &[&str; 14], style: &TextStyle, columns: u8) -> Vec<String> {
+    whole_page(|line, out| camera_line(readout, labels, style, columns, line, out), lines(14, columns))
 }
 
 #[test]
@@ -128,13 +131,16 @@ fn camera_pages() {
         "T-number         5.7",
         "Focal length 1000 mm",
         "Plate scale  206\"/mm",
+        "Diagonal       1d37'",
+        "Cutoff        364/mm",
+        "Pixel up to  1.38 um",
         "Coarse sampling  yes",
         "Fine sampling     no",
     ];
     assert_eq!(camera_page(&camera(), &CAMERA_LABELS, &TextStyle::ASCII, 20), expected);
     let short = camera_page(&camera(), &CAMERA_LABELS_SHORT, &TextStyle::ASCII, 16);
     assert_eq!(short[2], "Scale  !1.57\"/px");
-    assert_eq!(short[9], "Coarse       yes");
+    assert_eq!(short[12], "Coarse       yes");
 }
 
 #[test]
@@ -167,10 +173,10 @@ fn not_available_is_a_dash() {
         let page = visual_page(&one, &VISUAL_LABELS, &TextStyle::ASCII, 20);
         assert_eq!(page[..12].iter().filter(|line| !line.ends_with(" -")).count(), 1, "bit {bit}");
     }
-    for bit in 0..9 {
+    for bit in 0..12 {
         let one = CameraReadout { available: 1 << bit, facts: 0, ..camera() };
         let page = camera_page(&one, &CAMERA_LABELS, &TextStyle::ASCII, 20);
-        assert_eq!(page[..9].iter().filter(|line| !line.ends_with(" -")).count(), 1, "bit {bit}");
+        assert_eq!(page[..12].iter().filter(|line| !line.ends_with(" -")).count(), 1, "bit {bit}");
     }
 }
 
@@ -190,7 +196,7 @@ fn each_fact_has_its_mark_and_its_words() {
             assert_eq!(line.ends_with(" yes"), number == told, "{line}");
         }
     }
-    for (bit, told) in [(CameraReadout::FACT_COARSE_SAMPLING, 9), (CameraReadout::FACT_FINE_SAMPLING, 10)] {
+    for (bit, told) in [(CameraReadout::FACT_COARSE_SAMPLING, 12), (CameraReadout::FACT_FINE_SAMPLING, 13)] {
         let page =
             camera_page(&CameraReadout { facts: bit, ..camera() }, &CAMERA_LABELS, &TextStyle::ASCII, 20);
         for (number, line) in page.iter().enumerate() {
@@ -276,7 +282,7 @@ fn no_english_label_is_cut() {
         assert!(CAMERA_LABELS_SHORT[number].len() <= 7, "{row:?}");
         assert_eq!(CameraRow::from_number(number as u8), Some(row));
     }
-    assert_eq!((VisualRow::from_number(16), CameraRow::from_number(11)), (None, None));
+    assert_eq!((VisualRow::from_number(16), CameraRow::from_number(14)), (None, None));
 }
 
 fn any_visual() -> impl Strategy<Value = VisualReadout> {

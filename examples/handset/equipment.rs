@@ -1,8 +1,9 @@
 //! The equipment of one file, in the library's own structs.
 
 use crate::table::{FileError, Table, parse};
-use fieldstop::setup::{Camera, Eyepiece, Observer, Telescope};
-use fieldstop::units::Q16;
+use fieldstop::convert::bam_from_mas_fx;
+use fieldstop::setup::{Camera, Eyepiece, Focuser, NewtonianLayout, Observer, Telescope, TwoMirrorLayout};
+use fieldstop::units::{Q16, SignedMilliarcseconds};
 
 /// Names stand on one line of the display.
 pub const DISPLAY_COLUMNS: usize = 20;
@@ -19,6 +20,10 @@ pub struct Equipment {
     pub telescopes: Vec<Named<Telescope>>,
     pub eyepieces: Vec<Named<Eyepiece>>,
     pub camera: Named<Camera>,
+    pub focuser: Focuser,
+    /// Each with the place of its telescope.
+    pub newtonians: Vec<(usize, NewtonianLayout)>,
+    pub two_mirrors: Vec<(usize, TwoMirrorLayout)>,
 }
 
 /// A field of the file for each member of a library struct, in the order in which the library counts them, and
@@ -52,17 +57,51 @@ const OBSERVER: &Members = &[
     ("wavelength_nm", "must be over 0"),
 ];
 
+const FOCUSER: &[&str] = &["motor_step_um", "defocus_um", "tube_length_mm", "expansion_ppm_per_k"];
+const NEWTONIAN: &Members = &[
+    ("focus_distance_mm", "must be a length"),
+    ("lit_field_mm", "must be a diameter"),
+    ("edge_offset_mm", "must be a length"),
+    ("diagonal_mm", "must be a diameter"),
+    ("axis_height_mm", "must be a length"),
+    ("reach_mm", "must be a length"),
+    ("altitude_deg", "must be from 0 to 90"),
+    ("lowest_altitude_deg", "must be from 0 to 90"),
+    ("highest_altitude_deg", "must be from the lowest altitude to 90"),
+    ("height_limit_mm", "must be a length"),
+];
+const TWO_MIRROR: &Members = &[
+    ("primary_focal_mm", "must be over 0"),
+    ("back_focus_mm", "must be a length"),
+    ("lit_field_mm", "must be a diameter"),
+];
+
 impl Equipment {
     pub fn read(file: &str) -> Result<Equipment, FileError> {
         let document = parse(file)?;
         let root = Table::root(file, document.get_ref());
-        root.only(&["school", "observer", "telescope", "eyepiece", "camera"])?;
+        root.only(&[
+            "school",
+            "observer",
+            "telescope",
+            "eyepiece",
+            "camera",
+            "focuser",
+            "newtonian",
+            "two_mirror",
+        ])?;
+        let school = root.name("school", 60)?;
+        let observer = observer(&root.table("observer")?)?;
+        let telescopes: Vec<_> = root.tables("telescope")?.iter().map(telescope).collect::<Result<_, _>>()?;
         Ok(Equipment {
-            school: root.name("school", 60)?,
-            observer: observer(&root.table("observer")?)?,
-            telescopes: root.tables("telescope")?.iter().map(telescope).collect::<Result<_, _>>()?,
+            school,
+            observer,
             eyepieces: root.tables("eyepiece")?.iter().map(eyepiece).collect::<Result<_, _>>()?,
             camera: camera(&root.table("camera")?)?,
+            focuser: if root.has("focuser") { focuser(&root.table("focuser")?)? } else { Focuser::default() },
+            newtonians: of_telescopes(&root, "newtonian", &telescopes, newtonian)?,
+            two_mirrors: of_telescopes(&root, "two_mirror", &telescopes, two_mirror)?,
+            telescopes,
         })
     }
 }
@@ -108,6 +147,74 @@ fn camera(table: &Table) -> Result<Named<Camera>, FileError> {
     };
     accept(table, CAMERA, item.check())?;
     Ok(Named { name: table.name("name", DISPLAY_COLUMNS)?, item })
+}
+
+fn focuser(table: &Table) -> Result<Focuser, FileError> {
+    table.only(FOCUSER)?;
+    Ok(Focuser {
+        motor_step_nm: table.steps("motor_step_um", 1000)?.unwrap_or(0),
+        defocus_nm: table.steps("defocus_um", 1000)?.unwrap_or(0),
+        tube_length_um: table.steps("tube_length_mm", 1000)?.unwrap_or(0),
+        expansion_ppb_per_k: table.steps("expansion_ppm_per_k", 1000)?.unwrap_or(0),
+    })
+}
+
+/// The tables of a kind, each for the telescope that it names.
+fn of_telescopes<T>(
+    root: &Table,
+    kind: &str,
+    telescopes: &[Named<Telescope>],
+    read: impl Fn(&Table) -> Result<T, FileError>,
+) -> Result<Vec<(usize, T)>, FileError> {
+    if !root.has(kind) {
+        return Ok(Vec::new());
+    }
+    let read_one = |table: &Table| {
+        let name = table.name("telescope", DISPLAY_COLUMNS)?;
+        let place = telescopes.iter().position(|telescope| telescope.name == name);
+        let place =
+            place.ok_or_else(|| table.error("telescope", "must be the name of a telescope".into()))?;
+        Ok((place, read(table)?))
+    };
+    root.tables(kind)?.iter().map(read_one).collect()
+}
+
+fn newtonian(table: &Table) -> Result<NewtonianLayout, FileError> {
+    table.only(&NEWTONIAN.iter().map(|member| member.0).chain(["telescope"]).collect::<Vec<_>>())?;
+    let item = NewtonianLayout {
+        focus_distance_um: table.steps("focus_distance_mm", 1000)?.unwrap_or(0),
+        lit_field_um: table.steps("lit_field_mm", 1000)?.unwrap_or(0),
+        edge_offset_um: table.steps("edge_offset_mm", 1000)?.unwrap_or(0),
+        diagonal_um: table.steps("diagonal_mm", 1000)?.unwrap_or(0),
+        axis_height_um: table.steps("axis_height_mm", 1000)?.unwrap_or(0),
+        reach_um: table.steps("reach_mm", 1000)?.unwrap_or(0),
+        altitude_bam: altitude(table, "altitude_deg")?.unwrap_or(0),
+        lowest_altitude_bam: altitude(table, "lowest_altitude_deg")?.unwrap_or(0),
+        highest_altitude_bam: altitude(table, "highest_altitude_deg")?.unwrap_or(1 << 30),
+        height_limit_um: table.steps("height_limit_mm", 1000)?.unwrap_or(0),
+    };
+    accept(table, NEWTONIAN, item.check())?;
+    Ok(item)
+}
+
+fn two_mirror(table: &Table) -> Result<TwoMirrorLayout, FileError> {
+    table.only(&TWO_MIRROR.iter().map(|member| member.0).chain(["telescope"]).collect::<Vec<_>>())?;
+    let item = TwoMirrorLayout {
+        primary_focal_um: table.steps("primary_focal_mm", 1000)?.unwrap_or(0),
+        back_focus_um: table.steps("back_focus_mm", 1000)?.unwrap_or(0),
+        lit_field_um: table.steps("lit_field_mm", 1000)?.unwrap_or(0),
+    };
+    accept(table, TWO_MIRROR, item.check())?;
+    Ok(item)
+}
+
+/// A binary angle, to the nearest.
+fn altitude(table: &Table, field: &str) -> Result<Option<i32>, FileError> {
+    let Some(mas) = table.steps::<i32>(field, 3_600_000)? else { return Ok(None) };
+    match bam_from_mas_fx(SignedMilliarcseconds(mas)) {
+        Ok(bam) => Ok(Some(bam.0 as i32)),
+        Err(error) => Err(table.error(field, error.to_string())),
+    }
 }
 
 fn observer(table: &Table) -> Result<Observer, FileError> {

@@ -20,8 +20,8 @@ usage: handset [--once] [FILE]
 Shows what the telescopes, eyepieces and camera of FILE give, page by page, as a display of
 four lines of twenty characters. Without FILE it takes the shipped equipment.toml.
 
---once  prints every page once for the first telescope and eyepiece, and ends; so does a
-        start without a terminal
+--once  prints every page once for the first telescope and eyepiece, and the layout of the other
+        telescopes, and ends; so does a start without a terminal
 ";
 
 const SHIPPED: (&str, &str) = ("equipment.toml", include_str!("equipment.toml"));
@@ -71,10 +71,17 @@ fn print_pages(equipment: &Equipment) -> std::io::Result<()> {
     let mut out = stdout().lock();
     let mut display = Display::new();
     writeln!(out, "{}", equipment.school)?;
-    for page in pages::all() {
-        let content = page.content(equipment, Choice::default()).map_err(std::io::Error::other)?;
-        display.show(&content);
-        write!(out, "\n{}", display.draw(&content))?;
+    for telescope in 0..equipment.telescopes.len() {
+        let pages = match telescope {
+            0 => pages::of_telescope(equipment, telescope),
+            _ => pages::of_layout(equipment, telescope),
+        };
+        for page in pages {
+            let choice = Choice { telescope, ..Choice::default() };
+            let content = page.content(equipment, choice).map_err(std::io::Error::other)?;
+            display.show(&content);
+            write!(out, "\n{}", display.draw(&content))?;
+        }
     }
     writeln!(out, "\n{CAUTION}")
 }

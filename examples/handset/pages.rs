@@ -1,9 +1,11 @@
 //! The pages: what is asked of the library for each, and its four lines.
 
 use crate::equipment::{DISPLAY_COLUMNS, Equipment};
-use fieldstop::setup::{CameraReadout, VisualReadout};
+use fieldstop::setup::{CameraReadout, FocusReadout, NewtonianReadout, TwoMirrorReadout, VisualReadout};
 use fieldstop::text::{
-    CAMERA_LABELS, CameraRow, TextStyle, VISUAL_LABELS, VisualRow, camera_line, visual_line,
+    CAMERA_LABELS, CameraRow, FOCUS_LABELS, FocusRow, HIGH_EYEPIECE_CAUTION, NEWTONIAN_LABELS, NewtonianRow,
+    TWO_MIRROR_LABELS, TextStyle, TwoMirrorRow, VISUAL_LABELS, VisualRow, camera_line, caution_line,
+    caution_lines, focus_line, newtonian_line, two_mirror_line, visual_line,
 };
 
 pub const DISPLAY_LINES: usize = 4;
@@ -23,6 +25,12 @@ pub enum Page {
     Visual(&'static [VisualRow]),
     /// These rows of the camera readout.
     Camera(&'static [CameraRow]),
+    /// And so on.
+    Focus(&'static [FocusRow]),
+    Newtonian(&'static [NewtonianRow]),
+    TwoMirror(&'static [TwoMirrorRow]),
+    /// Four lines of the caution for a high eyepiece, from this one on.
+    HighEyepiece(u8),
 }
 
 /// The lines of a page, what each means, and the facts to tell below.
@@ -33,12 +41,38 @@ pub struct Content {
     pub facts: Vec<&'static str>,
 }
 
-/// Every page in its order, as many rows to each as the display has lines.
-pub fn all() -> Vec<Page> {
+/// A telescope's pages in their order, as many rows to each as the display has lines.
+pub fn of_telescope(equipment: &Equipment, telescope: usize) -> Vec<Page> {
     let visual = const { &VisualRow::ALL }.chunks(DISPLAY_LINES).map(Page::Visual);
     let camera = const { &CameraRow::ALL }.chunks(DISPLAY_LINES).map(Page::Camera);
-    [Page::Names].into_iter().chain(visual).chain(camera).collect()
+    let focus = const { &FocusRow::ALL }.chunks(DISPLAY_LINES).map(Page::Focus);
+    let common = [Page::Names].into_iter().chain(visual).chain(camera).chain(focus);
+    common.chain(of_layout(equipment, telescope)).collect()
 }
+
+/// Those of its layout alone.
+pub fn of_layout(equipment: &Equipment, telescope: usize) -> Vec<Page> {
+    let mut pages = Vec::new();
+    if let Some(layout) = layout_of(&equipment.newtonians, telescope) {
+        pages.extend(const { &NewtonianRow::ALL }.chunks(DISPLAY_LINES).map(Page::Newtonian));
+        let readout =
+            NewtonianReadout::compute(&equipment.telescopes[telescope].item, layout, NewtonianReadout::ALL);
+        if readout.is_ok_and(|readout| readout.facts & HIGH != 0) {
+            let lines = caution_lines(HIGH_EYEPIECE_CAUTION, DISPLAY_COLUMNS as u8);
+            pages.extend((0..lines).step_by(DISPLAY_LINES).map(Page::HighEyepiece));
+        }
+    }
+    if layout_of(&equipment.two_mirrors, telescope).is_some() {
+        pages.extend(const { &TwoMirrorRow::ALL }.chunks(DISPLAY_LINES).map(Page::TwoMirror));
+    }
+    pages
+}
+
+fn layout_of<T>(layouts: &[(usize, T)], telescope: usize) -> Option<&T> {
+    layouts.iter().find(|(place, _)| *place == telescope).map(|(_, layout)| layout)
+}
+
+const HIGH: u32 = NewtonianReadout::FACT_HIGH_EYEPIECE | NewtonianReadout::FACT_HIGH_REACHED;
 
 impl Page {
     pub fn content(self, equipment: &Equipment, choice: Choice) -> Result<Content, fieldstop::Error> {
@@ -57,11 +91,9 @@ impl Page {
                 let wanted = rows.iter().fold(0, |bits, &row| bits | visual_bits(row));
                 let readout = VisualReadout::compute(&telescope.item, &eyepiece.item, observer, wanted)?;
                 for &row in rows {
-                    let mut line = [0; 64];
-                    let columns = DISPLAY_COLUMNS as u8;
-                    let bytes = visual_line(&readout, &VISUAL_LABELS, &STYLE, columns, row as u8, &mut line)?;
-                    content.lines.push(String::from_utf8_lossy(&line[..bytes]).into());
-                    content.meanings.push(visual_meaning(row));
+                    content.add(visual_meaning(row), |columns, out| {
+                        visual_line(&readout, &VISUAL_LABELS, &STYLE, columns, row as u8, out)
+                    })?;
                 }
                 let told = rows.iter().fold(0, |bits, &row| bits | visual_facts(row));
                 content.facts = facts(&VISUAL_FACTS, readout.facts & told);
@@ -70,17 +102,68 @@ impl Page {
                 let wanted = rows.iter().fold(0, |bits, &row| bits | camera_bits(row));
                 let readout = CameraReadout::compute(&telescope.item, &camera.item, observer, wanted)?;
                 for &row in rows {
-                    let mut line = [0; 64];
-                    let columns = DISPLAY_COLUMNS as u8;
-                    let bytes = camera_line(&readout, &CAMERA_LABELS, &STYLE, columns, row as u8, &mut line)?;
-                    content.lines.push(String::from_utf8_lossy(&line[..bytes]).into());
-                    content.meanings.push(camera_meaning(row));
+                    content.add(camera_meaning(row), |columns, out| {
+                        camera_line(&readout, &CAMERA_LABELS, &STYLE, columns, row as u8, out)
+                    })?;
                 }
                 let told = rows.iter().fold(0, |bits, &row| bits | camera_facts(row));
                 content.facts = facts(&CAMERA_FACTS, readout.facts & told);
             }
+            Page::Focus(rows) => {
+                let readout =
+                    FocusReadout::compute(&telescope.item, &equipment.focuser, observer, FocusReadout::ALL)?;
+                for &row in rows {
+                    content.add(focus_meaning(row), |columns, out| {
+                        focus_line(&readout, &FOCUS_LABELS, &STYLE, columns, row as u8, out)
+                    })?;
+                }
+                let told = rows.iter().fold(0, |bits, &row| bits | focus_facts(row));
+                content.facts = facts(&FOCUS_FACTS, readout.facts & told);
+            }
+            Page::Newtonian(rows) => {
+                let layout = layout_of(&equipment.newtonians, choice.telescope).copied().unwrap_or_default();
+                let readout = NewtonianReadout::compute(&telescope.item, &layout, NewtonianReadout::ALL)?;
+                for &row in rows {
+                    content.add(newtonian_meaning(row), |columns, out| {
+                        newtonian_line(&readout, &NEWTONIAN_LABELS, &STYLE, columns, row as u8, out)
+                    })?;
+                }
+                let told = rows.iter().fold(0, |bits, &row| bits | newtonian_facts(row));
+                content.facts = facts(&NEWTONIAN_FACTS, readout.facts & told);
+            }
+            Page::TwoMirror(rows) => {
+                let layout = layout_of(&equipment.two_mirrors, choice.telescope).copied().unwrap_or_default();
+                let readout = TwoMirrorReadout::compute(&telescope.item, &layout, TwoMirrorReadout::ALL)?;
+                for &row in rows {
+                    content.add(two_mirror_meaning(row), |columns, out| {
+                        two_mirror_line(&readout, &TWO_MIRROR_LABELS, &STYLE, columns, row as u8, out)
+                    })?;
+                }
+                content.facts = facts(&TWO_MIRROR_FACTS, readout.facts);
+            }
+            Page::HighEyepiece(first) => {
+                for line in first..first + DISPLAY_LINES as u8 {
+                    content
+                        .add("", |columns, out| caution_line(HIGH_EYEPIECE_CAUTION, columns, line, out))?;
+                }
+            }
         }
         Ok(content)
+    }
+}
+
+impl Content {
+    /// A line that the library writes.
+    fn add(
+        &mut self,
+        meaning: &'static str,
+        write: impl FnOnce(u8, &mut [u8]) -> Result<usize, fieldstop::Error>,
+    ) -> Result<(), fieldstop::Error> {
+        let mut line = [0; 64];
+        let bytes = write(DISPLAY_COLUMNS as u8, &mut line)?;
+        self.lines.push(String::from_utf8_lossy(&line[..bytes]).into());
+        self.meanings.push(meaning);
+        Ok(())
     }
 }
 
@@ -117,6 +200,51 @@ const CAMERA_FACTS: [(u32, &str); 2] = [
         "Over three pixels to a star's width: no more detail, less light in each.",
     ),
 ];
+
+const FOCUS_FACTS: [(u32, &str); 2] = [
+    (
+        FocusReadout::FACT_COARSE_STEP,
+        "One motor step is more than the depth of focus: the best may lie between two.",
+    ),
+    (FocusReadout::FACT_OUT_OF_FOCUS, "So far off the wavefront errs by more than a quarter wave."),
+];
+
+const NEWTONIAN_FACTS: [(u32, &str); 4] = [
+    (NewtonianReadout::FACT_SMALL_DIAGONAL, "The diagonal in place does not light the whole field wanted."),
+    (
+        NewtonianReadout::FACT_WIDER_THAN_TOLD,
+        "The diagonal is wider than the obstruction in the telescope's entry.",
+    ),
+    (NewtonianReadout::FACT_HIGH_EYEPIECE, "The eyepiece is above the height set: see the caution."),
+    (NewtonianReadout::FACT_HIGH_REACHED, "The eyepiece gets above the height set: see the caution."),
+];
+
+const TWO_MIRROR_FACTS: [(u32, &str); 1] = [(
+    TwoMirrorReadout::FACT_WIDER_THAN_TOLD,
+    "The secondary is wider than the obstruction in the telescope's entry.",
+)];
+
+fn focus_facts(row: FocusRow) -> u32 {
+    use FocusReadout as R;
+    match row {
+        FocusRow::DepthSteps | FocusRow::CoarseStep => R::FACT_COARSE_STEP,
+        FocusRow::Blur | FocusRow::BlurAngle | FocusRow::Wavefront | FocusRow::OutOfFocus => {
+            R::FACT_OUT_OF_FOCUS
+        }
+        _ => 0,
+    }
+}
+
+fn newtonian_facts(row: NewtonianRow) -> u32 {
+    use NewtonianReadout as R;
+    match row {
+        NewtonianRow::Diagonal | NewtonianRow::SmallDiagonal => R::FACT_SMALL_DIAGONAL,
+        NewtonianRow::Obstruction | NewtonianRow::WiderThanTold => R::FACT_WIDER_THAN_TOLD,
+        NewtonianRow::EyepieceHeight | NewtonianRow::HighEyepiece => R::FACT_HIGH_EYEPIECE,
+        NewtonianRow::GreatestHeight | NewtonianRow::HighReached => R::FACT_HIGH_REACHED,
+        _ => 0,
+    }
+}
 
 /// The facts that belong to a row.
 fn visual_facts(row: VisualRow) -> u32 {
@@ -174,6 +302,9 @@ fn camera_bits(row: CameraRow) -> u32 {
         CameraRow::TNumber => R::T_NUMBER,
         CameraRow::FocalLength => R::FOCAL_LENGTH,
         CameraRow::PlateScale => R::PLATE_SCALE,
+        CameraRow::Diagonal => R::DIAGONAL,
+        CameraRow::Cutoff => R::CUTOFF_FREQUENCY,
+        CameraRow::NyquistPixel => R::NYQUIST_PIXEL,
     }
 }
 
@@ -209,7 +340,54 @@ fn camera_meaning(row: CameraRow) -> &'static str {
         CameraRow::TNumber => "focal ratio that exposes as long, losses included",
         CameraRow::FocalLength => "of the telescope, Barlow included",
         CameraRow::PlateScale => "sky to one millimetre at the focus",
+        CameraRow::Diagonal => "sky from corner to corner of the picture",
+        CameraRow::Cutoff => "finest detail that the optics pass at the focus",
+        CameraRow::NyquistPixel => "largest pixel that loses nothing of it",
         CameraRow::CoarseSampling => "are there under two pixels to a star?",
         CameraRow::FineSampling => "are there over three pixels to a star?",
+    }
+}
+
+fn focus_meaning(row: FocusRow) -> &'static str {
+    match row {
+        FocusRow::DepthOfFocus => "each side of the best focus, to a quarter wave",
+        FocusRow::DepthSteps => "the same in steps of the motor",
+        FocusRow::Temperature => "when the tube's growth has used it up",
+        FocusRow::Blur => "a star's width at the defocus asked about",
+        FocusRow::BlurAngle => "the same on the sky",
+        FocusRow::Wavefront => "error of the wavefront there",
+        FocusRow::FocalRatio => "focal length over aperture, Barlow included",
+        FocusRow::CoarseStep => "is a step of the motor more than the depth?",
+        FocusRow::OutOfFocus => "is the defocus more than the depth?",
+    }
+}
+
+fn newtonian_meaning(row: NewtonianRow) -> &'static str {
+    match row {
+        NewtonianRow::Diagonal => "minor axis that the lit field needs",
+        NewtonianRow::DiagonalOffset => "of its centre, from the focuser and to the primary",
+        NewtonianRow::Obstruction => "the diagonal in place over the aperture",
+        NewtonianRow::EdgeLight => "what the edge of the field gets of it",
+        NewtonianRow::EyepieceHeight => "its height above the floor now",
+        NewtonianRow::GreatestHeight => "the same at the altitude where it is highest",
+        NewtonianRow::Beam => "width of the light at the diagonal",
+        NewtonianRow::BeamShift => "off the axis there, for the field's edge",
+        NewtonianRow::SmallDiagonal => "is the one in place under what is needed?",
+        NewtonianRow::WiderThanTold => "does it hide more than the telescope's entry says?",
+        NewtonianRow::HighEyepiece => "is the eyepiece above the height set?",
+        NewtonianRow::HighReached => "does it get there?",
+    }
+}
+
+fn two_mirror_meaning(row: TwoMirrorRow) -> &'static str {
+    match row {
+        TwoMirrorRow::Separation => "from mirror to mirror",
+        TwoMirrorRow::Secondary => "its diameter, for the lit field",
+        TwoMirrorRow::Radius => "of curvature, convex",
+        TwoMirrorRow::Obstruction => "the secondary over the aperture",
+        TwoMirrorRow::SecondaryMagnification => "how much longer it makes the focal length",
+        TwoMirrorRow::Length => "from the secondary to the focus",
+        TwoMirrorRow::LengthShare => "how short that is for the focal length",
+        TwoMirrorRow::WiderThanTold => "does it hide more than the telescope's entry says?",
     }
 }

@@ -21,11 +21,12 @@ pub fn run(equipment: &Equipment) -> io::Result<()> {
 }
 
 fn turn_pages(equipment: &Equipment) -> io::Result<()> {
-    let pages = pages::all();
     let mut page = 0;
     let mut choice = Choice::default();
     let mut display = Display::new();
     loop {
+        let pages = pages::of_telescope(equipment, choice.telescope);
+        page = page.min(pages.len() - 1);
         let content = pages[page].content(equipment, choice).map_err(io::Error::other)?;
         display.show(&content);
         let screen = format!(

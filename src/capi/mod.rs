@@ -14,9 +14,14 @@ pub mod light;
 pub mod resolution;
 pub mod setup;
 pub mod setup_choice;
+pub mod setup_layout;
 mod short;
 pub mod status;
 pub mod text;
+pub mod text_caution;
+pub mod text_focus;
+pub mod text_newtonian;
+pub mod text_two_mirror;
 pub mod units;
 
 use crate::status::{Cause, Error};

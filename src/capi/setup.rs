@@ -63,8 +63,14 @@ pub const FIELDSTOP_CAMERA_PLATE_SCALE: u32 = 0x0040;
 pub const FIELDSTOP_CAMERA_STAR_FWHM: u32 = 0x0080;
 /// Camera readout, wanted and available: pixels_per_fwhm_q16.
 pub const FIELDSTOP_CAMERA_PIXELS_PER_FWHM: u32 = 0x0100;
+/// Camera readout, wanted and available: cutoff_frequency_q16.
+pub const FIELDSTOP_CAMERA_CUTOFF_FREQUENCY: u32 = 0x0200;
+/// Camera readout, wanted and available: nyquist_pixel_nm.
+pub const FIELDSTOP_CAMERA_NYQUIST_PIXEL: u32 = 0x0400;
+/// Camera readout, wanted and available: diagonal_mas.
+pub const FIELDSTOP_CAMERA_DIAGONAL: u32 = 0x0800;
 /// Camera readout, wanted: every member.
-pub const FIELDSTOP_CAMERA_ALL: u32 = 0x01ff;
+pub const FIELDSTOP_CAMERA_ALL: u32 = 0x0fff;
 /// Camera readout, fact: under two pixels to the star image (common practice, after Shannon 1949).
 pub const FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING: u32 = 0x0001;
 /// Camera readout, fact: over three pixels to the star image (common practice).
@@ -99,6 +105,9 @@ const _: () = {
     assert!(FIELDSTOP_CAMERA_PLATE_SCALE == CameraReadout::PLATE_SCALE);
     assert!(FIELDSTOP_CAMERA_STAR_FWHM == CameraReadout::STAR_FWHM);
     assert!(FIELDSTOP_CAMERA_PIXELS_PER_FWHM == CameraReadout::PIXELS_PER_FWHM);
+    assert!(FIELDSTOP_CAMERA_CUTOFF_FREQUENCY == CameraReadout::CUTOFF_FREQUENCY);
+    assert!(FIELDSTOP_CAMERA_NYQUIST_PIXEL == CameraReadout::NYQUIST_PIXEL);
+    assert!(FIELDSTOP_CAMERA_DIAGONAL == CameraReadout::DIAGONAL);
     assert!(FIELDSTOP_CAMERA_ALL == CameraReadout::ALL);
     assert!(FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING == CameraReadout::FACT_COARSE_SAMPLING);
     assert!(FIELDSTOP_CAMERA_FACT_FINE_SAMPLING == CameraReadout::FACT_FINE_SAMPLING);

@@ -106,7 +106,7 @@ pub const FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT: u8 = 14;
 pub const FIELDSTOP_VISUAL_ROW_SEEING_LIMITED: u8 = 15;
 
 /// Rows of the camera pages, and labels that they need.
-pub const FIELDSTOP_CAMERA_ROWS: u8 = 11;
+pub const FIELDSTOP_CAMERA_ROWS: u8 = 14;
 /// Camera row: frame width.
 pub const FIELDSTOP_CAMERA_ROW_FRAME_WIDTH: u8 = 0;
 /// Camera row: frame height.
@@ -125,10 +125,16 @@ pub const FIELDSTOP_CAMERA_ROW_T_NUMBER: u8 = 6;
 pub const FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH: u8 = 7;
 /// Camera row: plate scale.
 pub const FIELDSTOP_CAMERA_ROW_PLATE_SCALE: u8 = 8;
+/// Camera row: diagonal.
+pub const FIELDSTOP_CAMERA_ROW_DIAGONAL: u8 = 9;
+/// Camera row: cutoff.
+pub const FIELDSTOP_CAMERA_ROW_CUTOFF: u8 = 10;
+/// Camera row: nyquist pixel.
+pub const FIELDSTOP_CAMERA_ROW_NYQUIST_PIXEL: u8 = 11;
 /// Camera row: coarse sampling.
-pub const FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING: u8 = 9;
+pub const FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING: u8 = 12;
 /// Camera row: fine sampling.
-pub const FIELDSTOP_CAMERA_ROW_FINE_SAMPLING: u8 = 10;
+pub const FIELDSTOP_CAMERA_ROW_FINE_SAMPLING: u8 = 13;
 
 /// Gives the style of plain ASCII; never null.
 ///
@@ -726,10 +732,10 @@ pub unsafe extern "C" fn fieldstop_text_changed(
 
 /// The bytes of a label up to its zero byte.
 #[derive(Clone)]
-struct Label(*const c_char);
+pub(super) struct Label(*const c_char);
 
 impl Label {
-    fn empty() -> Label {
+    pub(super) fn empty() -> Label {
         Label(stored_text!(EMPTY, ""))
     }
 
@@ -737,10 +743,17 @@ impl Label {
     ///
     /// # Safety
     /// `labels` has one with this number, with a zero byte at its end, or a null pointer.
-    unsafe fn new(labels: *const *const c_char, number: u8) -> Label {
+    pub(super) unsafe fn new(labels: *const *const c_char, number: u8) -> Label {
         // SAFETY: the caller's promise.
-        let label = unsafe { (*labels.add(number.into()).cast::<Stored<*const c_char>>()).get() };
-        if label.is_null() { Label::empty() } else { Label(label) }
+        unsafe { Label::of((*labels.add(number.into()).cast::<Stored<*const c_char>>()).get()) }
+    }
+
+    /// This text; none for a null pointer.
+    ///
+    /// # Safety
+    /// `text` is null or has a zero byte at its end.
+    pub(super) unsafe fn of(text: *const c_char) -> Label {
+        if text.is_null() { Label::empty() } else { Label(text) }
     }
 }
 
@@ -758,12 +771,12 @@ impl Iterator for Label {
     }
 }
 
-const fn null(position: u8) -> fieldstop_status {
+pub(super) const fn null(position: u8) -> fieldstop_status {
     Error::new(Cause::NullPointer, position).status()
 }
 
 /// Copies a text into `out` and tells its length.
-fn put<P: Place>(text: impl Iterator<Item = u8> + Clone, out: &mut [P]) -> Result<usize, Error> {
+pub(super) fn put<P: Place>(text: impl Iterator<Item = u8> + Clone, out: &mut [P]) -> Result<usize, Error> {
     let length = text.clone().count();
     let out = out.get_mut(..length).ok_or(Error::new(Cause::NoRoom, 0))?;
     for (place, byte) in out.iter_mut().zip(text) {
@@ -776,7 +789,7 @@ fn put<P: Place>(text: impl Iterator<Item = u8> + Clone, out: &mut [P]) -> Resul
 ///
 /// # Safety
 /// Each pointer is null or as its function promises.
-unsafe fn write(
+pub(super) unsafe fn write(
     value: &Value,
     style: *const TextStyle,
     // As one argument, so that all go in registers on AVR.
@@ -810,7 +823,7 @@ unsafe fn write(
 /// # Safety
 /// Each pointer is null or goes to a style, to `capacity` bytes, to a place for the length.
 #[inline(always)]
-unsafe fn fill(
+pub(super) unsafe fn fill(
     style: *const TextStyle,
     [style_position, text_position, length_position]: [u8; 3],
     text: *mut c_char,
@@ -821,6 +834,26 @@ unsafe fn fill(
     if style.is_null() {
         return null(style_position);
     }
+    // SAFETY: not null, and the caller's promise.
+    let style = unsafe { &*style.cast::<StyleOfC>() };
+    // SAFETY: the caller's promise.
+    unsafe {
+        fill_without_style([text_position, length_position], text, capacity, length, |out| write(style, out))
+    }
+}
+
+/// The same where no style is needed.
+///
+/// # Safety
+/// Each pointer is null or goes to `capacity` bytes, to a place for the length.
+#[inline(always)]
+pub(super) unsafe fn fill_without_style(
+    [text_position, length_position]: [u8; 2],
+    text: *mut c_char,
+    capacity: u16,
+    length: *mut u16,
+    write: impl FnOnce(&mut [MaybeUninit<u8>]) -> Result<usize, Error>,
+) -> fieldstop_status {
     if text.is_null() {
         return null(text_position);
     }
@@ -828,10 +861,8 @@ unsafe fn fill(
         return null(length_position);
     }
     // SAFETY: not null, and the caller's promise.
-    let style = unsafe { &*style.cast::<StyleOfC>() };
-    // SAFETY: not null, and the caller's promise.
     let out = unsafe { slice::from_raw_parts_mut(text.cast(), capacity.into()) };
-    match write(style, out) {
+    match write(out) {
         Ok(bytes) => {
             // SAFETY: not null, and the caller's promise.
             unsafe { length.write(bytes as u16) };

@@ -1,6 +1,7 @@
 use super::{Camera, Observer, Telescope};
 use crate::optics::field::{focal_ratio_fx, frame_field_fx, pixel_scale_fx, plate_scale_fx};
-use crate::optics::imaging::pixels_per_fwhm_fx;
+use crate::optics::imaging::{diagonal_field_fx, nyquist_pixel_fx, pixels_per_fwhm_fx};
+use crate::optics::resolution::cutoff_frequency_fx;
 use crate::status::Error;
 use crate::units::{Micrometres, Nanometres};
 
@@ -33,6 +34,12 @@ pub struct CameraReadout {
     pub star_fwhm_uas: u32,
     /// Pixels as read out across that width.
     pub pixels_per_fwhm_q16: u32,
+    /// Finest detail that the optics pass at all, cycles per millimetre at the focus: 1 / (lambda N).
+    pub cutoff_frequency_q16: u32,
+    /// The coarsest pixel that loses nothing of it in still air, nanometres: lambda f k / (2 D).
+    pub nyquist_pixel_nm: u32,
+    /// Sky from corner to corner of the frame, milliarcseconds: 2 atan(p sqrt(c^2 + r^2) / (2 f k)).
+    pub diagonal_mas: u32,
 }
 
 /// Bits of `wanted` and `available`, and those of `facts`. Frozen; in C with FIELDSTOP_CAMERA_ before the
@@ -58,8 +65,14 @@ impl CameraReadout {
     pub const STAR_FWHM: u32 = 0x0080;
     /// `pixels_per_fwhm_q16`
     pub const PIXELS_PER_FWHM: u32 = 0x0100;
+    /// `cutoff_frequency_q16`
+    pub const CUTOFF_FREQUENCY: u32 = 0x0200;
+    /// `nyquist_pixel_nm`
+    pub const NYQUIST_PIXEL: u32 = 0x0400;
+    /// `diagonal_mas`
+    pub const DIAGONAL: u32 = 0x0800;
     /// Every member that there is.
-    pub const ALL: u32 = 0x01ff;
+    pub const ALL: u32 = 0x0fff;
 
     /// Under two pixels to the star image: detail that the telescope gives is lost between pixels. Judged
     /// where the pixels across the star image are wanted, like the next. Two to the width is common practice,
@@ -78,7 +91,10 @@ const FROM_FOCAL_LENGTH: u32 = FROM_PIXEL_SCALE
     | CameraReadout::T_NUMBER
     | CameraReadout::FRAME_WIDTH
     | CameraReadout::FRAME_HEIGHT
-    | CameraReadout::PLATE_SCALE;
+    | CameraReadout::PLATE_SCALE
+    | CameraReadout::CUTOFF_FREQUENCY
+    | CameraReadout::NYQUIST_PIXEL
+    | CameraReadout::DIAGONAL;
 
 /// Two and three pixels, Q16.16.
 const COARSE_Q16: u32 = 0x0002_0000;
@@ -136,6 +152,28 @@ impl CameraReadout {
                 frame_field_fx(pixel, u32::from(camera.rows), focal_length)
             );
             tell!(out, wanted, PLATE_SCALE, plate_scale_mas_per_mm, plate_scale_fx(focal_length));
+            let wavelength = Nanometres(observer.wavelength_nm);
+            tell!(
+                out,
+                wanted,
+                CUTOFF_FREQUENCY,
+                cutoff_frequency_q16,
+                cutoff_frequency_fx(focal_length, aperture, wavelength)
+            );
+            tell!(
+                out,
+                wanted,
+                NYQUIST_PIXEL,
+                nyquist_pixel_nm,
+                nyquist_pixel_fx(focal_length, aperture, wavelength)
+            );
+            tell!(
+                out,
+                wanted,
+                DIAGONAL,
+                diagonal_mas,
+                diagonal_field_fx(pixel, camera.columns, camera.rows, focal_length)
+            );
             if wants(FROM_PIXEL_SCALE)
                 && let Some(binned) = camera.pixel_nm.checked_mul(u32::from(camera.binning))
                 && let Ok(scale) = pixel_scale_fx(Nanometres(binned), focal_length)

@@ -2,7 +2,8 @@
 //!
 //! Fill a [`Telescope`], an [`Eyepiece`] or a [`Camera`], and an [`Observer`]; [`check`](Telescope::check)
 //! each when it is entered; then ask [`VisualReadout::compute`] or [`CameraReadout::compute`] for the values
-//! that a screen shows, as bits. Only those are computed, and what they share is computed once: a value is what
+//! that a screen shows, as bits. [`FocusReadout`], [`NewtonianReadout`] and [`TwoMirrorReadout`] do the same for a focuser
+//! and for the layout of a tube; [`VisualOutfit`] and [`CameraOutfit`] choose what to put in. Only those are computed, and what they share is computed once: a value is what
 //! the functions of [`optics`](crate::optics) give one after the other, with each result in between rounded to its
 //! unit.
 //!
@@ -64,9 +65,13 @@ mod camera;
 mod camera_choice;
 mod camera_readout;
 mod eyepiece;
+mod focus_readout;
+mod focuser;
+mod newtonian;
 mod observer;
 mod ranking;
 mod telescope;
+mod two_mirror;
 mod visual_choice;
 mod visual_readout;
 
@@ -74,8 +79,12 @@ pub use camera::Camera;
 pub use camera_choice::{CameraChoice, CameraOutfit, CameraTarget};
 pub use camera_readout::CameraReadout;
 pub use eyepiece::Eyepiece;
+pub use focus_readout::FocusReadout;
+pub use focuser::Focuser;
+pub use newtonian::{NewtonianLayout, NewtonianReadout};
 pub use observer::Observer;
 pub use telescope::Telescope;
+pub use two_mirror::{TwoMirrorLayout, TwoMirrorReadout};
 pub use visual_choice::{VisualChoice, VisualOutfit, VisualTarget};
 pub use visual_readout::VisualReadout;
 
@@ -126,5 +135,9 @@ const _: () = {
     assert!(size_of::<VisualChoice>() == 28 && offset_of!(VisualChoice, eyepiece) == 24);
     assert!(size_of::<CameraChoice>() == 36 && offset_of!(CameraChoice, camera) == 32);
     assert!(size_of::<VisualReadout>() == 56 && offset_of!(VisualReadout, limiting_magnitude_mmag) == 48);
-    assert!(size_of::<CameraReadout>() == 44 && offset_of!(CameraReadout, pixels_per_fwhm_q16) == 40);
+    assert!(size_of::<CameraReadout>() == 56 && offset_of!(CameraReadout, pixels_per_fwhm_q16) == 40);
+    assert!(size_of::<Focuser>() == 16 && size_of::<FocusReadout>() == 36);
+    assert!(size_of::<NewtonianLayout>() == 40 && offset_of!(NewtonianLayout, reach_um) == 20);
+    assert!(size_of::<NewtonianReadout>() == 40);
+    assert!(size_of::<TwoMirrorLayout>() == 12 && size_of::<TwoMirrorReadout>() == 36);
 };

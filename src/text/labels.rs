@@ -1,5 +1,6 @@
 //! English labels, of the length that the lines leave room for. A translation is another table of the same kind.
 
+use super::layout_page::{FocusRow, NewtonianRow, TwoMirrorRow};
 use super::page::{CameraRow, VisualRow};
 #[cfg(feature = "capi")]
 use crate::stored::{stored, stored_text};
@@ -69,6 +70,9 @@ labels! {
         "T-number",
         "Focal length",
         "Plate scale",
+        "Diagonal",
+        "Cutoff",
+        "Pixel up to",
         "Coarse sampling",
         "Fine sampling",
     ];
@@ -83,7 +87,86 @@ labels! {
         "T",
         "Focal",
         "Plate",
+        "Diag.",
+        "Cutoff",
+        "Pixel",
         "Coarse",
         "Fine",
+    ];
+    /// Labels of the focus pages for 20 columns and more.
+    FOCUS_LABELS, FOCUS_LABELS_FOR_C: FocusRow::ALL.len(), [
+        "Focus depth",
+        "Motor steps",
+        "Refocus after",
+        "Blur",
+        "Blur on sky",
+        "Wavefront",
+        "Focal ratio",
+        "Coarse steps",
+        "Out of focus",
+    ];
+    /// Labels of the focus pages for 8 and 16 columns.
+    FOCUS_LABELS_SHORT, FOCUS_LABELS_SHORT_FOR_C: FocusRow::ALL.len(), [
+        "Depth",
+        "Steps",
+        "Refocus",
+        "Blur",
+        "On sky",
+        "Wave",
+        "F ratio",
+        "Coarse",
+        "Outside",
+    ];
+    /// Labels of the pages of a Newtonian's layout for 20 columns and more.
+    NEWTONIAN_LABELS, NEWTONIAN_LABELS_FOR_C: NewtonianRow::ALL.len(), [
+        "Diagonal",
+        "Offset",
+        "Obstruction",
+        "Edge light",
+        "Eyepiece at",
+        "Eyepiece max",
+        "Beam",
+        "Beam shift",
+        "Small diagonal",
+        "Wider than told",
+        "High eyepiece",
+        "High reached",
+    ];
+    /// Labels of the pages of a Newtonian's layout for 8 and 16 columns.
+    NEWTONIAN_LABELS_SHORT, NEWTONIAN_LABELS_SHORT_FOR_C: NewtonianRow::ALL.len(), [
+        "Diagon.",
+        "Offset",
+        "Obstr.",
+        "Edge",
+        "Height",
+        "Highest",
+        "Beam",
+        "Shift",
+        "Small",
+        "Wider",
+        "High",
+        "Up high",
+    ];
+    /// Labels of the pages of two mirrors' layout for 20 columns and more.
+    TWO_MIRROR_LABELS, TWO_MIRROR_LABELS_FOR_C: TwoMirrorRow::ALL.len(), [
+        "Separation",
+        "Secondary",
+        "Its radius",
+        "Obstruction",
+        "Second. magn.",
+        "Length",
+        "Of focal len.",
+        "Wider than told",
+    ];
+    /// Labels of the pages of two mirrors' layout for 8 and 16 columns.
+    TWO_MIRROR_LABELS_SHORT, TWO_MIRROR_LABELS_SHORT_FOR_C: TwoMirrorRow::ALL.len(), [
+        "Separ.",
+        "Second.",
+        "Radius",
+        "Obstr.",
+        "Magnif.",
+        "Length",
+        "Share",
+        "Wider",
     ];
 }

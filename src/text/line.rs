@@ -17,7 +17,7 @@ pub struct Row {
 }
 
 /// The narrowest display, and the narrowest on which label and value share a line.
-const NARROWEST: u8 = 8;
+pub(super) const NARROWEST: u8 = 8;
 const ONE_LINE: u8 = 16;
 
 /// Lines that a number of rows take on a display so wide: one each from 16 columns on, two below.

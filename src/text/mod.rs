@@ -41,7 +41,7 @@
 //!
 //! # Pages
 //!
-//! [`visual_line`] and [`camera_line`] write one line of a character display at a time, for 8x2, 16x2, 20x2, 16x4, 20x4
+//! [`visual_line`], [`camera_line`], [`focus_line`], [`newtonian_line`] and [`two_mirror_line`] write one line of a character display at a time, for 8x2, 16x2, 20x2, 16x4, 20x4
 //! and any other size from 8 columns on: say the columns, and count the lines over all pages. Line `r` of page `p` is
 //! `p * rows + r`; [`lines`] tells how many there are, and a line behind the last is blank.
 //!
@@ -67,8 +67,10 @@
 //! [`CameraRow`]. For a graphic display, take the parts: the label from the table, and the [`Row`] of [`visual_row`] or
 //! [`camera_row`] with its value, which has [`Value::without_unit`] and [`Value::unit`].
 
+mod caution;
 mod digits;
 mod labels;
+mod layout_page;
 mod line;
 mod page;
 #[cfg(feature = "heapless")]
@@ -77,7 +79,15 @@ mod style;
 mod value;
 mod write;
 
-pub use labels::{CAMERA_LABELS, CAMERA_LABELS_SHORT, VISUAL_LABELS, VISUAL_LABELS_SHORT};
+pub use caution::{HIGH_EYEPIECE_CAUTION, SUN_CAUTION, caution_line, caution_lines};
+pub use labels::{
+    CAMERA_LABELS, CAMERA_LABELS_SHORT, FOCUS_LABELS, FOCUS_LABELS_SHORT, NEWTONIAN_LABELS,
+    NEWTONIAN_LABELS_SHORT, TWO_MIRROR_LABELS, TWO_MIRROR_LABELS_SHORT, VISUAL_LABELS, VISUAL_LABELS_SHORT,
+};
+pub use layout_page::{
+    FocusRow, NewtonianRow, TwoMirrorRow, focus_line, focus_row, newtonian_line, newtonian_row,
+    two_mirror_line, two_mirror_row,
+};
 pub use line::{Row, Span, changed, lines};
 pub use page::{CameraRow, VisualRow, camera_line, camera_row, visual_line, visual_row};
 #[cfg(feature = "heapless")]
@@ -87,9 +97,12 @@ pub use value::{AngleForm, Value};
 
 #[cfg(feature = "capi")]
 pub(crate) use {
+    caution::{line_of, lines_of},
     digits::{has_at_most, split_small_hundred, split_small_ten},
     labels::{
-        CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C,
+        CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, FOCUS_LABELS_FOR_C, FOCUS_LABELS_SHORT_FOR_C,
+        NEWTONIAN_LABELS_FOR_C, NEWTONIAN_LABELS_SHORT_FOR_C, TWO_MIRROR_LABELS_FOR_C,
+        TWO_MIRROR_LABELS_SHORT_FOR_C, VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C,
     },
     line::{change, row_of, write_line},
     style::{Look, StyleOfC},

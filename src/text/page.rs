@@ -31,6 +31,7 @@ macro_rules! rows {
         }
     };
 }
+pub(super) use rows;
 
 rows! {
     /// The rows of the visual pages. The numbers are frozen.
@@ -71,7 +72,7 @@ rows! {
 
 rows! {
     /// The rows of the camera pages. The numbers are frozen.
-    CameraRow, 11:
+    CameraRow, 14:
     /// Across the columns.
     FrameWidth = 0,
     /// Across the rows.
@@ -90,17 +91,23 @@ rows! {
     FocalLength = 7,
     /// Sky to a millimetre at the focus.
     PlateScale = 8,
+    /// From corner to corner.
+    Diagonal = 9,
+    /// The finest detail that the optics pass.
+    Cutoff = 10,
+    /// The coarsest pixel that loses nothing of it.
+    NyquistPixel = 11,
     /// Fact: under two pixels to the star image.
-    CoarseSampling = 9,
+    CoarseSampling = 12,
     /// Fact: over three pixels to the star image.
-    FineSampling = 10,
+    FineSampling = 13,
 }
 
 /// How a row is shown.
 #[derive(Clone, Copy)]
-struct Plan {
+pub(super) struct Plan {
     /// Number of the member, which is the bit in `available`; for a fact, of the one that it is judged by.
-    member: u8,
+    pub(super) member: u8,
     /// Decimal places of the member's unit, or one of the codes below.
     scale: u8,
     /// At most, while no more than three figures come of it; for a fact, the second member that it is judged by.
@@ -111,19 +118,19 @@ struct Plan {
     facts: u8,
 }
 
-const Q16_RATIO: u8 = 16;
-const Q16_PERCENT: u8 = Q16_RATIO + 2;
-const ANGLE: u8 = 32;
+pub(super) const Q16_RATIO: u8 = 16;
+pub(super) const Q16_PERCENT: u8 = Q16_RATIO + 2;
+pub(super) const ANGLE: u8 = 32;
 const MAGNITUDE: u8 = 33;
 const FACT: u8 = 34;
 /// No member has this bit.
 const NEVER: u8 = 31;
 
-const fn plan(member: u8, scale: u8, decimals: u8, unit: Unit, field: u8, facts: u32) -> Plan {
+pub(super) const fn plan(member: u8, scale: u8, decimals: u8, unit: Unit, field: u8, facts: u32) -> Plan {
     Plan { member, scale, decimals, unit, field, facts: facts as u8 }
 }
 
-const fn fact(member: u8, second: u8, fact: u32) -> Plan {
+pub(super) const fn fact(member: u8, second: u8, fact: u32) -> Plan {
     plan(member, FACT, second, Unit::None, 3, fact)
 }
 
@@ -161,6 +168,9 @@ stored! {
         plan(2, Q16_RATIO, 1, Unit::None, 7, 0),
         plan(0, 3, 0, Unit::Millimetre, 7, 0),
         plan(6, 3, 1, Unit::SecondPerMillimetre, 8, 0),
+        plan(11, ANGLE, 1, Unit::None, 7, 0),
+        plan(9, Q16_RATIO, 1, Unit::PerMillimetre, 8, 0),
+        plan(10, 3, 2, Unit::Micrometre, 8, 0),
         fact(8, 8, CameraReadout::FACT_COARSE_SAMPLING),
         fact(8, 8, CameraReadout::FACT_FINE_SAMPLING),
     ];
@@ -198,13 +208,16 @@ pub fn camera_row(readout: &CameraReadout, row: CameraRow) -> Row {
         5 => readout.pixel_scale_uas,
         6 => readout.plate_scale_mas_per_mm,
         7 => readout.star_fwhm_uas,
+        9 => readout.cutoff_frequency_q16,
+        10 => readout.nyquist_pixel_nm,
+        11 => readout.diagonal_mas,
         _ => readout.pixels_per_fwhm_q16,
     };
     plan.row(readout.available, readout.facts, member)
 }
 
 impl Plan {
-    fn row(&self, available: u32, facts: u32, member: u32) -> Row {
+    pub(super) fn row(&self, available: u32, facts: u32, member: u32) -> Row {
         let holds = facts & u32::from(self.facts) != 0;
         let known = |member: u8| available >> (member & 31) & 1 != 0;
         let (value, fact) = if self.scale == FACT {
@@ -278,6 +291,6 @@ pub fn camera_line(
     write_line(row, label(labels, number), style, columns, line, out)
 }
 
-fn label<'a>(labels: &'a [&str], number: u8) -> impl Iterator<Item = u8> + Clone + use<'a> {
+pub(super) fn label<'a>(labels: &'a [&str], number: u8) -> impl Iterator<Item = u8> + Clone + use<'a> {
     labels.get(usize::from(number)).map_or("", |label| label).bytes()
 }

@@ -45,7 +45,7 @@ HOLDS(holds_38, offsetof(fieldstop_visual_readout, resolving_magnification_q16) 
 HOLDS(holds_39, offsetof(fieldstop_visual_readout, effective_aperture_um) == 44 && sizeof(((fieldstop_visual_readout *)0)->effective_aperture_um) == 4);
 HOLDS(holds_40, offsetof(fieldstop_visual_readout, limiting_magnitude_mmag) == 48 && sizeof(((fieldstop_visual_readout *)0)->limiting_magnitude_mmag) == 4);
 HOLDS(holds_41, offsetof(fieldstop_visual_readout, surface_brightness_q16) == 52 && sizeof(((fieldstop_visual_readout *)0)->surface_brightness_q16) == 4);
-HOLDS(holds_42, sizeof(fieldstop_camera_readout) == 44);
+HOLDS(holds_42, sizeof(fieldstop_camera_readout) == 56);
 HOLDS(holds_43, offsetof(fieldstop_camera_readout, available) == 0 && sizeof(((fieldstop_camera_readout *)0)->available) == 4);
 HOLDS(holds_44, offsetof(fieldstop_camera_readout, facts) == 4 && sizeof(((fieldstop_camera_readout *)0)->facts) == 4);
 HOLDS(holds_45, offsetof(fieldstop_camera_readout, focal_length_um) == 8 && sizeof(((fieldstop_camera_readout *)0)->focal_length_um) == 4);
@@ -57,168 +57,294 @@ HOLDS(holds_50, offsetof(fieldstop_camera_readout, pixel_scale_uas) == 28 && siz
 HOLDS(holds_51, offsetof(fieldstop_camera_readout, plate_scale_mas_per_mm) == 32 && sizeof(((fieldstop_camera_readout *)0)->plate_scale_mas_per_mm) == 4);
 HOLDS(holds_52, offsetof(fieldstop_camera_readout, star_fwhm_uas) == 36 && sizeof(((fieldstop_camera_readout *)0)->star_fwhm_uas) == 4);
 HOLDS(holds_53, offsetof(fieldstop_camera_readout, pixels_per_fwhm_q16) == 40 && sizeof(((fieldstop_camera_readout *)0)->pixels_per_fwhm_q16) == 4);
-HOLDS(holds_54, sizeof(fieldstop_visual_target) == 20);
-HOLDS(holds_55, offsetof(fieldstop_visual_target, size_mas) == 0 && sizeof(((fieldstop_visual_target *)0)->size_mas) == 4);
-HOLDS(holds_56, offsetof(fieldstop_visual_target, room_q16) == 4 && sizeof(((fieldstop_visual_target *)0)->room_q16) == 4);
-HOLDS(holds_57, offsetof(fieldstop_visual_target, separation_uas) == 8 && sizeof(((fieldstop_visual_target *)0)->separation_uas) == 4);
-HOLDS(holds_58, offsetof(fieldstop_visual_target, exit_pupil_um) == 12 && sizeof(((fieldstop_visual_target *)0)->exit_pupil_um) == 4);
-HOLDS(holds_59, offsetof(fieldstop_visual_target, purpose) == 16 && sizeof(((fieldstop_visual_target *)0)->purpose) == 1);
-HOLDS(holds_60, offsetof(fieldstop_visual_target, padding) == 17 && sizeof(((fieldstop_visual_target *)0)->padding) == 3);
-HOLDS(holds_61, sizeof(fieldstop_visual_choice) == 28);
-HOLDS(holds_62, offsetof(fieldstop_visual_choice, available) == 0 && sizeof(((fieldstop_visual_choice *)0)->available) == 4);
-HOLDS(holds_63, offsetof(fieldstop_visual_choice, facts) == 4 && sizeof(((fieldstop_visual_choice *)0)->facts) == 4);
-HOLDS(holds_64, offsetof(fieldstop_visual_choice, magnification_q16) == 8 && sizeof(((fieldstop_visual_choice *)0)->magnification_q16) == 4);
-HOLDS(holds_65, offsetof(fieldstop_visual_choice, exit_pupil_um) == 12 && sizeof(((fieldstop_visual_choice *)0)->exit_pupil_um) == 4);
-HOLDS(holds_66, offsetof(fieldstop_visual_choice, true_field_mas) == 16 && sizeof(((fieldstop_visual_choice *)0)->true_field_mas) == 4);
-HOLDS(holds_67, offsetof(fieldstop_visual_choice, fit_q16) == 20 && sizeof(((fieldstop_visual_choice *)0)->fit_q16) == 4);
-HOLDS(holds_68, offsetof(fieldstop_visual_choice, eyepiece) == 24 && sizeof(((fieldstop_visual_choice *)0)->eyepiece) == 1);
-HOLDS(holds_69, offsetof(fieldstop_visual_choice, amplifier) == 25 && sizeof(((fieldstop_visual_choice *)0)->amplifier) == 1);
-HOLDS(holds_70, offsetof(fieldstop_visual_choice, standing) == 26 && sizeof(((fieldstop_visual_choice *)0)->standing) == 1);
-HOLDS(holds_71, offsetof(fieldstop_visual_choice, padding) == 27 && sizeof(((fieldstop_visual_choice *)0)->padding) == 1);
-HOLDS(holds_72, sizeof(fieldstop_camera_target) == 12);
-HOLDS(holds_73, offsetof(fieldstop_camera_target, width_mas) == 0 && sizeof(((fieldstop_camera_target *)0)->width_mas) == 4);
-HOLDS(holds_74, offsetof(fieldstop_camera_target, height_mas) == 4 && sizeof(((fieldstop_camera_target *)0)->height_mas) == 4);
-HOLDS(holds_75, offsetof(fieldstop_camera_target, overlap_q16) == 8 && sizeof(((fieldstop_camera_target *)0)->overlap_q16) == 4);
-HOLDS(holds_76, sizeof(fieldstop_camera_choice) == 36);
-HOLDS(holds_77, offsetof(fieldstop_camera_choice, available) == 0 && sizeof(((fieldstop_camera_choice *)0)->available) == 4);
-HOLDS(holds_78, offsetof(fieldstop_camera_choice, facts) == 4 && sizeof(((fieldstop_camera_choice *)0)->facts) == 4);
-HOLDS(holds_79, offsetof(fieldstop_camera_choice, frame_width_mas) == 8 && sizeof(((fieldstop_camera_choice *)0)->frame_width_mas) == 4);
-HOLDS(holds_80, offsetof(fieldstop_camera_choice, frame_height_mas) == 12 && sizeof(((fieldstop_camera_choice *)0)->frame_height_mas) == 4);
-HOLDS(holds_81, offsetof(fieldstop_camera_choice, pixel_scale_uas) == 16 && sizeof(((fieldstop_camera_choice *)0)->pixel_scale_uas) == 4);
-HOLDS(holds_82, offsetof(fieldstop_camera_choice, pixels_per_fwhm_q16) == 20 && sizeof(((fieldstop_camera_choice *)0)->pixels_per_fwhm_q16) == 4);
-HOLDS(holds_83, offsetof(fieldstop_camera_choice, tiles_wide) == 24 && sizeof(((fieldstop_camera_choice *)0)->tiles_wide) == 4);
-HOLDS(holds_84, offsetof(fieldstop_camera_choice, tiles_high) == 28 && sizeof(((fieldstop_camera_choice *)0)->tiles_high) == 4);
-HOLDS(holds_85, offsetof(fieldstop_camera_choice, camera) == 32 && sizeof(((fieldstop_camera_choice *)0)->camera) == 1);
-HOLDS(holds_86, offsetof(fieldstop_camera_choice, amplifier) == 33 && sizeof(((fieldstop_camera_choice *)0)->amplifier) == 1);
-HOLDS(holds_87, offsetof(fieldstop_camera_choice, padding) == 34 && sizeof(((fieldstop_camera_choice *)0)->padding) == 2);
-HOLDS(holds_88, sizeof(fieldstop_text_style) == 195);
-HOLDS(holds_89, offsetof(fieldstop_text_style, units) == 0 && sizeof(((fieldstop_text_style *)0)->units) == 168);
-HOLDS(holds_90, offsetof(fieldstop_text_style, dash) == 168 && sizeof(((fieldstop_text_style *)0)->dash) == 8);
-HOLDS(holds_91, offsetof(fieldstop_text_style, yes) == 176 && sizeof(((fieldstop_text_style *)0)->yes) == 8);
-HOLDS(holds_92, offsetof(fieldstop_text_style, no) == 184 && sizeof(((fieldstop_text_style *)0)->no) == 8);
-HOLDS(holds_93, offsetof(fieldstop_text_style, decimal_mark) == 192 && sizeof(((fieldstop_text_style *)0)->decimal_mark) == 1);
-HOLDS(holds_94, offsetof(fieldstop_text_style, fact_mark) == 193 && sizeof(((fieldstop_text_style *)0)->fact_mark) == 1);
-HOLDS(holds_95, offsetof(fieldstop_text_style, utf8) == 194 && sizeof(((fieldstop_text_style *)0)->utf8) == 1);
-HOLDS(holds_96, sizeof(fieldstop_span) == 4);
-HOLDS(holds_97, offsetof(fieldstop_span, first) == 0 && sizeof(((fieldstop_span *)0)->first) == 2);
-HOLDS(holds_98, offsetof(fieldstop_span, count) == 2 && sizeof(((fieldstop_span *)0)->count) == 2);
-HOLDS(holds_99, FIELDSTOP_NULL_POINTER == 1);
-HOLDS(holds_100, FIELDSTOP_ZERO == 2);
-HOLDS(holds_101, FIELDSTOP_OUT_OF_RANGE == 3);
-HOLDS(holds_102, FIELDSTOP_NOT_FINITE == 4);
-HOLDS(holds_103, FIELDSTOP_OVERFLOW == 5);
-HOLDS(holds_104, FIELDSTOP_NO_ROOM == 6);
-HOLDS(holds_105, FIELDSTOP_UNDEFINED == 7);
-HOLDS(holds_106, FIELDSTOP_EQUIDISTANT == 0);
-HOLDS(holds_107, FIELDSTOP_RECTILINEAR == 1);
-HOLDS(holds_108, FIELDSTOP_VISUAL_FOCAL_LENGTH == 1);
-HOLDS(holds_109, FIELDSTOP_VISUAL_FOCAL_RATIO == 2);
-HOLDS(holds_110, FIELDSTOP_VISUAL_MAGNIFICATION == 4);
-HOLDS(holds_111, FIELDSTOP_VISUAL_EXIT_PUPIL == 8);
-HOLDS(holds_112, FIELDSTOP_VISUAL_TRUE_FIELD == 16);
-HOLDS(holds_113, FIELDSTOP_VISUAL_RESOLUTION == 32);
-HOLDS(holds_114, FIELDSTOP_VISUAL_DAWES_LIMIT == 64);
-HOLDS(holds_115, FIELDSTOP_VISUAL_LOWEST_MAGNIFICATION == 128);
-HOLDS(holds_116, FIELDSTOP_VISUAL_RESOLVING_MAGNIFICATION == 256);
-HOLDS(holds_117, FIELDSTOP_VISUAL_EFFECTIVE_APERTURE == 512);
-HOLDS(holds_118, FIELDSTOP_VISUAL_LIMITING_MAGNITUDE == 1024);
-HOLDS(holds_119, FIELDSTOP_VISUAL_SURFACE_BRIGHTNESS == 2048);
-HOLDS(holds_120, FIELDSTOP_VISUAL_ALL == 4095);
-HOLDS(holds_121, FIELDSTOP_VISUAL_FACT_WIDE_EXIT_PUPIL == 1);
-HOLDS(holds_122, FIELDSTOP_VISUAL_FACT_EMPTY_MAGNIFICATION == 2);
-HOLDS(holds_123, FIELDSTOP_VISUAL_FACT_FIELD_FROM_APPARENT == 4);
-HOLDS(holds_124, FIELDSTOP_VISUAL_FACT_SEEING_LIMITED == 8);
-HOLDS(holds_125, FIELDSTOP_CAMERA_FOCAL_LENGTH == 1);
-HOLDS(holds_126, FIELDSTOP_CAMERA_FOCAL_RATIO == 2);
-HOLDS(holds_127, FIELDSTOP_CAMERA_T_NUMBER == 4);
-HOLDS(holds_128, FIELDSTOP_CAMERA_FRAME_WIDTH == 8);
-HOLDS(holds_129, FIELDSTOP_CAMERA_FRAME_HEIGHT == 16);
-HOLDS(holds_130, FIELDSTOP_CAMERA_PIXEL_SCALE == 32);
-HOLDS(holds_131, FIELDSTOP_CAMERA_PLATE_SCALE == 64);
-HOLDS(holds_132, FIELDSTOP_CAMERA_STAR_FWHM == 128);
-HOLDS(holds_133, FIELDSTOP_CAMERA_PIXELS_PER_FWHM == 256);
-HOLDS(holds_134, FIELDSTOP_CAMERA_ALL == 511);
-HOLDS(holds_135, FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING == 1);
-HOLDS(holds_136, FIELDSTOP_CAMERA_FACT_FINE_SAMPLING == 2);
-HOLDS(holds_137, FIELDSTOP_PURPOSE_FRAME == 0);
-HOLDS(holds_138, FIELDSTOP_PURPOSE_SPLIT == 1);
-HOLDS(holds_139, FIELDSTOP_PURPOSE_EXIT_PUPIL == 2);
-HOLDS(holds_140, FIELDSTOP_NO_AMPLIFIER == 255);
-HOLDS(holds_141, FIELDSTOP_VISUAL_CHOICE_MAGNIFICATION == 1);
-HOLDS(holds_142, FIELDSTOP_VISUAL_CHOICE_EXIT_PUPIL == 2);
-HOLDS(holds_143, FIELDSTOP_VISUAL_CHOICE_TRUE_FIELD == 4);
-HOLDS(holds_144, FIELDSTOP_VISUAL_CHOICE_FIT == 8);
-HOLDS(holds_145, FIELDSTOP_VISUAL_CHOICE_FACT_WIDE_EXIT_PUPIL == 1);
-HOLDS(holds_146, FIELDSTOP_VISUAL_CHOICE_FACT_EMPTY_MAGNIFICATION == 2);
-HOLDS(holds_147, FIELDSTOP_VISUAL_CHOICE_FACT_FIELD_FROM_APPARENT == 4);
-HOLDS(holds_148, FIELDSTOP_VISUAL_CHOICE_FACT_SEEING_SHOWS == 8);
-HOLDS(holds_149, FIELDSTOP_VISUAL_CHOICE_FACT_SERVES == 16);
-HOLDS(holds_150, FIELDSTOP_VISUAL_CHOICE_FACT_UNDER_RESOLUTION == 32);
-HOLDS(holds_151, FIELDSTOP_VISUAL_CHOICE_FACT_UNDER_SEEING == 64);
-HOLDS(holds_152, FIELDSTOP_CAMERA_CHOICE_FRAME_WIDTH == 1);
-HOLDS(holds_153, FIELDSTOP_CAMERA_CHOICE_FRAME_HEIGHT == 2);
-HOLDS(holds_154, FIELDSTOP_CAMERA_CHOICE_PIXEL_SCALE == 4);
-HOLDS(holds_155, FIELDSTOP_CAMERA_CHOICE_PIXELS_PER_FWHM == 8);
-HOLDS(holds_156, FIELDSTOP_CAMERA_CHOICE_TILES == 16);
-HOLDS(holds_157, FIELDSTOP_CAMERA_CHOICE_FACT_COARSE_SAMPLING == 1);
-HOLDS(holds_158, FIELDSTOP_CAMERA_CHOICE_FACT_FINE_SAMPLING == 2);
-HOLDS(holds_159, FIELDSTOP_CAMERA_CHOICE_FACT_FITS == 4);
-HOLDS(holds_160, FIELDSTOP_ANGLE_BY_SIZE == 0);
-HOLDS(holds_161, FIELDSTOP_ANGLE_DECIMAL_DEGREES == 1);
-HOLDS(holds_162, FIELDSTOP_ANGLE_DEGREES_MINUTES == 2);
-HOLDS(holds_163, FIELDSTOP_ANGLE_MINUTES_SECONDS == 3);
-HOLDS(holds_164, FIELDSTOP_ANGLE_DECIMAL_SECONDS == 4);
-HOLDS(holds_165, FIELDSTOP_UNIT_NONE == 0);
-HOLDS(holds_166, FIELDSTOP_UNIT_DEGREE == 1);
-HOLDS(holds_167, FIELDSTOP_UNIT_MINUTE == 2);
-HOLDS(holds_168, FIELDSTOP_UNIT_SECOND == 3);
-HOLDS(holds_169, FIELDSTOP_UNIT_DECIMAL_DEGREE == 4);
-HOLDS(holds_170, FIELDSTOP_UNIT_METRE == 5);
-HOLDS(holds_171, FIELDSTOP_UNIT_MILLIMETRE == 6);
-HOLDS(holds_172, FIELDSTOP_UNIT_MICROMETRE == 7);
-HOLDS(holds_173, FIELDSTOP_UNIT_NANOMETRE == 8);
-HOLDS(holds_174, FIELDSTOP_UNIT_TIMES == 9);
-HOLDS(holds_175, FIELDSTOP_UNIT_PERCENT == 10);
-HOLDS(holds_176, FIELDSTOP_UNIT_MAGNITUDE == 11);
-HOLDS(holds_177, FIELDSTOP_UNIT_FOCAL_RATIO == 12);
-HOLDS(holds_178, FIELDSTOP_UNIT_PIXEL == 13);
-HOLDS(holds_179, FIELDSTOP_UNIT_SECOND_PER_PIXEL == 14);
-HOLDS(holds_180, FIELDSTOP_UNIT_SECOND_PER_MILLIMETRE == 15);
-HOLDS(holds_181, FIELDSTOP_UNIT_SECOND_PER_TIME == 16);
-HOLDS(holds_182, FIELDSTOP_UNIT_PER_MILLIMETRE == 17);
-HOLDS(holds_183, FIELDSTOP_UNIT_TIME == 18);
-HOLDS(holds_184, FIELDSTOP_UNIT_STEP == 19);
-HOLDS(holds_185, FIELDSTOP_UNIT_KELVIN == 20);
-HOLDS(holds_186, FIELDSTOP_UNIT_WATT == 21);
-HOLDS(holds_187, FIELDSTOP_VISUAL_ROWS == 16);
-HOLDS(holds_188, FIELDSTOP_VISUAL_ROW_MAGNIFICATION == 0);
-HOLDS(holds_189, FIELDSTOP_VISUAL_ROW_TRUE_FIELD == 1);
-HOLDS(holds_190, FIELDSTOP_VISUAL_ROW_EXIT_PUPIL == 2);
-HOLDS(holds_191, FIELDSTOP_VISUAL_ROW_RESOLUTION == 3);
-HOLDS(holds_192, FIELDSTOP_VISUAL_ROW_FAINTEST_STAR == 4);
-HOLDS(holds_193, FIELDSTOP_VISUAL_ROW_SURFACE_BRIGHTNESS == 5);
-HOLDS(holds_194, FIELDSTOP_VISUAL_ROW_FOCAL_RATIO == 6);
-HOLDS(holds_195, FIELDSTOP_VISUAL_ROW_FOCAL_LENGTH == 7);
-HOLDS(holds_196, FIELDSTOP_VISUAL_ROW_LOWEST_MAGNIFICATION == 8);
-HOLDS(holds_197, FIELDSTOP_VISUAL_ROW_RESOLVING_MAGNIFICATION == 9);
-HOLDS(holds_198, FIELDSTOP_VISUAL_ROW_DAWES_LIMIT == 10);
-HOLDS(holds_199, FIELDSTOP_VISUAL_ROW_EFFECTIVE_APERTURE == 11);
-HOLDS(holds_200, FIELDSTOP_VISUAL_ROW_WIDE_EXIT_PUPIL == 12);
-HOLDS(holds_201, FIELDSTOP_VISUAL_ROW_EMPTY_MAGNIFICATION == 13);
-HOLDS(holds_202, FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT == 14);
-HOLDS(holds_203, FIELDSTOP_VISUAL_ROW_SEEING_LIMITED == 15);
-HOLDS(holds_204, FIELDSTOP_CAMERA_ROWS == 11);
-HOLDS(holds_205, FIELDSTOP_CAMERA_ROW_FRAME_WIDTH == 0);
-HOLDS(holds_206, FIELDSTOP_CAMERA_ROW_FRAME_HEIGHT == 1);
-HOLDS(holds_207, FIELDSTOP_CAMERA_ROW_PIXEL_SCALE == 2);
-HOLDS(holds_208, FIELDSTOP_CAMERA_ROW_STAR_WIDTH == 3);
-HOLDS(holds_209, FIELDSTOP_CAMERA_ROW_STAR_PIXELS == 4);
-HOLDS(holds_210, FIELDSTOP_CAMERA_ROW_FOCAL_RATIO == 5);
-HOLDS(holds_211, FIELDSTOP_CAMERA_ROW_T_NUMBER == 6);
-HOLDS(holds_212, FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH == 7);
-HOLDS(holds_213, FIELDSTOP_CAMERA_ROW_PLATE_SCALE == 8);
-HOLDS(holds_214, FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING == 9);
-HOLDS(holds_215, FIELDSTOP_CAMERA_ROW_FINE_SAMPLING == 10);
+HOLDS(holds_54, offsetof(fieldstop_camera_readout, cutoff_frequency_q16) == 44 && sizeof(((fieldstop_camera_readout *)0)->cutoff_frequency_q16) == 4);
+HOLDS(holds_55, offsetof(fieldstop_camera_readout, nyquist_pixel_nm) == 48 && sizeof(((fieldstop_camera_readout *)0)->nyquist_pixel_nm) == 4);
+HOLDS(holds_56, offsetof(fieldstop_camera_readout, diagonal_mas) == 52 && sizeof(((fieldstop_camera_readout *)0)->diagonal_mas) == 4);
+HOLDS(holds_57, sizeof(fieldstop_visual_target) == 20);
+HOLDS(holds_58, offsetof(fieldstop_visual_target, size_mas) == 0 && sizeof(((fieldstop_visual_target *)0)->size_mas) == 4);
+HOLDS(holds_59, offsetof(fieldstop_visual_target, room_q16) == 4 && sizeof(((fieldstop_visual_target *)0)->room_q16) == 4);
+HOLDS(holds_60, offsetof(fieldstop_visual_target, separation_uas) == 8 && sizeof(((fieldstop_visual_target *)0)->separation_uas) == 4);
+HOLDS(holds_61, offsetof(fieldstop_visual_target, exit_pupil_um) == 12 && sizeof(((fieldstop_visual_target *)0)->exit_pupil_um) == 4);
+HOLDS(holds_62, offsetof(fieldstop_visual_target, purpose) == 16 && sizeof(((fieldstop_visual_target *)0)->purpose) == 1);
+HOLDS(holds_63, offsetof(fieldstop_visual_target, padding) == 17 && sizeof(((fieldstop_visual_target *)0)->padding) == 3);
+HOLDS(holds_64, sizeof(fieldstop_visual_choice) == 28);
+HOLDS(holds_65, offsetof(fieldstop_visual_choice, available) == 0 && sizeof(((fieldstop_visual_choice *)0)->available) == 4);
+HOLDS(holds_66, offsetof(fieldstop_visual_choice, facts) == 4 && sizeof(((fieldstop_visual_choice *)0)->facts) == 4);
+HOLDS(holds_67, offsetof(fieldstop_visual_choice, magnification_q16) == 8 && sizeof(((fieldstop_visual_choice *)0)->magnification_q16) == 4);
+HOLDS(holds_68, offsetof(fieldstop_visual_choice, exit_pupil_um) == 12 && sizeof(((fieldstop_visual_choice *)0)->exit_pupil_um) == 4);
+HOLDS(holds_69, offsetof(fieldstop_visual_choice, true_field_mas) == 16 && sizeof(((fieldstop_visual_choice *)0)->true_field_mas) == 4);
+HOLDS(holds_70, offsetof(fieldstop_visual_choice, fit_q16) == 20 && sizeof(((fieldstop_visual_choice *)0)->fit_q16) == 4);
+HOLDS(holds_71, offsetof(fieldstop_visual_choice, eyepiece) == 24 && sizeof(((fieldstop_visual_choice *)0)->eyepiece) == 1);
+HOLDS(holds_72, offsetof(fieldstop_visual_choice, amplifier) == 25 && sizeof(((fieldstop_visual_choice *)0)->amplifier) == 1);
+HOLDS(holds_73, offsetof(fieldstop_visual_choice, standing) == 26 && sizeof(((fieldstop_visual_choice *)0)->standing) == 1);
+HOLDS(holds_74, offsetof(fieldstop_visual_choice, padding) == 27 && sizeof(((fieldstop_visual_choice *)0)->padding) == 1);
+HOLDS(holds_75, sizeof(fieldstop_camera_target) == 12);
+HOLDS(holds_76, offsetof(fieldstop_camera_target, width_mas) == 0 && sizeof(((fieldstop_camera_target *)0)->width_mas) == 4);
+HOLDS(holds_77, offsetof(fieldstop_camera_target, height_mas) == 4 && sizeof(((fieldstop_camera_target *)0)->height_mas) == 4);
+HOLDS(holds_78, offsetof(fieldstop_camera_target, overlap_q16) == 8 && sizeof(((fieldstop_camera_target *)0)->overlap_q16) == 4);
+HOLDS(holds_79, sizeof(fieldstop_camera_choice) == 36);
+HOLDS(holds_80, offsetof(fieldstop_camera_choice, available) == 0 && sizeof(((fieldstop_camera_choice *)0)->available) == 4);
+HOLDS(holds_81, offsetof(fieldstop_camera_choice, facts) == 4 && sizeof(((fieldstop_camera_choice *)0)->facts) == 4);
+HOLDS(holds_82, offsetof(fieldstop_camera_choice, frame_width_mas) == 8 && sizeof(((fieldstop_camera_choice *)0)->frame_width_mas) == 4);
+HOLDS(holds_83, offsetof(fieldstop_camera_choice, frame_height_mas) == 12 && sizeof(((fieldstop_camera_choice *)0)->frame_height_mas) == 4);
+HOLDS(holds_84, offsetof(fieldstop_camera_choice, pixel_scale_uas) == 16 && sizeof(((fieldstop_camera_choice *)0)->pixel_scale_uas) == 4);
+HOLDS(holds_85, offsetof(fieldstop_camera_choice, pixels_per_fwhm_q16) == 20 && sizeof(((fieldstop_camera_choice *)0)->pixels_per_fwhm_q16) == 4);
+HOLDS(holds_86, offsetof(fieldstop_camera_choice, tiles_wide) == 24 && sizeof(((fieldstop_camera_choice *)0)->tiles_wide) == 4);
+HOLDS(holds_87, offsetof(fieldstop_camera_choice, tiles_high) == 28 && sizeof(((fieldstop_camera_choice *)0)->tiles_high) == 4);
+HOLDS(holds_88, offsetof(fieldstop_camera_choice, camera) == 32 && sizeof(((fieldstop_camera_choice *)0)->camera) == 1);
+HOLDS(holds_89, offsetof(fieldstop_camera_choice, amplifier) == 33 && sizeof(((fieldstop_camera_choice *)0)->amplifier) == 1);
+HOLDS(holds_90, offsetof(fieldstop_camera_choice, padding) == 34 && sizeof(((fieldstop_camera_choice *)0)->padding) == 2);
+HOLDS(holds_91, sizeof(fieldstop_newtonian_layout) == 40);
+HOLDS(holds_92, offsetof(fieldstop_newtonian_layout, focus_distance_um) == 0 && sizeof(((fieldstop_newtonian_layout *)0)->focus_distance_um) == 4);
+HOLDS(holds_93, offsetof(fieldstop_newtonian_layout, lit_field_um) == 4 && sizeof(((fieldstop_newtonian_layout *)0)->lit_field_um) == 4);
+HOLDS(holds_94, offsetof(fieldstop_newtonian_layout, edge_offset_um) == 8 && sizeof(((fieldstop_newtonian_layout *)0)->edge_offset_um) == 4);
+HOLDS(holds_95, offsetof(fieldstop_newtonian_layout, diagonal_um) == 12 && sizeof(((fieldstop_newtonian_layout *)0)->diagonal_um) == 4);
+HOLDS(holds_96, offsetof(fieldstop_newtonian_layout, axis_height_um) == 16 && sizeof(((fieldstop_newtonian_layout *)0)->axis_height_um) == 4);
+HOLDS(holds_97, offsetof(fieldstop_newtonian_layout, reach_um) == 20 && sizeof(((fieldstop_newtonian_layout *)0)->reach_um) == 4);
+HOLDS(holds_98, offsetof(fieldstop_newtonian_layout, altitude_bam) == 24 && sizeof(((fieldstop_newtonian_layout *)0)->altitude_bam) == 4);
+HOLDS(holds_99, offsetof(fieldstop_newtonian_layout, lowest_altitude_bam) == 28 && sizeof(((fieldstop_newtonian_layout *)0)->lowest_altitude_bam) == 4);
+HOLDS(holds_100, offsetof(fieldstop_newtonian_layout, highest_altitude_bam) == 32 && sizeof(((fieldstop_newtonian_layout *)0)->highest_altitude_bam) == 4);
+HOLDS(holds_101, offsetof(fieldstop_newtonian_layout, height_limit_um) == 36 && sizeof(((fieldstop_newtonian_layout *)0)->height_limit_um) == 4);
+HOLDS(holds_102, sizeof(fieldstop_two_mirror_layout) == 12);
+HOLDS(holds_103, offsetof(fieldstop_two_mirror_layout, primary_focal_um) == 0 && sizeof(((fieldstop_two_mirror_layout *)0)->primary_focal_um) == 4);
+HOLDS(holds_104, offsetof(fieldstop_two_mirror_layout, back_focus_um) == 4 && sizeof(((fieldstop_two_mirror_layout *)0)->back_focus_um) == 4);
+HOLDS(holds_105, offsetof(fieldstop_two_mirror_layout, lit_field_um) == 8 && sizeof(((fieldstop_two_mirror_layout *)0)->lit_field_um) == 4);
+HOLDS(holds_106, sizeof(fieldstop_focuser) == 16);
+HOLDS(holds_107, offsetof(fieldstop_focuser, motor_step_nm) == 0 && sizeof(((fieldstop_focuser *)0)->motor_step_nm) == 4);
+HOLDS(holds_108, offsetof(fieldstop_focuser, defocus_nm) == 4 && sizeof(((fieldstop_focuser *)0)->defocus_nm) == 4);
+HOLDS(holds_109, offsetof(fieldstop_focuser, tube_length_um) == 8 && sizeof(((fieldstop_focuser *)0)->tube_length_um) == 4);
+HOLDS(holds_110, offsetof(fieldstop_focuser, expansion_ppb_per_k) == 12 && sizeof(((fieldstop_focuser *)0)->expansion_ppb_per_k) == 4);
+HOLDS(holds_111, sizeof(fieldstop_focus_readout) == 36);
+HOLDS(holds_112, offsetof(fieldstop_focus_readout, available) == 0 && sizeof(((fieldstop_focus_readout *)0)->available) == 4);
+HOLDS(holds_113, offsetof(fieldstop_focus_readout, facts) == 4 && sizeof(((fieldstop_focus_readout *)0)->facts) == 4);
+HOLDS(holds_114, offsetof(fieldstop_focus_readout, focal_ratio_q16) == 8 && sizeof(((fieldstop_focus_readout *)0)->focal_ratio_q16) == 4);
+HOLDS(holds_115, offsetof(fieldstop_focus_readout, depth_nm) == 12 && sizeof(((fieldstop_focus_readout *)0)->depth_nm) == 4);
+HOLDS(holds_116, offsetof(fieldstop_focus_readout, depth_steps) == 16 && sizeof(((fieldstop_focus_readout *)0)->depth_steps) == 4);
+HOLDS(holds_117, offsetof(fieldstop_focus_readout, temperature_mk) == 20 && sizeof(((fieldstop_focus_readout *)0)->temperature_mk) == 4);
+HOLDS(holds_118, offsetof(fieldstop_focus_readout, blur_nm) == 24 && sizeof(((fieldstop_focus_readout *)0)->blur_nm) == 4);
+HOLDS(holds_119, offsetof(fieldstop_focus_readout, blur_uas) == 28 && sizeof(((fieldstop_focus_readout *)0)->blur_uas) == 4);
+HOLDS(holds_120, offsetof(fieldstop_focus_readout, wavefront_nm) == 32 && sizeof(((fieldstop_focus_readout *)0)->wavefront_nm) == 4);
+HOLDS(holds_121, sizeof(fieldstop_newtonian_readout) == 40);
+HOLDS(holds_122, offsetof(fieldstop_newtonian_readout, available) == 0 && sizeof(((fieldstop_newtonian_readout *)0)->available) == 4);
+HOLDS(holds_123, offsetof(fieldstop_newtonian_readout, facts) == 4 && sizeof(((fieldstop_newtonian_readout *)0)->facts) == 4);
+HOLDS(holds_124, offsetof(fieldstop_newtonian_readout, diagonal_um) == 8 && sizeof(((fieldstop_newtonian_readout *)0)->diagonal_um) == 4);
+HOLDS(holds_125, offsetof(fieldstop_newtonian_readout, diagonal_offset_um) == 12 && sizeof(((fieldstop_newtonian_readout *)0)->diagonal_offset_um) == 4);
+HOLDS(holds_126, offsetof(fieldstop_newtonian_readout, obstruction_q16) == 16 && sizeof(((fieldstop_newtonian_readout *)0)->obstruction_q16) == 4);
+HOLDS(holds_127, offsetof(fieldstop_newtonian_readout, beam_um) == 20 && sizeof(((fieldstop_newtonian_readout *)0)->beam_um) == 4);
+HOLDS(holds_128, offsetof(fieldstop_newtonian_readout, beam_shift_um) == 24 && sizeof(((fieldstop_newtonian_readout *)0)->beam_shift_um) == 4);
+HOLDS(holds_129, offsetof(fieldstop_newtonian_readout, edge_light_q16) == 28 && sizeof(((fieldstop_newtonian_readout *)0)->edge_light_q16) == 4);
+HOLDS(holds_130, offsetof(fieldstop_newtonian_readout, eyepiece_height_um) == 32 && sizeof(((fieldstop_newtonian_readout *)0)->eyepiece_height_um) == 4);
+HOLDS(holds_131, offsetof(fieldstop_newtonian_readout, greatest_height_um) == 36 && sizeof(((fieldstop_newtonian_readout *)0)->greatest_height_um) == 4);
+HOLDS(holds_132, sizeof(fieldstop_two_mirror_readout) == 36);
+HOLDS(holds_133, offsetof(fieldstop_two_mirror_readout, available) == 0 && sizeof(((fieldstop_two_mirror_readout *)0)->available) == 4);
+HOLDS(holds_134, offsetof(fieldstop_two_mirror_readout, facts) == 4 && sizeof(((fieldstop_two_mirror_readout *)0)->facts) == 4);
+HOLDS(holds_135, offsetof(fieldstop_two_mirror_readout, secondary_magnification_q16) == 8 && sizeof(((fieldstop_two_mirror_readout *)0)->secondary_magnification_q16) == 4);
+HOLDS(holds_136, offsetof(fieldstop_two_mirror_readout, separation_um) == 12 && sizeof(((fieldstop_two_mirror_readout *)0)->separation_um) == 4);
+HOLDS(holds_137, offsetof(fieldstop_two_mirror_readout, secondary_um) == 16 && sizeof(((fieldstop_two_mirror_readout *)0)->secondary_um) == 4);
+HOLDS(holds_138, offsetof(fieldstop_two_mirror_readout, secondary_radius_um) == 20 && sizeof(((fieldstop_two_mirror_readout *)0)->secondary_radius_um) == 4);
+HOLDS(holds_139, offsetof(fieldstop_two_mirror_readout, obstruction_q16) == 24 && sizeof(((fieldstop_two_mirror_readout *)0)->obstruction_q16) == 4);
+HOLDS(holds_140, offsetof(fieldstop_two_mirror_readout, length_um) == 28 && sizeof(((fieldstop_two_mirror_readout *)0)->length_um) == 4);
+HOLDS(holds_141, offsetof(fieldstop_two_mirror_readout, length_q16) == 32 && sizeof(((fieldstop_two_mirror_readout *)0)->length_q16) == 4);
+HOLDS(holds_142, sizeof(fieldstop_text_style) == 195);
+HOLDS(holds_143, offsetof(fieldstop_text_style, units) == 0 && sizeof(((fieldstop_text_style *)0)->units) == 168);
+HOLDS(holds_144, offsetof(fieldstop_text_style, dash) == 168 && sizeof(((fieldstop_text_style *)0)->dash) == 8);
+HOLDS(holds_145, offsetof(fieldstop_text_style, yes) == 176 && sizeof(((fieldstop_text_style *)0)->yes) == 8);
+HOLDS(holds_146, offsetof(fieldstop_text_style, no) == 184 && sizeof(((fieldstop_text_style *)0)->no) == 8);
+HOLDS(holds_147, offsetof(fieldstop_text_style, decimal_mark) == 192 && sizeof(((fieldstop_text_style *)0)->decimal_mark) == 1);
+HOLDS(holds_148, offsetof(fieldstop_text_style, fact_mark) == 193 && sizeof(((fieldstop_text_style *)0)->fact_mark) == 1);
+HOLDS(holds_149, offsetof(fieldstop_text_style, utf8) == 194 && sizeof(((fieldstop_text_style *)0)->utf8) == 1);
+HOLDS(holds_150, sizeof(fieldstop_span) == 4);
+HOLDS(holds_151, offsetof(fieldstop_span, first) == 0 && sizeof(((fieldstop_span *)0)->first) == 2);
+HOLDS(holds_152, offsetof(fieldstop_span, count) == 2 && sizeof(((fieldstop_span *)0)->count) == 2);
+HOLDS(holds_153, FIELDSTOP_NULL_POINTER == 1);
+HOLDS(holds_154, FIELDSTOP_ZERO == 2);
+HOLDS(holds_155, FIELDSTOP_OUT_OF_RANGE == 3);
+HOLDS(holds_156, FIELDSTOP_NOT_FINITE == 4);
+HOLDS(holds_157, FIELDSTOP_OVERFLOW == 5);
+HOLDS(holds_158, FIELDSTOP_NO_ROOM == 6);
+HOLDS(holds_159, FIELDSTOP_UNDEFINED == 7);
+HOLDS(holds_160, FIELDSTOP_EQUIDISTANT == 0);
+HOLDS(holds_161, FIELDSTOP_RECTILINEAR == 1);
+HOLDS(holds_162, FIELDSTOP_VISUAL_FOCAL_LENGTH == 1);
+HOLDS(holds_163, FIELDSTOP_VISUAL_FOCAL_RATIO == 2);
+HOLDS(holds_164, FIELDSTOP_VISUAL_MAGNIFICATION == 4);
+HOLDS(holds_165, FIELDSTOP_VISUAL_EXIT_PUPIL == 8);
+HOLDS(holds_166, FIELDSTOP_VISUAL_TRUE_FIELD == 16);
+HOLDS(holds_167, FIELDSTOP_VISUAL_RESOLUTION == 32);
+HOLDS(holds_168, FIELDSTOP_VISUAL_DAWES_LIMIT == 64);
+HOLDS(holds_169, FIELDSTOP_VISUAL_LOWEST_MAGNIFICATION == 128);
+HOLDS(holds_170, FIELDSTOP_VISUAL_RESOLVING_MAGNIFICATION == 256);
+HOLDS(holds_171, FIELDSTOP_VISUAL_EFFECTIVE_APERTURE == 512);
+HOLDS(holds_172, FIELDSTOP_VISUAL_LIMITING_MAGNITUDE == 1024);
+HOLDS(holds_173, FIELDSTOP_VISUAL_SURFACE_BRIGHTNESS == 2048);
+HOLDS(holds_174, FIELDSTOP_VISUAL_ALL == 4095);
+HOLDS(holds_175, FIELDSTOP_VISUAL_FACT_WIDE_EXIT_PUPIL == 1);
+HOLDS(holds_176, FIELDSTOP_VISUAL_FACT_EMPTY_MAGNIFICATION == 2);
+HOLDS(holds_177, FIELDSTOP_VISUAL_FACT_FIELD_FROM_APPARENT == 4);
+HOLDS(holds_178, FIELDSTOP_VISUAL_FACT_SEEING_LIMITED == 8);
+HOLDS(holds_179, FIELDSTOP_CAMERA_FOCAL_LENGTH == 1);
+HOLDS(holds_180, FIELDSTOP_CAMERA_FOCAL_RATIO == 2);
+HOLDS(holds_181, FIELDSTOP_CAMERA_T_NUMBER == 4);
+HOLDS(holds_182, FIELDSTOP_CAMERA_FRAME_WIDTH == 8);
+HOLDS(holds_183, FIELDSTOP_CAMERA_FRAME_HEIGHT == 16);
+HOLDS(holds_184, FIELDSTOP_CAMERA_PIXEL_SCALE == 32);
+HOLDS(holds_185, FIELDSTOP_CAMERA_PLATE_SCALE == 64);
+HOLDS(holds_186, FIELDSTOP_CAMERA_STAR_FWHM == 128);
+HOLDS(holds_187, FIELDSTOP_CAMERA_PIXELS_PER_FWHM == 256);
+HOLDS(holds_188, FIELDSTOP_CAMERA_CUTOFF_FREQUENCY == 512);
+HOLDS(holds_189, FIELDSTOP_CAMERA_NYQUIST_PIXEL == 1024);
+HOLDS(holds_190, FIELDSTOP_CAMERA_DIAGONAL == 2048);
+HOLDS(holds_191, FIELDSTOP_CAMERA_ALL == 4095);
+HOLDS(holds_192, FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING == 1);
+HOLDS(holds_193, FIELDSTOP_CAMERA_FACT_FINE_SAMPLING == 2);
+HOLDS(holds_194, FIELDSTOP_PURPOSE_FRAME == 0);
+HOLDS(holds_195, FIELDSTOP_PURPOSE_SPLIT == 1);
+HOLDS(holds_196, FIELDSTOP_PURPOSE_EXIT_PUPIL == 2);
+HOLDS(holds_197, FIELDSTOP_NO_AMPLIFIER == 255);
+HOLDS(holds_198, FIELDSTOP_VISUAL_CHOICE_MAGNIFICATION == 1);
+HOLDS(holds_199, FIELDSTOP_VISUAL_CHOICE_EXIT_PUPIL == 2);
+HOLDS(holds_200, FIELDSTOP_VISUAL_CHOICE_TRUE_FIELD == 4);
+HOLDS(holds_201, FIELDSTOP_VISUAL_CHOICE_FIT == 8);
+HOLDS(holds_202, FIELDSTOP_VISUAL_CHOICE_FACT_WIDE_EXIT_PUPIL == 1);
+HOLDS(holds_203, FIELDSTOP_VISUAL_CHOICE_FACT_EMPTY_MAGNIFICATION == 2);
+HOLDS(holds_204, FIELDSTOP_VISUAL_CHOICE_FACT_FIELD_FROM_APPARENT == 4);
+HOLDS(holds_205, FIELDSTOP_VISUAL_CHOICE_FACT_SEEING_SHOWS == 8);
+HOLDS(holds_206, FIELDSTOP_VISUAL_CHOICE_FACT_SERVES == 16);
+HOLDS(holds_207, FIELDSTOP_VISUAL_CHOICE_FACT_UNDER_RESOLUTION == 32);
+HOLDS(holds_208, FIELDSTOP_VISUAL_CHOICE_FACT_UNDER_SEEING == 64);
+HOLDS(holds_209, FIELDSTOP_CAMERA_CHOICE_FRAME_WIDTH == 1);
+HOLDS(holds_210, FIELDSTOP_CAMERA_CHOICE_FRAME_HEIGHT == 2);
+HOLDS(holds_211, FIELDSTOP_CAMERA_CHOICE_PIXEL_SCALE == 4);
+HOLDS(holds_212, FIELDSTOP_CAMERA_CHOICE_PIXELS_PER_FWHM == 8);
+HOLDS(holds_213, FIELDSTOP_CAMERA_CHOICE_TILES == 16);
+HOLDS(holds_214, FIELDSTOP_CAMERA_CHOICE_FACT_COARSE_SAMPLING == 1);
+HOLDS(holds_215, FIELDSTOP_CAMERA_CHOICE_FACT_FINE_SAMPLING == 2);
+HOLDS(holds_216, FIELDSTOP_CAMERA_CHOICE_FACT_FITS == 4);
+HOLDS(holds_217, FIELDSTOP_FOCUS_FOCAL_RATIO == 1);
+HOLDS(holds_218, FIELDSTOP_FOCUS_DEPTH == 2);
+HOLDS(holds_219, FIELDSTOP_FOCUS_DEPTH_STEPS == 4);
+HOLDS(holds_220, FIELDSTOP_FOCUS_TEMPERATURE == 8);
+HOLDS(holds_221, FIELDSTOP_FOCUS_BLUR == 16);
+HOLDS(holds_222, FIELDSTOP_FOCUS_BLUR_ANGLE == 32);
+HOLDS(holds_223, FIELDSTOP_FOCUS_WAVEFRONT == 64);
+HOLDS(holds_224, FIELDSTOP_FOCUS_ALL == 127);
+HOLDS(holds_225, FIELDSTOP_FOCUS_FACT_COARSE_STEP == 1);
+HOLDS(holds_226, FIELDSTOP_FOCUS_FACT_OUT_OF_FOCUS == 2);
+HOLDS(holds_227, FIELDSTOP_NEWTONIAN_DIAGONAL == 1);
+HOLDS(holds_228, FIELDSTOP_NEWTONIAN_DIAGONAL_OFFSET == 2);
+HOLDS(holds_229, FIELDSTOP_NEWTONIAN_OBSTRUCTION == 4);
+HOLDS(holds_230, FIELDSTOP_NEWTONIAN_BEAM == 8);
+HOLDS(holds_231, FIELDSTOP_NEWTONIAN_BEAM_SHIFT == 16);
+HOLDS(holds_232, FIELDSTOP_NEWTONIAN_EDGE_LIGHT == 32);
+HOLDS(holds_233, FIELDSTOP_NEWTONIAN_EYEPIECE_HEIGHT == 64);
+HOLDS(holds_234, FIELDSTOP_NEWTONIAN_GREATEST_HEIGHT == 128);
+HOLDS(holds_235, FIELDSTOP_NEWTONIAN_ALL == 255);
+HOLDS(holds_236, FIELDSTOP_NEWTONIAN_FACT_SMALL_DIAGONAL == 1);
+HOLDS(holds_237, FIELDSTOP_NEWTONIAN_FACT_WIDER_THAN_TOLD == 2);
+HOLDS(holds_238, FIELDSTOP_NEWTONIAN_FACT_HIGH_EYEPIECE == 4);
+HOLDS(holds_239, FIELDSTOP_NEWTONIAN_FACT_HIGH_REACHED == 8);
+HOLDS(holds_240, FIELDSTOP_TWO_MIRROR_SECONDARY_MAGNIFICATION == 1);
+HOLDS(holds_241, FIELDSTOP_TWO_MIRROR_SEPARATION == 2);
+HOLDS(holds_242, FIELDSTOP_TWO_MIRROR_SECONDARY == 4);
+HOLDS(holds_243, FIELDSTOP_TWO_MIRROR_SECONDARY_RADIUS == 8);
+HOLDS(holds_244, FIELDSTOP_TWO_MIRROR_OBSTRUCTION == 16);
+HOLDS(holds_245, FIELDSTOP_TWO_MIRROR_LENGTH == 32);
+HOLDS(holds_246, FIELDSTOP_TWO_MIRROR_LENGTH_SHARE == 64);
+HOLDS(holds_247, FIELDSTOP_TWO_MIRROR_ALL == 127);
+HOLDS(holds_248, FIELDSTOP_TWO_MIRROR_FACT_WIDER_THAN_TOLD == 1);
+HOLDS(holds_249, FIELDSTOP_ANGLE_BY_SIZE == 0);
+HOLDS(holds_250, FIELDSTOP_ANGLE_DECIMAL_DEGREES == 1);
+HOLDS(holds_251, FIELDSTOP_ANGLE_DEGREES_MINUTES == 2);
+HOLDS(holds_252, FIELDSTOP_ANGLE_MINUTES_SECONDS == 3);
+HOLDS(holds_253, FIELDSTOP_ANGLE_DECIMAL_SECONDS == 4);
+HOLDS(holds_254, FIELDSTOP_UNIT_NONE == 0);
+HOLDS(holds_255, FIELDSTOP_UNIT_DEGREE == 1);
+HOLDS(holds_256, FIELDSTOP_UNIT_MINUTE == 2);
+HOLDS(holds_257, FIELDSTOP_UNIT_SECOND == 3);
+HOLDS(holds_258, FIELDSTOP_UNIT_DECIMAL_DEGREE == 4);
+HOLDS(holds_259, FIELDSTOP_UNIT_METRE == 5);
+HOLDS(holds_260, FIELDSTOP_UNIT_MILLIMETRE == 6);
+HOLDS(holds_261, FIELDSTOP_UNIT_MICROMETRE == 7);
+HOLDS(holds_262, FIELDSTOP_UNIT_NANOMETRE == 8);
+HOLDS(holds_263, FIELDSTOP_UNIT_TIMES == 9);
+HOLDS(holds_264, FIELDSTOP_UNIT_PERCENT == 10);
+HOLDS(holds_265, FIELDSTOP_UNIT_MAGNITUDE == 11);
+HOLDS(holds_266, FIELDSTOP_UNIT_FOCAL_RATIO == 12);
+HOLDS(holds_267, FIELDSTOP_UNIT_PIXEL == 13);
+HOLDS(holds_268, FIELDSTOP_UNIT_SECOND_PER_PIXEL == 14);
+HOLDS(holds_269, FIELDSTOP_UNIT_SECOND_PER_MILLIMETRE == 15);
+HOLDS(holds_270, FIELDSTOP_UNIT_SECOND_PER_TIME == 16);
+HOLDS(holds_271, FIELDSTOP_UNIT_PER_MILLIMETRE == 17);
+HOLDS(holds_272, FIELDSTOP_UNIT_TIME == 18);
+HOLDS(holds_273, FIELDSTOP_UNIT_STEP == 19);
+HOLDS(holds_274, FIELDSTOP_UNIT_KELVIN == 20);
+HOLDS(holds_275, FIELDSTOP_UNIT_WATT == 21);
+HOLDS(holds_276, FIELDSTOP_VISUAL_ROWS == 16);
+HOLDS(holds_277, FIELDSTOP_VISUAL_ROW_MAGNIFICATION == 0);
+HOLDS(holds_278, FIELDSTOP_VISUAL_ROW_TRUE_FIELD == 1);
+HOLDS(holds_279, FIELDSTOP_VISUAL_ROW_EXIT_PUPIL == 2);
+HOLDS(holds_280, FIELDSTOP_VISUAL_ROW_RESOLUTION == 3);
+HOLDS(holds_281, FIELDSTOP_VISUAL_ROW_FAINTEST_STAR == 4);
+HOLDS(holds_282, FIELDSTOP_VISUAL_ROW_SURFACE_BRIGHTNESS == 5);
+HOLDS(holds_283, FIELDSTOP_VISUAL_ROW_FOCAL_RATIO == 6);
+HOLDS(holds_284, FIELDSTOP_VISUAL_ROW_FOCAL_LENGTH == 7);
+HOLDS(holds_285, FIELDSTOP_VISUAL_ROW_LOWEST_MAGNIFICATION == 8);
+HOLDS(holds_286, FIELDSTOP_VISUAL_ROW_RESOLVING_MAGNIFICATION == 9);
+HOLDS(holds_287, FIELDSTOP_VISUAL_ROW_DAWES_LIMIT == 10);
+HOLDS(holds_288, FIELDSTOP_VISUAL_ROW_EFFECTIVE_APERTURE == 11);
+HOLDS(holds_289, FIELDSTOP_VISUAL_ROW_WIDE_EXIT_PUPIL == 12);
+HOLDS(holds_290, FIELDSTOP_VISUAL_ROW_EMPTY_MAGNIFICATION == 13);
+HOLDS(holds_291, FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT == 14);
+HOLDS(holds_292, FIELDSTOP_VISUAL_ROW_SEEING_LIMITED == 15);
+HOLDS(holds_293, FIELDSTOP_CAMERA_ROWS == 14);
+HOLDS(holds_294, FIELDSTOP_CAMERA_ROW_FRAME_WIDTH == 0);
+HOLDS(holds_295, FIELDSTOP_CAMERA_ROW_FRAME_HEIGHT == 1);
+HOLDS(holds_296, FIELDSTOP_CAMERA_ROW_PIXEL_SCALE == 2);
+HOLDS(holds_297, FIELDSTOP_CAMERA_ROW_STAR_WIDTH == 3);
+HOLDS(holds_298, FIELDSTOP_CAMERA_ROW_STAR_PIXELS == 4);
+HOLDS(holds_299, FIELDSTOP_CAMERA_ROW_FOCAL_RATIO == 5);
+HOLDS(holds_300, FIELDSTOP_CAMERA_ROW_T_NUMBER == 6);
+HOLDS(holds_301, FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH == 7);
+HOLDS(holds_302, FIELDSTOP_CAMERA_ROW_PLATE_SCALE == 8);
+HOLDS(holds_303, FIELDSTOP_CAMERA_ROW_DIAGONAL == 9);
+HOLDS(holds_304, FIELDSTOP_CAMERA_ROW_CUTOFF == 10);
+HOLDS(holds_305, FIELDSTOP_CAMERA_ROW_NYQUIST_PIXEL == 11);
+HOLDS(holds_306, FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING == 12);
+HOLDS(holds_307, FIELDSTOP_CAMERA_ROW_FINE_SAMPLING == 13);
+HOLDS(holds_308, FIELDSTOP_CAUTION_HIGH_EYEPIECE == 0);
+HOLDS(holds_309, FIELDSTOP_CAUTION_SUN == 1);
+HOLDS(holds_310, FIELDSTOP_FOCUS_ROWS == 9);
+HOLDS(holds_311, FIELDSTOP_FOCUS_ROW_DEPTH_OF_FOCUS == 0);
+HOLDS(holds_312, FIELDSTOP_FOCUS_ROW_DEPTH_STEPS == 1);
+HOLDS(holds_313, FIELDSTOP_FOCUS_ROW_TEMPERATURE == 2);
+HOLDS(holds_314, FIELDSTOP_FOCUS_ROW_BLUR == 3);
+HOLDS(holds_315, FIELDSTOP_FOCUS_ROW_BLUR_ANGLE == 4);
+HOLDS(holds_316, FIELDSTOP_FOCUS_ROW_WAVEFRONT == 5);
+HOLDS(holds_317, FIELDSTOP_FOCUS_ROW_FOCAL_RATIO == 6);
+HOLDS(holds_318, FIELDSTOP_FOCUS_ROW_COARSE_STEP == 7);
+HOLDS(holds_319, FIELDSTOP_FOCUS_ROW_OUT_OF_FOCUS == 8);
+HOLDS(holds_320, FIELDSTOP_NEWTONIAN_ROWS == 12);
+HOLDS(holds_321, FIELDSTOP_NEWTONIAN_ROW_DIAGONAL == 0);
+HOLDS(holds_322, FIELDSTOP_NEWTONIAN_ROW_DIAGONAL_OFFSET == 1);
+HOLDS(holds_323, FIELDSTOP_NEWTONIAN_ROW_OBSTRUCTION == 2);
+HOLDS(holds_324, FIELDSTOP_NEWTONIAN_ROW_EDGE_LIGHT == 3);
+HOLDS(holds_325, FIELDSTOP_NEWTONIAN_ROW_EYEPIECE_HEIGHT == 4);
+HOLDS(holds_326, FIELDSTOP_NEWTONIAN_ROW_GREATEST_HEIGHT == 5);
+HOLDS(holds_327, FIELDSTOP_NEWTONIAN_ROW_BEAM == 6);
+HOLDS(holds_328, FIELDSTOP_NEWTONIAN_ROW_BEAM_SHIFT == 7);
+HOLDS(holds_329, FIELDSTOP_NEWTONIAN_ROW_SMALL_DIAGONAL == 8);
+HOLDS(holds_330, FIELDSTOP_NEWTONIAN_ROW_WIDER_THAN_TOLD == 9);
+HOLDS(holds_331, FIELDSTOP_NEWTONIAN_ROW_HIGH_EYEPIECE == 10);
+HOLDS(holds_332, FIELDSTOP_NEWTONIAN_ROW_HIGH_REACHED == 11);
+HOLDS(holds_333, FIELDSTOP_TWO_MIRROR_ROWS == 8);
+HOLDS(holds_334, FIELDSTOP_TWO_MIRROR_ROW_SEPARATION == 0);
+HOLDS(holds_335, FIELDSTOP_TWO_MIRROR_ROW_SECONDARY == 1);
+HOLDS(holds_336, FIELDSTOP_TWO_MIRROR_ROW_RADIUS == 2);
+HOLDS(holds_337, FIELDSTOP_TWO_MIRROR_ROW_OBSTRUCTION == 3);
+HOLDS(holds_338, FIELDSTOP_TWO_MIRROR_ROW_SECONDARY_MAGNIFICATION == 4);
+HOLDS(holds_339, FIELDSTOP_TWO_MIRROR_ROW_LENGTH == 5);
+HOLDS(holds_340, FIELDSTOP_TWO_MIRROR_ROW_LENGTH_SHARE == 6);
+HOLDS(holds_341, FIELDSTOP_TWO_MIRROR_ROW_WIDER_THAN_TOLD == 7);
 
 typedef void (*any_function)(void);
 static volatile any_function present;
@@ -1402,6 +1528,26 @@ int main(void)
         present = (any_function)function;
     }
     {
+        fieldstop_status (*function)(const struct fieldstop_newtonian_layout *) = fieldstop_newtonian_layout_check;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_two_mirror_layout *) = fieldstop_two_mirror_layout_check;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_telescope *, const struct fieldstop_focuser *, const struct fieldstop_observer *, uint32_t, struct fieldstop_focus_readout *) = fieldstop_focus_readout_compute;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_telescope *, const struct fieldstop_newtonian_layout *, uint32_t, struct fieldstop_newtonian_readout *) = fieldstop_newtonian_readout_compute;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_telescope *, const struct fieldstop_two_mirror_layout *, uint32_t, struct fieldstop_two_mirror_readout *) = fieldstop_two_mirror_readout_compute;
+        present = (any_function)function;
+    }
+    {
         const struct fieldstop_text_style * (*function)(void) = fieldstop_text_style_ascii;
         present = (any_function)function;
     }
@@ -1511,6 +1657,90 @@ int main(void)
     }
     {
         fieldstop_status (*function)(const char *, uint16_t, const char *, uint16_t, const struct fieldstop_text_style *, struct fieldstop_span *) = fieldstop_text_changed;
+        present = (any_function)function;
+    }
+    {
+        const char * (*function)(uint8_t) = fieldstop_text_caution;
+        present = (any_function)function;
+    }
+    {
+        uint8_t (*function)(const char *, uint8_t) = fieldstop_text_caution_lines;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const char *, uint8_t, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_caution_line;
+        present = (any_function)function;
+    }
+    {
+        const char *const * (*function)(void) = fieldstop_text_focus_labels;
+        present = (any_function)function;
+    }
+    {
+        const char *const * (*function)(void) = fieldstop_text_focus_labels_short;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_focus_readout *, const char *const *, const struct fieldstop_text_style *, uint8_t, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_focus_line;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_focus_readout *, uint8_t, const struct fieldstop_text_style *, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_focus_value;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_focus_readout *, uint8_t, const struct fieldstop_text_style *, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_focus_number;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_focus_readout *, uint8_t, const struct fieldstop_text_style *, char *, uint16_t, uint16_t *) = fieldstop_text_focus_unit;
+        present = (any_function)function;
+    }
+    {
+        const char *const * (*function)(void) = fieldstop_text_newtonian_labels;
+        present = (any_function)function;
+    }
+    {
+        const char *const * (*function)(void) = fieldstop_text_newtonian_labels_short;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_newtonian_readout *, const char *const *, const struct fieldstop_text_style *, uint8_t, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_newtonian_line;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_newtonian_readout *, uint8_t, const struct fieldstop_text_style *, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_newtonian_value;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_newtonian_readout *, uint8_t, const struct fieldstop_text_style *, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_newtonian_number;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_newtonian_readout *, uint8_t, const struct fieldstop_text_style *, char *, uint16_t, uint16_t *) = fieldstop_text_newtonian_unit;
+        present = (any_function)function;
+    }
+    {
+        const char *const * (*function)(void) = fieldstop_text_two_mirror_labels;
+        present = (any_function)function;
+    }
+    {
+        const char *const * (*function)(void) = fieldstop_text_two_mirror_labels_short;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_two_mirror_readout *, const char *const *, const struct fieldstop_text_style *, uint8_t, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_two_mirror_line;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_two_mirror_readout *, uint8_t, const struct fieldstop_text_style *, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_two_mirror_value;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_two_mirror_readout *, uint8_t, const struct fieldstop_text_style *, uint8_t, char *, uint16_t, uint16_t *) = fieldstop_text_two_mirror_number;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_two_mirror_readout *, uint8_t, const struct fieldstop_text_style *, char *, uint16_t, uint16_t *) = fieldstop_text_two_mirror_unit;
         present = (any_function)function;
     }
     return present == 0;

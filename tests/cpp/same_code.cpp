@@ -4204,6 +4204,78 @@ fieldstop_status typed_filled_camera_readout_compute(const fieldstop::telescope 
     return given.status().number();
 }
 
+fieldstop_status plain_newtonian_layout_check(const fieldstop::newtonian_layout *layout)
+{
+    return ::fieldstop_newtonian_layout_check(&layout->c());
+}
+fieldstop_status typed_newtonian_layout_check(const fieldstop::newtonian_layout *layout)
+{
+    return fieldstop::newtonian_layout_check(*layout).number();
+}
+
+fieldstop_status plain_two_mirror_layout_check(const fieldstop::two_mirror_layout *layout)
+{
+    return ::fieldstop_two_mirror_layout_check(&layout->c());
+}
+fieldstop_status typed_two_mirror_layout_check(const fieldstop::two_mirror_layout *layout)
+{
+    return fieldstop::two_mirror_layout_check(*layout).number();
+}
+
+fieldstop_status plain_filled_focus_readout_compute(const fieldstop::telescope *telescope, const fieldstop::focuser *focuser, const fieldstop::observer *observer, uint32_t wanted, struct fieldstop_focus_readout *out)
+{
+    struct fieldstop_focus_readout given;
+    const fieldstop_status number = ::fieldstop_focus_readout_compute(&telescope->c(), &focuser->c(), &observer->c(), wanted, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_focus_readout_compute(const fieldstop::telescope *telescope, const fieldstop::focuser *focuser, const fieldstop::observer *observer, uint32_t wanted, struct fieldstop_focus_readout *out)
+{
+    const auto given = fieldstop::focus_readout_compute(*telescope, *focuser, *observer, wanted);
+    if (given) {
+        *out = given.value().c();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_newtonian_readout_compute(const fieldstop::telescope *telescope, const fieldstop::newtonian_layout *layout, uint32_t wanted, struct fieldstop_newtonian_readout *out)
+{
+    struct fieldstop_newtonian_readout given;
+    const fieldstop_status number = ::fieldstop_newtonian_readout_compute(&telescope->c(), &layout->c(), wanted, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_newtonian_readout_compute(const fieldstop::telescope *telescope, const fieldstop::newtonian_layout *layout, uint32_t wanted, struct fieldstop_newtonian_readout *out)
+{
+    const auto given = fieldstop::newtonian_readout_compute(*telescope, *layout, wanted);
+    if (given) {
+        *out = given.value().c();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_two_mirror_readout_compute(const fieldstop::telescope *telescope, const fieldstop::two_mirror_layout *layout, uint32_t wanted, struct fieldstop_two_mirror_readout *out)
+{
+    struct fieldstop_two_mirror_readout given;
+    const fieldstop_status number = ::fieldstop_two_mirror_readout_compute(&telescope->c(), &layout->c(), wanted, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_two_mirror_readout_compute(const fieldstop::telescope *telescope, const fieldstop::two_mirror_layout *layout, uint32_t wanted, struct fieldstop_two_mirror_readout *out)
+{
+    const auto given = fieldstop::two_mirror_readout_compute(*telescope, *layout, wanted);
+    if (given) {
+        *out = given.value().c();
+    }
+    return given.status().number();
+}
+
 fieldstop_status plain_text_count(uint32_t count, uint8_t unit, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
 {
     uint16_t given;
@@ -4558,6 +4630,240 @@ fieldstop_status plain_filled_text_changed(const char *shown, uint16_t shown_len
 fieldstop_status typed_filled_text_changed(const char *shown, uint16_t shown_length, const char *line, uint16_t line_length, const fieldstop::text_style *style, struct fieldstop_span *out)
 {
     const auto given = fieldstop::text_changed(shown, shown_length, line, line_length, *style);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_caution_line(const char *sentence, uint8_t columns, uint8_t line, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_caution_line(sentence, columns, line, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_caution_line(const char *sentence, uint8_t columns, uint8_t line, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_caution_line(sentence, columns, line, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_focus_line(const fieldstop::focus_readout *readout, const char *const *labels, const fieldstop::text_style *style, uint8_t columns, uint8_t line, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_focus_line(&readout->c(), labels, style, columns, line, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_focus_line(const fieldstop::focus_readout *readout, const char *const *labels, const fieldstop::text_style *style, uint8_t columns, uint8_t line, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_focus_line(*readout, labels, *style, columns, line, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_focus_value(const fieldstop::focus_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_focus_value(&readout->c(), row, style, width, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_focus_value(const fieldstop::focus_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_focus_value(*readout, row, *style, width, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_focus_number(const fieldstop::focus_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_focus_number(&readout->c(), row, style, width, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_focus_number(const fieldstop::focus_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_focus_number(*readout, row, *style, width, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_focus_unit(const fieldstop::focus_readout *readout, uint8_t row, const fieldstop::text_style *style, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_focus_unit(&readout->c(), row, style, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_focus_unit(const fieldstop::focus_readout *readout, uint8_t row, const fieldstop::text_style *style, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_focus_unit(*readout, row, *style, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_newtonian_line(const fieldstop::newtonian_readout *readout, const char *const *labels, const fieldstop::text_style *style, uint8_t columns, uint8_t line, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_newtonian_line(&readout->c(), labels, style, columns, line, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_newtonian_line(const fieldstop::newtonian_readout *readout, const char *const *labels, const fieldstop::text_style *style, uint8_t columns, uint8_t line, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_newtonian_line(*readout, labels, *style, columns, line, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_newtonian_value(const fieldstop::newtonian_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_newtonian_value(&readout->c(), row, style, width, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_newtonian_value(const fieldstop::newtonian_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_newtonian_value(*readout, row, *style, width, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_newtonian_number(const fieldstop::newtonian_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_newtonian_number(&readout->c(), row, style, width, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_newtonian_number(const fieldstop::newtonian_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_newtonian_number(*readout, row, *style, width, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_newtonian_unit(const fieldstop::newtonian_readout *readout, uint8_t row, const fieldstop::text_style *style, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_newtonian_unit(&readout->c(), row, style, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_newtonian_unit(const fieldstop::newtonian_readout *readout, uint8_t row, const fieldstop::text_style *style, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_newtonian_unit(*readout, row, *style, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_two_mirror_line(const fieldstop::two_mirror_readout *readout, const char *const *labels, const fieldstop::text_style *style, uint8_t columns, uint8_t line, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_two_mirror_line(&readout->c(), labels, style, columns, line, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_two_mirror_line(const fieldstop::two_mirror_readout *readout, const char *const *labels, const fieldstop::text_style *style, uint8_t columns, uint8_t line, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_two_mirror_line(*readout, labels, *style, columns, line, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_two_mirror_value(const fieldstop::two_mirror_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_two_mirror_value(&readout->c(), row, style, width, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_two_mirror_value(const fieldstop::two_mirror_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_two_mirror_value(*readout, row, *style, width, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_two_mirror_number(const fieldstop::two_mirror_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_two_mirror_number(&readout->c(), row, style, width, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_two_mirror_number(const fieldstop::two_mirror_readout *readout, uint8_t row, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_two_mirror_number(*readout, row, *style, width, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_text_two_mirror_unit(const fieldstop::two_mirror_readout *readout, uint8_t row, const fieldstop::text_style *style, char *text, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_text_two_mirror_unit(&readout->c(), row, style, text, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_text_two_mirror_unit(const fieldstop::two_mirror_readout *readout, uint8_t row, const fieldstop::text_style *style, char *text, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::text_two_mirror_unit(*readout, row, *style, fieldstop::buffer(text, capacity));
     if (given) {
         *out = given.value();
     }

@@ -221,7 +221,7 @@ fn member_of(
         let group = of.name.strip_prefix("fieldstop_").unwrap().strip_suffix("_readout").unwrap_or_default();
         let told = match group {
             "" => format!("{}, available: {raw}.", name.replace('_', " ")),
-            group => format!("{group} readout, wanted and available: {raw}."),
+            group => format!("{} readout, wanted and available: {raw}.", group.replace('_', " ")),
         };
         match declared.constants.iter().find(|c| c.comment.to_lowercase() == told) {
             Some(bit) => writeln!(

@@ -96,7 +96,7 @@ fn planted_breaks_are_seen() {
         ),
         ("argument more", breaks(magnification, &magnification.replacen('(', "(uint32_t barlow_q16, ", 1))),
         ("cause renumbered", breaks("#define FIELDSTOP_OVERFLOW 5", "#define FIELDSTOP_OVERFLOW 6")),
-        ("constant removed", breaks("#define FIELDSTOP_CAMERA_ALL 511", "")),
+        ("constant removed", breaks("#define FIELDSTOP_CAMERA_ALL 4095", "")),
         ("macro removed", breaks("#define FIELDSTOP_CAUSE(status)", "#define FIELDSTOP_REASON(status)")),
         (
             "status widened",
