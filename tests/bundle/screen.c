@@ -10,7 +10,10 @@ int main(void)
 {
     fieldstop_visual_readout readout;
     fieldstop_status status = fieldstop_visual_readout_compute(&telescope, &eyepiece, &observer, 0xffffffffu, &readout);
-    float magnification;
+    float magnification = 0.0f;
+#ifndef __AVR__
+    double in_double = 0.0;
+#endif
     uint8_t row;
 
     for (row = 0; row < 4 && status == 0; row++) {
@@ -31,5 +34,11 @@ int main(void)
     if (status != 0 || magnification != 40.0f) {
         part_put('!');
     }
+#ifndef __AVR__
+    status = fieldstop_magnification_f64(1130.0, 28.25, &in_double);
+    if (status != 0 || in_double != 40.0) {
+        part_put('?');
+    }
+#endif
     return part_end();
 }
