@@ -13,6 +13,7 @@ pub mod layout;
 pub mod light;
 pub mod resolution;
 pub mod setup;
+pub mod setup_choice;
 mod short;
 pub mod status;
 pub mod text;
