@@ -37,7 +37,7 @@ int main()
         part_put('\n');
     }
     const auto magnification = fieldstop::magnification_f32(fieldstop::millimetres_f32(1130.0f), fieldstop::millimetres_f32(28.25f));
-    if (!magnification || magnification.value().count() != 40.0f) {
+    if (!magnification || magnification.value() != 40.0f) {
         part_put('!');
     }
     return part_end();
