@@ -17,7 +17,7 @@ asked = subprocess.run(
 )
 if asked.returncode != 0:
     said = [line.split('"')[1] for line in asked.stderr.splitlines() if line.count('"') > 1 and "#error" in line]
-    raise SystemExit("\n".join(said or [asked.stderr, "fieldstop: the compiler does not tell the part"]))
+    raise SystemExit(said[0] if said else asked.stderr + "fieldstop: the compiler does not tell the part")
 part = asked.stdout.strip()
 print("fieldstop: the library for " + part)
 env.Append(LIBPATH=[os.path.join(root, "lib", part)], LIBS=["fieldstop"])  # noqa: F821
