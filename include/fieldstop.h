@@ -3232,7 +3232,7 @@ fieldstop_status fieldstop_singlet_colour_shift_f64(double focal_length_mm,
 FIELDSTOP_CHECKED
 fieldstop_status fieldstop_singlet_colour_blur_fx(uint32_t focal_ratio_q16,
                                                   uint32_t abbe_q16,
-                                                  uint32_t *blur_uas);
+                                                  uint32_t *blur_angle_uas);
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
@@ -3547,7 +3547,7 @@ fieldstop_status fieldstop_secondary_spectrum_f64(double focal_length_mm,
 #define FIELDSTOP_FOCUS_TEMPERATURE 8
 /** Focus readout, wanted and available: blur_nm. */
 #define FIELDSTOP_FOCUS_BLUR 16
-/** Focus readout, wanted and available: blur_uas. */
+/** Focus readout, wanted and available: blur_angle_uas. */
 #define FIELDSTOP_FOCUS_BLUR_ANGLE 32
 /** Focus readout, wanted and available: wavefront_nm. */
 #define FIELDSTOP_FOCUS_WAVEFRONT 64
@@ -3595,7 +3595,7 @@ fieldstop_status fieldstop_secondary_spectrum_f64(double focal_length_mm,
 #define FIELDSTOP_TWO_MIRROR_OBSTRUCTION 16
 /** Two mirror readout, wanted and available: length_um. */
 #define FIELDSTOP_TWO_MIRROR_LENGTH 32
-/** Two mirror readout, wanted and available: length_q16. */
+/** Two mirror readout, wanted and available: length_share_q16. */
 #define FIELDSTOP_TWO_MIRROR_LENGTH_SHARE 64
 /** Two mirror readout, wanted: every member. */
 #define FIELDSTOP_TWO_MIRROR_ALL 127
@@ -3955,7 +3955,7 @@ typedef struct fieldstop_focus_readout {
     /** Width of a star's image at the defocus asked about, by geometry, nanometres: defocus / N. */
     uint32_t blur_nm;
     /** The same on the sky, microarcseconds: (1 rad) blur / (f k). */
-    uint32_t blur_uas;
+    uint32_t blur_angle_uas;
     /** Error of the wavefront there, peak to valley, nanometres: defocus / (8 N^2). */
     uint32_t wavefront_nm;
 } fieldstop_focus_readout;
@@ -4009,7 +4009,7 @@ typedef struct fieldstop_two_mirror_readout {
     /** From the secondary to the focus, micrometres: the separation and the back focus. */
     uint32_t length_um;
     /** That length over the focal length: how short the tube is for it. */
-    uint32_t length_q16;
+    uint32_t length_share_q16;
 } fieldstop_two_mirror_readout;
 
 /**

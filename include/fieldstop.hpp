@@ -566,7 +566,7 @@ constexpr uint32_t focus_depth_steps = FIELDSTOP_FOCUS_DEPTH_STEPS;
 constexpr uint32_t focus_temperature = FIELDSTOP_FOCUS_TEMPERATURE;
 /** Focus readout, wanted and available: blur_nm */
 constexpr uint32_t focus_blur = FIELDSTOP_FOCUS_BLUR;
-/** Focus readout, wanted and available: blur_uas */
+/** Focus readout, wanted and available: blur_angle_uas */
 constexpr uint32_t focus_blur_angle = FIELDSTOP_FOCUS_BLUR_ANGLE;
 /** Focus readout, wanted and available: wavefront_nm */
 constexpr uint32_t focus_wavefront = FIELDSTOP_FOCUS_WAVEFRONT;
@@ -614,7 +614,7 @@ constexpr uint32_t two_mirror_secondary_radius = FIELDSTOP_TWO_MIRROR_SECONDARY_
 constexpr uint32_t two_mirror_obstruction = FIELDSTOP_TWO_MIRROR_OBSTRUCTION;
 /** Two mirror readout, wanted and available: length_um */
 constexpr uint32_t two_mirror_length = FIELDSTOP_TWO_MIRROR_LENGTH;
-/** Two mirror readout, wanted and available: length_q16 */
+/** Two mirror readout, wanted and available: length_share_q16 */
 constexpr uint32_t two_mirror_length_share = FIELDSTOP_TWO_MIRROR_LENGTH_SHARE;
 /** Two mirror readout, wanted: every member */
 constexpr uint32_t two_mirror_all = FIELDSTOP_TWO_MIRROR_ALL;
@@ -1483,9 +1483,9 @@ public:
         return (raw_.available & FIELDSTOP_FOCUS_BLUR) != 0 ? result<nanometres>(nanometres(raw_.blur_nm)) : result<nanometres>(status(FIELDSTOP_UNDEFINED));
     }
     /** The same on the sky, microarcseconds: (1 rad) blur / (f k) */
-    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<microarcseconds> blur() const
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<microarcseconds> blur_angle() const
     {
-        return (raw_.available & FIELDSTOP_FOCUS_BLUR_ANGLE) != 0 ? result<microarcseconds>(microarcseconds(raw_.blur_uas)) : result<microarcseconds>(status(FIELDSTOP_UNDEFINED));
+        return (raw_.available & FIELDSTOP_FOCUS_BLUR_ANGLE) != 0 ? result<microarcseconds>(microarcseconds(raw_.blur_angle_uas)) : result<microarcseconds>(status(FIELDSTOP_UNDEFINED));
     }
     /** Error of the wavefront there, peak to valley, nanometres: defocus / (8 N^2) */
     FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<nanometres> wavefront() const
@@ -1607,9 +1607,9 @@ public:
         return (raw_.available & FIELDSTOP_TWO_MIRROR_LENGTH) != 0 ? result<micrometres>(micrometres(raw_.length_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
     }
     /** That length over the focal length: how short the tube is for it */
-    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> length() const
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> length_share() const
     {
-        return (raw_.available & FIELDSTOP_TWO_MIRROR_LENGTH_SHARE) != 0 ? result<q16>(q16(raw_.length_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+        return (raw_.available & FIELDSTOP_TWO_MIRROR_LENGTH_SHARE) != 0 ? result<q16>(q16(raw_.length_share_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
     }
 
 private:

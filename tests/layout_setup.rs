@@ -74,7 +74,7 @@ fn focus_values(t: &Telescope, f: &Focuser, r: &FocusReadout) -> Vec<(u32, u32, 
         (F::DEPTH_STEPS, r.depth_steps, steps),
         (F::TEMPERATURE, r.temperature_mk, temperature.map(|v| v.0)),
         (F::BLUR, r.blur_nm, blur.map(|v| v.0)),
-        (F::BLUR_ANGLE, r.blur_uas, angle),
+        (F::BLUR_ANGLE, r.blur_angle_uas, angle),
         (F::WAVEFRONT, r.wavefront_nm, wave.map(|v| v.0)),
     ]
 }
@@ -142,7 +142,7 @@ fn mirror_values(t: &Telescope, l: &TwoMirrorLayout, r: &TwoMirrorReadout) -> Ve
         ),
         (M::OBSTRUCTION, r.obstruction_q16, secondary.and_then(|s| ratio_q16(s.into(), aperture.0))),
         (M::LENGTH, r.length_um, length),
-        (M::LENGTH_SHARE, r.length_q16, length.and_then(|length| ratio_q16(length.into(), system.0))),
+        (M::LENGTH_SHARE, r.length_share_q16, length.and_then(|length| ratio_q16(length.into(), system.0))),
     ]
 }
 

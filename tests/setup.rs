@@ -545,7 +545,7 @@ fn layouts_are_as_published() {
         pixels_per_fwhm_q16 40, cutoff_frequency_q16 44, nyquist_pixel_nm 48, diagonal_mas 52);
     layout!(Focuser, 16: motor_step_nm 0, defocus_nm 4, tube_length_um 8, expansion_ppb_per_k 12);
     layout!(FocusReadout, 36: available 0, facts 4, focal_ratio_q16 8, depth_nm 12, depth_steps 16, temperature_mk 20,
-        blur_nm 24, blur_uas 28, wavefront_nm 32);
+        blur_nm 24, blur_angle_uas 28, wavefront_nm 32);
     layout!(NewtonianLayout, 40: focus_distance_um 0, lit_field_um 4, edge_offset_um 8, diagonal_um 12,
         axis_height_um 16, reach_um 20, altitude_bam 24, lowest_altitude_bam 28, highest_altitude_bam 32,
         height_limit_um 36);
@@ -553,7 +553,7 @@ fn layouts_are_as_published() {
         beam_um 20, beam_shift_um 24, edge_light_q16 28, eyepiece_height_um 32, greatest_height_um 36);
     layout!(TwoMirrorLayout, 12: primary_focal_um 0, back_focus_um 4, lit_field_um 8);
     layout!(TwoMirrorReadout, 36: available 0, facts 4, secondary_magnification_q16 8, separation_um 12,
-        secondary_um 16, secondary_radius_um 20, obstruction_q16 24, length_um 28, length_q16 32);
+        secondary_um 16, secondary_radius_um 20, obstruction_q16 24, length_um 28, length_share_q16 32);
 }
 
 /// Every size of number about as often, with the edges.

@@ -135,10 +135,10 @@ pub unsafe extern "C" fn fieldstop_singlet_colour_shift_f64(
 pub unsafe extern "C" fn fieldstop_singlet_colour_blur_fx(
     focal_ratio_q16: u32,
     abbe_q16: u32,
-    blur_uas: *mut u32,
+    blur_angle_uas: *mut u32,
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    unsafe { give(blur_uas, 3, || colour::singlet_colour_blur_fx(Q16(focal_ratio_q16), Q16(abbe_q16))) }
+    unsafe { give(blur_angle_uas, 3, || colour::singlet_colour_blur_fx(Q16(focal_ratio_q16), Q16(abbe_q16))) }
 }
 
 /// Gives the diameter on the sky to which a single lens draws a star in blue and red, F and C, at the best focus, in

@@ -17,7 +17,7 @@ pub const FIELDSTOP_FOCUS_DEPTH_STEPS: u32 = 0x0004;
 pub const FIELDSTOP_FOCUS_TEMPERATURE: u32 = 0x0008;
 /// Focus readout, wanted and available: blur_nm.
 pub const FIELDSTOP_FOCUS_BLUR: u32 = 0x0010;
-/// Focus readout, wanted and available: blur_uas.
+/// Focus readout, wanted and available: blur_angle_uas.
 pub const FIELDSTOP_FOCUS_BLUR_ANGLE: u32 = 0x0020;
 /// Focus readout, wanted and available: wavefront_nm.
 pub const FIELDSTOP_FOCUS_WAVEFRONT: u32 = 0x0040;
@@ -67,7 +67,7 @@ pub const FIELDSTOP_TWO_MIRROR_SECONDARY_RADIUS: u32 = 0x0008;
 pub const FIELDSTOP_TWO_MIRROR_OBSTRUCTION: u32 = 0x0010;
 /// Two mirror readout, wanted and available: length_um.
 pub const FIELDSTOP_TWO_MIRROR_LENGTH: u32 = 0x0020;
-/// Two mirror readout, wanted and available: length_q16.
+/// Two mirror readout, wanted and available: length_share_q16.
 pub const FIELDSTOP_TWO_MIRROR_LENGTH_SHARE: u32 = 0x0040;
 /// Two mirror readout, wanted: every member.
 pub const FIELDSTOP_TWO_MIRROR_ALL: u32 = 0x007f;

@@ -26,7 +26,7 @@ pub struct FocusReadout {
     /// Width of a star's image at the defocus asked about, by geometry, nanometres: defocus / N.
     pub blur_nm: u32,
     /// The same on the sky, microarcseconds: (1 rad) blur / (f k).
-    pub blur_uas: u32,
+    pub blur_angle_uas: u32,
     /// Error of the wavefront there, peak to valley, nanometres: defocus / (8 N^2).
     pub wavefront_nm: u32,
 }
@@ -45,7 +45,7 @@ impl FocusReadout {
     pub const TEMPERATURE: u32 = 0x0008;
     /// `blur_nm`
     pub const BLUR: u32 = 0x0010;
-    /// `blur_uas`
+    /// `blur_angle_uas`
     pub const BLUR_ANGLE: u32 = 0x0020;
     /// `wavefront_nm`
     pub const WAVEFRONT: u32 = 0x0040;
@@ -141,7 +141,7 @@ impl FocusReadout {
                 Nanometres(0) => Ok(Microarcseconds(0)),
                 blur => pixel_scale_fx(blur, focal_length),
             };
-            tell!(out, wanted, BLUR_ANGLE, blur_uas, angle);
+            tell!(out, wanted, BLUR_ANGLE, blur_angle_uas, angle);
         }
         tell!(out, wanted, WAVEFRONT, wavefront_nm, defocus_wavefront_fx(defocus, focal_ratio));
     }

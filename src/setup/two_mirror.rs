@@ -56,7 +56,7 @@ pub struct TwoMirrorReadout {
     /// From the secondary to the focus, micrometres: the separation and the back focus.
     pub length_um: u32,
     /// That length over the focal length: how short the tube is for it.
-    pub length_q16: u32,
+    pub length_share_q16: u32,
 }
 
 /// Bits of `wanted` and `available`, and those of `facts`. Frozen; in C with FIELDSTOP_TWO_MIRROR_ before the
@@ -76,7 +76,7 @@ impl TwoMirrorReadout {
     pub const OBSTRUCTION: u32 = 0x0010;
     /// `length_um`
     pub const LENGTH: u32 = 0x0020;
-    /// `length_q16`
+    /// `length_share_q16`
     pub const LENGTH_SHARE: u32 = 0x0040;
     /// Every member that there is.
     pub const ALL: u32 = 0x007f;
@@ -120,7 +120,7 @@ impl TwoMirrorReadout {
             tell!(out, wanted, SEPARATION, separation_um, Ok::<_, Error>(separation));
             if let Some(length) = separation.0.checked_add(back_focus.0) {
                 tell!(out, wanted, LENGTH, length_um, Ok::<_, Error>(Micrometres(length)));
-                tell!(out, wanted, LENGTH_SHARE, length_q16, ratio_q16(length.into(), system.0));
+                tell!(out, wanted, LENGTH_SHARE, length_share_q16, ratio_q16(length.into(), system.0));
             }
         }
         if wants(Self::SECONDARY | Self::OBSTRUCTION)

@@ -127,7 +127,7 @@ pub fn focus_row(readout: &FocusReadout, row: FocusRow) -> Row {
         2 => readout.depth_steps,
         3 => readout.temperature_mk,
         4 => readout.blur_nm,
-        5 => readout.blur_uas,
+        5 => readout.blur_angle_uas,
         _ => readout.wavefront_nm,
     };
     plan.row(readout.available, readout.facts, member)
@@ -159,7 +159,7 @@ pub fn two_mirror_row(readout: &TwoMirrorReadout, row: TwoMirrorRow) -> Row {
         3 => readout.secondary_radius_um,
         4 => readout.obstruction_q16,
         5 => readout.length_um,
-        _ => readout.length_q16,
+        _ => readout.length_share_q16,
     };
     plan.row(readout.available, readout.facts, member)
 }

@@ -122,7 +122,7 @@ HOLDS(holds_115, offsetof(fieldstop_focus_readout, depth_nm) == 12 && sizeof(((f
 HOLDS(holds_116, offsetof(fieldstop_focus_readout, depth_steps) == 16 && sizeof(((fieldstop_focus_readout *)0)->depth_steps) == 4);
 HOLDS(holds_117, offsetof(fieldstop_focus_readout, temperature_mk) == 20 && sizeof(((fieldstop_focus_readout *)0)->temperature_mk) == 4);
 HOLDS(holds_118, offsetof(fieldstop_focus_readout, blur_nm) == 24 && sizeof(((fieldstop_focus_readout *)0)->blur_nm) == 4);
-HOLDS(holds_119, offsetof(fieldstop_focus_readout, blur_uas) == 28 && sizeof(((fieldstop_focus_readout *)0)->blur_uas) == 4);
+HOLDS(holds_119, offsetof(fieldstop_focus_readout, blur_angle_uas) == 28 && sizeof(((fieldstop_focus_readout *)0)->blur_angle_uas) == 4);
 HOLDS(holds_120, offsetof(fieldstop_focus_readout, wavefront_nm) == 32 && sizeof(((fieldstop_focus_readout *)0)->wavefront_nm) == 4);
 HOLDS(holds_121, sizeof(fieldstop_newtonian_readout) == 40);
 HOLDS(holds_122, offsetof(fieldstop_newtonian_readout, available) == 0 && sizeof(((fieldstop_newtonian_readout *)0)->available) == 4);
@@ -144,7 +144,7 @@ HOLDS(holds_137, offsetof(fieldstop_two_mirror_readout, secondary_um) == 16 && s
 HOLDS(holds_138, offsetof(fieldstop_two_mirror_readout, secondary_radius_um) == 20 && sizeof(((fieldstop_two_mirror_readout *)0)->secondary_radius_um) == 4);
 HOLDS(holds_139, offsetof(fieldstop_two_mirror_readout, obstruction_q16) == 24 && sizeof(((fieldstop_two_mirror_readout *)0)->obstruction_q16) == 4);
 HOLDS(holds_140, offsetof(fieldstop_two_mirror_readout, length_um) == 28 && sizeof(((fieldstop_two_mirror_readout *)0)->length_um) == 4);
-HOLDS(holds_141, offsetof(fieldstop_two_mirror_readout, length_q16) == 32 && sizeof(((fieldstop_two_mirror_readout *)0)->length_q16) == 4);
+HOLDS(holds_141, offsetof(fieldstop_two_mirror_readout, length_share_q16) == 32 && sizeof(((fieldstop_two_mirror_readout *)0)->length_share_q16) == 4);
 HOLDS(holds_142, sizeof(fieldstop_text_style) == 195);
 HOLDS(holds_143, offsetof(fieldstop_text_style, units) == 0 && sizeof(((fieldstop_text_style *)0)->units) == 168);
 HOLDS(holds_144, offsetof(fieldstop_text_style, dash) == 168 && sizeof(((fieldstop_text_style *)0)->dash) == 8);

@@ -11,6 +11,7 @@ static const struct row {
     int gives_pointer;
 } rows[] = {
 #define ROW(name, ...) {#name, (uintptr_t)fieldstop_##name, arguments_of_##name, 0},
+#define OTHER(name, ...) {#name, (uintptr_t)fieldstop_##name, arguments_of_##name, 1},
 #define GIVER(name) {#name, (uintptr_t)fieldstop_##name, arguments_of_##name, 1},
     ROWS
 };

@@ -44,6 +44,12 @@ enum { CHOICES = 144, CAMERA_CHOICES = 9 };
 static fieldstop_visual_choice choices[CHOICES];
 static fieldstop_camera_choice camera_choices[CAMERA_CHOICES];
 static uint8_t choice_count;
+static fieldstop_focuser focuser = {2200, 150000, 1090000, 12000};
+static fieldstop_focus_readout focus;
+static fieldstop_newtonian_layout newtonian = {205000, 10000, 16700, 47000, 850000, 980000, 0x18000000, 0x08000000, 0x40000000, 1700000};
+static fieldstop_newtonian_readout newtonian_values;
+static fieldstop_two_mirror_layout mirrors = {0, 150000, 10000};
+static fieldstop_two_mirror_readout mirror_values;
 static uint8_t is_whole;
 static uint16_t number;
 static uint32_t drawn, seed = 1;
@@ -85,6 +91,13 @@ static void prepare(uint16_t k)
         }
         visual.available = frame.available = 0xfff;
     }
+    mirrors.primary_focal_um = of[FOCAL_LENGTH] / 3u;
+    newtonian.focus_distance_um = of[FOCAL_LENGTH] / 5u;
+    if (fieldstop_focus_readout_compute(&telescope, &focuser, &observer, 0x7f, &focus) != 0
+        || fieldstop_newtonian_readout_compute(&telescope, &newtonian, 0xff, &newtonian_values) != 0
+        || fieldstop_two_mirror_readout_compute(&telescope, &mirrors, 0x7f, &mirror_values) != 0) {
+        abort();
+    }
     for (i = 0; i < 16; i++) {
         eyepieces[i].focal_length_um = 3000u + (i * 5u + k) % 16u * 2500u;
         eyepieces[i].field_stop_um = i % 2 ? 0 : eyepieces[i].focal_length_um / 5u * 4u;
@@ -111,7 +124,7 @@ static uint8_t *count_of(uint8_t room)
 #define VISUAL_ROW (number % FIELDSTOP_VISUAL_ROWS)
 #define CAMERA_ROW (number % FIELDSTOP_CAMERA_ROWS)
 
-/* GIVER: gives an address, and has no argument. */
+/* GIVER: gives an address, and has no argument. OTHER: gives something else than a status. */
 #define ROWS \
     ROW(telescope_check, A_(&telescope)) \
     ROW(eyepiece_check, A_(&eyepiece)) \
@@ -121,6 +134,11 @@ static uint8_t *count_of(uint8_t room)
     ROW(camera_readout_compute, A_(&telescope) A_(&camera) A_(&observer) L_(0x1ff) A_(&frame)) \
     ROW(visual_choose, A_(&telescope) A_(eyepieces) B_(16) A_(amplifiers) B_(8) A_(&observer) A_(&target) A_(choices) A_(count_of(CHOICES))) \
     ROW(camera_choose, A_(&telescope) A_(&camera) B_(1) A_(amplifiers) B_(8) A_(&observer) A_(&field) A_(camera_choices) A_(count_of(CAMERA_CHOICES))) \
+    ROW(focus_readout_compute, A_(&telescope) A_(&focuser) A_(&observer) L_(0x7f) A_(&focus)) \
+    ROW(newtonian_layout_check, A_(&newtonian)) \
+    ROW(newtonian_readout_compute, A_(&telescope) A_(&newtonian) L_(0xff) A_(&newtonian_values)) \
+    ROW(two_mirror_layout_check, A_(&mirrors)) \
+    ROW(two_mirror_readout_compute, A_(&telescope) A_(&mirrors) L_(0x7f) A_(&mirror_values)) \
     ROW(text_count, L_(VALUE(camera.columns)) B_(FIELDSTOP_UNIT_PIXEL) PUT) \
     ROW(text_length_mm, L_(VALUE(visual.exit_pupil_um)) B_(1) PUT) \
     ROW(text_length_um, L_(VALUE(camera.pixel_nm)) B_(2) PUT) \
@@ -140,6 +158,21 @@ static uint8_t *count_of(uint8_t room)
     ROW(text_camera_value, A_(&frame) B_(CAMERA_ROW) PUT) \
     ROW(text_camera_number, A_(&frame) B_(CAMERA_ROW) PUT) \
     ROW(text_camera_unit, A_(&frame) B_(CAMERA_ROW) PUT_ALL) \
+    ROW(text_focus_line, A_(&focus) A_(fieldstop_text_focus_labels()) STYLE B_(20) B_(number % FIELDSTOP_FOCUS_ROWS) A_(text) W_(ROOM) A_(&length)) \
+    ROW(text_focus_value, A_(&focus) B_(number % FIELDSTOP_FOCUS_ROWS) PUT) \
+    ROW(text_focus_number, A_(&focus) B_(number % FIELDSTOP_FOCUS_ROWS) PUT) \
+    ROW(text_focus_unit, A_(&focus) B_(number % FIELDSTOP_FOCUS_ROWS) PUT_ALL) \
+    ROW(text_newtonian_line, A_(&newtonian_values) A_(fieldstop_text_newtonian_labels()) STYLE B_(20) B_(number % FIELDSTOP_NEWTONIAN_ROWS) A_(text) W_(ROOM) A_(&length)) \
+    ROW(text_newtonian_value, A_(&newtonian_values) B_(number % FIELDSTOP_NEWTONIAN_ROWS) PUT) \
+    ROW(text_newtonian_number, A_(&newtonian_values) B_(number % FIELDSTOP_NEWTONIAN_ROWS) PUT) \
+    ROW(text_newtonian_unit, A_(&newtonian_values) B_(number % FIELDSTOP_NEWTONIAN_ROWS) PUT_ALL) \
+    ROW(text_two_mirror_line, A_(&mirror_values) A_(fieldstop_text_two_mirror_labels()) STYLE B_(20) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) A_(text) W_(ROOM) A_(&length)) \
+    ROW(text_two_mirror_value, A_(&mirror_values) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) PUT) \
+    ROW(text_two_mirror_number, A_(&mirror_values) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) PUT) \
+    ROW(text_two_mirror_unit, A_(&mirror_values) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) PUT_ALL) \
+    ROW(text_caution_line, A_(fieldstop_text_caution(0)) B_(20) B_(number % 9) A_(text) W_(ROOM) A_(&length)) \
+    OTHER(text_caution, B_(number % 2)) \
+    OTHER(text_caution_lines, A_(fieldstop_text_caution(0)) B_(20)) \
     ROW(text_changed, A_(shown) W_(20) A_(text) W_(20) STYLE A_(&span)) \
     GIVER(text_style_ascii) \
     GIVER(text_style_utf8) \
@@ -148,7 +181,13 @@ static uint8_t *count_of(uint8_t room)
     GIVER(text_visual_labels) \
     GIVER(text_visual_labels_short) \
     GIVER(text_camera_labels) \
-    GIVER(text_camera_labels_short)
+    GIVER(text_camera_labels_short) \
+    GIVER(text_focus_labels) \
+    GIVER(text_focus_labels_short) \
+    GIVER(text_newtonian_labels) \
+    GIVER(text_newtonian_labels_short) \
+    GIVER(text_two_mirror_labels) \
+    GIVER(text_two_mirror_labels_short)
 
 #ifdef __AVR__
 #define ROW(name, ...) \
@@ -173,6 +212,8 @@ static uint8_t *count_of(uint8_t room)
         (void)words; \
     }
 #endif
+#define OTHER ROW
 ROWS
+#undef OTHER
 #undef ROW
 #undef GIVER
