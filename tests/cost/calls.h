@@ -159,16 +159,16 @@ static uint8_t *count_of(uint8_t room)
     ROW(text_camera_number, A_(&frame) B_(CAMERA_ROW) PUT) \
     ROW(text_camera_unit, A_(&frame) B_(CAMERA_ROW) PUT_ALL) \
     ROW(text_focus_line, A_(&focus) A_(fieldstop_text_focus_labels()) STYLE B_(20) B_(number % FIELDSTOP_FOCUS_ROWS) A_(text) W_(ROOM) A_(&length)) \
-    ROW(text_focus_value, A_(&focus) B_(number % FIELDSTOP_FOCUS_ROWS) PUT) \
-    ROW(text_focus_number, A_(&focus) B_(number % FIELDSTOP_FOCUS_ROWS) PUT) \
+    ROW(text_focus_value, A_(&focus) B_(number % FIELDSTOP_FOCUS_ROWS) STYLE B_(20) A_(text) W_(ROOM) A_(&length)) \
+    ROW(text_focus_number, A_(&focus) B_(number % FIELDSTOP_FOCUS_ROWS) STYLE B_(20) A_(text) W_(ROOM) A_(&length)) \
     ROW(text_focus_unit, A_(&focus) B_(number % FIELDSTOP_FOCUS_ROWS) PUT_ALL) \
     ROW(text_newtonian_line, A_(&newtonian_values) A_(fieldstop_text_newtonian_labels()) STYLE B_(20) B_(number % FIELDSTOP_NEWTONIAN_ROWS) A_(text) W_(ROOM) A_(&length)) \
-    ROW(text_newtonian_value, A_(&newtonian_values) B_(number % FIELDSTOP_NEWTONIAN_ROWS) PUT) \
-    ROW(text_newtonian_number, A_(&newtonian_values) B_(number % FIELDSTOP_NEWTONIAN_ROWS) PUT) \
+    ROW(text_newtonian_value, A_(&newtonian_values) B_(number % FIELDSTOP_NEWTONIAN_ROWS) STYLE B_(20) A_(text) W_(ROOM) A_(&length)) \
+    ROW(text_newtonian_number, A_(&newtonian_values) B_(number % FIELDSTOP_NEWTONIAN_ROWS) STYLE B_(20) A_(text) W_(ROOM) A_(&length)) \
     ROW(text_newtonian_unit, A_(&newtonian_values) B_(number % FIELDSTOP_NEWTONIAN_ROWS) PUT_ALL) \
     ROW(text_two_mirror_line, A_(&mirror_values) A_(fieldstop_text_two_mirror_labels()) STYLE B_(20) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) A_(text) W_(ROOM) A_(&length)) \
-    ROW(text_two_mirror_value, A_(&mirror_values) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) PUT) \
-    ROW(text_two_mirror_number, A_(&mirror_values) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) PUT) \
+    ROW(text_two_mirror_value, A_(&mirror_values) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) STYLE B_(20) A_(text) W_(ROOM) A_(&length)) \
+    ROW(text_two_mirror_number, A_(&mirror_values) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) STYLE B_(20) A_(text) W_(ROOM) A_(&length)) \
     ROW(text_two_mirror_unit, A_(&mirror_values) B_(number % FIELDSTOP_TWO_MIRROR_ROWS) PUT_ALL) \
     ROW(text_caution_line, A_(fieldstop_text_caution(0)) B_(20) B_(number % 9) A_(text) W_(ROOM) A_(&length)) \
     OTHER(text_caution, B_(number % 2)) \
