@@ -3,7 +3,8 @@
  * focus motor must stand, on a display of two lines of sixteen characters.
  *
  * The display hangs on a serial line and understands ECMA-48's "cursor position", as any terminal does; its buttons send a
- * letter each: c next camera, b binning, t next target, p next page, o off. Nothing is drawn again that has not changed.
+ * letter each: c next camera, b binning, g glass before the camera (none, reducer, Barlow), t next target, p next page,
+ * o off. Nothing is drawn again that has not changed.
  *
  * Equipment and targets are invented. Put your own in; the compiler refuses a length in the wrong unit.
  */
@@ -17,17 +18,18 @@ using fieldstop::result;
 
 constexpr uint8_t columns = 16, rows = 2, most_binning = 3;
 
-/* In flash. Without a reducer the amplification is 1. */
+/* In flash. */
 constexpr fieldstop::telescope telescope = fieldstop::telescope()
                                                .with_aperture(186000_um)
                                                .with_focal_length(790000_um)
                                                .with_obstruction(71000_um)
-                                               .with_amplification(1.0_q16)
                                                .with_throughput(0.79_q16);
 constexpr fieldstop::camera cameras[] = {
     fieldstop::camera().with_pixel(4300_nm).with_columns(4144).with_rows(2822),
     fieldstop::camera().with_pixel(2650_nm).with_columns(1880).with_rows(1250),
 };
+/* Nothing, a reducer, a Barlow lens. */
+constexpr fieldstop::q16 glasses[] = {1.0_q16, 0.78_q16, 1.9_q16};
 /* No eye looks here: what concerns it is 0, not known. */
 constexpr fieldstop::observer observer = fieldstop::observer().with_seeing(2400000_uas).with_wavelength(550_nm);
 
@@ -200,13 +202,16 @@ void draw_focus(const fieldstop::camera_readout &readout)
 void draw_limits(const fieldstop::camera_readout &readout)
 {
     const auto depth = depth_of_focus(readout);
+    const auto focal = readout.focal_length();
     const auto change = depth ? fieldstop::refocus_temperature_fx(tube_length, steel, depth.value())
                               : result<fieldstop::millikelvin>(depth.status());
     show_ratio(0, "Refocus at K",
                change ? fieldstop::q16_from_milli_fx(fieldstop::thousandths(change.value().count()))
                       : result<fieldstop::q16>(change.status()));
     show_micrometres(1, "Pixel to",
-                     fieldstop::nyquist_pixel_fx(telescope.focal_length(), telescope.aperture(), observer.wavelength()), 1);
+                     focal ? fieldstop::nyquist_pixel_fx(focal.value(), telescope.aperture(), observer.wavelength())
+                           : result<fieldstop::nanometres>(focal.status()),
+                     1);
 }
 
 void draw_camera(const fieldstop::camera_readout &readout, uint8_t page)
@@ -219,9 +224,10 @@ void draw_camera(const fieldstop::camera_readout &readout, uint8_t page)
     }
 }
 
-void draw(uint8_t page, const fieldstop::camera &camera, const target &of)
+void draw(uint8_t page, fieldstop::q16 glass, const fieldstop::camera &camera, const target &of)
 {
-    const auto readout = fieldstop::camera_readout_compute(telescope, camera, observer, fieldstop::camera_all);
+    const auto readout = fieldstop::camera_readout_compute(telescope.with_amplification(glass), camera, observer,
+                                                           fieldstop::camera_all);
     if (!readout) {
         /* Which of the three structs: telescope 1, camera 2, observer 3. */
         static const char *const which[] = {"", "Check telescope", "Check camera", "Check observer"};
@@ -256,7 +262,7 @@ uint8_t next(uint8_t now, bool pressed, uint8_t count)
 
 int main()
 {
-    uint8_t camera = 0, binning = 0, target = 0, page = 0;
+    uint8_t camera = 0, binning = 0, glass = 0, target = 0, page = 0;
     char button;
 
     board_start();
@@ -273,10 +279,11 @@ int main()
     show_words(1, "without a filter");
     button = wait_for_button();
     while (button != 'o') {
-        draw(page, cameras[camera].with_binning(static_cast<uint8_t>(binning + 1)), targets[target]);
+        draw(page, glasses[glass], cameras[camera].with_binning(static_cast<uint8_t>(binning + 1)), targets[target]);
         button = wait_for_button();
         camera = next(camera, button == 'c', count_of(cameras));
         binning = next(binning, button == 'b', most_binning);
+        glass = next(glass, button == 'g', count_of(glasses));
         target = next(target, button == 't', count_of(targets));
         page = next(page, button == 'p', pages);
     }
