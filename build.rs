@@ -57,9 +57,10 @@ mod header {
         }
         let mut bindings = Vec::new();
         builder.with_config(config).generate().unwrap().write(&mut bindings);
-        let body = by_section(&String::from_utf8(bindings).unwrap(), &sections);
+        let (body, contents) = by_section(&String::from_utf8(bindings).unwrap(), &sections);
 
-        let mut header = include_str!("src/capi/frame.h").replace("@BODY@", &body);
+        let frame = include_str!("src/capi/frame.h");
+        let mut header = frame.replace("@BODY@", &body).replace("@CONTENTS@", &contents);
         for part in ["VERSION", "MAJOR", "MINOR", "PATCH"] {
             let variable = if part == "VERSION" { part.to_string() } else { format!("VERSION_{part}") };
             let value = env::var(format!("CARGO_PKG_{variable}")).unwrap();
@@ -159,10 +160,10 @@ mod header {
     }
 
     /// cbindgen gives its items by kind, a blank line between two; here they are put by subject.
-    fn by_section(bindings: &str, sections: &[Section]) -> String {
+    fn by_section(bindings: &str, sections: &[Section]) -> (String, String) {
         let items: Vec<&str> = bindings.trim().split("\n\n").collect();
         let mut placed = 0;
-        let mut body = String::new();
+        let (mut body, mut contents) = (String::new(), String::new());
         for section in sections {
             let mut here = String::new();
             let mut constants = false;
@@ -177,11 +178,15 @@ mod header {
             if !here.is_empty() {
                 let here = here.trim_end();
                 let rule = "-".repeat(98);
+                for (number, line) in wrapped(&section.title).lines().enumerate() {
+                    let mark = if number == 0 { '-' } else { ' ' };
+                    contents.push_str(&format!(" * {mark} {}\n", line.trim()));
+                }
                 body.push_str(&format!("/* {rule}\n{} */\n\n{here}\n\n", wrapped(&section.title)));
             }
         }
         assert_eq!(placed, items.len(), "an item of cbindgen's that no file of src/capi declares");
-        body
+        (body, contents)
     }
 
     /// Without Rust's marks for links, and short where a comment is.

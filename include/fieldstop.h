@@ -3,6 +3,25 @@
  *
  * Made from src/capi of the crate `fieldstop`: do not edit.
  *
+ * Contents, each under a line of dashes:
+ * - What can go wrong. The numbers are frozen: they are the `fieldstop_status` of the C
+ *   interface.
+ * - The quantities of the fixed forms, each an integer with its unit in its name.
+ * - Field of view: what the focal lengths, the eyepiece and the sensor show of the sky.
+ * - Resolution: how fine a telescope shows, and how far the air, the obstruction and the
+ *   wavefront let it.
+ * - Light: what the mirrors, the glass and the hole in the middle leave of it, and the
+ *   magnitudes that follow.
+ * - Imaging: how a sensor samples the sky, how large a target falls on it, and what a focal
+ *   ratio does to the exposure.
+ * - Focus: how deep it is, what a miss costs, and how far heat, a near object and the edge of
+ *   the field move it.
+ * - Layout of mirrors and tube: how large the mirrors are and where they stand, what they leave
+ *   of the light, and what the tube needs around it.
+ * - Colour: what a single lens does to it, and what a pair of two glasses leaves.
+ * - Equipment as plain structs in fixed units, and all readouts of one screen in one call.
+ * - Quantities as characters of a display: integers only, into a buffer of the caller's.
+ *
  * CAUTION. Never look at or near the Sun through a telescope without a full-aperture filter made for
  * it; nothing that this library computes says that it is safe. Moving mounts and high eyepieces can
  * hurt too. The makers' instructions and local rules come first.
@@ -34,6 +53,11 @@
  * Ranges. A fixed argument may be anything that its type holds, but for what the function's comment
  * says. A float argument is finite and at most 2^32 in magnitude, and at least 2^-32 where zero is
  * refused, but for what the comment says.
+ *
+ * Text. The functions fieldstop_text_... write into `text`, an array of `capacity` bytes, in `style`, one
+ * of the ready ones or your own, and put the length in bytes into `length`; no zero byte ends it.
+ * `readout` is one that fieldstop_visual_readout_compute or fieldstop_camera_readout_compute has filled.
+ * No room: `text` is as it was.
  *
  * Errors. A fixed argument is read as exact and the result is the exact value of the formula, rounded
  * to nearest. "Error" is the greatest distance from that exact value over the whole range: in units of
@@ -272,7 +296,7 @@ fieldstop_status fieldstop_focal_ratio_f64(double focal_length_mm,
 #endif
 
 /**
- * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in um.
+ * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in micrometres.
  *
  * f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
  * Ranges: focal_length_um not 0; amplification_q16 not 0.
@@ -286,7 +310,7 @@ fieldstop_status fieldstop_amplified_focal_length_fx(uint32_t focal_length_um,
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
+ * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in millimetres.
  *
  * f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
  * Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
@@ -301,7 +325,7 @@ fieldstop_status fieldstop_amplified_focal_length_f32(float focal_length_mm,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
+ * Gives the focal length of a telescope with an amplifier or a reducer in its beam, in millimetres.
  *
  * f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
  * Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
@@ -403,7 +427,7 @@ fieldstop_status fieldstop_magnification_f64(double focal_length_mm,
 #endif
 
 /**
- * Gives the diameter of the beam that leaves the eyepiece, in um.
+ * Gives the diameter of the beam that leaves the eyepiece, in micrometres.
  *
  * D fe / f.
  * Ranges: aperture_um not 0; focal_length_um not 0; eyepiece_um not 0.
@@ -418,7 +442,7 @@ fieldstop_status fieldstop_exit_pupil_fx(uint32_t aperture_um,
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the diameter of the beam that leaves the eyepiece, in mm.
+ * Gives the diameter of the beam that leaves the eyepiece, in millimetres.
  *
  * D fe / f.
  * Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
@@ -434,7 +458,7 @@ fieldstop_status fieldstop_exit_pupil_f32(float aperture_mm,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the diameter of the beam that leaves the eyepiece, in mm.
+ * Gives the diameter of the beam that leaves the eyepiece, in millimetres.
  *
  * D fe / f.
  * Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
@@ -449,7 +473,7 @@ fieldstop_status fieldstop_exit_pupil_f64(double aperture_mm,
 #endif
 
 /**
- * Gives the eyepiece focal length that gives an exit pupil, in um.
+ * Gives the eyepiece focal length that gives an exit pupil, in micrometres.
  *
  * p f / D.
  * Ranges: exit_pupil_um not 0; focal_length_um not 0; aperture_um not 0.
@@ -464,7 +488,7 @@ fieldstop_status fieldstop_eyepiece_for_exit_pupil_fx(uint32_t exit_pupil_um,
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the eyepiece focal length that gives an exit pupil, in mm.
+ * Gives the eyepiece focal length that gives an exit pupil, in millimetres.
  *
  * p f / D.
  * Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
@@ -480,7 +504,7 @@ fieldstop_status fieldstop_eyepiece_for_exit_pupil_f32(float exit_pupil_mm,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the eyepiece focal length that gives an exit pupil, in mm.
+ * Gives the eyepiece focal length that gives an exit pupil, in millimetres.
  *
  * p f / D.
  * Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
@@ -495,7 +519,7 @@ fieldstop_status fieldstop_eyepiece_for_exit_pupil_f64(double exit_pupil_mm,
 #endif
 
 /**
- * Gives the eyepiece focal length that gives a magnification, in um.
+ * Gives the eyepiece focal length that gives a magnification, in micrometres.
  *
  * f / M.
  * Ranges: focal_length_um not 0; magnification_q16 not 0.
@@ -509,7 +533,7 @@ fieldstop_status fieldstop_eyepiece_for_magnification_fx(uint32_t focal_length_u
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the eyepiece focal length that gives a magnification, in mm.
+ * Gives the eyepiece focal length that gives a magnification, in millimetres.
  *
  * f / M.
  * Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
@@ -524,7 +548,7 @@ fieldstop_status fieldstop_eyepiece_for_magnification_f32(float focal_length_mm,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the eyepiece focal length that gives a magnification, in mm.
+ * Gives the eyepiece focal length that gives a magnification, in millimetres.
  *
  * f / M.
  * Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
@@ -538,7 +562,7 @@ fieldstop_status fieldstop_eyepiece_for_magnification_f64(double focal_length_mm
 #endif
 
 /**
- * Gives the angle of sky inside the eyepiece's field stop, in mas.
+ * Gives the angle of sky inside the eyepiece's field stop, in milliarcseconds.
  *
  * 2 atan(s / 2f).
  * Ranges: field_stop_um not 0; focal_length_um not 0.
@@ -552,7 +576,7 @@ fieldstop_status fieldstop_true_field_from_stop_fx(uint32_t field_stop_um,
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the angle of sky inside the eyepiece's field stop, in arcsec.
+ * Gives the angle of sky inside the eyepiece's field stop, in arcseconds.
  *
  * 2 atan(s / 2f).
  * Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
@@ -567,7 +591,7 @@ fieldstop_status fieldstop_true_field_from_stop_f32(float field_stop_mm,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the angle of sky inside the eyepiece's field stop, in arcsec.
+ * Gives the angle of sky inside the eyepiece's field stop, in arcseconds.
  *
  * 2 atan(s / 2f).
  * Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
@@ -581,7 +605,7 @@ fieldstop_status fieldstop_true_field_from_stop_f64(double field_stop_mm,
 #endif
 
 /**
- * Gives the angle of sky in an eyepiece that keeps straight lines straight, in mas.
+ * Gives the angle of sky in an eyepiece that keeps straight lines straight, in milliarcseconds.
  *
  * 2 atan(tan(A/2) fe / f).
  * Ranges: apparent_field_mas not 0, under 648000000 (180 degrees); focal_length_um not 0; eyepiece_um not
@@ -597,7 +621,7 @@ fieldstop_status fieldstop_true_field_rectilinear_fx(uint32_t apparent_field_mas
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
+ * Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcseconds.
  *
  * 2 atan(tan(A/2) fe / f).
  * Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
@@ -614,7 +638,7 @@ fieldstop_status fieldstop_true_field_rectilinear_f32(float apparent_field_arcse
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
+ * Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcseconds.
  *
  * 2 atan(tan(A/2) fe / f).
  * Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
@@ -630,7 +654,7 @@ fieldstop_status fieldstop_true_field_rectilinear_f64(double apparent_field_arcs
 #endif
 
 /**
- * Gives the angle of sky in an eyepiece that keeps equal angles equal, in mas.
+ * Gives the angle of sky in an eyepiece that keeps equal angles equal, in milliarcseconds.
  *
  * A fe / f.
  * Ranges: apparent_field_mas not 0; focal_length_um not 0; eyepiece_um not 0.
@@ -645,7 +669,7 @@ fieldstop_status fieldstop_true_field_equidistant_fx(uint32_t apparent_field_mas
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
+ * Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcseconds.
  *
  * A fe / f.
  * Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
@@ -661,7 +685,7 @@ fieldstop_status fieldstop_true_field_equidistant_f32(float apparent_field_arcse
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
+ * Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcseconds.
  *
  * A fe / f.
  * Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
@@ -676,7 +700,7 @@ fieldstop_status fieldstop_true_field_equidistant_f64(double apparent_field_arcs
 #endif
 
 /**
- * Gives the angle of sky along one side of a sensor, in mas.
+ * Gives the angle of sky along one side of a sensor, in milliarcseconds.
  *
  * 2 atan(p n / 2f).
  * Ranges: pixel_nm not 0; pixel_count not 0; focal_length_um not 0.
@@ -691,7 +715,7 @@ fieldstop_status fieldstop_frame_field_fx(uint32_t pixel_nm,
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the angle of sky along one side of a sensor, in arcsec.
+ * Gives the angle of sky along one side of a sensor, in arcseconds.
  *
  * 2 atan(p n / 2f).
  * Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
@@ -707,7 +731,7 @@ fieldstop_status fieldstop_frame_field_f32(float pixel_um,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the angle of sky along one side of a sensor, in arcsec.
+ * Gives the angle of sky along one side of a sensor, in arcseconds.
  *
  * 2 atan(p n / 2f).
  * Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
@@ -722,7 +746,7 @@ fieldstop_status fieldstop_frame_field_f64(double pixel_um,
 #endif
 
 /**
- * Gives the angle of sky to a millimetre at the focus, in mas per mm.
+ * Gives the angle of sky to a millimetre at the focus, in milliarcseconds per millimetre.
  *
  * (1 rad) / f.
  * Ranges: focal_length_um not 0.
@@ -735,7 +759,7 @@ fieldstop_status fieldstop_plate_scale_fx(uint32_t focal_length_um,
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
+ * Gives the angle of sky to a millimetre at the focus, in arcseconds per millimetre.
  *
  * (1 rad) / f.
  * Ranges: focal_length_mm 2^-32 to 2^32.
@@ -749,7 +773,7 @@ fieldstop_status fieldstop_plate_scale_f32(float focal_length_mm,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
+ * Gives the angle of sky to a millimetre at the focus, in arcseconds per millimetre.
  *
  * (1 rad) / f.
  * Ranges: focal_length_mm 2^-32 to 2^32.
@@ -762,7 +786,7 @@ fieldstop_status fieldstop_plate_scale_f64(double focal_length_mm,
 #endif
 
 /**
- * Gives the angle of sky to a pixel, in uas.
+ * Gives the angle of sky to a pixel, in microarcseconds.
  *
  * (1 rad) p / f.
  * Ranges: pixel_nm not 0; focal_length_um not 0.
@@ -776,7 +800,7 @@ fieldstop_status fieldstop_pixel_scale_fx(uint32_t pixel_nm,
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the angle of sky to a pixel, in arcsec.
+ * Gives the angle of sky to a pixel, in arcseconds.
  *
  * (1 rad) p / f.
  * Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
@@ -791,7 +815,7 @@ fieldstop_status fieldstop_pixel_scale_f32(float pixel_um,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the angle of sky to a pixel, in arcsec.
+ * Gives the angle of sky to a pixel, in arcseconds.
  *
  * (1 rad) p / f.
  * Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
@@ -805,7 +829,7 @@ fieldstop_status fieldstop_pixel_scale_f64(double pixel_um,
 #endif
 
 /**
- * Gives the focal length that spreads a field over a width at the focus, in um.
+ * Gives the focal length that spreads a field over a width at the focus, in micrometres.
  *
  * x / (2 tan(t/2)).
  * Ranges: extent_um not 0; field_mas not 0, under 648000000 (180 degrees).
@@ -819,7 +843,7 @@ fieldstop_status fieldstop_focal_length_for_field_fx(uint32_t extent_um,
 
 #if !defined(FIELDSTOP_NO_FLOAT)
 /**
- * Gives the focal length that spreads a field over a width at the focus, in mm.
+ * Gives the focal length that spreads a field over a width at the focus, in millimetres.
  *
  * x / (2 tan(t/2)).
  * Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
@@ -834,7 +858,7 @@ fieldstop_status fieldstop_focal_length_for_field_f32(float extent_mm,
 
 #if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
 /**
- * Gives the focal length that spreads a field over a width at the focus, in mm.
+ * Gives the focal length that spreads a field over a width at the focus, in millimetres.
  *
  * x / (2 tan(t/2)).
  * Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
@@ -1260,7 +1284,7 @@ fieldstop_status fieldstop_contrast_f64(double frequency,
  * Q16.16.
  *
  * exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
- * Ranges: wavelength_nm not 0.
+ * Ranges: wavelength_nm not 0; rms_nm any.
  * Error: at most 1 LSB.
  * Statuses: null pointer, zero.
  */
@@ -1441,7 +1465,7 @@ fieldstop_status fieldstop_combined_fwhm_f64(double a_arcsec,
  * Gives the share of the light that mirrors and glass surfaces let through, in Q16.16.
  *
  * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
- * Ranges: reflectance_q16, transmittance_q16 at most 1.
+ * Ranges: reflectance_q16, transmittance_q16 at most 1; mirrors, surfaces any.
  * Error: at most 1 LSB.
  * Statuses: null pointer, out of range.
  */
@@ -1457,7 +1481,7 @@ fieldstop_status fieldstop_throughput_fx(uint8_t mirrors,
  * Gives the share of the light that mirrors and glass surfaces let through, a plain number.
  *
  * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
- * Ranges: reflectance, transmittance 0 to 1.
+ * Ranges: reflectance, transmittance 0 to 1; mirrors, surfaces any.
  * Error: at most 3 ulp.
  * Statuses: null pointer, out of range, not finite.
  */
@@ -1474,7 +1498,7 @@ fieldstop_status fieldstop_throughput_f32(uint8_t mirrors,
  * Gives the share of the light that mirrors and glass surfaces let through, a plain number, in double.
  *
  * R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
- * Ranges: reflectance, transmittance 0 to 1.
+ * Ranges: reflectance, transmittance 0 to 1; mirrors, surfaces any.
  * Error: at most 3 ulp.
  * Statuses: null pointer, out of range, not finite.
  */
@@ -1622,7 +1646,7 @@ fieldstop_status fieldstop_magnitude_gain_f64(double effective_aperture_mm,
  * Gives the faintest star that a telescope shows to an eye whose own limit is known, in millimagnitudes.
  *
  * m0 + 5 log10(D / p) (Pogson 1856; Schroeder, Astronomical Optics).
- * Ranges: effective_aperture_um, eye_pupil_um not 0.
+ * Ranges: effective_aperture_um, eye_pupil_um not 0; naked_eye_mmag any.
  * Error: at most 1 LSB.
  * Statuses: null pointer, zero, overflow (beyond 32 bits).
  */
@@ -1802,7 +1826,7 @@ fieldstop_status fieldstop_distance_dimming_f64(double near_distance,
  * Gives how many magnitudes the air takes from a star, in millimagnitudes.
  *
  * k X, of the loss in one airmass (Bouguer 1729).
- * Ranges: any.
+ * Ranges: coefficient_mmag, airmass_q16 any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, overflow (2147483648 mmag or more).
  */
@@ -2210,7 +2234,7 @@ fieldstop_status fieldstop_depth_of_focus_f64(double focal_ratio,
  * Gives the diameter of a star's image out of focus, by geometry, in nanometres.
  *
  * d / N (Smith, Modern Optical Engineering).
- * Ranges: focal_ratio_q16 not 0.
+ * Ranges: focal_ratio_q16 not 0; defocus_nm any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, zero, overflow.
  */
@@ -2253,7 +2277,7 @@ fieldstop_status fieldstop_defocus_blur_f64(double defocus_um,
  * Gives the error of the wavefront out of focus, from its lowest to its highest point, in nanometres.
  *
  * d / (8 N^2) (Smith, Modern Optical Engineering).
- * Ranges: focal_ratio_q16 not 0.
+ * Ranges: focal_ratio_q16 not 0; defocus_nm any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, zero, overflow.
  */
@@ -2296,7 +2320,7 @@ fieldstop_status fieldstop_defocus_wavefront_f64(double defocus_um,
  * Gives how many steps of the focus motor a distance takes, to the nearest.
  *
  * d / s (counting).
- * Ranges: step_nm not 0.
+ * Ranges: step_nm not 0; distance_nm any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, zero.
  */
@@ -2340,6 +2364,7 @@ fieldstop_status fieldstop_motor_steps_f64(double distance_um,
  * nanometres.
  *
  * L a dT (CRC Handbook of Chemistry and Physics, linear expansion).
+ * Ranges: length_um, expansion_ppb_per_k, temperature_change_mk any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, overflow.
  */
@@ -2388,7 +2413,7 @@ fieldstop_status fieldstop_thermal_shift_f64(double length_mm,
  *
  * t / (L a), a the size of the coefficient of linear expansion (CRC Handbook of Chemistry and Physics, linear
  * expansion).
- * Ranges: length_um, expansion_ppb_per_k not 0.
+ * Ranges: length_um, expansion_ppb_per_k not 0; tolerance_nm any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, zero, overflow.
  */
@@ -2479,7 +2504,7 @@ fieldstop_status fieldstop_near_focus_travel_f64(double focal_length_mm,
  * Gives how long the coma of a paraboloid draws a star out, off the axis, in microarcseconds.
  *
  * 3 t / (16 N^2), the tangential coma (Schroeder, Astronomical Optics).
- * Ranges: focal_ratio_q16 not 0.
+ * Ranges: focal_ratio_q16 not 0; off_axis_mas any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, zero, overflow.
  */
@@ -2687,7 +2712,7 @@ fieldstop_status fieldstop_beam_width_f64(double aperture_mm,
  * focus, in micrometres.
  *
  * y (f - L) / f (geometry).
- * Ranges: focal_length_um not 0; focus_distance_um at most the focal length.
+ * Ranges: focal_length_um not 0; focus_distance_um at most the focal length; image_offset_um any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, zero, out of range.
  */
@@ -2881,7 +2906,8 @@ fieldstop_status fieldstop_secondary_diameter_f64(double aperture_mm,
  * Gives what a lit field adds to the second mirror's diameter, in micrometres.
  *
  * i (f1 - p) / F, p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
- * Ranges: primary_focal_um not 0; system_focal_um over primary_focal_um; back_focus_um at most system_focal_um.
+ * Ranges: primary_focal_um not 0; system_focal_um over primary_focal_um; back_focus_um at most system_focal_um;
+ * lit_field_um any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, zero, out of range.
  */
@@ -2980,7 +3006,8 @@ fieldstop_status fieldstop_secondary_radius_f64(double primary_focal_mm,
  * Gives the share of a beam's disc that lies inside a stop's or a mirror's, in Q16.16.
  *
  * the area that the two discs share over that of the beam (CRC Standard Mathematical Tables, circular segment).
- * Ranges: beam_um not 0; the first two are diameters, the third is the distance of their centres.
+ * Ranges: beam_um not 0; stop_um, offset_um any: the first two are diameters, the third is the distance of their
+ * centres.
  * Error: at most 1 LSB.
  * Statuses: null pointer, zero.
  */
@@ -3030,6 +3057,7 @@ fieldstop_status fieldstop_illumination_f64(double beam_mm,
  * sqrt(L^2 + (D/2)^2) (geometry).
  * Caution: a moving mount can hurt. Stay clear of all that it can reach, dew caps, counterweights and cables too,
  * and follow the maker's instructions and local rules.
+ * Ranges: reach_um, tube_diameter_um any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, overflow.
  */
@@ -3080,7 +3108,7 @@ fieldstop_status fieldstop_swing_radius_f64(double reach_mm,
  * end (geometry).
  * Caution: where it is high, stand on a stable platform, never on the top of a ladder, and clear of the moving
  * mount; follow the makers' instructions and local rules.
- * Ranges: altitude_bam 0 to 2^30, 90 degrees.
+ * Ranges: altitude_bam 0 to 2^30, 90 degrees; axis_height_um, reach_um any.
  * Error: at most 0.51 LSB.
  * Statuses: null pointer, out of range, overflow (also below the floor).
  */
@@ -3363,7 +3391,7 @@ fieldstop_status fieldstop_achromat_flint_f64(double focal_length_mm,
  *
  * f dP / dV, dP and dV the differences of the two glasses in partial dispersion and Abbe number (Kingslake, Lens
  * Design Fundamentals).
- * Ranges: focal_length_um, abbe_difference_q16 not 0.
+ * Ranges: focal_length_um, abbe_difference_q16 not 0; partial_difference_ppm any.
  * Error: at most 0.5 LSB.
  * Statuses: null pointer, zero, overflow.
  */
@@ -4097,6 +4125,7 @@ fieldstop_status fieldstop_camera_readout_compute(const struct fieldstop_telesco
 /**
  * Fills `choices` with the best eyepieces for a target, each alone and with each Barlow or reducer, the best first.
  *
+ * observer: as for the readout.
  * telescope: its own amplification is not used. eyepieces: 1 to 16. amplifiers_q16: what each Barlow or reducer
  * multiplies the focal length by, none 0, up to 8; may be null where there is none. choice_count: on entry the room in
  * `choices`, not 0; on success how many are filled, at most eyepieces times (1 + amplifiers). What stands behind
@@ -4124,6 +4153,7 @@ fieldstop_status fieldstop_visual_choose(const struct fieldstop_telescope *teles
 /**
  * Fills `choices` with the best cameras for a target, each alone and with each Barlow or reducer, the best first.
  *
+ * observer: as for the readout.
  * telescope: its own amplification is not used. cameras: 1 to 8. amplifiers_q16: what each Barlow or reducer
  * multiplies the focal length by, none 0, up to 8; may be null where there is none. choice_count: on entry the room in
  * `choices`, not 0; on success how many are filled, at most cameras times (1 + amplifiers). What stands behind them
@@ -4476,7 +4506,8 @@ const struct fieldstop_text_style *fieldstop_text_style_hd44780_a02(void);
 /**
  * Writes an integer with its unit as text and gives its length in bytes.
  *
- * Ranges: unit one of FIELDSTOP_UNIT_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+ * Ranges: count any; unit one of FIELDSTOP_UNIT_...; width 0 (as long as it is) or the characters to fill,
+ * right-aligned.
  * Statuses: null pointer, out of range (unit), no room.
  */
 FIELDSTOP_CHECKED
@@ -4797,7 +4828,7 @@ fieldstop_status fieldstop_text_camera_unit(const struct fieldstop_camera_readou
  * Gives the part of a line that is different from what is shown, in characters.
  *
  * span.count is 0 where nothing is. Where the two have different numbers of characters it reaches to the end of the line.
- * Ranges: lengths in bytes.
+ * Ranges: shown_length, line_length in bytes, any.
  * Statuses: null pointer.
  */
 FIELDSTOP_CHECKED

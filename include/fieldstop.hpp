@@ -1727,7 +1727,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> focal_ratio_f64(millimetres_f6
 }
 #endif
 
-/** Gives the focal length of a telescope with an amplifier or a reducer in its beam, in um. */
+/** Gives the focal length of a telescope with an amplifier or a reducer in its beam, in micrometres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> amplified_focal_length_fx(micrometres focal_length_um, q16 amplification_q16)
 {
     uint32_t given;
@@ -1736,7 +1736,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> amplified_focal_length_fx
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm. */
+/** Gives the focal length of a telescope with an amplifier or a reducer in its beam, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> amplified_focal_length_f32(millimetres_f32 focal_length_mm, float amplification)
 {
     float given;
@@ -1746,7 +1746,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> amplified_focal_lengt
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm. */
+/** Gives the focal length of a telescope with an amplifier or a reducer in its beam, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> amplified_focal_length_f64(millimetres_f64 focal_length_mm, double amplification)
 {
     double given;
@@ -1811,7 +1811,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<double> magnification_f64(millimetres_
 }
 #endif
 
-/** Gives the diameter of the beam that leaves the eyepiece, in um. */
+/** Gives the diameter of the beam that leaves the eyepiece, in micrometres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> exit_pupil_fx(micrometres aperture_um, micrometres focal_length_um, micrometres eyepiece_um)
 {
     uint32_t given;
@@ -1820,7 +1820,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> exit_pupil_fx(micrometres
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the diameter of the beam that leaves the eyepiece, in mm. */
+/** Gives the diameter of the beam that leaves the eyepiece, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> exit_pupil_f32(millimetres_f32 aperture_mm, millimetres_f32 focal_length_mm, millimetres_f32 eyepiece_mm)
 {
     float given;
@@ -1830,7 +1830,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> exit_pupil_f32(millim
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the diameter of the beam that leaves the eyepiece, in mm. */
+/** Gives the diameter of the beam that leaves the eyepiece, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> exit_pupil_f64(millimetres_f64 aperture_mm, millimetres_f64 focal_length_mm, millimetres_f64 eyepiece_mm)
 {
     double given;
@@ -1839,7 +1839,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> exit_pupil_f64(millim
 }
 #endif
 
-/** Gives the eyepiece focal length that gives an exit pupil, in um. */
+/** Gives the eyepiece focal length that gives an exit pupil, in micrometres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> eyepiece_for_exit_pupil_fx(micrometres exit_pupil_um, micrometres focal_length_um, micrometres aperture_um)
 {
     uint32_t given;
@@ -1848,7 +1848,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> eyepiece_for_exit_pupil_f
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the eyepiece focal length that gives an exit pupil, in mm. */
+/** Gives the eyepiece focal length that gives an exit pupil, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> eyepiece_for_exit_pupil_f32(millimetres_f32 exit_pupil_mm, millimetres_f32 focal_length_mm, millimetres_f32 aperture_mm)
 {
     float given;
@@ -1858,7 +1858,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> eyepiece_for_exit_pup
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the eyepiece focal length that gives an exit pupil, in mm. */
+/** Gives the eyepiece focal length that gives an exit pupil, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> eyepiece_for_exit_pupil_f64(millimetres_f64 exit_pupil_mm, millimetres_f64 focal_length_mm, millimetres_f64 aperture_mm)
 {
     double given;
@@ -1867,7 +1867,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> eyepiece_for_exit_pup
 }
 #endif
 
-/** Gives the eyepiece focal length that gives a magnification, in um. */
+/** Gives the eyepiece focal length that gives a magnification, in micrometres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> eyepiece_for_magnification_fx(micrometres focal_length_um, q16 magnification_q16)
 {
     uint32_t given;
@@ -1876,7 +1876,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> eyepiece_for_magnificatio
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the eyepiece focal length that gives a magnification, in mm. */
+/** Gives the eyepiece focal length that gives a magnification, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> eyepiece_for_magnification_f32(millimetres_f32 focal_length_mm, float magnification)
 {
     float given;
@@ -1886,7 +1886,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> eyepiece_for_magnific
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the eyepiece focal length that gives a magnification, in mm. */
+/** Gives the eyepiece focal length that gives a magnification, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> eyepiece_for_magnification_f64(millimetres_f64 focal_length_mm, double magnification)
 {
     double given;
@@ -1895,7 +1895,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> eyepiece_for_magnific
 }
 #endif
 
-/** Gives the angle of sky inside the eyepiece's field stop, in mas. */
+/** Gives the angle of sky inside the eyepiece's field stop, in milliarcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> true_field_from_stop_fx(micrometres field_stop_um, micrometres focal_length_um)
 {
     uint32_t given;
@@ -1904,7 +1904,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> true_field_from_stop_
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the angle of sky inside the eyepiece's field stop, in arcsec. */
+/** Gives the angle of sky inside the eyepiece's field stop, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> true_field_from_stop_f32(millimetres_f32 field_stop_mm, millimetres_f32 focal_length_mm)
 {
     float given;
@@ -1914,7 +1914,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> true_field_from_stop_f
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the angle of sky inside the eyepiece's field stop, in arcsec. */
+/** Gives the angle of sky inside the eyepiece's field stop, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> true_field_from_stop_f64(millimetres_f64 field_stop_mm, millimetres_f64 focal_length_mm)
 {
     double given;
@@ -1923,7 +1923,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> true_field_from_stop_f
 }
 #endif
 
-/** Gives the angle of sky in an eyepiece that keeps straight lines straight, in mas. */
+/** Gives the angle of sky in an eyepiece that keeps straight lines straight, in milliarcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> true_field_rectilinear_fx(milliarcseconds apparent_field_mas, micrometres focal_length_um, micrometres eyepiece_um)
 {
     uint32_t given;
@@ -1932,7 +1932,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> true_field_rectilinea
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec. */
+/** Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> true_field_rectilinear_f32(arcseconds_f32 apparent_field_arcsec, millimetres_f32 focal_length_mm, millimetres_f32 eyepiece_mm)
 {
     float given;
@@ -1942,7 +1942,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> true_field_rectilinear
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec. */
+/** Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> true_field_rectilinear_f64(arcseconds_f64 apparent_field_arcsec, millimetres_f64 focal_length_mm, millimetres_f64 eyepiece_mm)
 {
     double given;
@@ -1951,7 +1951,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> true_field_rectilinear
 }
 #endif
 
-/** Gives the angle of sky in an eyepiece that keeps equal angles equal, in mas. */
+/** Gives the angle of sky in an eyepiece that keeps equal angles equal, in milliarcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> true_field_equidistant_fx(milliarcseconds apparent_field_mas, micrometres focal_length_um, micrometres eyepiece_um)
 {
     uint32_t given;
@@ -1960,7 +1960,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> true_field_equidistan
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec. */
+/** Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> true_field_equidistant_f32(arcseconds_f32 apparent_field_arcsec, millimetres_f32 focal_length_mm, millimetres_f32 eyepiece_mm)
 {
     float given;
@@ -1970,7 +1970,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> true_field_equidistant
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec. */
+/** Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> true_field_equidistant_f64(arcseconds_f64 apparent_field_arcsec, millimetres_f64 focal_length_mm, millimetres_f64 eyepiece_mm)
 {
     double given;
@@ -1979,7 +1979,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> true_field_equidistant
 }
 #endif
 
-/** Gives the angle of sky along one side of a sensor, in mas. */
+/** Gives the angle of sky along one side of a sensor, in milliarcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> frame_field_fx(nanometres pixel_nm, uint32_t pixel_count, micrometres focal_length_um)
 {
     uint32_t given;
@@ -1988,7 +1988,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> frame_field_fx(nanome
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the angle of sky along one side of a sensor, in arcsec. */
+/** Gives the angle of sky along one side of a sensor, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> frame_field_f32(micrometres_f32 pixel_um, uint32_t pixel_count, millimetres_f32 focal_length_mm)
 {
     float given;
@@ -1998,7 +1998,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> frame_field_f32(microm
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the angle of sky along one side of a sensor, in arcsec. */
+/** Gives the angle of sky along one side of a sensor, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> frame_field_f64(micrometres_f64 pixel_um, uint32_t pixel_count, millimetres_f64 focal_length_mm)
 {
     double given;
@@ -2007,7 +2007,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> frame_field_f64(microm
 }
 #endif
 
-/** Gives the angle of sky to a millimetre at the focus, in mas per mm. */
+/** Gives the angle of sky to a millimetre at the focus, in milliarcseconds per millimetre. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds_per_millimetre> plate_scale_fx(micrometres focal_length_um)
 {
     uint32_t given;
@@ -2016,7 +2016,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds_per_millimetre> plate_
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the angle of sky to a millimetre at the focus, in arcsec per mm. */
+/** Gives the angle of sky to a millimetre at the focus, in arcseconds per millimetre. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_millimetre_f32> plate_scale_f32(millimetres_f32 focal_length_mm)
 {
     float given;
@@ -2026,7 +2026,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_millimetre_f32> plate_s
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the angle of sky to a millimetre at the focus, in arcsec per mm. */
+/** Gives the angle of sky to a millimetre at the focus, in arcseconds per millimetre. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_millimetre_f64> plate_scale_f64(millimetres_f64 focal_length_mm)
 {
     double given;
@@ -2035,7 +2035,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_millimetre_f64> plate_s
 }
 #endif
 
-/** Gives the angle of sky to a pixel, in uas. */
+/** Gives the angle of sky to a pixel, in microarcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<microarcseconds> pixel_scale_fx(nanometres pixel_nm, micrometres focal_length_um)
 {
     uint32_t given;
@@ -2044,7 +2044,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<microarcseconds> pixel_scale_fx(nanome
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the angle of sky to a pixel, in arcsec. */
+/** Gives the angle of sky to a pixel, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> pixel_scale_f32(micrometres_f32 pixel_um, millimetres_f32 focal_length_mm)
 {
     float given;
@@ -2054,7 +2054,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> pixel_scale_f32(microm
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the angle of sky to a pixel, in arcsec. */
+/** Gives the angle of sky to a pixel, in arcseconds. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> pixel_scale_f64(micrometres_f64 pixel_um, millimetres_f64 focal_length_mm)
 {
     double given;
@@ -2063,7 +2063,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> pixel_scale_f64(microm
 }
 #endif
 
-/** Gives the focal length that spreads a field over a width at the focus, in um. */
+/** Gives the focal length that spreads a field over a width at the focus, in micrometres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> focal_length_for_field_fx(micrometres extent_um, milliarcseconds field_mas)
 {
     uint32_t given;
@@ -2072,7 +2072,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<micrometres> focal_length_for_field_fx
 }
 
 #if !defined(FIELDSTOP_NO_FLOAT)
-/** Gives the focal length that spreads a field over a width at the focus, in mm. */
+/** Gives the focal length that spreads a field over a width at the focus, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> focal_length_for_field_f32(millimetres_f32 extent_mm, arcseconds_f32 field_arcsec)
 {
     float given;
@@ -2082,7 +2082,7 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f32> focal_length_for_fiel
 #endif
 
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
-/** Gives the focal length that spreads a field over a width at the focus, in mm. */
+/** Gives the focal length that spreads a field over a width at the focus, in millimetres. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> focal_length_for_field_f64(millimetres_f64 extent_mm, arcseconds_f64 field_arcsec)
 {
     double given;

@@ -240,3 +240,74 @@ fn committed_header_is_what_the_build_script_makes() {
     }
     assert_eq!(committed.len(), made.len(), "the header is out of date, see tests/header.rs");
 }
+
+/// Units that the header's top names, and the word for each in the comment of a function that gives it.
+const RESULTS: [(&str, &str); 8] = [
+    ("_um", "micrometres"),
+    ("_nm", "nanometres"),
+    ("_mm", "millimetres"),
+    ("_mas", "milliarcseconds"),
+    ("_uas", "microarcseconds"),
+    ("_arcsec", "arcseconds"),
+    ("_mmag", "millimagnitudes"),
+    ("_q16", "Q16.16"),
+];
+
+/// What a comment leaves out: an argument and its range, the result's unit, the statuses.
+fn gaps(name: &str, declared: &Declared, conventions: &str) -> Vec<String> {
+    let comment = declared.comment.join(" ");
+    let names_it = |text: &str, argument: &str| text.split(|c| !is_name(c)).any(|word| word == argument);
+    let mut gaps = Vec::new();
+    let readout = ["_fx", "_f32", "_f64"].iter().any(|form| name.ends_with(form));
+    let ranges = comment
+        .split_once("Ranges: ")
+        .map_or("", |(_, rest)| rest.split(" Error: ").next().unwrap().split(" Statuses: ").next().unwrap());
+    let (result, arguments) = declared.arguments.split_last().unwrap();
+    for argument in arguments {
+        let told = if readout { ranges } else { comment.as_str() };
+        let text = name.starts_with("fieldstop_text_") && conventions.contains(&format!("`{argument}`"));
+        if !text && !names_it(told, argument) {
+            gaps.push(format!("no range of {argument}"));
+        }
+    }
+    if readout {
+        for (unit, word) in RESULTS {
+            if result.ends_with(unit) && !result.contains("_per_") && !comment.contains(word) {
+                gaps.push(format!("{result} has no unit"));
+            }
+        }
+        if !comment.contains("Error: at most ") {
+            gaps.push("no error bound".to_string());
+        }
+    }
+    if !comment.contains("Statuses: null pointer") {
+        gaps.push("no statuses".to_string());
+    }
+    gaps
+}
+
+#[test]
+fn comments_leave_nothing_out() {
+    let header = header();
+    let conventions = &header[header.find(" * Text. ").unwrap()..header.find(" * Errors. ").unwrap()];
+    let mut seen = 0;
+    let mut found = Vec::new();
+    for (name, declared) in prototypes() {
+        if !header.contains(&format!("FIELDSTOP_CHECKED\nfieldstop_status {name}(")) {
+            continue;
+        }
+        let whole = gaps(&name, &declared, conventions);
+        seen += 1;
+        if !whole.is_empty() {
+            found.push(format!("{name}: {}", whole.join(", ")));
+            continue;
+        }
+        // A comment that loses its last line is seen.
+        let Declared { mut comment, arguments } = declared;
+        let statuses = comment.iter().position(|line| line.contains("Statuses: ")).unwrap();
+        comment.truncate(statuses);
+        assert!(!gaps(&name, &Declared { comment, arguments }, conventions).is_empty(), "{name}");
+    }
+    assert!(found.is_empty(), "{}", found.join("\n"));
+    assert!(seen > 200);
+}

@@ -2,6 +2,10 @@
 #ifndef BOARD_H
 #define BOARD_H
 
+#ifdef __cplusplus
+extern "C" {
+#endif
+
 void board_start(void);
 /* The display's serial line. */
 void board_send(char c);
@@ -9,5 +13,9 @@ void board_send(char c);
 char board_button(void);
 /* The end, which a real board does not have: it sleeps. */
 void board_off(void);
+
+#ifdef __cplusplus
+}
+#endif
 
 #endif

@@ -1,205 +1,293 @@
 /*
- * A small focuser box: what a camera shows on a telescope, how many frames a target takes, and how deep the focus is in
- * steps of the motor, on a display of two lines of sixteen characters.
+ * A small camera controller: what a camera shows behind a telescope, how many frames a target takes, and how exactly the
+ * focus motor must stand, on a display of two lines of sixteen characters.
  *
- * C++11 without heap, exceptions, RTTI or a standard library. Each length and angle has its unit in its type, and a result
- * is looked at before its value is used. The display hangs on a serial line and understands ECMA-48's "cursor position";
- * its buttons send a letter each: c next camera, g glass (none, reducer, Barlow), p next page, o off.
+ * The display hangs on a serial line and understands ECMA-48's "cursor position", as any terminal does; its buttons send a
+ * letter each: c next camera, b binning, g glass before the camera (none, reducer, Barlow), t next target, p next page,
+ * o off. Nothing is drawn again that has not changed.
  *
- * Equipment, target and place are invented. Put your own in.
+ * Equipment and targets are invented. Put your own in; the compiler refuses a length in the wrong unit.
  */
-extern "C" {
 #include "board.h"
-}
 #include "fieldstop.hpp"
 
 namespace {
 
 using namespace fieldstop::literals;
+using fieldstop::result;
 
-enum : uint8_t { COLUMNS = 16, ROWS = 2, CAMERA_PAGES = (FIELDSTOP_CAMERA_ROWS + ROWS - 1) / ROWS, PAGES = CAMERA_PAGES + 2 };
+constexpr uint8_t columns = 16, rows = 2, most_binning = 3;
 
 /* In flash. */
-constexpr fieldstop::telescope TELESCOPE = fieldstop::telescope()
-                                               .with_aperture(117000_um)
-                                               .with_focal_length(735000_um)
-                                               .with_throughput(0.94_q16);
-constexpr fieldstop::camera CAMERAS[] = {
-    fieldstop::camera().with_pixel(4100_nm).with_columns(4128).with_rows(2772).with_binning(1),
-    fieldstop::camera().with_pixel(2700_nm).with_columns(1936).with_rows(1096).with_binning(1),
+constexpr fieldstop::telescope telescope = fieldstop::telescope()
+                                               .with_aperture(186000_um)
+                                               .with_focal_length(790000_um)
+                                               .with_obstruction(71000_um)
+                                               .with_throughput(0.79_q16);
+constexpr fieldstop::camera cameras[] = {
+    fieldstop::camera().with_pixel(4300_nm).with_columns(4144).with_rows(2822),
+    fieldstop::camera().with_pixel(2650_nm).with_columns(1880).with_rows(1250),
 };
-constexpr fieldstop::q16 GLASS[] = {1.0_q16, 0.79_q16, 1.9_q16};
-constexpr fieldstop::observer OBSERVER = fieldstop::observer().with_seeing(2600000_uas).with_wavelength(550_nm);
-constexpr fieldstop::nanometres MOTOR_STEP = 1850_nm;
-/* Three by two degrees, the frames overlapping by six minutes. */
-constexpr fieldstop::milliarcseconds TARGET_WIDTH = 10800000_mas, TARGET_HEIGHT = 7200000_mas, OVERLAP = 360000_mas;
+/* Nothing, a reducer, a Barlow lens. */
+constexpr fieldstop::q16 glasses[] = {1.0_q16, 0.78_q16, 1.9_q16};
+/* No eye looks here: what concerns it is 0, not known. */
+constexpr fieldstop::observer observer = fieldstop::observer().with_seeing(2400000_uas).with_wavelength(550_nm);
 
-class display {
-public:
-    void start()
-    {
-        for (uint8_t row = 0; row < ROWS; row++) {
-            move_to(row, 0);
-            for (uint8_t column = 0; column < COLUMNS; column++) {
-                shown_[row][column] = ' ';
-                board_send(' ');
-            }
-        }
-    }
+/* The focus: travel of one step of the motor, and the steel tube that cools through the night. */
+constexpr fieldstop::nanometres motor_step = 450_nm;
+constexpr fieldstop::micrometres tube_length = 690000_um;
+constexpr fieldstop::parts_per_billion_per_kelvin steel = 11700_ppb_per_k;
 
-    /* Sends the part of a line that is not on the display yet. */
-    void show(uint8_t row, const char (&line)[COLUMNS])
-    {
-        const auto change =
-            fieldstop::text_changed(shown_[row], COLUMNS, line, COLUMNS, *fieldstop_text_style_ascii());
-        if (!change || change.value().count == 0) {
-            return;
-        }
-        const uint16_t first = change.value().first, end = static_cast<uint16_t>(first + change.value().count);
-        move_to(row, static_cast<uint8_t>(first));
-        for (uint16_t column = first; column < end; column++) {
-            board_send(shown_[row][column] = line[column]);
-        }
-    }
-
-    void move_to(uint8_t row, uint8_t column)
-    {
-        board_send('\033');
-        board_send('[');
-        send_number(row + 1u);
-        board_send(';');
-        send_number(column + 1u);
-        board_send('H');
-    }
-
-private:
-    static void send_number(unsigned n)
-    {
-        if (n >= 10) {
-            send_number(n / 10);
-        }
-        board_send(static_cast<char>('0' + n % 10));
-    }
-
-    char shown_[ROWS][COLUMNS];
+struct target {
+    const char *name;
+    fieldstop::milliarcseconds width, height;
+};
+constexpr target targets[] = {
+    {"Reed veil", 11400000_mas, 3900000_mas},
+    {"Comb stars", 1500000_mas, 1380000_mas},
+    {"Lantern", 82000_mas, 64000_mas},
 };
 
-/* A label at the left of a line, and room for a value of `WIDTH` characters at its right end. */
-struct labelled {
-    enum : uint8_t { WIDTH = 9 };
-    char line[COLUMNS];
+/* Pages in their order: the camera's first, two of its lines each. */
+constexpr uint8_t camera_pages = (FIELDSTOP_CAMERA_ROWS + rows - 1) / rows;
+constexpr uint8_t target_page = camera_pages, focus_page = camera_pages + 1, limits_page = camera_pages + 2;
+constexpr uint8_t pages = camera_pages + 3;
 
-    explicit labelled(const char *label)
-    {
-        for (char &place : line) {
-            place = *label != '\0' ? *label++ : ' ';
-        }
-    }
-    fieldstop::buffer value() { return fieldstop::buffer(line + COLUMNS - WIDTH, WIDTH); }
-    /* A dash where there is no value: the reason is of no use to somebody at the telescope. */
-    template <typename value_type> labelled &or_dash(const fieldstop::result<value_type> &written)
-    {
-        if (!written) {
-            line[COLUMNS - 1] = '-';
-        }
-        return *this;
-    }
-};
-
-const fieldstop::text_style &style()
+template <typename type, unsigned count> constexpr uint8_t count_of(const type (&)[count])
 {
-    return *fieldstop_text_style_ascii();
+    return count;
 }
 
-struct box {
-    uint8_t camera, glass, page;
-    display screen;
+/* What the display shows. */
+char shown[rows][columns];
 
-    void draw()
+void send_number(unsigned n)
+{
+    if (n >= 10) {
+        send_number(n / 10);
+    }
+    board_send(static_cast<char>('0' + n % 10));
+}
+
+void move_to(unsigned row, unsigned column)
+{
+    board_send('\033');
+    board_send('[');
+    send_number(row + 1);
+    board_send(';');
+    send_number(column + 1);
+    board_send('H');
+}
+
+/* A line of the display, written from left to right. */
+class line {
+public:
+    explicit line(const char *words)
     {
-        const auto readout = fieldstop::camera_readout_compute(
-            TELESCOPE.with_amplification(GLASS[glass]), CAMERAS[camera], OBSERVER, FIELDSTOP_CAMERA_ALL);
-        if (!readout) {
-            screen.show(0, labelled("bad equipment").line);
-            screen.show(1, labelled("").line);
-        } else if (page < CAMERA_PAGES) {
-            draw_camera(readout.value());
-        } else if (page == CAMERA_PAGES) {
-            draw_frames(readout.value());
+        for (char &character : text_) {
+            character = ' ';
+        }
+        add(words);
+    }
+    uint8_t room() const { return static_cast<uint8_t>(columns - length_); }
+    fieldstop::buffer rest() { return fieldstop::buffer(text_ + length_, room()); }
+    void add(const char *words)
+    {
+        while (length_ < columns && *words != '\0') {
+            text_[length_++] = *words++;
+        }
+    }
+    /* What a function has written into the rest; where there is no value, a dash at the end. */
+    void add(result<uint16_t> written)
+    {
+        if (written) {
+            length_ = static_cast<uint8_t>(length_ + written.value());
         } else {
-            draw_focus(readout.value());
+            text_[columns - 1] = '-';
+            length_ = columns;
         }
     }
-
-    void draw_camera(const fieldstop::camera_readout &readout)
+    /* Sends the part that is not on the display yet. */
+    void show(uint8_t row) const
     {
-        for (uint8_t row = 0; row < ROWS; row++) {
-            char line[COLUMNS];
-            const uint8_t number = static_cast<uint8_t>(page * ROWS + row);
-            if (fieldstop::text_camera_line(readout, fieldstop_text_camera_labels_short(), style(), COLUMNS, number, line)) {
-                screen.show(row, line);
-            }
+        const auto changed = fieldstop::text_changed(shown[row], columns, text_, columns, style());
+        if (!changed || changed.value().count == 0) {
+            return;
+        }
+        const unsigned first = changed.value().first, behind = first + changed.value().count;
+        move_to(row, first);
+        for (unsigned i = first; i < behind; i++) {
+            board_send(text_[i]);
+            shown[row][i] = text_[i];
         }
     }
+    static const fieldstop::text_style &style() { return fieldstop::text_style_ascii(); }
 
-    /* How many frames the target takes, across and down. */
-    void draw_frames(const fieldstop::camera_readout &readout)
-    {
-        const fieldstop::result<fieldstop::milliarcseconds> frame[] = {readout.frame_width(), readout.frame_height()};
-        const fieldstop::milliarcseconds target[] = {TARGET_WIDTH, TARGET_HEIGHT};
-        const char *const labels[] = {"Across", "Down"};
-        for (uint8_t row = 0; row < ROWS; row++) {
-            labelled line(labels[row]);
-            const auto count = frame[row] ? fieldstop::tiles_fx(target[row], frame[row].value(), OVERLAP)
-                                          : fieldstop::result<uint32_t>(frame[row].status());
-            screen.show(row, line.or_dash(count ? fieldstop::text_count(count.value(), FIELDSTOP_UNIT_NONE, style(),
-                                                                        labelled::WIDTH, line.value())
-                                                : fieldstop::result<uint16_t>(count.status()))
-                                 .line);
-        }
-    }
-
-    /* How far the focus may be off, each side, as a length and in steps of the motor. */
-    void draw_focus(const fieldstop::camera_readout &readout)
-    {
-        labelled depth_line("Depth"), steps_line("Steps");
-        const auto ratio = readout.focal_ratio();
-        const auto depth = ratio ? fieldstop::depth_of_focus_fx(ratio.value(), OBSERVER.wavelength())
-                                 : fieldstop::result<fieldstop::nanometres>(ratio.status());
-        const auto steps = depth ? fieldstop::motor_steps_fx(depth.value(), MOTOR_STEP)
-                                 : fieldstop::result<uint32_t>(depth.status());
-        screen.show(0, depth_line
-                           .or_dash(depth ? fieldstop::text_length_um(depth.value(), 1, style(), labelled::WIDTH,
-                                                                      depth_line.value())
-                                          : fieldstop::result<uint16_t>(depth.status()))
-                           .line);
-        screen.show(1, steps_line
-                           .or_dash(steps ? fieldstop::text_count(steps.value(), FIELDSTOP_UNIT_NONE, style(),
-                                                                  labelled::WIDTH, steps_line.value())
-                                          : fieldstop::result<uint16_t>(steps.status()))
-                           .line);
-    }
+private:
+    char text_[columns];
+    uint8_t length_ = 0;
 };
 
-box here;
+void show_words(uint8_t row, const char *words)
+{
+    line(words).show(row);
+}
+
+/* Values at the right end of a line. One that is not known hands its status on, in place of its text's. */
+
+void show_angle(uint8_t row, const char *words, fieldstop::milliarcseconds angle)
+{
+    line on(words);
+    on.add(fieldstop::text_angle(angle, fieldstop::angle_by_size, 0, line::style(), on.room(), on.rest()));
+    on.show(row);
+}
+
+void show_micrometres(uint8_t row, const char *words, result<fieldstop::nanometres> length, uint8_t decimals)
+{
+    line on(words);
+    on.add(length ? fieldstop::text_length_um(length.value(), decimals, line::style(), on.room(), on.rest())
+                  : result<uint16_t>(length.status()));
+    on.show(row);
+}
+
+void show_ratio(uint8_t row, const char *words, result<fieldstop::q16> ratio)
+{
+    line on(words);
+    on.add(ratio ? fieldstop::text_ratio(ratio.value(), 1, line::style(), on.room(), on.rest())
+                 : result<uint16_t>(ratio.status()));
+    on.show(row);
+}
+
+result<uint16_t> write_count(result<uint32_t> count, uint8_t unit, uint8_t width, fieldstop::buffer text)
+{
+    return count ? fieldstop::text_count(count.value(), unit, line::style(), width, text) : result<uint16_t>(count.status());
+}
+
+/* Frames in a row that a length of sky takes; each takes an eighth of the one before it again. */
+result<uint32_t> frames(fieldstop::milliarcseconds length, result<fieldstop::milliarcseconds> frame)
+{
+    return frame ? fieldstop::tiles_fx(length, frame.value(), fieldstop::milliarcseconds(frame.value().count() >> 3))
+                 : result<uint32_t>(frame.status());
+}
+
+void draw_target(const fieldstop::camera_readout &readout, const target &of)
+{
+    line on("Frames");
+    on.add(write_count(frames(of.width, readout.frame_width()), fieldstop::unit_none, 5, on.rest()));
+    on.add(" x ");
+    on.add(write_count(frames(of.height, readout.frame_height()), fieldstop::unit_none, 0, on.rest()));
+    show_angle(0, of.name, of.width);
+    on.show(1);
+}
+
+/* How far the focus may be off, to each side. */
+result<fieldstop::nanometres> depth_of_focus(const fieldstop::camera_readout &readout)
+{
+    const auto ratio = readout.focal_ratio();
+    return ratio ? fieldstop::depth_of_focus_fx(ratio.value(), observer.wavelength())
+                 : result<fieldstop::nanometres>(ratio.status());
+}
+
+void draw_focus(const fieldstop::camera_readout &readout)
+{
+    const auto depth = depth_of_focus(readout);
+    const auto steps = depth ? fieldstop::motor_steps_fx(depth.value(), motor_step) : result<uint32_t>(depth.status());
+    line on("or +/-");
+    on.add(write_count(steps, fieldstop::unit_step, on.room(), on.rest()));
+    show_micrometres(0, "Focus +/-", depth, 0);
+    on.show(1);
+}
+
+/* The tube's change of temperature that takes the focus out of its depth, and the coarsest pixel that loses nothing. */
+void draw_limits(const fieldstop::camera_readout &readout)
+{
+    const auto depth = depth_of_focus(readout);
+    const auto focal = readout.focal_length();
+    const auto change = depth ? fieldstop::refocus_temperature_fx(tube_length, steel, depth.value())
+                              : result<fieldstop::millikelvin>(depth.status());
+    show_ratio(0, "Refocus at K",
+               change ? fieldstop::q16_from_milli_fx(fieldstop::thousandths(change.value().count()))
+                      : result<fieldstop::q16>(change.status()));
+    show_micrometres(1, "Pixel to",
+                     focal ? fieldstop::nyquist_pixel_fx(focal.value(), telescope.aperture(), observer.wavelength())
+                           : result<fieldstop::nanometres>(focal.status()),
+                     1);
+}
+
+void draw_camera(const fieldstop::camera_readout &readout, uint8_t page)
+{
+    for (uint8_t row = 0; row < rows; row++) {
+        line on("");
+        on.add(fieldstop::text_camera_line(readout, fieldstop::text_camera_labels_short(), line::style(), columns,
+                                           static_cast<uint8_t>(page * rows + row), on.rest()));
+        on.show(row);
+    }
+}
+
+void draw(uint8_t page, fieldstop::q16 glass, const fieldstop::camera &camera, const target &of)
+{
+    const auto readout = fieldstop::camera_readout_compute(telescope.with_amplification(glass), camera, observer,
+                                                           fieldstop::camera_all);
+    if (!readout) {
+        /* Which of the three structs: telescope 1, camera 2, observer 3. */
+        static const char *const which[] = {"", "Check telescope", "Check camera", "Check observer"};
+        show_words(0, which[readout.status().argument() & 3]);
+        show_words(1, readout.status().text());
+    } else if (page == target_page) {
+        draw_target(readout.value(), of);
+    } else if (page == focus_page) {
+        draw_focus(readout.value());
+    } else if (page == limits_page) {
+        draw_limits(readout.value());
+    } else {
+        draw_camera(readout.value(), page);
+    }
+}
+
+char wait_for_button()
+{
+    char button;
+    while ((button = board_button()) == 0) {
+    }
+    return button;
+}
+
+uint8_t next(uint8_t now, bool pressed, uint8_t count)
+{
+    const unsigned then = now + (pressed ? 1u : 0u);
+    return then < count ? static_cast<uint8_t>(then) : uint8_t(0);
+}
 
 } // namespace
 
 int main()
 {
-    char button = 0;
+    uint8_t camera = 0, binning = 0, glass = 0, target = 0, page = 0;
+    char button;
 
     board_start();
-    here.screen.start();
-    while (button != 'o') {
-        here.draw();
-        while ((button = board_button()) == 0) {
+    /* An empty display, as far as we know. */
+    for (uint8_t row = 0; row < rows; row++) {
+        move_to(row, 0);
+        for (char &character : shown[row]) {
+            character = ' ';
+            board_send(' ');
         }
-        here.camera = static_cast<uint8_t>((here.camera + (button == 'c')) % (sizeof CAMERAS / sizeof CAMERAS[0]));
-        here.glass = static_cast<uint8_t>((here.glass + (button == 'g')) % (sizeof GLASS / sizeof GLASS[0]));
-        here.page = static_cast<uint8_t>((here.page + (button == 'p')) % PAGES);
     }
-    here.screen.move_to(ROWS, 0);
+    /* The usual caution, until somebody has seen it. */
+    show_words(0, "Never at the Sun");
+    show_words(1, "without a filter");
+    button = wait_for_button();
+    while (button != 'o') {
+        draw(page, glasses[glass], cameras[camera].with_binning(static_cast<uint8_t>(binning + 1)), targets[target]);
+        button = wait_for_button();
+        camera = next(camera, button == 'c', count_of(cameras));
+        binning = next(binning, button == 'b', most_binning);
+        glass = next(glass, button == 'g', count_of(glasses));
+        target = next(target, button == 't', count_of(targets));
+        page = next(page, button == 'p', pages);
+    }
+    move_to(rows, 0);
     board_off();
     return 0;
 }

@@ -303,7 +303,7 @@ pub unsafe extern "C" fn fieldstop_achromat_flint_f64(
 ///
 /// f dP / dV, dP and dV the differences of the two glasses in partial dispersion and Abbe number (Kingslake, Lens
 /// Design Fundamentals).
-/// Ranges: focal_length_um, abbe_difference_q16 not 0.
+/// Ranges: focal_length_um, abbe_difference_q16 not 0; partial_difference_ppm any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, zero, overflow.
 #[must_use]

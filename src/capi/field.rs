@@ -61,7 +61,7 @@ pub unsafe extern "C" fn fieldstop_focal_ratio_f64(
     unsafe { give(focal_ratio, 3, || field::focal_ratio(focal_length_mm, aperture_mm)) }
 }
 
-/// Gives the focal length of a telescope with an amplifier or a reducer in its beam, in um.
+/// Gives the focal length of a telescope with an amplifier or a reducer in its beam, in micrometres.
 ///
 /// f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
 /// Ranges: focal_length_um not 0; amplification_q16 not 0.
@@ -82,7 +82,7 @@ pub unsafe extern "C" fn fieldstop_amplified_focal_length_fx(
     }
 }
 
-/// Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
+/// Gives the focal length of a telescope with an amplifier or a reducer in its beam, in millimetres.
 ///
 /// f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
 /// Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
@@ -100,7 +100,7 @@ pub unsafe extern "C" fn fieldstop_amplified_focal_length_f32(
     unsafe { give(amplified_mm, 3, || field::amplified_focal_length(focal_length_mm, amplification)) }
 }
 
-/// Gives the focal length of a telescope with an amplifier or a reducer in its beam, in mm.
+/// Gives the focal length of a telescope with an amplifier or a reducer in its beam, in millimetres.
 ///
 /// f k, where k is over 1 for a Barlow lens and under 1 for a reducer.
 /// Ranges: focal_length_mm 2^-32 to 2^32; amplification 2^-32 to 2^32.
@@ -237,7 +237,7 @@ pub unsafe extern "C" fn fieldstop_magnification_f64(
     unsafe { give(magnification, 3, || field::magnification(focal_length_mm, eyepiece_mm)) }
 }
 
-/// Gives the diameter of the beam that leaves the eyepiece, in um.
+/// Gives the diameter of the beam that leaves the eyepiece, in micrometres.
 ///
 /// D fe / f.
 /// Ranges: aperture_um not 0; focal_length_um not 0; eyepiece_um not 0.
@@ -263,7 +263,7 @@ pub unsafe extern "C" fn fieldstop_exit_pupil_fx(
     }
 }
 
-/// Gives the diameter of the beam that leaves the eyepiece, in mm.
+/// Gives the diameter of the beam that leaves the eyepiece, in millimetres.
 ///
 /// D fe / f.
 /// Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
@@ -282,7 +282,7 @@ pub unsafe extern "C" fn fieldstop_exit_pupil_f32(
     unsafe { give(exit_pupil_mm, 4, || field::exit_pupil(aperture_mm, focal_length_mm, eyepiece_mm)) }
 }
 
-/// Gives the diameter of the beam that leaves the eyepiece, in mm.
+/// Gives the diameter of the beam that leaves the eyepiece, in millimetres.
 ///
 /// D fe / f.
 /// Ranges: aperture_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
@@ -301,7 +301,7 @@ pub unsafe extern "C" fn fieldstop_exit_pupil_f64(
     unsafe { give(exit_pupil_mm, 4, || field::exit_pupil(aperture_mm, focal_length_mm, eyepiece_mm)) }
 }
 
-/// Gives the eyepiece focal length that gives an exit pupil, in um.
+/// Gives the eyepiece focal length that gives an exit pupil, in micrometres.
 ///
 /// p f / D.
 /// Ranges: exit_pupil_um not 0; focal_length_um not 0; aperture_um not 0.
@@ -327,7 +327,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_exit_pupil_fx(
     }
 }
 
-/// Gives the eyepiece focal length that gives an exit pupil, in mm.
+/// Gives the eyepiece focal length that gives an exit pupil, in millimetres.
 ///
 /// p f / D.
 /// Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
@@ -348,7 +348,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_exit_pupil_f32(
     }
 }
 
-/// Gives the eyepiece focal length that gives an exit pupil, in mm.
+/// Gives the eyepiece focal length that gives an exit pupil, in millimetres.
 ///
 /// p f / D.
 /// Ranges: exit_pupil_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; aperture_mm 2^-32 to 2^32.
@@ -369,7 +369,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_exit_pupil_f64(
     }
 }
 
-/// Gives the eyepiece focal length that gives a magnification, in um.
+/// Gives the eyepiece focal length that gives a magnification, in micrometres.
 ///
 /// f / M.
 /// Ranges: focal_length_um not 0; magnification_q16 not 0.
@@ -390,7 +390,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_magnification_fx(
     }
 }
 
-/// Gives the eyepiece focal length that gives a magnification, in mm.
+/// Gives the eyepiece focal length that gives a magnification, in millimetres.
 ///
 /// f / M.
 /// Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
@@ -408,7 +408,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_magnification_f32(
     unsafe { give(eyepiece_mm, 3, || field::eyepiece_for_magnification(focal_length_mm, magnification)) }
 }
 
-/// Gives the eyepiece focal length that gives a magnification, in mm.
+/// Gives the eyepiece focal length that gives a magnification, in millimetres.
 ///
 /// f / M.
 /// Ranges: focal_length_mm 2^-32 to 2^32; magnification 2^-32 to 2^32.
@@ -426,7 +426,7 @@ pub unsafe extern "C" fn fieldstop_eyepiece_for_magnification_f64(
     unsafe { give(eyepiece_mm, 3, || field::eyepiece_for_magnification(focal_length_mm, magnification)) }
 }
 
-/// Gives the angle of sky inside the eyepiece's field stop, in mas.
+/// Gives the angle of sky inside the eyepiece's field stop, in milliarcseconds.
 ///
 /// 2 atan(s / 2f).
 /// Ranges: field_stop_um not 0; focal_length_um not 0.
@@ -447,7 +447,7 @@ pub unsafe extern "C" fn fieldstop_true_field_from_stop_fx(
     }
 }
 
-/// Gives the angle of sky inside the eyepiece's field stop, in arcsec.
+/// Gives the angle of sky inside the eyepiece's field stop, in arcseconds.
 ///
 /// 2 atan(s / 2f).
 /// Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
@@ -465,7 +465,7 @@ pub unsafe extern "C" fn fieldstop_true_field_from_stop_f32(
     unsafe { give(true_field_arcsec, 3, || field::true_field_from_stop(field_stop_mm, focal_length_mm)) }
 }
 
-/// Gives the angle of sky inside the eyepiece's field stop, in arcsec.
+/// Gives the angle of sky inside the eyepiece's field stop, in arcseconds.
 ///
 /// 2 atan(s / 2f).
 /// Ranges: field_stop_mm 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
@@ -483,7 +483,7 @@ pub unsafe extern "C" fn fieldstop_true_field_from_stop_f64(
     unsafe { give(true_field_arcsec, 3, || field::true_field_from_stop(field_stop_mm, focal_length_mm)) }
 }
 
-/// Gives the angle of sky in an eyepiece that keeps straight lines straight, in mas.
+/// Gives the angle of sky in an eyepiece that keeps straight lines straight, in milliarcseconds.
 ///
 /// 2 atan(tan(A/2) fe / f).
 /// Ranges: apparent_field_mas not 0, under 648000000 (180 degrees); focal_length_um not 0; eyepiece_um not
@@ -510,7 +510,7 @@ pub unsafe extern "C" fn fieldstop_true_field_rectilinear_fx(
     }
 }
 
-/// Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
+/// Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcseconds.
 ///
 /// 2 atan(tan(A/2) fe / f).
 /// Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
@@ -534,7 +534,7 @@ pub unsafe extern "C" fn fieldstop_true_field_rectilinear_f32(
     }
 }
 
-/// Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcsec.
+/// Gives the angle of sky in an eyepiece that keeps straight lines straight, in arcseconds.
 ///
 /// 2 atan(tan(A/2) fe / f).
 /// Ranges: apparent_field_arcsec 2^-32 to under 648000; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to
@@ -558,7 +558,7 @@ pub unsafe extern "C" fn fieldstop_true_field_rectilinear_f64(
     }
 }
 
-/// Gives the angle of sky in an eyepiece that keeps equal angles equal, in mas.
+/// Gives the angle of sky in an eyepiece that keeps equal angles equal, in milliarcseconds.
 ///
 /// A fe / f.
 /// Ranges: apparent_field_mas not 0; focal_length_um not 0; eyepiece_um not 0.
@@ -584,7 +584,7 @@ pub unsafe extern "C" fn fieldstop_true_field_equidistant_fx(
     }
 }
 
-/// Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
+/// Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcseconds.
 ///
 /// A fe / f.
 /// Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
@@ -607,7 +607,7 @@ pub unsafe extern "C" fn fieldstop_true_field_equidistant_f32(
     }
 }
 
-/// Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcsec.
+/// Gives the angle of sky in an eyepiece that keeps equal angles equal, in arcseconds.
 ///
 /// A fe / f.
 /// Ranges: apparent_field_arcsec 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32; eyepiece_mm 2^-32 to 2^32.
@@ -630,7 +630,7 @@ pub unsafe extern "C" fn fieldstop_true_field_equidistant_f64(
     }
 }
 
-/// Gives the angle of sky along one side of a sensor, in mas.
+/// Gives the angle of sky along one side of a sensor, in milliarcseconds.
 ///
 /// 2 atan(p n / 2f).
 /// Ranges: pixel_nm not 0; pixel_count not 0; focal_length_um not 0.
@@ -652,7 +652,7 @@ pub unsafe extern "C" fn fieldstop_frame_field_fx(
     }
 }
 
-/// Gives the angle of sky along one side of a sensor, in arcsec.
+/// Gives the angle of sky along one side of a sensor, in arcseconds.
 ///
 /// 2 atan(p n / 2f).
 /// Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
@@ -671,7 +671,7 @@ pub unsafe extern "C" fn fieldstop_frame_field_f32(
     unsafe { give(frame_arcsec, 4, || field::frame_field(pixel_um, pixel_count, focal_length_mm)) }
 }
 
-/// Gives the angle of sky along one side of a sensor, in arcsec.
+/// Gives the angle of sky along one side of a sensor, in arcseconds.
 ///
 /// 2 atan(p n / 2f).
 /// Ranges: pixel_um 2^-32 to 2^32; pixel_count not 0, an integer; focal_length_mm 2^-32 to 2^32.
@@ -690,7 +690,7 @@ pub unsafe extern "C" fn fieldstop_frame_field_f64(
     unsafe { give(frame_arcsec, 4, || field::frame_field(pixel_um, pixel_count, focal_length_mm)) }
 }
 
-/// Gives the angle of sky to a millimetre at the focus, in mas per mm.
+/// Gives the angle of sky to a millimetre at the focus, in milliarcseconds per millimetre.
 ///
 /// (1 rad) / f.
 /// Ranges: focal_length_um not 0.
@@ -706,7 +706,7 @@ pub unsafe extern "C" fn fieldstop_plate_scale_fx(
     unsafe { give(plate_scale_mas_per_mm, 2, || field::plate_scale_fx(Micrometres(focal_length_um))) }
 }
 
-/// Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
+/// Gives the angle of sky to a millimetre at the focus, in arcseconds per millimetre.
 ///
 /// (1 rad) / f.
 /// Ranges: focal_length_mm 2^-32 to 2^32.
@@ -723,7 +723,7 @@ pub unsafe extern "C" fn fieldstop_plate_scale_f32(
     unsafe { give(plate_scale_arcsec_per_mm, 2, || field::plate_scale(focal_length_mm)) }
 }
 
-/// Gives the angle of sky to a millimetre at the focus, in arcsec per mm.
+/// Gives the angle of sky to a millimetre at the focus, in arcseconds per millimetre.
 ///
 /// (1 rad) / f.
 /// Ranges: focal_length_mm 2^-32 to 2^32.
@@ -740,7 +740,7 @@ pub unsafe extern "C" fn fieldstop_plate_scale_f64(
     unsafe { give(plate_scale_arcsec_per_mm, 2, || field::plate_scale(focal_length_mm)) }
 }
 
-/// Gives the angle of sky to a pixel, in uas.
+/// Gives the angle of sky to a pixel, in microarcseconds.
 ///
 /// (1 rad) p / f.
 /// Ranges: pixel_nm not 0; focal_length_um not 0.
@@ -759,7 +759,7 @@ pub unsafe extern "C" fn fieldstop_pixel_scale_fx(
     }
 }
 
-/// Gives the angle of sky to a pixel, in arcsec.
+/// Gives the angle of sky to a pixel, in arcseconds.
 ///
 /// (1 rad) p / f.
 /// Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
@@ -777,7 +777,7 @@ pub unsafe extern "C" fn fieldstop_pixel_scale_f32(
     unsafe { give(pixel_scale_arcsec, 3, || field::pixel_scale(pixel_um, focal_length_mm)) }
 }
 
-/// Gives the angle of sky to a pixel, in arcsec.
+/// Gives the angle of sky to a pixel, in arcseconds.
 ///
 /// (1 rad) p / f.
 /// Ranges: pixel_um 2^-32 to 2^32; focal_length_mm 2^-32 to 2^32.
@@ -795,7 +795,7 @@ pub unsafe extern "C" fn fieldstop_pixel_scale_f64(
     unsafe { give(pixel_scale_arcsec, 3, || field::pixel_scale(pixel_um, focal_length_mm)) }
 }
 
-/// Gives the focal length that spreads a field over a width at the focus, in um.
+/// Gives the focal length that spreads a field over a width at the focus, in micrometres.
 ///
 /// x / (2 tan(t/2)).
 /// Ranges: extent_um not 0; field_mas not 0, under 648000000 (180 degrees).
@@ -816,7 +816,7 @@ pub unsafe extern "C" fn fieldstop_focal_length_for_field_fx(
     }
 }
 
-/// Gives the focal length that spreads a field over a width at the focus, in mm.
+/// Gives the focal length that spreads a field over a width at the focus, in millimetres.
 ///
 /// x / (2 tan(t/2)).
 /// Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.
@@ -834,7 +834,7 @@ pub unsafe extern "C" fn fieldstop_focal_length_for_field_f32(
     unsafe { give(focal_length_mm, 3, || field::focal_length_for_field(extent_mm, field_arcsec)) }
 }
 
-/// Gives the focal length that spreads a field over a width at the focus, in mm.
+/// Gives the focal length that spreads a field over a width at the focus, in millimetres.
 ///
 /// x / (2 tan(t/2)).
 /// Ranges: extent_mm 2^-32 to 2^32; field_arcsec 2^-32 to under 648000.

@@ -63,7 +63,7 @@ pub unsafe extern "C" fn fieldstop_depth_of_focus_f64(
 /// Gives the diameter of a star's image out of focus, by geometry, in nanometres.
 ///
 /// d / N (Smith, Modern Optical Engineering).
-/// Ranges: focal_ratio_q16 not 0.
+/// Ranges: focal_ratio_q16 not 0; defocus_nm any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, zero, overflow.
 #[must_use]
@@ -116,7 +116,7 @@ pub unsafe extern "C" fn fieldstop_defocus_blur_f64(
 /// Gives the error of the wavefront out of focus, from its lowest to its highest point, in nanometres.
 ///
 /// d / (8 N^2) (Smith, Modern Optical Engineering).
-/// Ranges: focal_ratio_q16 not 0.
+/// Ranges: focal_ratio_q16 not 0; defocus_nm any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, zero, overflow.
 #[must_use]
@@ -171,7 +171,7 @@ pub unsafe extern "C" fn fieldstop_defocus_wavefront_f64(
 /// Gives how many steps of the focus motor a distance takes, to the nearest.
 ///
 /// d / s (counting).
-/// Ranges: step_nm not 0.
+/// Ranges: step_nm not 0; distance_nm any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, zero.
 #[must_use]
@@ -225,6 +225,7 @@ pub unsafe extern "C" fn fieldstop_motor_steps_f64(
 /// nanometres.
 ///
 /// L a dT (CRC Handbook of Chemistry and Physics, linear expansion).
+/// Ranges: length_um, expansion_ppb_per_k, temperature_change_mk any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, overflow.
 #[must_use]
@@ -295,7 +296,7 @@ pub unsafe extern "C" fn fieldstop_thermal_shift_f64(
 ///
 /// t / (L a), a the size of the coefficient of linear expansion (CRC Handbook of Chemistry and Physics, linear
 /// expansion).
-/// Ranges: length_um, expansion_ppb_per_k not 0.
+/// Ranges: length_um, expansion_ppb_per_k not 0; tolerance_nm any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, zero, overflow.
 #[must_use]
@@ -426,7 +427,7 @@ pub unsafe extern "C" fn fieldstop_near_focus_travel_f64(
 /// Gives how long the coma of a paraboloid draws a star out, off the axis, in microarcseconds.
 ///
 /// 3 t / (16 N^2), the tangential coma (Schroeder, Astronomical Optics).
-/// Ranges: focal_ratio_q16 not 0.
+/// Ranges: focal_ratio_q16 not 0; off_axis_mas any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, zero, overflow.
 #[must_use]

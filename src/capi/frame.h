@@ -3,6 +3,8 @@
  *
  * Made from src/capi of the crate `fieldstop`: do not edit.
  *
+ * Contents, each under a line of dashes:
+@CONTENTS@ *
  * CAUTION. Never look at or near the Sun through a telescope without a full-aperture filter made for
  * it; nothing that this library computes says that it is safe. Moving mounts and high eyepieces can
  * hurt too. The makers' instructions and local rules come first.
@@ -34,6 +36,11 @@
  * Ranges. A fixed argument may be anything that its type holds, but for what the function's comment
  * says. A float argument is finite and at most 2^32 in magnitude, and at least 2^-32 where zero is
  * refused, but for what the comment says.
+ *
+ * Text. The functions fieldstop_text_... write into `text`, an array of `capacity` bytes, in `style`, one
+ * of the ready ones or your own, and put the length in bytes into `length`; no zero byte ends it.
+ * `readout` is one that fieldstop_visual_readout_compute or fieldstop_camera_readout_compute has filled.
+ * No room: `text` is as it was.
  *
  * Errors. A fixed argument is read as exact and the result is the exact value of the formula, rounded
  * to nearest. "Error" is the greatest distance from that exact value over the whole range: in units of

@@ -240,7 +240,7 @@ pub unsafe extern "C" fn fieldstop_beam_width_f64(
 /// focus, in micrometres.
 ///
 /// y (f - L) / f (geometry).
-/// Ranges: focal_length_um not 0; focus_distance_um at most the focal length.
+/// Ranges: focal_length_um not 0; focus_distance_um at most the focal length; image_offset_um any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, zero, out of range.
 #[must_use]
@@ -519,7 +519,8 @@ pub unsafe extern "C" fn fieldstop_secondary_diameter_f64(
 /// Gives what a lit field adds to the second mirror's diameter, in micrometres.
 ///
 /// i (f1 - p) / F, p = (f1 + b) / (m + 1), m = F / f1 (Schroeder, Astronomical Optics).
-/// Ranges: primary_focal_um not 0; system_focal_um over primary_focal_um; back_focus_um at most system_focal_um.
+/// Ranges: primary_focal_um not 0; system_focal_um over primary_focal_um; back_focus_um at most system_focal_um;
+/// lit_field_um any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, zero, out of range.
 #[must_use]
@@ -667,7 +668,8 @@ pub unsafe extern "C" fn fieldstop_secondary_radius_f64(
 /// Gives the share of a beam's disc that lies inside a stop's or a mirror's, in Q16.16.
 ///
 /// the area that the two discs share over that of the beam (CRC Standard Mathematical Tables, circular segment).
-/// Ranges: beam_um not 0; the first two are diameters, the third is the distance of their centres.
+/// Ranges: beam_um not 0; stop_um, offset_um any: the first two are diameters, the third is the distance of their
+/// centres.
 /// Error: at most 1 LSB.
 /// Statuses: null pointer, zero.
 #[must_use]
@@ -731,6 +733,7 @@ pub unsafe extern "C" fn fieldstop_illumination_f64(
 /// sqrt(L^2 + (D/2)^2) (geometry).
 /// Caution: a moving mount can hurt. Stay clear of all that it can reach, dew caps, counterweights and cables too,
 /// and follow the maker's instructions and local rules.
+/// Ranges: reach_um, tube_diameter_um any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, overflow.
 #[must_use]
@@ -793,7 +796,7 @@ pub unsafe extern "C" fn fieldstop_swing_radius_f64(
 /// end (geometry).
 /// Caution: where it is high, stand on a stable platform, never on the top of a ladder, and clear of the moving
 /// mount; follow the makers' instructions and local rules.
-/// Ranges: altitude_bam 0 to 2^30, 90 degrees.
+/// Ranges: altitude_bam 0 to 2^30, 90 degrees; axis_height_um, reach_um any.
 /// Error: at most 0.51 LSB.
 /// Statuses: null pointer, out of range, overflow (also below the floor).
 #[must_use]

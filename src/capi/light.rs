@@ -7,7 +7,7 @@ use crate::units::{Micrometres, Millimagnitudes, MillimagnitudesPerAirmass, Q16}
 /// Gives the share of the light that mirrors and glass surfaces let through, in Q16.16.
 ///
 /// R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
-/// Ranges: reflectance_q16, transmittance_q16 at most 1.
+/// Ranges: reflectance_q16, transmittance_q16 at most 1; mirrors, surfaces any.
 /// Error: at most 1 LSB.
 /// Statuses: null pointer, out of range.
 #[must_use]
@@ -30,7 +30,7 @@ pub unsafe extern "C" fn fieldstop_throughput_fx(
 /// Gives the share of the light that mirrors and glass surfaces let through, a plain number.
 ///
 /// R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
-/// Ranges: reflectance, transmittance 0 to 1.
+/// Ranges: reflectance, transmittance 0 to 1; mirrors, surfaces any.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, out of range, not finite.
 #[cfg(feature = "float")]
@@ -50,7 +50,7 @@ pub unsafe extern "C" fn fieldstop_throughput_f32(
 /// Gives the share of the light that mirrors and glass surfaces let through, a plain number, in double.
 ///
 /// R^m T^s, where 0 to the power 0 is 1 (Smith, Modern Optical Engineering).
-/// Ranges: reflectance, transmittance 0 to 1.
+/// Ranges: reflectance, transmittance 0 to 1; mirrors, surfaces any.
 /// Error: at most 3 ulp.
 /// Statuses: null pointer, out of range, not finite.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -252,7 +252,7 @@ pub unsafe extern "C" fn fieldstop_magnitude_gain_f64(
 /// Gives the faintest star that a telescope shows to an eye whose own limit is known, in millimagnitudes.
 ///
 /// m0 + 5 log10(D / p) (Pogson 1856; Schroeder, Astronomical Optics).
-/// Ranges: effective_aperture_um, eye_pupil_um not 0.
+/// Ranges: effective_aperture_um, eye_pupil_um not 0; naked_eye_mmag any.
 /// Error: at most 1 LSB.
 /// Statuses: null pointer, zero, overflow (beyond 32 bits).
 #[must_use]
@@ -492,7 +492,7 @@ pub unsafe extern "C" fn fieldstop_distance_dimming_f64(
 /// Gives how many magnitudes the air takes from a star, in millimagnitudes.
 ///
 /// k X, of the loss in one airmass (Bouguer 1729).
-/// Ranges: any.
+/// Ranges: coefficient_mmag, airmass_q16 any.
 /// Error: at most 0.5 LSB.
 /// Statuses: null pointer, overflow (2147483648 mmag or more).
 #[must_use]

@@ -489,7 +489,7 @@ pub unsafe extern "C" fn fieldstop_contrast_f64(
 /// Q16.16.
 ///
 /// exp(-(2 pi s / lambda)^2) (Mahajan 1983, after Marechal).
-/// Ranges: wavelength_nm not 0.
+/// Ranges: wavelength_nm not 0; rms_nm any.
 /// Error: at most 1 LSB.
 /// Statuses: null pointer, zero.
 #[must_use]

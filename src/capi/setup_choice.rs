@@ -136,6 +136,7 @@ unsafe fn fill<T>(
 
 /// Fills `choices` with the best eyepieces for a target, each alone and with each Barlow or reducer, the best first.
 ///
+/// observer: as for the readout.
 /// telescope: its own amplification is not used. eyepieces: 1 to 16. amplifiers_q16: what each Barlow or reducer
 /// multiplies the focal length by, none 0, up to 8; may be null where there is none. choice_count: on entry the room in
 /// `choices`, not 0; on success how many are filled, at most eyepieces times (1 + amplifiers). What stands behind
@@ -182,6 +183,7 @@ pub unsafe extern "C" fn fieldstop_visual_choose(
 
 /// Fills `choices` with the best cameras for a target, each alone and with each Barlow or reducer, the best first.
 ///
+/// observer: as for the readout.
 /// telescope: its own amplification is not used. cameras: 1 to 8. amplifiers_q16: what each Barlow or reducer
 /// multiplies the focal length by, none 0, up to 8; may be null where there is none. choice_count: on entry the room in
 /// `choices`, not 0; on success how many are filled, at most cameras times (1 + amplifiers). What stands behind them

@@ -181,7 +181,8 @@ pub extern "C" fn fieldstop_text_style_hd44780_a02() -> *const TextStyle {
 
 /// Writes an integer with its unit as text and gives its length in bytes.
 ///
-/// Ranges: unit one of FIELDSTOP_UNIT_...; width 0 (as long as it is) or the characters to fill, right-aligned.
+/// Ranges: count any; unit one of FIELDSTOP_UNIT_...; width 0 (as long as it is) or the characters to fill,
+/// right-aligned.
 /// Statuses: null pointer, out of range (unit), no room.
 #[must_use]
 #[unsafe(no_mangle)]
@@ -697,7 +698,7 @@ pub unsafe extern "C" fn fieldstop_text_camera_unit(
 /// Gives the part of a line that is different from what is shown, in characters.
 ///
 /// span.count is 0 where nothing is. Where the two have different numbers of characters it reaches to the end of the line.
-/// Ranges: lengths in bytes.
+/// Ranges: shown_length, line_length in bytes, any.
 /// Statuses: null pointer.
 #[must_use]
 #[unsafe(no_mangle)]

@@ -33,15 +33,18 @@ void board_off(void)
     }
 }
 
-extern uint32_t bss_start[], bss_end[];
+extern uint32_t data_start[], data_end[], data_stored[], bss_start[], bss_end[];
 extern int main(void);
 void begin(void);
 
 void begin(void)
 {
     volatile uint32_t *to;
+    const uint32_t *from = data_stored;
 
-    /* All of the image is in RAM already, so nothing is copied. */
+    for (to = data_start; to < data_end; to++) {
+        *to = *from++;
+    }
     for (to = bss_start; to < bss_end; to++) {
         *to = 0;
     }
