@@ -27,6 +27,20 @@
 //! | [`Value::magnitude`] | `-1.46 mag` |
 //! | [`Value::decimal`], [`Value::signed_decimal`] | any other integer of a decimal unit |
 //!
+//! # Back from a keypad
+//!
+//! [`read_entry`] makes a quantity of what a person types, and tells what is unfinished from what is wrong:
+//!
+//! ```
+//! use fieldstop::text::{EntryKind, TextStyle, read_entry};
+//!
+//! let read = |text: &str| read_entry(text.as_bytes(), EntryKind::FocalLength, 187_500, &TextStyle::ASCII);
+//! assert_eq!(read("1.13 m"), Ok(1_130_000)); // micrometres
+//! assert_eq!(read("f/6"), Ok(1_125_000));
+//! assert!(read("f/").unwrap_err().partial);
+//! assert_eq!(read("1,13 m").unwrap_err().at, 1);
+//! ```
+//!
 //! # Style
 //!
 //! A [`TextStyle`] says how a number looks: the text of each [`Unit`], the decimal mark, the dash for what is not
@@ -68,15 +82,18 @@
 //! [`camera_row`] with its value, which has [`Value::without_unit`] and [`Value::unit`].
 
 mod digits;
+mod entry;
 mod labels;
 mod line;
 mod page;
+mod spelling;
 #[cfg(feature = "heapless")]
 mod string;
 mod style;
 mod value;
 mod write;
 
+pub use entry::{EntryError, EntryKind, EntryReason, read_entry};
 pub use labels::{CAMERA_LABELS, CAMERA_LABELS_SHORT, VISUAL_LABELS, VISUAL_LABELS_SHORT};
 pub use line::{Row, Span, changed, lines};
 pub use page::{CameraRow, VisualRow, camera_line, camera_row, visual_line, visual_row};
@@ -88,6 +105,7 @@ pub use value::{AngleForm, Value};
 #[cfg(feature = "capi")]
 pub(crate) use {
     digits::{has_at_most, split_small_hundred, split_small_ten},
+    entry::read_as,
     labels::{
         CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, VISUAL_LABELS_FOR_C, VISUAL_LABELS_SHORT_FOR_C,
     },
