@@ -127,7 +127,7 @@ pub enum EntryReason {
     Ended = 1,
     /// No entry has this byte here.
     Unexpected = 2,
-    /// The quantity is outside its range; the position is that of the number.
+    /// The quantity is outside its range; the position is that of the last number.
     TooLarge = 3,
     /// Minutes or seconds of 60 or more behind a greater unit; the position is that of the number.
     Sixty = 4,
