@@ -183,7 +183,7 @@ fn refused() {
         (FocalLength, "f/8mm", Unexpected, 3),
         (FocalLength, "f/-8", Unexpected, 2),
         (FocalLength, "f/22907", TooLarge, 2),
-        (PixelPitch, "5 m", TooLarge, 0),
+        (PixelPitch, "5 m ", TooLarge, 0),
         (Wavelength, "550 mag", Unexpected, 5),
         (Angle, "1d60'", Sixty, 2),
         (Angle, "1d15'60\"", Sixty, 5),

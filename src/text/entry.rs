@@ -408,6 +408,8 @@ pub(crate) fn read_as(
             reader.skip_blanks();
         } else if found.open {
             return reader.ended();
+        } else if found.reach > 0 && !matches!(reader.next(), Some(b'0'..=b'9')) {
+            return wrong(EntryReason::Unexpected, reader.at + found.reach);
         }
     }
 
