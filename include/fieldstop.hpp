@@ -662,6 +662,60 @@ constexpr uint8_t camera_row_plate_scale = FIELDSTOP_CAMERA_ROW_PLATE_SCALE;
 constexpr uint8_t camera_row_coarse_sampling = FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING;
 /** Camera row: fine sampling */
 constexpr uint8_t camera_row_fine_sampling = FIELDSTOP_CAMERA_ROW_FINE_SAMPLING;
+/** Entry: micrometres; a bare number is in mm; units m cm mm um nm in */
+constexpr uint8_t entry_length = FIELDSTOP_ENTRY_LENGTH;
+/** Entry: the same, and f/ in front of a focal ratio, which is multiplied by the aperture */
+constexpr uint8_t entry_focal_length = FIELDSTOP_ENTRY_FOCAL_LENGTH;
+/** Entry: nanometres; a bare number is in um; units as for a length */
+constexpr uint8_t entry_pixel_pitch = FIELDSTOP_ENTRY_PIXEL_PITCH;
+/** Entry: nanometres; a bare number is in nm; units as for a length */
+constexpr uint8_t entry_wavelength = FIELDSTOP_ENTRY_WAVELENGTH;
+/** Entry: milliarcseconds; a bare number is in degrees; units d deg, ' arcmin, " arcsec */
+constexpr uint8_t entry_angle = FIELDSTOP_ENTRY_ANGLE;
+/** Entry: microarcseconds; a bare number is in seconds of arc; units as for an angle */
+constexpr uint8_t entry_small_angle = FIELDSTOP_ENTRY_SMALL_ANGLE;
+/** Entry: Q16.16; no unit */
+constexpr uint8_t entry_ratio = FIELDSTOP_ENTRY_RATIO;
+/** Entry: Q16.16; f/ may stand in front */
+constexpr uint8_t entry_focal_ratio = FIELDSTOP_ENTRY_FOCAL_RATIO;
+/** Entry: Q16.16; x may stand behind */
+constexpr uint8_t entry_magnification = FIELDSTOP_ENTRY_MAGNIFICATION;
+/** Entry: Q16.16, 65536 for a hundred per cent; % may stand behind */
+constexpr uint8_t entry_percent = FIELDSTOP_ENTRY_PERCENT;
+/** Entry: millimagnitudes as int32_t; mag may stand behind */
+constexpr uint8_t entry_magnitude = FIELDSTOP_ENTRY_MAGNITUDE;
+/** Entry: binary angle as int32_t, a quarter turn at most; a bare number is in degrees; a sign, or N or S behind */
+constexpr uint8_t entry_latitude = FIELDSTOP_ENTRY_LATITUDE;
+/** Entry: binary angle, positive east; under 360 degrees, or 180 at most with a sign, or E or W behind */
+constexpr uint8_t entry_longitude = FIELDSTOP_ENTRY_LONGITUDE;
+/** Entry: binary angle as int32_t, a quarter turn at most; a bare number is in degrees */
+constexpr uint8_t entry_declination = FIELDSTOP_ENTRY_DECLINATION;
+/** Entry: binary angle under a turn; a bare number is in hours; units h m s, or those of an angle */
+constexpr uint8_t entry_right_ascension = FIELDSTOP_ENTRY_RIGHT_ASCENSION;
+/** Entry: milliseconds of a day, under 86400000; a bare number is in hours; units h m s */
+constexpr uint8_t entry_time_of_day = FIELDSTOP_ENTRY_TIME_OF_DAY;
+/** Entry: milliseconds; a bare number is in seconds; units h m s */
+constexpr uint8_t entry_duration = FIELDSTOP_ENTRY_DURATION;
+/** Entry: an integer; px or steps may stand behind */
+constexpr uint8_t entry_count = FIELDSTOP_ENTRY_COUNT;
+/** State of an entry: it gives a quantity */
+constexpr uint8_t entry_complete = FIELDSTOP_ENTRY_COMPLETE;
+/** State of an entry: it gives none yet; more characters can make it right */
+constexpr uint8_t entry_partial = FIELDSTOP_ENTRY_PARTIAL;
+/** State of an entry: it gives none, whatever follows */
+constexpr uint8_t entry_wrong = FIELDSTOP_ENTRY_WRONG;
+/** Reason: none, for it is complete */
+constexpr uint8_t entry_fine = FIELDSTOP_ENTRY_FINE;
+/** Reason: it ends where more must come */
+constexpr uint8_t entry_ended = FIELDSTOP_ENTRY_ENDED;
+/** Reason: no entry has this byte here */
+constexpr uint8_t entry_unexpected = FIELDSTOP_ENTRY_UNEXPECTED;
+/** Reason: the quantity is outside its range */
+constexpr uint8_t entry_too_large = FIELDSTOP_ENTRY_TOO_LARGE;
+/** Reason: minutes or seconds of 60 or more behind a greater unit */
+constexpr uint8_t entry_sixty = FIELDSTOP_ENTRY_SIXTY;
+/** Reason: a focal ratio where the aperture is not known */
+constexpr uint8_t entry_no_aperture = FIELDSTOP_ENTRY_NO_APERTURE;
 
 /** A telescope: objective or primary mirror, with the Barlow or reducer that is in use */
 class telescope {
@@ -1149,6 +1203,9 @@ typedef ::fieldstop_text_style text_style;
 
 /** A part of a line, in characters */
 typedef ::fieldstop_span span;
+
+/** What an entry is worth */
+typedef ::fieldstop_entry_check entry_check;
 /* What can go wrong. The numbers are frozen: they are the `fieldstop_status` of the C interface. */
 
 /** Gives a static English sentence for the cause in a status; never null. */
@@ -3429,6 +3486,24 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<span> text_changed(const char *shown, 
     fieldstop_span given;
     const fieldstop_status number = ::fieldstop_text_changed(shown, shown_length, line, line_length, &style, &given);
     return access::given<span>(number, given);
+}
+
+/* What a person types on a keypad or sends over a line, back to a quantity: integers only, correctly rounded. */
+
+/** Reads what a person typed as a quantity, in the integer unit of its kind. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint32_t> entry_read(const char *text, uint16_t text_length, uint8_t kind, micrometres aperture_um, const text_style &style)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_entry_read(text, text_length, kind, aperture_um.count(), &style, &given);
+    return access::given<uint32_t>(number, given);
+}
+
+/** Tells whether what a person has typed so far is complete, partial or wrong, with the reason and the place. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<entry_check> entry_check(const char *text, uint16_t text_length, uint8_t kind, micrometres aperture_um, const text_style &style)
+{
+    fieldstop_entry_check given;
+    const fieldstop_status number = ::fieldstop_entry_check(text, text_length, kind, aperture_um.count(), &style, &given);
+    return access::given<entry_check>(number, given);
 }
 } // namespace fieldstop
 

@@ -4564,4 +4564,40 @@ fieldstop_status typed_filled_text_changed(const char *shown, uint16_t shown_len
     return given.status().number();
 }
 
+fieldstop_status plain_entry_read(const char *text, uint16_t text_length, uint8_t kind, uint32_t aperture_um, const fieldstop::text_style *style, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_entry_read(text, text_length, kind, aperture_um, style, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_entry_read(const char *text, uint16_t text_length, uint8_t kind, uint32_t aperture_um, const fieldstop::text_style *style, uint32_t *out)
+{
+    const auto given = fieldstop::entry_read(text, text_length, kind, fieldstop::micrometres(aperture_um), *style);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_entry_check(const char *text, uint16_t text_length, uint8_t kind, uint32_t aperture_um, const fieldstop::text_style *style, struct fieldstop_entry_check *out)
+{
+    struct fieldstop_entry_check given;
+    const fieldstop_status number = ::fieldstop_entry_check(text, text_length, kind, aperture_um, style, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_entry_check(const char *text, uint16_t text_length, uint8_t kind, uint32_t aperture_um, const fieldstop::text_style *style, struct fieldstop_entry_check *out)
+{
+    const auto given = fieldstop::entry_check(text, text_length, kind, fieldstop::micrometres(aperture_um), *style);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
 }
