@@ -379,7 +379,7 @@ pub(crate) fn read_as(
     aperture_um: u32,
     style: &impl Look,
 ) -> Result<u32, EntryError> {
-    let row = KINDS.entry(kind as usize);
+    let row = KINDS.entry((kind as usize).min(EntryKind::ALL.len() - 1));
     let mut classes = row.at(0);
     let mut scale = Scale { flags: row.at(1), count: row.at(3), parts: row.at(4), limit: row.at(5) };
     let mut bare = row.at(2);
