@@ -12,7 +12,7 @@ mod header {
     use std::{env, fs};
 
     /// The order of the header's sections; other files of src/capi follow in the order of their names.
-    const ORDER: [&str; 15] = [
+    const ORDER: [&str; 16] = [
         "status",
         "units",
         "field",
@@ -28,6 +28,7 @@ mod header {
         "setup",
         "profile",
         "text",
+        "entry",
     ];
 
     pub fn write() {
@@ -148,7 +149,7 @@ mod header {
     }
 
     fn title(subject: &str) -> String {
-        for folder in ["src", "src/optics", "src/sky"] {
+        for folder in ["src", "src/optics", "src/sky", "src/text"] {
             for file in [format!("{subject}.rs"), format!("{subject}/mod.rs")] {
                 if let Ok(text) = fs::read_to_string(Path::new(folder).join(file)) {
                     let lines = text.lines().map_while(|line| line.strip_prefix("//! "));

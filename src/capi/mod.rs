@@ -6,6 +6,7 @@
 #![allow(unsafe_code, non_camel_case_types, clippy::missing_safety_doc)]
 
 pub mod colour;
+pub mod entry;
 pub mod field;
 pub mod focus;
 pub mod imaging;

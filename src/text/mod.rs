@@ -27,6 +27,20 @@
 //! | [`Value::magnitude`] | `-1.46 mag` |
 //! | [`Value::decimal`], [`Value::signed_decimal`] | any other integer of a decimal unit |
 //!
+//! # Back from a keypad
+//!
+//! [`read_entry`] makes a quantity of what a person types, and tells what is unfinished from what is wrong:
+//!
+//! ```
+//! use fieldstop::text::{EntryKind, TextStyle, read_entry};
+//!
+//! let read = |text: &str| read_entry(text.as_bytes(), EntryKind::FocalLength, 187_500, &TextStyle::ASCII);
+//! assert_eq!(read("1.13 m"), Ok(1_130_000)); // micrometres
+//! assert_eq!(read("f/6"), Ok(1_125_000));
+//! assert!(read("f/").unwrap_err().partial);
+//! assert_eq!(read("1,13 m").unwrap_err().at, 1);
+//! ```
+//!
 //! # Style
 //!
 //! A [`TextStyle`] says how a number looks: the text of each [`Unit`], the decimal mark, the dash for what is not
@@ -69,10 +83,12 @@
 
 mod caution;
 mod digits;
+mod entry;
 mod labels;
 mod layout_page;
 mod line;
 mod page;
+mod spelling;
 #[cfg(feature = "heapless")]
 mod string;
 mod style;
@@ -80,6 +96,7 @@ mod value;
 mod write;
 
 pub use caution::{HIGH_EYEPIECE_CAUTION, SUN_CAUTION, caution_line, caution_lines};
+pub use entry::{EntryError, EntryKind, EntryReason, read_entry};
 pub use labels::{
     CAMERA_LABELS, CAMERA_LABELS_SHORT, FOCUS_LABELS, FOCUS_LABELS_SHORT, NEWTONIAN_LABELS,
     NEWTONIAN_LABELS_SHORT, TWO_MIRROR_LABELS, TWO_MIRROR_LABELS_SHORT, VISUAL_LABELS, VISUAL_LABELS_SHORT,
@@ -99,6 +116,7 @@ pub use value::{AngleForm, Value};
 pub(crate) use {
     caution::{line_of, lines_of},
     digits::{has_at_most, split_small_hundred, split_small_ten},
+    entry::read_as,
     labels::{
         CAMERA_LABELS_FOR_C, CAMERA_LABELS_SHORT_FOR_C, FOCUS_LABELS_FOR_C, FOCUS_LABELS_SHORT_FOR_C,
         NEWTONIAN_LABELS_FOR_C, NEWTONIAN_LABELS_SHORT_FOR_C, TWO_MIRROR_LABELS_FOR_C,
