@@ -11,6 +11,7 @@ pub mod focus;
 pub mod imaging;
 pub mod layout;
 pub mod light;
+pub mod profile;
 pub mod resolution;
 pub mod setup;
 mod short;

@@ -63,6 +63,7 @@ mod camera;
 mod camera_readout;
 mod eyepiece;
 mod observer;
+mod site;
 mod telescope;
 mod visual_readout;
 
@@ -70,6 +71,7 @@ pub use camera::Camera;
 pub use camera_readout::CameraReadout;
 pub use eyepiece::Eyepiece;
 pub use observer::Observer;
+pub use site::Site;
 pub use telescope::Telescope;
 pub use visual_readout::VisualReadout;
 
@@ -90,7 +92,7 @@ const _: () = {
     assert!(size_of::<Telescope>() == 20);
     assert!(size_of::<Eyepiece>() == 16 && offset_of!(Eyepiece, mapping) == 12);
     assert!(size_of::<Camera>() == 12 && offset_of!(Camera, rows) == 6 && offset_of!(Camera, binning) == 8);
-    assert!(size_of::<Observer>() == 20);
+    assert!(size_of::<Observer>() == 20 && size_of::<Site>() == 8);
     assert!(size_of::<VisualReadout>() == 56 && offset_of!(VisualReadout, limiting_magnitude_mmag) == 48);
     assert!(size_of::<CameraReadout>() == 44 && offset_of!(CameraReadout, pixels_per_fwhm_q16) == 40);
 };
