@@ -39,6 +39,8 @@ fn call(subject: &str, function: &str) -> String {
     for (name, kind) in arguments.iter().rev() {
         let is_pointer = kind.starts_with('*');
         let value = match size.take() {
+            // Given to the caller's functions as it is, and may be null.
+            _ if *name == "context" => "std::ptr::null_mut()".to_string(),
             _ if *kind == "*const *const c_char" => "input.texts()".to_string(),
             Some(size) if is_pointer => format!("input.take({size} as usize)"),
             _ => "input.take(1)".to_string(),

@@ -69,10 +69,16 @@ enum class cause_number : uint8_t {
     not_finite = FIELDSTOP_NOT_FINITE,
     /** the result does not fit its type */
     overflow = FIELDSTOP_OVERFLOW,
-    /** the text does not fit its width or buffer */
+    /** it does not fit its width or buffer */
     no_room = FIELDSTOP_NO_ROOM,
     /** not defined or not known here */
     undefined = FIELDSTOP_UNDEFINED,
+    /** there is no good record */
+    no_record = FIELDSTOP_NO_RECORD,
+    /** the record is of a newer version */
+    newer_record = FIELDSTOP_NEWER_RECORD,
+    /** the storage could not be read or written */
+    storage = FIELDSTOP_STORAGE,
 };
 
 class FIELDSTOP_CHECKED_TYPE status {
@@ -117,7 +123,7 @@ private:
     {
     }
     /** What C is to fill. */
-    FIELDSTOP_INLINE explicit result(const access &) {}
+    FIELDSTOP_INLINE explicit result(const access &blank) : value_(blank) {}
     value_type value_;
     fieldstop_status number_;
 };
@@ -504,6 +510,28 @@ constexpr uint32_t camera_all = FIELDSTOP_CAMERA_ALL;
 constexpr uint32_t camera_fact_coarse_sampling = FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING;
 /** Camera readout, fact: over three pixels to the star image (common practice) */
 constexpr uint32_t camera_fact_fine_sampling = FIELDSTOP_CAMERA_FACT_FINE_SAMPLING;
+/** Kind of entry: telescopes, up to 4 in a record */
+constexpr uint8_t kind_telescope = FIELDSTOP_KIND_TELESCOPE;
+/** Kind of entry: eyepieces, up to 16 in a record */
+constexpr uint8_t kind_eyepiece = FIELDSTOP_KIND_EYEPIECE;
+/** Kind of entry: Barlows and reducers, up to 8 in a record */
+constexpr uint8_t kind_amplifier = FIELDSTOP_KIND_AMPLIFIER;
+/** Kind of entry: cameras, up to 4 in a record */
+constexpr uint8_t kind_camera = FIELDSTOP_KIND_CAMERA;
+/** Kind of entry: observers, up to 4 in a record */
+constexpr uint8_t kind_observer = FIELDSTOP_KIND_OBSERVER;
+/** Kind of entry: sites, up to 4 in a record */
+constexpr uint8_t kind_site = FIELDSTOP_KIND_SITE;
+/** In use: none of that kind */
+constexpr uint8_t none_in_use = FIELDSTOP_NONE_IN_USE;
+/** Bytes of a record without entries */
+constexpr uint16_t record_least = FIELDSTOP_RECORD_LEAST;
+/** Bytes of the longest record */
+constexpr uint16_t record_most = FIELDSTOP_RECORD_MOST;
+/** Saving: refuse where there is a good record of a newer version */
+constexpr uint8_t keep_newer = FIELDSTOP_KEEP_NEWER;
+/** Saving: save over a good record of a newer version */
+constexpr uint8_t replace_newer = FIELDSTOP_REPLACE_NEWER;
 /** Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on */
 constexpr uint8_t angle_by_size = FIELDSTOP_ANGLE_BY_SIZE;
 /** Angle: degrees with decimals */
@@ -656,6 +684,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<telescope>;
+    FIELDSTOP_INLINE explicit telescope(const access &) {}
     ::fieldstop_telescope raw_;
 };
 static_assert(sizeof(telescope) == sizeof(::fieldstop_telescope), "no more than in C");
@@ -693,6 +724,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<eyepiece>;
+    FIELDSTOP_INLINE explicit eyepiece(const access &) {}
     ::fieldstop_eyepiece raw_;
 };
 static_assert(sizeof(eyepiece) == sizeof(::fieldstop_eyepiece), "no more than in C");
@@ -730,6 +764,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<camera>;
+    FIELDSTOP_INLINE explicit camera(const access &) {}
     ::fieldstop_camera raw_;
 };
 static_assert(sizeof(camera) == sizeof(::fieldstop_camera), "no more than in C");
@@ -773,9 +810,40 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<observer>;
+    FIELDSTOP_INLINE explicit observer(const access &) {}
     ::fieldstop_observer raw_;
 };
 static_assert(sizeof(observer) == sizeof(::fieldstop_observer), "no more than in C");
+
+/** A place to observe from */
+class site {
+public:
+    /** Every member 0. */
+    FIELDSTOP_INLINE constexpr site() : raw_() {}
+    FIELDSTOP_INLINE constexpr explicit site(const ::fieldstop_site &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_site &c() const { return raw_; }
+    /** Latitude, north positive, binary angle; within a quarter turn (2^30) either way */
+    FIELDSTOP_INLINE constexpr signed_binary_angle latitude() const { return signed_binary_angle(raw_.latitude_bam); }
+    FIELDSTOP_INLINE constexpr site with_latitude(signed_binary_angle latitude_bam) const
+    {
+        return site(::fieldstop_site{latitude_bam.count(), raw_.longitude_bam});
+    }
+    /** Longitude, counted toward the east, binary angle; any value */
+    FIELDSTOP_INLINE constexpr binary_angle longitude() const { return binary_angle(raw_.longitude_bam); }
+    FIELDSTOP_INLINE constexpr site with_longitude(binary_angle longitude_bam) const
+    {
+        return site(::fieldstop_site{raw_.latitude_bam, longitude_bam.count()});
+    }
+
+private:
+    friend struct access;
+    friend class result<site>;
+    FIELDSTOP_INLINE explicit site(const access &) {}
+    ::fieldstop_site raw_;
+};
+static_assert(sizeof(site) == sizeof(::fieldstop_site), "no more than in C");
 
 /** What the eye gets at the eyepiece */
 class visual_readout;
@@ -852,9 +920,10 @@ public:
     }
 
 private:
+    visual_readout() = default;
     friend struct access;
     friend class result<visual_readout>;
-    visual_readout() = default;
+    FIELDSTOP_INLINE explicit visual_readout(const access &) {}
     ::fieldstop_visual_readout raw_;
 };
 static_assert(sizeof(visual_readout) == sizeof(::fieldstop_visual_readout), "no more than in C");
@@ -919,12 +988,22 @@ public:
     }
 
 private:
+    camera_readout() = default;
     friend struct access;
     friend class result<camera_readout>;
-    camera_readout() = default;
+    FIELDSTOP_INLINE explicit camera_readout(const access &) {}
     ::fieldstop_camera_readout raw_;
 };
 static_assert(sizeof(camera_readout) == sizeof(::fieldstop_camera_readout), "no more than in C");
+
+/** What the owner calls a piece of equipment: up to 12 bytes in the characters of the owner's display */
+typedef ::fieldstop_equipment_name equipment_name;
+
+/** Which entry of each kind is in use: its index, or 255 for none */
+typedef ::fieldstop_in_use in_use;
+
+/** Two places for a record in a storage */
+typedef ::fieldstop_slot_pair slot_pair;
 
 /** The look of all text */
 typedef ::fieldstop_text_style text_style;
@@ -2975,6 +3054,12 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE status observer_check(const observer &observe
     return status(::fieldstop_observer_check(&observer.c()));
 }
 
+/** Gives 0 for a site that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in the place of the argument. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status site_check(const site &site)
+{
+    return status(::fieldstop_site_check(&site.c()));
+}
+
 /** Gives what the eye gets at the eyepiece: the wanted values, each in the unit of its name, and the facts about them. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<visual_readout> visual_readout_compute(const telescope &telescope, const eyepiece &eyepiece, const observer &observer, uint32_t wanted)
 {
@@ -2989,6 +3074,168 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<camera_readout> camera_readout_compute
     result<camera_readout> given = access::blank<camera_readout>();
     access::finish(given, ::fieldstop_camera_readout_compute(&telescope.c(), &camera.c(), &observer.c(), wanted, access::place(given)));
     return given;
+}
+
+/* The stored record: equipment, observers and sites with their names, as bytes in EEPROM or flash. */
+
+/** Makes a record without entries of the buffer's first 28 bytes, and gives 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_begin(uint8_t *record, uint16_t capacity)
+{
+    return status(::fieldstop_record_begin(record, capacity));
+}
+
+/** Gives 0 for a good record at the front of these bytes: its checksum is right and its equipment passes the checks. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_check(const uint8_t *record, uint16_t length)
+{
+    return status(::fieldstop_record_check(record, length));
+}
+
+/** Gives the record's own length in bytes, out of its header. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> record_get_length(const uint8_t *record, uint16_t length)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_record_get_length(record, length, &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Gives how many entries of a kind there are. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint8_t> record_get_count(const uint8_t *record, uint16_t length, uint8_t kind)
+{
+    uint8_t given;
+    const fieldstop_status number = ::fieldstop_record_get_count(record, length, kind, &given);
+    return access::given<uint8_t>(number, given);
+}
+
+/** Gives the name of an entry. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<equipment_name> record_get_name(const uint8_t *record, uint16_t length, uint8_t kind, uint8_t index)
+{
+    fieldstop_equipment_name given;
+    const fieldstop_status number = ::fieldstop_record_get_name(record, length, kind, index, &given);
+    return access::given<equipment_name>(number, given);
+}
+
+/** Gives which entries are in use. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<in_use> record_get_in_use(const uint8_t *record, uint16_t length)
+{
+    fieldstop_in_use given;
+    const fieldstop_status number = ::fieldstop_record_get_in_use(record, length, &given);
+    return access::given<in_use>(number, given);
+}
+
+/** Gives a telescope, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<telescope> record_get_telescope(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<telescope> given = access::blank<telescope>();
+    access::finish(given, ::fieldstop_record_get_telescope(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Gives an eyepiece, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<eyepiece> record_get_eyepiece(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<eyepiece> given = access::blank<eyepiece>();
+    access::finish(given, ::fieldstop_record_get_eyepiece(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Gives what a Barlow or reducer multiplies the focal length by, Q16.16, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<q16> record_get_amplifier(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_record_get_amplifier(record, length, index, &given);
+    return access::given<q16>(number, given);
+}
+
+/** Gives a camera, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<camera> record_get_camera(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<camera> given = access::blank<camera>();
+    access::finish(given, ::fieldstop_record_get_camera(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Gives an observer, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<observer> record_get_observer(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<observer> given = access::blank<observer>();
+    access::finish(given, ::fieldstop_record_get_observer(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Gives a site, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<site> record_get_site(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<site> given = access::blank<site>();
+    access::finish(given, ::fieldstop_record_get_site(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Puts a telescope and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_telescope(uint8_t *record, uint16_t capacity, uint8_t index, const telescope &telescope, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_telescope(record, capacity, index, &telescope.c(), &name));
+}
+
+/** Puts an eyepiece and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_eyepiece(uint8_t *record, uint16_t capacity, uint8_t index, const eyepiece &eyepiece, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_eyepiece(record, capacity, index, &eyepiece.c(), &name));
+}
+
+/** Puts a Barlow or reducer, by what it multiplies the focal length by (Q16.16, not 0), and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_amplifier(uint8_t *record, uint16_t capacity, uint8_t index, q16 amplification_q16, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_amplifier(record, capacity, index, amplification_q16.count(), &name));
+}
+
+/** Puts a camera and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_camera(uint8_t *record, uint16_t capacity, uint8_t index, const camera &camera, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_camera(record, capacity, index, &camera.c(), &name));
+}
+
+/** Puts an observer and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_observer(uint8_t *record, uint16_t capacity, uint8_t index, const observer &observer, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_observer(record, capacity, index, &observer.c(), &name));
+}
+
+/** Puts a site and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_site(uint8_t *record, uint16_t capacity, uint8_t index, const site &site, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_site(record, capacity, index, &site.c(), &name));
+}
+
+/** Says which entries are in use, and gives 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_in_use(uint8_t *record, uint16_t capacity, const in_use &in_use)
+{
+    return status(::fieldstop_record_put_in_use(record, capacity, &in_use));
+}
+
+/** Takes an entry out of a record, and gives 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_remove(uint8_t *record, uint16_t capacity, uint8_t kind, uint8_t index)
+{
+    return status(::fieldstop_record_remove(record, capacity, kind, index));
+}
+
+/** Gives 0 for a slot pair that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in the place of the argument. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status slot_pair_check(const slot_pair &slot_pair)
+{
+    return status(::fieldstop_slot_pair_check(&slot_pair));
+}
+
+/** Reads the last good record into the buffer, and gives its length in bytes. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> store_load(const slot_pair &slot_pair, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_store_load(&slot_pair, read, context, record, capacity, &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Saves a record into the slot that does not have the last good one, and gives 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status store_save(const slot_pair &slot_pair, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
+{
+    return status(::fieldstop_store_save(&slot_pair, read, write, erase, context, record, capacity, newer));
 }
 
 /* Quantities as characters of a display: integers only, into a buffer of the caller's. */

@@ -2,7 +2,7 @@
 
 use super::{fieldstop_status, give};
 use crate::profile::{
-    Editor, Equipment, EquipmentName, InUse, Kind, Newer, Record, Slots, Storage, load, save,
+    Editor, Equipment, EquipmentName, InUse, Kind, Newer, Record, SlotPair, Storage, load, save,
 };
 use crate::setup::{Camera, Eyepiece, Observer, Site, Telescope};
 use crate::status::{Cause, Error};
@@ -59,7 +59,7 @@ pub type fieldstop_read = Option<
 
 /// Writes storage: `length` bytes from `offset` on, and gives 0; anything else says that they could not be written.
 ///
-/// `length` is a multiple of the slots' write_bytes and at most 32; a write never crosses a multiple of 32 bytes from
+/// `length` is a multiple of the slot pair's write_bytes and at most 32; a write never crosses a multiple of 32 bytes from
 /// the slot's start. It must have ended when the function returns.
 pub type fieldstop_write = Option<
     unsafe extern "C" fn(
@@ -571,7 +571,7 @@ pub unsafe extern "C" fn fieldstop_record_remove(
     status_of(result)
 }
 
-/// Gives 0 for slots that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in
+/// Gives 0 for a slot pair that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in
 /// the place of the argument.
 ///
 /// Members: first (1) and second (2) are multiples of write_bytes, the slots do not overlap nor end beyond 2^32; bytes
@@ -579,22 +579,22 @@ pub unsafe extern "C" fn fieldstop_record_remove(
 /// Statuses: null pointer, out of range.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_slots_check(slots: *const Slots) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_slot_pair_check(slot_pair: *const SlotPair) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    status_of(unsafe { slots.as_ref() }.ok_or(null(1)).and_then(Slots::check))
+    status_of(unsafe { slot_pair.as_ref() }.ok_or(null(1)).and_then(SlotPair::check))
 }
 
 /// Reads the last good record into the buffer, and gives its length in bytes.
 ///
 /// capacity: the buffer's bytes; one of FIELDSTOP_RECORD_MOST takes every record. context: given to read as it is, and
 /// may be null.
-/// Statuses: null pointer (1, 2, 4, 6); out of range (1): fieldstop_slots_check names the member; no record: neither slot
+/// Statuses: null pointer (1, 2, 4, 6); out of range (1): fieldstop_slot_pair_check names the member; no record: neither slot
 /// has a good one; newer record: the last good one is of a version that this library cannot read; no room (5); storage:
 /// read gave another number than 0, or not the same bytes twice, and only then the buffer's bytes may have changed.
 #[must_use]
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn fieldstop_store_load(
-    slots: *const Slots,
+    slot_pair: *const SlotPair,
     read: fieldstop_read,
     context: *mut c_void,
     record: *mut u8,
@@ -602,7 +602,7 @@ pub unsafe extern "C" fn fieldstop_store_load(
     out: *mut u16,
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointers.
-    let slots = match unsafe { slots.as_ref() } {
+    let slots = match unsafe { slot_pair.as_ref() } {
         None => return null(1).status(),
         Some(_) if read.is_none() => return null(2).status(),
         Some(_) if record.is_null() => return null(4).status(),
@@ -628,14 +628,14 @@ pub unsafe extern "C" fn fieldstop_store_load(
 /// capacity: bytes that may be read; more may follow the record. read, write and erase must be those of one storage;
 /// erase is null where bytes can be written over as they are (EEPROM, FRAM). context: given to them as it is, and may be
 /// null. newer: FIELDSTOP_KEEP_NEWER or FIELDSTOP_REPLACE_NEWER.
-/// Statuses: null pointer (1, 2, 3, 6); out of range (1): fieldstop_slots_check names the member; no record, newer
+/// Statuses: null pointer (1, 2, 3, 6); out of range (1): fieldstop_slot_pair_check names the member; no record, newer
 /// record (6): what is to be saved is not good; out of range (8); no room (7): it is longer than a slot; newer record
 /// (0): a slot has one, which newer says to keep; storage: a function gave another number than 0, or what was written
 /// does not read the same. The last good record is still there then.
 #[must_use]
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn fieldstop_store_save(
-    slots: *const Slots,
+    slot_pair: *const SlotPair,
     read: fieldstop_read,
     write: fieldstop_write,
     erase: fieldstop_erase,
@@ -645,7 +645,7 @@ pub unsafe extern "C" fn fieldstop_store_save(
     newer: u8,
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointers.
-    let (slots, record) = match unsafe { (slots.as_ref(), bytes(record, capacity, 6)) } {
+    let (slots, record) = match unsafe { (slot_pair.as_ref(), bytes(record, capacity, 6)) } {
         (None, _) => return null(1).status(),
         _ if read.is_none() => return null(2).status(),
         _ if write.is_none() => return null(3).status(),

@@ -25,7 +25,7 @@ impl<S: embedded_storage::Storage> Storage for OfStorage<S> {
 
 /// A record in NOR flash.
 ///
-/// [`Slots`](super::Slots) must suit the driver: `write_bytes` a multiple of its `WRITE_SIZE`, the slots whole erase
+/// [`SlotPair`](super::SlotPair) must suit the driver: `write_bytes` a multiple of its `WRITE_SIZE`, the slots whole erase
 /// units (`ERASE_SIZE`) each. Its `READ_SIZE` is at most 32 bytes.
 pub struct OfFlash<S>(
     /// The driver.

@@ -9,7 +9,7 @@ pub(super) const CHECKSUM: usize = 4;
 pub(super) const MAGIC: [u8; 4] = *b"fdsp";
 pub(super) const VERSION: u16 = 1;
 
-/// Which entry of each kind is in use: its index, or [`InUse::NONE`].
+/// Which entry of each kind is in use: its index, or 255 for none.
 #[derive(Clone, Copy, Debug, PartialEq, Eq, Hash)]
 #[repr(C)]
 pub struct InUse {

@@ -23,4 +23,4 @@ pub use entry::Kind;
 pub use header::InUse;
 pub use name::EquipmentName;
 pub use record::Record;
-pub use store::{Newer, Slots, Storage, load, save};
+pub use store::{Newer, SlotPair, Storage, load, save};

@@ -40,7 +40,7 @@ pub trait Storage {
 /// Where the storage must be erased, both begin and end where its erase units do.
 #[derive(Clone, Copy, Debug, Default, PartialEq, Eq, Hash)]
 #[repr(C)]
-pub struct Slots {
+pub struct SlotPair {
     /// Member 1. Where the first begins; a multiple of `write_bytes`.
     pub first: u32,
     /// Member 2. Where the second begins; a multiple of `write_bytes`, and not within the first.
@@ -53,7 +53,7 @@ pub struct Slots {
     pub padding: [u8; 3],
 }
 
-impl Slots {
+impl SlotPair {
     /// The first bad member: its number is the error's argument.
     ///
     /// # Errors
@@ -93,13 +93,13 @@ pub enum Newer {
 ///
 /// # Errors
 ///
-/// [`Cause::OutOfRange`] (2): [`Slots::check`] refuses. [`Cause::NoRecord`]: neither slot has a good one.
+/// [`Cause::OutOfRange`] (2): [`SlotPair::check`] refuses. [`Cause::NoRecord`]: neither slot has a good one.
 /// [`Cause::NewerRecord`]: the last good one is of a newer version. [`Cause::NoRoom`] (3): it is longer than the
 /// buffer. [`Cause::Storage`], or what the storage gives: it could not be read, or did not give the same bytes twice;
 /// only then the buffer's bytes may have changed.
 pub fn load<'a>(
     storage: &mut impl Storage,
-    slots: &Slots,
+    slots: &SlotPair,
     buffer: &'a mut [u8],
 ) -> Result<Record<'a>, Error> {
     let (first, second) = look(storage, slots)?;
@@ -126,13 +126,13 @@ pub fn load<'a>(
 ///
 /// # Errors
 ///
-/// [`Cause::OutOfRange`] (2): [`Slots::check`] refuses. [`Cause::NoRoom`] (3): the record is longer than a slot.
+/// [`Cause::OutOfRange`] (2): [`SlotPair::check`] refuses. [`Cause::NoRoom`] (3): the record is longer than a slot.
 /// [`Cause::NewerRecord`]: a slot has a good record of a newer version, and `newer` does not say to replace it.
 /// [`Cause::Storage`], or what the storage gives: it could not be read, erased or written, or does not read as
 /// written; the last good record is still there.
 pub fn save(
     storage: &mut impl Storage,
-    slots: &Slots,
+    slots: &SlotPair,
     record: &Record<'_>,
     newer: Newer,
 ) -> Result<(), Error> {
@@ -186,7 +186,7 @@ impl<S: Storage> Source for Slot<'_, S> {
 }
 
 /// What each slot has. A read that fails is no reason to take the other for the last.
-fn look(storage: &mut impl Storage, slots: &Slots) -> Result<(Option<Found>, Option<Found>), Error> {
+fn look(storage: &mut impl Storage, slots: &SlotPair) -> Result<(Option<Found>, Option<Found>), Error> {
     slots.check().map_err(|error| Error::new(error.cause(), 2))?;
     let first = inspect(&mut Slot { storage, at: slots.first }, slots.bytes)?;
     let second = inspect(&mut Slot { storage, at: slots.second }, slots.bytes)?;

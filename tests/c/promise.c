@@ -30,144 +30,188 @@ HOLDS(holds_23, offsetof(fieldstop_observer, eye_pupil_um) == 4 && sizeof(((fiel
 HOLDS(holds_24, offsetof(fieldstop_observer, eye_resolution_mas) == 8 && sizeof(((fieldstop_observer *)0)->eye_resolution_mas) == 4);
 HOLDS(holds_25, offsetof(fieldstop_observer, seeing_uas) == 12 && sizeof(((fieldstop_observer *)0)->seeing_uas) == 4);
 HOLDS(holds_26, offsetof(fieldstop_observer, wavelength_nm) == 16 && sizeof(((fieldstop_observer *)0)->wavelength_nm) == 4);
-HOLDS(holds_27, sizeof(fieldstop_visual_readout) == 56);
-HOLDS(holds_28, offsetof(fieldstop_visual_readout, available) == 0 && sizeof(((fieldstop_visual_readout *)0)->available) == 4);
-HOLDS(holds_29, offsetof(fieldstop_visual_readout, facts) == 4 && sizeof(((fieldstop_visual_readout *)0)->facts) == 4);
-HOLDS(holds_30, offsetof(fieldstop_visual_readout, focal_length_um) == 8 && sizeof(((fieldstop_visual_readout *)0)->focal_length_um) == 4);
-HOLDS(holds_31, offsetof(fieldstop_visual_readout, focal_ratio_q16) == 12 && sizeof(((fieldstop_visual_readout *)0)->focal_ratio_q16) == 4);
-HOLDS(holds_32, offsetof(fieldstop_visual_readout, magnification_q16) == 16 && sizeof(((fieldstop_visual_readout *)0)->magnification_q16) == 4);
-HOLDS(holds_33, offsetof(fieldstop_visual_readout, exit_pupil_um) == 20 && sizeof(((fieldstop_visual_readout *)0)->exit_pupil_um) == 4);
-HOLDS(holds_34, offsetof(fieldstop_visual_readout, true_field_mas) == 24 && sizeof(((fieldstop_visual_readout *)0)->true_field_mas) == 4);
-HOLDS(holds_35, offsetof(fieldstop_visual_readout, resolution_uas) == 28 && sizeof(((fieldstop_visual_readout *)0)->resolution_uas) == 4);
-HOLDS(holds_36, offsetof(fieldstop_visual_readout, dawes_limit_uas) == 32 && sizeof(((fieldstop_visual_readout *)0)->dawes_limit_uas) == 4);
-HOLDS(holds_37, offsetof(fieldstop_visual_readout, lowest_magnification_q16) == 36 && sizeof(((fieldstop_visual_readout *)0)->lowest_magnification_q16) == 4);
-HOLDS(holds_38, offsetof(fieldstop_visual_readout, resolving_magnification_q16) == 40 && sizeof(((fieldstop_visual_readout *)0)->resolving_magnification_q16) == 4);
-HOLDS(holds_39, offsetof(fieldstop_visual_readout, effective_aperture_um) == 44 && sizeof(((fieldstop_visual_readout *)0)->effective_aperture_um) == 4);
-HOLDS(holds_40, offsetof(fieldstop_visual_readout, limiting_magnitude_mmag) == 48 && sizeof(((fieldstop_visual_readout *)0)->limiting_magnitude_mmag) == 4);
-HOLDS(holds_41, offsetof(fieldstop_visual_readout, surface_brightness_q16) == 52 && sizeof(((fieldstop_visual_readout *)0)->surface_brightness_q16) == 4);
-HOLDS(holds_42, sizeof(fieldstop_camera_readout) == 44);
-HOLDS(holds_43, offsetof(fieldstop_camera_readout, available) == 0 && sizeof(((fieldstop_camera_readout *)0)->available) == 4);
-HOLDS(holds_44, offsetof(fieldstop_camera_readout, facts) == 4 && sizeof(((fieldstop_camera_readout *)0)->facts) == 4);
-HOLDS(holds_45, offsetof(fieldstop_camera_readout, focal_length_um) == 8 && sizeof(((fieldstop_camera_readout *)0)->focal_length_um) == 4);
-HOLDS(holds_46, offsetof(fieldstop_camera_readout, focal_ratio_q16) == 12 && sizeof(((fieldstop_camera_readout *)0)->focal_ratio_q16) == 4);
-HOLDS(holds_47, offsetof(fieldstop_camera_readout, t_number_q16) == 16 && sizeof(((fieldstop_camera_readout *)0)->t_number_q16) == 4);
-HOLDS(holds_48, offsetof(fieldstop_camera_readout, frame_width_mas) == 20 && sizeof(((fieldstop_camera_readout *)0)->frame_width_mas) == 4);
-HOLDS(holds_49, offsetof(fieldstop_camera_readout, frame_height_mas) == 24 && sizeof(((fieldstop_camera_readout *)0)->frame_height_mas) == 4);
-HOLDS(holds_50, offsetof(fieldstop_camera_readout, pixel_scale_uas) == 28 && sizeof(((fieldstop_camera_readout *)0)->pixel_scale_uas) == 4);
-HOLDS(holds_51, offsetof(fieldstop_camera_readout, plate_scale_mas_per_mm) == 32 && sizeof(((fieldstop_camera_readout *)0)->plate_scale_mas_per_mm) == 4);
-HOLDS(holds_52, offsetof(fieldstop_camera_readout, star_fwhm_uas) == 36 && sizeof(((fieldstop_camera_readout *)0)->star_fwhm_uas) == 4);
-HOLDS(holds_53, offsetof(fieldstop_camera_readout, pixels_per_fwhm_q16) == 40 && sizeof(((fieldstop_camera_readout *)0)->pixels_per_fwhm_q16) == 4);
-HOLDS(holds_54, sizeof(fieldstop_text_style) == 195);
-HOLDS(holds_55, offsetof(fieldstop_text_style, units) == 0 && sizeof(((fieldstop_text_style *)0)->units) == 168);
-HOLDS(holds_56, offsetof(fieldstop_text_style, dash) == 168 && sizeof(((fieldstop_text_style *)0)->dash) == 8);
-HOLDS(holds_57, offsetof(fieldstop_text_style, yes) == 176 && sizeof(((fieldstop_text_style *)0)->yes) == 8);
-HOLDS(holds_58, offsetof(fieldstop_text_style, no) == 184 && sizeof(((fieldstop_text_style *)0)->no) == 8);
-HOLDS(holds_59, offsetof(fieldstop_text_style, decimal_mark) == 192 && sizeof(((fieldstop_text_style *)0)->decimal_mark) == 1);
-HOLDS(holds_60, offsetof(fieldstop_text_style, fact_mark) == 193 && sizeof(((fieldstop_text_style *)0)->fact_mark) == 1);
-HOLDS(holds_61, offsetof(fieldstop_text_style, utf8) == 194 && sizeof(((fieldstop_text_style *)0)->utf8) == 1);
-HOLDS(holds_62, sizeof(fieldstop_span) == 4);
-HOLDS(holds_63, offsetof(fieldstop_span, first) == 0 && sizeof(((fieldstop_span *)0)->first) == 2);
-HOLDS(holds_64, offsetof(fieldstop_span, count) == 2 && sizeof(((fieldstop_span *)0)->count) == 2);
-HOLDS(holds_65, FIELDSTOP_NULL_POINTER == 1);
-HOLDS(holds_66, FIELDSTOP_ZERO == 2);
-HOLDS(holds_67, FIELDSTOP_OUT_OF_RANGE == 3);
-HOLDS(holds_68, FIELDSTOP_NOT_FINITE == 4);
-HOLDS(holds_69, FIELDSTOP_OVERFLOW == 5);
-HOLDS(holds_70, FIELDSTOP_NO_ROOM == 6);
-HOLDS(holds_71, FIELDSTOP_UNDEFINED == 7);
-HOLDS(holds_72, FIELDSTOP_EQUIDISTANT == 0);
-HOLDS(holds_73, FIELDSTOP_RECTILINEAR == 1);
-HOLDS(holds_74, FIELDSTOP_VISUAL_FOCAL_LENGTH == 1);
-HOLDS(holds_75, FIELDSTOP_VISUAL_FOCAL_RATIO == 2);
-HOLDS(holds_76, FIELDSTOP_VISUAL_MAGNIFICATION == 4);
-HOLDS(holds_77, FIELDSTOP_VISUAL_EXIT_PUPIL == 8);
-HOLDS(holds_78, FIELDSTOP_VISUAL_TRUE_FIELD == 16);
-HOLDS(holds_79, FIELDSTOP_VISUAL_RESOLUTION == 32);
-HOLDS(holds_80, FIELDSTOP_VISUAL_DAWES_LIMIT == 64);
-HOLDS(holds_81, FIELDSTOP_VISUAL_LOWEST_MAGNIFICATION == 128);
-HOLDS(holds_82, FIELDSTOP_VISUAL_RESOLVING_MAGNIFICATION == 256);
-HOLDS(holds_83, FIELDSTOP_VISUAL_EFFECTIVE_APERTURE == 512);
-HOLDS(holds_84, FIELDSTOP_VISUAL_LIMITING_MAGNITUDE == 1024);
-HOLDS(holds_85, FIELDSTOP_VISUAL_SURFACE_BRIGHTNESS == 2048);
-HOLDS(holds_86, FIELDSTOP_VISUAL_ALL == 4095);
-HOLDS(holds_87, FIELDSTOP_VISUAL_FACT_WIDE_EXIT_PUPIL == 1);
-HOLDS(holds_88, FIELDSTOP_VISUAL_FACT_EMPTY_MAGNIFICATION == 2);
-HOLDS(holds_89, FIELDSTOP_VISUAL_FACT_FIELD_FROM_APPARENT == 4);
-HOLDS(holds_90, FIELDSTOP_VISUAL_FACT_SEEING_LIMITED == 8);
-HOLDS(holds_91, FIELDSTOP_CAMERA_FOCAL_LENGTH == 1);
-HOLDS(holds_92, FIELDSTOP_CAMERA_FOCAL_RATIO == 2);
-HOLDS(holds_93, FIELDSTOP_CAMERA_T_NUMBER == 4);
-HOLDS(holds_94, FIELDSTOP_CAMERA_FRAME_WIDTH == 8);
-HOLDS(holds_95, FIELDSTOP_CAMERA_FRAME_HEIGHT == 16);
-HOLDS(holds_96, FIELDSTOP_CAMERA_PIXEL_SCALE == 32);
-HOLDS(holds_97, FIELDSTOP_CAMERA_PLATE_SCALE == 64);
-HOLDS(holds_98, FIELDSTOP_CAMERA_STAR_FWHM == 128);
-HOLDS(holds_99, FIELDSTOP_CAMERA_PIXELS_PER_FWHM == 256);
-HOLDS(holds_100, FIELDSTOP_CAMERA_ALL == 511);
-HOLDS(holds_101, FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING == 1);
-HOLDS(holds_102, FIELDSTOP_CAMERA_FACT_FINE_SAMPLING == 2);
-HOLDS(holds_103, FIELDSTOP_ANGLE_BY_SIZE == 0);
-HOLDS(holds_104, FIELDSTOP_ANGLE_DECIMAL_DEGREES == 1);
-HOLDS(holds_105, FIELDSTOP_ANGLE_DEGREES_MINUTES == 2);
-HOLDS(holds_106, FIELDSTOP_ANGLE_MINUTES_SECONDS == 3);
-HOLDS(holds_107, FIELDSTOP_ANGLE_DECIMAL_SECONDS == 4);
-HOLDS(holds_108, FIELDSTOP_UNIT_NONE == 0);
-HOLDS(holds_109, FIELDSTOP_UNIT_DEGREE == 1);
-HOLDS(holds_110, FIELDSTOP_UNIT_MINUTE == 2);
-HOLDS(holds_111, FIELDSTOP_UNIT_SECOND == 3);
-HOLDS(holds_112, FIELDSTOP_UNIT_DECIMAL_DEGREE == 4);
-HOLDS(holds_113, FIELDSTOP_UNIT_METRE == 5);
-HOLDS(holds_114, FIELDSTOP_UNIT_MILLIMETRE == 6);
-HOLDS(holds_115, FIELDSTOP_UNIT_MICROMETRE == 7);
-HOLDS(holds_116, FIELDSTOP_UNIT_NANOMETRE == 8);
-HOLDS(holds_117, FIELDSTOP_UNIT_TIMES == 9);
-HOLDS(holds_118, FIELDSTOP_UNIT_PERCENT == 10);
-HOLDS(holds_119, FIELDSTOP_UNIT_MAGNITUDE == 11);
-HOLDS(holds_120, FIELDSTOP_UNIT_FOCAL_RATIO == 12);
-HOLDS(holds_121, FIELDSTOP_UNIT_PIXEL == 13);
-HOLDS(holds_122, FIELDSTOP_UNIT_SECOND_PER_PIXEL == 14);
-HOLDS(holds_123, FIELDSTOP_UNIT_SECOND_PER_MILLIMETRE == 15);
-HOLDS(holds_124, FIELDSTOP_UNIT_SECOND_PER_TIME == 16);
-HOLDS(holds_125, FIELDSTOP_UNIT_PER_MILLIMETRE == 17);
-HOLDS(holds_126, FIELDSTOP_UNIT_TIME == 18);
-HOLDS(holds_127, FIELDSTOP_UNIT_STEP == 19);
-HOLDS(holds_128, FIELDSTOP_UNIT_KELVIN == 20);
-HOLDS(holds_129, FIELDSTOP_UNIT_WATT == 21);
-HOLDS(holds_130, FIELDSTOP_VISUAL_ROWS == 16);
-HOLDS(holds_131, FIELDSTOP_VISUAL_ROW_MAGNIFICATION == 0);
-HOLDS(holds_132, FIELDSTOP_VISUAL_ROW_TRUE_FIELD == 1);
-HOLDS(holds_133, FIELDSTOP_VISUAL_ROW_EXIT_PUPIL == 2);
-HOLDS(holds_134, FIELDSTOP_VISUAL_ROW_RESOLUTION == 3);
-HOLDS(holds_135, FIELDSTOP_VISUAL_ROW_FAINTEST_STAR == 4);
-HOLDS(holds_136, FIELDSTOP_VISUAL_ROW_SURFACE_BRIGHTNESS == 5);
-HOLDS(holds_137, FIELDSTOP_VISUAL_ROW_FOCAL_RATIO == 6);
-HOLDS(holds_138, FIELDSTOP_VISUAL_ROW_FOCAL_LENGTH == 7);
-HOLDS(holds_139, FIELDSTOP_VISUAL_ROW_LOWEST_MAGNIFICATION == 8);
-HOLDS(holds_140, FIELDSTOP_VISUAL_ROW_RESOLVING_MAGNIFICATION == 9);
-HOLDS(holds_141, FIELDSTOP_VISUAL_ROW_DAWES_LIMIT == 10);
-HOLDS(holds_142, FIELDSTOP_VISUAL_ROW_EFFECTIVE_APERTURE == 11);
-HOLDS(holds_143, FIELDSTOP_VISUAL_ROW_WIDE_EXIT_PUPIL == 12);
-HOLDS(holds_144, FIELDSTOP_VISUAL_ROW_EMPTY_MAGNIFICATION == 13);
-HOLDS(holds_145, FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT == 14);
-HOLDS(holds_146, FIELDSTOP_VISUAL_ROW_SEEING_LIMITED == 15);
-HOLDS(holds_147, FIELDSTOP_CAMERA_ROWS == 11);
-HOLDS(holds_148, FIELDSTOP_CAMERA_ROW_FRAME_WIDTH == 0);
-HOLDS(holds_149, FIELDSTOP_CAMERA_ROW_FRAME_HEIGHT == 1);
-HOLDS(holds_150, FIELDSTOP_CAMERA_ROW_PIXEL_SCALE == 2);
-HOLDS(holds_151, FIELDSTOP_CAMERA_ROW_STAR_WIDTH == 3);
-HOLDS(holds_152, FIELDSTOP_CAMERA_ROW_STAR_PIXELS == 4);
-HOLDS(holds_153, FIELDSTOP_CAMERA_ROW_FOCAL_RATIO == 5);
-HOLDS(holds_154, FIELDSTOP_CAMERA_ROW_T_NUMBER == 6);
-HOLDS(holds_155, FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH == 7);
-HOLDS(holds_156, FIELDSTOP_CAMERA_ROW_PLATE_SCALE == 8);
-HOLDS(holds_157, FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING == 9);
-HOLDS(holds_158, FIELDSTOP_CAMERA_ROW_FINE_SAMPLING == 10);
+HOLDS(holds_27, sizeof(fieldstop_site) == 8);
+HOLDS(holds_28, offsetof(fieldstop_site, latitude_bam) == 0 && sizeof(((fieldstop_site *)0)->latitude_bam) == 4);
+HOLDS(holds_29, offsetof(fieldstop_site, longitude_bam) == 4 && sizeof(((fieldstop_site *)0)->longitude_bam) == 4);
+HOLDS(holds_30, sizeof(fieldstop_visual_readout) == 56);
+HOLDS(holds_31, offsetof(fieldstop_visual_readout, available) == 0 && sizeof(((fieldstop_visual_readout *)0)->available) == 4);
+HOLDS(holds_32, offsetof(fieldstop_visual_readout, facts) == 4 && sizeof(((fieldstop_visual_readout *)0)->facts) == 4);
+HOLDS(holds_33, offsetof(fieldstop_visual_readout, focal_length_um) == 8 && sizeof(((fieldstop_visual_readout *)0)->focal_length_um) == 4);
+HOLDS(holds_34, offsetof(fieldstop_visual_readout, focal_ratio_q16) == 12 && sizeof(((fieldstop_visual_readout *)0)->focal_ratio_q16) == 4);
+HOLDS(holds_35, offsetof(fieldstop_visual_readout, magnification_q16) == 16 && sizeof(((fieldstop_visual_readout *)0)->magnification_q16) == 4);
+HOLDS(holds_36, offsetof(fieldstop_visual_readout, exit_pupil_um) == 20 && sizeof(((fieldstop_visual_readout *)0)->exit_pupil_um) == 4);
+HOLDS(holds_37, offsetof(fieldstop_visual_readout, true_field_mas) == 24 && sizeof(((fieldstop_visual_readout *)0)->true_field_mas) == 4);
+HOLDS(holds_38, offsetof(fieldstop_visual_readout, resolution_uas) == 28 && sizeof(((fieldstop_visual_readout *)0)->resolution_uas) == 4);
+HOLDS(holds_39, offsetof(fieldstop_visual_readout, dawes_limit_uas) == 32 && sizeof(((fieldstop_visual_readout *)0)->dawes_limit_uas) == 4);
+HOLDS(holds_40, offsetof(fieldstop_visual_readout, lowest_magnification_q16) == 36 && sizeof(((fieldstop_visual_readout *)0)->lowest_magnification_q16) == 4);
+HOLDS(holds_41, offsetof(fieldstop_visual_readout, resolving_magnification_q16) == 40 && sizeof(((fieldstop_visual_readout *)0)->resolving_magnification_q16) == 4);
+HOLDS(holds_42, offsetof(fieldstop_visual_readout, effective_aperture_um) == 44 && sizeof(((fieldstop_visual_readout *)0)->effective_aperture_um) == 4);
+HOLDS(holds_43, offsetof(fieldstop_visual_readout, limiting_magnitude_mmag) == 48 && sizeof(((fieldstop_visual_readout *)0)->limiting_magnitude_mmag) == 4);
+HOLDS(holds_44, offsetof(fieldstop_visual_readout, surface_brightness_q16) == 52 && sizeof(((fieldstop_visual_readout *)0)->surface_brightness_q16) == 4);
+HOLDS(holds_45, sizeof(fieldstop_camera_readout) == 44);
+HOLDS(holds_46, offsetof(fieldstop_camera_readout, available) == 0 && sizeof(((fieldstop_camera_readout *)0)->available) == 4);
+HOLDS(holds_47, offsetof(fieldstop_camera_readout, facts) == 4 && sizeof(((fieldstop_camera_readout *)0)->facts) == 4);
+HOLDS(holds_48, offsetof(fieldstop_camera_readout, focal_length_um) == 8 && sizeof(((fieldstop_camera_readout *)0)->focal_length_um) == 4);
+HOLDS(holds_49, offsetof(fieldstop_camera_readout, focal_ratio_q16) == 12 && sizeof(((fieldstop_camera_readout *)0)->focal_ratio_q16) == 4);
+HOLDS(holds_50, offsetof(fieldstop_camera_readout, t_number_q16) == 16 && sizeof(((fieldstop_camera_readout *)0)->t_number_q16) == 4);
+HOLDS(holds_51, offsetof(fieldstop_camera_readout, frame_width_mas) == 20 && sizeof(((fieldstop_camera_readout *)0)->frame_width_mas) == 4);
+HOLDS(holds_52, offsetof(fieldstop_camera_readout, frame_height_mas) == 24 && sizeof(((fieldstop_camera_readout *)0)->frame_height_mas) == 4);
+HOLDS(holds_53, offsetof(fieldstop_camera_readout, pixel_scale_uas) == 28 && sizeof(((fieldstop_camera_readout *)0)->pixel_scale_uas) == 4);
+HOLDS(holds_54, offsetof(fieldstop_camera_readout, plate_scale_mas_per_mm) == 32 && sizeof(((fieldstop_camera_readout *)0)->plate_scale_mas_per_mm) == 4);
+HOLDS(holds_55, offsetof(fieldstop_camera_readout, star_fwhm_uas) == 36 && sizeof(((fieldstop_camera_readout *)0)->star_fwhm_uas) == 4);
+HOLDS(holds_56, offsetof(fieldstop_camera_readout, pixels_per_fwhm_q16) == 40 && sizeof(((fieldstop_camera_readout *)0)->pixels_per_fwhm_q16) == 4);
+HOLDS(holds_57, sizeof(fieldstop_equipment_name) == 12);
+HOLDS(holds_58, offsetof(fieldstop_equipment_name, text) == 0 && sizeof(((fieldstop_equipment_name *)0)->text) == 12);
+HOLDS(holds_59, sizeof(fieldstop_in_use) == 6);
+HOLDS(holds_60, offsetof(fieldstop_in_use, telescope) == 0 && sizeof(((fieldstop_in_use *)0)->telescope) == 1);
+HOLDS(holds_61, offsetof(fieldstop_in_use, eyepiece) == 1 && sizeof(((fieldstop_in_use *)0)->eyepiece) == 1);
+HOLDS(holds_62, offsetof(fieldstop_in_use, amplifier) == 2 && sizeof(((fieldstop_in_use *)0)->amplifier) == 1);
+HOLDS(holds_63, offsetof(fieldstop_in_use, camera) == 3 && sizeof(((fieldstop_in_use *)0)->camera) == 1);
+HOLDS(holds_64, offsetof(fieldstop_in_use, observer) == 4 && sizeof(((fieldstop_in_use *)0)->observer) == 1);
+HOLDS(holds_65, offsetof(fieldstop_in_use, site) == 5 && sizeof(((fieldstop_in_use *)0)->site) == 1);
+HOLDS(holds_66, sizeof(fieldstop_slot_pair) == 16);
+HOLDS(holds_67, offsetof(fieldstop_slot_pair, first) == 0 && sizeof(((fieldstop_slot_pair *)0)->first) == 4);
+HOLDS(holds_68, offsetof(fieldstop_slot_pair, second) == 4 && sizeof(((fieldstop_slot_pair *)0)->second) == 4);
+HOLDS(holds_69, offsetof(fieldstop_slot_pair, bytes) == 8 && sizeof(((fieldstop_slot_pair *)0)->bytes) == 4);
+HOLDS(holds_70, offsetof(fieldstop_slot_pair, write_bytes) == 12 && sizeof(((fieldstop_slot_pair *)0)->write_bytes) == 1);
+HOLDS(holds_71, offsetof(fieldstop_slot_pair, padding) == 13 && sizeof(((fieldstop_slot_pair *)0)->padding) == 3);
+HOLDS(holds_72, sizeof(fieldstop_text_style) == 195);
+HOLDS(holds_73, offsetof(fieldstop_text_style, units) == 0 && sizeof(((fieldstop_text_style *)0)->units) == 168);
+HOLDS(holds_74, offsetof(fieldstop_text_style, dash) == 168 && sizeof(((fieldstop_text_style *)0)->dash) == 8);
+HOLDS(holds_75, offsetof(fieldstop_text_style, yes) == 176 && sizeof(((fieldstop_text_style *)0)->yes) == 8);
+HOLDS(holds_76, offsetof(fieldstop_text_style, no) == 184 && sizeof(((fieldstop_text_style *)0)->no) == 8);
+HOLDS(holds_77, offsetof(fieldstop_text_style, decimal_mark) == 192 && sizeof(((fieldstop_text_style *)0)->decimal_mark) == 1);
+HOLDS(holds_78, offsetof(fieldstop_text_style, fact_mark) == 193 && sizeof(((fieldstop_text_style *)0)->fact_mark) == 1);
+HOLDS(holds_79, offsetof(fieldstop_text_style, utf8) == 194 && sizeof(((fieldstop_text_style *)0)->utf8) == 1);
+HOLDS(holds_80, sizeof(fieldstop_span) == 4);
+HOLDS(holds_81, offsetof(fieldstop_span, first) == 0 && sizeof(((fieldstop_span *)0)->first) == 2);
+HOLDS(holds_82, offsetof(fieldstop_span, count) == 2 && sizeof(((fieldstop_span *)0)->count) == 2);
+HOLDS(holds_83, FIELDSTOP_NULL_POINTER == 1);
+HOLDS(holds_84, FIELDSTOP_ZERO == 2);
+HOLDS(holds_85, FIELDSTOP_OUT_OF_RANGE == 3);
+HOLDS(holds_86, FIELDSTOP_NOT_FINITE == 4);
+HOLDS(holds_87, FIELDSTOP_OVERFLOW == 5);
+HOLDS(holds_88, FIELDSTOP_NO_ROOM == 6);
+HOLDS(holds_89, FIELDSTOP_UNDEFINED == 7);
+HOLDS(holds_90, FIELDSTOP_NO_RECORD == 10);
+HOLDS(holds_91, FIELDSTOP_NEWER_RECORD == 11);
+HOLDS(holds_92, FIELDSTOP_STORAGE == 12);
+HOLDS(holds_93, FIELDSTOP_EQUIDISTANT == 0);
+HOLDS(holds_94, FIELDSTOP_RECTILINEAR == 1);
+HOLDS(holds_95, FIELDSTOP_VISUAL_FOCAL_LENGTH == 1);
+HOLDS(holds_96, FIELDSTOP_VISUAL_FOCAL_RATIO == 2);
+HOLDS(holds_97, FIELDSTOP_VISUAL_MAGNIFICATION == 4);
+HOLDS(holds_98, FIELDSTOP_VISUAL_EXIT_PUPIL == 8);
+HOLDS(holds_99, FIELDSTOP_VISUAL_TRUE_FIELD == 16);
+HOLDS(holds_100, FIELDSTOP_VISUAL_RESOLUTION == 32);
+HOLDS(holds_101, FIELDSTOP_VISUAL_DAWES_LIMIT == 64);
+HOLDS(holds_102, FIELDSTOP_VISUAL_LOWEST_MAGNIFICATION == 128);
+HOLDS(holds_103, FIELDSTOP_VISUAL_RESOLVING_MAGNIFICATION == 256);
+HOLDS(holds_104, FIELDSTOP_VISUAL_EFFECTIVE_APERTURE == 512);
+HOLDS(holds_105, FIELDSTOP_VISUAL_LIMITING_MAGNITUDE == 1024);
+HOLDS(holds_106, FIELDSTOP_VISUAL_SURFACE_BRIGHTNESS == 2048);
+HOLDS(holds_107, FIELDSTOP_VISUAL_ALL == 4095);
+HOLDS(holds_108, FIELDSTOP_VISUAL_FACT_WIDE_EXIT_PUPIL == 1);
+HOLDS(holds_109, FIELDSTOP_VISUAL_FACT_EMPTY_MAGNIFICATION == 2);
+HOLDS(holds_110, FIELDSTOP_VISUAL_FACT_FIELD_FROM_APPARENT == 4);
+HOLDS(holds_111, FIELDSTOP_VISUAL_FACT_SEEING_LIMITED == 8);
+HOLDS(holds_112, FIELDSTOP_CAMERA_FOCAL_LENGTH == 1);
+HOLDS(holds_113, FIELDSTOP_CAMERA_FOCAL_RATIO == 2);
+HOLDS(holds_114, FIELDSTOP_CAMERA_T_NUMBER == 4);
+HOLDS(holds_115, FIELDSTOP_CAMERA_FRAME_WIDTH == 8);
+HOLDS(holds_116, FIELDSTOP_CAMERA_FRAME_HEIGHT == 16);
+HOLDS(holds_117, FIELDSTOP_CAMERA_PIXEL_SCALE == 32);
+HOLDS(holds_118, FIELDSTOP_CAMERA_PLATE_SCALE == 64);
+HOLDS(holds_119, FIELDSTOP_CAMERA_STAR_FWHM == 128);
+HOLDS(holds_120, FIELDSTOP_CAMERA_PIXELS_PER_FWHM == 256);
+HOLDS(holds_121, FIELDSTOP_CAMERA_ALL == 511);
+HOLDS(holds_122, FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING == 1);
+HOLDS(holds_123, FIELDSTOP_CAMERA_FACT_FINE_SAMPLING == 2);
+HOLDS(holds_124, FIELDSTOP_KIND_TELESCOPE == 0);
+HOLDS(holds_125, FIELDSTOP_KIND_EYEPIECE == 1);
+HOLDS(holds_126, FIELDSTOP_KIND_AMPLIFIER == 2);
+HOLDS(holds_127, FIELDSTOP_KIND_CAMERA == 3);
+HOLDS(holds_128, FIELDSTOP_KIND_OBSERVER == 4);
+HOLDS(holds_129, FIELDSTOP_KIND_SITE == 5);
+HOLDS(holds_130, FIELDSTOP_NONE_IN_USE == 255);
+HOLDS(holds_131, FIELDSTOP_RECORD_LEAST == 28);
+HOLDS(holds_132, FIELDSTOP_RECORD_MOST == 976);
+HOLDS(holds_133, FIELDSTOP_KEEP_NEWER == 0);
+HOLDS(holds_134, FIELDSTOP_REPLACE_NEWER == 1);
+HOLDS(holds_135, FIELDSTOP_ANGLE_BY_SIZE == 0);
+HOLDS(holds_136, FIELDSTOP_ANGLE_DECIMAL_DEGREES == 1);
+HOLDS(holds_137, FIELDSTOP_ANGLE_DEGREES_MINUTES == 2);
+HOLDS(holds_138, FIELDSTOP_ANGLE_MINUTES_SECONDS == 3);
+HOLDS(holds_139, FIELDSTOP_ANGLE_DECIMAL_SECONDS == 4);
+HOLDS(holds_140, FIELDSTOP_UNIT_NONE == 0);
+HOLDS(holds_141, FIELDSTOP_UNIT_DEGREE == 1);
+HOLDS(holds_142, FIELDSTOP_UNIT_MINUTE == 2);
+HOLDS(holds_143, FIELDSTOP_UNIT_SECOND == 3);
+HOLDS(holds_144, FIELDSTOP_UNIT_DECIMAL_DEGREE == 4);
+HOLDS(holds_145, FIELDSTOP_UNIT_METRE == 5);
+HOLDS(holds_146, FIELDSTOP_UNIT_MILLIMETRE == 6);
+HOLDS(holds_147, FIELDSTOP_UNIT_MICROMETRE == 7);
+HOLDS(holds_148, FIELDSTOP_UNIT_NANOMETRE == 8);
+HOLDS(holds_149, FIELDSTOP_UNIT_TIMES == 9);
+HOLDS(holds_150, FIELDSTOP_UNIT_PERCENT == 10);
+HOLDS(holds_151, FIELDSTOP_UNIT_MAGNITUDE == 11);
+HOLDS(holds_152, FIELDSTOP_UNIT_FOCAL_RATIO == 12);
+HOLDS(holds_153, FIELDSTOP_UNIT_PIXEL == 13);
+HOLDS(holds_154, FIELDSTOP_UNIT_SECOND_PER_PIXEL == 14);
+HOLDS(holds_155, FIELDSTOP_UNIT_SECOND_PER_MILLIMETRE == 15);
+HOLDS(holds_156, FIELDSTOP_UNIT_SECOND_PER_TIME == 16);
+HOLDS(holds_157, FIELDSTOP_UNIT_PER_MILLIMETRE == 17);
+HOLDS(holds_158, FIELDSTOP_UNIT_TIME == 18);
+HOLDS(holds_159, FIELDSTOP_UNIT_STEP == 19);
+HOLDS(holds_160, FIELDSTOP_UNIT_KELVIN == 20);
+HOLDS(holds_161, FIELDSTOP_UNIT_WATT == 21);
+HOLDS(holds_162, FIELDSTOP_VISUAL_ROWS == 16);
+HOLDS(holds_163, FIELDSTOP_VISUAL_ROW_MAGNIFICATION == 0);
+HOLDS(holds_164, FIELDSTOP_VISUAL_ROW_TRUE_FIELD == 1);
+HOLDS(holds_165, FIELDSTOP_VISUAL_ROW_EXIT_PUPIL == 2);
+HOLDS(holds_166, FIELDSTOP_VISUAL_ROW_RESOLUTION == 3);
+HOLDS(holds_167, FIELDSTOP_VISUAL_ROW_FAINTEST_STAR == 4);
+HOLDS(holds_168, FIELDSTOP_VISUAL_ROW_SURFACE_BRIGHTNESS == 5);
+HOLDS(holds_169, FIELDSTOP_VISUAL_ROW_FOCAL_RATIO == 6);
+HOLDS(holds_170, FIELDSTOP_VISUAL_ROW_FOCAL_LENGTH == 7);
+HOLDS(holds_171, FIELDSTOP_VISUAL_ROW_LOWEST_MAGNIFICATION == 8);
+HOLDS(holds_172, FIELDSTOP_VISUAL_ROW_RESOLVING_MAGNIFICATION == 9);
+HOLDS(holds_173, FIELDSTOP_VISUAL_ROW_DAWES_LIMIT == 10);
+HOLDS(holds_174, FIELDSTOP_VISUAL_ROW_EFFECTIVE_APERTURE == 11);
+HOLDS(holds_175, FIELDSTOP_VISUAL_ROW_WIDE_EXIT_PUPIL == 12);
+HOLDS(holds_176, FIELDSTOP_VISUAL_ROW_EMPTY_MAGNIFICATION == 13);
+HOLDS(holds_177, FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT == 14);
+HOLDS(holds_178, FIELDSTOP_VISUAL_ROW_SEEING_LIMITED == 15);
+HOLDS(holds_179, FIELDSTOP_CAMERA_ROWS == 11);
+HOLDS(holds_180, FIELDSTOP_CAMERA_ROW_FRAME_WIDTH == 0);
+HOLDS(holds_181, FIELDSTOP_CAMERA_ROW_FRAME_HEIGHT == 1);
+HOLDS(holds_182, FIELDSTOP_CAMERA_ROW_PIXEL_SCALE == 2);
+HOLDS(holds_183, FIELDSTOP_CAMERA_ROW_STAR_WIDTH == 3);
+HOLDS(holds_184, FIELDSTOP_CAMERA_ROW_STAR_PIXELS == 4);
+HOLDS(holds_185, FIELDSTOP_CAMERA_ROW_FOCAL_RATIO == 5);
+HOLDS(holds_186, FIELDSTOP_CAMERA_ROW_T_NUMBER == 6);
+HOLDS(holds_187, FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH == 7);
+HOLDS(holds_188, FIELDSTOP_CAMERA_ROW_PLATE_SCALE == 8);
+HOLDS(holds_189, FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING == 9);
+HOLDS(holds_190, FIELDSTOP_CAMERA_ROW_FINE_SAMPLING == 10);
 
 typedef void (*any_function)(void);
 static volatile any_function present;
 
 int main(void)
 {
+    {
+        fieldstop_status (*function)(void *context, uint32_t offset, uint8_t *bytes, uint16_t length) = (fieldstop_read)0;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(void *context, uint32_t offset, const uint8_t *bytes, uint16_t length) = (fieldstop_write)0;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(void *context, uint32_t offset, uint32_t length) = (fieldstop_erase)0;
+        present = (any_function)function;
+    }
     {
         const char * (*function)(fieldstop_status) = fieldstop_cause_text;
         present = (any_function)function;
@@ -1329,11 +1373,107 @@ int main(void)
         present = (any_function)function;
     }
     {
+        fieldstop_status (*function)(const struct fieldstop_site *) = fieldstop_site_check;
+        present = (any_function)function;
+    }
+    {
         fieldstop_status (*function)(const struct fieldstop_telescope *, const struct fieldstop_eyepiece *, const struct fieldstop_observer *, uint32_t, struct fieldstop_visual_readout *) = fieldstop_visual_readout_compute;
         present = (any_function)function;
     }
     {
         fieldstop_status (*function)(const struct fieldstop_telescope *, const struct fieldstop_camera *, const struct fieldstop_observer *, uint32_t, struct fieldstop_camera_readout *) = fieldstop_camera_readout_compute;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t) = fieldstop_record_begin;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t) = fieldstop_record_check;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint16_t *) = fieldstop_record_get_length;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint8_t, uint8_t *) = fieldstop_record_get_count;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint8_t, uint8_t, struct fieldstop_equipment_name *) = fieldstop_record_get_name;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, struct fieldstop_in_use *) = fieldstop_record_get_in_use;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint8_t, struct fieldstop_telescope *) = fieldstop_record_get_telescope;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint8_t, struct fieldstop_eyepiece *) = fieldstop_record_get_eyepiece;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint8_t, uint32_t *) = fieldstop_record_get_amplifier;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint8_t, struct fieldstop_camera *) = fieldstop_record_get_camera;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint8_t, struct fieldstop_observer *) = fieldstop_record_get_observer;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const uint8_t *, uint16_t, uint8_t, struct fieldstop_site *) = fieldstop_record_get_site;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t, uint8_t, const struct fieldstop_telescope *, const struct fieldstop_equipment_name *) = fieldstop_record_put_telescope;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t, uint8_t, const struct fieldstop_eyepiece *, const struct fieldstop_equipment_name *) = fieldstop_record_put_eyepiece;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t, uint8_t, uint32_t, const struct fieldstop_equipment_name *) = fieldstop_record_put_amplifier;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t, uint8_t, const struct fieldstop_camera *, const struct fieldstop_equipment_name *) = fieldstop_record_put_camera;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t, uint8_t, const struct fieldstop_observer *, const struct fieldstop_equipment_name *) = fieldstop_record_put_observer;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t, uint8_t, const struct fieldstop_site *, const struct fieldstop_equipment_name *) = fieldstop_record_put_site;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t, const struct fieldstop_in_use *) = fieldstop_record_put_in_use;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(uint8_t *, uint16_t, uint8_t, uint8_t) = fieldstop_record_remove;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_slot_pair *) = fieldstop_slot_pair_check;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_slot_pair *, fieldstop_read, void *, uint8_t *, uint16_t, uint16_t *) = fieldstop_store_load;
+        present = (any_function)function;
+    }
+    {
+        fieldstop_status (*function)(const struct fieldstop_slot_pair *, fieldstop_read, fieldstop_write, fieldstop_erase, void *, const uint8_t *, uint16_t, uint8_t) = fieldstop_store_save;
         present = (any_function)function;
     }
     {

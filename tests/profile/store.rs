@@ -2,10 +2,10 @@
 
 use super::samples::*;
 use super::torn::{Kind, Model};
-use fieldstop::profile::{Crc, Newer, Record, Slots, Storage, load, save};
+use fieldstop::profile::{Crc, Newer, Record, SlotPair, Storage, load, save};
 use fieldstop::{Cause, Error};
 
-pub const SLOTS: Slots = Slots { first: 64, second: 576, bytes: 512, write_bytes: 1, padding: [0; 3] };
+pub const SLOTS: SlotPair = SlotPair { first: 64, second: 576, bytes: 512, write_bytes: 1, padding: [0; 3] };
 
 fn sealed(mut bytes: Vec<u8>) -> Vec<u8> {
     let at = bytes.len() - 4;
@@ -25,12 +25,12 @@ fn of_version(mut bytes: Vec<u8>, version: u16) -> Vec<u8> {
     sealed(bytes)
 }
 
-fn loaded(storage: &mut impl Storage, slots: &Slots) -> Result<Vec<u8>, Error> {
+fn loaded(storage: &mut impl Storage, slots: &SlotPair) -> Result<Vec<u8>, Error> {
     let mut buffer = [0; Record::MOST];
     load(storage, slots, &mut buffer).map(|record| record.bytes().to_vec())
 }
 
-fn store(storage: &mut impl Storage, slots: &Slots, bytes: &[u8]) -> Result<(), Error> {
+fn store(storage: &mut impl Storage, slots: &SlotPair, bytes: &[u8]) -> Result<(), Error> {
     save(storage, slots, &Record::check(bytes).unwrap(), Newer::Keep)
 }
 
@@ -123,7 +123,7 @@ fn what_does_not_fit_is_refused() {
 
 #[test]
 fn slots_are_checked() {
-    let refused = |slots: Slots, member| {
+    let refused = |slots: SlotPair, member| {
         assert_eq!(slots.check(), Err(Error::new(Cause::OutOfRange, member)), "{slots:?}");
         let mut storage = Model::new(Kind::Eeprom);
         let before = storage.bytes.clone();
@@ -132,18 +132,18 @@ fn slots_are_checked() {
         assert_eq!(storage.bytes, before);
     };
     assert_eq!(SLOTS.check(), Ok(()));
-    assert_eq!(Slots { first: 32, write_bytes: 32, ..SLOTS }.check(), Ok(()));
-    refused(Slots { first: 65, write_bytes: 2, ..SLOTS }, 1);
-    refused(Slots { first: u32::MAX - 510, ..SLOTS }, 1);
-    refused(Slots { second: 575, ..SLOTS }, 2);
-    refused(Slots { second: 577, write_bytes: 8, ..SLOTS }, 2);
-    refused(Slots { second: 0, ..SLOTS }, 2);
-    refused(Slots { second: u32::MAX - 510, ..SLOTS }, 2);
-    refused(Slots { bytes: 27, ..SLOTS }, 3);
-    refused(Slots { bytes: 510, write_bytes: 4, ..SLOTS }, 3);
-    refused(Slots { write_bytes: 64, ..SLOTS }, 4);
+    assert_eq!(SlotPair { first: 32, write_bytes: 32, ..SLOTS }.check(), Ok(()));
+    refused(SlotPair { first: 65, write_bytes: 2, ..SLOTS }, 1);
+    refused(SlotPair { first: u32::MAX - 510, ..SLOTS }, 1);
+    refused(SlotPair { second: 575, ..SLOTS }, 2);
+    refused(SlotPair { second: 577, write_bytes: 8, ..SLOTS }, 2);
+    refused(SlotPair { second: 0, ..SLOTS }, 2);
+    refused(SlotPair { second: u32::MAX - 510, ..SLOTS }, 2);
+    refused(SlotPair { bytes: 27, ..SLOTS }, 3);
+    refused(SlotPair { bytes: 510, write_bytes: 4, ..SLOTS }, 3);
+    refused(SlotPair { write_bytes: 64, ..SLOTS }, 4);
     for write_bytes in [0, 3, 128] {
-        assert!(Slots { first: 0, second: 0x6000, bytes: 0x3000, write_bytes, ..SLOTS }.check().is_err());
+        assert!(SlotPair { first: 0, second: 0x6000, bytes: 0x3000, write_bytes, ..SLOTS }.check().is_err());
     }
 }
 

@@ -2,7 +2,7 @@
 
 use super::samples::*;
 use super::store::SLOTS;
-use fieldstop::profile::{Newer, Record, Slots, Storage, load, save};
+use fieldstop::profile::{Newer, Record, SlotPair, Storage, load, save};
 use fieldstop::{Cause, Error};
 
 #[derive(Clone, Copy, Debug, PartialEq)]
@@ -16,10 +16,10 @@ pub enum Kind {
 const PAGE: usize = 128;
 
 impl Kind {
-    pub fn slots(self, slots: Slots) -> Slots {
+    pub fn slots(self, slots: SlotPair) -> SlotPair {
         match self {
             Kind::Eeprom => slots,
-            Kind::Flash(write_bytes) => Slots { first: 0, second: 512, write_bytes, ..slots },
+            Kind::Flash(write_bytes) => SlotPair { first: 0, second: 512, write_bytes, ..slots },
         }
     }
 }
@@ -102,14 +102,14 @@ impl Storage for Model {
     }
 }
 
-fn loaded(storage: &Model, slots: &Slots) -> Result<Vec<u8>, Error> {
+fn loaded(storage: &Model, slots: &SlotPair) -> Result<Vec<u8>, Error> {
     let mut storage = storage.clone();
     (storage.steps_left, storage.cut) = (None, None);
     let mut buffer = [0; Record::MOST];
     load(&mut storage, slots, &mut buffer).map(|record| record.bytes().to_vec())
 }
 
-fn try_save(storage: &mut Model, slots: &Slots, bytes: &[u8]) -> Result<(), Error> {
+fn try_save(storage: &mut Model, slots: &SlotPair, bytes: &[u8]) -> Result<(), Error> {
     save(storage, slots, &Record::check(bytes).unwrap(), Newer::Keep)
 }
 
@@ -126,7 +126,7 @@ impl Random {
 }
 
 /// The slot with the last good record.
-fn sacred(storage: &Model, slots: &Slots, last: &Result<Vec<u8>, Error>) -> std::ops::Range<usize> {
+fn sacred(storage: &Model, slots: &SlotPair, last: &Result<Vec<u8>, Error>) -> std::ops::Range<usize> {
     let Ok(last) = last else { return 0..0 };
     let starts = [slots.first as usize, slots.second as usize];
     let start = starts.into_iter().find(|start| storage.bytes[*start..].starts_with(last)).unwrap();
@@ -134,7 +134,7 @@ fn sacred(storage: &Model, slots: &Slots, last: &Result<Vec<u8>, Error>) -> std:
 }
 
 /// After a cut: what is loaded, for each value that the byte being written may have; then the next save works.
-fn survives(cut: &Model, slots: &Slots, old: &Result<Vec<u8>, Error>, new: &[u8], exhaustive: bool) {
+fn survives(cut: &Model, slots: &SlotPair, old: &Result<Vec<u8>, Error>, new: &[u8], exhaustive: bool) {
     let (at, coming) = cut.cut.unwrap();
     let there = cut.bytes[at];
     let mut torn = cut.clone();
@@ -192,7 +192,7 @@ fn cut_everywhere(kind: Kind, counts: &[[u8; 6]], exhaustive: bool) {
 }
 
 /// After a cut the next save is cut too, now and then, and the one after that goes through.
-fn again(cut: &Model, slots: &Slots, old: &Result<Vec<u8>, Error>, new: &[u8]) {
+fn again(cut: &Model, slots: &SlotPair, old: &Result<Vec<u8>, Error>, new: &[u8]) {
     let mut storage = cut.clone();
     storage.cut = None;
     for steps in (0..600).step_by(41).map(Some).chain([None]) {
