@@ -3919,7 +3919,7 @@ fieldstop_status fieldstop_record_get_name(const uint8_t *record,
 FIELDSTOP_CHECKED
 fieldstop_status fieldstop_record_get_in_use(const uint8_t *record,
                                              uint16_t length,
-                                             struct fieldstop_in_use *in_use);
+                                             struct fieldstop_in_use *used);
 
 /**
  * Gives a telescope, of a record.
@@ -4092,13 +4092,13 @@ fieldstop_status fieldstop_record_put_site(uint8_t *record,
 /**
  * Says which entries are in use, and gives 0.
  *
- * capacity: the buffer's bytes. in_use: of each kind an index, or FIELDSTOP_NONE_IN_USE.
+ * capacity: the buffer's bytes. used: of each kind an index, or FIELDSTOP_NONE_IN_USE.
  * Statuses: null pointer; no record, newer record (1); out of range (3): no such entry.
  */
 FIELDSTOP_CHECKED
 fieldstop_status fieldstop_record_put_in_use(uint8_t *record,
                                              uint16_t capacity,
-                                             const struct fieldstop_in_use *in_use);
+                                             const struct fieldstop_in_use *used);
 
 /**
  * Takes an entry out of a record, and gives 0. Those behind it move up by one; what was in use stays so, but for the
@@ -4122,7 +4122,7 @@ fieldstop_status fieldstop_record_remove(uint8_t *record,
  * Statuses: null pointer, out of range.
  */
 FIELDSTOP_CHECKED
-fieldstop_status fieldstop_slot_pair_check(const struct fieldstop_slot_pair *slot_pair);
+fieldstop_status fieldstop_slot_pair_check(const struct fieldstop_slot_pair *places);
 
 /**
  * Reads the last good record into the buffer, and gives its length in bytes.
@@ -4134,7 +4134,7 @@ fieldstop_status fieldstop_slot_pair_check(const struct fieldstop_slot_pair *slo
  * read gave another number than 0, or not the same bytes twice, and only then the buffer's bytes may have changed.
  */
 FIELDSTOP_CHECKED
-fieldstop_status fieldstop_store_load(const struct fieldstop_slot_pair *slot_pair,
+fieldstop_status fieldstop_store_load(const struct fieldstop_slot_pair *places,
                                       fieldstop_read read,
                                       void *context,
                                       uint8_t *record,
@@ -4154,7 +4154,7 @@ fieldstop_status fieldstop_store_load(const struct fieldstop_slot_pair *slot_pai
  * does not read the same. The last good record is still there then.
  */
 FIELDSTOP_CHECKED
-fieldstop_status fieldstop_store_save(const struct fieldstop_slot_pair *slot_pair,
+fieldstop_status fieldstop_store_save(const struct fieldstop_slot_pair *places,
                                       fieldstop_read read,
                                       fieldstop_write write,
                                       fieldstop_erase erase,

@@ -3207,9 +3207,9 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_site(uint8_t *record, uint1
 }
 
 /** Says which entries are in use, and gives 0. */
-FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_in_use(uint8_t *record, uint16_t capacity, const in_use &in_use)
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_in_use(uint8_t *record, uint16_t capacity, const in_use &used)
 {
-    return status(::fieldstop_record_put_in_use(record, capacity, &in_use));
+    return status(::fieldstop_record_put_in_use(record, capacity, &used));
 }
 
 /** Takes an entry out of a record, and gives 0. */
@@ -3219,23 +3219,23 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_remove(uint8_t *record, uint16_
 }
 
 /** Gives 0 for a slot pair that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in the place of the argument. */
-FIELDSTOP_CHECKED FIELDSTOP_INLINE status slot_pair_check(const slot_pair &slot_pair)
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status slot_pair_check(const slot_pair &places)
 {
-    return status(::fieldstop_slot_pair_check(&slot_pair));
+    return status(::fieldstop_slot_pair_check(&places));
 }
 
 /** Reads the last good record into the buffer, and gives its length in bytes. */
-FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> store_load(const slot_pair &slot_pair, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity)
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> store_load(const slot_pair &places, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity)
 {
     uint16_t given;
-    const fieldstop_status number = ::fieldstop_store_load(&slot_pair, read, context, record, capacity, &given);
+    const fieldstop_status number = ::fieldstop_store_load(&places, read, context, record, capacity, &given);
     return access::given<uint16_t>(number, given);
 }
 
 /** Saves a record into the slot that does not have the last good one, and gives 0. */
-FIELDSTOP_CHECKED FIELDSTOP_INLINE status store_save(const slot_pair &slot_pair, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status store_save(const slot_pair &places, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
 {
-    return status(::fieldstop_store_save(&slot_pair, read, write, erase, context, record, capacity, newer));
+    return status(::fieldstop_store_save(&places, read, write, erase, context, record, capacity, newer));
 }
 
 /* Quantities as characters of a display: integers only, into a buffer of the caller's. */

@@ -301,14 +301,14 @@ pub unsafe extern "C" fn fieldstop_record_get_name(
 pub unsafe extern "C" fn fieldstop_record_get_in_use(
     record: *const u8,
     length: u16,
-    in_use: *mut InUse,
+    used: *mut InUse,
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointers.
     unsafe {
         if record.is_null() {
             return null(1).status();
         }
-        give(in_use, 3, || Ok(Record::outline(bytes(record, length, 1)?)?.in_use()))
+        give(used, 3, || Ok(Record::outline(bytes(record, length, 1)?)?.in_use()))
     }
 }
 
@@ -530,23 +530,23 @@ pub unsafe extern "C" fn fieldstop_record_put_site(
 
 /// Says which entries are in use, and gives 0.
 ///
-/// capacity: the buffer's bytes. in_use: of each kind an index, or FIELDSTOP_NONE_IN_USE.
+/// capacity: the buffer's bytes. used: of each kind an index, or FIELDSTOP_NONE_IN_USE.
 /// Statuses: null pointer; no record, newer record (1); out of range (3): no such entry.
 #[must_use]
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn fieldstop_record_put_in_use(
     record: *mut u8,
     capacity: u16,
-    in_use: *const InUse,
+    used: *const InUse,
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointers.
-    let (record, in_use) = match unsafe { (bytes_mut(record, capacity, 1), in_use.as_ref()) } {
+    let (record, used) = match unsafe { (bytes_mut(record, capacity, 1), used.as_ref()) } {
         (Err(error), _) => return error.status(),
         (_, None) => return null(3).status(),
-        (Ok(record), Some(in_use)) => (record, in_use),
+        (Ok(record), Some(used)) => (record, used),
     };
     let result = Editor::reopen(record)
-        .and_then(|mut editor| editor.put_in_use(in_use).map_err(|error| Error::new(error.cause(), 3)));
+        .and_then(|mut editor| editor.put_in_use(used).map_err(|error| Error::new(error.cause(), 3)));
     status_of(result)
 }
 
@@ -579,9 +579,9 @@ pub unsafe extern "C" fn fieldstop_record_remove(
 /// Statuses: null pointer, out of range.
 #[must_use]
 #[unsafe(no_mangle)]
-pub unsafe extern "C" fn fieldstop_slot_pair_check(slot_pair: *const SlotPair) -> fieldstop_status {
+pub unsafe extern "C" fn fieldstop_slot_pair_check(places: *const SlotPair) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
-    status_of(unsafe { slot_pair.as_ref() }.ok_or(null(1)).and_then(SlotPair::check))
+    status_of(unsafe { places.as_ref() }.ok_or(null(1)).and_then(SlotPair::check))
 }
 
 /// Reads the last good record into the buffer, and gives its length in bytes.
@@ -594,7 +594,7 @@ pub unsafe extern "C" fn fieldstop_slot_pair_check(slot_pair: *const SlotPair) -
 #[must_use]
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn fieldstop_store_load(
-    slot_pair: *const SlotPair,
+    places: *const SlotPair,
     read: fieldstop_read,
     context: *mut c_void,
     record: *mut u8,
@@ -602,7 +602,7 @@ pub unsafe extern "C" fn fieldstop_store_load(
     out: *mut u16,
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointers.
-    let slots = match unsafe { slot_pair.as_ref() } {
+    let slots = match unsafe { places.as_ref() } {
         None => return null(1).status(),
         Some(_) if read.is_none() => return null(2).status(),
         Some(_) if record.is_null() => return null(4).status(),
@@ -635,7 +635,7 @@ pub unsafe extern "C" fn fieldstop_store_load(
 #[must_use]
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn fieldstop_store_save(
-    slot_pair: *const SlotPair,
+    places: *const SlotPair,
     read: fieldstop_read,
     write: fieldstop_write,
     erase: fieldstop_erase,
@@ -645,7 +645,7 @@ pub unsafe extern "C" fn fieldstop_store_save(
     newer: u8,
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointers.
-    let (slots, record) = match unsafe { (slot_pair.as_ref(), bytes(record, capacity, 6)) } {
+    let (slots, record) = match unsafe { (places.as_ref(), bytes(record, capacity, 6)) } {
         (None, _) => return null(1).status(),
         _ if read.is_none() => return null(2).status(),
         _ if write.is_none() => return null(3).status(),

@@ -4465,13 +4465,13 @@ fieldstop_status typed_record_put_site(uint8_t *record, uint16_t capacity, uint8
     return fieldstop::record_put_site(record, capacity, index, *site, *name).number();
 }
 
-fieldstop_status plain_record_put_in_use(uint8_t *record, uint16_t capacity, const fieldstop::in_use *in_use)
+fieldstop_status plain_record_put_in_use(uint8_t *record, uint16_t capacity, const fieldstop::in_use *used)
 {
-    return ::fieldstop_record_put_in_use(record, capacity, in_use);
+    return ::fieldstop_record_put_in_use(record, capacity, used);
 }
-fieldstop_status typed_record_put_in_use(uint8_t *record, uint16_t capacity, const fieldstop::in_use *in_use)
+fieldstop_status typed_record_put_in_use(uint8_t *record, uint16_t capacity, const fieldstop::in_use *used)
 {
-    return fieldstop::record_put_in_use(record, capacity, *in_use).number();
+    return fieldstop::record_put_in_use(record, capacity, *used).number();
 }
 
 fieldstop_status plain_record_remove(uint8_t *record, uint16_t capacity, uint8_t kind, uint8_t index)
@@ -4483,40 +4483,40 @@ fieldstop_status typed_record_remove(uint8_t *record, uint16_t capacity, uint8_t
     return fieldstop::record_remove(record, capacity, kind, index).number();
 }
 
-fieldstop_status plain_slot_pair_check(const fieldstop::slot_pair *slot_pair)
+fieldstop_status plain_slot_pair_check(const fieldstop::slot_pair *places)
 {
-    return ::fieldstop_slot_pair_check(slot_pair);
+    return ::fieldstop_slot_pair_check(places);
 }
-fieldstop_status typed_slot_pair_check(const fieldstop::slot_pair *slot_pair)
+fieldstop_status typed_slot_pair_check(const fieldstop::slot_pair *places)
 {
-    return fieldstop::slot_pair_check(*slot_pair).number();
+    return fieldstop::slot_pair_check(*places).number();
 }
 
-fieldstop_status plain_store_load(const fieldstop::slot_pair *slot_pair, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity, uint16_t *out)
+fieldstop_status plain_store_load(const fieldstop::slot_pair *places, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity, uint16_t *out)
 {
     uint16_t given;
-    const fieldstop_status number = ::fieldstop_store_load(slot_pair, read, context, record, capacity, &given);
+    const fieldstop_status number = ::fieldstop_store_load(places, read, context, record, capacity, &given);
     if (number == 0) {
         *out = given;
     }
     return number;
 }
-fieldstop_status typed_store_load(const fieldstop::slot_pair *slot_pair, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity, uint16_t *out)
+fieldstop_status typed_store_load(const fieldstop::slot_pair *places, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity, uint16_t *out)
 {
-    const auto given = fieldstop::store_load(*slot_pair, read, context, record, capacity);
+    const auto given = fieldstop::store_load(*places, read, context, record, capacity);
     if (given) {
         *out = given.value();
     }
     return given.status().number();
 }
 
-fieldstop_status plain_store_save(const fieldstop::slot_pair *slot_pair, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
+fieldstop_status plain_store_save(const fieldstop::slot_pair *places, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
 {
-    return ::fieldstop_store_save(slot_pair, read, write, erase, context, record, capacity, newer);
+    return ::fieldstop_store_save(places, read, write, erase, context, record, capacity, newer);
 }
-fieldstop_status typed_store_save(const fieldstop::slot_pair *slot_pair, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
+fieldstop_status typed_store_save(const fieldstop::slot_pair *places, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
 {
-    return fieldstop::store_save(*slot_pair, read, write, erase, context, record, capacity, newer).number();
+    return fieldstop::store_save(*places, read, write, erase, context, record, capacity, newer).number();
 }
 
 fieldstop_status plain_text_count(uint32_t count, uint8_t unit, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
