@@ -118,6 +118,10 @@ extern "C" {
 #define FIELDSTOP_NO_ROOM 6
 /** Cause: not defined or not known here. */
 #define FIELDSTOP_UNDEFINED 7
+/** Cause: never reached: a star or a place of the sky that never comes to what was asked about. */
+#define FIELDSTOP_NEVER_REACHED 8
+/** Cause: never left: a star or a place of the sky that stays in what was asked about, all around the pole. */
+#define FIELDSTOP_NEVER_LEFT 9
 /** Cause: there is no good record. */
 #define FIELDSTOP_NO_RECORD 10
 /** Cause: the record is of a newer version. */

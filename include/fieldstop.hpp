@@ -73,6 +73,10 @@ enum class cause_number : uint8_t {
     no_room = FIELDSTOP_NO_ROOM,
     /** not defined or not known here */
     undefined = FIELDSTOP_UNDEFINED,
+    /** never reached: a star or a place of the sky that never comes to what was asked about */
+    never_reached = FIELDSTOP_NEVER_REACHED,
+    /** never left: a star or a place of the sky that stays in what was asked about, all around the pole */
+    never_left = FIELDSTOP_NEVER_LEFT,
     /** there is no good record */
     no_record = FIELDSTOP_NO_RECORD,
     /** the record is of a newer version */

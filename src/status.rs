@@ -58,6 +58,10 @@ causes! {
     NoRoom = 6, "it does not fit its width or buffer";
     /// A question without an answer, at this place or with what is known.
     Undefined = 7, "not defined or not known here";
+    /// A star or a place of the sky that never comes to what was asked about.
+    NeverReached = 8, "never reached";
+    /// A star or a place of the sky that stays in what was asked about, all around the pole.
+    NeverLeft = 9, "never left";
     /// Damaged, cut short, or never written.
     NoRecord = 10, "there is no good record";
     /// It is left as it is, unless the call says otherwise.

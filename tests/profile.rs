@@ -2,6 +2,9 @@
 
 #[path = "profile/bytes.rs"]
 mod bytes;
+#[cfg(feature = "embedded-storage")]
+#[path = "profile/drivers.rs"]
+mod drivers;
 #[path = "profile/golden.rs"]
 mod golden;
 #[path = "profile/samples.rs"]

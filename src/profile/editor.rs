@@ -26,7 +26,8 @@ impl<'a> Editor<'a> {
             return Err(Error::new(Cause::NoRoom, 1));
         }
         let mut editor = Editor { buffer };
-        editor.seal(&Header::EMPTY);
+        let header = Header::empty();
+        editor.seal(&header);
         Ok(editor)
     }
 

@@ -6,7 +6,7 @@ pub(super) const HEADER: usize = 24;
 /// Bytes of the checksum at the end.
 pub(super) const CHECKSUM: usize = 4;
 /// "fdsp"
-pub(super) const MAGIC: [u8; 4] = *b"fdsp";
+const MAGIC: u32 = 0x7073_6466;
 pub(super) const VERSION: u16 = 1;
 
 /// Which entry of each kind is in use: its index, or 255 for none.
@@ -52,7 +52,7 @@ impl Default for InUse {
 /// The first bytes of a record. What is before `counts` is at the same place in every version.
 #[derive(Clone, Copy, PartialEq)]
 pub(super) struct Header {
-    pub(super) magic: [u8; 4],
+    pub(super) magic: u32,
     pub(super) version: u16,
     pub(super) length: u16,
     pub(super) sequence: u32,
@@ -61,19 +61,16 @@ pub(super) struct Header {
 }
 
 impl Header {
-    pub(super) const EMPTY: Header = Header {
-        magic: MAGIC,
-        version: VERSION,
-        length: (HEADER + CHECKSUM) as u16,
-        sequence: 0,
-        counts: [0; KINDS],
-        in_use: [InUse::NONE; KINDS],
-    };
+    pub(super) const fn empty() -> Header {
+        let length = (HEADER + CHECKSUM) as u16;
+        let (counts, in_use) = ([0; KINDS], [InUse::NONE; KINDS]);
+        Header { magic: MAGIC, version: VERSION, length, sequence: 0, counts, in_use }
+    }
 
     pub(super) fn decode(bytes: &[u8]) -> Header {
         let mut fields = Fields(bytes);
         Header {
-            magic: fields.bytes(),
+            magic: fields.u32(),
             version: fields.u16(),
             length: fields.u16(),
             sequence: fields.u32(),
@@ -85,7 +82,7 @@ impl Header {
     pub(super) fn encode(&self) -> [u8; HEADER] {
         let mut bytes = [0; HEADER];
         let mut fields = FieldsMut(&mut bytes);
-        fields.bytes(self.magic);
+        fields.u32(self.magic);
         fields.u16(self.version);
         fields.u16(self.length);
         fields.u32(self.sequence);

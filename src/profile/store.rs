@@ -155,7 +155,8 @@ pub fn save(
     // The magic bytes go first and come last: between the two there is nothing that could be taken for a record.
     let unit = usize::from(slots.write_bytes);
     if !storage.erase(slot, slots.bytes)? {
-        storage.write(slot, [0; CHUNK].get(..unit).unwrap_or_default())?;
+        let zeros = [0; CHUNK];
+        storage.write(slot, zeros.get(..unit).unwrap_or_default())?;
     }
     let length = usize::from(header.length);
     let mut at = unit;
