@@ -241,9 +241,11 @@ impl<'a> Editor<'a> {
     }
 }
 
+type Cells<'a> = &'a [Cell<u8>];
+
 /// The bytes from `at` to `end` less the last `size`, and those less the first `size`: copied one to the other, they
 /// make or close a gap of that size.
-fn gap(buffer: &mut [u8], at: usize, end: u16, size: usize) -> Option<(&[Cell<u8>], &[Cell<u8>])> {
+fn gap(buffer: &mut [u8], at: usize, end: u16, size: usize) -> Option<(Cells<'_>, Cells<'_>)> {
     let bytes = Cell::from_mut(buffer.get_mut(..usize::from(end))?.get_mut(at..)?).as_slice_of_cells();
     let (_, upper) = bytes.split_at_checked(size)?;
     let (lower, _) = bytes.split_at_checked(upper.len())?;

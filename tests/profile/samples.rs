@@ -20,7 +20,7 @@ pub const TELESCOPE: Telescope = Telescope {
 pub fn eyepiece(n: u8) -> Eyepiece {
     Eyepiece {
         focal_length_um: 5_500 + 3_100 * u32::from(n),
-        field_stop_um: if n % 3 == 0 { 0 } else { 6_200 + 2_900 * u32::from(n) },
+        field_stop_um: if n.is_multiple_of(3) { 0 } else { 6_200 + 2_900 * u32::from(n) },
         apparent_field_mas: 187_200_000 + 7_200_000 * u32::from(n),
         mapping: n % 2,
         padding: [0; 3],
