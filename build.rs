@@ -243,6 +243,9 @@ mod header {
             let at = code.find("typedef struct ").unwrap();
             return identifier(&code[at + 15..]);
         }
+        if let Some((_, name)) = code.split_once("typedef ").and_then(|(_, of)| of.split_once("(*")) {
+            return identifier(name);
+        }
         let code = code.split("\n#endif").next().unwrap();
         match code.find('(').filter(|_| !code.contains("typedef")) {
             // The last word before the arguments; `#if (…)` stands on a line before.

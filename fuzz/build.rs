@@ -39,6 +39,8 @@ fn call(subject: &str, function: &str) -> String {
     for (name, kind) in arguments.iter().rev() {
         let is_pointer = kind.starts_with('*');
         let value = match size.take() {
+            // Given to the caller's functions as it is, and may be null.
+            _ if *name == "context" => "std::ptr::null_mut()".to_string(),
             _ if *kind == "*const *const c_char" => "input.texts()".to_string(),
             // As many as the byte behind it may say.
             _ if *name == "choices" => "input.take(255)".to_string(),

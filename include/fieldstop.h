@@ -138,10 +138,20 @@ extern "C" {
 #define FIELDSTOP_NOT_FINITE 4
 /** Cause: the result does not fit its type. */
 #define FIELDSTOP_OVERFLOW 5
-/** Cause: the text does not fit its width or buffer. */
+/** Cause: it does not fit its width or buffer. */
 #define FIELDSTOP_NO_ROOM 6
 /** Cause: not defined or not known here. */
 #define FIELDSTOP_UNDEFINED 7
+/** Cause: never reached: a star or a place of the sky that never comes to what was asked about. */
+#define FIELDSTOP_NEVER_REACHED 8
+/** Cause: never left: a star or a place of the sky that stays in what was asked about, all around the pole. */
+#define FIELDSTOP_NEVER_LEFT 9
+/** Cause: there is no good record. */
+#define FIELDSTOP_NO_RECORD 10
+/** Cause: the record is of a newer version. */
+#define FIELDSTOP_NEWER_RECORD 11
+/** Cause: the storage could not be read or written. */
+#define FIELDSTOP_STORAGE 12
 
 /**
  * 0 on success; otherwise the cause in the low byte, and in the high byte the position of the offending argument
@@ -3713,6 +3723,14 @@ typedef struct fieldstop_observer {
     uint32_t wavelength_nm;
 } fieldstop_observer;
 
+/** A place to observe from. */
+typedef struct fieldstop_site {
+    /** Member 1. Latitude, north positive, binary angle; within a quarter turn (2^30) either way. */
+    int32_t latitude_bam;
+    /** Member 2. Longitude, counted toward the east, binary angle; any value. */
+    uint32_t longitude_bam;
+} fieldstop_site;
+
 /**
  * What the eye gets at the eyepiece. Members from `focal_length_um` on are 0 where their bit in `available`
  * is clear.
@@ -4085,6 +4103,16 @@ FIELDSTOP_CHECKED
 fieldstop_status fieldstop_observer_check(const struct fieldstop_observer *observer);
 
 /**
+ * Gives 0 for a site that can be used; otherwise the cause, with the number of the first bad member, counted
+ * from 1, in the place of the argument.
+ *
+ * Members: latitude_bam within a quarter turn either way (1), longitude_bam (2).
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_site_check(const struct fieldstop_site *site);
+
+/**
  * Gives what the eye gets at the eyepiece: the wanted values, each in the unit of its name, and the facts
  * about them.
  *
@@ -4257,6 +4285,416 @@ fieldstop_status fieldstop_two_mirror_readout_compute(const struct fieldstop_tel
                                                       const struct fieldstop_two_mirror_layout *layout,
                                                       uint32_t wanted,
                                                       struct fieldstop_two_mirror_readout *readout);
+
+/* --------------------------------------------------------------------------------------------------
+   The stored record: equipment, observers and sites with their names, as bytes in EEPROM or
+   flash. */
+
+/** Kind of entry: telescopes, up to 4 in a record. */
+#define FIELDSTOP_KIND_TELESCOPE 0
+/** Kind of entry: eyepieces, up to 16 in a record. */
+#define FIELDSTOP_KIND_EYEPIECE 1
+/** Kind of entry: Barlows and reducers, up to 8 in a record. */
+#define FIELDSTOP_KIND_AMPLIFIER 2
+/** Kind of entry: cameras, up to 4 in a record. */
+#define FIELDSTOP_KIND_CAMERA 3
+/** Kind of entry: observers, up to 4 in a record. */
+#define FIELDSTOP_KIND_OBSERVER 4
+/** Kind of entry: sites, up to 4 in a record. */
+#define FIELDSTOP_KIND_SITE 5
+/** In use: none of that kind. */
+#define FIELDSTOP_NONE_IN_USE 255
+/** Bytes of a record without entries. */
+#define FIELDSTOP_RECORD_LEAST 28
+/** Bytes of the longest record. */
+#define FIELDSTOP_RECORD_MOST 976
+/** Saving: refuse where there is a good record of a newer version. */
+#define FIELDSTOP_KEEP_NEWER 0
+/** Saving: save over a good record of a newer version. */
+#define FIELDSTOP_REPLACE_NEWER 1
+
+/** What the owner calls a piece of equipment: up to 12 bytes in the characters of the owner's display. */
+typedef struct fieldstop_equipment_name {
+    /** Bytes of the name, and zeros behind it; all 12 may be taken. */
+    uint8_t text[12];
+} fieldstop_equipment_name;
+
+/** Which entry of each kind is in use: its index, or 255 for none. */
+typedef struct fieldstop_in_use {
+    /** Index of the telescope, or 255. */
+    uint8_t telescope;
+    /** Index of the eyepiece, or 255. */
+    uint8_t eyepiece;
+    /** Index of the Barlow or reducer, or 255. */
+    uint8_t amplifier;
+    /** Index of the camera, or 255. */
+    uint8_t camera;
+    /** Index of the observer, or 255. */
+    uint8_t observer;
+    /** Index of the site, or 255. */
+    uint8_t site;
+} fieldstop_in_use;
+
+/**
+ * Two places for a record in a storage.
+ *
+ * Where the storage must be erased, both begin and end where its erase units do.
+ */
+typedef struct fieldstop_slot_pair {
+    /** Member 1. Where the first begins; a multiple of `write_bytes`. */
+    uint32_t first;
+    /** Member 2. Where the second begins; a multiple of `write_bytes`, and not within the first. */
+    uint32_t second;
+    /** Member 3. Bytes of each; a multiple of `write_bytes`, and at least 28. */
+    uint32_t bytes;
+    /** Member 4. Bytes that the storage writes at once: 1, 2, 4, 8, 16 or 32. */
+    uint8_t write_bytes;
+    /** Ignored. */
+    uint8_t padding[3];
+} fieldstop_slot_pair;
+
+/**
+ * Reads storage: fills `bytes` with the `length` bytes from `offset` on, and gives 0; anything else says that they
+ * could not be read.
+ *
+ * Any part of a slot may be asked for, up to all of a record. Bytes that the part itself reports as damaged (flash
+ * with an error-correcting code, after a torn write) are given as zeros, with 0.
+ */
+typedef fieldstop_status (*fieldstop_read)(void *context,
+                                           uint32_t offset,
+                                           uint8_t *bytes,
+                                           uint16_t length);
+
+/**
+ * Writes storage: `length` bytes from `offset` on, and gives 0; anything else says that they could not be written.
+ *
+ * `length` is a multiple of the slot pair's write_bytes and at most 32; a write never crosses a multiple of 32 bytes from
+ * the slot's start. It must have ended when the function returns.
+ */
+typedef fieldstop_status (*fieldstop_write)(void *context,
+                                            uint32_t offset,
+                                            const uint8_t *bytes,
+                                            uint16_t length);
+
+/**
+ * Erases storage: the `length` bytes of a slot from `offset` on, and gives 0; anything else says that they could not be
+ * erased.
+ */
+typedef fieldstop_status (*fieldstop_erase)(void *context, uint32_t offset, uint32_t length);
+
+/**
+ * Makes a record without entries of the buffer's first 28 bytes, and gives 0.
+ *
+ * After this and each function that puts something in, the record in the buffer is whole, with its checksum.
+ * capacity: the buffer's bytes; one of FIELDSTOP_RECORD_MOST takes every record.
+ * Statuses: null pointer; no room (2): under 28 bytes.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_begin(uint8_t *record,
+                                        uint16_t capacity);
+
+/**
+ * Gives 0 for a good record at the front of these bytes: its checksum is right and its equipment passes the checks.
+ *
+ * length: bytes that may be read; more may follow the record.
+ * Statuses: null pointer; no record (1): damaged, cut short, or none; newer record (1): whole, but of a version that
+ * this library cannot read.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_check(const uint8_t *record,
+                                        uint16_t length);
+
+/**
+ * Gives the record's own length in bytes, out of its header.
+ *
+ * length: bytes that may be read; more may follow the record.
+ * Statuses: null pointer; no record, newer record (1). The checksum is not looked at: see fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_length(const uint8_t *record,
+                                             uint16_t length,
+                                             uint16_t *out);
+
+/**
+ * Gives how many entries of a kind there are.
+ *
+ * length: bytes that may be read; more may follow the record. kind: one of the FIELDSTOP_KIND_ constants.
+ * Statuses: null pointer; no record, newer record (1); out of range (3). The checksum is not looked at: see
+ * fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_count(const uint8_t *record,
+                                            uint16_t length,
+                                            uint8_t kind,
+                                            uint8_t *out);
+
+/**
+ * Gives the name of an entry.
+ *
+ * length: bytes that may be read; more may follow the record. kind: one of the FIELDSTOP_KIND_ constants. index: from
+ * 0, under the number of entries.
+ * Statuses: null pointer; no record, newer record (1); out of range (3, 4). The checksum is not looked at: see
+ * fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_name(const uint8_t *record,
+                                           uint16_t length,
+                                           uint8_t kind,
+                                           uint8_t index,
+                                           struct fieldstop_equipment_name *name);
+
+/**
+ * Gives which entries are in use.
+ *
+ * length: bytes that may be read; more may follow the record.
+ * Statuses: null pointer; no record, newer record (1). The checksum is not looked at: see fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_in_use(const uint8_t *record,
+                                             uint16_t length,
+                                             struct fieldstop_in_use *used);
+
+/**
+ * Gives a telescope, of a record.
+ *
+ * length: bytes that may be read; more may follow the record. index: from 0, under the number of entries.
+ * Statuses: null pointer; no record, newer record (1); out of range (3). The checksum is not looked at: see
+ * fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_telescope(const uint8_t *record,
+                                                uint16_t length,
+                                                uint8_t index,
+                                                struct fieldstop_telescope *telescope);
+
+/**
+ * Gives an eyepiece, of a record.
+ *
+ * length: bytes that may be read; more may follow the record. index: from 0, under the number of entries.
+ * Statuses: null pointer; no record, newer record (1); out of range (3). The checksum is not looked at: see
+ * fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_eyepiece(const uint8_t *record,
+                                               uint16_t length,
+                                               uint8_t index,
+                                               struct fieldstop_eyepiece *eyepiece);
+
+/**
+ * Gives what a Barlow or reducer multiplies the focal length by, Q16.16, of a record.
+ *
+ * length: bytes that may be read; more may follow the record. index: from 0, under the number of entries.
+ * Statuses: null pointer; no record, newer record (1); out of range (3). The checksum is not looked at: see
+ * fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_amplifier(const uint8_t *record,
+                                                uint16_t length,
+                                                uint8_t index,
+                                                uint32_t *amplification_q16);
+
+/**
+ * Gives a camera, of a record.
+ *
+ * length: bytes that may be read; more may follow the record. index: from 0, under the number of entries.
+ * Statuses: null pointer; no record, newer record (1); out of range (3). The checksum is not looked at: see
+ * fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_camera(const uint8_t *record,
+                                             uint16_t length,
+                                             uint8_t index,
+                                             struct fieldstop_camera *camera);
+
+/**
+ * Gives an observer, of a record.
+ *
+ * length: bytes that may be read; more may follow the record. index: from 0, under the number of entries.
+ * Statuses: null pointer; no record, newer record (1); out of range (3). The checksum is not looked at: see
+ * fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_observer(const uint8_t *record,
+                                               uint16_t length,
+                                               uint8_t index,
+                                               struct fieldstop_observer *observer);
+
+/**
+ * Gives a site, of a record.
+ *
+ * length: bytes that may be read; more may follow the record. index: from 0, under the number of entries.
+ * Statuses: null pointer; no record, newer record (1); out of range (3). The checksum is not looked at: see
+ * fieldstop_record_check.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_get_site(const uint8_t *record,
+                                           uint16_t length,
+                                           uint8_t index,
+                                           struct fieldstop_site *site);
+
+/**
+ * Puts a telescope and its name into a record, and gives 0: in place of the one of that index, or one more where the
+ * index is their number.
+ *
+ * capacity: the buffer's bytes. On any status but 0 nothing is changed.
+ * Statuses: null pointer; no record, newer record (1); out of range (3): a greater index, or no more of them in a
+ * record; zero or out of range (4): fieldstop_telescope_check names the member; out of range (5): a name with bytes behind a zero; no room (2).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_put_telescope(uint8_t *record,
+                                                uint16_t capacity,
+                                                uint8_t index,
+                                                const struct fieldstop_telescope *telescope,
+                                                const struct fieldstop_equipment_name *name);
+
+/**
+ * Puts an eyepiece and its name into a record, and gives 0: in place of the one of that index, or one more where the
+ * index is their number.
+ *
+ * capacity: the buffer's bytes. On any status but 0 nothing is changed.
+ * Statuses: null pointer; no record, newer record (1); out of range (3): a greater index, or no more of them in a
+ * record; zero or out of range (4): fieldstop_eyepiece_check names the member; out of range (5): a name with bytes behind a zero; no room (2).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_put_eyepiece(uint8_t *record,
+                                               uint16_t capacity,
+                                               uint8_t index,
+                                               const struct fieldstop_eyepiece *eyepiece,
+                                               const struct fieldstop_equipment_name *name);
+
+/**
+ * Puts a Barlow or reducer, by what it multiplies the focal length by (Q16.16, not 0), and its name into a record, and gives 0: in place of the one of that index, or one more where the
+ * index is their number.
+ *
+ * capacity: the buffer's bytes. On any status but 0 nothing is changed.
+ * Statuses: null pointer; no record, newer record (1); out of range (3): a greater index, or no more of them in a
+ * record; zero (4); out of range (5): a name with bytes behind a zero; no room (2).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_put_amplifier(uint8_t *record,
+                                                uint16_t capacity,
+                                                uint8_t index,
+                                                uint32_t amplification_q16,
+                                                const struct fieldstop_equipment_name *name);
+
+/**
+ * Puts a camera and its name into a record, and gives 0: in place of the one of that index, or one more where the
+ * index is their number.
+ *
+ * capacity: the buffer's bytes. On any status but 0 nothing is changed.
+ * Statuses: null pointer; no record, newer record (1); out of range (3): a greater index, or no more of them in a
+ * record; zero or out of range (4): fieldstop_camera_check names the member; out of range (5): a name with bytes behind a zero; no room (2).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_put_camera(uint8_t *record,
+                                             uint16_t capacity,
+                                             uint8_t index,
+                                             const struct fieldstop_camera *camera,
+                                             const struct fieldstop_equipment_name *name);
+
+/**
+ * Puts an observer and its name into a record, and gives 0: in place of the one of that index, or one more where the
+ * index is their number.
+ *
+ * capacity: the buffer's bytes. On any status but 0 nothing is changed.
+ * Statuses: null pointer; no record, newer record (1); out of range (3): a greater index, or no more of them in a
+ * record; zero (4): fieldstop_observer_check names the member; out of range (5): a name with bytes behind a zero; no room (2).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_put_observer(uint8_t *record,
+                                               uint16_t capacity,
+                                               uint8_t index,
+                                               const struct fieldstop_observer *observer,
+                                               const struct fieldstop_equipment_name *name);
+
+/**
+ * Puts a site and its name into a record, and gives 0: in place of the one of that index, or one more where the
+ * index is their number.
+ *
+ * capacity: the buffer's bytes. On any status but 0 nothing is changed.
+ * Statuses: null pointer; no record, newer record (1); out of range (3): a greater index, or no more of them in a
+ * record; out of range (4): beyond a pole; out of range (5): a name with bytes behind a zero; no room (2).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_put_site(uint8_t *record,
+                                           uint16_t capacity,
+                                           uint8_t index,
+                                           const struct fieldstop_site *site,
+                                           const struct fieldstop_equipment_name *name);
+
+/**
+ * Says which entries are in use, and gives 0.
+ *
+ * capacity: the buffer's bytes. used: of each kind an index, or FIELDSTOP_NONE_IN_USE.
+ * Statuses: null pointer; no record, newer record (1); out of range (3): no such entry.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_put_in_use(uint8_t *record,
+                                             uint16_t capacity,
+                                             const struct fieldstop_in_use *used);
+
+/**
+ * Takes an entry out of a record, and gives 0. Those behind it move up by one; what was in use stays so, but for the
+ * entry itself.
+ *
+ * capacity: the buffer's bytes. kind: one of the FIELDSTOP_KIND_ constants.
+ * Statuses: null pointer; no record, newer record (1); out of range (3, 4).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_record_remove(uint8_t *record,
+                                         uint16_t capacity,
+                                         uint8_t kind,
+                                         uint8_t index);
+
+/**
+ * Gives 0 for a slot pair that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in
+ * the place of the argument.
+ *
+ * Members: first (1) and second (2) are multiples of write_bytes, the slots do not overlap nor end beyond 2^32; bytes
+ * (3) is a multiple of write_bytes, at least 28; write_bytes (4) is 1, 2, 4, 8, 16 or 32.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_slot_pair_check(const struct fieldstop_slot_pair *places);
+
+/**
+ * Reads the last good record into the buffer, and gives its length in bytes.
+ *
+ * capacity: the buffer's bytes; one of FIELDSTOP_RECORD_MOST takes every record. context: given to read as it is, and
+ * may be null.
+ * Statuses: null pointer (1, 2, 4, 6); out of range (1): fieldstop_slot_pair_check names the member; no record: neither slot
+ * has a good one; newer record: the last good one is of a version that this library cannot read; no room (5); storage:
+ * read gave another number than 0, or not the same bytes twice, and only then the buffer's bytes may have changed.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_store_load(const struct fieldstop_slot_pair *places,
+                                      fieldstop_read read,
+                                      void *context,
+                                      uint8_t *record,
+                                      uint16_t capacity,
+                                      uint16_t *out);
+
+/**
+ * Saves a record into the slot that does not have the last good one, and gives 0. Wherever the power fails, loading
+ * gives the record before or this one, whole.
+ *
+ * capacity: bytes that may be read; more may follow the record. read, write and erase must be those of one storage;
+ * erase is null where bytes can be written over as they are (EEPROM, FRAM). context: given to them as it is, and may be
+ * null. newer: FIELDSTOP_KEEP_NEWER or FIELDSTOP_REPLACE_NEWER.
+ * Statuses: null pointer (1, 2, 3, 6); out of range (1): fieldstop_slot_pair_check names the member; no record, newer
+ * record (6): what is to be saved is not good; out of range (8); no room (7): it is longer than a slot; newer record
+ * (0): a slot has one, which newer says to keep; storage: a function gave another number than 0, or what was written
+ * does not read the same. The last good record is still there then.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_store_save(const struct fieldstop_slot_pair *places,
+                                      fieldstop_read read,
+                                      fieldstop_write write,
+                                      fieldstop_erase erase,
+                                      void *context,
+                                      const uint8_t *record,
+                                      uint16_t capacity,
+                                      uint8_t newer);
 
 /* --------------------------------------------------------------------------------------------------
    Quantities as characters of a display: integers only, into a buffer of the caller's. */

@@ -41,6 +41,7 @@
 //! |---|---|
 //! | `capi` | the C interface (feature `capi`) |
 //! | [`text`] | a quantity as display characters, and the pages of character displays |
+//! | [`profile`] | equipment, observer and site as a record in EEPROM or flash |
 //! | [`setup`] | telescope, eyepiece, camera, observer: all readouts of one screen |
 //! | [`optics`] | the formulas |
 //! | [`convert`] | conversions between the fixed units |
@@ -59,6 +60,7 @@
 //! - `float` (default): the f32 and f64 forms, over libm.
 //! - `heapless` (default): text as a `heapless::String`.
 //! - `defmt`: quantities and errors print themselves by defmt.
+//! - `embedded-storage`: records in whatever has the traits of that crate.
 //! - `capi`: the C interface.
 //! - `header`: the build script makes the C header again (a desktop job).
 //! - `panic-handler`: one that stops, for a static library where there is no operating system.
@@ -76,6 +78,7 @@ extern crate std;
 pub mod capi;
 mod math;
 pub mod optics;
+pub mod profile;
 pub mod setup;
 pub mod status;
 mod stored;

@@ -55,9 +55,19 @@ causes! {
     /// No number is wrapped or saturated.
     Overflow = 5, "the result does not fit its type";
     /// Nothing is written then.
-    NoRoom = 6, "the text does not fit its width or buffer";
+    NoRoom = 6, "it does not fit its width or buffer";
     /// A question without an answer, at this place or with what is known.
     Undefined = 7, "not defined or not known here";
+    /// A star or a place of the sky that never comes to what was asked about.
+    NeverReached = 8, "never reached";
+    /// A star or a place of the sky that stays in what was asked about, all around the pole.
+    NeverLeft = 9, "never left";
+    /// Damaged, cut short, or never written.
+    NoRecord = 10, "there is no good record";
+    /// It is left as it is, unless the call says otherwise.
+    NewerRecord = 11, "the record is of a newer version";
+    /// What the storage's own functions told.
+    Storage = 12, "the storage could not be read or written";
 }
 
 /// A refused call: the cause, and which argument is to blame.

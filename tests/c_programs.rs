@@ -104,7 +104,10 @@ fn programs_print_what_is_expected() {
             build.arg(source).args(["-x", "none"]).arg(libraries.join("libfieldstop.a"));
             build.args(["-lpthread", "-ldl", "-lm", "-o"]).arg(&program);
             finish(build, &format!("{name} as {standard}"));
-            let printed = finish(Command::new(&program), &format!("running {name} as {standard}"));
+            let mut run = Command::new(&program);
+            // Where a program may leave a file.
+            run.current_dir(scratch());
+            let printed = finish(run, &format!("running {name} as {standard}"));
             let expected = fs::read_to_string(root().join(format!("tests/c/{name}.expected")));
             assert_eq!(printed, expected.unwrap_or_default(), "{name} as {standard}");
         }

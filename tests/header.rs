@@ -201,6 +201,7 @@ fn arguments_fit_the_registers_of_avr() {
         }
         let sizes = arguments.split(',').map(|argument| match argument.split_whitespace().next().unwrap() {
             _ if argument.contains('*') => 2,
+            "fieldstop_read" | "fieldstop_write" | "fieldstop_erase" => 2,
             "uint32_t" | "int32_t" | "float" => 4,
             "uint16_t" | "int16_t" | "uint8_t" | "int8_t" => 2,
             other => panic!(

@@ -5,7 +5,7 @@
 use fieldstop::Cause;
 use libfuzzer_sys::fuzz_target;
 use std::alloc::{Layout, alloc, dealloc};
-use std::ffi::c_char;
+use std::ffi::{c_char, c_void};
 use std::slice;
 
 include!(concat!(env!("OUT_DIR"), "/calls.rs"));
@@ -131,5 +131,38 @@ impl<T> Take for *mut T {
 impl<T> Take for *const T {
     fn take(input: &mut Input, count: usize) -> Self {
         input.pointer(count, true)
+    }
+}
+
+/// The functions of a storage: blank, and deaf to what is written. The target `record` has one that works.
+impl Take for Option<unsafe extern "C" fn(*mut c_void, u32, *mut u8, u16) -> u16> {
+    fn take(_: &mut Input, _: usize) -> Self {
+        unsafe extern "C" fn read(_: *mut c_void, _: u32, bytes: *mut u8, length: u16) -> u16 {
+            unsafe { bytes.write_bytes(0xFF, length.into()) };
+            0
+        }
+        Some(read)
+    }
+}
+
+impl Take for Option<unsafe extern "C" fn(*mut c_void, u32, *const u8, u16) -> u16> {
+    fn take(input: &mut Input, _: usize) -> Self {
+        unsafe extern "C" fn write(_: *mut c_void, _: u32, _: *const u8, _: u16) -> u16 {
+            0
+        }
+        if input.byte() % 16 == 15 {
+            input.nulls = true;
+            return None;
+        }
+        Some(write)
+    }
+}
+
+impl Take for Option<unsafe extern "C" fn(*mut c_void, u32, u32) -> u16> {
+    fn take(input: &mut Input, _: usize) -> Self {
+        unsafe extern "C" fn erase(_: *mut c_void, _: u32, _: u32) -> u16 {
+            0
+        }
+        if input.byte() % 2 == 0 { Some(erase) } else { None }
     }
 }

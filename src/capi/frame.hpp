@@ -103,7 +103,7 @@ private:
     {
     }
     /** What C is to fill. */
-    FIELDSTOP_INLINE explicit result(const access &) {}
+    FIELDSTOP_INLINE explicit result(const access &blank) : value_(blank) {}
     value_type value_;
     fieldstop_status number_;
 };

@@ -12,6 +12,7 @@ pub mod focus;
 pub mod imaging;
 pub mod layout;
 pub mod light;
+pub mod profile;
 pub mod resolution;
 pub mod setup;
 pub mod setup_choice;

@@ -1,7 +1,7 @@
 //! C exports of `setup`.
 
 use super::{fieldstop_status, give};
-use crate::setup::{Camera, CameraReadout, Eyepiece, Observer, Telescope, VisualReadout};
+use crate::setup::{Camera, CameraReadout, Eyepiece, Observer, Site, Telescope, VisualReadout};
 use crate::status::{Cause, Error};
 
 /// Eyepiece mapping: true field = A fe / f, the apparent angle proportional to the true one.
@@ -181,6 +181,18 @@ pub unsafe extern "C" fn fieldstop_camera_check(camera: *const Camera) -> fields
 pub unsafe extern "C" fn fieldstop_observer_check(observer: *const Observer) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     status_of(unsafe { borrow(observer, 1) }.and_then(Observer::check))
+}
+
+/// Gives 0 for a site that can be used; otherwise the cause, with the number of the first bad member, counted
+/// from 1, in the place of the argument.
+///
+/// Members: latitude_bam within a quarter turn either way (1), longitude_bam (2).
+/// Statuses: null pointer, out of range.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_site_check(site: *const Site) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    status_of(unsafe { borrow(site, 1) }.and_then(Site::check))
 }
 
 /// Gives what the eye gets at the eyepiece: the wanted values, each in the unit of its name, and the facts

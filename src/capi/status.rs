@@ -15,10 +15,20 @@ pub const FIELDSTOP_OUT_OF_RANGE: u8 = 3;
 pub const FIELDSTOP_NOT_FINITE: u8 = 4;
 /// Cause: the result does not fit its type.
 pub const FIELDSTOP_OVERFLOW: u8 = 5;
-/// Cause: the text does not fit its width or buffer.
+/// Cause: it does not fit its width or buffer.
 pub const FIELDSTOP_NO_ROOM: u8 = 6;
 /// Cause: not defined or not known here.
 pub const FIELDSTOP_UNDEFINED: u8 = 7;
+/// Cause: never reached: a star or a place of the sky that never comes to what was asked about.
+pub const FIELDSTOP_NEVER_REACHED: u8 = 8;
+/// Cause: never left: a star or a place of the sky that stays in what was asked about, all around the pole.
+pub const FIELDSTOP_NEVER_LEFT: u8 = 9;
+/// Cause: there is no good record.
+pub const FIELDSTOP_NO_RECORD: u8 = 10;
+/// Cause: the record is of a newer version.
+pub const FIELDSTOP_NEWER_RECORD: u8 = 11;
+/// Cause: the storage could not be read or written.
+pub const FIELDSTOP_STORAGE: u8 = 12;
 
 /// Gives a static English sentence for the cause in a status; never null.
 ///

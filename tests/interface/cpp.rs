@@ -192,12 +192,13 @@ fn structs(declared: &Declared) -> String {
         }
         writeln!(text, "\nprivate:").unwrap();
         if readout {
-            writeln!(
-                text,
-                "    friend struct access;\n    friend class result<{name}>;\n    {name}() = default;"
-            )
-            .unwrap();
+            writeln!(text, "    {name}() = default;").unwrap();
         }
+        writeln!(
+            text,
+            "    friend struct access;\n    friend class result<{name}>;\n    FIELDSTOP_INLINE explicit {name}(const access &) {{}}"
+        )
+        .unwrap();
         writeln!(text, "    ::{c_name} raw_;\n}};\nstatic_assert(sizeof({name}) == sizeof(::{c_name}), \"no more than in C\");\n").unwrap();
     }
     text

@@ -7,6 +7,8 @@ pub struct Declared {
     pub macros: Vec<(String, usize)>,
     /// A type's name, and what it stands for.
     pub types: Vec<(String, String)>,
+    /// A type of function that the caller gives, and the declaration of a pointer to one.
+    pub functions_given: Vec<(String, String)>,
     pub structs: Vec<Struct>,
     pub functions: Vec<Function>,
 }
@@ -116,6 +118,12 @@ pub fn read(header: &str) -> Declared {
                 comment,
                 members: members(body.rsplit_once('}').unwrap().0),
             });
+        } else if line.starts_with("typedef ") && line.contains("(*") {
+            let text = words(&until(";"));
+            let text = text.trim_start_matches("typedef ").trim_end_matches(';');
+            let (result, rest) = text.split_once("(*").unwrap();
+            let (name, arguments) = rest.split_once(')').unwrap();
+            declared.functions_given.push((name.to_string(), format!("{result}(*function){arguments}")));
         } else if let Some(text) = line.strip_prefix("typedef ") {
             let (of, name) = text.trim_end_matches(';').rsplit_once(' ').unwrap();
             declared.types.push((name.to_string(), of.to_string()));

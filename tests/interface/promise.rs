@@ -23,6 +23,9 @@ fn facts(declared: &Declared) -> BTreeSet<String> {
     for (name, of) in &declared.types {
         facts.insert(format!("type {name} = {of}"));
     }
+    for (name, of) in &declared.functions_given {
+        facts.insert(format!("function given {name} = {of}"));
+    }
     for of in &declared.structs {
         let name = &of.name;
         facts.insert(format!("struct {name}: {} bytes", of.size()));
@@ -115,6 +118,7 @@ fn planted_breaks_are_seen() {
         ),
         ("members swapped", breaks("    uint16_t first;\n", "    uint16_t second;\n")),
         ("member more", breaks("} fieldstop_observer;", "    uint32_t age_s;\n} fieldstop_observer;")),
+        ("function given with another argument", breaks("uint8_t *bytes,\n", "uint16_t *bytes,\n")),
         ("struct removed", breaks("fieldstop_span {", "fieldstop_stretch {")),
         (
             "forms withdrawn from AVR",
@@ -171,6 +175,10 @@ fn compilers_are_asked() {
     c.push_str(
         "\ntypedef void (*any_function)(void);\nstatic volatile any_function present;\n\nint main(void)\n{\n",
     );
+    for (name, of) in &declared.functions_given {
+        writeln!(c, "    {{\n        {of} = ({name})0;\n        present = (any_function)function;\n    }}")
+            .unwrap();
+    }
     for function in &declared.functions {
         let guard = function.condition.as_deref();
         if let Some(condition) = guard {
