@@ -20,7 +20,11 @@
  *   of the light, and what the tube needs around it.
  * - Colour: what a single lens does to it, and what a pair of two glasses leaves.
  * - Equipment as plain structs in fixed units, and all readouts of one screen in one call.
+ * - The stored record: equipment, observers and sites with their names, as bytes in EEPROM or
+ *   flash.
  * - Quantities as characters of a display: integers only, into a buffer of the caller's.
+ * - What a person types on a keypad or sends over a line, back to a quantity: integers only,
+ *   correctly rounded.
  *
  * CAUTION. Never look at or near the Sun through a telescope without a full-aperture filter made for
  * it; nothing that this library computes says that it is safe. Moving mounts and high eyepieces can
@@ -4232,7 +4236,7 @@ fieldstop_status fieldstop_two_mirror_layout_check(const struct fieldstop_two_mi
  * Gives how exact the focus must be and what it costs to be off: the wanted values, each in the unit of its name,
  * and the facts about them.
  *
- * wanted: any of the FIELDSTOP_FOCUS_ bits; only those values are computed, and unknown bits are ignored.
+ * focuser: any values. wanted: any of the FIELDSTOP_FOCUS_ bits; only those values are computed, and unknown bits are ignored.
  * Formulas: beside each member of the readout; a value is exactly that of the fixed function of the formula.
  * A value that rests on something unknown (motor step, tube, expansion) or that does not fit its type is not
  * available: its bit in `available` is clear and its member 0. The rest still comes.
@@ -4563,10 +4567,10 @@ fieldstop_status fieldstop_record_put_eyepiece(uint8_t *record,
                                                const struct fieldstop_equipment_name *name);
 
 /**
- * Puts a Barlow or reducer, by what it multiplies the focal length by (Q16.16, not 0), and its name into a record, and gives 0: in place of the one of that index, or one more where the
- * index is their number.
+ * Puts a Barlow or reducer and its name into a record, and gives 0: in place of the one of that index, or one more where
+ * the index is their number.
  *
- * capacity: the buffer's bytes. On any status but 0 nothing is changed.
+ * amplification_q16: what it multiplies the focal length by, not 0. capacity: the buffer's bytes. On any status but 0 nothing is changed.
  * Statuses: null pointer; no record, newer record (1); out of range (3): a greater index, or no more of them in a
  * record; zero (4); out of range (5): a name with bytes behind a zero; no room (2).
  */
@@ -4660,7 +4664,8 @@ fieldstop_status fieldstop_slot_pair_check(const struct fieldstop_slot_pair *pla
 /**
  * Reads the last good record into the buffer, and gives its length in bytes.
  *
- * capacity: the buffer's bytes; one of FIELDSTOP_RECORD_MOST takes every record. context: given to read as it is, and
+ * places: the two slots, as fieldstop_slot_pair_check has them. capacity: the buffer's bytes; one of
+ * FIELDSTOP_RECORD_MOST takes every record. context: given to read as it is, and
  * may be null.
  * Statuses: null pointer (1, 2, 4, 6); out of range (1): fieldstop_slot_pair_check names the member; no record: neither slot
  * has a good one; newer record: the last good one is of a version that this library cannot read; no room (5); storage:
@@ -4678,7 +4683,7 @@ fieldstop_status fieldstop_store_load(const struct fieldstop_slot_pair *places,
  * Saves a record into the slot that does not have the last good one, and gives 0. Wherever the power fails, loading
  * gives the record before or this one, whole.
  *
- * capacity: bytes that may be read; more may follow the record. read, write and erase must be those of one storage;
+ * places: the two slots, as fieldstop_slot_pair_check has them. capacity: bytes that may be read; more may follow the record. read, write and erase must be those of one storage;
  * erase is null where bytes can be written over as they are (EEPROM, FRAM). context: given to them as it is, and may be
  * null. newer: FIELDSTOP_KEEP_NEWER or FIELDSTOP_REPLACE_NEWER.
  * Statuses: null pointer (1, 2, 3, 6); out of range (1): fieldstop_slot_pair_check names the member; no record, newer
@@ -5524,6 +5529,115 @@ fieldstop_status fieldstop_text_two_mirror_unit(const struct fieldstop_two_mirro
                                                 char *text,
                                                 uint16_t capacity,
                                                 uint16_t *length);
+
+/* --------------------------------------------------------------------------------------------------
+   What a person types on a keypad or sends over a line, back to a quantity: integers only,
+   correctly rounded. */
+
+/** Entry: micrometres; a bare number is in mm; units m cm mm um nm in. */
+#define FIELDSTOP_ENTRY_LENGTH 0
+/** Entry: the same, and f/ in front of a focal ratio, which is multiplied by the aperture. */
+#define FIELDSTOP_ENTRY_FOCAL_LENGTH 1
+/** Entry: nanometres; a bare number is in um; units as for a length. */
+#define FIELDSTOP_ENTRY_PIXEL_PITCH 2
+/** Entry: nanometres; a bare number is in nm; units as for a length. */
+#define FIELDSTOP_ENTRY_WAVELENGTH 3
+/** Entry: milliarcseconds; a bare number is in degrees; units d deg, ' arcmin, " arcsec. */
+#define FIELDSTOP_ENTRY_ANGLE 4
+/** Entry: microarcseconds; a bare number is in seconds of arc; units as for an angle. */
+#define FIELDSTOP_ENTRY_SMALL_ANGLE 5
+/** Entry: Q16.16; no unit. */
+#define FIELDSTOP_ENTRY_RATIO 6
+/** Entry: Q16.16; f/ may stand in front. */
+#define FIELDSTOP_ENTRY_FOCAL_RATIO 7
+/** Entry: Q16.16; x may stand behind. */
+#define FIELDSTOP_ENTRY_MAGNIFICATION 8
+/** Entry: Q16.16, 65536 for a hundred per cent; % may stand behind. */
+#define FIELDSTOP_ENTRY_PERCENT 9
+/** Entry: millimagnitudes as int32_t; mag may stand behind. */
+#define FIELDSTOP_ENTRY_MAGNITUDE 10
+/** Entry: binary angle as int32_t, a quarter turn at most; a bare number is in degrees; a sign, or N or S behind. */
+#define FIELDSTOP_ENTRY_LATITUDE 11
+/** Entry: binary angle, positive east; under 360 degrees, or 180 at most with a sign, or E or W behind. */
+#define FIELDSTOP_ENTRY_LONGITUDE 12
+/** Entry: binary angle as int32_t, a quarter turn at most; a bare number is in degrees. */
+#define FIELDSTOP_ENTRY_DECLINATION 13
+/** Entry: binary angle under a turn; a bare number is in hours; units h m s, or those of an angle. */
+#define FIELDSTOP_ENTRY_RIGHT_ASCENSION 14
+/** Entry: milliseconds of a day, under 86400000; a bare number is in hours; units h m s. */
+#define FIELDSTOP_ENTRY_TIME_OF_DAY 15
+/** Entry: milliseconds; a bare number is in seconds; units h m s. */
+#define FIELDSTOP_ENTRY_DURATION 16
+/** Entry: an integer; px or steps may stand behind. */
+#define FIELDSTOP_ENTRY_COUNT 17
+/** State of an entry: it gives a quantity. */
+#define FIELDSTOP_ENTRY_COMPLETE 0
+/** State of an entry: it gives none yet; more characters can make it right. */
+#define FIELDSTOP_ENTRY_PARTIAL 1
+/** State of an entry: it gives none, whatever follows. */
+#define FIELDSTOP_ENTRY_WRONG 2
+/** Reason: none, for it is complete. */
+#define FIELDSTOP_ENTRY_FINE 0
+/** Reason: it ends where more must come. */
+#define FIELDSTOP_ENTRY_ENDED 1
+/** Reason: no entry has this byte here. */
+#define FIELDSTOP_ENTRY_UNEXPECTED 2
+/** Reason: the quantity is outside its range. */
+#define FIELDSTOP_ENTRY_TOO_LARGE 3
+/** Reason: minutes or seconds of 60 or more behind a greater unit. */
+#define FIELDSTOP_ENTRY_SIXTY 4
+/** Reason: a focal ratio where the aperture is not known. */
+#define FIELDSTOP_ENTRY_NO_APERTURE 5
+
+/** What an entry is worth. */
+typedef struct fieldstop_entry_state {
+    /** The quantity in the unit of its kind, where the entry is complete; else 0. */
+    uint32_t quantity;
+    /** The byte, counted from 0, that the reason is about; where it is complete or more must come, the length. */
+    uint16_t position;
+    /** FIELDSTOP_ENTRY_COMPLETE, ..._PARTIAL or ..._WRONG. */
+    uint8_t state;
+    /** FIELDSTOP_ENTRY_FINE, ..._ENDED and the others; callers take an unknown one as wrong. */
+    uint8_t reason;
+} fieldstop_entry_state;
+
+/**
+ * Reads what a person typed as a quantity, in the integer unit of its kind.
+ *
+ * Digits, with the decimal mark of the style and decimals or without, then a unit or none. Units are those of the kind,
+ * in the spelling of the style or m cm mm um nm in, d deg ' arcmin " arcsec, h m min s, x % mag px steps; in UTF-8 the
+ * signs of degree, prime, double prime, micro and times too. An inch is 25.4 mm. Angles and times take several units,
+ * as in 1d15'30" and 13h10m46s, with less than 60 of the later ones; the last may go without its unit, and where there is
+ * a place or a time of day they may be separated by colons.
+ * Rounding: to nearest, halves away from zero, exact for any count of decimals. What is 24 hours or 360 degrees only
+ * when rounded is 0.
+ * Ranges: text_length in bytes, any; kind one of FIELDSTOP_ENTRY_LENGTH and those behind it; aperture_um 0 where it is not known (only a focal
+ * ratio as FIELDSTOP_ENTRY_FOCAL_LENGTH needs it). A signed quantity is in two's complement: convert it to int32_t.
+ * Statuses: null pointer, out of range (kind; text that is partial or wrong), overflow (argument 1: the quantity is
+ * outside its range), zero (aperture). fieldstop_entry_check tells where and why.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_entry_read(const char *text,
+                                      uint16_t text_length,
+                                      uint8_t kind,
+                                      uint32_t aperture_um,
+                                      const struct fieldstop_text_style *style,
+                                      uint32_t *quantity);
+
+/**
+ * Tells whether what a person has typed so far is complete, partial or wrong, with the reason and the place.
+ *
+ * The entry is read as by fieldstop_entry_read; that it is partial or wrong is a successful answer.
+ * Every beginning of a complete entry is complete or partial.
+ * Ranges: text, text_length, kind, aperture_um and style as there. Statuses: null pointer, out of range (kind).
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_entry_check(const char *text,
+                                       uint16_t text_length,
+                                       uint8_t kind,
+                                       uint32_t aperture_um,
+                                       const struct fieldstop_text_style *style,
+                                       struct fieldstop_entry_state *check);
 
 #ifdef __cplusplus
 } /* extern "C" */

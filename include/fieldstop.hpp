@@ -69,10 +69,20 @@ enum class cause_number : uint8_t {
     not_finite = FIELDSTOP_NOT_FINITE,
     /** the result does not fit its type */
     overflow = FIELDSTOP_OVERFLOW,
-    /** the text does not fit its width or buffer */
+    /** it does not fit its width or buffer */
     no_room = FIELDSTOP_NO_ROOM,
     /** not defined or not known here */
     undefined = FIELDSTOP_UNDEFINED,
+    /** never reached: a star or a place of the sky that never comes to what was asked about */
+    never_reached = FIELDSTOP_NEVER_REACHED,
+    /** never left: a star or a place of the sky that stays in what was asked about, all around the pole */
+    never_left = FIELDSTOP_NEVER_LEFT,
+    /** there is no good record */
+    no_record = FIELDSTOP_NO_RECORD,
+    /** the record is of a newer version */
+    newer_record = FIELDSTOP_NEWER_RECORD,
+    /** the storage could not be read or written */
+    storage = FIELDSTOP_STORAGE,
 };
 
 class FIELDSTOP_CHECKED_TYPE status {
@@ -117,7 +127,7 @@ private:
     {
     }
     /** What C is to fill. */
-    FIELDSTOP_INLINE explicit result(const access &) {}
+    FIELDSTOP_INLINE explicit result(const access &blank) : value_(blank) {}
     value_type value_;
     fieldstop_status number_;
 };
@@ -620,6 +630,28 @@ constexpr uint32_t two_mirror_length_share = FIELDSTOP_TWO_MIRROR_LENGTH_SHARE;
 constexpr uint32_t two_mirror_all = FIELDSTOP_TWO_MIRROR_ALL;
 /** Two mirror readout, fact: the secondary is wider than the obstruction that the telescope tells (geometry) */
 constexpr uint32_t two_mirror_fact_wider_than_told = FIELDSTOP_TWO_MIRROR_FACT_WIDER_THAN_TOLD;
+/** Kind of entry: telescopes, up to 4 in a record */
+constexpr uint8_t kind_telescope = FIELDSTOP_KIND_TELESCOPE;
+/** Kind of entry: eyepieces, up to 16 in a record */
+constexpr uint8_t kind_eyepiece = FIELDSTOP_KIND_EYEPIECE;
+/** Kind of entry: Barlows and reducers, up to 8 in a record */
+constexpr uint8_t kind_amplifier = FIELDSTOP_KIND_AMPLIFIER;
+/** Kind of entry: cameras, up to 4 in a record */
+constexpr uint8_t kind_camera = FIELDSTOP_KIND_CAMERA;
+/** Kind of entry: observers, up to 4 in a record */
+constexpr uint8_t kind_observer = FIELDSTOP_KIND_OBSERVER;
+/** Kind of entry: sites, up to 4 in a record */
+constexpr uint8_t kind_site = FIELDSTOP_KIND_SITE;
+/** In use: none of that kind */
+constexpr uint8_t none_in_use = FIELDSTOP_NONE_IN_USE;
+/** Bytes of a record without entries */
+constexpr uint16_t record_least = FIELDSTOP_RECORD_LEAST;
+/** Bytes of the longest record */
+constexpr uint16_t record_most = FIELDSTOP_RECORD_MOST;
+/** Saving: refuse where there is a good record of a newer version */
+constexpr uint8_t keep_newer = FIELDSTOP_KEEP_NEWER;
+/** Saving: save over a good record of a newer version */
+constexpr uint8_t replace_newer = FIELDSTOP_REPLACE_NEWER;
 /** Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on */
 constexpr uint8_t angle_by_size = FIELDSTOP_ANGLE_BY_SIZE;
 /** Angle: degrees with decimals */
@@ -806,6 +838,60 @@ constexpr uint8_t two_mirror_row_length = FIELDSTOP_TWO_MIRROR_ROW_LENGTH;
 constexpr uint8_t two_mirror_row_length_share = FIELDSTOP_TWO_MIRROR_ROW_LENGTH_SHARE;
 /** Two-mirror row: wider than told */
 constexpr uint8_t two_mirror_row_wider_than_told = FIELDSTOP_TWO_MIRROR_ROW_WIDER_THAN_TOLD;
+/** Entry: micrometres; a bare number is in mm; units m cm mm um nm in */
+constexpr uint8_t entry_length = FIELDSTOP_ENTRY_LENGTH;
+/** Entry: the same, and f/ in front of a focal ratio, which is multiplied by the aperture */
+constexpr uint8_t entry_focal_length = FIELDSTOP_ENTRY_FOCAL_LENGTH;
+/** Entry: nanometres; a bare number is in um; units as for a length */
+constexpr uint8_t entry_pixel_pitch = FIELDSTOP_ENTRY_PIXEL_PITCH;
+/** Entry: nanometres; a bare number is in nm; units as for a length */
+constexpr uint8_t entry_wavelength = FIELDSTOP_ENTRY_WAVELENGTH;
+/** Entry: milliarcseconds; a bare number is in degrees; units d deg, ' arcmin, " arcsec */
+constexpr uint8_t entry_angle = FIELDSTOP_ENTRY_ANGLE;
+/** Entry: microarcseconds; a bare number is in seconds of arc; units as for an angle */
+constexpr uint8_t entry_small_angle = FIELDSTOP_ENTRY_SMALL_ANGLE;
+/** Entry: Q16.16; no unit */
+constexpr uint8_t entry_ratio = FIELDSTOP_ENTRY_RATIO;
+/** Entry: Q16.16; f/ may stand in front */
+constexpr uint8_t entry_focal_ratio = FIELDSTOP_ENTRY_FOCAL_RATIO;
+/** Entry: Q16.16; x may stand behind */
+constexpr uint8_t entry_magnification = FIELDSTOP_ENTRY_MAGNIFICATION;
+/** Entry: Q16.16, 65536 for a hundred per cent; % may stand behind */
+constexpr uint8_t entry_percent = FIELDSTOP_ENTRY_PERCENT;
+/** Entry: millimagnitudes as int32_t; mag may stand behind */
+constexpr uint8_t entry_magnitude = FIELDSTOP_ENTRY_MAGNITUDE;
+/** Entry: binary angle as int32_t, a quarter turn at most; a bare number is in degrees; a sign, or N or S behind */
+constexpr uint8_t entry_latitude = FIELDSTOP_ENTRY_LATITUDE;
+/** Entry: binary angle, positive east; under 360 degrees, or 180 at most with a sign, or E or W behind */
+constexpr uint8_t entry_longitude = FIELDSTOP_ENTRY_LONGITUDE;
+/** Entry: binary angle as int32_t, a quarter turn at most; a bare number is in degrees */
+constexpr uint8_t entry_declination = FIELDSTOP_ENTRY_DECLINATION;
+/** Entry: binary angle under a turn; a bare number is in hours; units h m s, or those of an angle */
+constexpr uint8_t entry_right_ascension = FIELDSTOP_ENTRY_RIGHT_ASCENSION;
+/** Entry: milliseconds of a day, under 86400000; a bare number is in hours; units h m s */
+constexpr uint8_t entry_time_of_day = FIELDSTOP_ENTRY_TIME_OF_DAY;
+/** Entry: milliseconds; a bare number is in seconds; units h m s */
+constexpr uint8_t entry_duration = FIELDSTOP_ENTRY_DURATION;
+/** Entry: an integer; px or steps may stand behind */
+constexpr uint8_t entry_count = FIELDSTOP_ENTRY_COUNT;
+/** State of an entry: it gives a quantity */
+constexpr uint8_t entry_complete = FIELDSTOP_ENTRY_COMPLETE;
+/** State of an entry: it gives none yet; more characters can make it right */
+constexpr uint8_t entry_partial = FIELDSTOP_ENTRY_PARTIAL;
+/** State of an entry: it gives none, whatever follows */
+constexpr uint8_t entry_wrong = FIELDSTOP_ENTRY_WRONG;
+/** Reason: none, for it is complete */
+constexpr uint8_t entry_fine = FIELDSTOP_ENTRY_FINE;
+/** Reason: it ends where more must come */
+constexpr uint8_t entry_ended = FIELDSTOP_ENTRY_ENDED;
+/** Reason: no entry has this byte here */
+constexpr uint8_t entry_unexpected = FIELDSTOP_ENTRY_UNEXPECTED;
+/** Reason: the quantity is outside its range */
+constexpr uint8_t entry_too_large = FIELDSTOP_ENTRY_TOO_LARGE;
+/** Reason: minutes or seconds of 60 or more behind a greater unit */
+constexpr uint8_t entry_sixty = FIELDSTOP_ENTRY_SIXTY;
+/** Reason: a focal ratio where the aperture is not known */
+constexpr uint8_t entry_no_aperture = FIELDSTOP_ENTRY_NO_APERTURE;
 
 /** A telescope: objective or primary mirror, with the Barlow or reducer that is in use */
 class telescope {
@@ -846,6 +932,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<telescope>;
+    FIELDSTOP_INLINE explicit telescope(const access &) {}
     ::fieldstop_telescope raw_;
 };
 static_assert(sizeof(telescope) == sizeof(::fieldstop_telescope), "no more than in C");
@@ -883,6 +972,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<eyepiece>;
+    FIELDSTOP_INLINE explicit eyepiece(const access &) {}
     ::fieldstop_eyepiece raw_;
 };
 static_assert(sizeof(eyepiece) == sizeof(::fieldstop_eyepiece), "no more than in C");
@@ -920,6 +1012,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<camera>;
+    FIELDSTOP_INLINE explicit camera(const access &) {}
     ::fieldstop_camera raw_;
 };
 static_assert(sizeof(camera) == sizeof(::fieldstop_camera), "no more than in C");
@@ -963,9 +1058,40 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<observer>;
+    FIELDSTOP_INLINE explicit observer(const access &) {}
     ::fieldstop_observer raw_;
 };
 static_assert(sizeof(observer) == sizeof(::fieldstop_observer), "no more than in C");
+
+/** A place to observe from */
+class site {
+public:
+    /** Every member 0. */
+    FIELDSTOP_INLINE constexpr site() : raw_() {}
+    FIELDSTOP_INLINE constexpr explicit site(const ::fieldstop_site &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_site &c() const { return raw_; }
+    /** Latitude, north positive, binary angle; within a quarter turn (2^30) either way */
+    FIELDSTOP_INLINE constexpr signed_binary_angle latitude() const { return signed_binary_angle(raw_.latitude_bam); }
+    FIELDSTOP_INLINE constexpr site with_latitude(signed_binary_angle latitude_bam) const
+    {
+        return site(::fieldstop_site{latitude_bam.count(), raw_.longitude_bam});
+    }
+    /** Longitude, counted toward the east, binary angle; any value */
+    FIELDSTOP_INLINE constexpr binary_angle longitude() const { return binary_angle(raw_.longitude_bam); }
+    FIELDSTOP_INLINE constexpr site with_longitude(binary_angle longitude_bam) const
+    {
+        return site(::fieldstop_site{raw_.latitude_bam, longitude_bam.count()});
+    }
+
+private:
+    friend struct access;
+    friend class result<site>;
+    FIELDSTOP_INLINE explicit site(const access &) {}
+    ::fieldstop_site raw_;
+};
+static_assert(sizeof(site) == sizeof(::fieldstop_site), "no more than in C");
 
 /** What the eye gets at the eyepiece */
 class visual_readout;
@@ -1042,9 +1168,10 @@ public:
     }
 
 private:
+    visual_readout() = default;
     friend struct access;
     friend class result<visual_readout>;
-    visual_readout() = default;
+    FIELDSTOP_INLINE explicit visual_readout(const access &) {}
     ::fieldstop_visual_readout raw_;
 };
 static_assert(sizeof(visual_readout) == sizeof(::fieldstop_visual_readout), "no more than in C");
@@ -1124,9 +1251,10 @@ public:
     }
 
 private:
+    camera_readout() = default;
     friend struct access;
     friend class result<camera_readout>;
-    camera_readout() = default;
+    FIELDSTOP_INLINE explicit camera_readout(const access &) {}
     ::fieldstop_camera_readout raw_;
 };
 static_assert(sizeof(camera_readout) == sizeof(::fieldstop_camera_readout), "no more than in C");
@@ -1170,6 +1298,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<visual_target>;
+    FIELDSTOP_INLINE explicit visual_target(const access &) {}
     ::fieldstop_visual_target raw_;
 };
 static_assert(sizeof(visual_target) == sizeof(::fieldstop_visual_target), "no more than in C");
@@ -1215,9 +1346,10 @@ public:
     FIELDSTOP_INLINE constexpr uint8_t standing() const { return raw_.standing; }
 
 private:
+    visual_choice() = default;
     friend struct access;
     friend class result<visual_choice>;
-    visual_choice() = default;
+    FIELDSTOP_INLINE explicit visual_choice(const access &) {}
     ::fieldstop_visual_choice raw_;
 };
 static_assert(sizeof(visual_choice) == sizeof(::fieldstop_visual_choice), "no more than in C");
@@ -1249,6 +1381,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<camera_target>;
+    FIELDSTOP_INLINE explicit camera_target(const access &) {}
     ::fieldstop_camera_target raw_;
 };
 static_assert(sizeof(camera_target) == sizeof(::fieldstop_camera_target), "no more than in C");
@@ -1296,9 +1431,10 @@ public:
     FIELDSTOP_INLINE constexpr uint8_t amplifier() const { return raw_.amplifier; }
 
 private:
+    camera_choice() = default;
     friend struct access;
     friend class result<camera_choice>;
-    camera_choice() = default;
+    FIELDSTOP_INLINE explicit camera_choice(const access &) {}
     ::fieldstop_camera_choice raw_;
 };
 static_assert(sizeof(camera_choice) == sizeof(::fieldstop_camera_choice), "no more than in C");
@@ -1372,6 +1508,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<newtonian_layout>;
+    FIELDSTOP_INLINE explicit newtonian_layout(const access &) {}
     ::fieldstop_newtonian_layout raw_;
 };
 static_assert(sizeof(newtonian_layout) == sizeof(::fieldstop_newtonian_layout), "no more than in C");
@@ -1403,6 +1542,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<two_mirror_layout>;
+    FIELDSTOP_INLINE explicit two_mirror_layout(const access &) {}
     ::fieldstop_two_mirror_layout raw_;
 };
 static_assert(sizeof(two_mirror_layout) == sizeof(::fieldstop_two_mirror_layout), "no more than in C");
@@ -1440,6 +1582,9 @@ public:
     }
 
 private:
+    friend struct access;
+    friend class result<focuser>;
+    FIELDSTOP_INLINE explicit focuser(const access &) {}
     ::fieldstop_focuser raw_;
 };
 static_assert(sizeof(focuser) == sizeof(::fieldstop_focuser), "no more than in C");
@@ -1494,9 +1639,10 @@ public:
     }
 
 private:
+    focus_readout() = default;
     friend struct access;
     friend class result<focus_readout>;
-    focus_readout() = default;
+    FIELDSTOP_INLINE explicit focus_readout(const access &) {}
     ::fieldstop_focus_readout raw_;
 };
 static_assert(sizeof(focus_readout) == sizeof(::fieldstop_focus_readout), "no more than in C");
@@ -1556,9 +1702,10 @@ public:
     }
 
 private:
+    newtonian_readout() = default;
     friend struct access;
     friend class result<newtonian_readout>;
-    newtonian_readout() = default;
+    FIELDSTOP_INLINE explicit newtonian_readout(const access &) {}
     ::fieldstop_newtonian_readout raw_;
 };
 static_assert(sizeof(newtonian_readout) == sizeof(::fieldstop_newtonian_readout), "no more than in C");
@@ -1613,18 +1760,31 @@ public:
     }
 
 private:
+    two_mirror_readout() = default;
     friend struct access;
     friend class result<two_mirror_readout>;
-    two_mirror_readout() = default;
+    FIELDSTOP_INLINE explicit two_mirror_readout(const access &) {}
     ::fieldstop_two_mirror_readout raw_;
 };
 static_assert(sizeof(two_mirror_readout) == sizeof(::fieldstop_two_mirror_readout), "no more than in C");
+
+/** What the owner calls a piece of equipment: up to 12 bytes in the characters of the owner's display */
+typedef ::fieldstop_equipment_name equipment_name;
+
+/** Which entry of each kind is in use: its index, or 255 for none */
+typedef ::fieldstop_in_use in_use;
+
+/** Two places for a record in a storage */
+typedef ::fieldstop_slot_pair slot_pair;
 
 /** The look of all text */
 typedef ::fieldstop_text_style text_style;
 
 /** A part of a line, in characters */
 typedef ::fieldstop_span span;
+
+/** What an entry is worth */
+typedef ::fieldstop_entry_state entry_state;
 /* What can go wrong. The numbers are frozen: they are the `fieldstop_status` of the C interface. */
 
 /** Gives a static English sentence for the cause in a status; never null. */
@@ -3669,6 +3829,12 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE status observer_check(const observer &observe
     return status(::fieldstop_observer_check(&observer.c()));
 }
 
+/** Gives 0 for a site that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in the place of the argument. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status site_check(const site &site)
+{
+    return status(::fieldstop_site_check(&site.c()));
+}
+
 /** Gives what the eye gets at the eyepiece: the wanted values, each in the unit of its name, and the facts about them. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<visual_readout> visual_readout_compute(const telescope &telescope, const eyepiece &eyepiece, const observer &observer, uint32_t wanted)
 {
@@ -3731,6 +3897,168 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<two_mirror_readout> two_mirror_readout
     result<two_mirror_readout> given = access::blank<two_mirror_readout>();
     access::finish(given, ::fieldstop_two_mirror_readout_compute(&telescope.c(), &layout.c(), wanted, access::place(given)));
     return given;
+}
+
+/* The stored record: equipment, observers and sites with their names, as bytes in EEPROM or flash. */
+
+/** Makes a record without entries of the buffer's first 28 bytes, and gives 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_begin(uint8_t *record, uint16_t capacity)
+{
+    return status(::fieldstop_record_begin(record, capacity));
+}
+
+/** Gives 0 for a good record at the front of these bytes: its checksum is right and its equipment passes the checks. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_check(const uint8_t *record, uint16_t length)
+{
+    return status(::fieldstop_record_check(record, length));
+}
+
+/** Gives the record's own length in bytes, out of its header. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> record_get_length(const uint8_t *record, uint16_t length)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_record_get_length(record, length, &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Gives how many entries of a kind there are. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint8_t> record_get_count(const uint8_t *record, uint16_t length, uint8_t kind)
+{
+    uint8_t given;
+    const fieldstop_status number = ::fieldstop_record_get_count(record, length, kind, &given);
+    return access::given<uint8_t>(number, given);
+}
+
+/** Gives the name of an entry. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<equipment_name> record_get_name(const uint8_t *record, uint16_t length, uint8_t kind, uint8_t index)
+{
+    fieldstop_equipment_name given;
+    const fieldstop_status number = ::fieldstop_record_get_name(record, length, kind, index, &given);
+    return access::given<equipment_name>(number, given);
+}
+
+/** Gives which entries are in use. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<in_use> record_get_in_use(const uint8_t *record, uint16_t length)
+{
+    fieldstop_in_use given;
+    const fieldstop_status number = ::fieldstop_record_get_in_use(record, length, &given);
+    return access::given<in_use>(number, given);
+}
+
+/** Gives a telescope, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<telescope> record_get_telescope(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<telescope> given = access::blank<telescope>();
+    access::finish(given, ::fieldstop_record_get_telescope(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Gives an eyepiece, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<eyepiece> record_get_eyepiece(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<eyepiece> given = access::blank<eyepiece>();
+    access::finish(given, ::fieldstop_record_get_eyepiece(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Gives what a Barlow or reducer multiplies the focal length by, Q16.16, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<q16> record_get_amplifier(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_record_get_amplifier(record, length, index, &given);
+    return access::given<q16>(number, given);
+}
+
+/** Gives a camera, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<camera> record_get_camera(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<camera> given = access::blank<camera>();
+    access::finish(given, ::fieldstop_record_get_camera(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Gives an observer, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<observer> record_get_observer(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<observer> given = access::blank<observer>();
+    access::finish(given, ::fieldstop_record_get_observer(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Gives a site, of a record. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<site> record_get_site(const uint8_t *record, uint16_t length, uint8_t index)
+{
+    result<site> given = access::blank<site>();
+    access::finish(given, ::fieldstop_record_get_site(record, length, index, access::place(given)));
+    return given;
+}
+
+/** Puts a telescope and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_telescope(uint8_t *record, uint16_t capacity, uint8_t index, const telescope &telescope, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_telescope(record, capacity, index, &telescope.c(), &name));
+}
+
+/** Puts an eyepiece and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_eyepiece(uint8_t *record, uint16_t capacity, uint8_t index, const eyepiece &eyepiece, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_eyepiece(record, capacity, index, &eyepiece.c(), &name));
+}
+
+/** Puts a Barlow or reducer and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_amplifier(uint8_t *record, uint16_t capacity, uint8_t index, q16 amplification_q16, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_amplifier(record, capacity, index, amplification_q16.count(), &name));
+}
+
+/** Puts a camera and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_camera(uint8_t *record, uint16_t capacity, uint8_t index, const camera &camera, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_camera(record, capacity, index, &camera.c(), &name));
+}
+
+/** Puts an observer and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_observer(uint8_t *record, uint16_t capacity, uint8_t index, const observer &observer, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_observer(record, capacity, index, &observer.c(), &name));
+}
+
+/** Puts a site and its name into a record, and gives 0: in place of the one of that index, or one more where the index is their number. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_site(uint8_t *record, uint16_t capacity, uint8_t index, const site &site, const equipment_name &name)
+{
+    return status(::fieldstop_record_put_site(record, capacity, index, &site.c(), &name));
+}
+
+/** Says which entries are in use, and gives 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_put_in_use(uint8_t *record, uint16_t capacity, const in_use &used)
+{
+    return status(::fieldstop_record_put_in_use(record, capacity, &used));
+}
+
+/** Takes an entry out of a record, and gives 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status record_remove(uint8_t *record, uint16_t capacity, uint8_t kind, uint8_t index)
+{
+    return status(::fieldstop_record_remove(record, capacity, kind, index));
+}
+
+/** Gives 0 for a slot pair that can be used; otherwise the cause, with the number of the first bad member, counted from 1, in the place of the argument. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status slot_pair_check(const slot_pair &places)
+{
+    return status(::fieldstop_slot_pair_check(&places));
+}
+
+/** Reads the last good record into the buffer, and gives its length in bytes. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> store_load(const slot_pair &places, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_store_load(&places, read, context, record, capacity, &given);
+    return access::given<uint16_t>(number, given);
+}
+
+/** Saves a record into the slot that does not have the last good one, and gives 0. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status store_save(const slot_pair &places, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
+{
+    return status(::fieldstop_store_save(&places, read, write, erase, context, record, capacity, newer));
 }
 
 /* Quantities as characters of a display: integers only, into a buffer of the caller's. */
@@ -4093,6 +4421,24 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_two_mirror_unit(const t
     uint16_t given;
     const fieldstop_status number = ::fieldstop_text_two_mirror_unit(&readout.c(), row, &style, text.text(), text.capacity(), &given);
     return access::given<uint16_t>(number, given);
+}
+
+/* What a person types on a keypad or sends over a line, back to a quantity: integers only, correctly rounded. */
+
+/** Reads what a person typed as a quantity, in the integer unit of its kind. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint32_t> entry_read(const char *text, uint16_t text_length, uint8_t kind, micrometres aperture_um, const text_style &style)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_entry_read(text, text_length, kind, aperture_um.count(), &style, &given);
+    return access::given<uint32_t>(number, given);
+}
+
+/** Tells whether what a person has typed so far is complete, partial or wrong, with the reason and the place. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<entry_state> entry_check(const char *text, uint16_t text_length, uint8_t kind, micrometres aperture_um, const text_style &style)
+{
+    fieldstop_entry_state given;
+    const fieldstop_status number = ::fieldstop_entry_check(text, text_length, kind, aperture_um.count(), &style, &given);
+    return access::given<entry_state>(number, given);
 }
 } // namespace fieldstop
 

@@ -449,7 +449,7 @@ mod c {
         assert_eq!(call("1", 18, 0), (0x303, 77));
         assert_eq!(call("f/8", 1, 0), (0x402, 77));
         assert_eq!(call("f/8", 1, 100_000), (0, 800_000));
-        let mut check = EntryCheck { quantity: 1, position: 2, state: 3, reason: 4 };
+        let mut check = EntryState { quantity: 1, position: 2, state: 3, reason: 4 };
         let before = check;
         unsafe {
             let text = b"1".as_ptr().cast();
@@ -468,7 +468,7 @@ mod c {
     fn the_same_as_in_rust() {
         for text in ["1.5", "1.", "f/8", "f/", "1d60'", "5000 m", "", "13:10:46", "5q"] {
             for kind in EntryKind::ALL {
-                let mut check = EntryCheck { quantity: 1, position: 2, state: 3, reason: 4 };
+                let mut check = EntryState { quantity: 1, position: 2, state: 3, reason: 4 };
                 let length = text.len() as u16;
                 let status = unsafe {
                     fieldstop_entry_check(
@@ -482,8 +482,8 @@ mod c {
                 };
                 assert_eq!(status, 0);
                 let expected = match read_entry(text.as_bytes(), kind, 0, &TextStyle::ASCII) {
-                    Ok(quantity) => EntryCheck { quantity, position: length, state: 0, reason: 0 },
-                    Err(EntryError { reason, at, partial }) => EntryCheck {
+                    Ok(quantity) => EntryState { quantity, position: length, state: 0, reason: 0 },
+                    Err(EntryError { reason, at, partial }) => EntryState {
                         quantity: 0,
                         position: at as u16,
                         state: if partial { 1 } else { 2 },

@@ -66,7 +66,7 @@ pub const FIELDSTOP_ENTRY_NO_APERTURE: u8 = 5;
 /// What an entry is worth.
 #[derive(Clone, Copy, Debug, Default, PartialEq, Eq)]
 #[repr(C)]
-pub struct EntryCheck {
+pub struct EntryState {
     /// The quantity in the unit of its kind, where the entry is complete; else 0.
     pub quantity: u32,
     /// The byte, counted from 0, that the reason is about; where it is complete or more must come, the length.
@@ -78,7 +78,7 @@ pub struct EntryCheck {
 }
 
 // C sees this layout on every target: any other does not compile.
-const _: () = assert!(size_of::<EntryCheck>() == 8 && core::mem::offset_of!(EntryCheck, state) == 6);
+const _: () = assert!(size_of::<EntryState>() == 8 && core::mem::offset_of!(EntryState, state) == 6);
 
 /// Reads what a person typed as a quantity, in the integer unit of its kind.
 ///
@@ -89,7 +89,7 @@ const _: () = assert!(size_of::<EntryCheck>() == 8 && core::mem::offset_of!(Entr
 /// a place or a time of day they may be separated by colons.
 /// Rounding: to nearest, halves away from zero, exact for any count of decimals. What is 24 hours or 360 degrees only
 /// when rounded is 0.
-/// Ranges: kind one of FIELDSTOP_ENTRY_LENGTH and those behind it; aperture_um 0 where it is not known (only a focal
+/// Ranges: text_length in bytes, any; kind one of FIELDSTOP_ENTRY_LENGTH and those behind it; aperture_um 0 where it is not known (only a focal
 /// ratio as FIELDSTOP_ENTRY_FOCAL_LENGTH needs it). A signed quantity is in two's complement: convert it to int32_t.
 /// Statuses: null pointer, out of range (kind; text that is partial or wrong), overflow (argument 1: the quantity is
 /// outside its range), zero (aperture). fieldstop_entry_check tells where and why.
@@ -127,7 +127,7 @@ pub unsafe extern "C" fn fieldstop_entry_read(
 ///
 /// The entry is read as by fieldstop_entry_read; that it is partial or wrong is a successful answer.
 /// Every beginning of a complete entry is complete or partial.
-/// Ranges: as there. Statuses: null pointer, out of range (kind).
+/// Ranges: text, text_length, kind, aperture_um and style as there. Statuses: null pointer, out of range (kind).
 #[must_use]
 #[unsafe(no_mangle)]
 pub unsafe extern "C" fn fieldstop_entry_check(
@@ -136,7 +136,7 @@ pub unsafe extern "C" fn fieldstop_entry_check(
     kind: u8,
     aperture_um: u32,
     style: *const TextStyle,
-    check: *mut EntryCheck,
+    check: *mut EntryState,
 ) -> fieldstop_status {
     if check.is_null() && !text.is_null() && !style.is_null() {
         return Error::new(Cause::NullPointer, 6).status();
@@ -144,8 +144,8 @@ pub unsafe extern "C" fn fieldstop_entry_check(
     // SAFETY: the caller's promise about the pointers.
     let answer = match unsafe { read(text, text_length, kind, aperture_um, style) } {
         Err(error) => return error.status(),
-        Ok(Ok(quantity)) => EntryCheck { quantity, position: text_length, state: 0, reason: 0 },
-        Ok(Err(error)) => EntryCheck {
+        Ok(Ok(quantity)) => EntryState { quantity, position: text_length, state: 0, reason: 0 },
+        Ok(Err(error)) => EntryState {
             quantity: 0,
             position: error.at as u16,
             state: if error.partial { FIELDSTOP_ENTRY_PARTIAL } else { FIELDSTOP_ENTRY_WRONG },

@@ -452,10 +452,10 @@ pub unsafe extern "C" fn fieldstop_record_put_eyepiece(
     unsafe { put(record, capacity, index, eyepiece, name) }
 }
 
-/// Puts a Barlow or reducer, by what it multiplies the focal length by (Q16.16, not 0), and its name into a record, and gives 0: in place of the one of that index, or one more where the
-/// index is their number.
+/// Puts a Barlow or reducer and its name into a record, and gives 0: in place of the one of that index, or one more where
+/// the index is their number.
 ///
-/// capacity: the buffer's bytes. On any status but 0 nothing is changed.
+/// amplification_q16: what it multiplies the focal length by, not 0. capacity: the buffer's bytes. On any status but 0 nothing is changed.
 /// Statuses: null pointer; no record, newer record (1); out of range (3): a greater index, or no more of them in a
 /// record; zero (4); out of range (5): a name with bytes behind a zero; no room (2).
 #[must_use]
@@ -586,7 +586,8 @@ pub unsafe extern "C" fn fieldstop_slot_pair_check(places: *const SlotPair) -> f
 
 /// Reads the last good record into the buffer, and gives its length in bytes.
 ///
-/// capacity: the buffer's bytes; one of FIELDSTOP_RECORD_MOST takes every record. context: given to read as it is, and
+/// places: the two slots, as fieldstop_slot_pair_check has them. capacity: the buffer's bytes; one of
+/// FIELDSTOP_RECORD_MOST takes every record. context: given to read as it is, and
 /// may be null.
 /// Statuses: null pointer (1, 2, 4, 6); out of range (1): fieldstop_slot_pair_check names the member; no record: neither slot
 /// has a good one; newer record: the last good one is of a version that this library cannot read; no room (5); storage:
@@ -625,7 +626,7 @@ pub unsafe extern "C" fn fieldstop_store_load(
 /// Saves a record into the slot that does not have the last good one, and gives 0. Wherever the power fails, loading
 /// gives the record before or this one, whole.
 ///
-/// capacity: bytes that may be read; more may follow the record. read, write and erase must be those of one storage;
+/// places: the two slots, as fieldstop_slot_pair_check has them. capacity: bytes that may be read; more may follow the record. read, write and erase must be those of one storage;
 /// erase is null where bytes can be written over as they are (EEPROM, FRAM). context: given to them as it is, and may be
 /// null. newer: FIELDSTOP_KEEP_NEWER or FIELDSTOP_REPLACE_NEWER.
 /// Statuses: null pointer (1, 2, 3, 6); out of range (1): fieldstop_slot_pair_check names the member; no record, newer

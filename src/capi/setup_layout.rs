@@ -143,7 +143,7 @@ pub unsafe extern "C" fn fieldstop_two_mirror_layout_check(
 /// Gives how exact the focus must be and what it costs to be off: the wanted values, each in the unit of its name,
 /// and the facts about them.
 ///
-/// wanted: any of the FIELDSTOP_FOCUS_ bits; only those values are computed, and unknown bits are ignored.
+/// focuser: any values. wanted: any of the FIELDSTOP_FOCUS_ bits; only those values are computed, and unknown bits are ignored.
 /// Formulas: beside each member of the readout; a value is exactly that of the fixed function of the formula.
 /// A value that rests on something unknown (motor step, tube, expansion) or that does not fit its type is not
 /// available: its bit in `available` is clear and its member 0. The rest still comes.

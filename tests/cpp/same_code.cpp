@@ -4168,6 +4168,15 @@ fieldstop_status typed_observer_check(const fieldstop::observer *observer)
     return fieldstop::observer_check(*observer).number();
 }
 
+fieldstop_status plain_site_check(const fieldstop::site *site)
+{
+    return ::fieldstop_site_check(&site->c());
+}
+fieldstop_status typed_site_check(const fieldstop::site *site)
+{
+    return fieldstop::site_check(*site).number();
+}
+
 fieldstop_status plain_filled_visual_readout_compute(const fieldstop::telescope *telescope, const fieldstop::eyepiece *eyepiece, const fieldstop::observer *observer, uint32_t wanted, struct fieldstop_visual_readout *out)
 {
     struct fieldstop_visual_readout given;
@@ -4274,6 +4283,312 @@ fieldstop_status typed_filled_two_mirror_readout_compute(const fieldstop::telesc
         *out = given.value().c();
     }
     return given.status().number();
+}
+
+fieldstop_status plain_record_begin(uint8_t *record, uint16_t capacity)
+{
+    return ::fieldstop_record_begin(record, capacity);
+}
+fieldstop_status typed_record_begin(uint8_t *record, uint16_t capacity)
+{
+    return fieldstop::record_begin(record, capacity).number();
+}
+
+fieldstop_status plain_record_check(const uint8_t *record, uint16_t length)
+{
+    return ::fieldstop_record_check(record, length);
+}
+fieldstop_status typed_record_check(const uint8_t *record, uint16_t length)
+{
+    return fieldstop::record_check(record, length).number();
+}
+
+fieldstop_status plain_record_get_length(const uint8_t *record, uint16_t length, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_record_get_length(record, length, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_record_get_length(const uint8_t *record, uint16_t length, uint16_t *out)
+{
+    const auto given = fieldstop::record_get_length(record, length);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_record_get_count(const uint8_t *record, uint16_t length, uint8_t kind, uint8_t *out)
+{
+    uint8_t given;
+    const fieldstop_status number = ::fieldstop_record_get_count(record, length, kind, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_record_get_count(const uint8_t *record, uint16_t length, uint8_t kind, uint8_t *out)
+{
+    const auto given = fieldstop::record_get_count(record, length, kind);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_record_get_name(const uint8_t *record, uint16_t length, uint8_t kind, uint8_t index, struct fieldstop_equipment_name *out)
+{
+    struct fieldstop_equipment_name given;
+    const fieldstop_status number = ::fieldstop_record_get_name(record, length, kind, index, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_record_get_name(const uint8_t *record, uint16_t length, uint8_t kind, uint8_t index, struct fieldstop_equipment_name *out)
+{
+    const auto given = fieldstop::record_get_name(record, length, kind, index);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_record_get_in_use(const uint8_t *record, uint16_t length, struct fieldstop_in_use *out)
+{
+    struct fieldstop_in_use given;
+    const fieldstop_status number = ::fieldstop_record_get_in_use(record, length, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_record_get_in_use(const uint8_t *record, uint16_t length, struct fieldstop_in_use *out)
+{
+    const auto given = fieldstop::record_get_in_use(record, length);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_record_get_telescope(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_telescope *out)
+{
+    struct fieldstop_telescope given;
+    const fieldstop_status number = ::fieldstop_record_get_telescope(record, length, index, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_record_get_telescope(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_telescope *out)
+{
+    const auto given = fieldstop::record_get_telescope(record, length, index);
+    if (given) {
+        *out = given.value().c();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_record_get_eyepiece(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_eyepiece *out)
+{
+    struct fieldstop_eyepiece given;
+    const fieldstop_status number = ::fieldstop_record_get_eyepiece(record, length, index, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_record_get_eyepiece(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_eyepiece *out)
+{
+    const auto given = fieldstop::record_get_eyepiece(record, length, index);
+    if (given) {
+        *out = given.value().c();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_record_get_amplifier(const uint8_t *record, uint16_t length, uint8_t index, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_record_get_amplifier(record, length, index, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_record_get_amplifier(const uint8_t *record, uint16_t length, uint8_t index, uint32_t *out)
+{
+    const auto given = fieldstop::record_get_amplifier(record, length, index);
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_record_get_camera(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_camera *out)
+{
+    struct fieldstop_camera given;
+    const fieldstop_status number = ::fieldstop_record_get_camera(record, length, index, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_record_get_camera(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_camera *out)
+{
+    const auto given = fieldstop::record_get_camera(record, length, index);
+    if (given) {
+        *out = given.value().c();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_record_get_observer(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_observer *out)
+{
+    struct fieldstop_observer given;
+    const fieldstop_status number = ::fieldstop_record_get_observer(record, length, index, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_record_get_observer(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_observer *out)
+{
+    const auto given = fieldstop::record_get_observer(record, length, index);
+    if (given) {
+        *out = given.value().c();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_record_get_site(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_site *out)
+{
+    struct fieldstop_site given;
+    const fieldstop_status number = ::fieldstop_record_get_site(record, length, index, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_record_get_site(const uint8_t *record, uint16_t length, uint8_t index, struct fieldstop_site *out)
+{
+    const auto given = fieldstop::record_get_site(record, length, index);
+    if (given) {
+        *out = given.value().c();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_record_put_telescope(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::telescope *telescope, const fieldstop::equipment_name *name)
+{
+    return ::fieldstop_record_put_telescope(record, capacity, index, &telescope->c(), name);
+}
+fieldstop_status typed_record_put_telescope(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::telescope *telescope, const fieldstop::equipment_name *name)
+{
+    return fieldstop::record_put_telescope(record, capacity, index, *telescope, *name).number();
+}
+
+fieldstop_status plain_record_put_eyepiece(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::eyepiece *eyepiece, const fieldstop::equipment_name *name)
+{
+    return ::fieldstop_record_put_eyepiece(record, capacity, index, &eyepiece->c(), name);
+}
+fieldstop_status typed_record_put_eyepiece(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::eyepiece *eyepiece, const fieldstop::equipment_name *name)
+{
+    return fieldstop::record_put_eyepiece(record, capacity, index, *eyepiece, *name).number();
+}
+
+fieldstop_status plain_record_put_amplifier(uint8_t *record, uint16_t capacity, uint8_t index, uint32_t amplification_q16, const fieldstop::equipment_name *name)
+{
+    return ::fieldstop_record_put_amplifier(record, capacity, index, amplification_q16, name);
+}
+fieldstop_status typed_record_put_amplifier(uint8_t *record, uint16_t capacity, uint8_t index, uint32_t amplification_q16, const fieldstop::equipment_name *name)
+{
+    return fieldstop::record_put_amplifier(record, capacity, index, fieldstop::q16(amplification_q16), *name).number();
+}
+
+fieldstop_status plain_record_put_camera(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::camera *camera, const fieldstop::equipment_name *name)
+{
+    return ::fieldstop_record_put_camera(record, capacity, index, &camera->c(), name);
+}
+fieldstop_status typed_record_put_camera(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::camera *camera, const fieldstop::equipment_name *name)
+{
+    return fieldstop::record_put_camera(record, capacity, index, *camera, *name).number();
+}
+
+fieldstop_status plain_record_put_observer(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::observer *observer, const fieldstop::equipment_name *name)
+{
+    return ::fieldstop_record_put_observer(record, capacity, index, &observer->c(), name);
+}
+fieldstop_status typed_record_put_observer(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::observer *observer, const fieldstop::equipment_name *name)
+{
+    return fieldstop::record_put_observer(record, capacity, index, *observer, *name).number();
+}
+
+fieldstop_status plain_record_put_site(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::site *site, const fieldstop::equipment_name *name)
+{
+    return ::fieldstop_record_put_site(record, capacity, index, &site->c(), name);
+}
+fieldstop_status typed_record_put_site(uint8_t *record, uint16_t capacity, uint8_t index, const fieldstop::site *site, const fieldstop::equipment_name *name)
+{
+    return fieldstop::record_put_site(record, capacity, index, *site, *name).number();
+}
+
+fieldstop_status plain_record_put_in_use(uint8_t *record, uint16_t capacity, const fieldstop::in_use *used)
+{
+    return ::fieldstop_record_put_in_use(record, capacity, used);
+}
+fieldstop_status typed_record_put_in_use(uint8_t *record, uint16_t capacity, const fieldstop::in_use *used)
+{
+    return fieldstop::record_put_in_use(record, capacity, *used).number();
+}
+
+fieldstop_status plain_record_remove(uint8_t *record, uint16_t capacity, uint8_t kind, uint8_t index)
+{
+    return ::fieldstop_record_remove(record, capacity, kind, index);
+}
+fieldstop_status typed_record_remove(uint8_t *record, uint16_t capacity, uint8_t kind, uint8_t index)
+{
+    return fieldstop::record_remove(record, capacity, kind, index).number();
+}
+
+fieldstop_status plain_slot_pair_check(const fieldstop::slot_pair *places)
+{
+    return ::fieldstop_slot_pair_check(places);
+}
+fieldstop_status typed_slot_pair_check(const fieldstop::slot_pair *places)
+{
+    return fieldstop::slot_pair_check(*places).number();
+}
+
+fieldstop_status plain_store_load(const fieldstop::slot_pair *places, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity, uint16_t *out)
+{
+    uint16_t given;
+    const fieldstop_status number = ::fieldstop_store_load(places, read, context, record, capacity, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_store_load(const fieldstop::slot_pair *places, fieldstop_read read, void *context, uint8_t *record, uint16_t capacity, uint16_t *out)
+{
+    const auto given = fieldstop::store_load(*places, read, context, record, capacity);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_store_save(const fieldstop::slot_pair *places, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
+{
+    return ::fieldstop_store_save(places, read, write, erase, context, record, capacity, newer);
+}
+fieldstop_status typed_store_save(const fieldstop::slot_pair *places, fieldstop_read read, fieldstop_write write, fieldstop_erase erase, void *context, const uint8_t *record, uint16_t capacity, uint8_t newer)
+{
+    return fieldstop::store_save(*places, read, write, erase, context, record, capacity, newer).number();
 }
 
 fieldstop_status plain_text_count(uint32_t count, uint8_t unit, const fieldstop::text_style *style, uint8_t width, char *text, uint16_t capacity, uint16_t *out)
@@ -4864,6 +5179,42 @@ fieldstop_status plain_text_two_mirror_unit(const fieldstop::two_mirror_readout 
 fieldstop_status typed_text_two_mirror_unit(const fieldstop::two_mirror_readout *readout, uint8_t row, const fieldstop::text_style *style, char *text, uint16_t capacity, uint16_t *out)
 {
     const auto given = fieldstop::text_two_mirror_unit(*readout, row, *style, fieldstop::buffer(text, capacity));
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_entry_read(const char *text, uint16_t text_length, uint8_t kind, uint32_t aperture_um, const fieldstop::text_style *style, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_entry_read(text, text_length, kind, aperture_um, style, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_entry_read(const char *text, uint16_t text_length, uint8_t kind, uint32_t aperture_um, const fieldstop::text_style *style, uint32_t *out)
+{
+    const auto given = fieldstop::entry_read(text, text_length, kind, fieldstop::micrometres(aperture_um), *style);
+    if (given) {
+        *out = given.value();
+    }
+    return given.status().number();
+}
+
+fieldstop_status plain_filled_entry_check(const char *text, uint16_t text_length, uint8_t kind, uint32_t aperture_um, const fieldstop::text_style *style, struct fieldstop_entry_state *out)
+{
+    struct fieldstop_entry_state given;
+    const fieldstop_status number = ::fieldstop_entry_check(text, text_length, kind, aperture_um, style, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_filled_entry_check(const char *text, uint16_t text_length, uint8_t kind, uint32_t aperture_um, const fieldstop::text_style *style, struct fieldstop_entry_state *out)
+{
+    const auto given = fieldstop::entry_check(text, text_length, kind, fieldstop::micrometres(aperture_um), *style);
     if (given) {
         *out = given.value();
     }
