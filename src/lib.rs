@@ -42,7 +42,8 @@
 //! | `capi` | the C interface (feature `capi`) |
 //! | [`text`] | a quantity as display characters, and the pages of character displays |
 //! | [`setup`] | telescope, eyepiece, camera, observer: all readouts of one screen |
-//! | [`optics`] | the formulas |
+//! | [`optics`] | the formulas of the telescope |
+//! | [`sky`] | the formulas of the sky: where things stand and how they move |
 //! | [`convert`] | conversions between the fixed units |
 //! | `math` | integer and float kernels |
 //! | [`units`] | the quantities of the fixed forms |
@@ -77,6 +78,7 @@ pub mod capi;
 mod math;
 pub mod optics;
 pub mod setup;
+pub mod sky;
 pub mod status;
 mod stored;
 pub mod text;

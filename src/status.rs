@@ -58,6 +58,10 @@ causes! {
     NoRoom = 6, "the text does not fit its width or buffer";
     /// A question without an answer, at this place or with what is known.
     Undefined = 7, "not defined or not known here";
+    /// A star or a place of the sky that never comes to what was asked about.
+    NeverReached = 8, "never reached";
+    /// A star or a place of the sky that stays in what was asked about, all around the pole.
+    NeverLeft = 9, "never left";
 }
 
 /// A refused call: the cause, and which argument is to blame.
@@ -94,6 +98,18 @@ impl Error {
     pub const fn status(self) -> u16 {
         self.0.get()
     }
+}
+
+/// Refuses a zero.
+#[inline(always)]
+pub(crate) fn present(value: u32, argument: u8) -> Result<(), Error> {
+    if value == 0 { Err(Error::new(Cause::Zero, argument)) } else { Ok(()) }
+}
+
+/// Refuses what its range leaves out.
+#[inline(always)]
+pub(crate) fn allowed(condition: bool, argument: u8) -> Result<(), Error> {
+    if condition { Ok(()) } else { Err(Error::new(Cause::OutOfRange, argument)) }
 }
 
 impl fmt::Display for Error {

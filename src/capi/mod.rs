@@ -11,6 +11,7 @@ pub mod focus;
 pub mod imaging;
 pub mod layout;
 pub mod light;
+pub mod motion;
 pub mod resolution;
 pub mod setup;
 mod short;

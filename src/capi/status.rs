@@ -19,6 +19,10 @@ pub const FIELDSTOP_OVERFLOW: u8 = 5;
 pub const FIELDSTOP_NO_ROOM: u8 = 6;
 /// Cause: not defined or not known here.
 pub const FIELDSTOP_UNDEFINED: u8 = 7;
+/// Cause: never reached: a star or a place of the sky that never comes to what was asked about.
+pub const FIELDSTOP_NEVER_REACHED: u8 = 8;
+/// Cause: never left: a star or a place of the sky that stays in what was asked about, all around the pole.
+pub const FIELDSTOP_NEVER_LEFT: u8 = 9;
 
 /// Gives a static English sentence for the cause in a status; never null.
 ///

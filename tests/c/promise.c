@@ -75,93 +75,95 @@ HOLDS(holds_68, FIELDSTOP_NOT_FINITE == 4);
 HOLDS(holds_69, FIELDSTOP_OVERFLOW == 5);
 HOLDS(holds_70, FIELDSTOP_NO_ROOM == 6);
 HOLDS(holds_71, FIELDSTOP_UNDEFINED == 7);
-HOLDS(holds_72, FIELDSTOP_EQUIDISTANT == 0);
-HOLDS(holds_73, FIELDSTOP_RECTILINEAR == 1);
-HOLDS(holds_74, FIELDSTOP_VISUAL_FOCAL_LENGTH == 1);
-HOLDS(holds_75, FIELDSTOP_VISUAL_FOCAL_RATIO == 2);
-HOLDS(holds_76, FIELDSTOP_VISUAL_MAGNIFICATION == 4);
-HOLDS(holds_77, FIELDSTOP_VISUAL_EXIT_PUPIL == 8);
-HOLDS(holds_78, FIELDSTOP_VISUAL_TRUE_FIELD == 16);
-HOLDS(holds_79, FIELDSTOP_VISUAL_RESOLUTION == 32);
-HOLDS(holds_80, FIELDSTOP_VISUAL_DAWES_LIMIT == 64);
-HOLDS(holds_81, FIELDSTOP_VISUAL_LOWEST_MAGNIFICATION == 128);
-HOLDS(holds_82, FIELDSTOP_VISUAL_RESOLVING_MAGNIFICATION == 256);
-HOLDS(holds_83, FIELDSTOP_VISUAL_EFFECTIVE_APERTURE == 512);
-HOLDS(holds_84, FIELDSTOP_VISUAL_LIMITING_MAGNITUDE == 1024);
-HOLDS(holds_85, FIELDSTOP_VISUAL_SURFACE_BRIGHTNESS == 2048);
-HOLDS(holds_86, FIELDSTOP_VISUAL_ALL == 4095);
-HOLDS(holds_87, FIELDSTOP_VISUAL_FACT_WIDE_EXIT_PUPIL == 1);
-HOLDS(holds_88, FIELDSTOP_VISUAL_FACT_EMPTY_MAGNIFICATION == 2);
-HOLDS(holds_89, FIELDSTOP_VISUAL_FACT_FIELD_FROM_APPARENT == 4);
-HOLDS(holds_90, FIELDSTOP_VISUAL_FACT_SEEING_LIMITED == 8);
-HOLDS(holds_91, FIELDSTOP_CAMERA_FOCAL_LENGTH == 1);
-HOLDS(holds_92, FIELDSTOP_CAMERA_FOCAL_RATIO == 2);
-HOLDS(holds_93, FIELDSTOP_CAMERA_T_NUMBER == 4);
-HOLDS(holds_94, FIELDSTOP_CAMERA_FRAME_WIDTH == 8);
-HOLDS(holds_95, FIELDSTOP_CAMERA_FRAME_HEIGHT == 16);
-HOLDS(holds_96, FIELDSTOP_CAMERA_PIXEL_SCALE == 32);
-HOLDS(holds_97, FIELDSTOP_CAMERA_PLATE_SCALE == 64);
-HOLDS(holds_98, FIELDSTOP_CAMERA_STAR_FWHM == 128);
-HOLDS(holds_99, FIELDSTOP_CAMERA_PIXELS_PER_FWHM == 256);
-HOLDS(holds_100, FIELDSTOP_CAMERA_ALL == 511);
-HOLDS(holds_101, FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING == 1);
-HOLDS(holds_102, FIELDSTOP_CAMERA_FACT_FINE_SAMPLING == 2);
-HOLDS(holds_103, FIELDSTOP_ANGLE_BY_SIZE == 0);
-HOLDS(holds_104, FIELDSTOP_ANGLE_DECIMAL_DEGREES == 1);
-HOLDS(holds_105, FIELDSTOP_ANGLE_DEGREES_MINUTES == 2);
-HOLDS(holds_106, FIELDSTOP_ANGLE_MINUTES_SECONDS == 3);
-HOLDS(holds_107, FIELDSTOP_ANGLE_DECIMAL_SECONDS == 4);
-HOLDS(holds_108, FIELDSTOP_UNIT_NONE == 0);
-HOLDS(holds_109, FIELDSTOP_UNIT_DEGREE == 1);
-HOLDS(holds_110, FIELDSTOP_UNIT_MINUTE == 2);
-HOLDS(holds_111, FIELDSTOP_UNIT_SECOND == 3);
-HOLDS(holds_112, FIELDSTOP_UNIT_DECIMAL_DEGREE == 4);
-HOLDS(holds_113, FIELDSTOP_UNIT_METRE == 5);
-HOLDS(holds_114, FIELDSTOP_UNIT_MILLIMETRE == 6);
-HOLDS(holds_115, FIELDSTOP_UNIT_MICROMETRE == 7);
-HOLDS(holds_116, FIELDSTOP_UNIT_NANOMETRE == 8);
-HOLDS(holds_117, FIELDSTOP_UNIT_TIMES == 9);
-HOLDS(holds_118, FIELDSTOP_UNIT_PERCENT == 10);
-HOLDS(holds_119, FIELDSTOP_UNIT_MAGNITUDE == 11);
-HOLDS(holds_120, FIELDSTOP_UNIT_FOCAL_RATIO == 12);
-HOLDS(holds_121, FIELDSTOP_UNIT_PIXEL == 13);
-HOLDS(holds_122, FIELDSTOP_UNIT_SECOND_PER_PIXEL == 14);
-HOLDS(holds_123, FIELDSTOP_UNIT_SECOND_PER_MILLIMETRE == 15);
-HOLDS(holds_124, FIELDSTOP_UNIT_SECOND_PER_TIME == 16);
-HOLDS(holds_125, FIELDSTOP_UNIT_PER_MILLIMETRE == 17);
-HOLDS(holds_126, FIELDSTOP_UNIT_TIME == 18);
-HOLDS(holds_127, FIELDSTOP_UNIT_STEP == 19);
-HOLDS(holds_128, FIELDSTOP_UNIT_KELVIN == 20);
-HOLDS(holds_129, FIELDSTOP_UNIT_WATT == 21);
-HOLDS(holds_130, FIELDSTOP_VISUAL_ROWS == 16);
-HOLDS(holds_131, FIELDSTOP_VISUAL_ROW_MAGNIFICATION == 0);
-HOLDS(holds_132, FIELDSTOP_VISUAL_ROW_TRUE_FIELD == 1);
-HOLDS(holds_133, FIELDSTOP_VISUAL_ROW_EXIT_PUPIL == 2);
-HOLDS(holds_134, FIELDSTOP_VISUAL_ROW_RESOLUTION == 3);
-HOLDS(holds_135, FIELDSTOP_VISUAL_ROW_FAINTEST_STAR == 4);
-HOLDS(holds_136, FIELDSTOP_VISUAL_ROW_SURFACE_BRIGHTNESS == 5);
-HOLDS(holds_137, FIELDSTOP_VISUAL_ROW_FOCAL_RATIO == 6);
-HOLDS(holds_138, FIELDSTOP_VISUAL_ROW_FOCAL_LENGTH == 7);
-HOLDS(holds_139, FIELDSTOP_VISUAL_ROW_LOWEST_MAGNIFICATION == 8);
-HOLDS(holds_140, FIELDSTOP_VISUAL_ROW_RESOLVING_MAGNIFICATION == 9);
-HOLDS(holds_141, FIELDSTOP_VISUAL_ROW_DAWES_LIMIT == 10);
-HOLDS(holds_142, FIELDSTOP_VISUAL_ROW_EFFECTIVE_APERTURE == 11);
-HOLDS(holds_143, FIELDSTOP_VISUAL_ROW_WIDE_EXIT_PUPIL == 12);
-HOLDS(holds_144, FIELDSTOP_VISUAL_ROW_EMPTY_MAGNIFICATION == 13);
-HOLDS(holds_145, FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT == 14);
-HOLDS(holds_146, FIELDSTOP_VISUAL_ROW_SEEING_LIMITED == 15);
-HOLDS(holds_147, FIELDSTOP_CAMERA_ROWS == 11);
-HOLDS(holds_148, FIELDSTOP_CAMERA_ROW_FRAME_WIDTH == 0);
-HOLDS(holds_149, FIELDSTOP_CAMERA_ROW_FRAME_HEIGHT == 1);
-HOLDS(holds_150, FIELDSTOP_CAMERA_ROW_PIXEL_SCALE == 2);
-HOLDS(holds_151, FIELDSTOP_CAMERA_ROW_STAR_WIDTH == 3);
-HOLDS(holds_152, FIELDSTOP_CAMERA_ROW_STAR_PIXELS == 4);
-HOLDS(holds_153, FIELDSTOP_CAMERA_ROW_FOCAL_RATIO == 5);
-HOLDS(holds_154, FIELDSTOP_CAMERA_ROW_T_NUMBER == 6);
-HOLDS(holds_155, FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH == 7);
-HOLDS(holds_156, FIELDSTOP_CAMERA_ROW_PLATE_SCALE == 8);
-HOLDS(holds_157, FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING == 9);
-HOLDS(holds_158, FIELDSTOP_CAMERA_ROW_FINE_SAMPLING == 10);
+HOLDS(holds_72, FIELDSTOP_NEVER_REACHED == 8);
+HOLDS(holds_73, FIELDSTOP_NEVER_LEFT == 9);
+HOLDS(holds_74, FIELDSTOP_EQUIDISTANT == 0);
+HOLDS(holds_75, FIELDSTOP_RECTILINEAR == 1);
+HOLDS(holds_76, FIELDSTOP_VISUAL_FOCAL_LENGTH == 1);
+HOLDS(holds_77, FIELDSTOP_VISUAL_FOCAL_RATIO == 2);
+HOLDS(holds_78, FIELDSTOP_VISUAL_MAGNIFICATION == 4);
+HOLDS(holds_79, FIELDSTOP_VISUAL_EXIT_PUPIL == 8);
+HOLDS(holds_80, FIELDSTOP_VISUAL_TRUE_FIELD == 16);
+HOLDS(holds_81, FIELDSTOP_VISUAL_RESOLUTION == 32);
+HOLDS(holds_82, FIELDSTOP_VISUAL_DAWES_LIMIT == 64);
+HOLDS(holds_83, FIELDSTOP_VISUAL_LOWEST_MAGNIFICATION == 128);
+HOLDS(holds_84, FIELDSTOP_VISUAL_RESOLVING_MAGNIFICATION == 256);
+HOLDS(holds_85, FIELDSTOP_VISUAL_EFFECTIVE_APERTURE == 512);
+HOLDS(holds_86, FIELDSTOP_VISUAL_LIMITING_MAGNITUDE == 1024);
+HOLDS(holds_87, FIELDSTOP_VISUAL_SURFACE_BRIGHTNESS == 2048);
+HOLDS(holds_88, FIELDSTOP_VISUAL_ALL == 4095);
+HOLDS(holds_89, FIELDSTOP_VISUAL_FACT_WIDE_EXIT_PUPIL == 1);
+HOLDS(holds_90, FIELDSTOP_VISUAL_FACT_EMPTY_MAGNIFICATION == 2);
+HOLDS(holds_91, FIELDSTOP_VISUAL_FACT_FIELD_FROM_APPARENT == 4);
+HOLDS(holds_92, FIELDSTOP_VISUAL_FACT_SEEING_LIMITED == 8);
+HOLDS(holds_93, FIELDSTOP_CAMERA_FOCAL_LENGTH == 1);
+HOLDS(holds_94, FIELDSTOP_CAMERA_FOCAL_RATIO == 2);
+HOLDS(holds_95, FIELDSTOP_CAMERA_T_NUMBER == 4);
+HOLDS(holds_96, FIELDSTOP_CAMERA_FRAME_WIDTH == 8);
+HOLDS(holds_97, FIELDSTOP_CAMERA_FRAME_HEIGHT == 16);
+HOLDS(holds_98, FIELDSTOP_CAMERA_PIXEL_SCALE == 32);
+HOLDS(holds_99, FIELDSTOP_CAMERA_PLATE_SCALE == 64);
+HOLDS(holds_100, FIELDSTOP_CAMERA_STAR_FWHM == 128);
+HOLDS(holds_101, FIELDSTOP_CAMERA_PIXELS_PER_FWHM == 256);
+HOLDS(holds_102, FIELDSTOP_CAMERA_ALL == 511);
+HOLDS(holds_103, FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING == 1);
+HOLDS(holds_104, FIELDSTOP_CAMERA_FACT_FINE_SAMPLING == 2);
+HOLDS(holds_105, FIELDSTOP_ANGLE_BY_SIZE == 0);
+HOLDS(holds_106, FIELDSTOP_ANGLE_DECIMAL_DEGREES == 1);
+HOLDS(holds_107, FIELDSTOP_ANGLE_DEGREES_MINUTES == 2);
+HOLDS(holds_108, FIELDSTOP_ANGLE_MINUTES_SECONDS == 3);
+HOLDS(holds_109, FIELDSTOP_ANGLE_DECIMAL_SECONDS == 4);
+HOLDS(holds_110, FIELDSTOP_UNIT_NONE == 0);
+HOLDS(holds_111, FIELDSTOP_UNIT_DEGREE == 1);
+HOLDS(holds_112, FIELDSTOP_UNIT_MINUTE == 2);
+HOLDS(holds_113, FIELDSTOP_UNIT_SECOND == 3);
+HOLDS(holds_114, FIELDSTOP_UNIT_DECIMAL_DEGREE == 4);
+HOLDS(holds_115, FIELDSTOP_UNIT_METRE == 5);
+HOLDS(holds_116, FIELDSTOP_UNIT_MILLIMETRE == 6);
+HOLDS(holds_117, FIELDSTOP_UNIT_MICROMETRE == 7);
+HOLDS(holds_118, FIELDSTOP_UNIT_NANOMETRE == 8);
+HOLDS(holds_119, FIELDSTOP_UNIT_TIMES == 9);
+HOLDS(holds_120, FIELDSTOP_UNIT_PERCENT == 10);
+HOLDS(holds_121, FIELDSTOP_UNIT_MAGNITUDE == 11);
+HOLDS(holds_122, FIELDSTOP_UNIT_FOCAL_RATIO == 12);
+HOLDS(holds_123, FIELDSTOP_UNIT_PIXEL == 13);
+HOLDS(holds_124, FIELDSTOP_UNIT_SECOND_PER_PIXEL == 14);
+HOLDS(holds_125, FIELDSTOP_UNIT_SECOND_PER_MILLIMETRE == 15);
+HOLDS(holds_126, FIELDSTOP_UNIT_SECOND_PER_TIME == 16);
+HOLDS(holds_127, FIELDSTOP_UNIT_PER_MILLIMETRE == 17);
+HOLDS(holds_128, FIELDSTOP_UNIT_TIME == 18);
+HOLDS(holds_129, FIELDSTOP_UNIT_STEP == 19);
+HOLDS(holds_130, FIELDSTOP_UNIT_KELVIN == 20);
+HOLDS(holds_131, FIELDSTOP_UNIT_WATT == 21);
+HOLDS(holds_132, FIELDSTOP_VISUAL_ROWS == 16);
+HOLDS(holds_133, FIELDSTOP_VISUAL_ROW_MAGNIFICATION == 0);
+HOLDS(holds_134, FIELDSTOP_VISUAL_ROW_TRUE_FIELD == 1);
+HOLDS(holds_135, FIELDSTOP_VISUAL_ROW_EXIT_PUPIL == 2);
+HOLDS(holds_136, FIELDSTOP_VISUAL_ROW_RESOLUTION == 3);
+HOLDS(holds_137, FIELDSTOP_VISUAL_ROW_FAINTEST_STAR == 4);
+HOLDS(holds_138, FIELDSTOP_VISUAL_ROW_SURFACE_BRIGHTNESS == 5);
+HOLDS(holds_139, FIELDSTOP_VISUAL_ROW_FOCAL_RATIO == 6);
+HOLDS(holds_140, FIELDSTOP_VISUAL_ROW_FOCAL_LENGTH == 7);
+HOLDS(holds_141, FIELDSTOP_VISUAL_ROW_LOWEST_MAGNIFICATION == 8);
+HOLDS(holds_142, FIELDSTOP_VISUAL_ROW_RESOLVING_MAGNIFICATION == 9);
+HOLDS(holds_143, FIELDSTOP_VISUAL_ROW_DAWES_LIMIT == 10);
+HOLDS(holds_144, FIELDSTOP_VISUAL_ROW_EFFECTIVE_APERTURE == 11);
+HOLDS(holds_145, FIELDSTOP_VISUAL_ROW_WIDE_EXIT_PUPIL == 12);
+HOLDS(holds_146, FIELDSTOP_VISUAL_ROW_EMPTY_MAGNIFICATION == 13);
+HOLDS(holds_147, FIELDSTOP_VISUAL_ROW_FIELD_FROM_APPARENT == 14);
+HOLDS(holds_148, FIELDSTOP_VISUAL_ROW_SEEING_LIMITED == 15);
+HOLDS(holds_149, FIELDSTOP_CAMERA_ROWS == 11);
+HOLDS(holds_150, FIELDSTOP_CAMERA_ROW_FRAME_WIDTH == 0);
+HOLDS(holds_151, FIELDSTOP_CAMERA_ROW_FRAME_HEIGHT == 1);
+HOLDS(holds_152, FIELDSTOP_CAMERA_ROW_PIXEL_SCALE == 2);
+HOLDS(holds_153, FIELDSTOP_CAMERA_ROW_STAR_WIDTH == 3);
+HOLDS(holds_154, FIELDSTOP_CAMERA_ROW_STAR_PIXELS == 4);
+HOLDS(holds_155, FIELDSTOP_CAMERA_ROW_FOCAL_RATIO == 5);
+HOLDS(holds_156, FIELDSTOP_CAMERA_ROW_T_NUMBER == 6);
+HOLDS(holds_157, FIELDSTOP_CAMERA_ROW_FOCAL_LENGTH == 7);
+HOLDS(holds_158, FIELDSTOP_CAMERA_ROW_PLATE_SCALE == 8);
+HOLDS(holds_159, FIELDSTOP_CAMERA_ROW_COARSE_SAMPLING == 9);
+HOLDS(holds_160, FIELDSTOP_CAMERA_ROW_FINE_SAMPLING == 10);
 
 typedef void (*any_function)(void);
 static volatile any_function present;
@@ -1309,6 +1311,166 @@ int main(void)
 #if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
     {
         fieldstop_status (*function)(double, double, double, double *) = fieldstop_secondary_spectrum_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t *) = fieldstop_drift_rate_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float *) = fieldstop_drift_rate_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double *) = fieldstop_drift_rate_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t, uint32_t *) = fieldstop_drift_time_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_drift_time_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_drift_time_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t, uint32_t *) = fieldstop_true_field_from_drift_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_true_field_from_drift_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_true_field_from_drift_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, int32_t, uint32_t *) = fieldstop_trail_free_exposure_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float, float *) = fieldstop_trail_free_exposure_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double, double *) = fieldstop_trail_free_exposure_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_rotation_free_exposure_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, uint32_t, float, float *) = fieldstop_rotation_free_exposure_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, uint32_t, double, double *) = fieldstop_rotation_free_exposure_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t, int32_t, int32_t *) = fieldstop_field_rotation_rate_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_field_rotation_rate_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_field_rotation_rate_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t, int32_t, int32_t *) = fieldstop_azimuth_rate_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_azimuth_rate_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_azimuth_rate_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t, int32_t, int32_t *) = fieldstop_altitude_rate_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_altitude_rate_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_altitude_rate_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t, uint32_t *) = fieldstop_zenith_blind_radius_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_zenith_blind_radius_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_zenith_blind_radius_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, int32_t *) = fieldstop_misalignment_drift_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_misalignment_drift_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_misalignment_drift_f64;
         present = (any_function)function;
     }
 #endif
