@@ -3929,6 +3929,124 @@ fieldstop_status fieldstop_misalignment_drift_f64(double polar_error_arcsec,
 #endif
 
 /* --------------------------------------------------------------------------------------------------
+   The Sun: where it stands, how far from it a telescope points, and how much of its light an
+   aperture collects. */
+
+/**
+ * Gives the right ascension of the Sun, of the date, as binary angle.
+ *
+ * atan2(cos e sin l, cos l), l = L + 1.915 sin g + 0.020 sin 2g, L = 280.460 + 0.9856474 n, g = 357.528 + 0.9856003
+ * n, e = 23.439 - 0.0000004 n, in degrees, n days from 2000 January 1, 12 h (the low-precision expression of The
+ * Astronomical Almanac).
+ * Caution: nothing that is computed makes it safe to look near the Sun.
+ * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
+ * Error: at most 5 LSB from the expression. The expression is within 0.016 degrees, on the sky, of a full ephemeris
+ * from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_right_ascension_fx(uint32_t unix_s,
+                                                  uint32_t *right_ascension_bam);
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the right ascension of the Sun, of the date, as degrees, in double.
+ *
+ * atan2(cos e sin l, cos l), l = L + 1.915 sin g + 0.020 sin 2g, L = 280.460 + 0.9856474 n, g = 357.528 + 0.9856003
+ * n, e = 23.439 - 0.0000004 n, in degrees, n days from 2000 January 1, 12 h (the low-precision expression of The
+ * Astronomical Almanac).
+ * Caution: nothing that is computed makes it safe to look near the Sun.
+ * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
+ * Error: at most 10^-10 degrees from the expression. The expression is within 0.016 degrees, on the sky, of a full
+ * ephemeris from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_right_ascension_f64(uint32_t unix_s,
+                                                   double *right_ascension_deg);
+#endif
+
+/**
+ * Gives the declination of the Sun, of the date, as binary angle.
+ *
+ * asin(sin e sin l), l = L + 1.915 sin g + 0.020 sin 2g, L = 280.460 + 0.9856474 n, g = 357.528 + 0.9856003 n, e =
+ * 23.439 - 0.0000004 n, in degrees, n days from 2000 January 1, 12 h (the low-precision expression of The
+ * Astronomical Almanac).
+ * Caution: nothing that is computed makes it safe to look near the Sun.
+ * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
+ * Error: at most 5 LSB from the expression. The expression is within 0.016 degrees, on the sky, of a full ephemeris
+ * from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_declination_fx(uint32_t unix_s,
+                                              int32_t *declination_bam);
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the declination of the Sun, of the date, as degrees, in double.
+ *
+ * asin(sin e sin l), l = L + 1.915 sin g + 0.020 sin 2g, L = 280.460 + 0.9856474 n, g = 357.528 + 0.9856003 n, e =
+ * 23.439 - 0.0000004 n, in degrees, n days from 2000 January 1, 12 h (the low-precision expression of The
+ * Astronomical Almanac).
+ * Caution: nothing that is computed makes it safe to look near the Sun.
+ * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
+ * Error: at most 10^-10 degrees from the expression. The expression is within 0.016 degrees, on the sky, of a full
+ * ephemeris from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_declination_f64(uint32_t unix_s,
+                                               double *declination_deg);
+#endif
+
+/**
+ * Gives the power of the Sun's light that an aperture takes in, in milliwatts.
+ *
+ * 1000 W/m^2 (pi / 4) D^2: the Sun high in a clear sky (common practice).
+ * Caution: some milliwatts at the focus burn an eye or a sensor at once. Use a full-aperture filter made for the
+ * Sun.
+ * Ranges: effective_aperture_um not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_collected_sunlight_fx(uint32_t effective_aperture_um,
+                                                 uint32_t *power_mw);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the power of the Sun's light that an aperture takes in, in milliwatts.
+ *
+ * 1000 W/m^2 (pi / 4) D^2: the Sun high in a clear sky (common practice).
+ * Caution: some milliwatts at the focus burn an eye or a sensor at once. Use a full-aperture filter made for the
+ * Sun.
+ * Ranges: effective_aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_collected_sunlight_f32(float effective_aperture_mm,
+                                                  float *power_mw);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the power of the Sun's light that an aperture takes in, in milliwatts, in double.
+ *
+ * 1000 W/m^2 (pi / 4) D^2: the Sun high in a clear sky (common practice).
+ * Caution: some milliwatts at the focus burn an eye or a sensor at once. Use a full-aperture filter made for the
+ * Sun.
+ * Ranges: effective_aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_collected_sunlight_f64(double effective_aperture_mm,
+                                                  double *power_mw);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
    Equipment as plain structs in fixed units, and all readouts of one screen in one call. */
 
 /** Eyepiece mapping: true field = A fe / f, the apparent angle proportional to the true one. */

@@ -297,6 +297,9 @@ typedef quantity<unit::millimetres, double> millimetres_f64;
 typedef quantity<unit::millimetres, float> millimetres_f32;
 typedef quantity<unit::millimetres, uint32_t> millimetres;
 typedef quantity<unit::milliseconds, uint32_t> milliseconds;
+typedef quantity<unit::milliwatts, double> milliwatts_f64;
+typedef quantity<unit::milliwatts, float> milliwatts_f32;
+typedef quantity<unit::milliwatts, uint32_t> milliwatts;
 typedef quantity<unit::nanometres, double> nanometres_f64;
 typedef quantity<unit::nanometres, float> nanometres_f32;
 typedef quantity<unit::nanometres, int32_t> signed_nanometres;
@@ -310,6 +313,7 @@ typedef quantity<unit::q16, int32_t> signed_q16;
 typedef quantity<unit::q16, uint32_t> q16;
 typedef quantity<unit::seconds, double> seconds_f64;
 typedef quantity<unit::seconds, float> seconds_f32;
+typedef quantity<unit::seconds, uint32_t> seconds;
 typedef quantity<unit::thousandths, uint32_t> thousandths;
 
 namespace literals {
@@ -3241,6 +3245,72 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f64> misalignmen
     double given;
     const fieldstop_status number = ::fieldstop_misalignment_drift_f64(polar_error_arcsec.count(), hour_angle_deg.count(), &given);
     return access::given<arcseconds_per_second_f64>(number, given);
+}
+#endif
+
+/* The Sun: where it stands, how far from it a telescope points, and how much of its light an aperture collects. */
+
+/** Gives the right ascension of the Sun, of the date, as binary angle. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<binary_angle> sun_right_ascension_fx(seconds unix_s)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_sun_right_ascension_fx(unix_s.count(), &given);
+    return access::given<binary_angle>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the right ascension of the Sun, of the date, as degrees, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<degrees_of_arc_f64> sun_right_ascension_f64(seconds unix_s)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_right_ascension_f64(unix_s.count(), &given);
+    return access::given<degrees_of_arc_f64>(number, given);
+}
+#endif
+
+/** Gives the declination of the Sun, of the date, as binary angle. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<signed_binary_angle> sun_declination_fx(seconds unix_s)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_sun_declination_fx(unix_s.count(), &given);
+    return access::given<signed_binary_angle>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the declination of the Sun, of the date, as degrees, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<degrees_of_arc_f64> sun_declination_f64(seconds unix_s)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_declination_f64(unix_s.count(), &given);
+    return access::given<degrees_of_arc_f64>(number, given);
+}
+#endif
+
+/** Gives the power of the Sun's light that an aperture takes in, in milliwatts. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliwatts> collected_sunlight_fx(micrometres effective_aperture_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_fx(effective_aperture_um.count(), &given);
+    return access::given<milliwatts>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the power of the Sun's light that an aperture takes in, in milliwatts. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliwatts_f32> collected_sunlight_f32(millimetres_f32 effective_aperture_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_f32(effective_aperture_mm.count(), &given);
+    return access::given<milliwatts_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the power of the Sun's light that an aperture takes in, in milliwatts, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliwatts_f64> collected_sunlight_f64(millimetres_f64 effective_aperture_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_f64(effective_aperture_mm.count(), &given);
+    return access::given<milliwatts_f64>(number, given);
 }
 #endif
 

@@ -16,6 +16,7 @@ pub mod resolution;
 pub mod setup;
 mod short;
 pub mod status;
+pub mod sun;
 pub mod text;
 pub mod units;
 

@@ -5,3 +5,4 @@
 //! through east, hour angle grows westward, northern latitudes and declinations are positive.
 
 pub mod motion;
+pub mod sun;

@@ -1475,6 +1475,42 @@ int main(void)
     }
 #endif
     {
+        fieldstop_status (*function)(uint32_t, uint32_t *) = fieldstop_sun_right_ascension_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(uint32_t, double *) = fieldstop_sun_right_ascension_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t *) = fieldstop_sun_declination_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(uint32_t, double *) = fieldstop_sun_declination_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t *) = fieldstop_collected_sunlight_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float *) = fieldstop_collected_sunlight_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double *) = fieldstop_collected_sunlight_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
         fieldstop_status (*function)(const struct fieldstop_telescope *) = fieldstop_telescope_check;
         present = (any_function)function;
     }

@@ -4712,6 +4712,140 @@ fieldstop_status typed_misalignment_drift_f64(double polar_error_arcsec, double 
 }
 #endif
 
+fieldstop_status plain_sun_right_ascension_fx(uint32_t unix_s, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_sun_right_ascension_fx(unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_right_ascension_fx(uint32_t unix_s, uint32_t *out)
+{
+    const auto given = fieldstop::sun_right_ascension_fx(fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_sun_right_ascension_f64(uint32_t unix_s, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_right_ascension_f64(unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_right_ascension_f64(uint32_t unix_s, double *out)
+{
+    const auto given = fieldstop::sun_right_ascension_f64(fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_sun_declination_fx(uint32_t unix_s, int32_t *out)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_sun_declination_fx(unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_declination_fx(uint32_t unix_s, int32_t *out)
+{
+    const auto given = fieldstop::sun_declination_fx(fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_sun_declination_f64(uint32_t unix_s, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_declination_f64(unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_declination_f64(uint32_t unix_s, double *out)
+{
+    const auto given = fieldstop::sun_declination_f64(fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_collected_sunlight_fx(uint32_t effective_aperture_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_fx(effective_aperture_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_collected_sunlight_fx(uint32_t effective_aperture_um, uint32_t *out)
+{
+    const auto given = fieldstop::collected_sunlight_fx(fieldstop::micrometres(effective_aperture_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_collected_sunlight_f32(float effective_aperture_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_f32(effective_aperture_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_collected_sunlight_f32(float effective_aperture_mm, float *out)
+{
+    const auto given = fieldstop::collected_sunlight_f32(fieldstop::millimetres_f32(effective_aperture_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_collected_sunlight_f64(double effective_aperture_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_f64(effective_aperture_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_collected_sunlight_f64(double effective_aperture_mm, double *out)
+{
+    const auto given = fieldstop::collected_sunlight_f64(fieldstop::millimetres_f64(effective_aperture_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
 fieldstop_status plain_telescope_check(const fieldstop::telescope *telescope)
 {
     return ::fieldstop_telescope_check(&telescope->c());

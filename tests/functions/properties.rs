@@ -97,6 +97,9 @@ const DIRECTIONS: &[(&str, &str)] = &[
     ("altitude_rate", "."),
     ("zenith_blind_radius", ".-"),
     ("misalignment_drift", "."),
+    ("sun_right_ascension", "."),
+    ("sun_declination", "."),
+    ("collected_sunlight", "+"),
 ];
 
 fn directions(row: &Row) -> Vec<char> {

@@ -18,6 +18,7 @@ mod layout;
 mod light;
 mod motion;
 mod resolution;
+mod sun;
 mod units;
 
 /// A unit of the contract: how many of the fixed form's steps make one of the float form's unit.
@@ -200,6 +201,7 @@ pub fn all_rows() -> Vec<Row> {
         layout::rows(),
         colour::rows(),
         motion::rows(),
+        sun::rows(),
     ]
     .concat()
 }

@@ -257,4 +257,13 @@ ROW(zenith_blind_radius, DRAW(100000000u, 700000000u, 3221225472u, 1073741824u) 
 #if HAS_ROW(85)
 ROW(misalignment_drift, DRAW(10000u, 7200000u, 0u, 18000000u) DRAW(1048576u, 4294967295u, 0u, 4294967295u), fieldstop_misalignment_drift_fx(a[0], a[1], (int32_t *)&result))
 #endif
-#define ROWS 86
+#if HAS_ROW(86)
+ROW(sun_right_ascension, DRAW(1500000000u, 2500000000u, 0u, 4102444799u), fieldstop_sun_right_ascension_fx(a[0], &result))
+#endif
+#if HAS_ROW(87)
+ROW(sun_declination, DRAW(1500000000u, 2500000000u, 0u, 4102444799u), fieldstop_sun_declination_fx(a[0], (int32_t *)&result))
+#endif
+#if HAS_ROW(88)
+ROW(collected_sunlight, DRAW(40000u, 500000u, 0u, 4294967295u), fieldstop_collected_sunlight_fx(a[0], &result))
+#endif
+#define ROWS 89
