@@ -3940,7 +3940,7 @@ fieldstop_status fieldstop_misalignment_drift_f64(double polar_error_arcsec,
  * Astronomical Almanac).
  * Caution: nothing that is computed makes it safe to look near the Sun.
  * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
- * Error: at most 5 LSB from the expression. The expression is within 0.016 degrees, on the sky, of a full ephemeris
+ * Error: at most 5 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
  * from 1970 to 2100.
  * Statuses: null pointer, out of range.
  */
@@ -3957,7 +3957,7 @@ fieldstop_status fieldstop_sun_right_ascension_fx(uint32_t unix_s,
  * Astronomical Almanac).
  * Caution: nothing that is computed makes it safe to look near the Sun.
  * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
- * Error: at most 10^-10 degrees from the expression. The expression is within 0.016 degrees, on the sky, of a full
+ * Error: at most 10^-10 degrees from the expression. The expression is within 0.017 degrees, on the sky, of a full
  * ephemeris from 1970 to 2100.
  * Statuses: null pointer, out of range.
  */
@@ -3974,7 +3974,7 @@ fieldstop_status fieldstop_sun_right_ascension_f64(uint32_t unix_s,
  * Astronomical Almanac).
  * Caution: nothing that is computed makes it safe to look near the Sun.
  * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
- * Error: at most 5 LSB from the expression. The expression is within 0.016 degrees, on the sky, of a full ephemeris
+ * Error: at most 5 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
  * from 1970 to 2100.
  * Statuses: null pointer, out of range.
  */
@@ -3991,7 +3991,7 @@ fieldstop_status fieldstop_sun_declination_fx(uint32_t unix_s,
  * Astronomical Almanac).
  * Caution: nothing that is computed makes it safe to look near the Sun.
  * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
- * Error: at most 10^-10 degrees from the expression. The expression is within 0.016 degrees, on the sky, of a full
+ * Error: at most 10^-10 degrees from the expression. The expression is within 0.017 degrees, on the sky, of a full
  * ephemeris from 1970 to 2100.
  * Statuses: null pointer, out of range.
  */

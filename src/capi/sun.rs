@@ -11,7 +11,7 @@ use crate::units::Micrometres;
 /// Astronomical Almanac).
 /// Caution: nothing that is computed makes it safe to look near the Sun.
 /// Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
-/// Error: at most 5 LSB from the expression. The expression is within 0.016 degrees, on the sky, of a full ephemeris
+/// Error: at most 5 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
 /// from 1970 to 2100.
 /// Statuses: null pointer, out of range.
 #[must_use]
@@ -31,7 +31,7 @@ pub unsafe extern "C" fn fieldstop_sun_right_ascension_fx(
 /// Astronomical Almanac).
 /// Caution: nothing that is computed makes it safe to look near the Sun.
 /// Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
-/// Error: at most 10^-10 degrees from the expression. The expression is within 0.016 degrees, on the sky, of a full
+/// Error: at most 10^-10 degrees from the expression. The expression is within 0.017 degrees, on the sky, of a full
 /// ephemeris from 1970 to 2100.
 /// Statuses: null pointer, out of range.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]
@@ -52,7 +52,7 @@ pub unsafe extern "C" fn fieldstop_sun_right_ascension_f64(
 /// Astronomical Almanac).
 /// Caution: nothing that is computed makes it safe to look near the Sun.
 /// Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
-/// Error: at most 5 LSB from the expression. The expression is within 0.016 degrees, on the sky, of a full ephemeris
+/// Error: at most 5 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
 /// from 1970 to 2100.
 /// Statuses: null pointer, out of range.
 #[must_use]
@@ -72,7 +72,7 @@ pub unsafe extern "C" fn fieldstop_sun_declination_fx(
 /// Astronomical Almanac).
 /// Caution: nothing that is computed makes it safe to look near the Sun.
 /// Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
-/// Error: at most 10^-10 degrees from the expression. The expression is within 0.016 degrees, on the sky, of a full
+/// Error: at most 10^-10 degrees from the expression. The expression is within 0.017 degrees, on the sky, of a full
 /// ephemeris from 1970 to 2100.
 /// Statuses: null pointer, out of range.
 #[cfg(all(feature = "float", not(target_arch = "avr")))]

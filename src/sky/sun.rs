@@ -64,7 +64,7 @@ fn size(sine: i64) -> u32 {
 /// | time in seconds from 1970 January 1, 0 h UTC (Unix time) | s | s, integer | under 4102444800 (the year 2100) |
 ///
 /// Result: bam; float degrees, 0 to 360. It always fits. There is no f32 form.
-/// Error: at most 5 LSB from the expression; float 10^-10 degrees. The expression is within 0.016 degrees, on the sky, of a
+/// Error: at most 5 LSB from the expression; float 10^-10 degrees. The expression is within 0.017 degrees, on the sky, of a
 /// full ephemeris from 1970 to 2100; 0.02 are owed.
 pub fn sun_right_ascension_fx(unix_s: u32) -> Result<Bam, Error> {
     allowed(unix_s < YEAR_2100, 1)?;
@@ -98,7 +98,7 @@ pub fn sun_right_ascension_fx(unix_s: u32) -> Result<Bam, Error> {
 /// | time in seconds from 1970 January 1, 0 h UTC (Unix time) | s | s, integer | under 4102444800 (the year 2100) |
 ///
 /// Result: signed bam; float degrees. It always fits. There is no f32 form.
-/// Error: at most 5 LSB from the expression; float 10^-10 degrees. The expression is within 0.016 degrees, on the sky, of a
+/// Error: at most 5 LSB from the expression; float 10^-10 degrees. The expression is within 0.017 degrees, on the sky, of a
 /// full ephemeris from 1970 to 2100; 0.02 are owed.
 pub fn sun_declination_fx(unix_s: u32) -> Result<SignedBam, Error> {
     allowed(unix_s < YEAR_2100, 1)?;
