@@ -46,7 +46,7 @@ mod tests {
 
     #[test]
     fn right_angles_are_exact() {
-        for k in -4..=4 {
+        for k in -4i32..=4 {
             let (angle, exact) = (90.0 * k as f64, [0.0, 1.0, 0.0, -1.0]);
             assert_eq!(sine(angle), exact[k.rem_euclid(4) as usize]);
             assert_eq!(cosine(angle), exact[(k + 1).rem_euclid(4) as usize]);

@@ -49,6 +49,12 @@ fn cosine(angle: SignedBam) -> u64 {
     sine::sine((angle.0 as u32).wrapping_add(QUARTER_TURN)) as u64
 }
 
+/// The same in steps of 2^-31, within one of them.
+#[inline(always)]
+fn short_cosine(angle: SignedBam) -> u32 {
+    sine::size_of_sine((angle.0 as u32).wrapping_add(QUARTER_TURN))
+}
+
 /// Refuses what is not in -90 to 90 degrees.
 #[cfg(feature = "float")]
 fn quarter_of_degrees<F: Real>(angle: F, argument: u8) -> Result<(), Error> {

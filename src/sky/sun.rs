@@ -7,7 +7,7 @@ use crate::math::divide::divide;
 #[cfg(feature = "float")]
 use crate::math::float::{Real, positive};
 use crate::math::multiply::{high, high_64, high_signed, wide, wide_by};
-use crate::math::sine::sine;
+use crate::math::sine::size_of_sine;
 use crate::math::{arc, root};
 use crate::status::{Error, allowed, present};
 use crate::units::{Bam, Micrometres, Milliwatts, SignedBam};
@@ -30,11 +30,14 @@ fn even(at_zero: u64, by_second: u64, unix_s: u32) -> u32 {
 fn ecliptic(unix_s: u32) -> (u32, u32) {
     let mean_longitude = even(14_359_182_038_365_870_902, 584_554_569_660, unix_s);
     let anomaly = even(18_334_665_384_497_223_943, 584_526_636_223, unix_s);
-    let upper = |sine: i64| (sine >> 32) as i32; // 2^-30
+    let sine = |angle: u32| {
+        let half = (size_of_sine(angle) >> 1) as i32; // 2^-30
+        if angle >> 31 == 0 { half } else { -half }
+    };
     // 1.915 degrees sin g + 0.020 degrees sin 2g as one product, in steps of 2^-6.
-    let cosine = upper(sine(anomaly.wrapping_add(QUARTER_TURN)));
+    let cosine = sine(anomaly.wrapping_add(QUARTER_TURN));
     let reach = 1_462_197_755u32.wrapping_add_signed(high_signed(cosine, 30_541_990 << 2));
-    let centre = (high_signed(upper(sine(anomaly)), reach) + 8) >> 4;
+    let centre = (high_signed(sine(anomaly), reach) + 8) >> 4;
     let longitude = mean_longitude.wrapping_add_signed(centre);
     (longitude, 279_690_454 - high(unix_s, 237_227))
 }
@@ -43,12 +46,6 @@ fn ecliptic(unix_s: u32) -> (u32, u32) {
 #[inline(always)]
 fn half_in_bam(twice_mas: u32) -> u32 {
     ((wide(twice_mas, 3_558_399_706) + (1 << 30)) >> 31) as u32
-}
-
-/// The upper half of a sine's size, in steps of 2^-31.
-#[inline(always)]
-fn size(sine: i64) -> u32 {
-    (sine.unsigned_abs() >> 31) as u32
 }
 
 /// The right ascension of the Sun, of the date.
@@ -69,11 +66,10 @@ fn size(sine: i64) -> u32 {
 pub fn sun_right_ascension_fx(unix_s: u32) -> Result<Bam, Error> {
     allowed(unix_s < YEAR_2100, 1)?;
     let (longitude, obliquity) = ecliptic(unix_s);
-    let (across, along) = (sine(longitude), sine(longitude.wrapping_add(QUARTER_TURN)));
-    let (east, north) = (
-        high(size(across), size(sine(obliquity + QUARTER_TURN))) << 1, // 2^-31
-        size(along),
-    );
+    let from_east = longitude.wrapping_add(QUARTER_TURN);
+    // Sizes in steps of 2^-31, the first of the product.
+    let east = high(size_of_sine(longitude), size_of_sine(obliquity + QUARTER_TURN)) << 1;
+    let north = size_of_sine(from_east);
     // From the nearer axis, in a quarter turn.
     let angle = |n: u32, d: u32| half_in_bam(arc::twice_arctangent(divide((n as u64) << 32, d).0));
     let angle = if east < north {
@@ -83,8 +79,8 @@ pub fn sun_right_ascension_fx(unix_s: u32) -> Result<Bam, Error> {
     } else {
         QUARTER_TURN / 2
     };
-    let eastward = if along < 0 { (2 * QUARTER_TURN) - angle } else { angle };
-    Ok(Bam(if across < 0 { eastward.wrapping_neg() } else { eastward }))
+    let angle = if from_east >> 31 == 0 { angle } else { (2 * QUARTER_TURN) - angle };
+    Ok(Bam(if longitude >> 31 == 0 { angle } else { angle.wrapping_neg() }))
 }
 
 /// The declination of the Sun, of the date.
@@ -103,11 +99,10 @@ pub fn sun_right_ascension_fx(unix_s: u32) -> Result<Bam, Error> {
 pub fn sun_declination_fx(unix_s: u32) -> Result<SignedBam, Error> {
     allowed(unix_s < YEAR_2100, 1)?;
     let (longitude, obliquity) = ecliptic(unix_s);
-    let across = sine(longitude);
-    let north = high(size(across), size(sine(obliquity))) << 1; // 2^-31, at most 0.4
+    let north = high(size_of_sine(longitude), size_of_sine(obliquity)) << 1; // 2^-31, at most 0.4
     let adjacent = root::rounded((1 << 62) - wide(north, north))?;
     let angle = half_in_bam(arc::twice_arctangent(divide((north as u64) << 32, adjacent).0)) as i32;
-    Ok(SignedBam(if across < 0 { -angle } else { angle }))
+    Ok(SignedBam(if longitude >> 31 == 0 { angle } else { -angle }))
 }
 
 /// Longitude and obliquity in radians.

@@ -107,6 +107,13 @@ fn drifts_of_nearly_a_day() {
         let drift = if r.below(3) == 0 { 86_164.0905 * close } else { 86_164.0905 * (1.0 - close) };
         vec![cut(drift.max(1e-9)), cut(polar_degrees(r))]
     });
+    // Where the short way and the long one meet: at 1714 s, and by a sine of 1/16.
+    check_fixed("true_field_from_drift", |r| {
+        let drift = 1_714_000 + aside(r) % 100_000;
+        let sine = (drift.max(1_714_000) as f64 / 86_164_090.5 * std::f64::consts::FRAC_PI_2).sin();
+        let declination = (0.0625 / sine).min(1.0).acos() / std::f64::consts::TAU * TURN as f64;
+        vec![drift, if r.below(2) == 0 { polar(r) } else { declination as i64 + aside(r) % 1000 }]
+    });
     // All of the equator but the last half millisecond.
     let field = row("true_field_from_drift").fixed;
     let last = field(&[86_164_090, 0]).unwrap();
@@ -157,6 +164,11 @@ fn mounts_near_the_zenith() {
         check_floats(stem, degrees);
     }
     for stem in ["field_rotation_rate", "azimuth_rate"] {
+        // Where the short way and the long one meet, at a cosine of 1/4.
+        check_fixed(stem, |r| {
+            let altitude = 900_995_968 + aside(r) % 1_000_000;
+            vec![polar(r), crossing(r), if r.below(2) == 0 { altitude } else { -altitude }]
+        });
         for altitude in [QUARTER, -QUARTER] {
             assert_eq!((row(stem).fixed)(&[5, 7, altitude]), Err(Error::new(Cause::Undefined, 3)));
         }

@@ -1,6 +1,6 @@
 //! How fast and how long a star drifts when the drive stands still.
 
-use super::{QUARTER_TURN, RATE, cosine, quarter};
+use super::{QUARTER_TURN, RATE, cosine, quarter, short_cosine};
 #[cfg(feature = "float")]
 use super::{RATE_ARCSEC, SIDEREAL_DAY_S, quarter_of_degrees};
 #[cfg(feature = "float")]
@@ -30,7 +30,7 @@ const TURN_MAS: u32 = 1_296_000_000;
 /// Error: at most 0.51 LSB; float 3 ulp.
 pub fn drift_rate_fx(declination: SignedBam) -> Result<MicroarcsecondsPerSecond, Error> {
     quarter(declination, 1)?;
-    let rate = wide((cosine(declination) >> 31) as u32, RATE); // 2^-39
+    let rate = wide(short_cosine(declination), RATE); // 2^-39
     Ok(MicroarcsecondsPerSecond(((rate + (1 << 38)) >> 39) as u32))
 }
 
@@ -65,17 +65,23 @@ pub fn drift_time_fx(field: Milliarcseconds, declination: SignedBam) -> Result<M
     if before_pole <= 0 {
         return Err(Error::new(Cause::NeverLeft, 0));
     }
-    let cosine = (cosine(declination) >> 31) as u32; // 2^-31
+    let cosine = short_cosine(declination);
     let path = wide(field.0, 2_284_394_758) + (cosine >> 1) as u64; // 2^35 / w
     if path >> 25 < cosine as u64 && cosine >> 24 != 0 {
         // Under 2^21 ms, and half a degree from the pole, the arc sine's next term does: y / 6 of the time, y = (w time / 4)^2 sin^2 d.
         let sixteenths = divide::divide(path, cosine).0;
-        let square_of_sine = ((1 << 62) - wide(cosine, cosine)) >> 30; // 2^-32
-        let y = high((wide(sixteenths, sixteenths) >> 18) as u32, square_of_sine as u32);
-        let more = high(sixteenths, high(y, 2_142_819_149)) >> 11; // (w / 4)^2 / 6, to make y / 6 in 2^-43
+        let part = sixth((wide(sixteenths, sixteenths) >> 18) as u32, cosine);
+        let more = high(sixteenths, part) >> 11;
         return Ok(Milliseconds((sixteenths + more + 8) >> 4));
     }
     Ok(wide_drift(from_pole, before_pole as u64))
+}
+
+/// (w t / 4)^2 sin^2 d / 6 in steps of 2^-43, from the square of milliseconds in steps of 2^10 and cos d in steps of 2^-31.
+#[inline(always)]
+fn sixth(square_of_time: u32, cosine: u32) -> u32 {
+    let square_of_sine = ((1 << 62) - wide(cosine, cosine)) >> 30; // 2^-32
+    high(high(square_of_time, square_of_sine as u32), 2_142_819_149)
 }
 
 /// The same for any field, from the star's distance from the pole and what that has over F/4.
@@ -146,6 +152,13 @@ pub fn true_field_from_drift_fx(
     present(drift.0, 1)?;
     allowed(drift.0 <= 86_164_090, 1)?;
     quarter(declination, 2)?;
+    if drift.0 < 1_714_000 {
+        // w t / 4 is under 1/32, so the first two terms do.
+        let cosine = short_cosine(declination);
+        let straight = high((wide(drift.0, cosine) >> 20) as u32, 4_037_556_121); // w, 2^-7
+        let less = high(straight, sixth((wide(drift.0, drift.0) >> 10) as u32, cosine)) >> 11;
+        return Ok(Milliarcseconds((straight - less + 64) >> 7));
+    }
     let (_, quarter_path) = wide_by(53_522_134_240, drift.0); // w t/4, 2^-64 of a turn
     let sine = high_64(cosine(declination) << 1, sine_fine(quarter_path) << 1); // 2^-62
     if sine >> 58 == 0 {

@@ -2,7 +2,7 @@
 
 #[cfg(feature = "float")]
 use super::{RATE_RADIANS, quarter_of_degrees};
-use super::{cosine, quarter};
+use super::{cosine, quarter, short_cosine};
 #[cfg(feature = "float")]
 use crate::math::degrees;
 use crate::math::divide::{self, Constant, divide, normalise};
@@ -41,13 +41,18 @@ pub fn trail_free_exposure_fx(
     present(tolerance.0, 2)?;
     present(focal_length.0, 3)?;
     quarter(declination, 4)?;
-    let cosine = cosine(declination);
-    if cosine == 0 {
-        return Err(Error::OVERFLOW);
-    }
-    // 28 bits do, so the leading words of each.
+    // 24 bits do, so the leading words of each.
     let (path, path_below) = arc::leading(wide(tolerance.0, pixel.0));
-    let (cosine, cosine_below) = arc::leading(cosine);
+    let short = short_cosine(declination);
+    let (cosine, cosine_below) = if short >> 24 != 0 {
+        let (cosine, shift) = normalise(short);
+        (cosine, 31 - shift as i32)
+    } else {
+        match cosine(declination) {
+            0 => return Err(Error::OVERFLOW),
+            cosine => arc::leading(cosine),
+        }
+    };
     let (length, length_shift) = normalise(focal_length.0);
     let n = high(path, 3_510_640_876); // 1000 / (65536 w), 2^-24
     let d = high(length, cosine);

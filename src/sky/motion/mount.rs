@@ -1,6 +1,6 @@
 //! What the sky asks of a mount that stands on the ground.
 
-use super::{QUARTER_TURN, RATE, cosine, quarter};
+use super::{QUARTER_TURN, RATE, cosine, quarter, short_cosine};
 #[cfg(feature = "float")]
 use super::{RATE_ARCSEC, RATE_RADIANS, quarter_of_degrees};
 #[cfg(feature = "float")]
@@ -23,6 +23,26 @@ fn rate_over(x: u64, cosine: u64, negative: bool) -> Result<SignedMicroarcsecond
     let size = divide::by_64(upper >> 8, (upper as u64) << 56 | lower >> 8, cosine)? as i64;
     let signed = if negative { -size } else { size };
     i32::try_from(signed).map(SignedMicroarcsecondsPerSecond).map_err(|_| Error::OVERFLOW)
+}
+
+/// w x / cosine with a sign, both in steps of 2^-31, the cosine 1/4 or more.
+#[inline(always)]
+fn short_rate_over(x: u32, cosine: u32, negative: bool) -> SignedMicroarcsecondsPerSecond {
+    let eighths = divide::divide(wide(x, RATE) >> 5, cosine).0; // at most eight times 4 w
+    let size = ((eighths + 4) >> 3) as i32;
+    SignedMicroarcsecondsPerSecond(if negative { -size } else { size })
+}
+
+/// a b in steps of 2^-31, as they are.
+#[inline(always)]
+fn short_product(a: u32, b: u32) -> u32 {
+    (wide(a, b) >> 31) as u32
+}
+
+/// Whether an azimuth is on the north side; on the border it does not matter.
+#[inline(always)]
+fn northern(azimuth: Bam) -> bool {
+    azimuth.0.wrapping_add(QUARTER_TURN) >> 31 == 0
 }
 
 /// a b in steps of 2^-62, as they are.
@@ -73,9 +93,14 @@ pub fn field_rotation_rate_fx(
     altitude: SignedBam,
 ) -> Result<SignedMicroarcsecondsPerSecond, Error> {
     off_the_zenith(latitude, altitude)?;
-    let toward_north = sine::sine(azimuth.0.wrapping_add(QUARTER_TURN));
-    let share = product(cosine(latitude), toward_north.unsigned_abs());
-    rate_over(share, cosine(altitude), toward_north > 0)
+    let (north, from_east) = (northern(azimuth), azimuth.0.wrapping_add(QUARTER_TURN));
+    let below = short_cosine(altitude);
+    if below >> 29 != 0 {
+        let share = short_product(short_cosine(latitude), sine::size_of_sine(from_east));
+        return Ok(short_rate_over(share, below, north));
+    }
+    let share = product(cosine(latitude), sine::sine(from_east).unsigned_abs());
+    rate_over(share, cosine(altitude), north)
 }
 
 /// Float form of [`field_rotation_rate_fx`].
@@ -108,15 +133,28 @@ pub fn azimuth_rate_fx(
     altitude: SignedBam,
 ) -> Result<SignedMicroarcsecondsPerSecond, Error> {
     off_the_zenith(latitude, altitude)?;
-    let (polar, high_up) = (sine::sine(latitude.0 as u32), sine::sine(altitude.0 as u32));
-    let toward_north = sine::sine(azimuth.0.wrapping_add(QUARTER_TURN));
-    let cosine_of_altitude = cosine(altitude);
-    let share = product(cosine(latitude), toward_north.unsigned_abs());
-    let steady = product(polar.unsigned_abs(), cosine_of_altitude) as i64;
-    let swing = product(share, high_up.unsigned_abs()) as i64;
-    let steady = if polar < 0 { -steady } else { steady };
-    let rest = if (toward_north < 0) == (high_up < 0) { steady - swing } else { steady + swing };
-    rate_over(rest.unsigned_abs(), cosine_of_altitude, rest < 0)
+    let (lat, alt, from_east) = (latitude.0 as u32, altitude.0 as u32, azimuth.0.wrapping_add(QUARTER_TURN));
+    let below = short_cosine(altitude);
+    // The sizes of sin lat cos h and of cos lat cos A sin h.
+    let short = below >> 29 != 0;
+    let (steady, swing) = if short {
+        let share = short_product(short_cosine(latitude), sine::size_of_sine(from_east));
+        (
+            short_product(sine::size_of_sine(lat), below) as i64,
+            short_product(share, sine::size_of_sine(alt)) as i64,
+        )
+    } else {
+        let size = |angle: u32| sine::sine(angle).unsigned_abs();
+        let share = product(cosine(latitude), size(from_east));
+        (product(size(lat), cosine(altitude)) as i64, product(share, size(alt)) as i64)
+    };
+    let steady = if latitude.0 < 0 { -steady } else { steady };
+    let rest = if northern(azimuth) == (altitude.0 >= 0) { steady - swing } else { steady + swing };
+    if short {
+        Ok(short_rate_over(rest.unsigned_abs() as u32, below, rest < 0))
+    } else {
+        rate_over(rest.unsigned_abs(), cosine(altitude), rest < 0)
+    }
 }
 
 /// Float form of [`azimuth_rate_fx`].
@@ -149,10 +187,9 @@ pub fn altitude_rate_fx(
 ) -> Result<SignedMicroarcsecondsPerSecond, Error> {
     quarter(latitude, 1)?;
     quarter(altitude, 3)?;
-    let toward_east = sine::sine(azimuth.0);
-    let share = wide((cosine(latitude) >> 31) as u32, (toward_east.unsigned_abs() >> 31) as u32) >> 31;
-    let rate = ((wide(share as u32, RATE) + (1 << 38)) >> 39) as i32;
-    Ok(SignedMicroarcsecondsPerSecond(if toward_east < 0 { -rate } else { rate }))
+    let share = short_product(short_cosine(latitude), sine::size_of_sine(azimuth.0));
+    let rate = ((wide(share, RATE) + (1 << 38)) >> 39) as i32;
+    Ok(SignedMicroarcsecondsPerSecond(if azimuth.0 >> 31 == 0 { rate } else { -rate }))
 }
 
 /// Float form of [`altitude_rate_fx`].
@@ -239,10 +276,9 @@ pub fn misalignment_drift_fx(
     hour_angle: Bam,
 ) -> Result<SignedMicroarcsecondsPerSecond, Error> {
     allowed(polar_error.0 <= 18_000_000, 1)?;
-    let sine = sine::sine(hour_angle.0);
     let most = (wide(polar_error.0, 2_505_551_930) >> 25) as u32; // w, to 2^-10 uas
-    let size = (high(most, (sine.unsigned_abs() >> 30).min(u32::MAX as u64) as u32) + (1 << 9)) >> 10;
-    Ok(SignedMicroarcsecondsPerSecond(if sine > 0 { -(size as i32) } else { size as i32 }))
+    let size = ((high(most, sine::size_of_sine(hour_angle.0)) + (1 << 8)) >> 9) as i32;
+    Ok(SignedMicroarcsecondsPerSecond(if hour_angle.0 >> 31 == 0 { -size } else { size }))
 }
 
 /// Float form of [`misalignment_drift_fx`].
