@@ -4001,6 +4001,48 @@ fieldstop_status fieldstop_sun_declination_f64(uint32_t unix_s,
 #endif
 
 /**
+ * Gives the angle from a direction to the centre of the Sun, in milliarcseconds.
+ *
+ * The great circle to the place that sun_right_ascension and sun_declination give (Smart, Textbook on Spherical
+ * Astronomy).
+ * Caution: nothing that is computed makes it safe to look near the Sun. The direction is of the date: one of J2000
+ * is 0.36 degrees off in 2026. The disc of the Sun reaches 0.27 degrees from its centre, and a finder or a mount's
+ * path may come nearer than the telescope does.
+ * Ranges: declination_bam -2^30 to 2^30; unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year
+ * 2100.
+ * Error: at most 4 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
+ * from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_clearance_fx(uint32_t right_ascension_bam,
+                                            int32_t declination_bam,
+                                            uint32_t unix_s,
+                                            uint32_t *clearance_mas);
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle from a direction to the centre of the Sun, in arcseconds, in double.
+ *
+ * The great circle to the place that sun_right_ascension and sun_declination give (Smart, Textbook on Spherical
+ * Astronomy).
+ * Caution: nothing that is computed makes it safe to look near the Sun. The direction is of the date: one of J2000
+ * is 0.36 degrees off in 2026. The disc of the Sun reaches 0.27 degrees from its centre, and a finder or a mount's
+ * path may come nearer than the telescope does.
+ * Ranges: right_ascension_deg 0 to 360; declination_deg -90 to 90; unix_s, seconds from 1970 January 1, 0 h UTC,
+ * under 4102444800, the year 2100.
+ * Error: at most 10^-6 arcsec from the expression. The expression is within 0.017 degrees, on the sky, of a full
+ * ephemeris from 1970 to 2100.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_clearance_f64(double right_ascension_deg,
+                                             double declination_deg,
+                                             uint32_t unix_s,
+                                             double *clearance_arcsec);
+#endif
+
+/**
  * Gives the power of the Sun's light that an aperture takes in, in milliwatts.
  *
  * 1000 W/m^2 (pi / 4) D^2: the Sun high in a clear sky (common practice).

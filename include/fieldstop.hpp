@@ -3286,6 +3286,24 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<degrees_of_arc_f64> sun_declination_f6
 }
 #endif
 
+/** Gives the angle from a direction to the centre of the Sun, in milliarcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> sun_clearance_fx(binary_angle right_ascension_bam, signed_binary_angle declination_bam, seconds unix_s)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_sun_clearance_fx(right_ascension_bam.count(), declination_bam.count(), unix_s.count(), &given);
+    return access::given<milliarcseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the angle from a direction to the centre of the Sun, in arcseconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> sun_clearance_f64(degrees_of_arc_f64 right_ascension_deg, degrees_of_arc_f64 declination_deg, seconds unix_s)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_clearance_f64(right_ascension_deg.count(), declination_deg.count(), unix_s.count(), &given);
+    return access::given<arcseconds_f64>(number, given);
+}
+#endif
+
 /** Gives the power of the Sun's light that an aperture takes in, in milliwatts. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliwatts> collected_sunlight_fx(micrometres effective_aperture_um)
 {

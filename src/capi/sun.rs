@@ -2,7 +2,7 @@
 
 use super::{fieldstop_status, give};
 use crate::sky::sun;
-use crate::units::Micrometres;
+use crate::units::{Bam, Micrometres, SignedBam};
 
 /// Gives the right ascension of the Sun, of the date, as binary angle.
 ///
@@ -84,6 +84,59 @@ pub unsafe extern "C" fn fieldstop_sun_declination_f64(
 ) -> fieldstop_status {
     // SAFETY: the caller's promise about the pointer.
     unsafe { give(declination_deg, 2, || sun::sun_declination(unix_s)) }
+}
+
+/// Gives the angle from a direction to the centre of the Sun, in milliarcseconds.
+///
+/// The great circle to the place that sun_right_ascension and sun_declination give (Smart, Textbook on Spherical
+/// Astronomy).
+/// Caution: nothing that is computed makes it safe to look near the Sun. The direction is of the date: one of J2000
+/// is 0.36 degrees off in 2026. The disc of the Sun reaches 0.27 degrees from its centre, and a finder or a mount's
+/// path may come nearer than the telescope does.
+/// Ranges: declination_bam -2^30 to 2^30; unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year
+/// 2100.
+/// Error: at most 4 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
+/// from 1970 to 2100.
+/// Statuses: null pointer, out of range.
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_sun_clearance_fx(
+    right_ascension_bam: u32,
+    declination_bam: i32,
+    unix_s: u32,
+    clearance_mas: *mut u32,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe {
+        give(clearance_mas, 4, || {
+            sun::sun_clearance_fx(Bam(right_ascension_bam), SignedBam(declination_bam), unix_s)
+        })
+    }
+}
+
+/// Gives the angle from a direction to the centre of the Sun, in arcseconds, in double.
+///
+/// The great circle to the place that sun_right_ascension and sun_declination give (Smart, Textbook on Spherical
+/// Astronomy).
+/// Caution: nothing that is computed makes it safe to look near the Sun. The direction is of the date: one of J2000
+/// is 0.36 degrees off in 2026. The disc of the Sun reaches 0.27 degrees from its centre, and a finder or a mount's
+/// path may come nearer than the telescope does.
+/// Ranges: right_ascension_deg 0 to 360; declination_deg -90 to 90; unix_s, seconds from 1970 January 1, 0 h UTC,
+/// under 4102444800, the year 2100.
+/// Error: at most 10^-6 arcsec from the expression. The expression is within 0.017 degrees, on the sky, of a full
+/// ephemeris from 1970 to 2100.
+/// Statuses: null pointer, out of range, not finite.
+#[cfg(all(feature = "float", not(target_arch = "avr")))]
+#[must_use]
+#[unsafe(no_mangle)]
+pub unsafe extern "C" fn fieldstop_sun_clearance_f64(
+    right_ascension_deg: f64,
+    declination_deg: f64,
+    unix_s: u32,
+    clearance_arcsec: *mut f64,
+) -> fieldstop_status {
+    // SAFETY: the caller's promise about the pointer.
+    unsafe { give(clearance_arcsec, 4, || sun::sun_clearance(right_ascension_deg, declination_deg, unix_s)) }
 }
 
 /// Gives the power of the Sun's light that an aperture takes in, in milliwatts.

@@ -1495,6 +1495,16 @@ int main(void)
     }
 #endif
     {
+        fieldstop_status (*function)(uint32_t, int32_t, uint32_t, uint32_t *) = fieldstop_sun_clearance_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, uint32_t, double *) = fieldstop_sun_clearance_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
         fieldstop_status (*function)(uint32_t, uint32_t *) = fieldstop_collected_sunlight_fx;
         present = (any_function)function;
     }

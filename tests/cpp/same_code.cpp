@@ -4788,6 +4788,44 @@ fieldstop_status typed_sun_declination_f64(uint32_t unix_s, double *out)
 }
 #endif
 
+fieldstop_status plain_sun_clearance_fx(uint32_t right_ascension_bam, int32_t declination_bam, uint32_t unix_s, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_sun_clearance_fx(right_ascension_bam, declination_bam, unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_clearance_fx(uint32_t right_ascension_bam, int32_t declination_bam, uint32_t unix_s, uint32_t *out)
+{
+    const auto given = fieldstop::sun_clearance_fx(fieldstop::binary_angle(right_ascension_bam), fieldstop::signed_binary_angle(declination_bam), fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_sun_clearance_f64(double right_ascension_deg, double declination_deg, uint32_t unix_s, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_clearance_f64(right_ascension_deg, declination_deg, unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_clearance_f64(double right_ascension_deg, double declination_deg, uint32_t unix_s, double *out)
+{
+    const auto given = fieldstop::sun_clearance_f64(fieldstop::degrees_of_arc_f64(right_ascension_deg), fieldstop::degrees_of_arc_f64(declination_deg), fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
 fieldstop_status plain_collected_sunlight_fx(uint32_t effective_aperture_um, uint32_t *out)
 {
     uint32_t given;

@@ -1,6 +1,6 @@
 use super::near;
 use fieldstop::sky::sun::*;
-use fieldstop::units::Micrometres;
+use fieldstop::units::{Bam, Micrometres, SignedBam};
 
 /// Right ascension and declination in degrees, of the fixed and of the float form.
 fn places(unix: u32) -> [(f64, f64); 2] {
@@ -54,13 +54,42 @@ fn apparent_places_from_1970_to_2100() {
     let mut count = 0;
     for line in include_str!("sun_places.csv").lines() {
         let numbers: Vec<f64> = line.split(',').map(|x| x.parse().unwrap()).collect();
-        worst = worst.max(check(numbers[0] as u32, numbers[1], numbers[2]));
+        let (unix, east, north) = (numbers[0] as u32, numbers[1], numbers[2]);
+        worst = worst.max(check(unix, east, north));
+        // A telescope on the true Sun is told that it is there, and one opposite that it is opposite.
+        let bam = |degrees: f64| (degrees / 360.0 * 4294967296.0).round();
+        let (east_bam, north_bam) = (bam(east) as u32, bam(north) as i32);
+        let fixed =
+            |east, north| sun_clearance_fx(Bam(east), SignedBam(north), unix).unwrap().0 as f64 / 3.6e6;
+        near(fixed(east_bam, north_bam), 0.0, 0.02);
+        near(fixed(east_bam.wrapping_add(1 << 31), -north_bam), 180.0, 0.02);
+        near(sun_clearance(east, north, unix).unwrap() / 3600.0, 0.0, 0.02);
+        near(sun_clearance((east + 180.0) % 360.0, -north, unix).unwrap() / 3600.0, 180.0, 0.02);
         count += 1;
     }
     println!("the Sun: {worst:.5} degrees off at worst, of {count} places");
     assert_eq!(count, 503);
     // The worst moment of 63310 is among them.
     near(worst, 0.0167, 0.0001);
+}
+
+#[test]
+fn clearances_by_the_seasons() {
+    // At a solstice the Sun is as far from a pole as the obliquity leaves, at an equinox a quarter of the sky from both, and
+    // a quarter from the other equinox's points (Meeus, Astronomical Algorithms, 25 to 27; the moments as above).
+    for (unix, east, north, published) in [
+        (961_552_080, 0.0, 90.0, 90.0 - 23.439),
+        (977_405_820, 123.0, 90.0, 90.0 + 23.439),
+        (953_537_700, 77.0, -90.0, 90.0),
+        (953_537_700, 90.0, 0.0, 90.0),
+        (953_537_700, 180.0, 0.0, 180.0),
+        (961_552_080, 270.0, -23.439, 180.0),
+    ] {
+        let bam = |degrees: f64| (degrees / 360.0 * 4294967296.0).round();
+        near(sun_clearance(east, north, unix).unwrap() / 3600.0, published, 0.02);
+        let fixed = sun_clearance_fx(Bam(bam(east) as u32), SignedBam(bam(north) as i32), unix).unwrap();
+        near(fixed.0 as f64 / 3.6e6, published, 0.02);
+    }
 }
 
 #[test]

@@ -99,6 +99,7 @@ const DIRECTIONS: &[(&str, &str)] = &[
     ("misalignment_drift", "."),
     ("sun_right_ascension", "."),
     ("sun_declination", "."),
+    ("sun_clearance", "."),
     ("collected_sunlight", "+"),
 ];
 

@@ -235,6 +235,25 @@ fn midnights_year_ends_and_the_last_second() {
             vec![(quarter + aside(r) % 1_000_000).clamp(0, 4_102_444_799)]
         });
     }
+    // Next to the Sun, opposite to it, and at the poles.
+    let (east, north) = (row("sun_right_ascension").fixed, row("sun_declination").fixed);
+    check("sun_clearance", |r| {
+        let unix = r.below(4_102_444_800) as i64;
+        let (east, north) = (east(&[unix]).unwrap(), north(&[unix]).unwrap());
+        let beside = |r: &mut Random| aside(r) >> r.below(3);
+        match r.below(4) {
+            0 => {
+                vec![(east + beside(r)).rem_euclid(TURN), (north + beside(r)).clamp(-QUARTER, QUARTER), unix]
+            }
+            1 => vec![
+                (east + TURN / 2 + beside(r)).rem_euclid(TURN),
+                (beside(r) - north).clamp(-QUARTER, QUARTER),
+                unix,
+            ],
+            2 => vec![crossing(r), polar(r), unix],
+            _ => vec![east, north, unix],
+        }
+    });
     check("collected_sunlight", |r| {
         // The largest that fits is 73.949 m of aperture.
         vec![if r.below(2) == 0 { 73_949_375 + aside(r) % 100 } else { length(r, 32) }]

@@ -119,6 +119,18 @@ proptest! {
         prop_assert!(degrees(after.1).abs() < 23.45);
     }
 
+    /// No one is nearer to the Sun than its declination tells, and from the Sun's own place there is nothing to go.
+    #[test]
+    fn the_sun_is_where_it_is(unix in 0u32..4_102_444_800, east in any::<u32>(), north in -QUARTER..=QUARTER) {
+        let (sun_east, sun_north) = (sun_right_ascension_fx(unix).unwrap(), sun_declination_fx(unix).unwrap());
+        prop_assert!(sun_clearance_fx(sun_east, sun_north, unix).unwrap().0 <= 1);
+        let clearance = sun_clearance_fx(Bam(east), SignedBam(north), unix).unwrap().0 as f64;
+        let least = (north.abs_diff(sun_north.0)) as f64 / 4294967296.0 * 1_296e6;
+        prop_assert!(clearance >= least - 2.0 && clearance <= 648e6);
+        let opposite = sun_clearance_fx(Bam(east.wrapping_add(1 << 31)), SignedBam(-north), unix).unwrap().0 as f64;
+        prop_assert!((clearance + opposite - 648e6).abs() <= 2.0);
+    }
+
     /// Twice the aperture takes in four times the light.
     #[test]
     fn sunlight_goes_by_the_square(aperture in 1u32..36_000_000) {

@@ -264,6 +264,9 @@ ROW(sun_right_ascension, DRAW(1500000000u, 2500000000u, 0u, 4102444799u), fields
 ROW(sun_declination, DRAW(1500000000u, 2500000000u, 0u, 4102444799u), fieldstop_sun_declination_fx(a[0], (int32_t *)&result))
 #endif
 #if HAS_ROW(88)
+ROW(sun_clearance, DRAW(1048576u, 4294967295u, 0u, 4294967295u) DRAW(1048576u, 1073741824u, 3221225472u, 1073741824u) DRAW(1500000000u, 2500000000u, 0u, 4102444799u), fieldstop_sun_clearance_fx(a[0], (int32_t)a[1], a[2], &result))
+#endif
+#if HAS_ROW(89)
 ROW(collected_sunlight, DRAW(40000u, 500000u, 0u, 4294967295u), fieldstop_collected_sunlight_fx(a[0], &result))
 #endif
-#define ROWS 89
+#define ROWS 90

@@ -38,6 +38,18 @@ fn declination(a: &[Big]) -> Big {
     degrees((&x / (big(1.0) - &x * &x).sqrt()).atan())
 }
 
+/// 2 atan sqrt(hav / (1 - hav)) in arcseconds, hav = sin^2(difference of declinations / 2) and so on.
+fn clearance(a: &[Big]) -> Big {
+    let sun = [right_ascension(&a[2..]), declination(&a[2..])];
+    let half_sine = |x: Big| sine(&(x / big(2.0)));
+    let (north, east) = (half_sine(&a[1] - &sun[1]), half_sine(&a[0] - &sun[0]));
+    let haversine = &north * &north + cosine(&a[1]) * cosine(&sun[1]) * &east * &east;
+    if haversine >= big(1.0) {
+        return big(648_000.0);
+    }
+    big(2.0) * radian() * (&haversine / (big(1.0) - &haversine)).sqrt().atan()
+}
+
 /// Of the expression, not of the Sun.
 const PLACE: Owed = Owed { lsb: 5.0, part: 0.0 };
 const FLOAT_PLACE: FloatOwed = FloatOwed::Absolute(|_| 1e-10);
@@ -54,6 +66,11 @@ pub fn rows() -> Vec<Row> {
             double_owed: FLOAT_PLACE,
             ..row!(f64 only sun::sun_declination [0 UNIX] -> SIGNED_BAM, PLACE, 0.0, declination,
                 sun_declination_fx fieldstop_sun_declination_fx fieldstop_sun_declination_f64)
+        },
+        Row {
+            double_owed: FloatOwed::Absolute(|_| 1e-6),
+            ..row!(f64 only sun::sun_clearance [0 ordinary("right_ascension_bam", BAM, (1 << 20, U32)), 1 ordinary("declination_bam", SIGNED_BAM, (1 << 20, 1 << 30)).within(-(1 << 30), 1 << 30), 2 UNIX] -> MAS, Owed { lsb: 4.0, part: 0.0 }, 0.0, clearance,
+                sun_clearance_fx fieldstop_sun_clearance_fx fieldstop_sun_clearance_f64)
         },
         row!(sun::collected_sunlight [0 positive("effective_aperture_um", UM, (40_000, 500_000))] -> MW, IRRATIONAL, 2.0,
             |a| pi() / big(4.0) * &a[0] * &a[0],
