@@ -135,13 +135,14 @@ mod header {
             .collect()
     }
 
-    /// `field` for src/capi/field.rs; `setup` for src/setup/camera.rs; what src/capi/mod.rs says belongs to `status`.
+    /// `field` for src/capi/field.rs; `setup` for src/setup/camera.rs and src/capi/setup_choice.rs; what src/capi/mod.rs
+    /// says belongs to `status`.
     fn subject(path: &Path) -> String {
         let mut parts: Vec<&str> = path.iter().map(|part| part.to_str().unwrap()).skip(1).collect();
         if matches!(parts[0], "capi" | "optics" | "sky") {
             parts.remove(0);
         }
-        let name = parts[0].trim_end_matches(".rs");
+        let name = parts[0].trim_end_matches(".rs").split('_').next().unwrap();
         if name == "mod" { "status".to_string() } else { name.to_string() }
     }
 

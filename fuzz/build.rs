@@ -40,10 +40,12 @@ fn call(subject: &str, function: &str) -> String {
         let is_pointer = kind.starts_with('*');
         let value = match size.take() {
             _ if *kind == "*const *const c_char" => "input.texts()".to_string(),
+            // As many as the byte behind it may say.
+            _ if *name == "choices" => "input.take(255)".to_string(),
             Some(size) if is_pointer => format!("input.take({size} as usize)"),
             _ => "input.take(1)".to_string(),
         };
-        let is_size = !is_pointer && (name.ends_with("capacity") || name.ends_with("length"));
+        let is_size = !is_pointer && ["capacity", "length", "_count"].iter().any(|end| name.ends_with(end));
         // All other types follow from the call.
         let kind = if is_size { kind } else { "_" };
         writeln!(code, "        let {name}: {kind} = {value};").unwrap();

@@ -4157,6 +4157,60 @@ fieldstop_status fieldstop_collected_sunlight_f64(double effective_aperture_mm,
 #define FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING 1
 /** Camera readout, fact: over three pixels to the star image (common practice). */
 #define FIELDSTOP_CAMERA_FACT_FINE_SAMPLING 2
+/** Visual target, purpose: the whole target with room around it, as large as that allows. */
+#define FIELDSTOP_PURPOSE_FRAME 0
+/** Visual target, purpose: two stars as far apart to the eye as it needs. */
+#define FIELDSTOP_PURPOSE_SPLIT 1
+/** Visual target, purpose: the nearest exit pupil. */
+#define FIELDSTOP_PURPOSE_EXIT_PUPIL 2
+/** Choices: the place in the list of Barlows and reducers where there is none. */
+#define FIELDSTOP_NO_AMPLIFIER 255
+/** Visual choice, available: magnification_q16. */
+#define FIELDSTOP_VISUAL_CHOICE_MAGNIFICATION 1
+/** Visual choice, available: exit_pupil_um. */
+#define FIELDSTOP_VISUAL_CHOICE_EXIT_PUPIL 2
+/** Visual choice, available: true_field_mas. */
+#define FIELDSTOP_VISUAL_CHOICE_TRUE_FIELD 4
+/** Visual choice, available: fit_q16. */
+#define FIELDSTOP_VISUAL_CHOICE_FIT 8
+/** Visual choice, fact: the exit pupil is wider than the eye's (geometry). */
+#define FIELDSTOP_VISUAL_CHOICE_FACT_WIDE_EXIT_PUPIL 1
+/**
+ * Visual choice, fact: the magnification is over the resolving magnification (Rayleigh 1879, and the observer's
+ * eye).
+ */
+#define FIELDSTOP_VISUAL_CHOICE_FACT_EMPTY_MAGNIFICATION 2
+
+/** Visual choice, fact: the true field comes from the apparent field. */
+#define FIELDSTOP_VISUAL_CHOICE_FACT_FIELD_FROM_APPARENT 4
+/**
+ * Visual choice, fact: the magnification is over that at which the seeing reaches the smallest angle that the eye
+ * parts (common practice).
+ */
+#define FIELDSTOP_VISUAL_CHOICE_FACT_SEEING_SHOWS 8
+
+/** Visual choice, fact: what is wanted is reached. */
+#define FIELDSTOP_VISUAL_CHOICE_FACT_SERVES 16
+/** Visual choice, fact: the separation is under the telescope's Rayleigh limit. */
+#define FIELDSTOP_VISUAL_CHOICE_FACT_UNDER_RESOLUTION 32
+/** Visual choice, fact: the separation is under the seeing (common practice). */
+#define FIELDSTOP_VISUAL_CHOICE_FACT_UNDER_SEEING 64
+/** Camera choice, available: frame_width_mas. */
+#define FIELDSTOP_CAMERA_CHOICE_FRAME_WIDTH 1
+/** Camera choice, available: frame_height_mas. */
+#define FIELDSTOP_CAMERA_CHOICE_FRAME_HEIGHT 2
+/** Camera choice, available: pixel_scale_uas. */
+#define FIELDSTOP_CAMERA_CHOICE_PIXEL_SCALE 4
+/** Camera choice, available: pixels_per_fwhm_q16. */
+#define FIELDSTOP_CAMERA_CHOICE_PIXELS_PER_FWHM 8
+/** Camera choice, available: tiles_wide and tiles_high. */
+#define FIELDSTOP_CAMERA_CHOICE_TILES 16
+/** Camera choice, fact: under two pixels to the star image (common practice, after Shannon 1949). */
+#define FIELDSTOP_CAMERA_CHOICE_FACT_COARSE_SAMPLING 1
+/** Camera choice, fact: over three pixels to the star image (common practice). */
+#define FIELDSTOP_CAMERA_CHOICE_FACT_FINE_SAMPLING 2
+/** Camera choice, fact: one frame takes the whole target. */
+#define FIELDSTOP_CAMERA_CHOICE_FACT_FITS 4
 
 /** A telescope: objective or primary mirror, with the Barlow or reducer that is in use. */
 typedef struct fieldstop_telescope {
@@ -4327,6 +4381,103 @@ typedef struct fieldstop_camera_readout {
     uint32_t pixels_per_fwhm_q16;
 } fieldstop_camera_readout;
 
+/** What an eyepiece is wanted for. */
+typedef struct fieldstop_visual_target {
+    /** Member 1. To frame: the target's longer side, milliarcseconds; not 0. */
+    uint32_t size_mas;
+    /**
+     * Member 2. To frame: the true field over the target's size that is wanted at least, unsigned Q16.16; not
+     * under 65536. 81920, a quarter more than the target, is common practice.
+     */
+    uint32_t room_q16;
+    /** Member 3. To split: the separation of the two stars, microarcseconds; not 0. */
+    uint32_t separation_uas;
+    /** Member 4. For an exit pupil: the one wanted, micrometres; not 0. */
+    uint32_t exit_pupil_um;
+    /**
+     * Member 5. What it is: 0 to frame, 1 to split, 2 for an exit pupil (named constants). Members of the
+     * other two are ignored.
+     */
+    uint8_t purpose;
+    /** Ignored. */
+    uint8_t padding[3];
+} fieldstop_visual_target;
+
+/**
+ * An eyepiece, alone or with a Barlow or reducer, and what speaks for and against it. Members from
+ * `magnification_q16` to `fit_q16` are 0 where their bit in `available` is clear.
+ */
+typedef struct fieldstop_visual_choice {
+    /** Bits of the members that could be known. */
+    uint32_t available;
+    /** Why it stands where it stands; named constants. */
+    uint32_t facts;
+    /** Magnification: M = f k / fe. */
+    uint32_t magnification_q16;
+    /** Exit pupil, micrometres: D fe / (f k). */
+    uint32_t exit_pupil_um;
+    /** Diameter of the sky in view, milliarcseconds. */
+    uint32_t true_field_mas;
+    /**
+     * What it gives over what is wanted. To frame: true field / size. To split: separation times
+     * magnification / eye resolution. For an exit pupil: exit pupil / the one wanted.
+     */
+    uint32_t fit_q16;
+    /** Place of the eyepiece in the list, counted from 0. */
+    uint8_t eyepiece;
+    /** Place of the Barlow or reducer in the list, counted from 0; 255: none. */
+    uint8_t amplifier;
+    /**
+     * 0: it serves, and nothing speaks against it; 1: it serves, but its exit pupil is wide, its magnification
+     * empty or the seeing shows; 2: it does not serve; 3: not known. For an exit pupil never 1.
+     */
+    uint8_t standing;
+    /** 0. */
+    uint8_t padding;
+} fieldstop_visual_choice;
+
+/** What a camera is to take. */
+typedef struct fieldstop_camera_target {
+    /** Member 1. The target's extent along the frame's columns, its width, milliarcseconds; not 0. */
+    uint32_t width_mas;
+    /** Member 2. Its extent along the frame's height, milliarcseconds; not 0. */
+    uint32_t height_mas;
+    /**
+     * Member 3. Share of a frame that the next one takes again where it needs more than one, unsigned Q16.16,
+     * under 65536; 0: none. 0.1 to 0.2 is common practice.
+     */
+    uint32_t overlap_q16;
+} fieldstop_camera_target;
+
+/**
+ * A camera, alone or with a Barlow or reducer, and what it takes to get the whole target. Members from
+ * `frame_width_mas` to `tiles_high` are 0 where their bit in `available` is clear.
+ */
+typedef struct fieldstop_camera_choice {
+    /** Bits of the members that could be known. */
+    uint32_t available;
+    /** Why it stands where it stands; named constants. */
+    uint32_t facts;
+    /** Sky across the frame's columns, milliarcseconds. */
+    uint32_t frame_width_mas;
+    /** Sky across the frame's rows, milliarcseconds. */
+    uint32_t frame_height_mas;
+    /** Sky to one pixel as read out, microarcseconds. */
+    uint32_t pixel_scale_uas;
+    /** Pixels as read out across a star's image. */
+    uint32_t pixels_per_fwhm_q16;
+    /** Frames beside each other that the target's width takes. */
+    uint32_t tiles_wide;
+    /** Frames above each other that its height takes. */
+    uint32_t tiles_high;
+    /** Place of the camera in the list, counted from 0. */
+    uint8_t camera;
+    /** Place of the Barlow or reducer in the list, counted from 0; 255: none. */
+    uint8_t amplifier;
+    /** 0. */
+    uint8_t padding[2];
+} fieldstop_camera_choice;
+
 /**
  * Gives 0 for a telescope that can be used; otherwise the cause, with the number of the first bad member,
  * counted from 1, in the place of the argument.
@@ -4408,6 +4559,60 @@ fieldstop_status fieldstop_camera_readout_compute(const struct fieldstop_telesco
                                                   const struct fieldstop_observer *observer,
                                                   uint32_t wanted,
                                                   struct fieldstop_camera_readout *readout);
+
+/**
+ * Fills `choices` with the best eyepieces for a target, each alone and with each Barlow or reducer, the best first.
+ *
+ * telescope: its own amplification is not used. eyepieces: 1 to 16. amplifiers_q16: what each Barlow or reducer
+ * multiplies the focal length by, none 0, up to 8; may be null where there is none. choice_count: on entry the room in
+ * `choices`, not 0; on success how many are filled, at most eyepieces times (1 + amplifiers). What stands behind
+ * them in `choices` is then 0.
+ * The order, from the first that differs: (1) the lower `standing`; (2) to frame the smaller true field, or the larger
+ * where it does not serve; to split the lower magnification, or the higher where it does not part the stars; for an
+ * exit pupil the smaller ratio of the larger to the smaller; (3) without a Barlow or reducer before with one, then
+ * its place in the list, then the place of the eyepiece.
+ * Values are those of fieldstop_visual_readout_compute, and comparisons are exact.
+ * Caution: never point unfiltered optics at the Sun; follow the maker's instructions and local rules.
+ * Statuses: null pointer; zero or out of range, as the check of the first bad struct gives it, with its position;
+ * zero: eyepiece_count, an amplifier (argument 4), `*choice_count`; out of range: eyepiece_count, amplifier_count.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_visual_choose(const struct fieldstop_telescope *telescope,
+                                         const struct fieldstop_eyepiece *eyepieces,
+                                         uint8_t eyepiece_count,
+                                         const uint32_t *amplifiers_q16,
+                                         uint8_t amplifier_count,
+                                         const struct fieldstop_observer *observer,
+                                         const struct fieldstop_visual_target *target,
+                                         struct fieldstop_visual_choice *choices,
+                                         uint8_t *choice_count);
+
+/**
+ * Fills `choices` with the best cameras for a target, each alone and with each Barlow or reducer, the best first.
+ *
+ * telescope: its own amplification is not used. cameras: 1 to 8. amplifiers_q16: what each Barlow or reducer
+ * multiplies the focal length by, none 0, up to 8; may be null where there is none. choice_count: on entry the room in
+ * `choices`, not 0; on success how many are filled, at most cameras times (1 + amplifiers). What stands behind them
+ * in `choices` is then 0.
+ * Frames overlap by the share of a frame that the target says, rounded down to a milliarcsecond.
+ * The order, from the first that differs: (1) the fewer frames, width times height; last, where they are not known;
+ * (2) neither coarse nor fine sampling before either; (3) the finer pixel scale; (4) without a Barlow or reducer
+ * before with one, then its place in the list, then the place of the camera.
+ * Values are those of fieldstop_camera_readout_compute and fieldstop_tiles_fx.
+ * Caution: never point unfiltered optics at the Sun; follow the maker's instructions and local rules.
+ * Statuses: null pointer; zero or out of range, as the check of the first bad struct gives it, with its position;
+ * zero: camera_count, an amplifier (argument 4), `*choice_count`; out of range: camera_count, amplifier_count.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_camera_choose(const struct fieldstop_telescope *telescope,
+                                         const struct fieldstop_camera *cameras,
+                                         uint8_t camera_count,
+                                         const uint32_t *amplifiers_q16,
+                                         uint8_t amplifier_count,
+                                         const struct fieldstop_observer *observer,
+                                         const struct fieldstop_camera_target *target,
+                                         struct fieldstop_camera_choice *choices,
+                                         uint8_t *choice_count);
 
 /* --------------------------------------------------------------------------------------------------
    Quantities as characters of a display: integers only, into a buffer of the caller's. */

@@ -521,6 +521,52 @@ constexpr uint32_t camera_all = FIELDSTOP_CAMERA_ALL;
 constexpr uint32_t camera_fact_coarse_sampling = FIELDSTOP_CAMERA_FACT_COARSE_SAMPLING;
 /** Camera readout, fact: over three pixels to the star image (common practice) */
 constexpr uint32_t camera_fact_fine_sampling = FIELDSTOP_CAMERA_FACT_FINE_SAMPLING;
+/** Visual target, purpose: the whole target with room around it, as large as that allows */
+constexpr uint8_t purpose_frame = FIELDSTOP_PURPOSE_FRAME;
+/** Visual target, purpose: two stars as far apart to the eye as it needs */
+constexpr uint8_t purpose_split = FIELDSTOP_PURPOSE_SPLIT;
+/** Visual target, purpose: the nearest exit pupil */
+constexpr uint8_t purpose_exit_pupil = FIELDSTOP_PURPOSE_EXIT_PUPIL;
+/** Choices: the place in the list of Barlows and reducers where there is none */
+constexpr uint8_t no_amplifier = FIELDSTOP_NO_AMPLIFIER;
+/** Visual choice, available: magnification_q16 */
+constexpr uint32_t visual_choice_magnification = FIELDSTOP_VISUAL_CHOICE_MAGNIFICATION;
+/** Visual choice, available: exit_pupil_um */
+constexpr uint32_t visual_choice_exit_pupil = FIELDSTOP_VISUAL_CHOICE_EXIT_PUPIL;
+/** Visual choice, available: true_field_mas */
+constexpr uint32_t visual_choice_true_field = FIELDSTOP_VISUAL_CHOICE_TRUE_FIELD;
+/** Visual choice, available: fit_q16 */
+constexpr uint32_t visual_choice_fit = FIELDSTOP_VISUAL_CHOICE_FIT;
+/** Visual choice, fact: the exit pupil is wider than the eye's (geometry) */
+constexpr uint32_t visual_choice_fact_wide_exit_pupil = FIELDSTOP_VISUAL_CHOICE_FACT_WIDE_EXIT_PUPIL;
+/** Visual choice, fact: the magnification is over the resolving magnification (Rayleigh 1879, and the observer's eye) */
+constexpr uint32_t visual_choice_fact_empty_magnification = FIELDSTOP_VISUAL_CHOICE_FACT_EMPTY_MAGNIFICATION;
+/** Visual choice, fact: the true field comes from the apparent field */
+constexpr uint32_t visual_choice_fact_field_from_apparent = FIELDSTOP_VISUAL_CHOICE_FACT_FIELD_FROM_APPARENT;
+/** Visual choice, fact: the magnification is over that at which the seeing reaches the smallest angle that the eye parts (common practice) */
+constexpr uint32_t visual_choice_fact_seeing_shows = FIELDSTOP_VISUAL_CHOICE_FACT_SEEING_SHOWS;
+/** Visual choice, fact: what is wanted is reached */
+constexpr uint32_t visual_choice_fact_serves = FIELDSTOP_VISUAL_CHOICE_FACT_SERVES;
+/** Visual choice, fact: the separation is under the telescope's Rayleigh limit */
+constexpr uint32_t visual_choice_fact_under_resolution = FIELDSTOP_VISUAL_CHOICE_FACT_UNDER_RESOLUTION;
+/** Visual choice, fact: the separation is under the seeing (common practice) */
+constexpr uint32_t visual_choice_fact_under_seeing = FIELDSTOP_VISUAL_CHOICE_FACT_UNDER_SEEING;
+/** Camera choice, available: frame_width_mas */
+constexpr uint32_t camera_choice_frame_width = FIELDSTOP_CAMERA_CHOICE_FRAME_WIDTH;
+/** Camera choice, available: frame_height_mas */
+constexpr uint32_t camera_choice_frame_height = FIELDSTOP_CAMERA_CHOICE_FRAME_HEIGHT;
+/** Camera choice, available: pixel_scale_uas */
+constexpr uint32_t camera_choice_pixel_scale = FIELDSTOP_CAMERA_CHOICE_PIXEL_SCALE;
+/** Camera choice, available: pixels_per_fwhm_q16 */
+constexpr uint32_t camera_choice_pixels_per_fwhm = FIELDSTOP_CAMERA_CHOICE_PIXELS_PER_FWHM;
+/** Camera choice, available: tiles_wide and tiles_high */
+constexpr uint32_t camera_choice_tiles = FIELDSTOP_CAMERA_CHOICE_TILES;
+/** Camera choice, fact: under two pixels to the star image (common practice, after Shannon 1949) */
+constexpr uint32_t camera_choice_fact_coarse_sampling = FIELDSTOP_CAMERA_CHOICE_FACT_COARSE_SAMPLING;
+/** Camera choice, fact: over three pixels to the star image (common practice) */
+constexpr uint32_t camera_choice_fact_fine_sampling = FIELDSTOP_CAMERA_CHOICE_FACT_FINE_SAMPLING;
+/** Camera choice, fact: one frame takes the whole target */
+constexpr uint32_t camera_choice_fact_fits = FIELDSTOP_CAMERA_CHOICE_FACT_FITS;
 /** Angle: decimal seconds under one minute, whole seconds under one degree, whole minutes from there on */
 constexpr uint8_t angle_by_size = FIELDSTOP_ANGLE_BY_SIZE;
 /** Angle: degrees with decimals */
@@ -942,6 +988,178 @@ private:
     ::fieldstop_camera_readout raw_;
 };
 static_assert(sizeof(camera_readout) == sizeof(::fieldstop_camera_readout), "no more than in C");
+
+/** What an eyepiece is wanted for */
+class visual_target {
+public:
+    /** Every member 0. */
+    FIELDSTOP_INLINE constexpr visual_target() : raw_() {}
+    FIELDSTOP_INLINE constexpr explicit visual_target(const ::fieldstop_visual_target &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_visual_target &c() const { return raw_; }
+    /** To frame: the target's longer side, milliarcseconds; not 0 */
+    FIELDSTOP_INLINE constexpr milliarcseconds size() const { return milliarcseconds(raw_.size_mas); }
+    FIELDSTOP_INLINE constexpr visual_target with_size(milliarcseconds size_mas) const
+    {
+        return visual_target(::fieldstop_visual_target{size_mas.count(), raw_.room_q16, raw_.separation_uas, raw_.exit_pupil_um, raw_.purpose, {0, 0, 0}});
+    }
+    /** To frame: the true field over the target's size that is wanted at least, unsigned Q16.16; not under 65536 */
+    FIELDSTOP_INLINE constexpr q16 room() const { return q16(raw_.room_q16); }
+    FIELDSTOP_INLINE constexpr visual_target with_room(q16 room_q16) const
+    {
+        return visual_target(::fieldstop_visual_target{raw_.size_mas, room_q16.count(), raw_.separation_uas, raw_.exit_pupil_um, raw_.purpose, {0, 0, 0}});
+    }
+    /** To split: the separation of the two stars, microarcseconds; not 0 */
+    FIELDSTOP_INLINE constexpr microarcseconds separation() const { return microarcseconds(raw_.separation_uas); }
+    FIELDSTOP_INLINE constexpr visual_target with_separation(microarcseconds separation_uas) const
+    {
+        return visual_target(::fieldstop_visual_target{raw_.size_mas, raw_.room_q16, separation_uas.count(), raw_.exit_pupil_um, raw_.purpose, {0, 0, 0}});
+    }
+    /** For an exit pupil: the one wanted, micrometres; not 0 */
+    FIELDSTOP_INLINE constexpr micrometres exit_pupil() const { return micrometres(raw_.exit_pupil_um); }
+    FIELDSTOP_INLINE constexpr visual_target with_exit_pupil(micrometres exit_pupil_um) const
+    {
+        return visual_target(::fieldstop_visual_target{raw_.size_mas, raw_.room_q16, raw_.separation_uas, exit_pupil_um.count(), raw_.purpose, {0, 0, 0}});
+    }
+    /** What it is: 0 to frame, 1 to split, 2 for an exit pupil (named constants) */
+    FIELDSTOP_INLINE constexpr uint8_t purpose() const { return uint8_t(raw_.purpose); }
+    FIELDSTOP_INLINE constexpr visual_target with_purpose(uint8_t purpose) const
+    {
+        return visual_target(::fieldstop_visual_target{raw_.size_mas, raw_.room_q16, raw_.separation_uas, raw_.exit_pupil_um, purpose, {0, 0, 0}});
+    }
+
+private:
+    ::fieldstop_visual_target raw_;
+};
+static_assert(sizeof(visual_target) == sizeof(::fieldstop_visual_target), "no more than in C");
+
+/** An eyepiece, alone or with a Barlow or reducer, and what speaks for and against it */
+class visual_choice;
+template <> struct given_as<visual_choice> {
+    typedef const visual_choice &type;
+};
+class visual_choice {
+public:
+    FIELDSTOP_INLINE constexpr explicit visual_choice(const ::fieldstop_visual_choice &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_visual_choice &c() const { return raw_; }
+    /** Bits of the members that could be known */
+    FIELDSTOP_INLINE constexpr uint32_t available() const { return raw_.available; }
+    /** Why it stands where it stands; named constants */
+    FIELDSTOP_INLINE constexpr uint32_t facts() const { return raw_.facts; }
+    /** Magnification: M = f k / fe */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> magnification() const
+    {
+        return (raw_.available & FIELDSTOP_VISUAL_CHOICE_MAGNIFICATION) != 0 ? result<q16>(q16(raw_.magnification_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Exit pupil, micrometres: D fe / (f k) */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<micrometres> exit_pupil() const
+    {
+        return (raw_.available & FIELDSTOP_VISUAL_CHOICE_EXIT_PUPIL) != 0 ? result<micrometres>(micrometres(raw_.exit_pupil_um)) : result<micrometres>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Diameter of the sky in view, milliarcseconds */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<milliarcseconds> true_field() const
+    {
+        return (raw_.available & FIELDSTOP_VISUAL_CHOICE_TRUE_FIELD) != 0 ? result<milliarcseconds>(milliarcseconds(raw_.true_field_mas)) : result<milliarcseconds>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** What it gives over what is wanted */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> fit() const
+    {
+        return (raw_.available & FIELDSTOP_VISUAL_CHOICE_FIT) != 0 ? result<q16>(q16(raw_.fit_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Place of the eyepiece in the list, counted from 0 */
+    FIELDSTOP_INLINE constexpr uint8_t eyepiece() const { return raw_.eyepiece; }
+    /** Place of the Barlow or reducer in the list, counted from 0; 255: none */
+    FIELDSTOP_INLINE constexpr uint8_t amplifier() const { return raw_.amplifier; }
+    /** 0: it serves, and nothing speaks against it; 1: it serves, but its exit pupil is wide, its magnification empty or the seeing shows; 2: it does not serve; 3: not known */
+    FIELDSTOP_INLINE constexpr uint8_t standing() const { return raw_.standing; }
+
+private:
+    friend struct access;
+    friend class result<visual_choice>;
+    visual_choice() = default;
+    ::fieldstop_visual_choice raw_;
+};
+static_assert(sizeof(visual_choice) == sizeof(::fieldstop_visual_choice), "no more than in C");
+
+/** What a camera is to take */
+class camera_target {
+public:
+    /** Every member 0. */
+    FIELDSTOP_INLINE constexpr camera_target() : raw_() {}
+    FIELDSTOP_INLINE constexpr explicit camera_target(const ::fieldstop_camera_target &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_camera_target &c() const { return raw_; }
+    /** The target's extent along the frame's columns, its width, milliarcseconds; not 0 */
+    FIELDSTOP_INLINE constexpr milliarcseconds width() const { return milliarcseconds(raw_.width_mas); }
+    FIELDSTOP_INLINE constexpr camera_target with_width(milliarcseconds width_mas) const
+    {
+        return camera_target(::fieldstop_camera_target{width_mas.count(), raw_.height_mas, raw_.overlap_q16});
+    }
+    /** Its extent along the frame's height, milliarcseconds; not 0 */
+    FIELDSTOP_INLINE constexpr milliarcseconds height() const { return milliarcseconds(raw_.height_mas); }
+    FIELDSTOP_INLINE constexpr camera_target with_height(milliarcseconds height_mas) const
+    {
+        return camera_target(::fieldstop_camera_target{raw_.width_mas, height_mas.count(), raw_.overlap_q16});
+    }
+    /** Share of a frame that the next one takes again where it needs more than one, unsigned Q16.16, under 65536; 0: none */
+    FIELDSTOP_INLINE constexpr q16 overlap() const { return q16(raw_.overlap_q16); }
+    FIELDSTOP_INLINE constexpr camera_target with_overlap(q16 overlap_q16) const
+    {
+        return camera_target(::fieldstop_camera_target{raw_.width_mas, raw_.height_mas, overlap_q16.count()});
+    }
+
+private:
+    ::fieldstop_camera_target raw_;
+};
+static_assert(sizeof(camera_target) == sizeof(::fieldstop_camera_target), "no more than in C");
+
+/** A camera, alone or with a Barlow or reducer, and what it takes to get the whole target */
+class camera_choice;
+template <> struct given_as<camera_choice> {
+    typedef const camera_choice &type;
+};
+class camera_choice {
+public:
+    FIELDSTOP_INLINE constexpr explicit camera_choice(const ::fieldstop_camera_choice &raw) : raw_(raw) {}
+    FIELDSTOP_INLINE constexpr const ::fieldstop_camera_choice &c() const { return raw_; }
+    /** Bits of the members that could be known */
+    FIELDSTOP_INLINE constexpr uint32_t available() const { return raw_.available; }
+    /** Why it stands where it stands; named constants */
+    FIELDSTOP_INLINE constexpr uint32_t facts() const { return raw_.facts; }
+    /** Sky across the frame's columns, milliarcseconds */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<milliarcseconds> frame_width() const
+    {
+        return (raw_.available & FIELDSTOP_CAMERA_CHOICE_FRAME_WIDTH) != 0 ? result<milliarcseconds>(milliarcseconds(raw_.frame_width_mas)) : result<milliarcseconds>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Sky across the frame's rows, milliarcseconds */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<milliarcseconds> frame_height() const
+    {
+        return (raw_.available & FIELDSTOP_CAMERA_CHOICE_FRAME_HEIGHT) != 0 ? result<milliarcseconds>(milliarcseconds(raw_.frame_height_mas)) : result<milliarcseconds>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Sky to one pixel as read out, microarcseconds */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<microarcseconds> pixel_scale() const
+    {
+        return (raw_.available & FIELDSTOP_CAMERA_CHOICE_PIXEL_SCALE) != 0 ? result<microarcseconds>(microarcseconds(raw_.pixel_scale_uas)) : result<microarcseconds>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Pixels as read out across a star's image */
+    FIELDSTOP_CHECKED FIELDSTOP_INLINE constexpr result<q16> pixels_per_fwhm() const
+    {
+        return (raw_.available & FIELDSTOP_CAMERA_CHOICE_PIXELS_PER_FWHM) != 0 ? result<q16>(q16(raw_.pixels_per_fwhm_q16)) : result<q16>(status(FIELDSTOP_UNDEFINED));
+    }
+    /** Frames beside each other that the target's width takes */
+    FIELDSTOP_INLINE constexpr uint32_t tiles_wide() const { return raw_.tiles_wide; }
+    /** Frames above each other that its height takes */
+    FIELDSTOP_INLINE constexpr uint32_t tiles_high() const { return raw_.tiles_high; }
+    /** Place of the camera in the list, counted from 0 */
+    FIELDSTOP_INLINE constexpr uint8_t camera() const { return raw_.camera; }
+    /** Place of the Barlow or reducer in the list, counted from 0; 255: none */
+    FIELDSTOP_INLINE constexpr uint8_t amplifier() const { return raw_.amplifier; }
+
+private:
+    friend struct access;
+    friend class result<camera_choice>;
+    camera_choice() = default;
+    ::fieldstop_camera_choice raw_;
+};
+static_assert(sizeof(camera_choice) == sizeof(::fieldstop_camera_choice), "no more than in C");
 
 /** The look of all text */
 typedef ::fieldstop_text_style text_style;
@@ -3372,6 +3590,18 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<camera_readout> camera_readout_compute
     result<camera_readout> given = access::blank<camera_readout>();
     access::finish(given, ::fieldstop_camera_readout_compute(&telescope.c(), &camera.c(), &observer.c(), wanted, access::place(given)));
     return given;
+}
+
+/** Fills `choices` with the best eyepieces for a target, each alone and with each Barlow or reducer, the best first. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status visual_choose(const telescope &telescope, const eyepiece *eyepieces, uint8_t eyepiece_count, const uint32_t *amplifiers_q16, uint8_t amplifier_count, const observer &observer, const visual_target &target, ::fieldstop_visual_choice *choices, uint8_t *choice_count)
+{
+    return status(::fieldstop_visual_choose(&telescope.c(), eyepieces == nullptr ? nullptr : &eyepieces->c(), eyepiece_count, amplifiers_q16, amplifier_count, &observer.c(), &target.c(), choices, choice_count));
+}
+
+/** Fills `choices` with the best cameras for a target, each alone and with each Barlow or reducer, the best first. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE status camera_choose(const telescope &telescope, const camera *cameras, uint8_t camera_count, const uint32_t *amplifiers_q16, uint8_t amplifier_count, const observer &observer, const camera_target &target, ::fieldstop_camera_choice *choices, uint8_t *choice_count)
+{
+    return status(::fieldstop_camera_choose(&telescope.c(), cameras == nullptr ? nullptr : &cameras->c(), camera_count, amplifiers_q16, amplifier_count, &observer.c(), &target.c(), choices, choice_count));
 }
 
 /* Quantities as characters of a display: integers only, into a buffer of the caller's. */

@@ -14,6 +14,7 @@ pub mod light;
 pub mod motion;
 pub mod resolution;
 pub mod setup;
+pub mod setup_choice;
 mod short;
 pub mod status;
 pub mod sun;

@@ -109,13 +109,13 @@ const _: () = {
 /// # Safety
 /// `pointer` is null or points to a T that nobody writes while the borrow lives.
 #[inline(always)]
-unsafe fn borrow<'a, T>(pointer: *const T, position: u8) -> Result<&'a T, Error> {
+pub(super) unsafe fn borrow<'a, T>(pointer: *const T, position: u8) -> Result<&'a T, Error> {
     // SAFETY: the caller's promise.
     unsafe { pointer.as_ref() }.ok_or(Error::new(Cause::NullPointer, position))
 }
 
 #[inline(always)]
-fn status_of(result: Result<(), Error>) -> fieldstop_status {
+pub(super) fn status_of(result: Result<(), Error>) -> fieldstop_status {
     match result {
         Ok(()) => 0,
         Err(error) => error.status(),

@@ -58,19 +58,25 @@ macro_rules! tell {
 use crate::math::divide;
 use crate::status::{Cause, Error};
 use crate::units::Q16;
+use core::iter;
 
 mod camera;
+mod camera_choice;
 mod camera_readout;
 mod eyepiece;
 mod observer;
+mod ranking;
 mod telescope;
+mod visual_choice;
 mod visual_readout;
 
 pub use camera::Camera;
+pub use camera_choice::{CameraChoice, CameraOutfit, CameraTarget};
 pub use camera_readout::CameraReadout;
 pub use eyepiece::Eyepiece;
 pub use observer::Observer;
 pub use telescope::Telescope;
+pub use visual_choice::{VisualChoice, VisualOutfit, VisualTarget};
 pub use visual_readout::VisualReadout;
 
 /// a / b in Q16.16, for quantities that no formula of `optics` divides yet; a is below 2^47.
@@ -80,6 +86,31 @@ fn ratio_q16(a: u64, b: u32) -> Result<Q16, Error> {
         b => divide::rounded(a << 16, b).map(Q16),
     }
 }
+
+/// The most Barlows and reducers that a choice takes.
+const MOST_AMPLIFIERS: usize = 8;
+
+/// Those of a choice: argument 4, their number argument 5.
+fn check_amplifiers(amplifiers: &[Q16]) -> Result<(), Error> {
+    if amplifiers.len() > MOST_AMPLIFIERS {
+        return Err(Error::new(Cause::OutOfRange, 5));
+    }
+    if amplifiers.contains(&Q16(0)) {
+        return Err(Error::new(Cause::Zero, 4));
+    }
+    Ok(())
+}
+
+/// The telescope with none of the amplifiers, and with each, beside that one's place in the list; 255 for none.
+fn with_each(telescope: &Telescope, amplifiers: &[Q16]) -> impl Iterator<Item = (u8, Telescope)> {
+    let places = iter::once(NO_AMPLIFIER).chain(0..);
+    places
+        .zip(iter::once(&Q16::ONE).chain(amplifiers))
+        .map(|(place, amplification)| (place, Telescope { amplification_q16: amplification.0, ..*telescope }))
+}
+
+/// The place of an amplifier where there is none.
+const NO_AMPLIFIER: u8 = 255;
 
 /// Half a turn in milliarcseconds: a field of view must be narrower.
 const HALF_TURN_MAS: u32 = 648_000_000;
@@ -91,6 +122,9 @@ const _: () = {
     assert!(size_of::<Eyepiece>() == 16 && offset_of!(Eyepiece, mapping) == 12);
     assert!(size_of::<Camera>() == 12 && offset_of!(Camera, rows) == 6 && offset_of!(Camera, binning) == 8);
     assert!(size_of::<Observer>() == 20);
+    assert!(size_of::<VisualTarget>() == 20 && size_of::<CameraTarget>() == 12);
+    assert!(size_of::<VisualChoice>() == 28 && offset_of!(VisualChoice, eyepiece) == 24);
+    assert!(size_of::<CameraChoice>() == 36 && offset_of!(CameraChoice, camera) == 32);
     assert!(size_of::<VisualReadout>() == 56 && offset_of!(VisualReadout, limiting_magnitude_mmag) == 48);
     assert!(size_of::<CameraReadout>() == 44 && offset_of!(CameraReadout, pixels_per_fwhm_q16) == 40);
 };

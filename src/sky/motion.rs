@@ -27,7 +27,7 @@ const RATE: u32 = 3_850_513_573;
 
 /// Seconds in a sidereal day.
 #[cfg(feature = "float")]
-const SIDEREAL_DAY_S: f64 = 86_164.0905;
+const SIDEREAL_DAY_S: f64 = 86_164.090_5;
 
 /// w in arcseconds per second.
 #[cfg(feature = "float")]

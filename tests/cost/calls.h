@@ -32,6 +32,18 @@ static fieldstop_camera camera = {3760, 6248, 4176, 1, {0, 0, 0}};
 static fieldstop_observer observer = {5300, 6500, 120000, 2000000, 550};
 static fieldstop_visual_readout visual;
 static fieldstop_camera_readout frame;
+static fieldstop_eyepiece eyepieces[16];
+static const uint32_t amplifiers[8] = {98304, 131072, 163840, 196608, 327680, 41288, 52429, 58982};
+static fieldstop_visual_target target = {1800000, 81920, 2000000, 2000, FIELDSTOP_PURPOSE_FRAME, {0, 0, 0}};
+static fieldstop_camera_target field = {10800000, 3600000, 9830};
+#ifdef __AVR__
+enum { CHOICES = 4, CAMERA_CHOICES = 4 };
+#else
+enum { CHOICES = 144, CAMERA_CHOICES = 9 };
+#endif
+static fieldstop_visual_choice choices[CHOICES];
+static fieldstop_camera_choice camera_choices[CAMERA_CHOICES];
+static uint8_t choice_count;
 static uint8_t is_whole;
 static uint16_t number;
 static uint32_t drawn, seed = 1;
@@ -73,8 +85,21 @@ static void prepare(uint16_t k)
         }
         visual.available = frame.available = 0xfff;
     }
+    for (i = 0; i < 16; i++) {
+        eyepieces[i].focal_length_um = 3000u + (i * 5u + k) % 16u * 2500u;
+        eyepieces[i].field_stop_um = i % 2 ? 0 : eyepieces[i].focal_length_um / 5u * 4u;
+        eyepieces[i].apparent_field_mas = 216000000u;
+        eyepieces[i].mapping = i % 4 == 1 ? FIELDSTOP_RECTILINEAR : FIELDSTOP_EQUIDISTANT;
+    }
+    target.purpose = (uint8_t)(k % 3u);
     memcpy(shown, "Magnification  62.5x", 20);
     memcpy(text, "Magnification 162.5x", 20);
+}
+
+static uint8_t *count_of(uint8_t room)
+{
+    choice_count = room;
+    return &choice_count;
 }
 
 /* What a usual telescope gives, or a number from the whole type. */
@@ -94,6 +119,8 @@ static void prepare(uint16_t k)
     ROW(observer_check, A_(&observer)) \
     ROW(visual_readout_compute, A_(&telescope) A_(&eyepiece) A_(&observer) L_(0xfff) A_(&visual)) \
     ROW(camera_readout_compute, A_(&telescope) A_(&camera) A_(&observer) L_(0x1ff) A_(&frame)) \
+    ROW(visual_choose, A_(&telescope) A_(eyepieces) B_(16) A_(amplifiers) B_(8) A_(&observer) A_(&target) A_(choices) A_(count_of(CHOICES))) \
+    ROW(camera_choose, A_(&telescope) A_(&camera) B_(1) A_(amplifiers) B_(8) A_(&observer) A_(&field) A_(camera_choices) A_(count_of(CAMERA_CHOICES))) \
     ROW(text_count, L_(VALUE(camera.columns)) B_(FIELDSTOP_UNIT_PIXEL) PUT) \
     ROW(text_length_mm, L_(VALUE(visual.exit_pupil_um)) B_(1) PUT) \
     ROW(text_length_um, L_(VALUE(camera.pixel_nm)) B_(2) PUT) \

@@ -10,7 +10,7 @@
 #include <stdlib.h>
 
 #define SYSTICK ((volatile uint32_t *)0xE000E010)
-enum { STACK_WORDS = 4, BEFORE = 2, PAINTED = 2048, MOST = 256 };
+enum { STACK_WORDS = 5, BEFORE = 2, PAINTED = 2048, MOST = 256 };
 
 struct call {
     uintptr_t function;
@@ -26,11 +26,12 @@ __asm__(".thumb_func\n.global measure\nmeasure:\n"
         "push {r4-r7, lr}\nmov r4, r0\nsub sp, #20\n"
         "ldr r1, [r4, #20]\nstr r1, [sp]\nldr r1, [r4, #24]\nstr r1, [sp, #4]\n"
         "ldr r1, [r4, #28]\nstr r1, [sp, #8]\nldr r1, [r4, #32]\nstr r1, [sp, #12]\n"
+        "ldr r1, [r4, #36]\nstr r1, [sp, #16]\n"
         "ldr r5, =0xE000E010\nldr r6, [r4]\n"
         "ldr r0, [r4, #4]\nldr r1, [r4, #8]\nldr r2, [r4, #12]\nldr r3, [r4, #16]\n"
         "ldr r7, =0xFFFFFF\nstr r3, [r5, #8]\n"
         "blx r6\n"
-        "ldr r3, [r5, #8]\nsub r7, r7, r3\nstr r7, [r4, #36]\n"
+        "ldr r3, [r5, #8]\nsub r7, r7, r3\nstr r7, [r4, #40]\n"
         "add sp, #20\npop {r4-r7, pc}\n.ltorg\n"
         /* 1,000 instructions and the return. */
         ".thumb_func\n.global sled\nsled:\n.rept 1000\nnop\n.endr\nbx lr\n");

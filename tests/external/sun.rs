@@ -100,7 +100,7 @@ fn light_through_an_aperture() {
         near(collected_sunlight_fx(um).unwrap().0 as f64, published, tolerance + 0.5);
     };
     // A square metre is a disc of 1128.379 mm, and takes in a kilowatt (common practice; ASTM G173: 1000.4 W/m^2).
-    check(1128.379_167, 1e6, 1e-2);
+    check(1_128.379_167, 1e6, 1e-2);
     // A finder of 50 mm: two watts.
     check(50.0, 1963.5, 0.1);
 }

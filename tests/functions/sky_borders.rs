@@ -43,7 +43,7 @@ fn fields_that_a_star_just_leaves_or_never() {
     check("drift_time", |r| {
         let declination = polar(r);
         // F/4 = 90 degrees - d.
-        let border = (QUARTER - declination.abs()) * 1_265_625 >> 20;
+        let border = ((QUARTER - declination.abs()) * 1_265_625) >> 20;
         let field = match r.below(4) {
             0 => border - length(r, 31),
             1 => border / (1 + r.below(60) as i64),
@@ -104,7 +104,7 @@ fn drifts_of_nearly_a_day() {
     });
     check_floats("true_field_from_drift", |r, cut| {
         let close = 2f64.powf(-50.0 * r.unit());
-        let drift = if r.below(3) == 0 { 86_164.0905 * close } else { 86_164.0905 * (1.0 - close) };
+        let drift = if r.below(3) == 0 { 86_164.090_5 * close } else { 86_164.090_5 * (1.0 - close) };
         vec![cut(drift.max(1e-9)), cut(polar_degrees(r))]
     });
     // Where the short way and the long one meet: at 1714 s, and by a sine of 1/16.

@@ -219,7 +219,10 @@ fn member_of(
     writeln!(text, "    /** {} */", sentence(&member.comment)).unwrap();
     if readout {
         let group = of.name.strip_prefix("fieldstop_").unwrap().strip_suffix("_readout").unwrap_or_default();
-        let told = format!("{group} readout, wanted and available: {raw}.");
+        let told = match group {
+            "" => format!("{}, available: {raw}.", name.replace('_', " ")),
+            group => format!("{group} readout, wanted and available: {raw}."),
+        };
         match declared.constants.iter().find(|c| c.comment.to_lowercase() == told) {
             Some(bit) => writeln!(
                 text,
@@ -282,6 +285,7 @@ fn function(declared: &Declared, of: &Function) -> String {
     if let Some((last, before)) = arguments.split_last()
         && last.of.ends_with('*')
         && !last.of.starts_with("const")
+        && last.name != "choice_count"
     {
         (out, arguments) = (Some(last), before);
     }
@@ -295,6 +299,20 @@ fn function(declared: &Declared, of: &Function) -> String {
             taken.push(format!("buffer {}", here.name));
             given.push(format!("{0}.text(), {0}.capacity()", here.name));
             skip = true;
+            continue;
+        }
+        if let Some(next) = arguments.get(at + 1).filter(|next| next.name.ends_with("count"))
+            && let Some((class, true)) = wrapped(declared, &here.of)
+        {
+            let name = &here.name;
+            if next.name == "choice_count" {
+                // Filled as C's structs, since a readout is made by its call only; `class(name[i])` reads one.
+                taken.push(format!("::fieldstop_{class} *{name}"));
+                given.push(name.clone());
+            } else {
+                taken.push(format!("const {class} *{name}"));
+                given.push(format!("{name} == nullptr ? nullptr : &{name}->c()"));
+            }
             continue;
         }
         let (cpp, c) = argument(declared, here);
@@ -385,7 +403,9 @@ fn pairs_of_calls_are_those_of_the_header() {
     let mut text = String::from(
         "/* Each call as in C and as in C++; .ci/cpp compares the code that is made of the two. Made by\n   tests/interface/cpp.rs: do not edit. */\n#include \"fieldstop.hpp\"\n\nextern \"C\" {\n",
     );
-    for of in declared.functions.iter().filter(|of| of.result == "fieldstop_status") {
+    // Those with lists look for null once more.
+    let lists = |of: &&Function| of.arguments.iter().any(|argument| argument.name == "choice_count");
+    for of in declared.functions.iter().filter(|of| of.result == "fieldstop_status" && !lists(of)) {
         let pair = pair(&declared, of);
         match &of.condition {
             Some(condition) => writeln!(text, "\n#if {condition}\n{pair}#endif").unwrap(),
