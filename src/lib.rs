@@ -43,7 +43,8 @@
 //! | [`text`] | a quantity as display characters, and the pages of character displays |
 //! | [`profile`] | equipment, observer and site as a record in EEPROM or flash |
 //! | [`setup`] | telescope, eyepiece, camera, observer: all readouts of one screen |
-//! | [`optics`] | the formulas |
+//! | [`optics`] | the formulas of the telescope |
+//! | [`sky`] | the formulas of the sky: where things stand and how they move |
 //! | [`convert`] | conversions between the fixed units |
 //! | `math` | integer and float kernels |
 //! | [`units`] | the quantities of the fixed forms |
@@ -80,6 +81,7 @@ mod math;
 pub mod optics;
 pub mod profile;
 pub mod setup;
+pub mod sky;
 pub mod status;
 mod stored;
 pub mod text;

@@ -106,6 +106,18 @@ impl Error {
     }
 }
 
+/// Refuses a zero.
+#[inline(always)]
+pub(crate) fn present(value: u32, argument: u8) -> Result<(), Error> {
+    if value == 0 { Err(Error::new(Cause::Zero, argument)) } else { Ok(()) }
+}
+
+/// Refuses what its range leaves out.
+#[inline(always)]
+pub(crate) fn allowed(condition: bool, argument: u8) -> Result<(), Error> {
+    if condition { Ok(()) } else { Err(Error::new(Cause::OutOfRange, argument)) }
+}
+
 impl fmt::Display for Error {
     fn fmt(&self, f: &mut fmt::Formatter<'_>) -> fmt::Result {
         match self.argument() {

@@ -67,6 +67,21 @@ quantity! {
     SignedBam(i32),
     /// Milliseconds of a circle of 24 hours. C suffix `_day_ms`.
     DayMilliseconds(u32),
+    /// How long something takes. C suffix `_ms`; the float form is in seconds, `_s`.
+    Milliseconds(u32),
+    /// How long an exposure may take. C suffix `_us`; the float form is in seconds, `_s`.
+    Microseconds(u32),
+    /// How fast a direction changes, in size. C suffix `_mas_per_s`; the float form is in arcseconds per second,
+    /// `_arcsec_per_s`.
+    MilliarcsecondsPerSecond(u32),
+    /// How fast a direction changes, in size. C suffix `_uas_per_s`; the float form is in arcseconds per second,
+    /// `_arcsec_per_s`.
+    MicroarcsecondsPerSecond(u32),
+    /// How fast a direction changes, of either sign. C suffix `_uas_per_s`; the float form is in arcseconds per second,
+    /// `_arcsec_per_s`.
+    SignedMicroarcsecondsPerSecond(i32),
+    /// Light as power. C suffix `_mw`; the float form is in milliwatts too.
+    Milliwatts(u32),
 }
 
 impl Q16 {

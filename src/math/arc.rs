@@ -45,7 +45,7 @@ fn quartic(row: &Stored<[u32; 4]>, u: i32) -> u32 {
 
 /// Twice the arc tangent of `ratio` / 2^32 in milliarcseconds, at most 0.9 from the exact value.
 #[inline(always)]
-fn twice_arctangent(ratio: u32) -> u32 {
+pub(crate) fn twice_arctangent(ratio: u32) -> u32 {
     let eighths = quartic(ARC.entry((ratio >> 28) as usize), ((ratio << 4) ^ (1 << 31)) as i32);
     (eighths + 4) >> 3
 }
@@ -96,7 +96,7 @@ pub(crate) fn angle_of_products(a: u32, b: u32, c: u32, d: u32) -> u32 {
 
 /// 2 atan(n / d) in milliarcseconds, at most 1 from the exact value. Neither is 0.
 #[inline(never)]
-fn angle_of_ratio(n: u64, d: u64) -> u32 {
+pub(crate) fn angle_of_ratio(n: u64, d: u64) -> u32 {
     let ((n, n_below), (d, d_below)) = (leading(n), leading(d));
     let down = d_below - n_below;
     // n / d as they stand here is from 1/2 to 2, to be shifted down by `down`.

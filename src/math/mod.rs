@@ -10,6 +10,8 @@ pub(crate) mod avr;
 #[cfg(test)]
 pub(crate) mod chebyshev;
 pub mod convert;
+#[cfg(feature = "float")]
+pub(crate) mod degrees;
 pub(crate) mod divide;
 #[cfg(feature = "float")]
 pub(crate) mod double;

@@ -50,7 +50,7 @@ fn height(a: u64, b: u64, c: u64, d: u32) -> u64 {
 /// 2^shift n / d, at most 2, in steps of 2^-62 and within 2^-29 of itself. Neither is 0. (C's convention leaves all 18
 /// bytes of an AVR's argument registers to the arguments.)
 #[inline(never)]
-extern "C" fn ratio(n: u64, d: u64, shift: i8) -> u64 {
+pub(crate) extern "C" fn ratio(n: u64, d: u64, shift: i8) -> u64 {
     let ((n, n_below), (d, d_below)) = (leading(n), leading(d));
     let ratio = divide((n as u64) << 31, d).0; // from 2^30 on
     let shift = 31 + shift as i32 + n_below - d_below;

@@ -20,16 +20,4 @@ pub mod layout;
 pub mod light;
 pub mod resolution;
 
-use crate::status::{Cause, Error};
-
-/// Refuses a zero.
-#[inline(always)]
-pub(crate) fn present(value: u32, argument: u8) -> Result<(), Error> {
-    if value == 0 { Err(Error::new(Cause::Zero, argument)) } else { Ok(()) }
-}
-
-/// Refuses what its range leaves out.
-#[inline(always)]
-pub(crate) fn allowed(condition: bool, argument: u8) -> Result<(), Error> {
-    if condition { Ok(()) } else { Err(Error::new(Cause::OutOfRange, argument)) }
-}
+pub(crate) use crate::status::{allowed, present};

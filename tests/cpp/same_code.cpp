@@ -4132,6 +4132,758 @@ fieldstop_status typed_secondary_spectrum_f64(double focal_length_mm, double par
 }
 #endif
 
+fieldstop_status plain_drift_rate_fx(int32_t declination_bam, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_drift_rate_fx(declination_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_drift_rate_fx(int32_t declination_bam, uint32_t *out)
+{
+    const auto given = fieldstop::drift_rate_fx(fieldstop::signed_binary_angle(declination_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_drift_rate_f32(float declination_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_drift_rate_f32(declination_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_drift_rate_f32(float declination_deg, float *out)
+{
+    const auto given = fieldstop::drift_rate_f32(fieldstop::degrees_of_arc_f32(declination_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_drift_rate_f64(double declination_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_drift_rate_f64(declination_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_drift_rate_f64(double declination_deg, double *out)
+{
+    const auto given = fieldstop::drift_rate_f64(fieldstop::degrees_of_arc_f64(declination_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_drift_time_fx(uint32_t field_mas, int32_t declination_bam, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_drift_time_fx(field_mas, declination_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_drift_time_fx(uint32_t field_mas, int32_t declination_bam, uint32_t *out)
+{
+    const auto given = fieldstop::drift_time_fx(fieldstop::milliarcseconds(field_mas), fieldstop::signed_binary_angle(declination_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_drift_time_f32(float field_arcsec, float declination_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_drift_time_f32(field_arcsec, declination_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_drift_time_f32(float field_arcsec, float declination_deg, float *out)
+{
+    const auto given = fieldstop::drift_time_f32(fieldstop::arcseconds_f32(field_arcsec), fieldstop::degrees_of_arc_f32(declination_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_drift_time_f64(double field_arcsec, double declination_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_drift_time_f64(field_arcsec, declination_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_drift_time_f64(double field_arcsec, double declination_deg, double *out)
+{
+    const auto given = fieldstop::drift_time_f64(fieldstop::arcseconds_f64(field_arcsec), fieldstop::degrees_of_arc_f64(declination_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_true_field_from_drift_fx(uint32_t drift_ms, int32_t declination_bam, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_true_field_from_drift_fx(drift_ms, declination_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_true_field_from_drift_fx(uint32_t drift_ms, int32_t declination_bam, uint32_t *out)
+{
+    const auto given = fieldstop::true_field_from_drift_fx(fieldstop::milliseconds(drift_ms), fieldstop::signed_binary_angle(declination_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_true_field_from_drift_f32(float drift_s, float declination_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_true_field_from_drift_f32(drift_s, declination_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_true_field_from_drift_f32(float drift_s, float declination_deg, float *out)
+{
+    const auto given = fieldstop::true_field_from_drift_f32(fieldstop::seconds_f32(drift_s), fieldstop::degrees_of_arc_f32(declination_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_true_field_from_drift_f64(double drift_s, double declination_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_true_field_from_drift_f64(drift_s, declination_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_true_field_from_drift_f64(double drift_s, double declination_deg, double *out)
+{
+    const auto given = fieldstop::true_field_from_drift_f64(fieldstop::seconds_f64(drift_s), fieldstop::degrees_of_arc_f64(declination_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_trail_free_exposure_fx(uint32_t pixel_nm, uint32_t tolerance_q16, uint32_t focal_length_um, int32_t declination_bam, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_trail_free_exposure_fx(pixel_nm, tolerance_q16, focal_length_um, declination_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_trail_free_exposure_fx(uint32_t pixel_nm, uint32_t tolerance_q16, uint32_t focal_length_um, int32_t declination_bam, uint32_t *out)
+{
+    const auto given = fieldstop::trail_free_exposure_fx(fieldstop::nanometres(pixel_nm), fieldstop::q16(tolerance_q16), fieldstop::micrometres(focal_length_um), fieldstop::signed_binary_angle(declination_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_trail_free_exposure_f32(float pixel_um, float tolerance, float focal_length_mm, float declination_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_trail_free_exposure_f32(pixel_um, tolerance, focal_length_mm, declination_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_trail_free_exposure_f32(float pixel_um, float tolerance, float focal_length_mm, float declination_deg, float *out)
+{
+    const auto given = fieldstop::trail_free_exposure_f32(fieldstop::micrometres_f32(pixel_um), tolerance, fieldstop::millimetres_f32(focal_length_mm), fieldstop::degrees_of_arc_f32(declination_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_trail_free_exposure_f64(double pixel_um, double tolerance, double focal_length_mm, double declination_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_trail_free_exposure_f64(pixel_um, tolerance, focal_length_mm, declination_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_trail_free_exposure_f64(double pixel_um, double tolerance, double focal_length_mm, double declination_deg, double *out)
+{
+    const auto given = fieldstop::trail_free_exposure_f64(fieldstop::micrometres_f64(pixel_um), tolerance, fieldstop::millimetres_f64(focal_length_mm), fieldstop::degrees_of_arc_f64(declination_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_rotation_free_exposure_fx(uint32_t tolerance_q16, uint32_t radius_px, uint32_t rate_uas_per_s, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_rotation_free_exposure_fx(tolerance_q16, radius_px, rate_uas_per_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_rotation_free_exposure_fx(uint32_t tolerance_q16, uint32_t radius_px, uint32_t rate_uas_per_s, uint32_t *out)
+{
+    const auto given = fieldstop::rotation_free_exposure_fx(fieldstop::q16(tolerance_q16), radius_px, fieldstop::microarcseconds_per_second(rate_uas_per_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_rotation_free_exposure_f32(float tolerance, uint32_t radius_px, float rate_arcsec_per_s, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_rotation_free_exposure_f32(tolerance, radius_px, rate_arcsec_per_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_rotation_free_exposure_f32(float tolerance, uint32_t radius_px, float rate_arcsec_per_s, float *out)
+{
+    const auto given = fieldstop::rotation_free_exposure_f32(tolerance, radius_px, fieldstop::arcseconds_per_second_f32(rate_arcsec_per_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_rotation_free_exposure_f64(double tolerance, uint32_t radius_px, double rate_arcsec_per_s, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_rotation_free_exposure_f64(tolerance, radius_px, rate_arcsec_per_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_rotation_free_exposure_f64(double tolerance, uint32_t radius_px, double rate_arcsec_per_s, double *out)
+{
+    const auto given = fieldstop::rotation_free_exposure_f64(tolerance, radius_px, fieldstop::arcseconds_per_second_f64(rate_arcsec_per_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_field_rotation_rate_fx(int32_t latitude_bam, uint32_t azimuth_bam, int32_t altitude_bam, int32_t *out)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_field_rotation_rate_fx(latitude_bam, azimuth_bam, altitude_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_field_rotation_rate_fx(int32_t latitude_bam, uint32_t azimuth_bam, int32_t altitude_bam, int32_t *out)
+{
+    const auto given = fieldstop::field_rotation_rate_fx(fieldstop::signed_binary_angle(latitude_bam), fieldstop::binary_angle(azimuth_bam), fieldstop::signed_binary_angle(altitude_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_field_rotation_rate_f32(float latitude_deg, float azimuth_deg, float altitude_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_field_rotation_rate_f32(latitude_deg, azimuth_deg, altitude_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_field_rotation_rate_f32(float latitude_deg, float azimuth_deg, float altitude_deg, float *out)
+{
+    const auto given = fieldstop::field_rotation_rate_f32(fieldstop::degrees_of_arc_f32(latitude_deg), fieldstop::degrees_of_arc_f32(azimuth_deg), fieldstop::degrees_of_arc_f32(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_field_rotation_rate_f64(double latitude_deg, double azimuth_deg, double altitude_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_field_rotation_rate_f64(latitude_deg, azimuth_deg, altitude_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_field_rotation_rate_f64(double latitude_deg, double azimuth_deg, double altitude_deg, double *out)
+{
+    const auto given = fieldstop::field_rotation_rate_f64(fieldstop::degrees_of_arc_f64(latitude_deg), fieldstop::degrees_of_arc_f64(azimuth_deg), fieldstop::degrees_of_arc_f64(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_azimuth_rate_fx(int32_t latitude_bam, uint32_t azimuth_bam, int32_t altitude_bam, int32_t *out)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_azimuth_rate_fx(latitude_bam, azimuth_bam, altitude_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_azimuth_rate_fx(int32_t latitude_bam, uint32_t azimuth_bam, int32_t altitude_bam, int32_t *out)
+{
+    const auto given = fieldstop::azimuth_rate_fx(fieldstop::signed_binary_angle(latitude_bam), fieldstop::binary_angle(azimuth_bam), fieldstop::signed_binary_angle(altitude_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_azimuth_rate_f32(float latitude_deg, float azimuth_deg, float altitude_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_azimuth_rate_f32(latitude_deg, azimuth_deg, altitude_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_azimuth_rate_f32(float latitude_deg, float azimuth_deg, float altitude_deg, float *out)
+{
+    const auto given = fieldstop::azimuth_rate_f32(fieldstop::degrees_of_arc_f32(latitude_deg), fieldstop::degrees_of_arc_f32(azimuth_deg), fieldstop::degrees_of_arc_f32(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_azimuth_rate_f64(double latitude_deg, double azimuth_deg, double altitude_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_azimuth_rate_f64(latitude_deg, azimuth_deg, altitude_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_azimuth_rate_f64(double latitude_deg, double azimuth_deg, double altitude_deg, double *out)
+{
+    const auto given = fieldstop::azimuth_rate_f64(fieldstop::degrees_of_arc_f64(latitude_deg), fieldstop::degrees_of_arc_f64(azimuth_deg), fieldstop::degrees_of_arc_f64(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_altitude_rate_fx(int32_t latitude_bam, uint32_t azimuth_bam, int32_t altitude_bam, int32_t *out)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_altitude_rate_fx(latitude_bam, azimuth_bam, altitude_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_altitude_rate_fx(int32_t latitude_bam, uint32_t azimuth_bam, int32_t altitude_bam, int32_t *out)
+{
+    const auto given = fieldstop::altitude_rate_fx(fieldstop::signed_binary_angle(latitude_bam), fieldstop::binary_angle(azimuth_bam), fieldstop::signed_binary_angle(altitude_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_altitude_rate_f32(float latitude_deg, float azimuth_deg, float altitude_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_altitude_rate_f32(latitude_deg, azimuth_deg, altitude_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_altitude_rate_f32(float latitude_deg, float azimuth_deg, float altitude_deg, float *out)
+{
+    const auto given = fieldstop::altitude_rate_f32(fieldstop::degrees_of_arc_f32(latitude_deg), fieldstop::degrees_of_arc_f32(azimuth_deg), fieldstop::degrees_of_arc_f32(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_altitude_rate_f64(double latitude_deg, double azimuth_deg, double altitude_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_altitude_rate_f64(latitude_deg, azimuth_deg, altitude_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_altitude_rate_f64(double latitude_deg, double azimuth_deg, double altitude_deg, double *out)
+{
+    const auto given = fieldstop::altitude_rate_f64(fieldstop::degrees_of_arc_f64(latitude_deg), fieldstop::degrees_of_arc_f64(azimuth_deg), fieldstop::degrees_of_arc_f64(altitude_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_zenith_blind_radius_fx(int32_t latitude_bam, uint32_t top_rate_mas_per_s, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_zenith_blind_radius_fx(latitude_bam, top_rate_mas_per_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_zenith_blind_radius_fx(int32_t latitude_bam, uint32_t top_rate_mas_per_s, uint32_t *out)
+{
+    const auto given = fieldstop::zenith_blind_radius_fx(fieldstop::signed_binary_angle(latitude_bam), fieldstop::milliarcseconds_per_second(top_rate_mas_per_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_zenith_blind_radius_f32(float latitude_deg, float top_rate_arcsec_per_s, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_zenith_blind_radius_f32(latitude_deg, top_rate_arcsec_per_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_zenith_blind_radius_f32(float latitude_deg, float top_rate_arcsec_per_s, float *out)
+{
+    const auto given = fieldstop::zenith_blind_radius_f32(fieldstop::degrees_of_arc_f32(latitude_deg), fieldstop::arcseconds_per_second_f32(top_rate_arcsec_per_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_zenith_blind_radius_f64(double latitude_deg, double top_rate_arcsec_per_s, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_zenith_blind_radius_f64(latitude_deg, top_rate_arcsec_per_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_zenith_blind_radius_f64(double latitude_deg, double top_rate_arcsec_per_s, double *out)
+{
+    const auto given = fieldstop::zenith_blind_radius_f64(fieldstop::degrees_of_arc_f64(latitude_deg), fieldstop::arcseconds_per_second_f64(top_rate_arcsec_per_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_misalignment_drift_fx(uint32_t polar_error_mas, uint32_t hour_angle_bam, int32_t *out)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_misalignment_drift_fx(polar_error_mas, hour_angle_bam, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_misalignment_drift_fx(uint32_t polar_error_mas, uint32_t hour_angle_bam, int32_t *out)
+{
+    const auto given = fieldstop::misalignment_drift_fx(fieldstop::milliarcseconds(polar_error_mas), fieldstop::binary_angle(hour_angle_bam));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_misalignment_drift_f32(float polar_error_arcsec, float hour_angle_deg, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_misalignment_drift_f32(polar_error_arcsec, hour_angle_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_misalignment_drift_f32(float polar_error_arcsec, float hour_angle_deg, float *out)
+{
+    const auto given = fieldstop::misalignment_drift_f32(fieldstop::arcseconds_f32(polar_error_arcsec), fieldstop::degrees_of_arc_f32(hour_angle_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_misalignment_drift_f64(double polar_error_arcsec, double hour_angle_deg, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_misalignment_drift_f64(polar_error_arcsec, hour_angle_deg, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_misalignment_drift_f64(double polar_error_arcsec, double hour_angle_deg, double *out)
+{
+    const auto given = fieldstop::misalignment_drift_f64(fieldstop::arcseconds_f64(polar_error_arcsec), fieldstop::degrees_of_arc_f64(hour_angle_deg));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_sun_right_ascension_fx(uint32_t unix_s, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_sun_right_ascension_fx(unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_right_ascension_fx(uint32_t unix_s, uint32_t *out)
+{
+    const auto given = fieldstop::sun_right_ascension_fx(fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_sun_right_ascension_f64(uint32_t unix_s, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_right_ascension_f64(unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_right_ascension_f64(uint32_t unix_s, double *out)
+{
+    const auto given = fieldstop::sun_right_ascension_f64(fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_sun_declination_fx(uint32_t unix_s, int32_t *out)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_sun_declination_fx(unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_declination_fx(uint32_t unix_s, int32_t *out)
+{
+    const auto given = fieldstop::sun_declination_fx(fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_sun_declination_f64(uint32_t unix_s, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_declination_f64(unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_declination_f64(uint32_t unix_s, double *out)
+{
+    const auto given = fieldstop::sun_declination_f64(fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_sun_clearance_fx(uint32_t right_ascension_bam, int32_t declination_bam, uint32_t unix_s, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_sun_clearance_fx(right_ascension_bam, declination_bam, unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_clearance_fx(uint32_t right_ascension_bam, int32_t declination_bam, uint32_t unix_s, uint32_t *out)
+{
+    const auto given = fieldstop::sun_clearance_fx(fieldstop::binary_angle(right_ascension_bam), fieldstop::signed_binary_angle(declination_bam), fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_sun_clearance_f64(double right_ascension_deg, double declination_deg, uint32_t unix_s, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_clearance_f64(right_ascension_deg, declination_deg, unix_s, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_sun_clearance_f64(double right_ascension_deg, double declination_deg, uint32_t unix_s, double *out)
+{
+    const auto given = fieldstop::sun_clearance_f64(fieldstop::degrees_of_arc_f64(right_ascension_deg), fieldstop::degrees_of_arc_f64(declination_deg), fieldstop::seconds(unix_s));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+fieldstop_status plain_collected_sunlight_fx(uint32_t effective_aperture_um, uint32_t *out)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_fx(effective_aperture_um, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_collected_sunlight_fx(uint32_t effective_aperture_um, uint32_t *out)
+{
+    const auto given = fieldstop::collected_sunlight_fx(fieldstop::micrometres(effective_aperture_um));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+fieldstop_status plain_collected_sunlight_f32(float effective_aperture_mm, float *out)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_f32(effective_aperture_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_collected_sunlight_f32(float effective_aperture_mm, float *out)
+{
+    const auto given = fieldstop::collected_sunlight_f32(fieldstop::millimetres_f32(effective_aperture_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+fieldstop_status plain_collected_sunlight_f64(double effective_aperture_mm, double *out)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_f64(effective_aperture_mm, &given);
+    if (number == 0) {
+        *out = given;
+    }
+    return number;
+}
+fieldstop_status typed_collected_sunlight_f64(double effective_aperture_mm, double *out)
+{
+    const auto given = fieldstop::collected_sunlight_f64(fieldstop::millimetres_f64(effective_aperture_mm));
+    if (given) {
+        *out = given.value().count();
+    }
+    return given.status().number();
+}
+#endif
+
 fieldstop_status plain_telescope_check(const fieldstop::telescope *telescope)
 {
     return ::fieldstop_telescope_check(&telescope->c());

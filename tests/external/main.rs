@@ -7,7 +7,9 @@ mod focus;
 mod imaging;
 mod layout;
 mod light;
+mod motion;
 mod resolution;
+mod sun;
 
 /// Fails unless `got` is within `tolerance` of what is published.
 #[track_caller]

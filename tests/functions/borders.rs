@@ -42,8 +42,7 @@ fn around(x: f64, single: bool) -> [f64; 3] {
 
 fn check_float(single: bool, owed: impl Fn(f64) -> f64) {
     let row = contrast();
-    let floats = row.floats.unwrap();
-    let compute = if single { floats.single } else { floats.double };
+    let compute = row.float_form(single).unwrap().compute;
     let digits = if single { 24 } else { 53 };
     let mut r = Random::new("thin");
     let mut worst = 0.0f64;

@@ -138,12 +138,12 @@ pub fn float(row: &Row, n: usize, single: bool) -> Vec<Vec<f64>> {
                     if a.unit.count {
                         return x as f64;
                     }
-                    let limit = a.range.1 as f64 / a.unit.steps;
-                    if wild && a.range == (a.unit.least, a.unit.most) {
+                    let limit = a.unit.value(a.range.1 as f64);
+                    if wild && !a.unit.angle && a.range == (a.unit.least, a.unit.most) {
                         return cut(2f64.powf(64.0 * r.unit() - 32.0));
                     }
                     let jitter = if x == 0 || r.below(16) == 0 { 0.0 } else { r.unit() - 0.5 };
-                    let value = cut((x as f64 + jitter) / a.unit.steps);
+                    let value = cut(a.unit.value(x as f64 + jitter));
                     if a.range.1 < a.unit.most && value > limit { cut(limit) } else { value }
                 })
                 .collect()

@@ -5,32 +5,42 @@ use super::cases::{self, Random};
 use super::oracle::{fixed_error, float_error};
 use super::registry::{Row, all_rows};
 
-fn row(stem: &str) -> Row {
+pub fn row(stem: &str) -> Row {
     all_rows().into_iter().find(|row| row.stem == stem).unwrap()
 }
 
 /// `make` draws a case near the border; an argument out of its type is put at its end.
-fn check(stem: &str, make: impl Fn(&mut Random) -> Vec<i64>) {
-    let (row, mut r) = (row(stem), Random::new(stem));
-    let mut worst = [0.0f64; 3];
+pub fn check(stem: &str, make: impl Fn(&mut Random) -> Vec<i64>) {
+    let (row, worst) = (row(stem), check_fixed(stem, &make));
+    let mut float_worst = [0.0f64; 2];
+    let mut r = Random::new(stem);
     for _ in 0..cases::count() {
-        let case: Vec<i64> = (row.arguments.iter().zip(make(&mut r)))
-            .map(|(a, x)| x.clamp(a.unit.least, a.unit.most))
-            .collect();
-        worst[0] = worst[0].max(fixed_error(&row, &case));
-        for (k, single) in [(1, true), (2, false)] {
+        let case = drawn(&row, make(&mut r));
+        let forms = [true, false].into_iter().enumerate();
+        for (k, single) in forms.filter(|(_, single)| row.float_form(*single).is_some()) {
             // The same border in float units, where the arguments' last digits are others.
             let cut = |x: f64| if single { x as f32 as f64 } else { x };
             let case: Vec<f64> =
-                row.arguments.iter().zip(&case).map(|(a, &x)| cut(x as f64 / a.unit.steps)).collect();
-            worst[k] = worst[k].max(float_error(&row, &case, single));
+                row.arguments.iter().zip(&case).map(|(a, &x)| cut(a.unit.value(x as f64))).collect();
+            float_worst[k] = float_worst[k].max(float_error(&row, &case, single));
         }
     }
-    println!("{stem:26} at its borders: fx {:.4}, f32 {:.3}, f64 {:.3}", worst[0], worst[1], worst[2]);
+    let [single, double] = float_worst;
+    println!("{stem:26} at its borders: fx {worst:.4}, f32 {single:.3}, f64 {double:.3}");
+}
+
+fn drawn(row: &Row, case: Vec<i64>) -> Vec<i64> {
+    row.arguments.iter().zip(case).map(|(a, x)| x.clamp(a.unit.least, a.unit.most)).collect()
+}
+
+/// The fixed form only; gives its worst error.
+pub fn check_fixed(stem: &str, make: impl Fn(&mut Random) -> Vec<i64>) -> f64 {
+    let (row, mut r) = (row(stem), Random::new(stem));
+    (0..cases::count()).map(|_| fixed_error(&row, &drawn(&row, make(&mut r)))).fold(0.0, f64::max)
 }
 
 /// Float cases at a border that only a float tells.
-fn check_floats(stem: &str, make: impl Fn(&mut Random, &dyn Fn(f64) -> f64) -> Vec<f64>) {
+pub fn check_floats(stem: &str, make: impl Fn(&mut Random, &dyn Fn(f64) -> f64) -> Vec<f64>) {
     let row = row(stem);
     for single in [true, false] {
         let cut = move |x: f64| if single { x as f32 as f64 } else { x };
@@ -43,13 +53,13 @@ fn check_floats(stem: &str, make: impl Fn(&mut Random, &dyn Fn(f64) -> f64) -> V
 }
 
 /// Log-uniform from 1 to below 2^bits.
-fn length(r: &mut Random, bits: u32) -> i64 {
+pub fn length(r: &mut Random, bits: u32) -> i64 {
     let bits = r.below(bits as u64) as u32;
     (1 << bits) + r.below(1 << bits) as i64
 }
 
 /// 0 or a few, or more by any power of two; either sign.
-fn aside(r: &mut Random) -> i64 {
+pub fn aside(r: &mut Random) -> i64 {
     let more = if r.below(2) == 0 { r.below(4) as i64 } else { length(r, 31) };
     if r.below(2) == 0 { more } else { -more }
 }

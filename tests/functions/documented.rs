@@ -43,9 +43,8 @@ fn header_quotes_every_bound() {
     let header = fs::read_to_string(path).unwrap();
     for row in all_rows() {
         let mut bounds = vec![("fx", fixed(row.owed))];
-        if row.floats.is_some() {
-            bounds.extend([("f32", float(row.single_owed)), ("f64", float(row.double_owed))]);
-        }
+        bounds.extend(row.single.map(|_| ("f32", float(row.single_owed))));
+        bounds.extend(row.double.map(|_| ("f64", float(row.double_owed))));
         for (form, bound) in bounds {
             let name = format!("fieldstop_{}_{form}", row.stem);
             let comment = comment(&header, &name);

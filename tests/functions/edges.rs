@@ -3,7 +3,7 @@
 use super::big::big;
 use super::cases;
 use super::oracle::{fixed_refusal, float_overflows, float_refusal};
-use super::registry::rows;
+use super::registry::{FloatForm, rows};
 use fieldstop::{Cause, Error};
 
 #[test]
@@ -55,10 +55,8 @@ fn float_edges_and_c() {
         2f64.powi(-33),
     ];
     for row in rows() {
-        let Some(floats) = &row.floats else { continue };
-        for (single, compute, through_c) in
-            [(true, floats.single, floats.c_single), (false, floats.double, floats.c_double)]
-        {
+        for single in [true, false] {
+            let Some(FloatForm { compute, through_c }) = row.float_form(single) else { continue };
             for mut case in cases::float(&row, 40, single) {
                 let null = Error::new(Cause::NullPointer, row.arguments.len() as u8 + 1).status();
                 assert_eq!(through_c(&case, None).0, null, "{} with a null pointer", row.stem);
@@ -68,8 +66,8 @@ fn float_edges_and_c() {
                         continue;
                     }
                     let kept = case[i];
-                    let (least, most) =
-                        (a.range.0 as f64 / a.unit.steps, (a.range.1 + a.under as i64) as f64 / a.unit.steps);
+                    let (least, most) = (a.range.0 as f64, (a.range.1 + a.under as i64) as f64);
+                    let (least, most) = (a.unit.value(least), a.unit.value(most));
                     for x in odd.into_iter().chain([least, most, most * 1.001, kept]) {
                         case[i] = if single { x as f32 as f64 } else { x };
                         let rust = compute(&case);

@@ -14,5 +14,7 @@ mod layout_properties;
 mod oracle;
 mod properties;
 mod registry;
+mod sky_borders;
+mod sky_properties;
 mod target;
 mod twin;

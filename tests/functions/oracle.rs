@@ -7,46 +7,49 @@ use fieldstop::{Cause, Error};
 
 /// What the checks of the arguments say, in their fixed order.
 fn refusal(row: &Row, values: &[Big], own: impl Fn(usize, &Argument) -> Option<Cause>) -> Option<Error> {
-    row.arguments.iter().enumerate().find_map(|(i, a)| {
+    let refused = row.arguments.iter().enumerate().find_map(|(i, a)| {
         let cause = own(i, a).or_else(|| (row.refuses)(i, values).then_some(Cause::OutOfRange))?;
         Some(Error::new(cause, i as u8 + 1))
-    })
+    });
+    refused.or_else(|| (row.unanswered)(values))
 }
 
 pub fn fixed_refusal(row: &Row, case: &[i64]) -> Option<Error> {
-    refusal(row, &row.in_float_units(case), |i, a| {
-        let x = case[i];
-        if x == 0 && a.zero_refused {
-            Some(Cause::Zero)
-        } else if x < a.range.0 || x > a.range.1 {
-            Some(Cause::OutOfRange)
-        } else {
-            None
-        }
-    })
+    refusal(row, &row.in_float_units(case), |i, a| own_of_count(a, case[i]))
+}
+
+/// What an integer is refused for by itself.
+fn own_of_count(a: &Argument, x: i64) -> Option<Cause> {
+    if x == 0 && a.zero_refused {
+        Some(Cause::Zero)
+    } else if x < a.range.0 || x > a.range.1 {
+        Some(Cause::OutOfRange)
+    } else {
+        None
+    }
 }
 
 pub fn float_refusal(row: &Row, case: &[f64]) -> Option<Error> {
     if let Some(i) = case.iter().position(|x| !x.is_finite()) {
         // The exact value of what stands before it can still be refused first.
-        let before = Row { arguments: &row.arguments[..i], ..*row };
+        let before = Row { arguments: &row.arguments[..i], unanswered: |_| None, ..*row };
         return float_refusal(&before, &case[..i]).or(Some(Error::new(Cause::NotFinite, i as u8 + 1)));
     }
     let values: Vec<Big> = case.iter().map(|&x| big(x)).collect();
     refusal(row, &values, |i, a| {
         let x = case[i];
         let limit = |steps: i64, whole: i64, otherwise: f64| {
-            if steps == whole { otherwise } else { steps as f64 / a.unit.steps }
+            if steps == whole { otherwise } else { a.unit.value(steps as f64) }
         };
-        let most = limit(a.range.1 + a.under as i64, a.unit.most, 2f64.powi(32));
+        let most = limit(a.range.1 + a.under as i64, a.unit.most, a.unit.float_most());
         let least = limit(a.range.0, a.unit.least, if a.unit.least < 0 { -most } else { 0.0 });
         if a.unit.count {
-            (x == 0.0 && a.zero_refused).then_some(Cause::Zero)
+            own_of_count(a, x as i64)
         } else if x == 0.0 && a.zero_refused {
             Some(Cause::Zero)
         } else if x < least
             || x > most
-            || (a.under && x >= (a.range.1 + 1) as f64 / a.unit.steps)
+            || (a.under && x >= a.unit.value((a.range.1 + 1) as f64))
             || (a.zero_refused && x.abs() < 2f64.powi(-32))
         {
             Some(Cause::OutOfRange)
@@ -64,8 +67,10 @@ pub fn fixed_error(row: &Row, case: &[i64]) -> f64 {
         assert_eq!(got, Err(error), "{}_fx{case:?}", row.stem);
         return 0.0;
     }
-    let exact = (row.exact)(&row.in_float_units(case)) * big(row.result.steps);
-    let owed = row.owed.lsb.max(row.owed.part * exact.to_f64().abs());
+    let values = row.in_float_units(case);
+    let exact = (row.exact)(&values) * big(row.result.steps);
+    let largest = row.largest.map_or(big(0.0), |f| f(&values).abs() * big(row.result.steps)).max(exact.abs());
+    let owed = row.owed.lsb.max(row.owed.part * largest.to_f64());
     match got {
         Ok(value) => {
             let mut error = (big(value as f64) - &exact).abs().to_f64();
@@ -118,10 +123,8 @@ pub fn float_overflows(row: &Row, values: &[Big], single: bool) -> bool {
 
 /// The error of a call in the unit in which it is owed, for a row with float forms; it fails as the fixed one does.
 pub fn float_error(row: &Row, case: &[f64], single: bool) -> f64 {
-    let floats = row.floats.as_ref().unwrap();
-    let (compute, owed) =
-        if single { (floats.single, row.single_owed) } else { (floats.double, row.double_owed) };
-    let got = compute(case);
+    let owed = if single { row.single_owed } else { row.double_owed };
+    let got = (row.float_form(single).unwrap().compute)(case);
     if let Some(error) = float_refusal(row, case) {
         assert_eq!(got, Err(error), "{}{case:?}", row.stem);
         return 0.0;
@@ -152,7 +155,7 @@ pub fn float_error(row: &Row, case: &[f64], single: bool) -> f64 {
 }
 
 fn check_floats(single: bool) {
-    for row in rows().iter().filter(|row| row.floats.is_some()) {
+    for row in rows().iter().filter(|row| row.float_form(single).is_some()) {
         let cases = cases::float(row, cases::count(), single);
         let worst = cases.iter().map(|case| float_error(row, case, single)).fold(0.0, f64::max);
         println!("{:26} {} {worst:.3e}", row.stem, if single { "f32" } else { "f64" });

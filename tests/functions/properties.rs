@@ -86,6 +86,21 @@ const DIRECTIONS: &[(&str, &str)] = &[
     ("achromat_crown", "++-"),
     ("achromat_flint", "++-"),
     ("secondary_spectrum", "++-"),
+    // Declinations and latitudes go either way from 0.
+    ("drift_rate", "."),
+    ("drift_time", "+."),
+    ("true_field_from_drift", "+."),
+    ("trail_free_exposure", "++-."),
+    ("rotation_free_exposure", "+--"),
+    ("field_rotation_rate", "."),
+    ("azimuth_rate", "."),
+    ("altitude_rate", "."),
+    ("zenith_blind_radius", ".-"),
+    ("misalignment_drift", "."),
+    ("sun_right_ascension", "."),
+    ("sun_declination", "."),
+    ("sun_clearance", "."),
+    ("collected_sunlight", "+"),
 ];
 
 fn directions(row: &Row) -> Vec<char> {

@@ -2,7 +2,13 @@
 //! error is owed; everything else in this folder is derived from it.
 
 use super::big::{Big, big};
-use fieldstop::Error;
+use fieldstop::{Cause, Error};
+
+/// Where the rows find their subjects.
+mod subjects {
+    pub use fieldstop::optics::*;
+    pub use fieldstop::sky::*;
+}
 
 mod colour;
 mod field;
@@ -10,7 +16,9 @@ mod focus;
 mod imaging;
 mod layout;
 mod light;
+mod motion;
 mod resolution;
+mod sun;
 mod units;
 
 /// A unit of the contract: how many of the fixed form's steps make one of the float form's unit.
@@ -21,10 +29,23 @@ pub struct Unit {
     pub most: i64,
     /// An integer in the float forms too.
     pub count: bool,
+    /// A binary angle, in degrees in the float forms.
+    pub angle: bool,
 }
 
 const fn unit(steps: f64, least: i64, most: i64) -> Unit {
-    Unit { steps, least, most, count: false }
+    Unit { steps, least, most, count: false, angle: false }
+}
+
+impl Unit {
+    /// Steps in the float forms' unit; exact for an angle.
+    pub fn value(&self, steps: f64) -> f64 {
+        if self.angle { steps * (360.0 / 4294967296.0) } else { steps / self.steps }
+    }
+    /// What a float argument may be at most where its row gives no range.
+    pub fn float_most(&self) -> f64 {
+        if self.angle { 360.0 } else { 2f64.powi(32) }
+    }
 }
 
 const U32: i64 = u32::MAX as i64;
@@ -41,9 +62,12 @@ pub const MMAG: Unit = unit(1000.0, i32::MIN as i64, i32::MAX as i64);
 pub const UNSIGNED_MMAG: Unit = unit(1000.0, 0, U32);
 /// Any one unit, or none.
 pub const PLAIN: Unit = unit(1.0, 0, U32);
-pub const COUNT: Unit = Unit { steps: 1.0, least: 0, most: U32, count: true };
-pub const COUNT_16: Unit = Unit { steps: 1.0, least: 0, most: u16::MAX as i64, count: true };
-pub const COUNT_8: Unit = Unit { steps: 1.0, least: 0, most: u8::MAX as i64, count: true };
+/// Binary angles: one that wraps, one either side of zero.
+pub const BAM: Unit = Unit { angle: true, ..unit(4294967296.0 / 360.0, 0, U32) };
+pub const SIGNED_BAM: Unit = Unit { least: i32::MIN as i64, most: i32::MAX as i64, ..BAM };
+pub const COUNT: Unit = Unit { count: true, ..PLAIN };
+pub const COUNT_16: Unit = Unit { most: u16::MAX as i64, ..COUNT };
+pub const COUNT_8: Unit = Unit { most: u8::MAX as i64, ..COUNT };
 
 #[derive(Clone, Copy)]
 pub struct Argument {
@@ -129,27 +153,35 @@ pub struct Row {
     pub exact: fn(&[Big]) -> Big,
     /// Whether argument `i` (from 0) is out of its range given the others, all in float units.
     pub refuses: fn(usize, &[Big]) -> bool,
+    /// What there is no answer to, though each argument is in its range, in float units.
+    pub unanswered: fn(&[Big]) -> Option<Error>,
     /// The largest term that the definition adds, where the error is counted in its last place.
     pub largest: Option<fn(&[Big]) -> Big>,
     /// Steps of the result to a whole turn, where it lies on a circle: a result a turn away is the same.
     pub circle: Option<f64>,
     pub fixed: Fixed,
     pub c_fixed: CFixed,
-    pub floats: Option<Floats>,
+    pub single: Option<FloatForm>,
+    pub double: Option<FloatForm>,
 }
 
 #[derive(Clone, Copy)]
-pub struct Floats {
-    pub single: Float,
-    pub double: Float,
-    pub c_single: CFloat,
-    pub c_double: CFloat,
+pub struct FloatForm {
+    pub compute: Float,
+    pub through_c: CFloat,
 }
 
 impl Row {
     /// The arguments of the fixed form in float units, exactly.
     pub fn in_float_units(&self, arguments: &[i64]) -> Vec<Big> {
-        self.arguments.iter().zip(arguments).map(|(a, &x)| big(x as f64) / big(a.unit.steps)).collect()
+        let exact = |(a, &x): (&Argument, &i64)| {
+            if a.unit.angle { big(a.unit.value(x as f64)) } else { big(x as f64) / big(a.unit.steps) }
+        };
+        self.arguments.iter().zip(arguments).map(exact).collect()
+    }
+
+    pub fn float_form(&self, single: bool) -> Option<FloatForm> {
+        if single { self.single } else { self.double }
     }
 }
 
@@ -168,6 +200,8 @@ pub fn all_rows() -> Vec<Row> {
         focus::rows(),
         layout::rows(),
         colour::rows(),
+        motion::rows(),
+        sun::rows(),
     ]
     .concat()
 }
@@ -214,6 +248,8 @@ macro_rules! quantities {
 quantities!(SignedQ16 RefractiveIndex PartsPerMillion);
 quantities!(SignedNanometres Millimetres Millikelvin SignedMillikelvin);
 quantities!(PartsPerBillionPerKelvin SignedPartsPerBillionPerKelvin);
+quantities!(Milliseconds Microseconds Milliwatts);
+quantities!(MilliarcsecondsPerSecond MicroarcsecondsPerSecond SignedMicroarcsecondsPerSecond);
 quantities!(Micrometres SignedMicrometres Nanometres Milliarcseconds SignedMilliarcseconds Microarcseconds
     MilliarcsecondsPerMillimetre Q16 Milli Millimagnitudes MillimagnitudesPerAirmass Bam SignedBam DayMilliseconds);
 impl Real for f32 {
@@ -249,21 +285,37 @@ macro_rules! row {
     ($single:ident $double:ident, $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr,
      $owed:expr, $ulp:expr, $exact:expr, $fx:ident $c_fx:ident $c_f32:ident $c_f64:ident) => {
         $crate::registry::Row {
-            floats: Some($crate::registry::Floats {
-                single: |a| {
-                    fieldstop::optics::$subject::$stem::<f32>($($crate::registry::Real::of(a[$i])),*).map($crate::registry::Real::value)
+            single: Some($crate::registry::FloatForm {
+                compute: |a| {
+                    $crate::registry::subjects::$subject::$stem::<f32>($($crate::registry::Real::of(a[$i])),*)
+                        .map($crate::registry::Real::value)
                 },
-                double: |a| {
-                    fieldstop::optics::$subject::$stem::<f64>($($crate::registry::Real::of(a[$i])),*).map($crate::registry::Real::value)
-                },
-                c_single: |a, held| {
+                through_c: |a, held| {
                     let mut out = held.unwrap_or(0.0) as $single;
                     let pointer = if held.is_some() { &raw mut out } else { core::ptr::null_mut() };
                     // SAFETY: null or a live local.
                     let status = unsafe { fieldstop::capi::$subject::$c_f32($($crate::registry::Real::of(a[$i]),)* pointer) };
                     (status, $crate::registry::Real::value(out))
                 },
-                c_double: |a, held| {
+            }),
+            ..row!(double $double ($crate::registry::subjects::$subject::$stem::<f64>) $subject::$stem
+                [$($i $argument),*] -> $result, $owed, $ulp, $exact, $fx $c_fx $c_f64)
+        }
+    };
+    // Without an f32 form; the f64 one is a plain function.
+    (f64 only $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr, $ulp:expr,
+     $exact:expr, $fx:ident $c_fx:ident $c_f64:ident) => {
+        row!(double f64 ($crate::registry::subjects::$subject::$stem) $subject::$stem
+            [$($i $argument),*] -> $result, $owed, $ulp, $exact, $fx $c_fx $c_f64)
+    };
+    (double $double:ident ($($function:tt)*) $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr,
+     $owed:expr, $ulp:expr, $exact:expr, $fx:ident $c_fx:ident $c_f64:ident) => {
+        $crate::registry::Row {
+            double: Some($crate::registry::FloatForm {
+                compute: |a| {
+                    $($function)*($($crate::registry::Real::of(a[$i])),*).map($crate::registry::Real::value)
+                },
+                through_c: |a, held| {
                     let mut out = held.unwrap_or(0.0) as $double;
                     let pointer = if held.is_some() { &raw mut out } else { core::ptr::null_mut() };
                     // SAFETY: null or a live local.
@@ -276,7 +328,7 @@ macro_rules! row {
     };
     (fixed only $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr, $ulp:expr,
      $exact:expr, $fx:ident $c_fx:ident) => {
-        row!(fixed only (fieldstop::optics::$subject) $subject::$stem [$($i $argument),*] -> $result, $owed, $ulp,
+        row!(fixed only ($crate::registry::subjects::$subject) $subject::$stem [$($i $argument),*] -> $result, $owed, $ulp,
             $exact, $fx $c_fx)
     };
     (fixed only ($($module:tt)*) $subject:ident :: $stem:ident [$($i:tt $argument:expr),*] -> $result:expr, $owed:expr,
@@ -291,6 +343,7 @@ macro_rules! row {
             double_owed: $crate::registry::FloatOwed::Ulp($ulp),
             exact: $exact,
             refuses: |_, _| false,
+            unanswered: |_| None,
             largest: None,
             circle: None,
             fixed: |a| {
@@ -303,7 +356,8 @@ macro_rules! row {
                 let status = unsafe { fieldstop::capi::$subject::$c_fx($($crate::registry::Raw::of(a[$i]),)* pointer) };
                 (status, $crate::registry::Raw::raw(out))
             },
-            floats: None,
+            single: None,
+            double: None,
         }
     };
 }

@@ -227,4 +227,46 @@ ROW(achromat_flint, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(3342336u, 5570
 #if HAS_ROW(75)
 ROW(secondary_spectrum, DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(500u, 50000u, 0u, 4294967295u) DRAW(655360u, 3932160u, 0u, 4294967295u), fieldstop_secondary_spectrum_fx(a[0], a[1], a[2], &result))
 #endif
-#define ROWS 76
+#if HAS_ROW(76)
+ROW(drift_rate, DRAW(1048576u, 700000000u, 3221225472u, 1073741824u), fieldstop_drift_rate_fx((int32_t)a[0], &result))
+#endif
+#if HAS_ROW(77)
+ROW(drift_time, DRAW(300000u, 7200000u, 0u, 1295999999u) DRAW(1048576u, 700000000u, 3221225472u, 1073741824u), fieldstop_drift_time_fx(a[0], (int32_t)a[1], &result))
+#endif
+#if HAS_ROW(78)
+ROW(true_field_from_drift, DRAW(20000u, 600000u, 0u, 86164090u) DRAW(1048576u, 700000000u, 3221225472u, 1073741824u), fieldstop_true_field_from_drift_fx(a[0], (int32_t)a[1], &result))
+#endif
+#if HAS_ROW(79)
+ROW(trail_free_exposure, DRAW(1000u, 15000u, 0u, 4294967295u) DRAW(32768u, 196608u, 0u, 4294967295u) DRAW(200000u, 5000000u, 0u, 4294967295u) DRAW(1048576u, 700000000u, 3221225472u, 1073741824u), fieldstop_trail_free_exposure_fx(a[0], a[1], a[2], (int32_t)a[3], &result))
+#endif
+#if HAS_ROW(80)
+ROW(rotation_free_exposure, DRAW(32768u, 196608u, 0u, 4294967295u) DRAW(100u, 5000u, 0u, 4294967295u) DRAW(1000000u, 30000000u, 0u, 4294967295u), fieldstop_rotation_free_exposure_fx(a[0], a[1], a[2], &result))
+#endif
+#if HAS_ROW(81)
+ROW(field_rotation_rate, DRAW(100000000u, 700000000u, 3221225472u, 1073741824u) DRAW(1048576u, 4294967295u, 0u, 4294967295u) DRAW(100000000u, 1050000000u, 3221225472u, 1073741824u), fieldstop_field_rotation_rate_fx((int32_t)a[0], a[1], (int32_t)a[2], (int32_t *)&result))
+#endif
+#if HAS_ROW(82)
+ROW(azimuth_rate, DRAW(100000000u, 700000000u, 3221225472u, 1073741824u) DRAW(1048576u, 4294967295u, 0u, 4294967295u) DRAW(100000000u, 1050000000u, 3221225472u, 1073741824u), fieldstop_azimuth_rate_fx((int32_t)a[0], a[1], (int32_t)a[2], (int32_t *)&result))
+#endif
+#if HAS_ROW(83)
+ROW(altitude_rate, DRAW(100000000u, 700000000u, 3221225472u, 1073741824u) DRAW(1048576u, 4294967295u, 0u, 4294967295u) DRAW(100000000u, 1050000000u, 3221225472u, 1073741824u), fieldstop_altitude_rate_fx((int32_t)a[0], a[1], (int32_t)a[2], (int32_t *)&result))
+#endif
+#if HAS_ROW(84)
+ROW(zenith_blind_radius, DRAW(100000000u, 700000000u, 3221225472u, 1073741824u) DRAW(500000u, 20000000u, 0u, 4294967295u), fieldstop_zenith_blind_radius_fx((int32_t)a[0], a[1], &result))
+#endif
+#if HAS_ROW(85)
+ROW(misalignment_drift, DRAW(10000u, 7200000u, 0u, 18000000u) DRAW(1048576u, 4294967295u, 0u, 4294967295u), fieldstop_misalignment_drift_fx(a[0], a[1], (int32_t *)&result))
+#endif
+#if HAS_ROW(86)
+ROW(sun_right_ascension, DRAW(1500000000u, 2500000000u, 0u, 4102444799u), fieldstop_sun_right_ascension_fx(a[0], &result))
+#endif
+#if HAS_ROW(87)
+ROW(sun_declination, DRAW(1500000000u, 2500000000u, 0u, 4102444799u), fieldstop_sun_declination_fx(a[0], (int32_t *)&result))
+#endif
+#if HAS_ROW(88)
+ROW(sun_clearance, DRAW(1048576u, 4294967295u, 0u, 4294967295u) DRAW(1048576u, 1073741824u, 3221225472u, 1073741824u) DRAW(1500000000u, 2500000000u, 0u, 4102444799u), fieldstop_sun_clearance_fx(a[0], (int32_t)a[1], a[2], &result))
+#endif
+#if HAS_ROW(89)
+ROW(collected_sunlight, DRAW(40000u, 500000u, 0u, 4294967295u), fieldstop_collected_sunlight_fx(a[0], &result))
+#endif
+#define ROWS 90

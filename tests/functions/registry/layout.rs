@@ -7,9 +7,6 @@ const PRIMARY: Argument = positive("primary_focal_um", UM, (300_000, 2_000_000))
 const SYSTEM: Argument = positive("system_focal_um", UM, (2_000_001, 10_000_000));
 const BACK_FOCUS: Argument = ordinary("back_focus_um", UM, (50_000, 500_000));
 
-/// A binary angle; degrees in the float form.
-const SIGNED_BAM: Unit = unit(4294967296.0 / 360.0, i32::MIN as i64, i32::MAX as i64);
-
 /// The g and w of the diagonal, and 1 - g^2.
 fn cone(a: &[Big]) -> (Big, Big, Big) {
     let g = (&a[0] - &a[3]) / (big(2.0) * &a[1]);
