@@ -19,6 +19,10 @@
  * - Layout of mirrors and tube: how large the mirrors are and where they stand, what they leave
  *   of the light, and what the tube needs around it.
  * - Colour: what a single lens does to it, and what a pair of two glasses leaves.
+ * - Motion: how the sky turns past a telescope, how long a star stays in the field or on a
+ *   pixel, and what an altazimuth mount has to do.
+ * - The Sun: where it stands, how far from it a telescope points, and how much of its light an
+ *   aperture collects.
  * - Equipment as plain structs in fixed units, and all readouts of one screen in one call.
  * - The stored record: equipment, observers and sites with their names, as bytes in EEPROM or
  *   flash.
@@ -3448,6 +3452,682 @@ fieldstop_status fieldstop_secondary_spectrum_f64(double focal_length_mm,
                                                   double partial_difference,
                                                   double abbe_difference,
                                                   double *spectrum_mm);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
+   Motion: how the sky turns past a telescope, how long a star stays in the field or on a
+   pixel, and what an altazimuth mount has to do. */
+
+/**
+ * Gives how fast a star drifts through the field when the drive stands still, in microarcseconds per second.
+ *
+ * w cos d, with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: declination_bam -2^30 to 2^30.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_drift_rate_fx(int32_t declination_bam,
+                                         uint32_t *rate_uas_per_s);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how fast a star drifts through the field when the drive stands still, in arcseconds per second.
+ *
+ * w cos d, with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: declination_deg -90 to 90.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_drift_rate_f32(float declination_deg,
+                                          float *rate_arcsec_per_s);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how fast a star drifts through the field when the drive stands still, in arcseconds per second, in double.
+ *
+ * w cos d, with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: declination_deg -90 to 90.
+ * Error: at most 3 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_drift_rate_f64(double declination_deg,
+                                          double *rate_arcsec_per_s);
+#endif
+
+/**
+ * Gives how long a star takes through the field, from edge to edge through its centre, when the drive stands still,
+ * in milliseconds.
+ *
+ * 4 asin(sin(F/4) / cos d) / w, along the parallel of declination, with w the rate of the sky, 15.0410686 arcsec per
+ * second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: field_mas not 0, under 1296000000; declination_bam -2^30 to 2^30. Never left where F/4 is 90 degrees less
+ * the size of d or more: the star stays in the field all day.
+ * Error: at most 1 LSB.
+ * Statuses: null pointer, zero, out of range, never left.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_drift_time_fx(uint32_t field_mas,
+                                         int32_t declination_bam,
+                                         uint32_t *time_ms);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how long a star takes through the field, from edge to edge through its centre, when the drive stands still,
+ * in seconds.
+ *
+ * 4 asin(sin(F/4) / cos d) / w, along the parallel of declination, with w the rate of the sky, 15.0410686 arcsec per
+ * second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: field_arcsec 2^-32 to under 1296000; declination_deg -90 to 90. Never left where F/4 is 90 degrees less
+ * the size of d or more: the star stays in the field all day.
+ * Error: at most 8 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, never left.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_drift_time_f32(float field_arcsec,
+                                          float declination_deg,
+                                          float *time_s);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how long a star takes through the field, from edge to edge through its centre, when the drive stands still,
+ * in seconds, in double.
+ *
+ * 4 asin(sin(F/4) / cos d) / w, along the parallel of declination, with w the rate of the sky, 15.0410686 arcsec per
+ * second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: field_arcsec 2^-32 to under 1296000; declination_deg -90 to 90. Never left where F/4 is 90 degrees less
+ * the size of d or more: the star stays in the field all day.
+ * Error: at most 8 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, never left.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_drift_time_f64(double field_arcsec,
+                                          double declination_deg,
+                                          double *time_s);
+#endif
+
+/**
+ * Gives the true field of an eyepiece by the time that a star takes through its centre when the drive stands still,
+ * in milliarcseconds.
+ *
+ * 4 asin(cos d sin(w t/4)), with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical
+ * Astronomy).
+ * Ranges: drift_ms not 0, under 86164090.5, a sidereal day; declination_bam -2^30 to 2^30.
+ * Error: at most 1 LSB or 1 part in 10^6, the larger.
+ * Statuses: null pointer, zero, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_from_drift_fx(uint32_t drift_ms,
+                                                    int32_t declination_bam,
+                                                    uint32_t *field_mas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the true field of an eyepiece by the time that a star takes through its centre when the drive stands still,
+ * in arcseconds.
+ *
+ * 4 asin(cos d sin(w t/4)), with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical
+ * Astronomy).
+ * Ranges: drift_s 2^-32 to under 86164.0905, a sidereal day; declination_deg -90 to 90.
+ * Error: at most 8 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_from_drift_f32(float drift_s,
+                                                     float declination_deg,
+                                                     float *field_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the true field of an eyepiece by the time that a star takes through its centre when the drive stands still,
+ * in arcseconds, in double.
+ *
+ * 4 asin(cos d sin(w t/4)), with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical
+ * Astronomy).
+ * Ranges: drift_s 2^-32 to under 86164.0905, a sidereal day; declination_deg -90 to 90.
+ * Error: at most 8 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_true_field_from_drift_f64(double drift_s,
+                                                     double declination_deg,
+                                                     double *field_arcsec);
+#endif
+
+/**
+ * Gives the longest exposure without a drive that draws out a star by no more than the tolerance, in microseconds.
+ *
+ * (t p / f) / (w cos d), t in pixels, with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on
+ * Spherical Astronomy).
+ * Ranges: pixel_nm, tolerance_q16, focal_length_um not 0; declination_bam -2^30 to 2^30; overflow at the pole.
+ * Error: at most 1 LSB or 1 part in 10^6, the larger.
+ * Statuses: null pointer, zero, out of range, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_trail_free_exposure_fx(uint32_t pixel_nm,
+                                                  uint32_t tolerance_q16,
+                                                  uint32_t focal_length_um,
+                                                  int32_t declination_bam,
+                                                  uint32_t *exposure_us);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the longest exposure without a drive that draws out a star by no more than the tolerance, in seconds.
+ *
+ * (t p / f) / (w cos d), t in pixels, with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on
+ * Spherical Astronomy).
+ * Ranges: pixel_um, tolerance, focal_length_mm 2^-32 to 2^32; declination_deg -90 to 90; overflow at the pole.
+ * Error: at most 6 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_trail_free_exposure_f32(float pixel_um,
+                                                   float tolerance,
+                                                   float focal_length_mm,
+                                                   float declination_deg,
+                                                   float *exposure_s);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the longest exposure without a drive that draws out a star by no more than the tolerance, in seconds, in
+ * double.
+ *
+ * (t p / f) / (w cos d), t in pixels, with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on
+ * Spherical Astronomy).
+ * Ranges: pixel_um, tolerance, focal_length_mm 2^-32 to 2^32; declination_deg -90 to 90; overflow at the pole.
+ * Error: at most 6 ulp.
+ * Statuses: null pointer, zero, out of range, not finite, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_trail_free_exposure_f64(double pixel_um,
+                                                   double tolerance,
+                                                   double focal_length_mm,
+                                                   double declination_deg,
+                                                   double *exposure_s);
+#endif
+
+/**
+ * Gives the longest exposure on an altazimuth mount on which the turning field draws out a star by no more than the
+ * tolerance, in milliseconds.
+ *
+ * (1 rad) t / (r rate): t and r in pixels, r from the centre of the turn; the rate is the size of what
+ * field_rotation_rate gives (geometry).
+ * Ranges: tolerance_q16, radius_px, rate_uas_per_s not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rotation_free_exposure_fx(uint32_t tolerance_q16,
+                                                     uint32_t radius_px,
+                                                     uint32_t rate_uas_per_s,
+                                                     uint32_t *exposure_ms);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the longest exposure on an altazimuth mount on which the turning field draws out a star by no more than the
+ * tolerance, in seconds.
+ *
+ * (1 rad) t / (r rate): t and r in pixels, r from the centre of the turn; the rate is the size of what
+ * field_rotation_rate gives (geometry).
+ * Ranges: tolerance, rate_arcsec_per_s 2^-32 to 2^32; radius_px not 0.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rotation_free_exposure_f32(float tolerance,
+                                                      uint32_t radius_px,
+                                                      float rate_arcsec_per_s,
+                                                      float *exposure_s);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the longest exposure on an altazimuth mount on which the turning field draws out a star by no more than the
+ * tolerance, in seconds, in double.
+ *
+ * (1 rad) t / (r rate): t and r in pixels, r from the centre of the turn; the rate is the size of what
+ * field_rotation_rate gives (geometry).
+ * Ranges: tolerance, rate_arcsec_per_s 2^-32 to 2^32; radius_px not 0.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_rotation_free_exposure_f64(double tolerance,
+                                                      uint32_t radius_px,
+                                                      double rate_arcsec_per_s,
+                                                      double *exposure_s);
+#endif
+
+/**
+ * Gives how fast the field turns in an altazimuth telescope, in microarcseconds per second, positive where the
+ * parallactic angle grows.
+ *
+ * -w cos lat cos A / cos h, azimuth from north through east, with w the rate of the sky, 15.0410686 arcsec per
+ * second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: latitude_bam and altitude_bam -2^30 to 2^30, azimuth_bam any; overflow close to the zenith, where it is 0.597 degrees per
+ * second or more; undefined at the exact zenith and nadir.
+ * Error: at most 1 LSB or 2 parts in 10^6, the larger.
+ * Statuses: null pointer, out of range, overflow, undefined.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_field_rotation_rate_fx(int32_t latitude_bam,
+                                                  uint32_t azimuth_bam,
+                                                  int32_t altitude_bam,
+                                                  int32_t *rate_uas_per_s);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how fast the field turns in an altazimuth telescope, in arcseconds per second, positive where the
+ * parallactic angle grows.
+ *
+ * -w cos lat cos A / cos h, azimuth from north through east, with w the rate of the sky, 15.0410686 arcsec per
+ * second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: latitude_deg and altitude_deg -90 to 90, azimuth_deg 0 to 360; undefined at the exact zenith and nadir.
+ * Error: at most 6 ulp.
+ * Statuses: null pointer, out of range, not finite, undefined.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_field_rotation_rate_f32(float latitude_deg,
+                                                   float azimuth_deg,
+                                                   float altitude_deg,
+                                                   float *rate_arcsec_per_s);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how fast the field turns in an altazimuth telescope, in arcseconds per second, in double, positive where the
+ * parallactic angle grows.
+ *
+ * -w cos lat cos A / cos h, azimuth from north through east, with w the rate of the sky, 15.0410686 arcsec per
+ * second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: latitude_deg and altitude_deg -90 to 90, azimuth_deg 0 to 360; undefined at the exact zenith and nadir.
+ * Error: at most 6 ulp.
+ * Statuses: null pointer, out of range, not finite, undefined.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_field_rotation_rate_f64(double latitude_deg,
+                                                   double azimuth_deg,
+                                                   double altitude_deg,
+                                                   double *rate_arcsec_per_s);
+#endif
+
+/**
+ * Gives how fast an altazimuth mount turns in azimuth to follow the sky, in microarcseconds per second, positive
+ * from north to east.
+ *
+ * w (sin lat - cos lat cos A tan h), with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on
+ * Spherical Astronomy).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, and follow the maker's instructions.
+ * Ranges: latitude_bam and altitude_bam -2^30 to 2^30, azimuth_bam any; overflow close to the zenith, where it is 0.597 degrees per
+ * second or more; undefined at the exact zenith and nadir.
+ * Error: at most 1 LSB or 2 parts in 10^6, the larger; the parts are of the larger term.
+ * Statuses: null pointer, out of range, overflow, undefined.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_azimuth_rate_fx(int32_t latitude_bam,
+                                           uint32_t azimuth_bam,
+                                           int32_t altitude_bam,
+                                           int32_t *rate_uas_per_s);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how fast an altazimuth mount turns in azimuth to follow the sky, in arcseconds per second, positive from
+ * north to east.
+ *
+ * w (sin lat - cos lat cos A tan h), with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on
+ * Spherical Astronomy).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, and follow the maker's instructions.
+ * Ranges: latitude_deg and altitude_deg -90 to 90, azimuth_deg 0 to 360; undefined at the exact zenith and nadir.
+ * Error: at most 6 ulp of the larger term.
+ * Statuses: null pointer, out of range, not finite, undefined.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_azimuth_rate_f32(float latitude_deg,
+                                            float azimuth_deg,
+                                            float altitude_deg,
+                                            float *rate_arcsec_per_s);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how fast an altazimuth mount turns in azimuth to follow the sky, in arcseconds per second, in double,
+ * positive from north to east.
+ *
+ * w (sin lat - cos lat cos A tan h), with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on
+ * Spherical Astronomy).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, and follow the maker's instructions.
+ * Ranges: latitude_deg and altitude_deg -90 to 90, azimuth_deg 0 to 360; undefined at the exact zenith and nadir.
+ * Error: at most 6 ulp of the larger term.
+ * Statuses: null pointer, out of range, not finite, undefined.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_azimuth_rate_f64(double latitude_deg,
+                                            double azimuth_deg,
+                                            double altitude_deg,
+                                            double *rate_arcsec_per_s);
+#endif
+
+/**
+ * Gives how fast an altazimuth mount turns in altitude to follow the sky, in microarcseconds per second, positive
+ * upward.
+ *
+ * w cos lat sin A, with w the rate of the sky, 15.0410686 arcsec per second; the altitude does not matter (Smart,
+ * Textbook on Spherical Astronomy).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, and follow the maker's instructions.
+ * Ranges: latitude_bam and altitude_bam -2^30 to 2^30, azimuth_bam any.
+ * Error: at most 0.53 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_altitude_rate_fx(int32_t latitude_bam,
+                                            uint32_t azimuth_bam,
+                                            int32_t altitude_bam,
+                                            int32_t *rate_uas_per_s);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how fast an altazimuth mount turns in altitude to follow the sky, in arcseconds per second, positive upward.
+ *
+ * w cos lat sin A, with w the rate of the sky, 15.0410686 arcsec per second; the altitude does not matter (Smart,
+ * Textbook on Spherical Astronomy).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, and follow the maker's instructions.
+ * Ranges: latitude_deg and altitude_deg -90 to 90, azimuth_deg 0 to 360.
+ * Error: at most 6 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_altitude_rate_f32(float latitude_deg,
+                                             float azimuth_deg,
+                                             float altitude_deg,
+                                             float *rate_arcsec_per_s);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how fast an altazimuth mount turns in altitude to follow the sky, in arcseconds per second, in double,
+ * positive upward.
+ *
+ * w cos lat sin A, with w the rate of the sky, 15.0410686 arcsec per second; the altitude does not matter (Smart,
+ * Textbook on Spherical Astronomy).
+ * Caution: a moving mount can hurt. Stay clear of all that it can reach, and follow the maker's instructions.
+ * Ranges: latitude_deg and altitude_deg -90 to 90, azimuth_deg 0 to 360.
+ * Error: at most 6 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_altitude_rate_f64(double latitude_deg,
+                                             double azimuth_deg,
+                                             double altitude_deg,
+                                             double *rate_arcsec_per_s);
+#endif
+
+/**
+ * Gives the radius of the circle about the zenith in which an altazimuth mount cannot follow the sky, in
+ * milliarcseconds.
+ *
+ * z with w (|sin lat| + cos lat cot z) = the fastest rate in azimuth, a circle on the safe side, with w the rate of
+ * the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Caution: a mount at its top speed can hurt. Stay clear of all that it can reach, and follow the maker's
+ * instructions.
+ * Ranges: latitude_bam -2^30 to 2^30; top_rate_mas_per_s over w |sin lat|.
+ * Error: at most 1 LSB or 2 parts in 10^6, the larger.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_zenith_blind_radius_fx(int32_t latitude_bam,
+                                                  uint32_t top_rate_mas_per_s,
+                                                  uint32_t *radius_mas);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the radius of the circle about the zenith in which an altazimuth mount cannot follow the sky, in arcseconds.
+ *
+ * z with w (|sin lat| + cos lat cot z) = the fastest rate in azimuth, a circle on the safe side, with w the rate of
+ * the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Caution: a mount at its top speed can hurt. Stay clear of all that it can reach, and follow the maker's
+ * instructions.
+ * Ranges: latitude_deg -90 to 90; top_rate_arcsec_per_s over w |sin lat|, to 2^32.
+ * Error: at most 6 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_zenith_blind_radius_f32(float latitude_deg,
+                                                   float top_rate_arcsec_per_s,
+                                                   float *radius_arcsec);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the radius of the circle about the zenith in which an altazimuth mount cannot follow the sky, in arcseconds,
+ * in double.
+ *
+ * z with w (|sin lat| + cos lat cot z) = the fastest rate in azimuth, a circle on the safe side, with w the rate of
+ * the sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Caution: a mount at its top speed can hurt. Stay clear of all that it can reach, and follow the maker's
+ * instructions.
+ * Ranges: latitude_deg -90 to 90; top_rate_arcsec_per_s over w |sin lat|, to 2^32.
+ * Error: at most 6 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_zenith_blind_radius_f64(double latitude_deg,
+                                                   double top_rate_arcsec_per_s,
+                                                   double *radius_arcsec);
+#endif
+
+/**
+ * Gives how fast a star leaves its declination on a mount whose polar axis is not on the pole, in microarcseconds
+ * per second, positive northward.
+ *
+ * -w e sin H to first order in e, H the star's hour angle less that of the displaced pole, with w the rate of the
+ * sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: polar_error_mas at most 18000000, 5 degrees; hour_angle_bam any.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_misalignment_drift_fx(uint32_t polar_error_mas,
+                                                 uint32_t hour_angle_bam,
+                                                 int32_t *drift_uas_per_s);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives how fast a star leaves its declination on a mount whose polar axis is not on the pole, in arcseconds per
+ * second, positive northward.
+ *
+ * -w e sin H to first order in e, H the star's hour angle less that of the displaced pole, with w the rate of the
+ * sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: polar_error_arcsec 0 to 18000; hour_angle_deg 0 to 360.
+ * Error: at most 4 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_misalignment_drift_f32(float polar_error_arcsec,
+                                                  float hour_angle_deg,
+                                                  float *drift_arcsec_per_s);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives how fast a star leaves its declination on a mount whose polar axis is not on the pole, in arcseconds per
+ * second, in double, positive northward.
+ *
+ * -w e sin H to first order in e, H the star's hour angle less that of the displaced pole, with w the rate of the
+ * sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
+ * Ranges: polar_error_arcsec 0 to 18000; hour_angle_deg 0 to 360.
+ * Error: at most 4 ulp.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_misalignment_drift_f64(double polar_error_arcsec,
+                                                  double hour_angle_deg,
+                                                  double *drift_arcsec_per_s);
+#endif
+
+/* --------------------------------------------------------------------------------------------------
+   The Sun: where it stands, how far from it a telescope points, and how much of its light an
+   aperture collects. */
+
+/**
+ * Gives the right ascension of the Sun, of the date, as binary angle.
+ *
+ * atan2(cos e sin l, cos l), l = L + 1.915 sin g + 0.020 sin 2g, L = 280.460 + 0.9856474 n, g = 357.528 + 0.9856003
+ * n, e = 23.439 - 0.0000004 n, in degrees, n days from 2000 January 1, 12 h (the low-precision expression of The
+ * Astronomical Almanac).
+ * Caution: nothing that is computed makes it safe to look near the Sun.
+ * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
+ * Error: at most 5 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
+ * from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_right_ascension_fx(uint32_t unix_s,
+                                                  uint32_t *right_ascension_bam);
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the right ascension of the Sun, of the date, as degrees, in double.
+ *
+ * atan2(cos e sin l, cos l), l = L + 1.915 sin g + 0.020 sin 2g, L = 280.460 + 0.9856474 n, g = 357.528 + 0.9856003
+ * n, e = 23.439 - 0.0000004 n, in degrees, n days from 2000 January 1, 12 h (the low-precision expression of The
+ * Astronomical Almanac).
+ * Caution: nothing that is computed makes it safe to look near the Sun.
+ * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
+ * Error: at most 10^-10 degrees from the expression. The expression is within 0.017 degrees, on the sky, of a full
+ * ephemeris from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_right_ascension_f64(uint32_t unix_s,
+                                                   double *right_ascension_deg);
+#endif
+
+/**
+ * Gives the declination of the Sun, of the date, as binary angle.
+ *
+ * asin(sin e sin l), l = L + 1.915 sin g + 0.020 sin 2g, L = 280.460 + 0.9856474 n, g = 357.528 + 0.9856003 n, e =
+ * 23.439 - 0.0000004 n, in degrees, n days from 2000 January 1, 12 h (the low-precision expression of The
+ * Astronomical Almanac).
+ * Caution: nothing that is computed makes it safe to look near the Sun.
+ * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
+ * Error: at most 5 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
+ * from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_declination_fx(uint32_t unix_s,
+                                              int32_t *declination_bam);
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the declination of the Sun, of the date, as degrees, in double.
+ *
+ * asin(sin e sin l), l = L + 1.915 sin g + 0.020 sin 2g, L = 280.460 + 0.9856474 n, g = 357.528 + 0.9856003 n, e =
+ * 23.439 - 0.0000004 n, in degrees, n days from 2000 January 1, 12 h (the low-precision expression of The
+ * Astronomical Almanac).
+ * Caution: nothing that is computed makes it safe to look near the Sun.
+ * Ranges: unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year 2100.
+ * Error: at most 10^-10 degrees from the expression. The expression is within 0.017 degrees, on the sky, of a full
+ * ephemeris from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_declination_f64(uint32_t unix_s,
+                                               double *declination_deg);
+#endif
+
+/**
+ * Gives the angle from a direction to the centre of the Sun, in milliarcseconds.
+ *
+ * The great circle to the place that sun_right_ascension and sun_declination give (Smart, Textbook on Spherical
+ * Astronomy).
+ * Caution: nothing that is computed makes it safe to look near the Sun. The direction is of the date: one of J2000
+ * is 0.36 degrees off in 2026. The disc of the Sun reaches 0.27 degrees from its centre, and a finder or a mount's
+ * path may come nearer than the telescope does.
+ * Ranges: right_ascension_bam any; declination_bam -2^30 to 2^30; unix_s, seconds from 1970 January 1, 0 h UTC, under
+ * 4102444800, the year 2100.
+ * Error: at most 4 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
+ * from 1970 to 2100.
+ * Statuses: null pointer, out of range.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_clearance_fx(uint32_t right_ascension_bam,
+                                            int32_t declination_bam,
+                                            uint32_t unix_s,
+                                            uint32_t *clearance_mas);
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the angle from a direction to the centre of the Sun, in arcseconds, in double.
+ *
+ * The great circle to the place that sun_right_ascension and sun_declination give (Smart, Textbook on Spherical
+ * Astronomy).
+ * Caution: nothing that is computed makes it safe to look near the Sun. The direction is of the date: one of J2000
+ * is 0.36 degrees off in 2026. The disc of the Sun reaches 0.27 degrees from its centre, and a finder or a mount's
+ * path may come nearer than the telescope does.
+ * Ranges: right_ascension_deg 0 to 360; declination_deg -90 to 90; unix_s, seconds from 1970 January 1, 0 h UTC,
+ * under 4102444800, the year 2100.
+ * Error: at most 10^-6 arcsec from the expression. The expression is within 0.017 degrees, on the sky, of a full
+ * ephemeris from 1970 to 2100.
+ * Statuses: null pointer, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_sun_clearance_f64(double right_ascension_deg,
+                                             double declination_deg,
+                                             uint32_t unix_s,
+                                             double *clearance_arcsec);
+#endif
+
+/**
+ * Gives the power of the Sun's light that an aperture takes in, in milliwatts.
+ *
+ * 1000 W/m^2 (pi / 4) D^2: the Sun high in a clear sky (common practice).
+ * Caution: some milliwatts at the focus burn an eye or a sensor at once. Use a full-aperture filter made for the
+ * Sun.
+ * Ranges: effective_aperture_um not 0.
+ * Error: at most 0.51 LSB.
+ * Statuses: null pointer, zero, overflow.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_collected_sunlight_fx(uint32_t effective_aperture_um,
+                                                 uint32_t *power_mw);
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/**
+ * Gives the power of the Sun's light that an aperture takes in, in milliwatts.
+ *
+ * 1000 W/m^2 (pi / 4) D^2: the Sun high in a clear sky (common practice).
+ * Caution: some milliwatts at the focus burn an eye or a sensor at once. Use a full-aperture filter made for the
+ * Sun.
+ * Ranges: effective_aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_collected_sunlight_f32(float effective_aperture_mm,
+                                                  float *power_mw);
+#endif
+
+#if (!defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__))
+/**
+ * Gives the power of the Sun's light that an aperture takes in, in milliwatts, in double.
+ *
+ * 1000 W/m^2 (pi / 4) D^2: the Sun high in a clear sky (common practice).
+ * Caution: some milliwatts at the focus burn an eye or a sensor at once. Use a full-aperture filter made for the
+ * Sun.
+ * Ranges: effective_aperture_mm 2^-32 to 2^32.
+ * Error: at most 2 ulp.
+ * Statuses: null pointer, zero, out of range, not finite.
+ */
+FIELDSTOP_CHECKED
+fieldstop_status fieldstop_collected_sunlight_f64(double effective_aperture_mm,
+                                                  double *power_mw);
 #endif
 
 /* --------------------------------------------------------------------------------------------------

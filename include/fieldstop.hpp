@@ -269,6 +269,8 @@ typedef quantity<unit::arcseconds, double> arcseconds_f64;
 typedef quantity<unit::arcseconds, float> arcseconds_f32;
 typedef quantity<unit::arcseconds_per_millimetre, double> arcseconds_per_millimetre_f64;
 typedef quantity<unit::arcseconds_per_millimetre, float> arcseconds_per_millimetre_f32;
+typedef quantity<unit::arcseconds_per_second, double> arcseconds_per_second_f64;
+typedef quantity<unit::arcseconds_per_second, float> arcseconds_per_second_f32;
 typedef quantity<unit::binary_angle, int32_t> signed_binary_angle;
 typedef quantity<unit::binary_angle, uint32_t> binary_angle;
 typedef quantity<unit::day_milliseconds, uint32_t> day_milliseconds;
@@ -282,13 +284,17 @@ typedef quantity<unit::magnitudes, float> magnitudes_f32;
 typedef quantity<unit::metres, double> metres_f64;
 typedef quantity<unit::metres, float> metres_f32;
 typedef quantity<unit::microarcseconds, uint32_t> microarcseconds;
+typedef quantity<unit::microarcseconds_per_second, int32_t> signed_microarcseconds_per_second;
+typedef quantity<unit::microarcseconds_per_second, uint32_t> microarcseconds_per_second;
 typedef quantity<unit::micrometres, double> micrometres_f64;
 typedef quantity<unit::micrometres, float> micrometres_f32;
 typedef quantity<unit::micrometres, int32_t> signed_micrometres;
 typedef quantity<unit::micrometres, uint32_t> micrometres;
+typedef quantity<unit::microseconds, uint32_t> microseconds;
 typedef quantity<unit::milliarcseconds, int32_t> signed_milliarcseconds;
 typedef quantity<unit::milliarcseconds, uint32_t> milliarcseconds;
 typedef quantity<unit::milliarcseconds_per_millimetre, uint32_t> milliarcseconds_per_millimetre;
+typedef quantity<unit::milliarcseconds_per_second, uint32_t> milliarcseconds_per_second;
 typedef quantity<unit::millikelvin, int32_t> signed_millikelvin;
 typedef quantity<unit::millikelvin, uint32_t> millikelvin;
 typedef quantity<unit::millimagnitudes, int32_t> millimagnitudes;
@@ -296,6 +302,10 @@ typedef quantity<unit::millimagnitudes, uint32_t> unsigned_millimagnitudes;
 typedef quantity<unit::millimetres, double> millimetres_f64;
 typedef quantity<unit::millimetres, float> millimetres_f32;
 typedef quantity<unit::millimetres, uint32_t> millimetres;
+typedef quantity<unit::milliseconds, uint32_t> milliseconds;
+typedef quantity<unit::milliwatts, double> milliwatts_f64;
+typedef quantity<unit::milliwatts, float> milliwatts_f32;
+typedef quantity<unit::milliwatts, uint32_t> milliwatts;
 typedef quantity<unit::nanometres, double> nanometres_f64;
 typedef quantity<unit::nanometres, float> nanometres_f32;
 typedef quantity<unit::nanometres, int32_t> signed_nanometres;
@@ -307,6 +317,9 @@ typedef quantity<unit::parts_per_million_per_kelvin, double> parts_per_million_p
 typedef quantity<unit::parts_per_million_per_kelvin, float> parts_per_million_per_kelvin_f32;
 typedef quantity<unit::q16, int32_t> signed_q16;
 typedef quantity<unit::q16, uint32_t> q16;
+typedef quantity<unit::seconds, double> seconds_f64;
+typedef quantity<unit::seconds, float> seconds_f32;
+typedef quantity<unit::seconds, uint32_t> seconds;
 typedef quantity<unit::thousandths, uint32_t> thousandths;
 
 namespace literals {
@@ -3800,6 +3813,372 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<millimetres_f64> secondary_spectrum_f6
     double given;
     const fieldstop_status number = ::fieldstop_secondary_spectrum_f64(focal_length_mm.count(), partial_difference, abbe_difference, &given);
     return access::given<millimetres_f64>(number, given);
+}
+#endif
+
+/* Motion: how the sky turns past a telescope, how long a star stays in the field or on a pixel, and what an altazimuth mount has to do. */
+
+/** Gives how fast a star drifts through the field when the drive stands still, in microarcseconds per second. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<microarcseconds_per_second> drift_rate_fx(signed_binary_angle declination_bam)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_drift_rate_fx(declination_bam.count(), &given);
+    return access::given<microarcseconds_per_second>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how fast a star drifts through the field when the drive stands still, in arcseconds per second. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f32> drift_rate_f32(degrees_of_arc_f32 declination_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_drift_rate_f32(declination_deg.count(), &given);
+    return access::given<arcseconds_per_second_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how fast a star drifts through the field when the drive stands still, in arcseconds per second, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f64> drift_rate_f64(degrees_of_arc_f64 declination_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_drift_rate_f64(declination_deg.count(), &given);
+    return access::given<arcseconds_per_second_f64>(number, given);
+}
+#endif
+
+/** Gives how long a star takes through the field, from edge to edge through its centre, when the drive stands still, in milliseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliseconds> drift_time_fx(milliarcseconds field_mas, signed_binary_angle declination_bam)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_drift_time_fx(field_mas.count(), declination_bam.count(), &given);
+    return access::given<milliseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how long a star takes through the field, from edge to edge through its centre, when the drive stands still, in seconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<seconds_f32> drift_time_f32(arcseconds_f32 field_arcsec, degrees_of_arc_f32 declination_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_drift_time_f32(field_arcsec.count(), declination_deg.count(), &given);
+    return access::given<seconds_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how long a star takes through the field, from edge to edge through its centre, when the drive stands still, in seconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<seconds_f64> drift_time_f64(arcseconds_f64 field_arcsec, degrees_of_arc_f64 declination_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_drift_time_f64(field_arcsec.count(), declination_deg.count(), &given);
+    return access::given<seconds_f64>(number, given);
+}
+#endif
+
+/** Gives the true field of an eyepiece by the time that a star takes through its centre when the drive stands still, in milliarcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> true_field_from_drift_fx(milliseconds drift_ms, signed_binary_angle declination_bam)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_true_field_from_drift_fx(drift_ms.count(), declination_bam.count(), &given);
+    return access::given<milliarcseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the true field of an eyepiece by the time that a star takes through its centre when the drive stands still, in arcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> true_field_from_drift_f32(seconds_f32 drift_s, degrees_of_arc_f32 declination_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_true_field_from_drift_f32(drift_s.count(), declination_deg.count(), &given);
+    return access::given<arcseconds_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the true field of an eyepiece by the time that a star takes through its centre when the drive stands still, in arcseconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> true_field_from_drift_f64(seconds_f64 drift_s, degrees_of_arc_f64 declination_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_true_field_from_drift_f64(drift_s.count(), declination_deg.count(), &given);
+    return access::given<arcseconds_f64>(number, given);
+}
+#endif
+
+/** Gives the longest exposure without a drive that draws out a star by no more than the tolerance, in microseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<microseconds> trail_free_exposure_fx(nanometres pixel_nm, q16 tolerance_q16, micrometres focal_length_um, signed_binary_angle declination_bam)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_trail_free_exposure_fx(pixel_nm.count(), tolerance_q16.count(), focal_length_um.count(), declination_bam.count(), &given);
+    return access::given<microseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the longest exposure without a drive that draws out a star by no more than the tolerance, in seconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<seconds_f32> trail_free_exposure_f32(micrometres_f32 pixel_um, float tolerance, millimetres_f32 focal_length_mm, degrees_of_arc_f32 declination_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_trail_free_exposure_f32(pixel_um.count(), tolerance, focal_length_mm.count(), declination_deg.count(), &given);
+    return access::given<seconds_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the longest exposure without a drive that draws out a star by no more than the tolerance, in seconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<seconds_f64> trail_free_exposure_f64(micrometres_f64 pixel_um, double tolerance, millimetres_f64 focal_length_mm, degrees_of_arc_f64 declination_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_trail_free_exposure_f64(pixel_um.count(), tolerance, focal_length_mm.count(), declination_deg.count(), &given);
+    return access::given<seconds_f64>(number, given);
+}
+#endif
+
+/** Gives the longest exposure on an altazimuth mount on which the turning field draws out a star by no more than the tolerance, in milliseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliseconds> rotation_free_exposure_fx(q16 tolerance_q16, uint32_t radius_px, microarcseconds_per_second rate_uas_per_s)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_rotation_free_exposure_fx(tolerance_q16.count(), radius_px, rate_uas_per_s.count(), &given);
+    return access::given<milliseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the longest exposure on an altazimuth mount on which the turning field draws out a star by no more than the tolerance, in seconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<seconds_f32> rotation_free_exposure_f32(float tolerance, uint32_t radius_px, arcseconds_per_second_f32 rate_arcsec_per_s)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_rotation_free_exposure_f32(tolerance, radius_px, rate_arcsec_per_s.count(), &given);
+    return access::given<seconds_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the longest exposure on an altazimuth mount on which the turning field draws out a star by no more than the tolerance, in seconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<seconds_f64> rotation_free_exposure_f64(double tolerance, uint32_t radius_px, arcseconds_per_second_f64 rate_arcsec_per_s)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_rotation_free_exposure_f64(tolerance, radius_px, rate_arcsec_per_s.count(), &given);
+    return access::given<seconds_f64>(number, given);
+}
+#endif
+
+/** Gives how fast the field turns in an altazimuth telescope, in microarcseconds per second, positive where the parallactic angle grows. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<signed_microarcseconds_per_second> field_rotation_rate_fx(signed_binary_angle latitude_bam, binary_angle azimuth_bam, signed_binary_angle altitude_bam)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_field_rotation_rate_fx(latitude_bam.count(), azimuth_bam.count(), altitude_bam.count(), &given);
+    return access::given<signed_microarcseconds_per_second>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how fast the field turns in an altazimuth telescope, in arcseconds per second, positive where the parallactic angle grows. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f32> field_rotation_rate_f32(degrees_of_arc_f32 latitude_deg, degrees_of_arc_f32 azimuth_deg, degrees_of_arc_f32 altitude_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_field_rotation_rate_f32(latitude_deg.count(), azimuth_deg.count(), altitude_deg.count(), &given);
+    return access::given<arcseconds_per_second_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how fast the field turns in an altazimuth telescope, in arcseconds per second, in double, positive where the parallactic angle grows. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f64> field_rotation_rate_f64(degrees_of_arc_f64 latitude_deg, degrees_of_arc_f64 azimuth_deg, degrees_of_arc_f64 altitude_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_field_rotation_rate_f64(latitude_deg.count(), azimuth_deg.count(), altitude_deg.count(), &given);
+    return access::given<arcseconds_per_second_f64>(number, given);
+}
+#endif
+
+/** Gives how fast an altazimuth mount turns in azimuth to follow the sky, in microarcseconds per second, positive from north to east. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<signed_microarcseconds_per_second> azimuth_rate_fx(signed_binary_angle latitude_bam, binary_angle azimuth_bam, signed_binary_angle altitude_bam)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_azimuth_rate_fx(latitude_bam.count(), azimuth_bam.count(), altitude_bam.count(), &given);
+    return access::given<signed_microarcseconds_per_second>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how fast an altazimuth mount turns in azimuth to follow the sky, in arcseconds per second, positive from north to east. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f32> azimuth_rate_f32(degrees_of_arc_f32 latitude_deg, degrees_of_arc_f32 azimuth_deg, degrees_of_arc_f32 altitude_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_azimuth_rate_f32(latitude_deg.count(), azimuth_deg.count(), altitude_deg.count(), &given);
+    return access::given<arcseconds_per_second_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how fast an altazimuth mount turns in azimuth to follow the sky, in arcseconds per second, in double, positive from north to east. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f64> azimuth_rate_f64(degrees_of_arc_f64 latitude_deg, degrees_of_arc_f64 azimuth_deg, degrees_of_arc_f64 altitude_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_azimuth_rate_f64(latitude_deg.count(), azimuth_deg.count(), altitude_deg.count(), &given);
+    return access::given<arcseconds_per_second_f64>(number, given);
+}
+#endif
+
+/** Gives how fast an altazimuth mount turns in altitude to follow the sky, in microarcseconds per second, positive upward. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<signed_microarcseconds_per_second> altitude_rate_fx(signed_binary_angle latitude_bam, binary_angle azimuth_bam, signed_binary_angle altitude_bam)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_altitude_rate_fx(latitude_bam.count(), azimuth_bam.count(), altitude_bam.count(), &given);
+    return access::given<signed_microarcseconds_per_second>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how fast an altazimuth mount turns in altitude to follow the sky, in arcseconds per second, positive upward. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f32> altitude_rate_f32(degrees_of_arc_f32 latitude_deg, degrees_of_arc_f32 azimuth_deg, degrees_of_arc_f32 altitude_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_altitude_rate_f32(latitude_deg.count(), azimuth_deg.count(), altitude_deg.count(), &given);
+    return access::given<arcseconds_per_second_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how fast an altazimuth mount turns in altitude to follow the sky, in arcseconds per second, in double, positive upward. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f64> altitude_rate_f64(degrees_of_arc_f64 latitude_deg, degrees_of_arc_f64 azimuth_deg, degrees_of_arc_f64 altitude_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_altitude_rate_f64(latitude_deg.count(), azimuth_deg.count(), altitude_deg.count(), &given);
+    return access::given<arcseconds_per_second_f64>(number, given);
+}
+#endif
+
+/** Gives the radius of the circle about the zenith in which an altazimuth mount cannot follow the sky, in milliarcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> zenith_blind_radius_fx(signed_binary_angle latitude_bam, milliarcseconds_per_second top_rate_mas_per_s)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_zenith_blind_radius_fx(latitude_bam.count(), top_rate_mas_per_s.count(), &given);
+    return access::given<milliarcseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the radius of the circle about the zenith in which an altazimuth mount cannot follow the sky, in arcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f32> zenith_blind_radius_f32(degrees_of_arc_f32 latitude_deg, arcseconds_per_second_f32 top_rate_arcsec_per_s)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_zenith_blind_radius_f32(latitude_deg.count(), top_rate_arcsec_per_s.count(), &given);
+    return access::given<arcseconds_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the radius of the circle about the zenith in which an altazimuth mount cannot follow the sky, in arcseconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> zenith_blind_radius_f64(degrees_of_arc_f64 latitude_deg, arcseconds_per_second_f64 top_rate_arcsec_per_s)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_zenith_blind_radius_f64(latitude_deg.count(), top_rate_arcsec_per_s.count(), &given);
+    return access::given<arcseconds_f64>(number, given);
+}
+#endif
+
+/** Gives how fast a star leaves its declination on a mount whose polar axis is not on the pole, in microarcseconds per second, positive northward. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<signed_microarcseconds_per_second> misalignment_drift_fx(milliarcseconds polar_error_mas, binary_angle hour_angle_bam)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_misalignment_drift_fx(polar_error_mas.count(), hour_angle_bam.count(), &given);
+    return access::given<signed_microarcseconds_per_second>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives how fast a star leaves its declination on a mount whose polar axis is not on the pole, in arcseconds per second, positive northward. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f32> misalignment_drift_f32(arcseconds_f32 polar_error_arcsec, degrees_of_arc_f32 hour_angle_deg)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_misalignment_drift_f32(polar_error_arcsec.count(), hour_angle_deg.count(), &given);
+    return access::given<arcseconds_per_second_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives how fast a star leaves its declination on a mount whose polar axis is not on the pole, in arcseconds per second, in double, positive northward. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_per_second_f64> misalignment_drift_f64(arcseconds_f64 polar_error_arcsec, degrees_of_arc_f64 hour_angle_deg)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_misalignment_drift_f64(polar_error_arcsec.count(), hour_angle_deg.count(), &given);
+    return access::given<arcseconds_per_second_f64>(number, given);
+}
+#endif
+
+/* The Sun: where it stands, how far from it a telescope points, and how much of its light an aperture collects. */
+
+/** Gives the right ascension of the Sun, of the date, as binary angle. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<binary_angle> sun_right_ascension_fx(seconds unix_s)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_sun_right_ascension_fx(unix_s.count(), &given);
+    return access::given<binary_angle>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the right ascension of the Sun, of the date, as degrees, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<degrees_of_arc_f64> sun_right_ascension_f64(seconds unix_s)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_right_ascension_f64(unix_s.count(), &given);
+    return access::given<degrees_of_arc_f64>(number, given);
+}
+#endif
+
+/** Gives the declination of the Sun, of the date, as binary angle. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<signed_binary_angle> sun_declination_fx(seconds unix_s)
+{
+    int32_t given;
+    const fieldstop_status number = ::fieldstop_sun_declination_fx(unix_s.count(), &given);
+    return access::given<signed_binary_angle>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the declination of the Sun, of the date, as degrees, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<degrees_of_arc_f64> sun_declination_f64(seconds unix_s)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_declination_f64(unix_s.count(), &given);
+    return access::given<degrees_of_arc_f64>(number, given);
+}
+#endif
+
+/** Gives the angle from a direction to the centre of the Sun, in milliarcseconds. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliarcseconds> sun_clearance_fx(binary_angle right_ascension_bam, signed_binary_angle declination_bam, seconds unix_s)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_sun_clearance_fx(right_ascension_bam.count(), declination_bam.count(), unix_s.count(), &given);
+    return access::given<milliarcseconds>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the angle from a direction to the centre of the Sun, in arcseconds, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<arcseconds_f64> sun_clearance_f64(degrees_of_arc_f64 right_ascension_deg, degrees_of_arc_f64 declination_deg, seconds unix_s)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_sun_clearance_f64(right_ascension_deg.count(), declination_deg.count(), unix_s.count(), &given);
+    return access::given<arcseconds_f64>(number, given);
+}
+#endif
+
+/** Gives the power of the Sun's light that an aperture takes in, in milliwatts. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliwatts> collected_sunlight_fx(micrometres effective_aperture_um)
+{
+    uint32_t given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_fx(effective_aperture_um.count(), &given);
+    return access::given<milliwatts>(number, given);
+}
+
+#if !defined(FIELDSTOP_NO_FLOAT)
+/** Gives the power of the Sun's light that an aperture takes in, in milliwatts. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliwatts_f32> collected_sunlight_f32(millimetres_f32 effective_aperture_mm)
+{
+    float given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_f32(effective_aperture_mm.count(), &given);
+    return access::given<milliwatts_f32>(number, given);
+}
+#endif
+
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+/** Gives the power of the Sun's light that an aperture takes in, in milliwatts, in double. */
+FIELDSTOP_CHECKED FIELDSTOP_INLINE result<milliwatts_f64> collected_sunlight_f64(millimetres_f64 effective_aperture_mm)
+{
+    double given;
+    const fieldstop_status number = ::fieldstop_collected_sunlight_f64(effective_aperture_mm.count(), &given);
+    return access::given<milliwatts_f64>(number, given);
 }
 #endif
 

@@ -269,7 +269,7 @@ pub unsafe extern "C" fn fieldstop_trail_free_exposure_f64(
 ///
 /// (1 rad) t / (r rate): t and r in pixels, r from the centre of the turn; the rate is the size of what
 /// field_rotation_rate gives (geometry).
-/// Ranges: none of the arguments 0.
+/// Ranges: tolerance_q16, radius_px, rate_uas_per_s not 0.
 /// Error: at most 0.51 LSB.
 /// Statuses: null pointer, zero, overflow.
 #[must_use]
@@ -339,7 +339,7 @@ pub unsafe extern "C" fn fieldstop_rotation_free_exposure_f64(
 ///
 /// -w cos lat cos A / cos h, azimuth from north through east, with w the rate of the sky, 15.0410686 arcsec per
 /// second (Smart, Textbook on Spherical Astronomy).
-/// Ranges: latitude_bam and altitude_bam -2^30 to 2^30; overflow close to the zenith, where it is 0.597 degrees per
+/// Ranges: latitude_bam and altitude_bam -2^30 to 2^30, azimuth_bam any; overflow close to the zenith, where it is 0.597 degrees per
 /// second or more; undefined at the exact zenith and nadir.
 /// Error: at most 1 LSB or 2 parts in 10^6, the larger.
 /// Statuses: null pointer, out of range, overflow, undefined.
@@ -411,7 +411,7 @@ pub unsafe extern "C" fn fieldstop_field_rotation_rate_f64(
 /// w (sin lat - cos lat cos A tan h), with w the rate of the sky, 15.0410686 arcsec per second (Smart, Textbook on
 /// Spherical Astronomy).
 /// Caution: a moving mount can hurt. Stay clear of all that it can reach, and follow the maker's instructions.
-/// Ranges: latitude_bam and altitude_bam -2^30 to 2^30; overflow close to the zenith, where it is 0.597 degrees per
+/// Ranges: latitude_bam and altitude_bam -2^30 to 2^30, azimuth_bam any; overflow close to the zenith, where it is 0.597 degrees per
 /// second or more; undefined at the exact zenith and nadir.
 /// Error: at most 1 LSB or 2 parts in 10^6, the larger; the parts are of the larger term.
 /// Statuses: null pointer, out of range, overflow, undefined.
@@ -481,7 +481,7 @@ pub unsafe extern "C" fn fieldstop_azimuth_rate_f64(
 /// w cos lat sin A, with w the rate of the sky, 15.0410686 arcsec per second; the altitude does not matter (Smart,
 /// Textbook on Spherical Astronomy).
 /// Caution: a moving mount can hurt. Stay clear of all that it can reach, and follow the maker's instructions.
-/// Ranges: latitude_bam and altitude_bam -2^30 to 2^30.
+/// Ranges: latitude_bam and altitude_bam -2^30 to 2^30, azimuth_bam any.
 /// Error: at most 0.53 LSB.
 /// Statuses: null pointer, out of range.
 #[must_use]
@@ -619,7 +619,7 @@ pub unsafe extern "C" fn fieldstop_zenith_blind_radius_f64(
 ///
 /// -w e sin H to first order in e, H the star's hour angle less that of the displaced pole, with w the rate of the
 /// sky, 15.0410686 arcsec per second (Smart, Textbook on Spherical Astronomy).
-/// Ranges: polar_error_mas at most 18000000, 5 degrees.
+/// Ranges: polar_error_mas at most 18000000, 5 degrees; hour_angle_bam any.
 /// Error: at most 0.51 LSB.
 /// Statuses: null pointer, out of range.
 #[must_use]

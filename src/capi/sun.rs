@@ -93,8 +93,8 @@ pub unsafe extern "C" fn fieldstop_sun_declination_f64(
 /// Caution: nothing that is computed makes it safe to look near the Sun. The direction is of the date: one of J2000
 /// is 0.36 degrees off in 2026. The disc of the Sun reaches 0.27 degrees from its centre, and a finder or a mount's
 /// path may come nearer than the telescope does.
-/// Ranges: declination_bam -2^30 to 2^30; unix_s, seconds from 1970 January 1, 0 h UTC, under 4102444800, the year
-/// 2100.
+/// Ranges: right_ascension_bam any; declination_bam -2^30 to 2^30; unix_s, seconds from 1970 January 1, 0 h UTC, under
+/// 4102444800, the year 2100.
 /// Error: at most 4 LSB from the expression. The expression is within 0.017 degrees, on the sky, of a full ephemeris
 /// from 1970 to 2100.
 /// Statuses: null pointer, out of range.

@@ -1574,6 +1574,212 @@ int main(void)
     }
 #endif
     {
+        fieldstop_status (*function)(int32_t, uint32_t *) = fieldstop_drift_rate_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float *) = fieldstop_drift_rate_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double *) = fieldstop_drift_rate_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t, uint32_t *) = fieldstop_drift_time_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_drift_time_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_drift_time_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t, uint32_t *) = fieldstop_true_field_from_drift_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_true_field_from_drift_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_true_field_from_drift_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, int32_t, uint32_t *) = fieldstop_trail_free_exposure_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float, float *) = fieldstop_trail_free_exposure_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double, double *) = fieldstop_trail_free_exposure_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, uint32_t, uint32_t *) = fieldstop_rotation_free_exposure_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, uint32_t, float, float *) = fieldstop_rotation_free_exposure_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, uint32_t, double, double *) = fieldstop_rotation_free_exposure_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t, int32_t, int32_t *) = fieldstop_field_rotation_rate_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_field_rotation_rate_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_field_rotation_rate_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t, int32_t, int32_t *) = fieldstop_azimuth_rate_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_azimuth_rate_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_azimuth_rate_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t, int32_t, int32_t *) = fieldstop_altitude_rate_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float, float *) = fieldstop_altitude_rate_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double, double *) = fieldstop_altitude_rate_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(int32_t, uint32_t, uint32_t *) = fieldstop_zenith_blind_radius_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_zenith_blind_radius_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_zenith_blind_radius_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t, int32_t *) = fieldstop_misalignment_drift_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float, float *) = fieldstop_misalignment_drift_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, double *) = fieldstop_misalignment_drift_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t *) = fieldstop_sun_right_ascension_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(uint32_t, double *) = fieldstop_sun_right_ascension_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t *) = fieldstop_sun_declination_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(uint32_t, double *) = fieldstop_sun_declination_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, int32_t, uint32_t, uint32_t *) = fieldstop_sun_clearance_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double, uint32_t, double *) = fieldstop_sun_clearance_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
+        fieldstop_status (*function)(uint32_t, uint32_t *) = fieldstop_collected_sunlight_fx;
+        present = (any_function)function;
+    }
+#if !defined(FIELDSTOP_NO_FLOAT)
+    {
+        fieldstop_status (*function)(float, float *) = fieldstop_collected_sunlight_f32;
+        present = (any_function)function;
+    }
+#endif
+#if !defined(FIELDSTOP_NO_FLOAT) && !defined(__AVR__)
+    {
+        fieldstop_status (*function)(double, double *) = fieldstop_collected_sunlight_f64;
+        present = (any_function)function;
+    }
+#endif
+    {
         fieldstop_status (*function)(const struct fieldstop_telescope *) = fieldstop_telescope_check;
         present = (any_function)function;
     }

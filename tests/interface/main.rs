@@ -5,6 +5,7 @@
 mod cpp;
 mod declared;
 mod promise;
+mod rust_api;
 
 use std::fs;
 use std::path::{Path, PathBuf};
