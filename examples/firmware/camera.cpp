@@ -198,20 +198,20 @@ void draw_focus(const fieldstop::camera_readout &readout)
     on.show(1);
 }
 
-/* The tube's change of temperature that takes the focus out of its depth, and the coarsest pixel that loses nothing. */
+/* The tube's change of temperature that takes the focus out of its depth, and how wide one step makes a point. */
 void draw_limits(const fieldstop::camera_readout &readout)
 {
+    const auto ratio = readout.focal_ratio();
     const auto depth = depth_of_focus(readout);
-    const auto focal = readout.focal_length();
     const auto change = depth ? fieldstop::refocus_temperature_fx(tube_length, steel, depth.value())
                               : result<fieldstop::millikelvin>(depth.status());
     show_ratio(0, "Refocus at K",
                change ? fieldstop::q16_from_milli_fx(fieldstop::thousandths(change.value().count()))
                       : result<fieldstop::q16>(change.status()));
-    show_micrometres(1, "Pixel to",
-                     focal ? fieldstop::nyquist_pixel_fx(focal.value(), telescope.aperture(), observer.wavelength())
-                           : result<fieldstop::nanometres>(focal.status()),
-                     1);
+    show_micrometres(1, "A step",
+                     ratio ? fieldstop::defocus_blur_fx(motor_step, ratio.value())
+                           : result<fieldstop::nanometres>(ratio.status()),
+                     2);
 }
 
 void draw_camera(const fieldstop::camera_readout &readout, uint8_t page)
