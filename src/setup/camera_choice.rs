@@ -193,16 +193,16 @@ fn choice(
         pixels_per_fwhm_q16: readout.pixels_per_fwhm_q16,
         ..Choice::default()
     };
-    for (theirs, ours) in [
-        (CameraReadout::FRAME_WIDTH, Choice::FRAME_WIDTH),
-        (CameraReadout::FRAME_HEIGHT, Choice::FRAME_HEIGHT),
-        (CameraReadout::PIXEL_SCALE, Choice::PIXEL_SCALE),
-        (CameraReadout::PIXELS_PER_FWHM, Choice::PIXELS_PER_FWHM),
-    ] {
+    // Not a loop over pairs, which would be a table in RAM on AVR.
+    let mut known = |theirs: u32, ours: u32| {
         if readout.available & theirs != 0 {
             out.available |= ours;
         }
-    }
+    };
+    known(CameraReadout::FRAME_WIDTH, Choice::FRAME_WIDTH);
+    known(CameraReadout::FRAME_HEIGHT, Choice::FRAME_HEIGHT);
+    known(CameraReadout::PIXEL_SCALE, Choice::PIXEL_SCALE);
+    known(CameraReadout::PIXELS_PER_FWHM, Choice::PIXELS_PER_FWHM);
     // A frame that is not available is 0, which `tiles` refuses.
     let tiles = |extent: u32, frame: u32| {
         let overlap = high(frame, target.overlap_q16 << 16);
