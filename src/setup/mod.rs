@@ -114,9 +114,11 @@ fn check_amplifiers(amplifiers: &[Q16]) -> Result<(), Error> {
 
 /// The telescope with none of the amplifiers, and with each, beside that one's place in the list; 255 for none.
 fn with_each(telescope: &Telescope, amplifiers: &[Q16]) -> impl Iterator<Item = (u8, Telescope)> {
-    let places = iter::once(NO_AMPLIFIER).chain(0..);
-    places
-        .zip(iter::once(&Q16::ONE).chain(amplifiers))
+    // Copies: a constant behind a reference would be in RAM on AVR.
+    let amplifications = iter::once(Q16::ONE).chain(amplifiers.iter().copied());
+    iter::once(NO_AMPLIFIER)
+        .chain(0..)
+        .zip(amplifications)
         .map(|(place, amplification)| (place, Telescope { amplification_q16: amplification.0, ..*telescope }))
 }
 
