@@ -151,7 +151,7 @@ impl Equipment for Camera {
             columns: fields.u16(),
             rows: fields.u16(),
             binning: fields.u8(),
-            padding: [0; 3],
+            ..Camera::default()
         }
     }
 
