@@ -7,6 +7,12 @@
 #include <stdlib.h>
 #include <string.h>
 
+/* On AVR an image has what its function needs, since all of it is more than the flash holds. */
+#ifndef __AVR__
+#define LAYOUT
+#define RECORDS
+#endif
+
 #ifdef __AVR__
 #define A_(pointer) put_argument(call, (uint16_t)(pointer), 2);
 #define L_(value) put_argument(call, (value), 4);
@@ -50,6 +56,19 @@ static fieldstop_newtonian_layout newtonian = {205000, 10000, 16700, 47000, 8500
 static fieldstop_newtonian_readout newtonian_values;
 static fieldstop_two_mirror_layout mirrors = {0, 150000, 10000};
 static fieldstop_two_mirror_readout mirror_values;
+
+/* A storage of two slots in RAM, and a record of one of everything but three eyepieces. */
+enum { RECORD = 320 };
+static uint8_t record[RECORD];
+static fieldstop_slot_pair places = {0, RECORD, RECORD, 1, {0, 0, 0}};
+static fieldstop_site site = {0x20000000, 0x10000000};
+static fieldstop_equipment_name name = {{'R', 'o', 'o', 'f', 0, 0, 0, 0, 0, 0, 0, 0}};
+static fieldstop_in_use in_use = {0, 0, 0, 0, 0, 0};
+static fieldstop_entry_state entry;
+static uint32_t quantity;
+static uint8_t small;
+static const char typed[] = "1187.5mm";
+
 static uint8_t is_whole;
 static uint16_t number;
 static uint32_t drawn, seed = 1;
@@ -60,6 +79,43 @@ static uint32_t next(void)
     seed ^= seed >> 17;
     return seed ^= seed << 5;
 }
+
+#ifdef RECORDS
+static uint8_t template[RECORD], storage[2 * RECORD], made;
+
+static fieldstop_status read_storage(void *context, uint32_t offset, uint8_t *bytes, uint16_t count)
+{
+    memcpy(bytes, (const uint8_t *)context + offset, count);
+    return 0;
+}
+
+static fieldstop_status write_storage(void *context, uint32_t offset, const uint8_t *bytes, uint16_t count)
+{
+    memcpy((uint8_t *)context + offset, bytes, count);
+    return 0;
+}
+
+static void make_record(void)
+{
+    fieldstop_eyepiece some = {13000, 16200, 0, 0, {0, 0, 0}};
+    uint8_t i;
+    fieldstop_status wrong = fieldstop_record_begin(template, RECORD);
+
+    wrong |= fieldstop_record_put_telescope(template, RECORD, 0, &telescope, &name);
+    for (i = 0; i < 3; i++) {
+        wrong |= fieldstop_record_put_eyepiece(template, RECORD, i, &some, &name);
+    }
+    wrong |= fieldstop_record_put_amplifier(template, RECORD, 0, 131072, &name);
+    wrong |= fieldstop_record_put_camera(template, RECORD, 0, &camera, &name);
+    wrong |= fieldstop_record_put_observer(template, RECORD, 0, &observer, &name);
+    wrong |= fieldstop_record_put_site(template, RECORD, 0, &site, &name);
+    wrong |= fieldstop_store_save(&places, read_storage, write_storage, NULL, storage, template, RECORD, FIELDSTOP_KEEP_NEWER);
+    if (wrong != 0) {
+        abort();
+    }
+    made = 1;
+}
+#endif
 
 static void prepare(uint16_t k)
 {
@@ -93,11 +149,19 @@ static void prepare(uint16_t k)
     }
     mirrors.primary_focal_um = of[FOCAL_LENGTH] / 3u;
     newtonian.focus_distance_um = of[FOCAL_LENGTH] / 5u;
+#ifdef LAYOUT
     if (fieldstop_focus_readout_compute(&telescope, &focuser, &observer, 0x7f, &focus) != 0
         || fieldstop_newtonian_readout_compute(&telescope, &newtonian, 0xff, &newtonian_values) != 0
         || fieldstop_two_mirror_readout_compute(&telescope, &mirrors, 0x7f, &mirror_values) != 0) {
         abort();
     }
+#endif
+#ifdef RECORDS
+    if (made == 0) {
+        make_record();
+    }
+    memcpy(record, template, sizeof record);
+#endif
     for (i = 0; i < 16; i++) {
         eyepieces[i].focal_length_um = 3000u + (i * 5u + k) % 16u * 2500u;
         eyepieces[i].field_stop_um = i % 2 ? 0 : eyepieces[i].focal_length_um / 5u * 4u;
@@ -124,6 +188,14 @@ static uint8_t *count_of(uint8_t room)
 #define VISUAL_ROW (number % FIELDSTOP_VISUAL_ROWS)
 #define CAMERA_ROW (number % FIELDSTOP_CAMERA_ROWS)
 
+#ifdef RECORDS
+#define STORE_ROWS \
+    ROW(store_load, A_(&places) A_(read_storage) A_(storage) A_(record) W_(RECORD) A_(&length)) \
+    ROW(store_save, A_(&places) A_(read_storage) A_(write_storage) A_(NULL) A_(storage) A_(record) W_(RECORD) B_(FIELDSTOP_KEEP_NEWER))
+#else
+#define STORE_ROWS
+#endif
+
 /* GIVER: gives an address, and has no argument. OTHER: gives something else than a status. */
 #define ROWS \
     ROW(telescope_check, A_(&telescope)) \
@@ -139,6 +211,31 @@ static uint8_t *count_of(uint8_t room)
     ROW(newtonian_readout_compute, A_(&telescope) A_(&newtonian) L_(0xff) A_(&newtonian_values)) \
     ROW(two_mirror_layout_check, A_(&mirrors)) \
     ROW(two_mirror_readout_compute, A_(&telescope) A_(&mirrors) L_(0x7f) A_(&mirror_values)) \
+    ROW(site_check, A_(&site)) \
+    ROW(slot_pair_check, A_(&places)) \
+    ROW(record_begin, A_(record) W_(RECORD)) \
+    ROW(record_check, A_(record) W_(RECORD)) \
+    ROW(record_get_length, A_(record) W_(RECORD) A_(&length)) \
+    ROW(record_get_count, A_(record) W_(RECORD) B_(FIELDSTOP_KIND_EYEPIECE) A_(&small)) \
+    ROW(record_get_name, A_(record) W_(RECORD) B_(FIELDSTOP_KIND_EYEPIECE) B_(number % 3) A_(&name)) \
+    ROW(record_get_in_use, A_(record) W_(RECORD) A_(&in_use)) \
+    ROW(record_get_telescope, A_(record) W_(RECORD) B_(0) A_(&telescope)) \
+    ROW(record_get_eyepiece, A_(record) W_(RECORD) B_(number % 3) A_(&eyepiece)) \
+    ROW(record_get_amplifier, A_(record) W_(RECORD) B_(0) A_(&quantity)) \
+    ROW(record_get_camera, A_(record) W_(RECORD) B_(0) A_(&camera)) \
+    ROW(record_get_observer, A_(record) W_(RECORD) B_(0) A_(&observer)) \
+    ROW(record_get_site, A_(record) W_(RECORD) B_(0) A_(&site)) \
+    ROW(record_put_telescope, A_(record) W_(RECORD) B_(0) A_(&telescope) A_(&name)) \
+    ROW(record_put_eyepiece, A_(record) W_(RECORD) B_(number % 3) A_(&eyepiece) A_(&name)) \
+    ROW(record_put_amplifier, A_(record) W_(RECORD) B_(0) L_(131072) A_(&name)) \
+    ROW(record_put_camera, A_(record) W_(RECORD) B_(0) A_(&camera) A_(&name)) \
+    ROW(record_put_observer, A_(record) W_(RECORD) B_(0) A_(&observer) A_(&name)) \
+    ROW(record_put_site, A_(record) W_(RECORD) B_(0) A_(&site) A_(&name)) \
+    ROW(record_put_in_use, A_(record) W_(RECORD) A_(&in_use)) \
+    ROW(record_remove, A_(record) W_(RECORD) B_(FIELDSTOP_KIND_EYEPIECE) B_(number % 3)) \
+    STORE_ROWS \
+    ROW(entry_read, A_(typed) W_(sizeof typed - 1) B_(FIELDSTOP_ENTRY_LENGTH) L_(0) STYLE A_(&quantity)) \
+    ROW(entry_check, A_(typed) W_(1 + number % (sizeof typed - 1)) B_(FIELDSTOP_ENTRY_LENGTH) L_(0) STYLE A_(&entry)) \
     ROW(text_count, L_(VALUE(camera.columns)) B_(FIELDSTOP_UNIT_PIXEL) PUT) \
     ROW(text_length_mm, L_(VALUE(visual.exit_pupil_um)) B_(1) PUT) \
     ROW(text_length_um, L_(VALUE(camera.pixel_nm)) B_(2) PUT) \
