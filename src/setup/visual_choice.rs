@@ -5,8 +5,9 @@ use super::{
 use crate::math::divide;
 use crate::math::multiply::wide;
 use crate::optics::field::{exit_pupil_fx, magnification_fx};
+use crate::optics::resolution::rayleigh_limit_obstructed_fx;
 use crate::status::{Cause, Error};
-use crate::units::{Microarcseconds, Micrometres, Q16};
+use crate::units::{Microarcseconds, Micrometres, Nanometres, Q16};
 use core::cmp::Ordering;
 
 /// What an eyepiece is wanted for.
@@ -214,7 +215,7 @@ impl VisualOutfit<'_> {
             return Err(Error::new(Cause::Zero, 9));
         }
 
-        let night = Night::new(self.telescope, observer, target)?;
+        let night = Night::new(self.telescope, observer, target);
         let order = |a: &VisualChoice, b: &VisualChoice| target.order(a, b);
         let mut ranking = Ranking::new(choices);
         for (amplifier, telescope) in with_each(self.telescope, self.amplifiers) {
@@ -229,21 +230,21 @@ impl VisualOutfit<'_> {
 }
 
 impl<'a> Night<'a> {
-    fn new(telescope: &Telescope, observer: &'a Observer, target: &'a VisualTarget) -> Result<Self, Error> {
-        let wanted = VisualReadout::RESOLUTION | VisualReadout::RESOLVING_MAGNIFICATION;
-        // Any eyepiece: neither value depends on it.
-        let eyepiece = Eyepiece { focal_length_um: 1, ..Eyepiece::default() };
-        let readout = VisualReadout::compute(telescope, &eyepiece, observer, wanted)?;
-        let known = |bit, value| (readout.available & bit != 0).then_some(value);
+    fn new(telescope: &Telescope, observer: &'a Observer, target: &'a VisualTarget) -> Self {
+        let aperture = Micrometres(telescope.aperture_um);
+        let obstruction = Micrometres(telescope.obstruction_um);
+        let resolution =
+            rayleigh_limit_obstructed_fx(aperture, obstruction, Nanometres(observer.wavelength_nm));
+        let resolving = resolution.and_then(|resolution| observer.resolving_magnification(resolution));
         let seeing = observer.resolving_magnification(Microarcseconds(observer.seeing_uas));
-        Ok(Night {
-            aperture: Micrometres(telescope.aperture_um),
+        Night {
+            aperture,
             target,
             observer,
-            resolution_uas: known(VisualReadout::RESOLUTION, readout.resolution_uas),
-            resolving_q16: known(VisualReadout::RESOLVING_MAGNIFICATION, readout.resolving_magnification_q16),
+            resolution_uas: resolution.ok().map(|limit| limit.0),
+            resolving_q16: resolving.ok().map(|magnification| magnification.0),
             seeing_q16: seeing.ok().map(|magnification| magnification.0),
-        })
+        }
     }
 
     fn choice(&self, focal_length: Result<Micrometres, Error>, eyepiece: &Eyepiece) -> VisualChoice {

@@ -9,7 +9,11 @@
 
 /* On AVR an image has what its function needs, since all of it is more than the flash holds. */
 #ifndef __AVR__
-#define LAYOUT
+#define VISUAL
+#define CAMERA
+#define FOCUS
+#define NEWTONIAN
+#define TWO_MIRROR
 #define RECORDS
 #endif
 
@@ -38,7 +42,12 @@ static fieldstop_camera camera = {3760, 6248, 4176, 1, {0, 0, 0}};
 static fieldstop_observer observer = {5300, 6500, 120000, 2000000, 550};
 static fieldstop_visual_readout visual;
 static fieldstop_camera_readout frame;
-static fieldstop_eyepiece eyepieces[16];
+#if defined(__AVR__) && defined(RECORDS)
+enum { EYEPIECES = 1, KEPT = 1, RECORD = 200 }; /* RAM for the storage */
+#else
+enum { EYEPIECES = 16, KEPT = 3, RECORD = 320 };
+#endif
+static fieldstop_eyepiece eyepieces[EYEPIECES];
 static const uint32_t amplifiers[8] = {98304, 131072, 163840, 196608, 327680, 41288, 52429, 58982};
 static fieldstop_visual_target target = {1800000, 81920, 2000000, 2000, FIELDSTOP_PURPOSE_FRAME, {0, 0, 0}};
 static fieldstop_camera_target field = {10800000, 3600000, 9830};
@@ -57,8 +66,7 @@ static fieldstop_newtonian_readout newtonian_values;
 static fieldstop_two_mirror_layout mirrors = {0, 150000, 10000};
 static fieldstop_two_mirror_readout mirror_values;
 
-/* A storage of two slots in RAM, and a record of one of everything but three eyepieces. */
-enum { RECORD = 320 };
+/* A storage of two slots in RAM, and a record of one of everything but some eyepieces. */
 static uint8_t record[RECORD];
 static fieldstop_slot_pair places = {0, RECORD, RECORD, 1, {0, 0, 0}};
 static fieldstop_site site = {0x20000000, 0x10000000};
@@ -102,7 +110,7 @@ static void make_record(void)
     fieldstop_status wrong = fieldstop_record_begin(template, RECORD);
 
     wrong |= fieldstop_record_put_telescope(template, RECORD, 0, &telescope, &name);
-    for (i = 0; i < 3; i++) {
+    for (i = 0; i < KEPT; i++) {
         wrong |= fieldstop_record_put_eyepiece(template, RECORD, i, &some, &name);
     }
     wrong |= fieldstop_record_put_amplifier(template, RECORD, 0, 131072, &name);
@@ -133,10 +141,16 @@ static void prepare(uint16_t k)
     telescope.obstruction_um = k % 2 ? of[APERTURE] / 4 : 0;
     eyepiece.focal_length_um = of[EYEPIECE];
     eyepiece.field_stop_um = of[FIELD_STOP];
-    if (fieldstop_visual_readout_compute(&telescope, &eyepiece, &observer, 0xfff, &visual) != 0
-        || fieldstop_camera_readout_compute(&telescope, &camera, &observer, 0x1ff, &frame) != 0) {
+#ifdef VISUAL
+    if (fieldstop_visual_readout_compute(&telescope, &eyepiece, &observer, 0xfff, &visual) != 0) {
         abort();
     }
+#endif
+#ifdef CAMERA
+    if (fieldstop_camera_readout_compute(&telescope, &camera, &observer, 0x1ff, &frame) != 0) {
+        abort();
+    }
+#endif
     if (is_whole) {
         uint32_t *member;
         for (member = (uint32_t *)&visual; member < (uint32_t *)(&visual + 1); member++) {
@@ -149,10 +163,18 @@ static void prepare(uint16_t k)
     }
     mirrors.primary_focal_um = of[FOCAL_LENGTH] / 3u;
     newtonian.focus_distance_um = of[FOCAL_LENGTH] / 5u;
-#ifdef LAYOUT
-    if (fieldstop_focus_readout_compute(&telescope, &focuser, &observer, 0x7f, &focus) != 0
-        || fieldstop_newtonian_readout_compute(&telescope, &newtonian, 0xff, &newtonian_values) != 0
-        || fieldstop_two_mirror_readout_compute(&telescope, &mirrors, 0x7f, &mirror_values) != 0) {
+#ifdef FOCUS
+    if (fieldstop_focus_readout_compute(&telescope, &focuser, &observer, 0x7f, &focus) != 0) {
+        abort();
+    }
+#endif
+#ifdef NEWTONIAN
+    if (fieldstop_newtonian_readout_compute(&telescope, &newtonian, 0xff, &newtonian_values) != 0) {
+        abort();
+    }
+#endif
+#ifdef TWO_MIRROR
+    if (fieldstop_two_mirror_readout_compute(&telescope, &mirrors, 0x7f, &mirror_values) != 0) {
         abort();
     }
 #endif
@@ -162,7 +184,7 @@ static void prepare(uint16_t k)
     }
     memcpy(record, template, sizeof record);
 #endif
-    for (i = 0; i < 16; i++) {
+    for (i = 0; i < EYEPIECES; i++) {
         eyepieces[i].focal_length_um = 3000u + (i * 5u + k) % 16u * 2500u;
         eyepieces[i].field_stop_um = i % 2 ? 0 : eyepieces[i].focal_length_um / 5u * 4u;
         eyepieces[i].apparent_field_mas = 216000000u;
@@ -217,22 +239,22 @@ static uint8_t *count_of(uint8_t room)
     ROW(record_check, A_(record) W_(RECORD)) \
     ROW(record_get_length, A_(record) W_(RECORD) A_(&length)) \
     ROW(record_get_count, A_(record) W_(RECORD) B_(FIELDSTOP_KIND_EYEPIECE) A_(&small)) \
-    ROW(record_get_name, A_(record) W_(RECORD) B_(FIELDSTOP_KIND_EYEPIECE) B_(number % 3) A_(&name)) \
+    ROW(record_get_name, A_(record) W_(RECORD) B_(FIELDSTOP_KIND_EYEPIECE) B_(number % KEPT) A_(&name)) \
     ROW(record_get_in_use, A_(record) W_(RECORD) A_(&in_use)) \
     ROW(record_get_telescope, A_(record) W_(RECORD) B_(0) A_(&telescope)) \
-    ROW(record_get_eyepiece, A_(record) W_(RECORD) B_(number % 3) A_(&eyepiece)) \
+    ROW(record_get_eyepiece, A_(record) W_(RECORD) B_(number % KEPT) A_(&eyepiece)) \
     ROW(record_get_amplifier, A_(record) W_(RECORD) B_(0) A_(&quantity)) \
     ROW(record_get_camera, A_(record) W_(RECORD) B_(0) A_(&camera)) \
     ROW(record_get_observer, A_(record) W_(RECORD) B_(0) A_(&observer)) \
     ROW(record_get_site, A_(record) W_(RECORD) B_(0) A_(&site)) \
     ROW(record_put_telescope, A_(record) W_(RECORD) B_(0) A_(&telescope) A_(&name)) \
-    ROW(record_put_eyepiece, A_(record) W_(RECORD) B_(number % 3) A_(&eyepiece) A_(&name)) \
+    ROW(record_put_eyepiece, A_(record) W_(RECORD) B_(number % KEPT) A_(&eyepiece) A_(&name)) \
     ROW(record_put_amplifier, A_(record) W_(RECORD) B_(0) L_(131072) A_(&name)) \
     ROW(record_put_camera, A_(record) W_(RECORD) B_(0) A_(&camera) A_(&name)) \
     ROW(record_put_observer, A_(record) W_(RECORD) B_(0) A_(&observer) A_(&name)) \
     ROW(record_put_site, A_(record) W_(RECORD) B_(0) A_(&site) A_(&name)) \
     ROW(record_put_in_use, A_(record) W_(RECORD) A_(&in_use)) \
-    ROW(record_remove, A_(record) W_(RECORD) B_(FIELDSTOP_KIND_EYEPIECE) B_(number % 3)) \
+    ROW(record_remove, A_(record) W_(RECORD) B_(FIELDSTOP_KIND_EYEPIECE) B_(number % KEPT)) \
     STORE_ROWS \
     ROW(entry_read, A_(typed) W_(sizeof typed - 1) B_(FIELDSTOP_ENTRY_LENGTH) L_(0) STYLE A_(&quantity)) \
     ROW(entry_check, A_(typed) W_(1 + number % (sizeof typed - 1)) B_(FIELDSTOP_ENTRY_LENGTH) L_(0) STYLE A_(&entry)) \
