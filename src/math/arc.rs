@@ -117,7 +117,9 @@ pub(crate) fn angle_of_ratio(n: u64, d: u64) -> u32 {
 
 /// 2 atan(n / (d 2^down)) in milliarcseconds, at most 1 from the exact value, with all bits of both. Neither is 0; n is
 /// at most (2^32 - 1)^2, and `down` from 1 to 31.
-#[inline(never)]
+// Not a call on AVR, where the compiler would give it more arguments than arrive (see `divide::by_64`).
+#[cfg_attr(target_arch = "avr", inline(always))]
+#[cfg_attr(not(target_arch = "avr"), inline(never))]
 pub(crate) fn angle_of_wide(n: u64, d: u64, down: u32) -> u32 {
     if let Ok(ratio) = by_64((n >> 32) as u32 >> down, shift_up(n, 32 - down), d) {
         return twice_arctangent(ratio);

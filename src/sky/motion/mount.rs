@@ -17,7 +17,9 @@ use crate::units::{
 };
 
 /// w x / cosine with a sign, both in steps of 2^-62.
-#[inline(never)]
+// Not a call on AVR, where the compiler would give it more arguments than arrive (see `divide::by_64`).
+#[cfg_attr(target_arch = "avr", inline(always))]
+#[cfg_attr(not(target_arch = "avr"), inline(never))]
 fn rate_over(x: u64, cosine: u64, negative: bool) -> Result<SignedMicroarcsecondsPerSecond, Error> {
     let (upper, lower) = wide_by(x, RATE); // 2^-70
     let size = divide::by_64(upper >> 8, (upper as u64) << 56 | lower >> 8, cosine)? as i64;
