@@ -107,6 +107,7 @@ template <typename value_type> struct given_as {
 
 /** A value, or the status that tells why there is none. */
 struct access;
+struct plain_access {};
 template <typename value_type> class FIELDSTOP_CHECKED_TYPE result {
 public:
     FIELDSTOP_INLINE constexpr explicit result(value_type value) : value_(value), number_(0) {}
@@ -128,6 +129,8 @@ private:
     }
     /** What C is to fill. */
     FIELDSTOP_INLINE explicit result(const access &blank) : value_(blank) {}
+    /** The same for a struct of C's. */
+    FIELDSTOP_INLINE explicit result(const plain_access &) {}
     value_type value_;
     fieldstop_status number_;
 };
@@ -146,6 +149,8 @@ struct access {
     {
         return &of.value_.raw_;
     }
+    template <typename value_type> FIELDSTOP_INLINE static result<value_type> plain_blank() { return result<value_type>(plain_access()); }
+    template <typename value_type> FIELDSTOP_INLINE static value_type *plain_place(result<value_type> &of) { return &of.value_; }
     template <typename value_type> FIELDSTOP_INLINE static void finish(result<value_type> &of, fieldstop_status number)
     {
         of.number_ = number;
@@ -907,6 +912,10 @@ constexpr uint8_t entry_sixty = FIELDSTOP_ENTRY_SIXTY;
 constexpr uint8_t entry_no_aperture = FIELDSTOP_ENTRY_NO_APERTURE;
 
 /** A telescope: objective or primary mirror, with the Barlow or reducer that is in use */
+class telescope;
+template <> struct given_as<telescope> {
+    typedef const telescope &type;
+};
 class telescope {
 public:
     /** Every member 0. */
@@ -953,6 +962,10 @@ private:
 static_assert(sizeof(telescope) == sizeof(::fieldstop_telescope), "no more than in C");
 
 /** An eyepiece */
+class eyepiece;
+template <> struct given_as<eyepiece> {
+    typedef const eyepiece &type;
+};
 class eyepiece {
 public:
     /** Every member 0. */
@@ -993,6 +1006,10 @@ private:
 static_assert(sizeof(eyepiece) == sizeof(::fieldstop_eyepiece), "no more than in C");
 
 /** A camera at the focus */
+class camera;
+template <> struct given_as<camera> {
+    typedef const camera &type;
+};
 class camera {
 public:
     /** Every member 0. */
@@ -1033,6 +1050,10 @@ private:
 static_assert(sizeof(camera) == sizeof(::fieldstop_camera), "no more than in C");
 
 /** An eye and the night that it observes in */
+class observer;
+template <> struct given_as<observer> {
+    typedef const observer &type;
+};
 class observer {
 public:
     /** Every member 0. */
@@ -1079,6 +1100,10 @@ private:
 static_assert(sizeof(observer) == sizeof(::fieldstop_observer), "no more than in C");
 
 /** A place to observe from */
+class site;
+template <> struct given_as<site> {
+    typedef const site &type;
+};
 class site {
 public:
     /** Every member 0. */
@@ -1273,6 +1298,10 @@ private:
 static_assert(sizeof(camera_readout) == sizeof(::fieldstop_camera_readout), "no more than in C");
 
 /** What an eyepiece is wanted for */
+class visual_target;
+template <> struct given_as<visual_target> {
+    typedef const visual_target &type;
+};
 class visual_target {
 public:
     /** Every member 0. */
@@ -1368,6 +1397,10 @@ private:
 static_assert(sizeof(visual_choice) == sizeof(::fieldstop_visual_choice), "no more than in C");
 
 /** What a camera is to take */
+class camera_target;
+template <> struct given_as<camera_target> {
+    typedef const camera_target &type;
+};
 class camera_target {
 public:
     /** Every member 0. */
@@ -1453,6 +1486,10 @@ private:
 static_assert(sizeof(camera_choice) == sizeof(::fieldstop_camera_choice), "no more than in C");
 
 /** Where things are in a Newtonian telescope, and how it stands */
+class newtonian_layout;
+template <> struct given_as<newtonian_layout> {
+    typedef const newtonian_layout &type;
+};
 class newtonian_layout {
 public:
     /** Every member 0. */
@@ -1529,6 +1566,10 @@ private:
 static_assert(sizeof(newtonian_layout) == sizeof(::fieldstop_newtonian_layout), "no more than in C");
 
 /** What a telescope of two mirrors with a convex secondary is made of */
+class two_mirror_layout;
+template <> struct given_as<two_mirror_layout> {
+    typedef const two_mirror_layout &type;
+};
 class two_mirror_layout {
 public:
     /** Every member 0. */
@@ -1563,6 +1604,10 @@ private:
 static_assert(sizeof(two_mirror_layout) == sizeof(::fieldstop_two_mirror_layout), "no more than in C");
 
 /** A focuser, and the tube whose length moves the focus */
+class focuser;
+template <> struct given_as<focuser> {
+    typedef const focuser &type;
+};
 class focuser {
 public:
     /** Every member 0. */
@@ -1783,21 +1828,39 @@ static_assert(sizeof(two_mirror_readout) == sizeof(::fieldstop_two_mirror_readou
 
 /** What the owner calls a piece of equipment: up to 12 bytes in the characters of the owner's display */
 typedef ::fieldstop_equipment_name equipment_name;
+template <> struct given_as<equipment_name> {
+    typedef const equipment_name &type;
+};
 
 /** Which entry of each kind is in use: its index, or 255 for none */
 typedef ::fieldstop_in_use in_use;
+template <> struct given_as<in_use> {
+    typedef const in_use &type;
+};
 
 /** Two places for a record in a storage */
 typedef ::fieldstop_slot_pair slot_pair;
+template <> struct given_as<slot_pair> {
+    typedef const slot_pair &type;
+};
 
 /** The look of all text */
 typedef ::fieldstop_text_style text_style;
+template <> struct given_as<text_style> {
+    typedef const text_style &type;
+};
 
 /** A part of a line, in characters */
 typedef ::fieldstop_span span;
+template <> struct given_as<span> {
+    typedef const span &type;
+};
 
 /** What an entry is worth */
 typedef ::fieldstop_entry_state entry_state;
+template <> struct given_as<entry_state> {
+    typedef const entry_state &type;
+};
 /* What can go wrong. The numbers are frozen: they are the `fieldstop_status` of the C interface. */
 
 /** Gives a static English sentence for the cause in a status; never null. */
@@ -4311,17 +4374,17 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint8_t> record_get_count(const uint8_
 /** Gives the name of an entry. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<equipment_name> record_get_name(const uint8_t *record, uint16_t length, uint8_t kind, uint8_t index)
 {
-    fieldstop_equipment_name given;
-    const fieldstop_status number = ::fieldstop_record_get_name(record, length, kind, index, &given);
-    return access::given<equipment_name>(number, given);
+    result<equipment_name> given = access::plain_blank<equipment_name>();
+    access::finish(given, ::fieldstop_record_get_name(record, length, kind, index, access::plain_place(given)));
+    return given;
 }
 
 /** Gives which entries are in use. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<in_use> record_get_in_use(const uint8_t *record, uint16_t length)
 {
-    fieldstop_in_use given;
-    const fieldstop_status number = ::fieldstop_record_get_in_use(record, length, &given);
-    return access::given<in_use>(number, given);
+    result<in_use> given = access::plain_blank<in_use>();
+    access::finish(given, ::fieldstop_record_get_in_use(record, length, access::plain_place(given)));
+    return given;
 }
 
 /** Gives a telescope, of a record. */
@@ -4645,9 +4708,9 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint16_t> text_camera_unit(const camer
 /** Gives the part of a line that is different from what is shown, in characters. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<span> text_changed(const char *shown, uint16_t shown_length, const char *line, uint16_t line_length, const text_style &style)
 {
-    fieldstop_span given;
-    const fieldstop_status number = ::fieldstop_text_changed(shown, shown_length, line, line_length, &style, &given);
-    return access::given<span>(number, given);
+    result<span> given = access::plain_blank<span>();
+    access::finish(given, ::fieldstop_text_changed(shown, shown_length, line, line_length, &style, access::plain_place(given)));
+    return given;
 }
 
 /** Gives a caution in English, one of FIELDSTOP_CAUTION_...; an empty text for any other number, never null. */
@@ -4815,9 +4878,9 @@ FIELDSTOP_CHECKED FIELDSTOP_INLINE result<uint32_t> entry_read(const char *text,
 /** Tells whether what a person has typed so far is complete, partial or wrong, with the reason and the place. */
 FIELDSTOP_CHECKED FIELDSTOP_INLINE result<entry_state> entry_check(const char *text, uint16_t text_length, uint8_t kind, micrometres aperture_um, const text_style &style)
 {
-    fieldstop_entry_state given;
-    const fieldstop_status number = ::fieldstop_entry_check(text, text_length, kind, aperture_um.count(), &style, &given);
-    return access::given<entry_state>(number, given);
+    result<entry_state> given = access::plain_blank<entry_state>();
+    access::finish(given, ::fieldstop_entry_check(text, text_length, kind, aperture_um.count(), &style, access::plain_place(given)));
+    return given;
 }
 } // namespace fieldstop
 

@@ -83,6 +83,7 @@ template <typename value_type> struct given_as {
 
 /** A value, or the status that tells why there is none. */
 struct access;
+struct plain_access {};
 template <typename value_type> class FIELDSTOP_CHECKED_TYPE result {
 public:
     FIELDSTOP_INLINE constexpr explicit result(value_type value) : value_(value), number_(0) {}
@@ -104,6 +105,8 @@ private:
     }
     /** What C is to fill. */
     FIELDSTOP_INLINE explicit result(const access &blank) : value_(blank) {}
+    /** The same for a struct of C's. */
+    FIELDSTOP_INLINE explicit result(const plain_access &) {}
     value_type value_;
     fieldstop_status number_;
 };
@@ -122,6 +125,8 @@ struct access {
     {
         return &of.value_.raw_;
     }
+    template <typename value_type> FIELDSTOP_INLINE static result<value_type> plain_blank() { return result<value_type>(plain_access()); }
+    template <typename value_type> FIELDSTOP_INLINE static value_type *plain_place(result<value_type> &of) { return &of.value_; }
     template <typename value_type> FIELDSTOP_INLINE static void finish(result<value_type> &of, fieldstop_status number)
     {
         of.number_ = number;

@@ -161,17 +161,11 @@ fn structs(declared: &Declared) -> String {
         let (c_name, name) = (&of.name, short(&of.name));
         writeln!(text, "/** {} */", sentence(&of.comment)).unwrap();
         if !typed(of) {
-            writeln!(text, "typedef ::{c_name} {name};\n").unwrap();
+            writeln!(text, "typedef ::{c_name} {name};\n{}\n", by_reference(&name)).unwrap();
             continue;
         }
         let readout = of.members.iter().any(|member| member.name == "available");
-        if readout {
-            writeln!(
-                text,
-                "class {name};\ntemplate <> struct given_as<{name}> {{\n    typedef const {name} &type;\n}};"
-            )
-            .unwrap();
-        }
+        writeln!(text, "class {name};\n{}", by_reference(&name)).unwrap();
         writeln!(text, "class {name} {{\npublic:").unwrap();
         if !readout {
             writeln!(
@@ -202,6 +196,11 @@ fn structs(declared: &Declared) -> String {
         writeln!(text, "    ::{c_name} raw_;\n}};\nstatic_assert(sizeof({name}) == sizeof(::{c_name}), \"no more than in C\");\n").unwrap();
     }
     text
+}
+
+/// A result gives a struct where it lies, without a copy.
+fn by_reference(name: &str) -> String {
+    format!("template <> struct given_as<{name}> {{\n    typedef const {name} &type;\n}};")
 }
 
 fn member_of(
@@ -331,6 +330,9 @@ fn function(declared: &Declared, of: &Function) -> String {
             match wrapped(declared, pointee) {
                 Some((value, true)) => format!(
                     "FIELDSTOP_CHECKED FIELDSTOP_INLINE result<{value}> {name}({taken})\n{{\n    result<{value}> given = access::blank<{value}>();\n    access::finish(given, ::{c_name}({given}access::place(given)));\n    return given;\n}}\n"
+                ),
+                Some((value, false)) => format!(
+                    "FIELDSTOP_CHECKED FIELDSTOP_INLINE result<{value}> {name}({taken})\n{{\n    result<{value}> given = access::plain_blank<{value}>();\n    access::finish(given, ::{c_name}({given}access::plain_place(given)));\n    return given;\n}}\n"
                 ),
                 small => {
                     let value = small.map(|(class, _)| class.to_string()).or(quantity(pointee, &out.name));
