@@ -152,6 +152,9 @@ fn readouts(input: &mut Input) -> (VisualReadout, CameraReadout) {
         plate_scale_mas_per_mm: input.any(),
         star_fwhm_uas: input.any(),
         pixels_per_fwhm_q16: input.any(),
+        cutoff_frequency_q16: input.any(),
+        nyquist_pixel_nm: input.any(),
+        diagonal_mas: input.any(),
     };
     (visual, camera)
 }
