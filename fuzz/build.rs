@@ -35,13 +35,16 @@ fn call(subject: &str, function: &str) -> String {
         .collect();
     let mut code = format!("    |input| {{ // {name}\n");
     // From the last: the size of a buffer stands behind it.
-    let mut size = None;
+    let mut size: Option<&str> = None;
     for (name, kind) in arguments.iter().rev() {
         let is_pointer = kind.starts_with('*');
         let value = match size.take() {
             // Given to the caller's functions as it is, and may be null.
             _ if *name == "context" => "std::ptr::null_mut()".to_string(),
             _ if *kind == "*const *const c_char" => "input.texts()".to_string(),
+            _ if *name == "sentence" => "input.text()".to_string(),
+            // May be null where the count behind it is 0.
+            Some(size) if is_pointer && size.ends_with("_count") => format!("input.list({size} as usize)"),
             // As many as the byte behind it may say.
             _ if *name == "choices" => "input.take(255)".to_string(),
             Some(size) if is_pointer => format!("input.take({size} as usize)"),

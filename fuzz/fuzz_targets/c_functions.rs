@@ -67,6 +67,14 @@ impl Input<'_> {
             self.nulls = true;
             return std::ptr::null_mut();
         }
+        self.block(count, constant)
+    }
+
+    fn list<T>(&mut self, count: usize) -> *const T {
+        self.block(count, true)
+    }
+
+    fn block<T>(&mut self, count: usize, constant: bool) -> *mut T {
         let size = count * size_of::<T>();
         let layout = Layout::from_size_align(size.max(1), align_of::<T>()).unwrap();
         let (given, rest) = self.bytes.split_at(size.min(self.bytes.len()));
@@ -85,13 +93,18 @@ impl Input<'_> {
             return std::ptr::null();
         }
         for _ in 0..TEXTS {
-            let length = self.byte() % 40;
-            let text: Vec<u8> =
-                (0..length).map(|_| self.byte()).filter(|byte| *byte != 0).chain([0]).collect();
-            self.texts.push(text);
+            self.text();
         }
         self.pointers = self.texts.iter().map(|text| text.as_ptr().cast()).collect();
         self.pointers.as_ptr()
+    }
+
+    /// A text with the zero byte at its end.
+    fn text(&mut self) -> *const c_char {
+        let length = self.byte() % 40;
+        let text: Vec<u8> = (0..length).map(|_| self.byte()).filter(|byte| *byte != 0).chain([0]).collect();
+        self.texts.push(text);
+        self.texts.last().unwrap().as_ptr().cast()
     }
 
     fn check(&self, status: u16) {
